@@ -1,0 +1,386 @@
+import type { ProblemData } from '../problems/index.ts';
+import type { Node } from './build.ts';
+import type { Kind, Law, Laws, Way, When } from './define.ts';
+
+/** A number of the case as given: SI value, 95 % half-width (relative or absolute), whether it was given or assumed. */
+export interface Given {
+  readonly value: number | string;
+  readonly kind?: Kind;
+  readonly half?: number;
+  readonly relative?: boolean;
+}
+
+/** A way bound to slots: indices in place of names, and its argument, filled again each time. */
+export interface Bound {
+  readonly way: Way;
+  readonly needs: Int32Array;
+  readonly ids: readonly string[];
+  readonly when: readonly { readonly slot: number; readonly words: readonly string[] }[];
+  readonly closes: number;
+  readonly of: Record<string, number>;
+  readonly laws: Laws;
+  /** Index of its own scatter in the list of sources of spread, or -1. */
+  readonly source: number;
+}
+/** What a spread comes from: an input, the scatter of a way, the uncertainty of a property. */
+export interface Source {
+  readonly key: string;
+  readonly label: string;
+  readonly kind: 'input' | 'scatter' | 'property';
+}
+export interface Slot {
+  readonly id: string;
+  readonly node: Node;
+  readonly isWord: boolean;
+  ways: Bound[];
+}
+/** How a loop was closed. */
+export interface Closed {
+  readonly passes: number;
+  readonly change: number;
+}
+
+const mostPasses = 80;
+
+/** All quantities of a case, resolved on demand. Replace given numbers by `set` and ask again: the same graph serves every point of a sweep. */
+export class Workings {
+  readonly slots: Slot[] = [];
+  readonly sources: Source[] = [];
+  readonly closed = new Map<number, Closed>();
+  readonly failures = new Map<number, ProblemData>();
+  readonly index = new Map<string, number>();
+  readonly used: (Bound | undefined)[] = [];
+  readonly given: (Given | undefined)[] = [];
+  readonly #value: Float64Array;
+  readonly #word: (string | undefined)[] = [];
+  readonly #stamp: Int32Array;
+  /** Deviation of each source in units of its 95 % half-width; all zero at the nominal point. */
+  readonly #shift: Float64Array;
+  readonly #inputSource: Int32Array;
+  readonly #pinned: Uint8Array;
+  /** What a pinned quantity is set to, before any shift. */
+  readonly #base: Float64Array;
+  /** The slots each source of spread acts on directly. */
+  readonly #acts: number[][] = [];
+  readonly #round = 2;
+  #next: Int32Array[] | undefined;
+  readonly #followers = new Map<number, Int32Array>();
+  #knowable: Uint8Array | undefined;
+
+  constructor(nodes: ReadonlyMap<string, Node>, given: Readonly<Record<string, Given>>, laws: Laws = {}) {
+    for (const node of nodes.values()) this.index.set(node.id, this.slots.push({ id: node.id, node, isWord: node.about.unit === 'word', ways: [] }) - 1);
+    const n = this.slots.length;
+    this.#value = new Float64Array(n);
+    this.#stamp = new Int32Array(n);
+    this.#pinned = new Uint8Array(n);
+    this.#base = new Float64Array(n);
+    this.#inputSource = new Int32Array(n).fill(-1);
+    const sourceOf = new Map<unknown, number>();
+    const source = (key: unknown, s: Source): number => {
+      let i = sourceOf.get(key);
+      if (i === undefined) {
+        sourceOf.set(key, (i = this.sources.push(s) - 1));
+        this.#acts.push([]);
+      }
+      return i;
+    };
+    for (const [id, g] of Object.entries(given)) {
+      const i = this.index.get(id);
+      if (i === undefined) continue;
+      this.given[i] = g;
+      this.#pinned[i] = 1;
+      if (typeof g.value === 'string') this.#word[i] = g.value;
+      else this.#base[i] = g.value;
+      if (g.half !== undefined && g.half > 0) {
+        const s = source(id, { key: id, label: id, kind: 'input' });
+        this.#inputSource[i] = s;
+        this.#acts[s]?.push(i);
+      }
+    }
+    const shifted = this.#shiftedLaws(laws, source);
+    for (const slot of this.slots) {
+      slot.ways = slot.node.ways
+        .filter((w) => (w.way.laws ?? []).every((l) => laws[l] !== undefined))
+        .map(({ way, needs, when, closes }): Bound => ({
+          way,
+          ids: needs,
+          needs: Int32Array.from(needs, (id) => this.index.get(id) as number),
+          when: this.#conditions(when),
+          closes: closes === undefined ? -1 : (this.index.get(closes) as number),
+          of: Object.fromEntries(way.needs.map((id) => [id, Number.NaN])),
+          laws: shifted,
+          source: way.scatter === undefined ? -1 : source(way.together ?? way, { key: way.together ?? `${slot.id}: ${way.formula}`, label: way.source, kind: 'scatter' }),
+        }));
+      for (const b of slot.ways) {
+        if (b.source >= 0) this.#acts[b.source]?.push(this.index.get(slot.id) as number);
+        for (const l of b.way.laws ?? []) this.#acts[sourceOf.get(`law ${l}`) as number]?.push(this.index.get(slot.id) as number);
+      }
+    }
+    this.#shift = new Float64Array(this.sources.length);
+  }
+
+  #shiftedLaws(laws: Laws, source: (key: unknown, s: Source) => number): Laws {
+    const out: Record<string, Law> = {};
+    for (const [name, law] of Object.entries(laws)) {
+      const i = source(`law ${name}`, { key: name, label: name, kind: 'property' });
+      out[name] = Object.assign((t: number, p: number) => { const s = this.#shift[i] as number; return s === 0 ? law(t, p) : law(t, p) * (1 + law.uncertainty(t, p)) ** s; }, { uncertainty: law.uncertainty });
+    }
+    return out;
+  }
+
+  #conditions(when: When | undefined): Bound['when'] {
+    return Object.entries(when ?? {}).map(([id, words]) => ({ slot: this.index.get(id) as number, words: typeof words === 'string' ? [words] : words }));
+  }
+
+  has(id: string): boolean { return this.index.has(id); }
+
+  /** Number of a quantity, or undefined where it cannot be had. */
+  get(id: string): number | undefined {
+    const i = this.index.get(id);
+    return i === undefined || !this.#of(i) ? undefined : (this.#value[i] as number);
+  }
+
+  /** Word of a word quantity, or undefined. */
+  word(id: string): string | undefined {
+    const i = this.index.get(id);
+    return i === undefined || !this.#of(i) ? undefined : this.#word[i];
+  }
+
+  known(i: number): boolean { return this.#of(i); }
+  value(i: number): number { return this.#value[i] as number; }
+  wordAt(i: number): string | undefined { return this.#word[i]; }
+
+  /** Pins a quantity to a number or word, whatever its ways say; `undefined` frees it again. */
+  set(id: string, value: number | string | undefined): void {
+    const i = this.index.get(id);
+    if (i === undefined) return;
+    const pin = value === undefined ? 0 : 1;
+    if (typeof value === 'string') this.#word[i] = value;
+    else if (value !== undefined) this.#base[i] = value;
+    if (this.#pinned[i] !== pin) this.#knowable = undefined;
+    this.#pinned[i] = pin;
+    this.#forget(i);
+  }
+
+  isPinned(i: number): boolean { return this.#pinned[i] === 1; }
+
+  /** Moves one source of spread by so many 95 % half-widths. */
+  shift(source: number, by: number): void {
+    if (this.#shift[source] === by) return;
+    this.#shift[source] = by;
+    for (const i of this.#acts[source] ?? []) this.#forget(i);
+  }
+
+  /** The slots a source of spread acts on, and all that follows from them. */
+  reach(source: number): Set<number> {
+    const out = new Set<number>();
+    for (const i of this.#acts[source] ?? []) for (const f of this.followers(i)) out.add(f);
+    return out;
+  }
+
+  /** A quantity and all that follows from it are asked again. */
+  #forget(i: number): void {
+    for (const f of this.followers(i)) {
+      this.#stamp[f] = 0;
+      this.failures.delete(f);
+    }
+  }
+
+  /** Slots whose ways reach the slot, in any number of steps. */
+  followers(i: number): Int32Array {
+    let found = this.#followers.get(i);
+    if (found === undefined) {
+      this.#next ??= this.#reverse();
+      const seen = new Set<number>([i]);
+      for (const at of seen) for (const f of this.#next[at] as Int32Array) seen.add(f);
+      this.#followers.set(i, (found = Int32Array.from(seen)));
+    }
+    return found;
+  }
+
+  #reverse(): Int32Array[] {
+    const back: number[][] = this.slots.map(() => []);
+    this.slots.forEach((slot, i) => {
+      for (const b of slot.ways) {
+        for (const n of b.needs) back[n]?.push(i);
+        for (const w of b.when) back[w.slot]?.push(i);
+        if (b.closes >= 0) back[b.closes]?.push(i);
+      }
+    });
+    return back.map((s) => Int32Array.from(s));
+  }
+
+  /** What can be known at all, whatever the numbers: a fixpoint, so that loops hide nothing and nothing is asked in vain. */
+  #canKnow(): Uint8Array {
+    const can = Uint8Array.from(this.#pinned);
+    for (let more = true; more; ) {
+      more = false;
+      this.slots.forEach((slot, i) => {
+        if (can[i] === 0 && slot.ways.some((b) => b.needs.every((n) => can[n] === 1) && b.when.every((w) => can[w.slot] === 1))) {
+          can[i] = 1;
+          more = true;
+        }
+      });
+    }
+    return can;
+  }
+
+  // Stamps: the round means known, the round + 1 being asked (meeting it again is a loop: that way is not taken here), the negative round cannot be had.
+  #of(i: number): boolean {
+    const stamp = this.#stamp[i] as number;
+    if (stamp === this.#round) return true;
+    if (stamp === -this.#round || stamp === this.#round + 1) return false;
+    const slot = this.slots[i] as Slot;
+    if (this.#pinned[i] === 1) return this.#takeGiven(i, slot);
+    this.#knowable ??= this.#canKnow();
+    if (this.#knowable[i] === 0) return false;
+    this.#stamp[i] = this.#round + 1;
+    let nearest: Bound | undefined;
+    let least = Number.POSITIVE_INFINITY;
+    let looped = false;
+    for (const b of slot.ways) {
+      const ready = this.#ready(b);
+      if (ready === 'loop') looped = true;
+      if (ready !== true) continue;
+      const far = this.#outside(b);
+      if (far === 0 && this.#take(i, slot, b, 1)) return true;
+      if (far > 0 && far < least) { least = far; nearest = b; }
+    }
+    if (nearest !== undefined && this.#take(i, slot, nearest, 2)) return true;
+    this.used[i] = undefined;
+    // What failed only because a quantity above is being asked may still be had by another route.
+    this.#stamp[i] = looped ? 0 : -this.#round;
+    return false;
+  }
+
+  #takeGiven(i: number, slot: Slot): boolean {
+    const g = this.given[i];
+    const s = this.#inputSource[i] as number;
+    if (!slot.isWord) {
+      const by = s < 0 ? 0 : (this.#shift[s] as number);
+      const base = this.#base[i] as number;
+      const half = g?.half ?? 0;
+      this.#value[i] = by === 0 ? base : g?.relative === true ? base * (1 + half) ** by : base + half * by;
+    }
+    this.#stamp[i] = this.#round;
+    this.used[i] = undefined;
+    return true;
+  }
+
+  #ready(b: Bound): boolean | 'loop' {
+    let looped = false;
+    for (const w of b.when) {
+      if (!this.#of(w.slot)) { looped ||= this.#busy(w.slot); return looped ? 'loop' : false; }
+      if (!w.words.includes(this.#word[w.slot] as string)) return false;
+    }
+    // Twice, since closing a loop inside one need may have emptied another.
+    for (let pass = 0; pass < 3; pass++) {
+      let all = true;
+      for (const n of b.needs) {
+        if (this.#stamp[n] === this.#round) continue;
+        all = false;
+        if (!this.#of(n)) return this.#busy(n) ? 'loop' : false;
+      }
+      if (all) return true;
+    }
+    return true;
+  }
+  /** Being asked, or left open because something above it is. */
+  #busy(i: number): boolean { return this.#stamp[i] === this.#round + 1 || this.#stamp[i] === 0; }
+
+  /** How far outside its range a way is, as a logarithm summed over its needs; 0 inside. */
+  #outside(b: Bound): number {
+    const range = b.way.range;
+    let far = 0;
+    if (range !== undefined) b.way.needs.forEach((name, k) => {
+      const r = range[name];
+      const v = this.#value[b.needs[k] as number] as number;
+      if (r === undefined) return;
+      const [lo, hi] = r;
+      if (v > hi) far += distance(v, hi);
+      else if (v < lo) far += distance(v, lo);
+      else if (Number.isNaN(v)) far += Number.POSITIVE_INFINITY;
+    });
+    return far;
+  }
+
+  #take(i: number, slot: Slot, b: Bound, widen: number): boolean {
+    for (let k = 0; k < b.needs.length; k++) b.of[b.way.needs[k] as string] = this.#value[b.needs[k] as number] as number;
+    if (slot.isWord) {
+      this.#word[i] = b.way.word?.(b.of);
+      if (this.#word[i] === undefined) return false;
+    } else {
+      let v = b.way.value?.(b.of, b.laws) ?? Number.NaN;
+      if (b.closes >= 0 && Number.isFinite(v)) v = this.#close(i, b, v);
+      const shift = b.source < 0 ? 0 : (this.#shift[b.source] as number);
+      if (shift !== 0) {
+        const w = typeof b.way.scatter === 'function' ? b.way.scatter(b.of) : (b.way.scatter ?? 0);
+        v *= (1 + w * widen) ** shift;
+      }
+      if (!Number.isFinite(v)) {
+        if (!this.failures.has(i)) this.failures.set(i, failure(slot, b, v));
+        return false;
+      }
+      this.#value[i] = v;
+    }
+    this.#stamp[i] = this.#round;
+    this.used[i] = b;
+    return true;
+  }
+
+  /** Fixed point x = closes(x), by secant steps on closes(x) - x, falling back on plain repetition. */
+  #close(i: number, b: Bound, start: number): number {
+    const followers = new Set(this.followers(i));
+    const kept = [...followers].map((f) => [f, this.#stamp[f] as number] as const);
+    const within = b.way.within ?? 1e-10;
+    const trial = (x: number): number => {
+      for (const [f, s] of kept) this.#stamp[f] = s === -this.#round || s === this.#round + 1 || s === this.#round ? 0 : s;
+      this.#value[i] = x;
+      this.#stamp[i] = this.#round;
+      return this.#of(b.closes) ? (this.#value[b.closes] as number) : Number.NaN;
+    };
+    let x0 = start;
+    let g0 = trial(x0);
+    let x = g0;
+    let change = Number.POSITIVE_INFINITY;
+    let passes = 1;
+    for (; passes < mostPasses && Number.isFinite(x); passes++) {
+      const g = trial(x);
+      change = Math.abs(g - x) / Math.max(Math.abs(x), 1e-300);
+      if (change <= within) { x = g; break; }
+      const r0 = g0 - x0;
+      const r = g - x;
+      const slope = (r - r0) / (x - x0);
+      const step = Number.isFinite(slope) && slope !== 0 ? -r / slope : r;
+      [x0, g0] = [x, g];
+      x = Math.abs(step) <= 5 * Math.abs(r) ? x + step : g;
+    }
+    for (const [f, s] of kept) this.#stamp[f] = s === this.#round + 1 ? s : 0;
+    if (!(change <= within)) {
+      this.failures.set(i, { code: 'loop-open', message: `${this.slots[i]?.id ?? ''}: the loop ${b.way.formula} did not close in ${mostPasses} passes (last change ${change.toExponential(1)})` });
+      return Number.NaN;
+    }
+    this.closed.set(i, { passes, change });
+    return x;
+  }
+
+  /** The needs of the way a quantity was got by that lie outside the way's range. */
+  outside(i: number): { need: string; value: number; range: readonly [number, number] }[] {
+    const b = this.used[i];
+    if (b?.way.range === undefined) return [];
+    return b.way.needs.flatMap((name, k) => {
+      const range = b.way.range?.[name];
+      const value = this.#value[b.needs[k] as number] as number;
+      return range !== undefined && (value < range[0] || value > range[1]) ? [{ need: b.ids[k] as string, value, range }] : [];
+    });
+  }
+}
+
+function distance(v: number, end: number): number {
+  return v > 0 && end > 0 ? Math.abs(Math.log(v / end)) : Math.abs(v - end) / Math.max(Math.abs(end), Math.abs(v));
+}
+
+function failure(slot: Slot, b: Bound, v: number): ProblemData {
+  const put = b.way.needs.map((n) => `${n} = ${b.of[n] as number}`).join(', ');
+  return { code: 'not-finite', message: `${slot.id}: ${b.way.formula} gives ${v}${put === '' ? '' : ` at ${put}`}` };
+}

@@ -1,0 +1,76 @@
+import type { Kind } from './define.ts';
+import type { Workings } from './resolve.ts';
+
+/** One step of the way back from a number to the inputs. */
+export interface Step {
+  readonly id: string;
+  readonly symbol: string;
+  readonly name: string;
+  readonly unit: string;
+  readonly value: number | string;
+  readonly kind: Kind;
+  readonly formula: string;
+  readonly source: string;
+  readonly needs: readonly string[];
+  /** Words that selected the way. */
+  readonly when: readonly { readonly id: string; readonly word: string }[];
+  readonly outside: readonly { readonly need: string; readonly value: number; readonly range: readonly [number, number] }[];
+  readonly loop?: { readonly passes: number; readonly change: number };
+  readonly note?: string;
+  /** The place whose value a plain id is. */
+  readonly at?: string;
+}
+
+/** The step by which one quantity was got, or undefined where it cannot be had. */
+export function stepOf(workings: Workings, id: string): Step | undefined {
+  const i = workings.index.get(id);
+  if (i === undefined || !workings.known(i)) return undefined;
+  const { node, isWord } = workings.slots[i] as Workings['slots'][number];
+  const bound = workings.used[i];
+  const given = workings.given[i];
+  const loop = bound !== undefined && bound.closes >= 0 ? workings.closed.get(i) : undefined;
+  return {
+    id,
+    symbol: node.about.symbol,
+    name: node.about.name,
+    unit: node.about.unit,
+    value: isWord ? (workings.wordAt(i) as string) : workings.value(i),
+    kind: bound === undefined ? (given?.kind ?? (given === undefined ? 'decided' : 'given')) : (bound.way.as ?? 'computed'),
+    formula: bound?.way.formula ?? (given === undefined ? 'decided' : given.kind === 'assumed' ? 'assumed' : 'given'),
+    source: bound?.way.source ?? 'the case',
+    needs: bound?.ids ?? [],
+    when: (bound?.when ?? []).map((w) => ({ id: (workings.slots[w.slot] as Workings['slots'][number]).id, word: workings.wordAt(w.slot) ?? '' })),
+    outside: workings.outside(i),
+    ...(loop === undefined ? {} : { loop }),
+    ...(bound?.way.note === undefined ? {} : { note: bound.way.note }),
+    ...(node.at === undefined || bound === undefined ? {} : { at: node.at }),
+  };
+}
+
+/**
+ * The way back from a quantity to the inputs, each step once, inputs first.
+ *
+ * @param workings  the resolved graph
+ * @param id        quantity
+ * @returns         steps; empty where the quantity cannot be had
+ */
+export function trace(workings: Workings, id: string): Step[] {
+  const seen = new Set<string>();
+  const steps: Step[] = [];
+  const visit = (at: string): void => {
+    if (seen.has(at)) return;
+    seen.add(at);
+    const step = stepOf(workings, at);
+    if (step === undefined) return;
+    for (const w of step.when) visit(w.id);
+    for (const n of step.needs) visit(n);
+    steps.push(step);
+  };
+  visit(id);
+  return steps;
+}
+
+/** Ids of all ways out of range on the way to a quantity: the flag travels with every number that used one. */
+export function flagsOf(workings: Workings, id: string): string[] {
+  return trace(workings, id).filter((s) => s.outside.length > 0).map((s) => s.id);
+}
