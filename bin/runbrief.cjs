@@ -1,0 +1,43 @@
+#!/usr/bin/env node
+'use strict';
+// Starts the command line from its one bundled file. Compiling that file takes longer than most commands do, so the
+// compiled code is kept beside it; a missing, old or broken copy only costs that time again.
+const fs = require('node:fs');
+const Module = require('node:module');
+const path = require('node:path');
+const vm = require('node:vm');
+
+const file = path.join(__dirname, '..', 'dist', 'main.cjs');
+
+function load() {
+  if (Module.enableCompileCache) {
+    Module.enableCompileCache(path.join(path.dirname(file), '.compiled'));
+    return require(file);
+  }
+  const kept = `${file}.${process.version}-${process.arch}.cache`;
+  let cachedData;
+  try {
+    cachedData = fs.readFileSync(kept);
+  } catch {} // not made yet
+  const script = new vm.Script(Module.wrap(fs.readFileSync(file, 'utf8')), {
+    filename: file,
+    cachedData,
+    importModuleDynamically: vm.constants.USE_MAIN_CONTEXT_DEFAULT_LOADER,
+  });
+  const loaded = new Module(file, module);
+  loaded.filename = file;
+  loaded.paths = Module._nodeModulePaths(path.dirname(file));
+  script.runInThisContext().call(loaded.exports, loaded.exports, Module.createRequire(file), loaded, file, path.dirname(file));
+  if (cachedData === undefined || script.cachedDataRejected) {
+    process.once('exit', () => {
+      const mine = `${kept}.${process.pid}`;
+      try {
+        fs.writeFileSync(mine, script.createCachedData());
+        fs.renameSync(mine, kept); // in one step: another start may be reading
+      } catch {} // a folder that cannot be written: next time again
+    });
+  }
+  return loaded.exports;
+}
+
+void load().start();

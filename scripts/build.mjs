@@ -1,0 +1,36 @@
+// dist/: the program as one file, the library with its types, rules and materials compiled, the licences of what is inside.
+import { spawnSync } from 'node:child_process';
+import { existsSync, mkdirSync, rmSync } from 'node:fs';
+import { fileURLToPath } from 'node:url';
+import { bundle } from './bundle.mjs';
+import { writeLicences } from './licences.mjs';
+
+const root = fileURLToPath(new URL('..', import.meta.url));
+const at = (path) => `${root}${path}`;
+process.chdir(root);
+
+function run(...args) {
+  const env = { ...process.env, NO_COLOR: '1' };
+  const done = spawnSync(process.execPath, args, { cwd: root, env, encoding: 'utf8' });
+  if (done.status === 0) return;
+  process.stderr.write(`node ${args.join(' ')} ended with ${done.status}:\n${done.stdout}${done.stderr}\n`);
+  process.exit(1);
+}
+
+rmSync(at('dist'), { recursive: true, force: true }); // with the compiled code of an earlier program, which V8 knows by its length only
+mkdirSync(at('dist'));
+if (existsSync(at('scripts/compile-data.ts'))) {
+  await bundle('scripts/compile-data.ts', { file: 'dist/compile-data.mjs', format: 'esm' });
+  run(at('dist/compile-data.mjs'));
+  rmSync(at('dist/compile-data.mjs'));
+}
+const inside = await bundle('src/main.ts', { file: 'dist/main.cjs', format: 'cjs', exports: 'named' });
+if (existsSync(at('src/index.ts'))) {
+  inside.push(...(await bundle('src/index.ts', { file: 'dist/index.js', format: 'esm' })));
+  run(at('node_modules/typescript/bin/tsc'), '-p', 'scripts/tsconfig.declarations.json');
+}
+writeLicences(inside, at('dist/licences.txt'));
+
+// One run of the usual command, so that the compiled code kept beside the program holds what a plan uses.
+const example = 'examples/rinse-line.case.yaml';
+run(at('bin/runbrief.cjs'), ...(existsSync(at(example)) && existsSync(at('src/commands/plan.ts')) ? ['plan', example] : ['--version']));

@@ -1,0 +1,3 @@
+export { COMMANDS, type Entry } from './registry.ts';
+export { dispatch } from './dispatch.ts';
+export { fail } from './failure.ts';
