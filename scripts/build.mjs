@@ -19,18 +19,21 @@ function run(...args) {
 
 rmSync(at('dist'), { recursive: true, force: true }); // with the compiled code of an earlier program, which V8 knows by its length only
 mkdirSync(at('dist'));
-if (existsSync(at('scripts/compile-data.ts'))) {
-  await bundle('scripts/compile-data.ts', { file: 'dist/compile-data.mjs', format: 'esm' });
-  run(at('dist/compile-data.mjs'));
-  rmSync(at('dist/compile-data.mjs'));
+for (const data of ['materials', 'rules']) {
+  const script = `scripts/compile-${data}.ts`;
+  if (!existsSync(at(script))) continue;
+  await bundle(script, { file: `dist/compile-${data}.mjs`, format: 'esm' }); // Node 20 reads no TypeScript
+  run(at(`dist/compile-${data}.mjs`));
+  rmSync(at(`dist/compile-${data}.mjs`));
 }
-const inside = await bundle('src/main.ts', { file: 'dist/main.cjs', format: 'cjs', exports: 'named' });
-if (existsSync(at('src/index.ts'))) {
-  inside.push(...(await bundle('src/index.ts', { file: 'dist/index.js', format: 'esm' })));
-  run(at('node_modules/typescript/bin/tsc'), '-p', 'scripts/tsconfig.declarations.json');
-}
+const inside = [
+  ...(await bundle('src/main.ts', { file: 'dist/main.cjs', format: 'cjs', exports: 'named' })),
+  ...(await bundle('src/index.ts', { file: 'dist/index.js', format: 'esm' })),
+];
 writeLicences(inside, at('dist/licences.txt'));
 
 // One run of the usual command, so that the compiled code kept beside the program holds what a plan uses.
 const example = 'examples/rinse-line.case.yaml';
 run(at('bin/runbrief.cjs'), ...(existsSync(at(example)) && existsSync(at('src/commands/plan.ts')) ? ['plan', example] : ['--version']));
+
+run(at('node_modules/typescript/bin/tsc'), '-p', 'scripts/tsconfig.declarations.json');

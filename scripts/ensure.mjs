@@ -64,3 +64,5 @@ export function ensure() {
   step('Building', process.execPath, [join(root, 'scripts/build.mjs')]);
   writeFileSync(stamp, now);
 }
+
+if (process.argv[1] === fileURLToPath(import.meta.url)) ensure();

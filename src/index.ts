@@ -1,0 +1,1 @@
+export { Problem, printProblem, type ProblemData } from './problems/index.ts';
