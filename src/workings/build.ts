@@ -19,9 +19,12 @@ export interface Node {
 
 const identity = (need: string): Way => ({ needs: [need], value: (of) => of[need] as number, formula: `as at ${need.slice(need.indexOf('@') + 1)}`, source: 'definition' });
 
-const extreme = (id: string, copies: readonly string[], which: 'smallest' | 'largest'): Way => ({
+type Join = (a: number, b: number) => number;
+const joins: Readonly<Record<'smallest' | 'largest' | 'sum', Join>> = { smallest: (a, b) => Math.min(a, b), largest: (a, b) => Math.max(a, b), sum: (a, b) => a + b };
+
+const overPlaces = (id: string, copies: readonly string[], which: keyof typeof joins): Way => ({
   needs: copies,
-  value: (of) => copies.reduce((best, c) => (which === 'smallest' ? Math.min(best, of[c] as number) : Math.max(best, of[c] as number)), which === 'smallest' ? Infinity : -Infinity),
+  value: (of) => copies.map((c) => of[c] as number).reduce((a, b) => joins[which](a, b)),
   formula: `${which} of ${id} over its places`,
   source: 'definition',
 });
@@ -80,7 +83,7 @@ export function joinDefinitions(definitions: readonly Definition[], places: Plac
       if (q.plain === 'target' && ids.has(`${q.id}@${target}`)) {
         at = target;
         lead.push(identity(`${q.id}@${target}`));
-      } else if (q.plain === 'smallest' || q.plain === 'largest') lead.push(extreme(q.id, copies.map((c) => `${q.id}@${c.join('/')}`), q.plain));
+      } else if (q.plain !== undefined && q.plain !== 'target') lead.push(overPlaces(q.id, copies.map((c) => `${q.id}@${c.join('/')}`), q.plain));
     }
     const bound = [...lead, ...own].map((way) => {
       const needs = way.needs.map((n) => local(n, row));

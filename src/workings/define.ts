@@ -91,7 +91,7 @@ export interface QuantityAbout {
   /** What the quantity exists once for; copies are `id@place`. */
   readonly per?: readonly PlaceKind[];
   /** Which copy the plain id is. */
-  readonly plain?: 'smallest' | 'largest' | 'target';
+  readonly plain?: 'smallest' | 'largest' | 'target' | 'sum';
   /** It may change sign, or is a temperature: its spread adds instead of multiplying. */
   readonly signed?: boolean;
 }

@@ -311,7 +311,11 @@ export class Workings {
       if (this.#word[i] === undefined) return false;
     } else {
       let v = b.way.value?.(b.of, b.laws) ?? Number.NaN;
-      if (b.closes >= 0 && Number.isFinite(v)) v = this.#close(i, b, v);
+      if (b.closes >= 0 && Number.isFinite(v)) {
+        const closed = this.#close(i, b, v);
+        if (closed === undefined) return false;
+        v = closed;
+      }
       const shift = b.source < 0 ? 0 : (this.#shift[b.source] as number);
       if (shift !== 0) {
         const w = typeof b.way.scatter === 'function' ? b.way.scatter(b.of) : (b.way.scatter ?? 0);
@@ -328,8 +332,8 @@ export class Workings {
     return true;
   }
 
-  /** Fixed point x = closes(x), by secant steps on closes(x) - x, falling back on plain repetition. */
-  #close(i: number, b: Bound, start: number): number {
+  /** Fixed point x = closes(x), by secant steps on closes(x) - x, falling back on plain repetition; undefined where `closes` cannot be had. */
+  #close(i: number, b: Bound, start: number): number | undefined {
     const followers = new Set(this.followers(i));
     const kept = [...followers].map((f) => [f, this.#stamp[f] as number] as const);
     const within = b.way.within ?? 1e-10;
@@ -356,6 +360,7 @@ export class Workings {
       x = Math.abs(step) <= 5 * Math.abs(r) ? x + step : g;
     }
     for (const [f, s] of kept) this.#stamp[f] = s === this.#round + 1 ? s : 0;
+    if (Number.isNaN(x)) return undefined;
     if (!(change <= within)) {
       this.failures.set(i, { code: 'loop-open', message: `${this.slots[i]?.id ?? ''}: the loop ${b.way.formula} did not close in ${mostPasses} passes (last change ${change.toExponential(1)})` });
       return Number.NaN;

@@ -1,0 +1,48 @@
+import { quantity, way, type Definition } from '../workings/index.ts';
+
+const continuity = 'conservation of mass';
+
+/** Sizes, speeds and streams that every flow has; the flow says what its length, area and speed are. */
+export const scales: Definition[] = [
+  quantity('gravity', { symbol: 'g', name: 'acceleration of gravity', unit: 'm/s^2' }, [
+    way({ needs: [], as: 'assumed', value: () => 9.80665, formula: 'g = 9.80665 m/s^2', source: '3rd General Conference on Weights and Measures 1901, standard gravity', dimensional: 'a constant with unit' }),
+  ]),
+  quantity('inclination', { symbol: 'theta', name: 'angle of the axis above the level', unit: '1', signed: true }),
+  quantity('length', { symbol: 'L', name: 'length scale of the flow', unit: 'm' }),
+  quantity('speed', { symbol: 'U', name: 'speed scale of the flow', unit: 'm/s' }, [
+    way({ needs: ['inlet.speed'], value: (of) => of['inlet.speed'], formula: 'U as given at the inlet', source: 'the case' }),
+    way({ needs: ['volumeFlow', 'flowArea', 'parallelPassages'], value: ({ volumeFlow, flowArea, parallelPassages }) => volumeFlow / (flowArea * parallelPassages), formula: 'U = Q/(n A)', source: continuity }),
+    way({ needs: ['inlet.massFlow', 'density', 'flowArea', 'parallelPassages'], value: (of) => of['inlet.massFlow'] / (of.density * of.flowArea * of.parallelPassages), formula: 'U = m/(n rho A)', source: continuity }),
+  ]),
+  quantity('flowArea', { symbol: 'A', name: 'cross-section of one passage', unit: 'm^2' }),
+  quantity('wettedPerimeter', { symbol: 'P', name: 'wetted perimeter of one passage', unit: 'm' }),
+  quantity('hydraulicDiameter', { symbol: 'D_h', name: 'hydraulic diameter', unit: 'm' }, [
+    way({ needs: ['flowArea', 'wettedPerimeter'], value: ({ flowArea, wettedPerimeter }) => (4 * flowArea) / wettedPerimeter, formula: 'D_h = 4 A/P', source: 'definition' }),
+  ]),
+  quantity('flowLength', { symbol: 'L_x', name: 'length along the flow', unit: 'm' }),
+  quantity('span', { symbol: 'L_z', name: 'extent in the third direction', unit: 'm' }),
+  quantity('gap', { symbol: 'H', name: 'smallest width between walls', unit: 'm' }),
+  quantity('passageHeight', { symbol: 'H_g', name: 'extent along gravity', unit: 'm' }),
+  quantity('parallelPassages', { symbol: 'n', name: 'number of equal passages', unit: '1' }, [
+    way({ needs: [], as: 'assumed', value: () => 1, formula: 'n = 1', source: 'one passage unless the case says otherwise' }),
+  ]),
+  quantity('volumeFlow', { symbol: 'Q', name: 'volume flow in all passages', unit: 'm^3/s' }, [
+    way({ needs: ['inlet.volumeFlow'], value: (of) => of['inlet.volumeFlow'], formula: 'Q as given at the inlet', source: 'the case' }),
+    way({ needs: ['speed', 'flowArea', 'parallelPassages'], value: ({ speed, flowArea, parallelPassages }) => speed * flowArea * parallelPassages, formula: 'Q = n U A', source: continuity }),
+  ]),
+  quantity('massFlow', { symbol: 'm', name: 'mass flow in all passages', unit: 'kg/s' }, [
+    way({ needs: ['inlet.massFlow'], value: (of) => of['inlet.massFlow'], formula: 'm as given at the inlet', source: 'the case' }),
+    way({ needs: ['density', 'speed', 'flowArea', 'parallelPassages'], value: ({ density, speed, flowArea, parallelPassages }) => density * speed * flowArea * parallelPassages, formula: 'm = n rho U A', source: continuity }),
+  ]),
+  quantity('speedBulk', { symbol: 'U_b', name: 'mean speed at the bulk state', unit: 'm/s' }, [
+    way({ needs: ['speed', 'density', 'densityBulk'], value: ({ speed, density, densityBulk }) => (speed * density) / densityBulk, formula: 'U_b = U rho/rho_b', source: continuity }),
+  ]),
+  quantity('pressure', { symbol: 'p', name: 'absolute pressure at the state of the plain numbers', unit: 'Pa' }),
+  quantity('outletPressure', { symbol: 'p_out', name: 'absolute pressure at the outlet', unit: 'Pa' }, [
+    way({ needs: ['pressure', 'pressureDropPlain'], value: ({ pressure, pressureDropPlain }) => pressure - pressureDropPlain, formula: 'p_out = p - dp', source: 'definition' }),
+  ]),
+  quantity('lowestPressure', { symbol: 'p_min', name: 'lowest static pressure of the case', unit: 'Pa' }, [
+    way({ needs: ['pressure', 'pressureDropPlain'], value: ({ pressure, pressureDropPlain }) => pressure - Math.max(0, pressureDropPlain), formula: 'p_min = p - dp', source: 'definition' }),
+    way({ needs: ['pressure'], value: ({ pressure }) => pressure, formula: 'p_min = p', source: 'no pressure drop known' }),
+  ]),
+];

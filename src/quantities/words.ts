@@ -1,0 +1,42 @@
+import { quantity, wordWay, type Definition, type QuantityAbout } from '../workings/index.ts';
+
+/** What a case can name at all; absent unless its key stands in the case. */
+export const features = ['species', 'reactions', 'particles', 'otherFluid', 'rheology', 'magneticField', 'frame', 'motion', 'porous', 'period', 'ramp', 'swirl', 'humidity', 'burning', 'roughness', 'layers', 'gravity', 'sources', 'wallMotion'] as const;
+
+const yesNo = ['yes', 'no'] as const;
+const word = (id: string, name: string, words: readonly string[], about: Partial<QuantityAbout> = {}, ways: Parameters<typeof quantity>[2] = []): Definition => quantity(id, { symbol: '', name, unit: 'word', words, ...about }, ways);
+
+/** The closed lists of words that select ways and that rules may ask for. */
+export const words: Definition[] = [
+  word('flowClass', 'class of flow', ['internal', 'body', 'jet', 'continuum', 'enclosure', 'solid']),
+  word('axis', 'axis of the flow against gravity', ['level', 'inclined', 'upright']),
+  word('ascent', 'sense of the main direction against gravity', ['up', 'down', 'none']),
+  word('medium', 'state of matter of the fluid', ['gas', 'liquid', 'solid']),
+  word('transparency', 'whether heat radiation passes the fluid', ['transparent', 'opaque']),
+  word('imposedFlow', 'a flow is imposed', yesNo),
+  word('wallBounded', 'walls bound the flow', yesNo),
+  word('attached', 'the flow follows its walls', yesNo),
+  word('separated', 'the flow separates', yesNo),
+  word('targetHeat', 'a target is heat or mass transfer', yesNo),
+  word('targetMomentum', 'a target is a force, a shear or a pressure', yesNo),
+  word('targetPeak', 'a target is a peak, an rms or a spectrum', yesNo),
+  word('targetMean', 'a target is a mean over all walls', yesNo),
+  word('energySolved', 'the energy equation is solved', yesNo),
+  word('inletProfile', 'shape of the inlet profile', ['uniform', 'developed', 'power', 'log', 'table', 'none']),
+  word('wallKind', 'thermal kind of a wall', ['temperature', 'flux', 'coefficient', 'adiabatic'], { per: ['wall'], plain: 'target' }),
+  word('character', 'nature of the problem in time', ['unknown', 'steady', 'periodic', 'transient']),
+  word('fluidGiven', 'how the fluid is given', ['material', 'constants']),
+  word('ductSection', 'section of the passage', ['round', 'rectangular', 'flat', 'other']),
+  word('infiniteDepth', 'the third direction has no end', yesNo),
+  word('storage', 'where the solver keeps its unknowns', ['cell-centred', 'node-centred']),
+  word('heatDirection', 'what the wall does to the fluid', ['heating', 'cooling', 'none'], {}, [
+    wordWay({ needs: [], when: { energySolved: 'no' }, word: () => 'none', formula: 'no energy equation', source: 'definition' }),
+    wordWay({ needs: ['drivingTemperature', 'farTemperature'], word: ({ drivingTemperature, farTemperature }) => (drivingTemperature > farTemperature ? 'heating' : drivingTemperature < farTemperature ? 'cooling' : 'none'), formula: 'temperature that drives the wall against the fluid that arrives', source: 'definition' }),
+    wordWay({ needs: ['wallHeatFlux'], word: ({ wallHeatFlux }) => (wallHeatFlux > 0 ? 'heating' : wallHeatFlux < 0 ? 'cooling' : 'none'), formula: 'sign of the wall heat flux', source: 'definition' }),
+    wordWay({ needs: [], when: { wallKind: 'adiabatic' }, word: () => 'none', formula: 'adiabatic wall', source: 'definition' }),
+  ]),
+  word('regime', 'flow regime', ['laminar', 'transitional', 'turbulent'], {}, [
+    wordWay({ needs: ['regimeGroup', 'regimeLow', 'regimeHigh'], word: ({ regimeGroup, regimeLow, regimeHigh }) => (regimeGroup < regimeLow ? 'laminar' : regimeGroup < regimeHigh ? 'transitional' : 'turbulent'), formula: 'group of the flow against its two limits', source: 'regime table of the flow' }),
+  ]),
+  ...features.map((f) => word(`has.${f}`, `the case names ${f}`, yesNo)),
+];
