@@ -19,7 +19,7 @@ function load() {
   try {
     cachedData = fs.readFileSync(kept);
   } catch {} // not made yet
-  const script = new vm.Script(Module.wrap(fs.readFileSync(file, 'utf8')), {
+  const script = new vm.Script(Module.wrap(fs.readFileSync(file, 'latin1')), {
     filename: file,
     cachedData,
     importModuleDynamically: vm.constants.USE_MAIN_CONTEXT_DEFAULT_LOADER,

@@ -1,6 +1,6 @@
 // dist/: the program as one file, the library with its types, rules and materials compiled, the licences of what is inside.
 import { spawnSync } from 'node:child_process';
-import { existsSync, mkdirSync, rmSync } from 'node:fs';
+import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import { bundle } from './bundle.mjs';
 import { writeLicences } from './licences.mjs';
@@ -17,6 +17,13 @@ function run(...args) {
   process.exit(1);
 }
 
+/** Writes all other characters as escapes, so that a start need not decode the file: bin/ reads it byte by character. */
+function asciiOnly(file) {
+  const code = readFileSync(file, 'utf8');
+  if (/String\.raw`[^`]*[^\0-\x7f]/.test(code)) throw new Error(`${file}: String.raw with a character that is not ASCII would change`);
+  writeFileSync(file, code.replaceAll(/[^\0-\x7f]/g, (c) => `\\u${c.charCodeAt(0).toString(16).padStart(4, '0')}`));
+}
+
 rmSync(at('dist'), { recursive: true, force: true }); // with the compiled code of an earlier program, which V8 knows by its length only
 mkdirSync(at('dist'));
 for (const data of ['materials', 'rules']) {
@@ -27,9 +34,10 @@ for (const data of ['materials', 'rules']) {
   rmSync(at(`dist/compile-${data}.mjs`));
 }
 const inside = [
-  ...(await bundle('src/main.ts', { file: 'dist/main.cjs', format: 'cjs', exports: 'named' })),
+  ...(await bundle('src/main.ts', { file: 'dist/main.cjs', format: 'cjs', exports: 'named', minify: { compress: false, mangle: false, codegen: { removeWhitespace: true } } })),
   ...(await bundle('src/index.ts', { file: 'dist/index.js', format: 'esm' })),
 ];
+asciiOnly(at('dist/main.cjs'));
 writeLicences(inside, at('dist/licences.txt'));
 
 // One run of the usual command, so that the compiled code kept beside the program holds what a plan uses.

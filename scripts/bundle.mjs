@@ -17,13 +17,27 @@ const lazyFramework = {
   },
 };
 
+// Parts of the runtime that some rarely used package wants are fetched at their first use, not at every start.
+const lazyRuntime = {
+  name: 'lazy-runtime',
+  renderChunk(code, _chunk, { format }) {
+    if (format !== 'cjs') return null;
+    const hoisted = [...code.matchAll(/^let (\w+) = (require\("node:[^"]+"\));\n(?:\1 = (\S+)\(\1(, 1)?\);\n)?/gm)];
+    return hoisted.reduce((text, [lines, name, fetched, wrap, mode = '']) => {
+      const value = wrap === undefined ? fetched : `${wrap}(${fetched}${mode})`;
+      const rest = text.replace(lines, '').replaceAll(new RegExp(`\\b${name}\\b`, 'g'), `${name}()`);
+      return `let kept_${name};\nconst ${name} = () => (kept_${name} ??= ${value});\n${rest}`;
+    }, code);
+  },
+};
+
 /**
  * @param {string | Record<string, string>} input  entry
  * @param {import('rolldown').OutputOptions} output  where to, and the module format
  * @returns {Promise<string[]>} paths of the modules that are in the file
  */
 export async function bundle(input, output) {
-  const made = await rolldown({ input, cwd: root, platform: 'node', logLevel: 'warn', plugins: [lazyFramework] });
+  const made = await rolldown({ input, cwd: root, platform: 'node', logLevel: 'warn', plugins: [lazyFramework, lazyRuntime] });
   const { output: chunks } = await made.write({ codeSplitting: false, ...output });
   await made.close();
   return chunks.flatMap((chunk) => (chunk.type === 'chunk' ? chunk.moduleIds : []));
