@@ -34,7 +34,7 @@ for (const { abbr, measure, singular, plural } of convert().list()) {
   if (known === undefined || inexact.includes(abbr) || traps.includes(abbr) || /[\d/-]/.test(abbr)) continue;
   const [si, product, counts] = known;
   const inSi = convert(1).from(abbr).to(si) * (measure === 'partsPer' ? 1e-6 : 1);
-  const short = Number(inSi.toPrecision(15)); // 100000.00000000001 is 1e5
+  const short = Number(inSi.toPrecision(13)); // 100000.00000000001 is 1e5
   const factor = Math.abs(short - inSi) <= 4e-16 * inSi ? short : inSi;
   const words = [singular, plural].map((name) => name.toLowerCase()).filter((name) => /^\p{L}+$/u.test(name) && name !== 'matsked' && name !== 'matskedar');
   const names = [...new Set([abbr, ...words])].join(' ');

@@ -10,6 +10,8 @@ export interface ProblemData {
   readonly column?: number;
   /** How many characters the caret line marks. */
   readonly length?: number;
+  /** Where the offending part begins within one value's text, counted from 0; a reader of files turns it into a column. */
+  readonly at?: number;
   readonly expected?: string;
   readonly nearest?: string;
 }
