@@ -1,5 +1,6 @@
 // Holds the tree to its architecture: a room imports only rooms above it, through their index.ts; no circle inside a room;
 // an index.ts only exports; nothing is exported that nobody uses. Reads the text of the imports; needs no package.
+// `node scripts/check-rooms.mjs [FOLDER]`.
 import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import { dirname, join, relative, sep } from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -35,7 +36,7 @@ function exportsOf(text) {
  * @param {string} root  project folder
  * @returns {string[]} one line for every breach
  */
-export function checkRooms(root) {
+function checkRooms(root) {
   const src = join(root, 'src');
   const files = new Map(filesUnder(src).map((file) => [file, withoutComments(readFileSync(file, 'utf8'))]));
   const breaches = [];
@@ -99,7 +100,7 @@ export function checkRooms(root) {
 }
 
 if (process.argv[1] === fileURLToPath(import.meta.url)) {
-  const breaches = checkRooms(fileURLToPath(new URL('..', import.meta.url)));
+  const breaches = checkRooms(process.argv[2] ?? fileURLToPath(new URL('..', import.meta.url)));
   for (const breach of breaches) process.stdout.write(`${breach}\n`);
   process.exitCode = breaches.length === 0 ? 0 : 1;
 }

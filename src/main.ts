@@ -18,11 +18,13 @@ export async function main(argv: readonly string[]): Promise<number> {
   }
 }
 
-/** For bin/: a reader that goes away early, such as `head`, is no failure; a stray error is a defect, told without a stack. */
+/** For bin/: a reader that goes away early, such as `head`, is no failure, a full disk is; a stray error is a defect, told without a stack. */
 export async function start(): Promise<void> {
   for (const stream of [process.stdout, process.stderr]) {
     stream.on('error', (error: NodeJS.ErrnoException) => {
-      if (error.code !== 'EPIPE') throw error;
+      if (error.code === 'EPIPE') return;
+      process.stderr.write(`the result could not be written: ${error.message}\n`);
+      process.exit(1);
     });
   }
   process.on('uncaughtException', (error) => process.exit(fail(error, false)));

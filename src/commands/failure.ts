@@ -22,11 +22,8 @@ export function fail(error: unknown, json: boolean): 1 | 2 | 3 {
 
 function defect(error: unknown): ProblemData {
   const said = error instanceof Error ? error.message : String(error);
-  return {
-    code: 'defect',
-    message: `This is a defect in runbrief, not in what you gave: ${harmless(said)}`,
-    expected: 'no such end; please report it with the command and its files (RUNBRIEF_DEBUG=1 shows where it happened)',
-  };
+  const message = `This is a defect in runbrief, not in what you gave: ${harmless(said)}\n  Please report it with the command and its files; RUNBRIEF_DEBUG=1 shows where it happened.`;
+  return { code: 'defect', message };
 }
 
 /** Text of the file a problem stands in, read again for the line with the caret. Never a pipe or a device. */
