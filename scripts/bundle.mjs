@@ -1,6 +1,7 @@
 // Bundles an entry with everything it uses into one file.
-import { rolldown } from 'rolldown';
+import { isBuiltin } from 'node:module';
 import { fileURLToPath } from 'node:url';
+import { rolldown } from 'rolldown';
 
 const root = fileURLToPath(new URL('..', import.meta.url));
 
@@ -17,17 +18,17 @@ const lazyFramework = {
   },
 };
 
-// Parts of the runtime that some rarely used package wants are fetched at their first use, not at every start.
+// The bundler fetches every part of the runtime that any package imports at the top of the file. Behind a module of its
+// own each part is fetched when the first module that imports it runs.
+const marker = '\0runtime:';
 const lazyRuntime = {
   name: 'lazy-runtime',
-  renderChunk(code, _chunk, { format }) {
-    if (format !== 'cjs') return null;
-    const hoisted = [...code.matchAll(/^let (\w+) = (require\("node:[^"]+"\));\n(?:\1 = (\S+)\(\1(, 1)?\);\n)?/gm)];
-    return hoisted.reduce((text, [lines, name, fetched, wrap, mode = '']) => {
-      const value = wrap === undefined ? fetched : `${wrap}(${fetched}${mode})`;
-      const rest = text.replace(lines, '').replaceAll(new RegExp(`\\b${name}\\b`, 'g'), `${name}()`);
-      return `let kept_${name};\nconst ${name} = () => (kept_${name} ??= ${value});\n${rest}`;
-    }, code);
+  resolveId(source, importer, { kind }) {
+    if (kind !== 'import-statement' || !isBuiltin(source) || importer?.startsWith(marker)) return null;
+    return `${marker}${source.replace(/^(?!node:)/, 'node:')}`;
+  },
+  load(id) {
+    return id.startsWith(marker) ? { code: `module.exports = require(${JSON.stringify(id.slice(marker.length))});`, moduleType: 'js' } : null;
   },
 };
 
@@ -37,7 +38,7 @@ const lazyRuntime = {
  * @returns {Promise<string[]>} paths of the modules that are in the file
  */
 export async function bundle(input, output) {
-  const made = await rolldown({ input, cwd: root, platform: 'node', logLevel: 'warn', plugins: [lazyFramework, lazyRuntime] });
+  const made = await rolldown({ input, cwd: root, platform: 'node', logLevel: 'warn', plugins: output.format === 'cjs' ? [lazyFramework, lazyRuntime] : [] });
   const { output: chunks } = await made.write({ codeSplitting: false, ...output });
   await made.close();
   return chunks.flatMap((chunk) => (chunk.type === 'chunk' ? chunk.moduleIds : []));
