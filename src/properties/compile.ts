@@ -1,0 +1,121 @@
+import { readdirSync, readFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { Problem, type ProblemData } from '../problems/index.ts';
+import { readBands, readEntry } from './compile-entry.ts';
+import type { Side } from './models/point.ts';
+import { propertyUnits, type Band, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
+import { yamlReader, type YamlReader } from './yaml-reader.ts';
+
+const headKeys = ['name', 'formula', 'aliases', 'phaseNames', 'kind', 'phases', 'takes', 'molarMass', 'critical', 'triplePoint', 'about', 'thermodynamics'];
+const derived: readonly string[] = ['kinematicViscosity', 'thermalDiffusivity', 'prandtl', 'molarMass'];
+const recorded = Object.keys(propertyUnits).filter((id) => !derived.includes(id));
+
+type Raw = { readonly [key: string]: unknown };
+const isMap = (value: unknown): value is Raw => typeof value === 'object' && value !== null && !Array.isArray(value);
+
+/**
+ * Reads one material record.
+ *
+ * @param text  YAML in the form of the files in materials/
+ * @param file  its name, for messages
+ * @returns     the record in SI
+ * @throws      {Problem} every fault of the file with line and column: unknown-key, wrong-dimension, missing-source, unknown-model, ...
+ */
+export function compileMaterial(text: string, file: string): MaterialRecord {
+  const reader = yamlReader(text, file);
+  const raw = reader.value;
+  if (!isMap(raw)) throw new Problem({ code: 'wrong-record', message: 'a material record is a mapping', file, expected: 'name, kind, then one key per property' });
+  reader.keys([], raw, [...headKeys, ...recorded]);
+  const name = raw['name'];
+  if (typeof name !== 'string' || name === '') reader.complain(['name'], { code: 'missing-name', message: 'the record has no name' });
+  const kind = raw['kind'];
+  if (kind !== 'fluid' && kind !== 'solid') reader.complain(['kind'], { code: 'wrong-kind', message: `kind is "${String(kind)}"`, expected: 'fluid or solid' });
+  const texts = (key: string): string[] => (Array.isArray(raw[key]) ? (raw[key] as unknown[]).map(String) : []);
+  const group = (key: string, units: Record<string, string>): object => {
+    const given = raw[key];
+    if (!isMap(given)) return {};
+    reader.keys([key], given, Object.keys(units));
+    return { [key]: Object.fromEntries(Object.entries(units).map(([part, inUnit]) => [part, reader.quantity([key, part], given[part], inUnit)])) };
+  };
+  const properties: Record<string, Entry[]> = {};
+  for (const id of recorded) {
+    const given = raw[id];
+    if (given === undefined) continue;
+    const list: unknown[] = Array.isArray(given) ? given : [given];
+    properties[id] = list.flatMap((one, i) => {
+      const path = Array.isArray(given) ? [id, i] : [id];
+      const entry = readEntry(reader, path, one, id);
+      return entry === undefined ? [] : [{ ...entry, uncertainty: readBands(reader, [...path, 'uncertainty'], (one as Raw)['uncertainty'], propertyUnits[id as PropertyId]) }];
+    });
+  }
+  const phases = texts('phases');
+  for (const phase of phases) if (!['liquid', 'vapour', 'solid'].includes(phase)) reader.complain(['phases'], { code: 'wrong-phase', message: `"${phase}" is not a phase`, expected: 'liquid, vapour or solid' });
+  const record = {
+    id: String(name).toLowerCase().replaceAll(' ', '-'),
+    name: String(name),
+    ...(typeof raw['formula'] === 'string' ? { formula: raw['formula'] } : {}),
+    aliases: texts('aliases'),
+    phaseNames: (isMap(raw['phaseNames']) ? raw['phaseNames'] : {}) as { [name: string]: Side },
+    kind: kind as 'fluid' | 'solid',
+    phases: (phases.length > 0 ? phases : kind === 'solid' ? ['solid'] : ['liquid', 'vapour']) as (Side | 'solid')[],
+    takes: texts('takes') as MaterialRecord['takes'][number][],
+    ...(raw['molarMass'] === undefined ? {} : { molarMass: reader.quantity(['molarMass'], raw['molarMass'], 'kg/mol') }),
+    ...group('critical', { temperature: 'K', pressure: 'Pa', density: 'kg/m^3' }),
+    ...group('triplePoint', { temperature: 'K', pressure: 'Pa' }),
+    ...(typeof raw['about'] === 'string' ? { about: raw['about'] } : {}),
+    ...thermodynamics(reader, raw['thermodynamics']),
+    properties,
+  };
+  reader.finish();
+  return record;
+}
+
+function thermodynamics(reader: YamlReader, given: unknown): object {
+  if (given === undefined) return {};
+  const entry = readEntry(reader, ['thermodynamics'], given, 'thermodynamics');
+  const bands = (given as Raw)['uncertainty'];
+  if (entry === undefined) return {};
+  if (!isMap(bands)) {
+    reader.complain(['thermodynamics', 'uncertainty'], { code: 'wrong-uncertainty', message: 'an equation of state states an uncertainty per property' });
+    return {};
+  }
+  reader.keys(['thermodynamics', 'uncertainty'], bands, [...recorded]);
+  const uncertainty: Record<string, Band[]> = {};
+  for (const [id, one] of Object.entries(bands)) uncertainty[id] = readBands(reader, ['thermodynamics', 'uncertainty', id], one, propertyUnits[id as PropertyId] ?? '1');
+  return { thermodynamics: { ...entry, uncertainty } };
+}
+
+/**
+ * Reads and checks all records of a folder.
+ *
+ * @param dir  folder with one `.yaml` file per material
+ * @returns    the records by id, in SI, ready to be stored as JSON
+ * @throws     {Problem} the faults of all files together; two-names where two records claim one name
+ */
+export function compileMaterials(dir: string): Collection {
+  const problems: ProblemData[] = [];
+  const materials: Record<string, MaterialRecord> = {};
+  const owner = new Map<string, string>();
+  let files: string[];
+  try {
+    files = readdirSync(dir).filter((file) => /\.ya?ml$/.test(file)).sort();
+  } catch {
+    throw new Problem({ code: 'missing-folder', message: `the folder of materials ${dir} cannot be read` });
+  }
+  for (const file of files) {
+    try {
+      const record = compileMaterial(readFileSync(join(dir, file), 'utf8'), file);
+      for (const name of [record.name, ...record.aliases, ...Object.keys(record.phaseNames)]) {
+        const other = owner.get(name.toLowerCase());
+        if (other !== undefined && other !== file) problems.push({ code: 'two-names', message: `"${name}" names a material of ${other} as well`, file });
+        owner.set(name.toLowerCase(), file);
+      }
+      materials[record.id] = record;
+    } catch (error) {
+      if (!(error instanceof Problem)) throw error;
+      problems.push(...error.list);
+    }
+  }
+  if (problems.length > 0) throw new Problem(problems);
+  return { materials };
+}

@@ -1,0 +1,172 @@
+import { Problem } from '../problems/index.ts';
+import type { Point, Side } from './models/point.ts';
+import { equationModels, propertyModels } from './registry.ts';
+import { propertyUnits, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
+import type { Engine, Sample } from './sample.ts';
+
+/** A material ready to be asked. */
+export interface Material {
+  readonly id: string;
+  readonly name: string;
+  readonly formula?: string;
+  readonly aliases: readonly string[];
+  readonly kind: 'fluid' | 'solid';
+  /** Phases that the record covers. */
+  readonly phases: readonly (Side | 'solid')[];
+  /** [kg/mol] */
+  readonly molarMass?: number;
+  /** Specific gas constant [J/(kg K)]. */
+  readonly gasConstant?: number;
+  /** [K], [Pa], [kg/m^3] */
+  readonly critical?: { readonly temperature: number; readonly pressure: number; readonly density: number };
+  /** [K], [Pa] */
+  readonly triple?: { readonly temperature: number; readonly pressure: number };
+  /** At atmospheric pressure [K]. */
+  readonly meltingTemperature?: number;
+  readonly takes: readonly ('humidity' | 'composition' | 'salinity')[];
+  /** Ids of the properties that it has in some phase. */
+  readonly properties: readonly PropertyId[];
+  /** The phase that the name it was asked by stands for (steam). */
+  readonly asked?: Side;
+  readonly about?: string;
+  readonly record: MaterialRecord;
+  /** Evaluation, for this room. */
+  readonly engine: MaterialEngine;
+}
+
+/** Engine of one material: the correlations built from its record, each when first used. */
+export interface MaterialEngine extends Engine {
+  evaluate(entry: Entry, sample: Sample): number;
+  /** The entry of a property that serves a side, best in range first. */
+  entry(property: string, sample: Sample, asked?: Side | 'solid'): Entry | undefined;
+}
+
+/** Properties that an equation of state gives. */
+export const fromEquation = {
+  density: (at) => at.density,
+  specificHeatCapacity: (at) => at.specificHeatCapacity,
+  thermalExpansion: (at) => at.thermalExpansion,
+  speedOfSound: (at) => at.speedOfSound,
+  enthalpy: (at) => at.enthalpy,
+  compressibilityFactor: (at, R) => at.pressure / (at.density * R * at.temperature),
+  isentropicExponent: (at) => (at.density * at.speedOfSound * at.speedOfSound) / at.pressure,
+} satisfies { [property: string]: (at: Point, gasConstant: number) => number };
+
+export const gasConstantMolar = 8.31446261815324;
+
+/** Whether a sample lies in a box; a small allowance for rounding at its edges. */
+export function inside(box: { readonly temperature?: readonly [number, number]; readonly pressure?: readonly [number, number]; readonly composition?: readonly [number, number] }, s: Sample): boolean {
+  const within = (range: readonly [number, number] | undefined, x: number): boolean => range === undefined || (x >= range[0] * (1 - 1e-9) && x <= range[1] * (1 + 1e-9));
+  return within(box.temperature, s.T) && within(box.pressure, s.p) && within(box.composition, s.x);
+}
+
+/**
+ * Builds the engine of a record.
+ *
+ * @param record      the record
+ * @param collection  where partner materials are found (humid air is made of air and water)
+ * @returns           the engine; nothing is computed yet
+ */
+export function engineOf(record: MaterialRecord, collection: Collection): MaterialEngine {
+  const built = new Map<Entry, (s: Sample) => number>();
+  let composition = 0;
+  let equation: Engine['equation'] | null = null;
+  let kept: Point | undefined;
+  let keptT = Number.NaN, keptP = Number.NaN, keptX = Number.NaN, keptSide: Side = 'liquid';
+
+  const engine: MaterialEngine = {
+    molarMass: record.molarMass ?? Number.NaN,
+    get equation() {
+      if (equation === null) {
+        const entry = record.thermodynamics;
+        const model = entry && equationModels[entry.model];
+        const partners = (model?.partners ?? []).map((id) => engineOf(partner(collection, id), collection));
+        equation = model?.make(entry!.constants as never, partners, () => composition);
+      }
+      return equation as NonNullable<Engine['equation']>;
+    },
+    point(s) {
+      if (s.T !== keptT || s.p !== keptP || s.x !== keptX || s.side !== keptSide || kept === undefined) {
+        composition = s.x;
+        kept = engine.equation!.at(s.T, s.p, s.side);
+        keptT = s.T;
+        keptP = s.p;
+        keptX = s.x;
+        keptSide = s.side;
+      }
+      return kept;
+    },
+    saturation: (T) => engine.equation!.line!.bubble(T),
+    value(property, s) {
+      if (record.thermodynamics !== undefined && property in fromEquation) return fromEquation[property as keyof typeof fromEquation](engine.point(s), engine.equation!.gasConstant);
+      const entry = engine.entry(property, s);
+      return entry === undefined ? Number.NaN : engine.evaluate(entry, s);
+    },
+    evaluate(entry, s) {
+      let f = built.get(entry);
+      if (f === undefined) {
+        f = propertyModels[entry.model]!.make(entry.constants as never, engine);
+        built.set(entry, f);
+      }
+      return f(s);
+    },
+    entry(property, s, asked) {
+      const list = record.properties[property];
+      if (list === undefined) return undefined;
+      if (list.length === 1 && list[0]!.phase === undefined) return list[0];
+      let first: Entry | undefined;
+      for (const entry of list) {
+        if (entry.phase !== undefined && entry.phase !== (asked ?? s.side)) continue;
+        if (entry.ranges.length === 0 || entry.ranges.some((box) => inside(box, s))) return entry;
+        first ??= entry;
+      }
+      return first;
+    },
+  };
+  return engine;
+}
+
+function partner(collection: Collection, id: string): MaterialRecord {
+  const found = collection.materials[id];
+  if (found === undefined) throw new Problem({ code: 'missing-partner', message: `the record of ${id} is needed and missing` });
+  return found;
+}
+
+/**
+ * A material from its record.
+ *
+ * @param record      the record
+ * @param collection  the collection it stands in
+ * @param asked       the phase that the name stands for
+ * @returns           the material
+ */
+export function materialOf(record: MaterialRecord, collection: Collection, asked?: Side): Material {
+  const engine = engineOf(record, collection);
+  const has = new Set<string>(Object.keys(record.properties));
+  if (record.thermodynamics !== undefined) for (const id of Object.keys(record.thermodynamics.uncertainty)) has.add(id);
+  if (has.has('density')) has.add('thermalExpansion');
+  if (has.has('density') && has.has('viscosity')) has.add('kinematicViscosity');
+  if (has.has('density') && has.has('specificHeatCapacity') && has.has('thermalConductivity')) has.add('thermalDiffusivity');
+  if (has.has('kinematicViscosity') && has.has('thermalDiffusivity')) has.add('prandtl');
+  if (record.molarMass !== undefined) has.add('molarMass');
+  const melting = record.properties['meltingTemperature']?.[0];
+  return {
+    id: record.id,
+    name: record.name,
+    ...(record.formula === undefined ? {} : { formula: record.formula }),
+    aliases: record.aliases,
+    kind: record.kind,
+    phases: record.phases,
+    ...(record.molarMass === undefined ? {} : { molarMass: record.molarMass }),
+    ...(record.molarMass === undefined || record.kind === 'solid' ? {} : { gasConstant: gasConstantMolar / record.molarMass }),
+    ...(record.critical === undefined ? {} : { critical: record.critical }),
+    ...(record.triplePoint === undefined ? {} : { triple: record.triplePoint }),
+    ...(melting === undefined ? {} : { meltingTemperature: engine.evaluate(melting, { T: Number.NaN, p: 101325, side: 'liquid', x: 0 }) }),
+    takes: record.takes,
+    properties: (Object.keys(propertyUnits) as PropertyId[]).filter((id) => has.has(id)),
+    ...(asked === undefined ? {} : { asked }),
+    ...(record.about === undefined ? {} : { about: record.about }),
+    record,
+    engine,
+  };
+}

@@ -1,0 +1,140 @@
+/** Residual terms of a Helmholtz equation of state, as the papers print them. */
+export interface ResidualTerms {
+  /** Rows [n, d, t, c]: n delta^d tau^t exp(-delta^c); c = 0 means without the exponential. */
+  readonly power: readonly (readonly number[])[];
+  /** Rows [n, d, t, alpha, beta, gamma, epsilon]: n delta^d tau^t exp(-alpha (delta - epsilon)^2 - beta (tau - gamma)^2). */
+  readonly gaussian?: readonly (readonly number[])[];
+  /** Rows [n, a, b, B, C, D, A, beta]: n Delta^b delta psi, the terms that shape the critical region. */
+  readonly critical?: readonly (readonly number[])[];
+}
+
+/** Values of the residual part and its derivatives, overwritten by the next evaluation. */
+export interface Residual {
+  a: number;
+  /** Derivative by delta. */
+  d: number;
+  dd: number;
+  /** Derivative by tau. */
+  t: number;
+  tt: number;
+  dt: number;
+}
+
+const column = (rows: readonly (readonly number[])[], index: number): Float64Array => Float64Array.from(rows, (row) => row[index] ?? 0);
+
+/**
+ * Builds the evaluation of the residual part alpha_r(tau, delta).
+ *
+ * The powers of tau are kept between calls at one temperature, so that a search for the density costs only the powers of delta.
+ *
+ * @param terms  coefficients as printed
+ * @returns      first: alpha_r, its first two derivatives by delta; all: the derivatives by tau as well. Both fill and return one shared record
+ * @source       form: Span, Multiparameter Equations of State, Springer 2000, sections 3.1 and 3.3
+ */
+export function residualPart(terms: ResidualTerms): { first: (tau: number, delta: number) => Residual; all: (tau: number, delta: number) => Residual } {
+  const [n, d, t, c] = [0, 1, 2, 3].map((i) => column(terms.power, i)) as [Float64Array, Float64Array, Float64Array, Float64Array];
+  const count = n.length;
+  const warmed = new Float64Array(count);
+  const powers = new Float64Array(Math.max(...d, ...c) + 1);
+  const decays = new Float64Array(Math.max(...c) + 1);
+  const out: Residual = { a: 0, d: 0, dd: 0, t: 0, tt: 0, dt: 0 };
+  let tauKept = Number.NaN;
+  const gaussian = gaussianPart(terms.gaussian ?? []);
+  const critical = criticalPart(terms.critical ?? []);
+
+  const run = (tau: number, delta: number, full: boolean): Residual => {
+    if (tau !== tauKept) {
+      const log = Math.log(tau);
+      for (let i = 0; i < count; i++) warmed[i] = n[i]! * Math.exp(t[i]! * log);
+      tauKept = tau;
+    }
+    powers[0] = 1;
+    for (let i = 1; i < powers.length; i++) powers[i] = powers[i - 1]! * delta;
+    for (let i = 1; i < decays.length; i++) decays[i] = Math.exp(-powers[i]!);
+    let a = 0, ad = 0, add = 0, at = 0, att = 0, adt = 0;
+    for (let i = 0; i < count; i++) {
+      const ci = c[i]!;
+      const bend = ci === 0 ? 0 : ci * powers[ci]!;
+      const v = warmed[i]! * powers[d[i]!]! * (ci === 0 ? 1 : decays[ci]!);
+      const slope = d[i]! - bend;
+      a += v;
+      ad += v * slope;
+      add += v * (slope * (slope - 1) - ci * bend);
+      if (full) {
+        const ti = t[i]!;
+        at += v * ti;
+        att += v * ti * (ti - 1);
+        adt += v * ti * slope;
+      }
+    }
+    out.a = a;
+    out.d = ad / delta;
+    out.dd = add / (delta * delta);
+    out.t = at / tau;
+    out.tt = att / (tau * tau);
+    out.dt = adt / (tau * delta);
+    if (gaussian !== undefined) gaussian(tau, delta, out);
+    if (critical !== undefined) critical(tau, delta, out);
+    return out;
+  };
+  return { first: (tau, delta) => run(tau, delta, false), all: (tau, delta) => run(tau, delta, true) };
+}
+
+type Adder = (tau: number, delta: number, out: Residual) => void;
+
+function gaussianPart(rows: readonly (readonly number[])[]): Adder | undefined {
+  if (rows.length === 0) return undefined;
+  return (tau, delta, out) => {
+    for (const row of rows) {
+      const [n, d, t, alpha, beta, gamma, epsilon] = row as [number, number, number, number, number, number, number];
+      const v = n * delta ** d * tau ** t * Math.exp(-alpha * (delta - epsilon) ** 2 - beta * (tau - gamma) ** 2);
+      const sd = d / delta - 2 * alpha * (delta - epsilon);
+      const st = t / tau - 2 * beta * (tau - gamma);
+      out.a += v;
+      out.d += v * sd;
+      out.dd += v * (sd * sd - d / (delta * delta) - 2 * alpha);
+      out.t += v * st;
+      out.tt += v * (st * st - t / (tau * tau) - 2 * beta);
+      out.dt += v * sd * st;
+    }
+  };
+}
+
+function criticalPart(rows: readonly (readonly number[])[]): Adder | undefined {
+  if (rows.length === 0) return undefined;
+  return (tau, delta, out) => {
+    // The terms are singular at delta = 1 and tau = 1 exactly: step aside by less than any equation resolves.
+    const x = Math.abs(delta - 1) < 1e-9 ? 1e-9 : delta - 1;
+    const y = Math.abs(tau - 1) < 1e-9 ? 1e-9 : tau - 1;
+    const s = x * x;
+    for (const row of rows) {
+      const [n, a, b, B, C, D, A, beta] = row as [number, number, number, number, number, number, number, number];
+      const exponent = -C * s - D * y * y;
+      if (exponent < -500) continue;
+      const psi = Math.exp(exponent);
+      const theta = -y + A * s ** (1 / (2 * beta));
+      const Delta = theta * theta + B * s ** a;
+      const ratio = A * (1 / beta) * s ** (1 / (2 * beta) - 1);
+      const bend = 2 * B * a * s ** (a - 1);
+      const Dd = x * (2 * theta * ratio + bend);
+      const Ddd = 2 * theta * ratio + bend + 4 * B * a * (a - 1) * s ** (a - 1) + 2 * s * ratio * ratio + 4 * theta * A * (1 / beta) * (1 / (2 * beta) - 1) * s ** (1 / (2 * beta) - 1);
+      const P = Delta ** b;
+      const Pd = b * Delta ** (b - 1) * Dd;
+      const Pdd = b * (Delta ** (b - 1) * Ddd + (b - 1) * Delta ** (b - 2) * Dd * Dd);
+      const Pt = -2 * theta * b * Delta ** (b - 1);
+      const Ptt = 2 * b * Delta ** (b - 1) + 4 * theta * theta * b * (b - 1) * Delta ** (b - 2);
+      const Pdt = -2 * ratio * b * x * Delta ** (b - 1) - 2 * theta * b * (b - 1) * Delta ** (b - 2) * Dd;
+      const psid = -2 * C * x * psi;
+      const psidd = (2 * C * s - 1) * 2 * C * psi;
+      const psit = -2 * D * y * psi;
+      const psitt = (2 * D * y * y - 1) * 2 * D * psi;
+      const psidt = 4 * C * D * x * y * psi;
+      out.a += n * P * delta * psi;
+      out.d += n * (P * (psi + delta * psid) + Pd * delta * psi);
+      out.dd += n * (P * (2 * psid + delta * psidd) + 2 * Pd * (psi + delta * psid) + Pdd * delta * psi);
+      out.t += n * delta * (Pt * psi + P * psit);
+      out.tt += n * delta * (Ptt * psi + 2 * Pt * psit + P * psitt);
+      out.dt += n * (P * (psit + delta * psidt) + delta * Pd * psit + Pt * (psi + delta * psid) + Pdt * delta * psi);
+    }
+  };
+}

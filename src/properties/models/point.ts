@@ -1,0 +1,46 @@
+/** Thermodynamic properties of one state on one side of the saturation line, SI. */
+export interface Point {
+  /** [K] */
+  temperature: number;
+  /** [Pa] */
+  pressure: number;
+  /** [kg/m^3] */
+  density: number;
+  /** Isobaric specific heat capacity [J/(kg K)]. */
+  specificHeatCapacity: number;
+  /** Isochoric specific heat capacity [J/(kg K)]. */
+  isochoricHeatCapacity: number;
+  /** [m/s] */
+  speedOfSound: number;
+  /** -(1/rho) (d rho / d T) at constant pressure [1/K]. */
+  thermalExpansion: number;
+  /** (1/rho) (d rho / d p) at constant temperature [1/Pa]. */
+  compressibility: number;
+  /** [J/kg]; only differences mean something. */
+  enthalpy: number;
+}
+
+/** The two sides of a saturation line that an equation of state can be asked for. */
+export type Side = 'liquid' | 'vapour';
+
+/** Saturation line of a pure fluid, or bubble and dew line of a mixture treated as one fluid. */
+export interface SaturationLine {
+  /** Lowest and highest temperature of the line [K]. */
+  readonly from: number;
+  readonly to: number;
+  /** Pressure [Pa] at which the liquid boils at T [K]. */
+  bubble(T: number): number;
+  /** Pressure [Pa] at which the vapour condenses at T [K]. */
+  dew(T: number): number;
+}
+
+/** What every equation of state offers. */
+export interface EquationOfState {
+  /** Properties at T [K] and p [Pa]; `side` is used only below the critical temperature. The caller has checked the phase. */
+  at(T: number, p: number, side: Side): Point;
+  /** Properties at T [K] and density [kg/m^3]: for transport correlations and verification tables. */
+  of(T: number, rho: number): Point;
+  readonly line?: SaturationLine;
+  /** Specific gas constant [J/(kg K)]. */
+  readonly gasConstant: number;
+}

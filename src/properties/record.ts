@@ -1,0 +1,101 @@
+import type { Side } from './models/point.ts';
+
+/** Properties that a record may hold or that follow from it; ids as in the plan. */
+export const propertyUnits = {
+  density: 'kg/m^3',
+  viscosity: 'Pa s',
+  thermalConductivity: 'W/(m K)',
+  specificHeatCapacity: 'J/(kg K)',
+  thermalExpansion: '1/K',
+  speedOfSound: 'm/s',
+  kinematicViscosity: 'm^2/s',
+  thermalDiffusivity: 'm^2/s',
+  prandtl: '1',
+  compressibilityFactor: '1',
+  isentropicExponent: '1',
+  enthalpy: 'J/kg',
+  vapourPressure: 'Pa',
+  saturationTemperature: 'K',
+  latentHeat: 'J/kg',
+  surfaceTension: 'N/m',
+  meltingTemperature: 'K',
+  molarMass: 'kg/mol',
+  electricalConductivity: 'S/m',
+  emissivity: '1',
+} as const;
+
+export type PropertyId = keyof typeof propertyUnits;
+
+/** Phase of a state. Vapour is the gas below the critical temperature. */
+export type Phase = 'liquid' | 'gas' | 'vapour' | 'supercritical' | 'solid' | 'two-phase';
+
+/** Temperatures [K] and pressures [Pa] between which an entry holds. */
+export interface Box {
+  readonly temperature?: readonly [number, number];
+  readonly pressure?: readonly [number, number];
+  /** Share by mass, for mixtures. */
+  readonly composition?: readonly [number, number];
+}
+
+/** Relative uncertainty, 95 %, in one part of the range; `absolute` is its floor in the unit of the property. */
+export interface Band extends Box {
+  readonly phase?: Side;
+  readonly value: number;
+  readonly absolute?: number;
+}
+
+export type Constant = number | string | readonly Constant[] | { readonly [name: string]: Constant };
+
+/** A value from another work that the entry is tested against. */
+export interface RecordCheck {
+  readonly property: string;
+  readonly at: { readonly temperature?: number; readonly pressure?: number; readonly humidity?: number; readonly composition?: number };
+  readonly expect: number;
+  readonly within: number;
+  readonly source: string;
+}
+
+/** One correlation of one property. */
+export interface Entry {
+  readonly model: string;
+  readonly constants: { readonly [name: string]: Constant };
+  readonly phase?: Side | 'solid';
+  readonly ranges: readonly Box[];
+  readonly uncertainty: readonly Band[];
+  readonly source: string;
+  readonly notes?: string;
+  /** Emissivity: the surface it was measured on. */
+  readonly surface?: string;
+  readonly checks: readonly RecordCheck[];
+}
+
+/** An equation of state: one source, an uncertainty per property that follows from it. */
+export interface ThermodynamicsEntry extends Omit<Entry, 'uncertainty'> {
+  readonly uncertainty: { readonly [property: string]: readonly Band[] };
+}
+
+/** A material as the build stores it: numbers in SI. */
+export interface MaterialRecord {
+  readonly id: string;
+  readonly name: string;
+  readonly formula?: string;
+  readonly aliases: readonly string[];
+  /** Names that ask for one phase, such as steam. */
+  readonly phaseNames: { readonly [name: string]: Side };
+  readonly kind: 'fluid' | 'solid';
+  /** Phases that the record covers. */
+  readonly phases: readonly (Side | 'solid')[];
+  readonly takes: readonly ('humidity' | 'composition' | 'salinity')[];
+  readonly molarMass?: number;
+  readonly critical?: { readonly temperature: number; readonly pressure: number; readonly density: number };
+  readonly triplePoint?: { readonly temperature: number; readonly pressure: number };
+  /** What the record stands for where the name alone leaves it open, such as a class of oils. */
+  readonly about?: string;
+  readonly thermodynamics?: ThermodynamicsEntry;
+  readonly properties: { readonly [property: string]: readonly Entry[] };
+}
+
+/** All records by id. */
+export interface Collection {
+  readonly materials: { readonly [id: string]: MaterialRecord };
+}

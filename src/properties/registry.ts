@@ -1,0 +1,117 @@
+import { helmholtz, type HelmholtzConstants } from './models/helmholtz.ts';
+import { if97, type WaterConstants } from './models/if97.ts';
+import * as laws from './models/laws.ts';
+import { lemmonJacobsenConductivity, lemmonJacobsenViscosity, type GasConductivityConstants, type GasViscosityConstants } from './models/gas-transport.ts';
+import { waterConductivity, waterViscosity, type WaterConductivityConstants, type WaterViscosityConstants } from './models/water-transport.ts';
+import type { EquationModel, PropertyModel, Sample } from './sample.ts';
+
+type OfTemperature = (c: never) => (T: number) => number;
+const ofTemperature = (constants: readonly string[], law: OfTemperature): PropertyModel => ({
+  constants,
+  make(c) {
+    const f = law(c);
+    return (s) => f(s.T);
+  },
+});
+
+/** Temperature at which a rising saturation pressure reaches p, by bisection in the logarithm and secants. */
+export function boilingTemperature(pressure: (T: number) => number, p: number, from: number, to: number): number {
+  let low = from;
+  let high = to;
+  for (let i = 0; i < 200 && high - low > 1e-10 * high; i++) {
+    const middle = 0.5 * (low + high);
+    if (pressure(middle) < p) low = middle;
+    else high = middle;
+  }
+  return 0.5 * (low + high);
+}
+
+/** Correlations by the name that records use. */
+export const propertyModels: { readonly [name: string]: PropertyModel } = {
+  constant: { constants: ['value'], make: (c: { value: number }) => () => c.value },
+  polynomial: ofTemperature(['terms', 'gives?', 'argument?', 'origin?', 'scale?'], laws.polynomial),
+  powers: ofTemperature(['terms', 'gives?', 'argument?'], laws.powers),
+  'log-powers': ofTemperature(['terms', 'log?', 'gives?', 'argument?'], laws.logPowers),
+  'critical-powers': ofTemperature(['critical', 'terms', 'base?', 'gives?'], laws.criticalPowers),
+  sutherland: ofTemperature(['value', 'T0', 'S'], laws.sutherland),
+  vogel: ofTemperature(['A', 'B', 'C', 'gives?'], laws.vogel),
+  table: ofTemperature(['rows', 'gives?', 'argument?'], laws.table),
+  antoine: ofTemperature(['A', 'B', 'C', 'gives?', 'argument?'], laws.antoine),
+  walther: {
+    constants: ['T1', 'nu1', 'T2', 'nu2'],
+    make(c: Parameters<typeof laws.walther>[0], engine) {
+      const nu = laws.walther(c);
+      return (s) => nu(s.T) * engine.value('density', s);
+    },
+  },
+  'ice-melting-line': {
+    constants: ['temperature', 'pressure', 'terms'],
+    make(c: Parameters<typeof laws.iceMeltingLine>[0]) {
+      const melting = laws.iceMeltingLine(c);
+      return (s) => melting(s.p);
+    },
+  },
+  'water-viscosity': {
+    constants: ['H0', 'H1'],
+    make(c: WaterViscosityConstants, engine) {
+      const viscosity = waterViscosity(c);
+      return (s) => viscosity(s.T, engine.point(s).density);
+    },
+  },
+  'water-conductivity': {
+    constants: ['L0', 'L1', 'A'],
+    make(c: WaterConductivityConstants, engine) {
+      let sample: Sample;
+      const conductivity = waterConductivity(c, () => engine.value('viscosity', sample));
+      return (s) => {
+        sample = s;
+        return conductivity(engine.point(s), engine.equation!.gasConstant);
+      };
+    },
+  },
+  'gas-viscosity': {
+    constants: ['molarMass', 'epsilon', 'sigma', 'temperature', 'density', 'terms'],
+    make(c: GasViscosityConstants, engine) {
+      const viscosity = lemmonJacobsenViscosity(c);
+      return (s) => viscosity(s.T, engine.point(s).density);
+    },
+  },
+  'gas-conductivity': {
+    constants: ['molarMass', 'epsilon', 'sigma', 'temperature', 'density', 'dilute', 'terms', 'critical'],
+    make(c: GasConductivityConstants, engine) {
+      let sample: Sample;
+      const conductivity = lemmonJacobsenConductivity(c, { viscosity: () => engine.value('viscosity', sample), equation: engine.equation! });
+      return (s) => {
+        sample = s;
+        return conductivity(engine.point(s));
+      };
+    },
+  },
+  'saturation-pressure': { constants: [], make: (_c, engine) => (s) => engine.saturation(s.T) },
+  'saturation-temperature': {
+    constants: [],
+    make(_c, engine) {
+      const line = engine.equation!.line!;
+      return (s) => boilingTemperature(line.bubble, s.p, line.from, line.to);
+    },
+  },
+  'latent-heat': {
+    constants: [],
+    make(_c, engine) {
+      const equation = engine.equation!;
+      return (s) => {
+        const p = equation.line!.bubble(s.T);
+        return equation.at(s.T, p, 'vapour').enthalpy - equation.at(s.T, p, 'liquid').enthalpy;
+      };
+    },
+  },
+};
+
+/** Equations of state by the name that records use. */
+export const equationModels: { readonly [name: string]: EquationModel } = {
+  'water-if97': {
+    constants: ['gasConstant', 'region1', 'region2', 'region2Ideal', 'region3', 'region3Log', 'region5', 'region5Ideal', 'boundary23', 'saturation', 'liquid', 'vapour', 'scientific'],
+    make: (c: WaterConstants) => if97(c),
+  },
+  helmholtz: { constants: ['temperature', 'density', 'gasConstant', 'densest', 'ideal', 'residual', 'saturation?'], make: (c: HelmholtzConstants) => helmholtz(c) },
+};

@@ -1,0 +1,38 @@
+import type { EquationOfState, Point, Side } from './models/point.ts';
+import type { PropertyId } from './record.ts';
+
+/** The state at which a correlation is evaluated. */
+export interface Sample {
+  /** [K] */
+  T: number;
+  /** [Pa] */
+  p: number;
+  side: Side;
+  /** Share of the second component by mass, or relative humidity; 0 where the material takes none. */
+  x: number;
+}
+
+/** What a correlation may ask its material for. */
+export interface Engine {
+  readonly equation?: EquationOfState;
+  /** Thermodynamic properties at the sample; kept for the last state. */
+  point(sample: Sample): Point;
+  /** Another property of the same material at the same sample. */
+  value(property: PropertyId, sample: Sample): number;
+  /** Saturation pressure [Pa] at T. */
+  saturation(T: number): number;
+  readonly molarMass: number;
+}
+
+/** One named correlation: the constants it takes, and how it is built from them. A `?` at the end marks one that may be missing. */
+export interface PropertyModel {
+  readonly constants: readonly string[];
+  make(constants: never, engine: Engine): (sample: Sample) => number;
+}
+
+/** One named equation of state. `partners` are other materials it is made of. */
+export interface EquationModel {
+  readonly constants: readonly string[];
+  readonly partners?: readonly string[];
+  make(constants: never, partners: readonly Engine[], x: () => number): EquationOfState;
+}
