@@ -1,4 +1,4 @@
-import { nearestName, Problem, type ProblemData } from '../problems/index.ts';
+import { harmless, nearestName, Problem, type ProblemData } from '../problems/index.ts';
 import { unit, type Unit } from '../units/index.ts';
 import type { Cell } from './csv.ts';
 
@@ -39,7 +39,7 @@ export function headOf(cell: Cell, file: string): Head {
   const place = { file, line, column };
   if (cell.text.length > longestHead) throw new Problem({ code: 'nameless-column', message: `a header of ${cell.text.length} characters`, ...place, expected: `at most ${longestHead} characters` });
   const match = /^([^[\]]*?)\s*(?:\[([^[\]]*)\])?$/.exec(cell.text);
-  const name = match?.[1] ?? '';
+  const name = harmless((match?.[1] ?? '').replaceAll(/\s+/g, ' ')); // it is shown at terminals and on pages
   if (match === null || name === '') throw new Problem({ code: 'nameless-column', message: `"${cell.text.slice(0, 60)}" is no header of a column`, ...place, length: cell.text.length, expected: 'name [unit], for example pressure drop [Pa]' });
   if (Number.isFinite(Number(name))) throw new Problem({ code: 'number-for-name', message: `the first line holds the number ${name} where a name is due`, ...place, length: cell.text.length, expected: 'a first line that names the columns: name [unit], name [unit], ...' });
   const written = (match[2] ?? '').trim();

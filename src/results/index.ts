@@ -6,3 +6,5 @@ export { asymptoticRatio, judgeFamily, type GridKind, type GridNumbers, type Hel
 export { leastSquares, type LeastSquares } from './leastSquares.ts';
 export { apparentOrder, extrapolate, indexHalfWidth, tripletKind, type Triplet, type TripletKind } from './order.ts';
 export { readTable, type Column, type Table } from './table.ts';
+export { grids, type GridOptions, type GridResult, type GridVerdict } from './grids.ts';
+export { allowed, readLimit, type Limit, type Outcome } from './limit.ts';

@@ -34,13 +34,14 @@ describe('tables that are read', () => {
   });
   it('quoted cells keep separators, line ends and doubled quotes (RFC 4180, rules 6 and 7)', () => {
     const table = read('"speed, ""mean""\nof all [m/s]",x\n1,2\n');
-    expect(table.columns[0]?.name).toBe('speed, "mean"\nof all');
+    expect(table.columns[0]?.name).toBe('speed, "mean" of all');
     expect(table.place(0, 1)).toEqual({ file: 'a.csv', line: 3, column: 3 });
   });
   it('units come from the header: a temperature has its zero, a rise has none', () => {
     const table = read('outlet temperature [degC],temperature rise [degC],factor,ratio [-]\n20,20,1,2\n');
     expect(table.columns.map((c) => c.values[0])).toEqual([293.15, 20, 1, 2]);
   });
+  it('a name cannot carry an escape sequence to a terminal', () => expect(read('\u001bcx,y\n1,2\n').columns[0]?.name ?? '').not.toContain('\u001b'));
   it('the last digit shown is that of the finest cell', () => {
     const table = read('a [mm],b,c\n1.5,12,1.2e-3\n1.25,3,4e-3\n');
     expect(table.columns.map((c) => c.lastDigit)).toEqual([expect.closeTo(1e-5, 12), 1, expect.closeTo(1e-4, 12)]);

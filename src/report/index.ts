@@ -1,0 +1,2 @@
+export { gridsDocument, gridsText } from './grids.ts';
+export { wrapped } from './wrap.ts';
