@@ -7,4 +7,6 @@ export interface Entry {
 }
 
 /** The commands in the order of a day's work, which is the order of the overview. */
-export const COMMANDS: Readonly<Record<string, Entry>> = {};
+export const COMMANDS: Readonly<Record<string, Entry>> = {
+  grids: { summary: 'grid or step convergence of a table of results: order, value at size zero, band', load: () => import('./grids.ts') },
+};
