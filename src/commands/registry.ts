@@ -9,4 +9,5 @@ export interface Entry {
 /** The commands in the order of a day's work, which is the order of the overview. */
 export const COMMANDS: Readonly<Record<string, Entry>> = {
   grids: { summary: 'grid or step convergence of a table of results: order, value at size zero, band', load: () => import('./grids.ts') },
+  convert: { summary: 'a quantity in another unit', load: () => import('./convert.ts') },
 };

@@ -131,7 +131,7 @@ export function readQuantity(text: string, want: Wanted): Quantity {
     if (factor !== found.factor) assumed.add('one turn is 2 pi radians');
     else if (found.angle !== 0 && wanted.angle === 0 && sameDimension(found.dimension, [0, 0, -1, 0, 0, 0, 0])) assumed.add(`${withUnit.unit} is counted in radians per second; turns per second are Hz`);
     const offset = isDifference || found.difference ? 0 : found.offset;
-    if (isDifference && found.offset !== 0) assumed.add(`${withUnit.unit} is read as a difference`);
+    if (isDifference && !words.difference && found.offset !== 0) assumed.add(`${withUnit.unit} is read as a difference`);
     const value = clean(offset === 0 ? scaled(side.value, factor) : side.value * factor + offset) + (words.gauge ? atmosphere : 0);
     physical(value, text, wanted, side);
     return value;
