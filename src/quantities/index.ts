@@ -1,13 +1,19 @@
 import type { Definition } from '../workings/index.ts';
+import { branches } from './branches.ts';
+import { groups } from './groups.ts';
+import { layers } from './layers.ts';
 import { properties } from './property-states.ts';
 import { results } from './results.ts';
 import { scales } from './scales.ts';
 import { temperatures } from './temperatures.ts';
+import { turbulence } from './turbulence.ts';
 import { wallTemperatures } from './walls.ts';
 import { words } from './words.ts';
 
+export * from './correlations/index.ts';
+export { layerDefinitions, type Layer } from './layers.ts';
 export { features } from './words.ts';
-export { givenPropertyWays, lawProperties, materialWays, propertyStates, singleProperties, type PropertyAbout } from './property-states.ts';
+export { givenPropertyWays, isProperty, lawProperties, materialWays, propertyStates, singleProperties, type PropertyAbout } from './property-states.ts';
 
 /** Every definition that all cases share, one file a topic. */
 export const generalDefinitions: Definition[] = [
@@ -15,6 +21,10 @@ export const generalDefinitions: Definition[] = [
   ...scales,
   ...temperatures,
   ...wallTemperatures,
+  ...layers,
   ...properties,
   ...results,
+  ...groups,
+  ...branches,
+  ...turbulence,
 ];

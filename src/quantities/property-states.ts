@@ -95,8 +95,36 @@ export function materialWays(about: Readonly<Record<string, PropertyAbout>>): De
   ];
 }
 
-/** Ways from a property given in the case to all its states: the given value wins everywhere. */
+const derivedProperties = ['kinematicViscosity', 'thermalDiffusivity', 'prandtl'];
+
+/** What a given derived property says of the one it is derived from. */
+const backwards: Readonly<Record<string, { readonly id: string; readonly with: readonly string[]; readonly value: (given: number, other: readonly number[]) => number; readonly formula: string }>> = {
+  kinematicViscosity: { id: 'viscosity', with: ['density'], value: (nu, [rho]) => nu * (rho as number), formula: 'mu = nu rho' },
+  thermalDiffusivity: { id: 'thermalConductivity', with: ['density', 'specificHeatCapacity'], value: (a, [rho, cp]) => a * (rho as number) * (cp as number), formula: 'k = alpha rho cp' },
+  prandtl: { id: 'thermalConductivity', with: ['viscosity', 'specificHeatCapacity'], value: (pr, [mu, cp]) => ((mu as number) * (cp as number)) / pr, formula: 'k = mu cp/Pr' },
+};
+
+/**
+ * Ways from a property given in the case to all its states: the given value wins everywhere, and says what it can of the property behind it.
+ *
+ * @param property  id, such as `viscosity` or `prandtl`
+ * @param path      where the case gives it
+ * @returns         ways to add to the definitions
+ */
 export function givenPropertyWays(property: string, path: string): Definition[] {
   const identity: Way = { needs: [path], value: (of) => of[path] as number, formula: 'as given in the case, constant', source: 'the case' };
-  return lawProperties.some((p) => p.id === property) ? propertyStates.map(({ suffix }) => ways(`${property}${suffix}`, [identity])) : [ways(property, [identity])];
+  const everywhere = lawProperties.some((p) => p.id === property) || derivedProperties.includes(property);
+  const back = backwards[property];
+  return [
+    ...(everywhere ? propertyStates.map(({ suffix }) => ways(`${property}${suffix}`, [identity])) : [ways(property, [identity])]),
+    ...(back === undefined ? [] : propertyStates.map(({ suffix }) => {
+      const others = back.with.map((id) => `${id}${suffix}`);
+      return ways(`${back.id}${suffix}`, [{ needs: [path, ...others], value: (of) => back.value(of[path] as number, others.map((id) => of[id] as number)), formula: back.formula, source: 'definition' }]);
+    })),
+  ];
+}
+
+/** Whether a property id can be given at all states. */
+export function isProperty(id: string): boolean {
+  return lawProperties.some((p) => p.id === id) || singleProperties.some((p) => p.id === id) || derivedProperties.includes(id) || id === 'gasConstant' || id === 'meanFreePath';
 }

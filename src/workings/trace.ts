@@ -70,7 +70,30 @@ export function trace(workings: Workings, id: string): Step[] {
   return steps;
 }
 
-/** Ids of all ways out of range on the way to a quantity: the flag travels with every number that used one. */
-export function flagsOf(workings: Workings, id: string): string[] {
-  return trace(workings, id).filter((s) => s.outside.length > 0).map((s) => s.id);
+/**
+ * Ids of the quantities out of range on the way to a quantity: the flag travels with every number that used one.
+ *
+ * @param workings  the graph at one point
+ * @returns         a reader of flags by id, each quantity looked at once
+ */
+export function flagsIn(workings: Workings): (id: string) => readonly string[] {
+  const memo = new Map<number, readonly string[]>();
+  const look = (i: number): readonly string[] => {
+    const had = memo.get(i);
+    if (had !== undefined) return had;
+    memo.set(i, []);
+    if (!workings.known(i)) return [];
+    const bound = workings.used[i];
+    const found = new Set<string>();
+    for (const w of bound?.when ?? []) for (const id of look(w.slot)) found.add(id);
+    for (const n of bound?.needs ?? []) for (const id of look(n)) found.add(id);
+    if (workings.outside(i).length > 0) found.add((workings.slots[i] as Workings['slots'][number]).id);
+    const out = [...found];
+    memo.set(i, out);
+    return out;
+  };
+  return (id) => {
+    const i = workings.index.get(id);
+    return i === undefined ? [] : look(i);
+  };
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { flagsOf, joinDefinitions, loop, missing, quantity, spreads, trace, way, ways, wordWay, Workings, type Definition, type Given } from '../../src/workings/index.ts';
+import { flagsIn, joinDefinitions, loop, missing, quantity, spreads, trace, way, ways, wordWay, Workings, type Definition, type Given } from '../../src/workings/index.ts';
 
 const q = (id: string, unit = '1') => quantity(id, { symbol: id, name: id, unit });
 const defs: Definition[] = [
@@ -35,7 +35,7 @@ describe('resolve', () => {
   it('keeps the nearest way outside its range and lets the flag travel', () => {
     const w = make({ ...water, speed: 0.15 }, [quantity('shear', { symbol: '', name: '', unit: '1' }, [way({ needs: ['friction'], value: ({ friction }) => friction / 8, formula: 'f/8', source: 'x' })])]);
     expect(w.get('shear')).toBeCloseTo((0.3164 * 3000 ** -0.25) / 8, 15);
-    expect(flagsOf(w, 'shear')).toEqual(['friction']);
+    expect(flagsIn(w)('shear')).toEqual(['friction']);
     expect(trace(w, 'friction').at(-1)?.outside).toEqual([{ need: 'reynolds', value: 3000, range: [4000, 1e5] }]);
   });
   it('never passes on a number that is not finite: the failure has a name', () => {

@@ -1,0 +1,171 @@
+import { wallEntries, type Case } from '../case/index.ts';
+import { costDefinitions } from '../cost/index.ts';
+import { flows, type Flow } from '../flows/index.ts';
+import { meshDefinitions } from '../mesh/index.ts';
+import { numericsDefinitions } from '../numerics/index.ts';
+import { Problem } from '../problems/index.ts';
+import { propertyAt, type Collection, type Material } from '../properties/index.ts';
+import { generalDefinitions, givenPropertyWays, isProperty, materialWays } from '../quantities/index.ts';
+import { timeDefinitions } from '../time/index.ts';
+import { joinDefinitions, ways, Workings, type Definition, type Given } from '../workings/index.ts';
+import { factsOf } from './facts.ts';
+import { fluidOf } from './fluid.ts';
+import { givenOf, type Range } from './given.ts';
+import { leafDefinitions, leavesOf, wallPlaces, type Leaf } from './leaves.ts';
+import { bindTargets, kindsOf, type BoundTarget } from './targets.ts';
+import { vocabulary } from './vocabulary.ts';
+import { wallDefinitions } from './wall-definitions.ts';
+
+export interface AssembleOptions {
+  /** Definitions of the words that rules fill. */
+  readonly words?: readonly Definition[];
+  /** Materials to look in; the shipped ones unless given. */
+  readonly materials?: Collection;
+}
+
+/** Something taken without being given. */
+export interface Assumption {
+  readonly id: string;
+  readonly says: string;
+}
+
+/** Case, material, flow and definitions in one graph. */
+export interface Assembled {
+  readonly case: Case;
+  readonly flow: Flow;
+  readonly workings: Workings;
+  readonly targets: readonly BoundTarget[];
+  readonly ranges: readonly Range[];
+  readonly fluid?: Material;
+  readonly wallMaterials: Readonly<Record<string, readonly string[]>>;
+  readonly phaseFlags: readonly string[];
+  readonly assumptions: readonly Assumption[];
+  /** Paths that no number follows from. */
+  readonly unused: readonly string[];
+  /** Choices the case states, by choice id. */
+  readonly chosen: Readonly<Record<string, string>>;
+  readonly leaves: readonly Leaf[];
+  /** Whether the user can give a number at a path. */
+  askable(id: string): boolean;
+}
+
+/**
+ * Joins a case with its flow, fluid, walls and all definitions into one graph.
+ *
+ * @param on       the case
+ * @param options  rule words, materials
+ * @returns        the graph and what belongs to it
+ * @throws         {Problem} flow-not-built, unknown-material, impossible-state and the like, at the place of the value
+ */
+export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
+  const flow = flowOf(on);
+  const walls = wallEntries(on, flow.walls, vocabulary);
+  const base: Definition[] = [...generalDefinitions, ...meshDefinitions, ...timeDefinitions, ...numericsDefinitions, ...costDefinitions, ...(options.words ?? []), ...flow.definitions];
+  const units = new Map(base.flatMap((d) => ('more' in d ? [] : [[d.id, d.unit] as const])));
+  const exists = (id: string): boolean => units.has(id);
+  const fluid = fluidOf(on, options.materials);
+  const facts = factsOf(on, flow, walls, kindsOf(on, (id) => units.get(id)), fluid.medium);
+  const wall = wallDefinitions(on, flow, walls, options.materials, exists);
+  const leaves = leavesOf(vocabulary, on.flow, flow.walls, (path) => on.list(path));
+  const { given, ranges } = givenOf(on);
+  const assumed: Record<string, Given> = Object.fromEntries(Object.entries(fluid.assumed).map(([path, value]) => [path, { value, kind: 'assumed' as const }]));
+  const flowed = actualFlow(on, fluid.material);
+  const ownLeaves = extraLeaves(on, leaves, exists);
+  const definitions: Definition[] = [
+    ...base,
+    ...leafDefinitions([...leaves, ...ownLeaves], exists),
+    ways('inletTemperature', [
+      ...['inlet.temperature', 'fluid.temperature', 'inlet.totalTemperature', 'initial.temperature'].map((path) => ({ needs: [path], value: (of: Readonly<Record<string, number>>) => of[path] as number, formula: `T_in as given: ${path}`, source: 'the case' })),
+    ]),
+    ...wall.definitions,
+    ...(fluid.laws === undefined ? [] : materialWays(fluid.laws.about)),
+    ...[...on.entries.keys()].flatMap((path) => (path.startsWith('fluid.') && isProperty(path.slice(6)) ? givenPropertyWays(path.slice(6), path) : [])),
+  ];
+  const places = {
+    of: { wall: wallPlaces(flow.walls), station: flow.stations, region: flow.regions, inlet: on.list('inlets').map((n) => `inlets.${n}`), species: on.list('species').map((n) => `species.${n}`), particle: on.list('particles').map((n) => `particles.${n}`) },
+    target: { wall: targetWall(on, flow, walls), station: 'target' },
+  };
+  const nodes = joinDefinitions(definitions, places);
+  const words = Object.fromEntries(Object.entries(facts.words).map(([id, value]) => [id, { value, kind: facts.assumed.some((a) => a.id === id) ? ('assumed' as const) : ('given' as const) }]));
+  const workings = new Workings(nodes, { ...words, ...assumed, ...given, ...flowed.given }, { ...fluid.laws?.laws, ...wall.laws });
+  const paths = new Set(leaves.map((l) => l.path));
+  return {
+    case: on,
+    flow,
+    workings,
+    targets: bindTargets(on, workings, flow.walls),
+    ranges,
+    ...(fluid.material === undefined ? {} : { fluid: fluid.material }),
+    wallMaterials: wall.materials,
+    phaseFlags: fluid.laws?.flags ?? [],
+    assumptions: [
+      ...Object.keys(fluid.assumed).map((id) => ({ id, says: id === 'fluid.pressure' ? 'the pressure is 1 atm: it is not given' : 'the temperature is 20 degC: it is not given' })),
+      ...flowed.assumptions,
+      ...facts.assumed,
+      ...[...on.entries.values()].flatMap((e) => e.assumed.map((says) => ({ id: e.path, says }))),
+      ...on.warnings.map((says) => ({ id: 'case', says })),
+    ],
+    unused: [...on.entries.values()].filter((e) => e.kind === 'quantity' && !e.path.startsWith('targets.') && e.path !== 'format' && !e.path.startsWith('computing.') && isUnused(workings, e.path)).map((e) => e.path),
+    chosen: chosenOf(on),
+    leaves,
+    askable: (id) => paths.has(id),
+  };
+}
+
+function flowOf(on: Case): Flow {
+  const flow = flows[on.flow];
+  if (flow !== undefined) return flow;
+  throw new Problem({ code: 'flow-not-built', message: `the flow ${on.flow} is known but not built yet`, file: on.file, ...on.get('flow')?.position, expected: `one of ${Object.keys(flows).join(', ')}; general takes a length and a speed and judges by analogy` });
+}
+
+/** The wall the target speaks of, else the flow's, else the first that is not adiabatic. */
+function targetWall(on: Case, flow: Flow, walls: ReturnType<typeof wallEntries>): string {
+  if (flow.walls.length === 0) return 'wall';
+  const named = flow.walls.find((w) => on.targets.some((t) => t.place?.split(/[\s,]+/).includes(w)));
+  const active = flow.walls.find((w) => ['temperature', 'heatFlux', 'heat', 'heatTransferCoefficient'].some((key) => walls.get(w)?.has(key)));
+  return `walls.${named ?? active ?? flow.targetWall ?? flow.walls[0]}`;
+}
+
+/** Numbers of the case at paths that the flow does not list, so that nothing the user wrote is lost. */
+function extraLeaves(on: Case, leaves: readonly Leaf[], exists: (id: string) => boolean): Leaf[] {
+  const known = new Set(leaves.map((l) => l.path));
+  return [...on.entries.values()].filter((e) => e.kind === 'quantity' && !known.has(e.path) && !exists(e.path) && !e.path.startsWith('targets.')).map((e) => ({ path: e.path, unit: e.unit ?? '1', name: e.path, gives: [] }));
+}
+
+/** A volume flow at normal or standard conditions is a mass flow. */
+function actualFlow(on: Case, fluid: Material | undefined): { given: Record<string, Given>; assumptions: Assumption[] } {
+  const entry = on.get('inlet.volumeFlow');
+  if (entry?.reference === undefined || typeof entry.value !== 'number') return { given: {}, assumptions: [] };
+  const at = entry.reference === 'normal' ? { temperature: 273.15, pressure: 101325, says: '0 degC and 1 atm' } : { temperature: 288.15, pressure: 101325, says: '15 degC and 1 atm' };
+  if (fluid === undefined) throw new Problem({ code: 'no-reference-state', message: `a ${entry.reference} volume flow needs a material to know its mass`, file: on.file, ...entry.position, expected: 'fluid: { material: ... } or a mass flow' });
+  const density = propertyAt(fluid, 'density', at)?.value;
+  if (density === undefined) return { given: {}, assumptions: [] };
+  return { given: { 'inlet.massFlow': { value: entry.value * density, kind: 'given' } }, assumptions: [{ id: entry.path, says: `a ${entry.reference} volume flow holds at ${at.says}` }] };
+}
+
+function isUnused(workings: Workings, path: string): boolean {
+  const i = workings.index.get(path);
+  return i === undefined || workings.followers(i).length <= 1;
+}
+
+const schemes: Readonly<Record<string, string>> = { '1 upwind-biased': 'upwind-1', '2 upwind-biased': 'upwind-2', '3 upwind-biased': 'upwind-3', '2 central': 'central-2', '4 central': 'central-4' };
+const choiceKeys: Readonly<Record<string, string>> = { turbulence: 'turbulence-treatment', closure: 'closure', wallTreatment: 'near-wall-treatment', densityVariesWith: 'density-law', run: 'run-character', timeScheme: 'time-scheme', precision: 'precision' };
+
+/** Choices the case states, in the option words of the plan. */
+function chosenOf(on: Case): Record<string, string> {
+  const out: Record<string, string> = {};
+  for (const [key, id] of Object.entries(choiceKeys)) {
+    const word = on.word(`choices.${key}`);
+    if (word !== undefined) out[id] = word;
+  }
+  const cuts = on.get('choices.cuts')?.value;
+  if (Array.isArray(cuts) && cuts.length > 0) out['dimension-and-cuts'] = cuts.join('+');
+  const character = on.word('choices.convection.character');
+  const order = on.number('choices.convection.order');
+  if (character === 'blended') out['convection-scheme'] = 'blended';
+  else if (character !== undefined || order !== undefined) out['convection-scheme'] = schemes[`${order ?? 2} ${character ?? 'upwind-biased'}`] ?? 'limited';
+  const prandtl = on.word('choices.turbulentPrandtl') ?? (on.number('choices.turbulentPrandtl') === undefined ? undefined : 'constant');
+  if (prandtl !== undefined) out['turbulent-prandtl'] = prandtl;
+  return out;
+}
+

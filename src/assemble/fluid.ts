@@ -1,0 +1,71 @@
+import type { Case, Entry } from '../case/index.ts';
+import { Problem, type ProblemData } from '../problems/index.ts';
+import { loadMaterial, type Collection, type Material, type State } from '../properties/index.ts';
+import { fluidLaws, type MaterialLaws } from './material-laws.ts';
+
+export const assumedPressure = 101325;
+export const assumedTemperature = 293.15;
+
+/** The fluid of a case: its material with the state that settles its phase, or constants alone. */
+export interface Fluid {
+  readonly material?: Material;
+  readonly laws?: MaterialLaws;
+  readonly medium?: 'gas' | 'liquid' | 'solid';
+  readonly state: State;
+  /** Paths taken without being given, with the SI value. */
+  readonly assumed: Readonly<Record<string, number>>;
+}
+
+/** A problem that came from a value of the case, with the place of that value. */
+export function placed<T>(entry: Entry | undefined, file: string, make: () => T): T {
+  try {
+    return make();
+  } catch (error) {
+    if (!(error instanceof Problem) || entry === undefined) throw error;
+    throw new Problem(error.list.map((p): ProblemData => ({ file, ...entry.position, ...p })));
+  }
+}
+
+/**
+ * Loads the fluid of a case.
+ *
+ * @param on         the case
+ * @param materials  the collection
+ * @returns          material, laws, state of matter; where pressure or temperature is not given, standard pressure and 20 degC are taken and listed
+ * @throws           {Problem} unknown-material, impossible-state, at the place of the value
+ */
+export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
+  const assumed: Record<string, number> = {};
+  const pressure = on.number('fluid.pressure') ?? on.number('inlet.totalPressure');
+  const temperature = on.number('inlet.temperature') ?? on.number('fluid.temperature') ?? on.number('inlet.totalTemperature') ?? on.number('initial.temperature') ?? middle(on);
+  const entry = on.get('fluid.material');
+  if (typeof entry?.value !== 'string') {
+    const density = on.number('fluid.density');
+    const said = on.word('fluid.medium') as Fluid['medium'];
+    // A fluid of constants need not say its state of matter: the density tells.
+    const medium = said ?? (density === undefined ? undefined : density > 50 ? 'liquid' : 'gas');
+    return { state: { temperature: temperature ?? assumedTemperature, pressure: pressure ?? assumedPressure }, ...(medium === undefined ? {} : { medium }), assumed };
+  }
+  if (pressure === undefined) assumed['fluid.pressure'] = assumedPressure;
+  if (temperature === undefined) assumed['fluid.temperature'] = assumedTemperature;
+  const name = entry.value;
+  const material = placed(entry, on.file, () => loadMaterial(name, materials));
+  const humidity = on.number('fluid.humidity');
+  const share = on.list('fluid.composition')[0];
+  const composition = share === undefined ? undefined : on.number(`fluid.composition.${share}`);
+  const state: State = {
+    temperature: temperature ?? assumedTemperature,
+    pressure: pressure ?? assumedPressure,
+    ...(humidity === undefined ? {} : { humidity }),
+    ...(composition === undefined ? {} : { composition }),
+    ...(material.asked === undefined ? {} : { phase: material.asked }),
+  };
+  const laws = placed(on.get('fluid.pressure') ?? entry, on.file, () => fluidLaws(material, state));
+  return { material, laws, medium: laws.phase === 'liquid' ? 'liquid' : laws.phase === 'solid' ? 'solid' : 'gas', state, assumed };
+}
+
+/** Middle of the wall and surroundings temperatures, where nothing else tells the state. */
+function middle(on: Case): number | undefined {
+  const found = [...on.entries.values()].filter((e) => /^(walls?\..*temperature|surroundings\.temperature)$/.test(e.path) && typeof e.value === 'number').map((e) => e.value as number);
+  return found.length === 0 ? undefined : (Math.min(...found) + Math.max(...found)) / 2;
+}

@@ -1,0 +1,73 @@
+import { laws as lawsOf, propertyIn, takeState, type Material, type PropertyId, type State } from '../properties/index.ts';
+import { lawProperties, singleProperties, type PropertyAbout } from '../quantities/index.ts';
+import type { Law } from '../workings/index.ts';
+
+/** A material as laws the workings can call, and what its record says of each. */
+export interface MaterialLaws {
+  readonly laws: Readonly<Record<string, Law>>;
+  readonly about: Readonly<Record<string, PropertyAbout>>;
+  readonly phase: string;
+  readonly flags: readonly string[];
+}
+
+/**
+ * Laws of a fluid in the phase it has at a state.
+ *
+ * @param material  the fluid
+ * @param state     the state that settles phase, humidity and composition
+ * @returns         laws by property id, with source and range
+ * @throws          {Problem} impossible-state, missing-humidity and the like, from the record
+ */
+export function fluidLaws(material: Material, state: State): MaterialLaws {
+  const taken = takeState(material, state);
+  const source = lawsOf(material, state);
+  const laws: Record<string, Law> = {};
+  const about: Record<string, PropertyAbout> = {};
+  const add = (id: string, symbol: string, property: PropertyId, at: (law: (T: number, p: number) => number) => (T: number, p: number) => number = (law) => law): void => {
+    const law = source.law(property);
+    if (law === undefined) return;
+    const here = propertyIn(material, property, taken);
+    if (here === undefined) return;
+    const uncertainty = (T: number, p: number): number => propertyIn(material, property, { ...taken, sample: { ...taken.sample, T, p } })?.uncertainty ?? here.uncertainty;
+    laws[id] = Object.assign(at((T, p) => law(T, p)), { uncertainty });
+    const { temperature, pressure } = here.range;
+    about[id] = { formula: `${symbol}(T, p) of ${material.name}, ${here.phase}`, source: here.source, ...(temperature === undefined ? {} : { temperature }), ...(pressure === undefined ? {} : { pressure }) };
+  };
+  for (const p of [...lawProperties, ...singleProperties]) if ((material.properties as readonly string[]).includes(p.id)) add(p.id, p.symbol, p.id as PropertyId);
+  if (material.critical !== undefined) {
+    for (const [id, value] of [['criticalTemperature', material.critical.temperature], ['criticalPressure', material.critical.pressure]] as const) {
+      laws[id] = Object.assign(() => value, { uncertainty: () => 0 });
+      about[id] = { formula: `constant of ${material.name}`, source: 'material record' };
+    }
+  }
+  const vapour = saturatedVapour(material, state);
+  if (vapour !== undefined && 'saturationTemperature' in laws) {
+    laws['vapourDensity'] = Object.assign(vapour, { uncertainty: () => 0.01 });
+    about['vapourDensity'] = { formula: `rho_v(p) of ${material.name}, saturated`, source: about['saturationTemperature']?.source ?? 'material record' };
+  }
+  return { laws, about, phase: taken.phase, flags: taken.flags };
+}
+
+/** Density of saturated vapour as a function of pressure, where the record covers the vapour. */
+function saturatedVapour(material: Material, state: State): ((T: number, p: number) => number) | undefined {
+  if (!material.phases.includes('vapour' as never) || !material.properties.includes('saturationTemperature')) return undefined;
+  return (_, p) => {
+    const boiling = lawsOf(material, state).law('saturationTemperature')?.(state.temperature, p);
+    if (boiling === undefined) return Number.NaN;
+    return propertyIn(material, 'density', takeState(material, { ...state, temperature: boiling, pressure: p, phase: 'vapour' }))?.value ?? Number.NaN;
+  };
+}
+
+/** One property of a solid as a law of temperature. */
+export function solidLaw(material: Material, property: PropertyId): { law: Law; about: PropertyAbout } | undefined {
+  const at = (T: number): ReturnType<typeof propertyIn> => propertyIn(material, property, takeState(material, { temperature: T, pressure: 101325, phase: 'solid' }));
+  const here = at(300);
+  if (here === undefined) return undefined;
+  const law = lawsOf(material, { temperature: 300, pressure: 101325, phase: 'solid' }).law(property);
+  if (law === undefined) return undefined;
+  const { temperature } = here.range;
+  return {
+    law: Object.assign((T: number) => law(T, 101325), { uncertainty: (T: number) => at(T)?.uncertainty ?? here.uncertainty }),
+    about: { formula: `of ${material.name}`, source: here.source, ...(temperature === undefined ? {} : { temperature }) },
+  };
+}

@@ -1,0 +1,74 @@
+import type { Case, Tolerance } from '../case/index.ts';
+import { nearestName } from '../problems/index.ts';
+import type { Workings } from '../workings/index.ts';
+
+/** A target of the case bound to a quantity, or words that name none. */
+export interface BoundTarget {
+  /** `targets.0`, as the path in the case. */
+  readonly id: string;
+  /** Quantity id, or the words of the case. */
+  readonly quantity: string;
+  readonly place?: string;
+  readonly mean?: string;
+  readonly within?: Tolerance;
+  /** The tool estimates it. */
+  readonly computed: boolean;
+  /** Ids near to words that name none. */
+  readonly nearest?: readonly string[];
+}
+
+/** What kind of answer the targets ask for. */
+export interface TargetKinds {
+  readonly heat: boolean;
+  readonly momentum: boolean;
+  readonly peak: boolean;
+  readonly mean: boolean;
+}
+
+const heatUnits = ['K', 'W', 'W/m^2', 'W/(m^2 K)', 'm^2 K/W'];
+const heatWords = /temperature|heat|nusselt|sherwood|concentration|evaporat|condens|melt|mass transfer/i;
+const momentumUnits = ['Pa', 'N', 'N m', 'Pa/m'];
+const momentumWords = /pressure|drag|lift|force|torque|shear|friction|skin|loss/i;
+const overWalls = ['pressureDrop', 'heatRate', 'outletTemperature', 'frictionFactorDarcy', 'nusselt', 'heatTransferCoefficient', 'massFlow', 'volumeFlow'];
+
+/**
+ * What the targets ask for, before there is a graph.
+ *
+ * @param on    the case
+ * @param unit  SI unit of a quantity id, undefined where no definition has it
+ */
+export function kindsOf(on: Case, unit: (id: string) => string | undefined): TargetKinds {
+  const is = (units: readonly string[], wording: RegExp): boolean => on.targets.some((t) => { const u = unit(t.quantity); return (u !== undefined && units.includes(u)) || wording.test(t.quantity); });
+  return {
+    heat: is(heatUnits, heatWords),
+    momentum: is(momentumUnits, momentumWords),
+    peak: on.targets.some((t) => ['peak', 'rms'].includes(t.mean ?? '') || /spectrum|fluctuation|swing|rms/i.test(t.quantity)),
+    mean: on.targets.some((t) => overWalls.includes(t.quantity)),
+  };
+}
+
+/** Binds targets to quantities: a peak to the peak, a place to its wall, else the plain id. */
+export function bindTargets(on: Case, workings: Workings, walls: readonly string[]): BoundTarget[] {
+  const ids = [...workings.index.keys()].filter((id) => !/[.@]/.test(id));
+  return on.targets.map((t) => {
+    const wall = walls.find((w) => t.place !== undefined && t.place.toLowerCase().split(/[\s,]+/).includes(w));
+    const tries = [...(t.mean === 'peak' ? [`${t.quantity}Peak`] : []), ...(wall === undefined ? [] : [`${t.quantity}@walls.${wall}`]), t.quantity];
+    const id = tries.find((one) => workings.has(one));
+    const near = nearestName(t.quantity, ids);
+    return {
+      id: t.path,
+      quantity: id ?? t.quantity,
+      ...(t.place === undefined ? {} : { place: t.place }),
+      ...(t.mean === undefined ? {} : { mean: t.mean }),
+      ...(t.within === undefined ? {} : { within: t.within }),
+      computed: id !== undefined && workings.get(id) !== undefined,
+      ...(id === undefined ? { nearest: near === undefined ? alike(t.quantity, ids) : [near] } : {}),
+    };
+  });
+}
+
+/** Ids that share a word with what was written. */
+function alike(text: string, ids: readonly string[]): string[] {
+  const parts = text.toLowerCase().split(/[^a-z]+/).filter((w) => w.length > 4);
+  return ids.filter((id) => parts.some((w) => id.toLowerCase().includes(w))).slice(0, 3);
+}

@@ -1,0 +1,76 @@
+import { loadMaterial, type Collection } from '../properties/index.ts';
+import type { Case, Entry } from '../case/index.ts';
+import type { Flow } from '../flows/index.ts';
+import { Problem } from '../problems/index.ts';
+import { layerDefinitions, type Layer } from '../quantities/index.ts';
+import { quantity, ways, type Definition, type Law } from '../workings/index.ts';
+import type { WallKeys } from './facts.ts';
+import { placed } from './fluid.ts';
+import { wallPlaces } from './leaves.ts';
+import { solidLaw } from './material-laws.ts';
+
+/** Quantity that a key of a wall gives, without its place. */
+const gives: Readonly<Record<string, string>> = { heatFlux: 'wallHeatFlux', heat: 'wallHeat', heatTransferCoefficient: 'outerCoefficient', emissivity: 'emissivity', sandGrain: 'sandGrain', speed: 'wallSpeed', rotation: 'wallRotation' };
+
+export interface WallPart {
+  readonly definitions: readonly Definition[];
+  readonly laws: Readonly<Record<string, Law>>;
+  /** Names of wall materials by place. */
+  readonly materials: Readonly<Record<string, readonly string[]>>;
+}
+
+/**
+ * What the case says of its walls as definitions: each key to its quantity, layers to a resistance.
+ *
+ * @param on         the case
+ * @param flow       its flow
+ * @param walls      what counts for each wall
+ * @param materials  the collection
+ * @param exists     whether a quantity is defined
+ * @throws           {Problem} unknown-material, no-conductivity, at the place of the value
+ */
+export function wallDefinitions(on: Case, flow: Flow, walls: WallKeys, materials: Collection | undefined, exists: (id: string) => boolean): WallPart {
+  const definitions: Definition[] = [];
+  const laws: Record<string, Law> = {};
+  const names: Record<string, string[]> = {};
+  (flow.walls.length === 0 ? ['wall'] : flow.walls).forEach((name, k) => {
+    const place = wallPlaces(flow.walls)[k] as string;
+    const keys = walls.get(name) ?? new Map<string, Entry>();
+    const layers = layersOf(on, keys, materials, (law, value) => { laws[law] = value; }, (material) => (names[place] ??= []).push(material));
+    for (const [key, entry] of keys) {
+      const id = key === 'temperature' ? (outer(keys, layers) ? 'outerTemperature' : 'wettedTemperature') : gives[key];
+      if (id === undefined || !exists(id) || typeof entry.value !== 'number') continue;
+      definitions.push(ways(`${id}@${place}`, [{ needs: [entry.path], value: (of) => of[entry.path] as number, formula: `as given: ${entry.path}`, source: 'the case' }]));
+    }
+    if (layers.length > 0) {
+      for (const l of layers) if (l.law !== undefined) definitions.push(quantity(l.conductivity, { symbol: 'k_s', name: `thermal conductivity of ${l.law.formula.replace(/^of /, '')}`, unit: 'W/(m K)' }));
+      definitions.push(...layerDefinitions(place, layers));
+    }
+  });
+  return { definitions, laws, materials: names };
+}
+
+const outer = (keys: ReadonlyMap<string, Entry>, layers: readonly Layer[]): boolean => layers.length > 0 && keys.get('at')?.value !== 'wetted-face';
+
+function layersOf(on: Case, keys: ReadonlyMap<string, Entry>, materials: Collection | undefined, add: (name: string, law: Law) => void, named: (material: string) => void): Layer[] {
+  const out: Layer[] = [];
+  for (let i = 0; ; i++) {
+    const thickness = keys.get(`layers.${i}.thickness`);
+    const material = keys.get(`layers.${i}.material`);
+    const conductivity = keys.get(`layers.${i}.thermalConductivity`);
+    if (thickness === undefined && material === undefined && conductivity === undefined) return out;
+    const any = (thickness ?? material ?? conductivity) as Entry;
+    if (thickness === undefined) throw new Problem({ code: 'no-thickness', message: 'a layer of the wall has no thickness', file: on.file, ...any.position, expected: 'thickness: 1.5 mm' });
+    const path = any.path.slice(0, any.path.lastIndexOf('.'));
+    if (conductivity !== undefined) out.push({ thickness: thickness.path, conductivity: conductivity.path });
+    else if (typeof material?.value === 'string') {
+      const solid = placed(material, on.file, () => loadMaterial(material.value as string, materials));
+      const law = placed(material, on.file, () => solidLaw(solid, 'thermalConductivity'));
+      if (law === undefined) throw new Problem({ code: 'no-conductivity', message: `the record of ${solid.name} has no thermal conductivity`, file: on.file, ...material.position, expected: 'thermalConductivity beside the thickness' });
+      const id = `${path}.thermalConductivity`;
+      named(solid.name);
+      add(id, law.law);
+      out.push({ thickness: thickness.path, conductivity: id, law: { name: id, formula: law.about.formula, source: law.about.source, ...(law.about.temperature === undefined ? {} : { range: law.about.temperature }) } });
+    } else throw new Problem({ code: 'no-conductivity', message: 'a layer of the wall has neither a material nor a conductivity', file: on.file, ...thickness.position, expected: 'material: copper, or thermalConductivity: 0.04 W/(m K)' });
+  }
+}

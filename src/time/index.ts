@@ -1,0 +1,3 @@
+import type { Definition } from '../workings/index.ts';
+
+export const timeDefinitions: Definition[] = [];
