@@ -1,0 +1,65 @@
+import type { Definition, When } from '../workings/index.ts';
+
+/** A size the user gives for a flow, path `sizes.<key>`. */
+export interface Size {
+  readonly key: string;
+  readonly name: string;
+  readonly unit: 'm' | 'm^3' | '1';
+  readonly optional?: boolean;
+  /** It may be `infinite`. */
+  readonly infinite?: boolean;
+}
+
+/** A smaller region than the whole that may be computed, and what must hold for it. */
+export interface Cut {
+  readonly option: 'two-dimensional' | 'axisymmetric' | 'mirror-left-right' | 'mirror-top-bottom' | 'periodic-along-flow';
+  readonly holdsIf: string;
+}
+
+export interface Extent {
+  readonly side: 'upstream' | 'downstream' | 'sides' | 'above';
+  /** Quantity that holds the length. */
+  readonly id: string;
+  readonly source: string;
+}
+
+/** One step of the ladder: a reference, the one thing that changes, what is compared and how close it must come. */
+export interface Rung {
+  readonly reference: string;
+  readonly changes: string;
+  /** Number of the reference that is compared, by the id it has there. */
+  readonly compares: string;
+  /** Need of the reference: quantity or path of the case it is filled from. Needs not named keep their own id. */
+  readonly with: Readonly<Record<string, string>>;
+  readonly when?: When;
+  /** Largest relative deviation from the reference. */
+  readonly limit: number;
+  readonly ifMissed: string;
+  /** Order of accuracy that refinement must show. */
+  readonly order?: number;
+}
+
+/** A configuration: its sizes and walls, its scales and correlations as definitions, and what it advises. */
+export interface Flow {
+  readonly id: string;
+  readonly title: string;
+  readonly lengthIs: string;
+  readonly speedIs: string;
+  readonly sizes: readonly Size[];
+  /** Names of the walls, empty for a lone wall. */
+  readonly walls: readonly string[];
+  readonly targetWall?: string;
+  readonly stations: readonly string[];
+  readonly regions: readonly string[];
+  /** Words this flow fixes, by the id of the word. */
+  readonly words: Readonly<Record<string, string>>;
+  readonly definitions: readonly Definition[];
+  readonly leastRegion: string;
+  readonly cuts: readonly Cut[];
+  readonly domain: readonly Extent[];
+  /** When common simplifications hold and when they fail. */
+  readonly simplifications: readonly string[];
+  /** What a right picture must show, and what the usual wrong ones look like. */
+  readonly look: { readonly mustShow: readonly string[]; readonly probes: readonly string[]; readonly wrong: readonly string[] };
+  readonly ladder: readonly Rung[];
+}
