@@ -1,0 +1,13 @@
+export { compileRules, noRules, type RuleFile } from './compile.ts';
+export type { ChoiceDecision } from './decide-choice.ts';
+export { decide, type DecideOptions, type Decisions, type EffectDecision } from './decide.ts';
+export type { EffectState } from './effects.ts';
+export { exampleOutcomes, type ExampleOutcome } from './examples.ts';
+export { flips, type FlipAt, type FlipInput } from './flips.ts';
+export type { ChoiceRule, CompiledRules, Condition, EffectRule, Limit, PriceLine, Verdict } from './form.ts';
+export { choiceIds, effectIds, inOrder } from './ids.ts';
+export { knownFacts, type KnownFacts } from './known.ts';
+export { readRuleFolder } from './load.ts';
+export type { Price, Target } from './price.ts';
+export { settle, type SettleOptions, type State } from './settle.ts';
+export { definitionsOfVerdicts } from './words.ts';

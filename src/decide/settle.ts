@@ -1,0 +1,205 @@
+import type { Workings } from '../workings/index.ts';
+import { choose, type ChoiceState } from './choose.ts';
+import { leavesOf } from './conditions.ts';
+import { judge, type EffectState, type Point } from './effects.ts';
+import { Overlaid, WorkingsFacts, type FactSource } from './facts.ts';
+import type { Branch, CompiledRules, Condition, EffectRule, Verdict } from './form.ts';
+import { choiceIds, choicesInReadingOrder, effectsInReadingOrder, inOrder } from './ids.ts';
+import type { Interval } from './judge.ts';
+import type { Target } from './price.ts';
+
+/** What the reading of rules is handed besides the numbers. */
+export interface SettleOptions {
+  /** Whether an input can be given by the user at all; all unless said. */
+  readonly askable?: ((id: string) => boolean) | undefined;
+  /** Low and high end of a quantity over the operating range. */
+  readonly rangeOf?: Interval | undefined;
+  /** Low and high end of its spread. */
+  readonly spreadOf?: Interval | undefined;
+}
+/** All decisions at one point of the workings. */
+export interface State {
+  readonly effects: ReadonlyMap<string, EffectState>;
+  readonly choices: ReadonlyMap<string, ChoiceState>;
+  readonly passes: number;
+  readonly point: Point;
+}
+
+const mostPasses = 5;
+const absent: EffectState = { rule: undefined, applies: 'unknown', whyNot: [], judged: false, verdict: 'undecided', base: 'undecided', lacking: [] };
+
+/** What holds for all points of one graph and one set of rules. */
+interface Session {
+  readonly effects: readonly (readonly [string, EffectRule | undefined])[];
+  readonly choices: readonly string[];
+  readonly stated: ReadonlyMap<string, string>;
+  readonly places: (rule: EffectRule) => readonly (string | undefined)[];
+}
+const sessions = new WeakMap<Workings, WeakMap<CompiledRules, Session>>();
+const stated = new WeakMap<Workings, ReadonlyMap<string, string>>();
+
+function sessionOf(workings: Workings, rules: CompiledRules): Session {
+  const kept = sessions.get(workings) ?? new WeakMap<CompiledRules, Session>();
+  sessions.set(workings, kept);
+  let session = kept.get(rules);
+  if (session === undefined) {
+    const choices = inOrder(Object.keys(rules.choices), choiceIds);
+    const said = stated.get(workings) ?? new Map(choices.flatMap((id) => { const word = workings.word(`choice.${id}`); return word === undefined ? [] : [[id, word]]; }));
+    stated.set(workings, said);
+    const places = new Map<EffectRule, readonly (string | undefined)[]>();
+    session = {
+      effects: effectsInReadingOrder(Object.keys(rules.effects)).map((id) => [id, rules.effects[id]]),
+      choices: choicesInReadingOrder(Object.keys(rules.choices)),
+      stated: said,
+      places: (rule) => {
+        let found = places.get(rule);
+        if (found === undefined) places.set(rule, (found = placesOf(workings, rule)));
+        return found;
+      },
+    };
+    kept.set(rules, session);
+  }
+  return session;
+}
+
+/** The places at which a rule is read: those at which a number of its branches exists. */
+function placesOf(workings: Workings, rule: EffectRule): readonly (string | undefined)[] {
+  if (rule.per === undefined) return [undefined];
+  const named = new Set(rule.branches.flatMap((b) => [...(b.band === undefined ? [] : [b.band.deciding]), ...conditionsOf(b).flatMap((c) => leavesOf(c).map((l) => l.fact))]));
+  const found = new Set<string>();
+  for (const id of named) {
+    const slot = workings.slots[workings.index.get(id) ?? -1];
+    if (slot?.node.about.per?.[0] !== rule.per) continue;
+    for (const other of workings.index.keys()) if (other.startsWith(`${id}@`)) found.add((other.slice(id.length + 1).split('/')[0]) as string);
+  }
+  return found.size === 0 ? [undefined] : [...found];
+}
+
+/** All conditions of a branch. */
+export const conditionsOf = (b: Branch): Condition[] => [b.when, b.includeIf, b.leaveOutIf, b.atLeastBorderlineIf, b.atMostBorderlineIf, ...b.price.map((p) => p.when)].filter((c): c is Condition => c !== undefined);
+
+const rests = new WeakMap<EffectRule, boolean>();
+/** Whether a rule reads other decisions, so that each pass reads it anew. */
+function restsOnOthers(rule: EffectRule): boolean {
+  let found = rests.get(rule);
+  if (found === undefined) {
+    const conditions = [rule.applies, ...rule.branches.flatMap(conditionsOf), ...rule.price.map((p) => p.when)];
+    found = conditions.some((c) => leavesOf(c).some((l) => /^(verdict|branch)\./.test(l.fact) || l.fact === 'regime'));
+    rests.set(rule, found);
+  }
+  return found;
+}
+
+/**
+ * Settles all decisions at one point of the workings, and pins the words `verdict.<id>` and `choice.<id>` in them.
+ *
+ * @param workings  the graph at the point
+ * @param rules     compiled rules
+ * @param targets   targets of the case, for the prices
+ * @param options   what can be asked for; spreads and ranges of deciding quantities
+ * @returns         the state of every effect and choice
+ */
+export function settle(workings: Workings, rules: CompiledRules, targets: readonly Target[], options: SettleOptions = {}): State {
+  const session = sessionOf(workings, rules);
+  const point: Point = {
+    workings, targets, places: session.places, rangeOf: options.rangeOf, spreadOf: options.spreadOf,
+    facts: new WorkingsFacts(workings, options.askable ?? (() => true)), words: new Map(), prices: new Map(),
+  };
+  const { effects, passes } = settleEffects(point, session);
+  const choices = settleChoices(point, session, rules, effects);
+  for (const [id, state] of effects) pin(workings, `verdict.${id}`, state.verdict);
+  for (const [id, state] of choices) if (state.rule !== undefined || state.given) pin(workings, `choice.${id}`, state.chosen);
+  return { effects, choices, passes, point };
+}
+
+/** Passes over the effects until one changes nothing. What still changes after the fifth is borderline, and the rest is read again with it. */
+function settleEffects(point: Point, session: Session): { effects: Map<string, EffectState>; passes: number } {
+  const effects = new Map<string, EffectState>();
+  const alternating = new Set<string>();
+  let passes = 0;
+  for (const [id] of session.effects) note(point, id, absent);
+  for (;;) {
+    let changed = new Map<string, Verdict>([['', 'undecided']]);
+    for (let k = 0; k < mostPasses && changed.size > 0; k++, passes++) changed = pass(point, session, effects, alternating);
+    if (changed.size === 0) return { effects, passes };
+    for (const [id, before] of changed) {
+      const now = effects.get(id) as EffectState;
+      alternating.add(id);
+      effects.set(id, { ...now, verdict: 'borderline', movedBy: 'passes', between: [before, now.verdict], firstRun: 'keep' });
+      note(point, id, effects.get(id) as EffectState);
+    }
+  }
+}
+
+/** One pass; returns what changed, with the verdict before. */
+function pass(point: Point, session: Session, effects: Map<string, EffectState>, alternating: ReadonlySet<string>): Map<string, Verdict> {
+  const changed = new Map<string, Verdict>();
+  for (const [id, rule] of session.effects) {
+    const old = effects.get(id);
+    if (alternating.has(id) || (old !== undefined && (rule === undefined || !restsOnOthers(rule)))) continue;
+    const next = rule === undefined ? absent : judge(rule, point);
+    effects.set(id, next);
+    if (note(point, id, next)) changed.set(id, old?.verdict ?? 'undecided');
+  }
+  return changed;
+}
+
+/** Lays a state over the facts; whether it changes anything. */
+function note(point: Point, id: string, state: EffectState): boolean {
+  const branch = state.applies === false ? 'none' : (state.reading?.branch?.id ?? 'otherwise');
+  const same = point.words.get(`verdict.${id}`) === state.verdict && point.words.get(`branch.${id}`) === branch;
+  point.words.set(`verdict.${id}`, state.verdict);
+  point.words.set(`branch.${id}`, branch);
+  return !same;
+}
+
+/** Facts of choices: the words of this point alone for choices and what the first run keeps, never those the graph still holds from another point. */
+class ChoiceFacts implements FactSource {
+  readonly #words: ReadonlyMap<string, string>;
+  readonly #under: FactSource;
+  constructor(words: ReadonlyMap<string, string>, under: FactSource) {
+    this.#words = words;
+    this.#under = under;
+  }
+  of(id: string): number | string | undefined {
+    return this.#words.get(id) ?? (id.startsWith('choice.') ? undefined : this.#under.of(id));
+  }
+  askable(id: string): boolean {
+    return this.#under.askable(id);
+  }
+}
+
+function settleChoices(point: Point, session: Session, rules: CompiledRules, effects: ReadonlyMap<string, EffectState>): Map<string, ChoiceState> {
+  const undecided = [...effects].flatMap(([id, e]) => (e.verdict === 'undecided' && e.judged ? [id] : []));
+  const words = new Map(point.words);
+  for (const [id, e] of effects) {
+    words.set(`kept.${id}`, kept(e) ? 'yes' : 'no');
+    if (!e.judged) words.set(`verdict.${id}`, 'leave-out'); // none of its numbers can be had
+  }
+  for (const [id, word] of session.stated) words.set(`choice.${id}`, word);
+  const facts = new ChoiceFacts(words, new Overlaid(point.facts, point.words));
+  const out = new Map<string, ChoiceState>();
+  for (let round = 0, more = true; more && round < mostPasses; round++) {
+    more = false;
+    for (const id of session.choices) {
+      const rule = rules.choices[id];
+      const said = session.stated.get(id);
+      const next = rule === undefined ? unread(said) : choose(rule, facts, undecided, said);
+      if (out.get(id)?.chosen !== next.chosen) more = true;
+      out.set(id, next);
+      if (rule !== undefined) words.set(`choice.${id}`, next.chosen);
+    }
+  }
+  return out;
+}
+
+/** A choice that no rule decides. */
+const unread = (said: string | undefined): ChoiceState => ({ rule: undefined, applies: 'unknown', whyNot: [], chosen: said ?? 'none', given: said !== undefined, assumed: [], lacking: [] });
+
+/** Whether the model carries the effect in its first run. */
+const kept = (e: EffectState): boolean => e.verdict === 'include' || (e.verdict === 'undecided' && e.judged) || (e.verdict === 'borderline' && e.firstRun !== 'leave-out');
+
+function pin(workings: Workings, id: string, word: string): void {
+  const i = workings.index.get(id);
+  if (i !== undefined && !(workings.isPinned(i) && workings.wordAt(i) === word)) workings.set(id, word);
+}
