@@ -27,6 +27,7 @@ export interface Target extends Omit<Column, 'values'> {
 }
 
 const units: Readonly<Record<FineBy, string>> = { cells: '1', size: 'm', step: 's' };
+const mostMeshes = 50;
 const zonePrefix = 'cells in ';
 /** 1.3 is asked for; what rounds to it passes. */
 const leastRatio = 1.29;
@@ -39,11 +40,12 @@ const zoneTolerance = 0.05;
  * @param table      the table
  * @param dimension  2 or 3: h is proportional to cells to the power -1/dimension
  * @returns          the family, finest first, with what speaks against it
- * @throws           {Problem} unknown-column, wrong-dimension, not-positive, same-mesh, one-mesh, no-target
+ * @throws           {Problem} too-many-meshes, unknown-column, wrong-dimension, not-positive, same-mesh, one-mesh, no-target
  * @source           Celik et al. 2008, steps 1 and 2; similar zones within 5 %: common practice
  */
 export function meshFamily(table: Table, dimension: 2 | 3): MeshFamily {
   const [first, ...others] = table.columns as [Column, ...Column[]];
+  if (table.rowCount > mostMeshes) throw new Problem({ code: 'too-many-meshes', message: `the file has ${table.rowCount} rows, one a mesh`, ...table.place(mostMeshes, 0), expected: `at most ${mostMeshes}; a time signal is for series` });
   const by = fineBy(first, table.file);
   const zones = others.filter((column) => column.name.toLowerCase().startsWith(zonePrefix));
   const targets = others.filter((column) => !zones.includes(column));

@@ -8,3 +8,9 @@ export { apparentOrder, extrapolate, indexHalfWidth, tripletKind, type Triplet, 
 export { readTable, type Column, type Table } from './table.ts';
 export { grids, type GridOptions, type GridResult, type GridVerdict } from './grids.ts';
 export { allowed, readLimit, type Limit, type Outcome } from './limit.ts';
+export { compareTable } from './compare.ts';
+export type { CompareOptions, Comparison, KnownTable, TableComparison } from './comparison.ts';
+export { judgeDeviation, rungTolerance, type DeviationVerdict, type Uncertainties } from './deviation.ts';
+export { matchColumns, type KnownColumn, type Matched } from './match.ts';
+export { norms, type Norms } from './norms.ts';
+export { atPoints, type Interpolation } from './profile.ts';

@@ -13,17 +13,19 @@ export type Limit = { readonly relative: number } | { readonly absolute: number 
  *
  * @param text  the limit
  * @param head  name and unit of the column that it is for
- * @param what  what it limits, for problems: `--within`
+ * @param what  what it limits, for problems: `the limit`
+ * @param ofRange  a share refers to the range of a profile: of a temperature it is written `5 % of change`
  * @returns     a share [1] or a half-width in SI
- * @throws      {Problem} those of readQuantity, percent-of-temperature among them
+ * @throws      {Problem} those of readQuantity, percent-of-temperature among them; negative
  */
-export function readLimit(text: string, head: Head, what: string): Limit {
+export function readLimit(text: string, head: Head, what: string, ofRange = false): Limit {
   const share = /%\s*$/.test(text);
   const kelvin = head.unit.dimension.every((exponent, i) => exponent === (i === 3 ? 1 : 0));
   const temperature = isTemperature(head);
   const kind = temperature || (kelvin && !share) ? 'temperatureDifference' : 'plain';
-  const read = readQuantity(text, { dimension: head.unit.dimension, kind, name: `${what} for ${head.name}`, orShare: !temperature });
-  if (read.share === 'change') throw new Problem({ code: 'unreadable-quantity', message: `"${text}": there is no change here that ${what} could be a share of`, expected: 'a share of the value, such as 2 %, or a half-width in its unit' });
+  const read = readQuantity(text, { dimension: head.unit.dimension, kind, name: `${what} for ${head.name}`, orShare: ofRange || !temperature });
+  if (read.share === 'change' && !ofRange) throw new Problem({ code: 'unreadable-quantity', message: `"${text}": there is no change here that ${what} could be a share of`, expected: 'a share of the value, such as 2 %, or a half-width in its unit' });
+  if (read.value < 0) throw new Problem({ code: 'negative', message: `"${text}": ${what} is below zero`, expected: 'a half-width of zero or more' });
   return read.share !== undefined || read.unit === '%' ? { relative: read.value } : { absolute: read.value };
 }
 
