@@ -1,7 +1,7 @@
 const superscripts = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 
 /** The power of ten of a number's first digit; 12 is 1, 0.04 is -2. Rounding at the last of 15 digits is seen through. */
-export function leadingPlace(value: number): number {
+function leadingPlace(value: number): number {
   return value === 0 ? 0 : Number(Math.abs(value).toExponential(14).split('e')[1]);
 }
 
@@ -26,7 +26,7 @@ function withExponent(value: number, decimals: number, trim: boolean, unicode: b
   const short = trim && mantissa.includes('.') ? mantissa.replace(/\.?0+$/, '') : mantissa;
   const power = Number(exponent);
   if (!unicode) return `${short}e${power}`;
-  return `${short}×10${power < 0 ? '⁻' : ''}${[...String(Math.abs(power))].map((c) => superscripts[Number(c)]).join('')}`;
+  return `${short}×10${power < 0 ? '⁻' : ''}${String(Math.abs(power)).replace(/\d/g, (c) => superscripts[Number(c)] ?? '')}`;
 }
 
 /**

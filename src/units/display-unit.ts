@@ -36,5 +36,5 @@ export function prettyUnit(unit: string, unicode: boolean): string {
   return unit
     .replace(/(?<![A-Za-z])u(?=[A-Za-z])/g, 'µ')
     .replace(/(?<![A-Za-z])deg([CF])/g, '°$1')
-    .replace(/\^(-?\d+)(?![.\d])/g, (_, power: string) => [...power].map((c) => (c === '-' ? '⁻' : ('⁰¹²³⁴⁵⁶⁷⁸⁹'[Number(c)] as string))).join(''));
+    .replace(/\^(-?\d+)(?![.\d])/g, (_, power: string) => power.replace('-', '⁻').replace(/\d/g, (c) => '⁰¹²³⁴⁵⁶⁷⁸⁹'[Number(c)] ?? ''));
 }

@@ -7,7 +7,7 @@ import type { Unit } from './unit-text.ts';
 export interface Spread {
   /** [SI] */
   readonly half: number;
-  /** Share of the value, where it was written so. */
+  /** Share of the value as written, where it was written so (of a gauge pressure: of the gauge value). */
   readonly relative?: number;
   readonly bounds: boolean;
 }
@@ -15,7 +15,7 @@ export interface Spread {
 export interface SpreadText {
   readonly text: string;
   readonly spread: Side;
-  /** Nominal value [SI]. */
+  /** Nominal value [SI] that a share is taken of. */
   readonly value: number;
   /** The side that brings the unit of the nominal value. */
   readonly nominalUnit: Side;

@@ -49,7 +49,7 @@ function exponent(text: string, at: number, afterName: boolean, n: number | unde
   if (high !== undefined) {
     const sign = high[0].startsWith('⁻') ? -1 : 1;
     if (high[0].endsWith('ⁿ')) return needsN(sign, 0, high[0].length);
-    return { value: sign * Number([...high[0]].filter((c) => superscripts.includes(c)).map((c) => superscripts.indexOf(c)).join('')), length: high[0].length };
+    return { value: sign * Number(high[0].replace(/[⁺⁻]/g, '').replace(/./g, (c) => String(superscripts.indexOf(c)))), length: high[0].length };
   }
   const low = afterName ? match(attached, text, at) : undefined;
   return low === undefined ? undefined : { value: Number(low[0]), length: low[0].length };
@@ -60,8 +60,8 @@ function nameAt(text: string, at: number): { name: string; length: number } | un
   const phrase = phrases.find(([words]) => text.startsWith(words, at) && !/[A-Za-z]/.test(text[at + words.length] ?? ' '));
   const word = match(names, text, at)?.[0];
   if (phrase === undefined && word === undefined) return undefined;
-  const name = phrase?.[1] ?? (word as string);
-  const length = (phrase?.[0] ?? (word as string)).length;
+  const name = phrase?.[1] ?? word ?? '';
+  const length = (phrase?.[0] ?? word ?? '').length;
   const behind = match(bracketed, text, at + length);
   const qualifier = qualifiers.get(behind?.[1] ?? '');
   return behind === undefined || qualifier === undefined || name.includes('(') ? { name, length } : { name: `${name}(${qualifier})`, length: length + behind[0].length };

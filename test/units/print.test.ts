@@ -56,24 +56,20 @@ describe('printNumber', () => {
     [{ value: NaN, unit: 'm' }, 'not a number'],
   ])('%o', (printing, text) => expect(printNumber(printing)).toBe(text));
 
-  it('never shows a digit below the spread', () => {
-    for (const relative of [0.011, 0.02, 0.029, 0.03, 0.07, 0.1, 0.2, 0.29, 0.3, 0.45]) {
-      for (const value of [1.23456789e-7, 0.0123456789, 1.23456789, 987.654321, 9.87654321e7]) {
-        const { number } = numberParts({ value, unit: '1', low: value * (1 - relative), high: value * (1 + relative) });
-        const [mantissa = '', exponent = '0'] = number.split('e');
-        const last = 10 ** (Number(exponent) - (mantissa.split('.')[1]?.length ?? 0));
-        if (mantissa.includes('.') || exponent !== '0') expect(last, `${value} ${relative}`).toBeGreaterThan((value * relative) / 31);
-      }
-    }
+  const relatives = [0.011, 0.02, 0.029, 0.03, 0.07, 0.1, 0.2, 0.29, 0.3, 0.45];
+  const values = [1.23456789e-7, 0.0123456789, 1.23456789, 987.654321, 9.87654321e7];
+  it.each(values.flatMap((value) => relatives.map((relative) => [value, relative] as const)))('%d with a spread of %d shows no digit below it', (value, relative) => {
+    const { number } = numberParts({ value, unit: '1', low: value * (1 - relative), high: value * (1 + relative) });
+    const [mantissa = '', exponent = '0'] = number.split('e');
+    const zeros = /\.|e/.test(number) ? 0 : (/0*$/.exec(mantissa)?.[0].length ?? 0);
+    const last = 10 ** (Number(exponent) + zeros - (mantissa.split('.')[1]?.length ?? 0));
+    expect(last).toBeGreaterThan((value * relative) / 31); // two digits of a spread that begins with 1 or 2, one otherwise
+    expect(Math.abs(Number(number) - value)).toBeLessThanOrEqual(value * relative); // and rounding stays within the spread
   });
 
-  it('prints what can be read back within half of its last digit', () => {
-    for (const value of [1.2346e-8, 3.3e-5, 0.00101, 0.1, 9.9999, 1234.5, 123456, 7.7e8]) {
-      for (const unit of ['m', 'm/s', 'Pa', 'Pa s', 'W', 'J/(kg K)', 'm^2/s', 'kg/m^3', 's', 'kg', 'Hz']) {
-        const text = printNumber({ value, unit });
-        expect(Math.abs(readQuantity(text, { unit }).value / value - 1), text).toBeLessThan(6e-4);
-      }
-    }
+  const units = ['m', 'm/s', 'Pa', 'Pa s', 'W', 'J/(kg K)', 'm^2/s', 'kg/m^3', 's', 'kg', 'Hz'];
+  it.each([1.2346e-8, 3.3e-5, 0.00101, 0.1, 9.9999, 1234.5, 123456, 7.7e8].flatMap((value) => units.map((unit) => [value, unit] as const)))('%d %s is read back within half of the fourth digit', (value, unit) => {
+    expect(Math.abs(readQuantity(printNumber({ value, unit }), { unit }).value / value - 1)).toBeLessThan(5.01e-4);
   });
 
   it('refuses a unit that it does not know', () => expect(refusal(() => printNumber({ value: 1, unit: 'wat' })).code).toBe('unknown-unit'));

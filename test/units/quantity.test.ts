@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { readQuantity, type Wanted } from '../../src/units/index.ts';
-import { refusal } from './refusal.ts';
+import { attempt, refusal } from './refusal.ts';
 
 const T: Wanted = { unit: 'K', kind: 'temperature' };
 const D: Wanted = { unit: 'K', kind: 'temperatureDifference' };
@@ -45,6 +45,8 @@ describe('readQuantity', () => {
     ['101\u2009325 Pa abs', P, { value: 101325 }],
     ['45 %', F, { value: 0.45, unit: '%' }],
     ['0.45', F, { value: 0.45, unit: '' }],
+    ['4 bar gauge +/- 5 %', P, { value: 501325, spread: { half: 20000, relative: 0.05, bounds: false } }],
+    ['0.2 .. 0.6 m/s +/- 0.1 (bounds)', speed, { range: { from: 0.2, to: 0.6, bounds: false }, spread: { half: 0.1, bounds: true } }],
     ['420 ppm', F, { value: 4.2e-4 }],
     ['0.9 % mol', F, { value: 0.009, basis: 'mol' }],
     ['3 vol%', F, { value: 0.03, basis: 'vol' }],
@@ -94,6 +96,7 @@ describe('quantities that are refused', () => {
     ['5 bar gauge abs', P, { code: 'unreadable-quantity', message: '"5 bar gauge abs" says both gauge and absolute' }],
     ['3 mm gauge', length, { code: 'unreadable-quantity', message: '"3 mm gauge" is not a length: gauge and absolute belong to pressures' }],
     ['3 mm difference', length, { code: 'unreadable-quantity', message: '"3 mm difference" is not a length: the word difference belongs to temperatures' }],
+    ['3 mm (bounds)', length, { code: 'unreadable-quantity', message: '"3 mm (bounds)" is not a length: bounds are said of a range or a spread' }],
     ['3 kg/s normal', { unit: 'kg/s' }, { code: 'unreadable-quantity', message: '"3 kg/s normal" is not a quantity in kg/s: normal and standard belong to volume flows' }],
     ['45', F, { code: 'not-a-share', message: '"45" is not a share: a share lies between 0 and 1', nearest: '45 %' }],
     ['1,5 mm', length, { code: 'not-a-number', message: '"1,5" is not a number here: the decimal sign is the point, and digits are not grouped by commas', expected: number, nearest: '1.5', at: 0, length: 3 }],
@@ -118,35 +121,24 @@ describe('quantities that are refused', () => {
 describe('hostile text', () => {
   const many = (n: number, piece: string): string => piece.repeat(n);
   const texts = [many(1e5, '9'), `${many(199, '1')} m`, `1${many(90, ' ')}m`, `1 ${many(150, '(')}`, `1 ${many(60, 'm/')}m`, `1 ${many(60, 'm ')}`, `1 m${many(90, '^2')}`, `1 ${many(198, 'a')}`, `1 .. ${many(60, '.. ')}`, `1 +/- ${many(40, '+/- ')}1 m`, '1 m\u0000', '1 \u202em', '1 \ud800', `1${many(30, '\u2009000')} m`, '1 m (bounds) (bounds)', '1 ..', '+/- 1 m', '1 m^(((2)))', '1 m^1/0', '1 m^(1/0)', '1e5e5 m', '1 m^n', '--1 m', '1 °', `1 ${many(49, 'bar g ')}`];
+  /** A finite value, or a problem with its place and words that a person can read. */
+  const sound = (text: string): boolean => {
+    const { value, problem } = attempt(() => readQuantity(text, { unit: 'm', orShare: true }));
+    if (problem === undefined) return Number.isFinite(value?.value);
+    return /^[a-z-]+$/.test(problem.code) && (problem.at ?? -1) >= 0 && (problem.length ?? 0) > 0 && problem.message.length < 600;
+  };
+
   it('gives a quantity or a problem, and soon', () => {
-    for (const text of texts) {
-      const begin = performance.now();
-      try {
-        const { value } = readQuantity(text, { unit: 'm' });
-        expect(Number.isFinite(value)).toBe(true);
-      } catch (error) {
-        const problem = refusal(() => {
-          throw error;
-        });
-        expect(problem.at, text.slice(0, 40)).toBeGreaterThanOrEqual(0);
-        expect(problem.length).toBeGreaterThan(0);
-        expect(problem.message.length).toBeLessThan(600);
-      }
-      expect(performance.now() - begin, text.slice(0, 40)).toBeLessThan(100); // a runaway pattern takes seconds
-    }
+    const begin = performance.now();
+    expect(texts.filter((text) => !sound(text))).toEqual([]);
+    expect(performance.now() - begin).toBeLessThan(2000); // a runaway pattern takes minutes
   });
 
   it('survives random signs', () => {
-    const alphabet = [...'0123456789.eE+-/*^() %°µ²⁻msKkgPaNCF,xn\u2009±'];
+    const alphabet = '0123456789.eE+-/*^() %°µ²⁻msKkgPaNCF,xn\u2009±'.split('');
     let seed = 7;
     const next = (): number => (seed = (seed * 16807) % 2147483647) / 2147483647;
-    for (let i = 0; i < 5000; i++) {
-      const text = Array.from({ length: 1 + Math.floor(next() * 24) }, () => alphabet[Math.floor(next() * alphabet.length)]).join('');
-      try {
-        expect(Number.isFinite(readQuantity(text, { unit: 'm', orShare: true }).value), text).toBe(true);
-      } catch (error) {
-        expect(refusal(() => { throw error; }).code, text).toMatch(/^[a-z-]+$/);
-      }
-    }
+    const random = Array.from({ length: 5000 }, () => Array.from({ length: 1 + Math.floor(next() * 24) }, () => alphabet[Math.floor(next() * alphabet.length)]).join(''));
+    expect(random.filter((text) => !sound(text))).toEqual([]);
   });
 });
