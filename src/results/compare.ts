@@ -1,11 +1,10 @@
 import { Problem } from '../problems/index.ts';
-import { unit } from '../units/index.ts';
 import { comparisonCautions, comparisonSays } from './compareWords.ts';
 import type { CompareOptions, Comparison, KnownTable, TableComparison } from './comparison.ts';
-import { judgeDeviation, type Uncertainties } from './deviation.ts';
-import { allowed, readLimit } from './limit.ts';
+import { judgeDeviation } from './deviation.ts';
 import { matchColumns, needColumn, type KnownColumn, type Matched } from './match.ts';
 import { norms, rangeOf } from './norms.ts';
+import { halfWidths, headOfKnown } from './parts.ts';
 import { atPoints } from './profile.ts';
 import type { Table } from './table.ts';
 
@@ -48,12 +47,9 @@ function compareColumn(known: KnownTable, result: Table, places: Matched, pair: 
   const distance = norms(found.values, data, rangeOf(all));
   const at = found.covered[distance.at] as number;
 
-  const head = { name: pair.known.name, unit: unit(pair.known.unit), unitText: pair.known.unit, line: 1, column: 1 };
-  const half = (text: string | undefined, what: string): number | undefined => (text === undefined ? undefined : allowed(readLimit(text, head, what, true), distance.scale));
   const band = known.band > 0 ? known.band : (options.uncertainty ?? 0) * Math.abs(all[at] as number);
-  const [numerical, input, statistical] = [half(options.numerical, 'the numerical uncertainty'), half(options.input, 'the input uncertainty'), half(options.statistical, 'the statistical uncertainty')];
-  const parts: Uncertainties = { data: band, ...(numerical === undefined ? {} : { numerical }), ...(input === undefined ? {} : { input }), ...(statistical === undefined ? {} : { statistical }) };
-  const limit = half(options.within, 'the limit') ?? options.limit * distance.scale;
+  const head = headOfKnown(pair.known);
+  const { parts, limit } = halfWidths(head, options, distance.scale, band);
   const measure = options.measure ?? 'largest';
   const deviation = measure === 'largest' ? distance.largest : distance.l2;
   const verdict = judgeDeviation(deviation, limit, parts);

@@ -1,5 +1,5 @@
 import { printNumber } from '../units/index.ts';
-import type { Comparison } from './comparison.ts';
+import type { Comparison, ValueComparison } from './comparison.ts';
 import type { Head } from './header.ts';
 import { showDifference, showShare, showValue } from './show.ts';
 
@@ -16,7 +16,7 @@ export interface Around {
 
 /** What a comparison means, as sentences. */
 export function comparisonSays(facts: Facts, around: Around): string {
-  return [distanceSentence(facts, around), uncertaintySentence(facts, around), outcomeSentence(facts, around)].filter((sentence) => sentence !== '').join(' ');
+  return [distanceSentence(facts, around), uncertaintySentence(facts, around.head), outcomeSentence({ ...facts, scale: facts.norms.scale, whole: 'the range' }, around.head, around.thin)].join(' ');
 }
 
 function signed(head: Head, value: number): string {
@@ -30,7 +30,16 @@ function distanceSentence({ norms, place, deviation, measure }: Facts, { head, c
   return `The largest deviation is E = S - D = ${signed(head, norms.largest)}${share} at ${coordinate.name} = ${where}, where the result reads ${showValue(head, place.result)} and the known answer ${showValue(head, place.known)}${rms}.`;
 }
 
-function uncertaintySentence({ uncertainty, validation, telling, parts, deviation }: Facts, { head }: Around): string {
+/** What the comparison of a single number means, as sentences. */
+export function valueSays(facts: Omit<ValueComparison, 'says'>, head: Head): string {
+  const share = facts.known === 0 ? '' : ` (${showShare(Math.abs(facts.deviation / facts.known))})`;
+  const first = `The result reads ${showValue(head, facts.result)}, the known answer ${showValue(head, facts.known)}: E = S - D = ${signed(head, facts.deviation)}${share}.`;
+  return [first, uncertaintySentence(facts, head), outcomeSentence({ ...facts, scale: Math.abs(facts.known), whole: 'the known answer' }, head, false)].join(' ');
+}
+
+type Judged = Pick<Comparison, 'uncertainty' | 'validation' | 'telling' | 'parts' | 'deviation' | 'limit' | 'outcome'>;
+
+function uncertaintySentence({ uncertainty, validation, telling, parts, deviation }: Judged, head: Head): string {
   if (uncertainty === undefined || validation === undefined) return 'The numerical uncertainty of the result is not known, so the deviation may be that of the mesh: give it as --numerical, from grids.';
   const named = [['numerical', parts.numerical], ['input', parts.input], ['statistical', parts.statistical], ['data', parts.data]] as const;
   const list = named.flatMap(([name, half]) => (half === undefined || half === 0 ? [] : [`${name} ${showDifference(head, half)}`])).join(', ');
@@ -39,8 +48,8 @@ function uncertaintySentence({ uncertainty, validation, telling, parts, deviatio
   return `It lies within ${root}: at this level the answers agree, and no finer; that does not make the model right.`;
 }
 
-function outcomeSentence({ limit, outcome, norms, uncertainty, deviation }: Facts, { head, thin }: Around): string {
-  const share = norms.scale > 0 ? ` (${showShare(limit / norms.scale)} of the range)` : '';
+function outcomeSentence({ limit, outcome, scale, whole, uncertainty, deviation }: Judged & { scale: number; whole: string }, head: Head, thin: boolean): string {
+  const share = scale > 0 ? ` (${showShare(limit / scale)} of ${whole})` : '';
   const asked = `the limit of ${showDifference(head, limit)}${share}`;
   if (outcome === 'met') return `${capital(asked)} is met, the uncertainty of the result included.`;
   if (outcome === 'missed') return `${capital(asked)} is missed, the uncertainty of the result allowed for: stop here and mend this step before the next.`;

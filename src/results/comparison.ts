@@ -13,15 +13,19 @@ export interface KnownTable {
   readonly band: number;
 }
 
-export interface CompareOptions {
-  /** Largest deviation allowed, relative to the range of the known numbers [1]. */
+/** What is allowed, and what is known of the errors of the result. Shares are of the range of the known numbers, or of a single one. */
+export interface Allowances {
+  /** Largest deviation allowed, as a share [1]. */
   readonly limit: number;
-  /** A limit that replaces it, as text: `1 %` of the range, `0.5 K`. */
+  /** A limit that replaces it, as text: `1 %`, `0.5 K`. */
   readonly within?: string;
-  /** Half-widths at 95 %, as text: `1 %` of the range, `0.02 m/s`. */
+  /** Half-widths at 95 %, as text: `1 %`, `0.02 m/s`. */
   readonly numerical?: string;
   readonly input?: string;
   readonly statistical?: string;
+}
+
+export interface CompareOptions extends Allowances {
   /** Relative 95 % half-width of the known numbers, for tables without a band of their own [1]. */
   readonly uncertainty?: number;
   /** What is held against the limit; the largest deviation unless said. */
@@ -61,4 +65,24 @@ export interface TableComparison {
   /** Known columns that the file does not have. */
   readonly missing: readonly string[];
   readonly outcome: Outcome;
+}
+
+/** A single known number. */
+export interface KnownValue extends KnownColumn {
+  readonly value: number;
+  /** Relative 95 % half-width [1]. */
+  readonly uncertainty: number;
+}
+
+/** A single number of a result held against a known one, in SI. */
+export interface ValueComparison extends DeviationVerdict {
+  readonly name: string;
+  readonly unit: string;
+  readonly column: string;
+  readonly result: number;
+  readonly known: number;
+  readonly deviation: number;
+  readonly limit: number;
+  readonly parts: Uncertainties;
+  readonly says: string;
 }

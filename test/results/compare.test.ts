@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { Problem } from '../../src/problems/index.ts';
-import { compareTable, judgeDeviation, norms, readTable, rungTolerance, type CompareOptions, type Comparison, type KnownTable, type TableComparison } from '../../src/results/index.ts';
+import { compareTable, compareValues, judgeDeviation, norms, readTable, rungTolerance, type CompareOptions, type Comparison, type KnownTable, type TableComparison } from '../../src/results/index.ts';
 
 /** Speed rising along a line: u = 2 x, so that straight lines and cubics agree and every deviation is known by hand. */
 const ramp: KnownTable = { title: 'a ramp', band: 0, columns: [{ id: 'x', name: 'place', unit: 'm' }, { id: 'velocity', name: 'u', unit: 'm/s' }], rows: [0, 1, 2, 3, 4].map((x) => [x, 2 * x]) };
@@ -116,4 +116,25 @@ describe('tolerance of a rung', () => {
     [0.02, 'measured', Math.sqrt(0.0008)],
     [0.001, 'benchmark', Math.sqrt(0.000026)],
   ] as const)('%f, %s', (uncertainty, kind, expected) => expect(rungTolerance({ uncertainty, kind })).toBeCloseTo(expected, 10));
+});
+
+describe('single numbers', () => {
+  const known = [{ id: 'nusselt', name: 'Nusselt number', unit: '1', value: 3.65679, uncertainty: 0 }, { id: 'pressureDrop', name: 'pressure drop', unit: 'Pa', value: 1000, uncertainty: 0.05 }];
+  const values = (csv: string, numerical?: string): ReturnType<typeof compareValues> => compareValues(known, readTable(csv, 'a.csv'), { limit: 0.005, ...(numerical === undefined ? {} : { numerical }) });
+  it('each side of the limit of 0.5 %', () => {
+    expect(values('Nusselt number,x\n3.67,1\n', '0.1 %')[0]).toMatchObject({ outcome: 'met', known: 3.65679, result: 3.67 });
+    expect(values('nusselt\n3.67\n', '0.2 %')[0]?.outcome).toBe('cannot tell');
+    expect(values('nusselt\n3.67\n')[0]?.outcome).toBe('cannot tell');
+    expect(values('nusselt\n3.70\n', '0.1 %')[0]?.outcome).toBe('missed');
+  });
+  it('the band of the known number counts in the validation uncertainty', () => {
+    const [found] = values('pressure drop [kPa]\n1.02\n', '1 %');
+    expect(found?.validation).toBeCloseTo(Math.sqrt(50 ** 2 + 10 ** 2), 10);
+    expect(found?.telling).toBe(false);
+    expect(found?.says).toContain('E = S - D = +20 Pa (2 %)');
+  });
+  it('no such column, and more rows than one', () => {
+    expect(values('drag\n1\n')).toEqual([]);
+    expect(codes(() => values('nusselt\n1\n2\n'))).toEqual(['many-rows']);
+  });
 });
