@@ -96,6 +96,10 @@ export function engineOf(record: MaterialRecord, collection: Collection): Materi
       }
       return kept;
     },
+    at(s) {
+      composition = s.x;
+      return engine.equation!;
+    },
     saturation: (T) => engine.equation!.line!.bubble(T),
     value(property, s) {
       if (record.thermodynamics !== undefined && property in fromEquation) return fromEquation[property as keyof typeof fromEquation](engine.point(s), engine.equation!.gasConstant);

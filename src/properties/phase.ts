@@ -65,7 +65,7 @@ export function phaseAt(material: Material, T: number, p: number, x = 0): PhaseA
     if (melting !== undefined && T > melting) flags.push(`above the melting temperature of ${K(melting)}`);
     return { phase: 'solid', flags };
   }
-  const frozen = meltingAt(material, p);
+  const frozen = meltingAt(material, p, x);
   if (frozen !== undefined && T < frozen * (1 - 1e-6)) return { phase: 'solid', flags: [`below the melting temperature of ${K(frozen)}`] };
   const critical = material.critical;
   if (critical !== undefined && T > 0.97 * critical.temperature && T < 1.08 * critical.temperature && p > 0.75 * critical.pressure && p < 1.5 * critical.pressure) {
@@ -85,12 +85,12 @@ export function phaseAt(material: Material, T: number, p: number, x = 0): PhaseA
   return { phase, saturation, flags };
 }
 
-function meltingAt(material: Material, p: number): number | undefined {
+function meltingAt(material: Material, p: number, x: number): number | undefined {
   const entry = material.record.properties['meltingTemperature']?.[0];
   if (entry === undefined) return undefined;
   const range = entry.ranges[0]?.pressure;
   const at = range === undefined ? p : Math.min(range[1], Math.max(range[0], p));
-  return material.engine.evaluate(entry, { T: Number.NaN, p: at, side: 'liquid', x: 0 });
+  return material.engine.evaluate(entry, { T: Number.NaN, p: at, side: 'liquid', x });
 }
 
 const side = (phase: Phase): Side | 'solid' => (phase === 'solid' ? 'solid' : phase === 'liquid' ? 'liquid' : 'vapour');

@@ -29,7 +29,7 @@ export interface TakenState {
 }
 
 /** Properties of saturation and of the substance: they hold at any phase, and end where their line ends. */
-const ofSubstance: readonly string[] = ['vapourPressure', 'saturationTemperature', 'latentHeat', 'surfaceTension', 'meltingTemperature', 'emissivity'];
+const ofSubstance: readonly string[] = ['vapourPressure', 'saturationTemperature', 'latentHeat', 'surfaceTension', 'meltingTemperature', 'fusionHeat', 'emissivity'];
 
 /**
  * Takes a state of a material: checks it, settles its phase.

@@ -1,4 +1,6 @@
+import { carbonDioxideConductivity, carbonDioxideViscosity, type CarbonDioxideConductivityConstants, type CarbonDioxideViscosityConstants } from './models/co2-transport.ts';
 import { helmholtz, type HelmholtzConstants } from './models/helmholtz.ts';
+import { humidAir, type HumidAir } from './models/humid-air.ts';
 import { if97, type WaterConstants } from './models/if97.ts';
 import * as laws from './models/laws.ts';
 import { lemmonJacobsenConductivity, lemmonJacobsenViscosity, type GasConductivityConstants, type GasViscosityConstants } from './models/gas-transport.ts';
@@ -35,8 +37,18 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
   'critical-powers': ofTemperature(['critical', 'terms', 'base?', 'gives?'], laws.criticalPowers),
   sutherland: ofTemperature(['value', 'T0', 'S'], laws.sutherland),
   vogel: ofTemperature(['A', 'B', 'C', 'gives?'], laws.vogel),
-  table: ofTemperature(['rows', 'gives?', 'argument?'], laws.table),
+  table: ofTemperature(['rows', 'interpolate?', 'gives?', 'argument?'], laws.table),
+  'reciprocal-polynomial': ofTemperature(['value', 'terms', 'origin?', 'gives?', 'argument?'], laws.reciprocalPolynomial),
+  'saturation-powers': ofTemperature(['temperature', 'pressure', 'terms'], laws.saturationPowers),
   antoine: ofTemperature(['A', 'B', 'C', 'gives?', 'argument?'], laws.antoine),
+  'mixture-polynomial': {
+    constants: ['origin', 'share', 'rows', 'of?', 'gives?'],
+    make(c: Parameters<typeof laws.mixturePolynomial>[0]) {
+      const value = laws.mixturePolynomial(c);
+      return (s) => value(Number.isNaN(s.T) ? c.origin : s.T, s.x);
+    },
+  },
+  'wiedemann-franz': { constants: ['lorenz'], make: (c: { lorenz: number }, engine) => (s) => engine.value('thermalConductivity', s) / (c.lorenz * s.T) },
   walther: {
     constants: ['T1', 'nu1', 'T2', 'nu2'],
     make(c: Parameters<typeof laws.walther>[0], engine) {
@@ -87,6 +99,27 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
       };
     },
   },
+  'carbon-dioxide-viscosity': {
+    constants: ['dilute', 'virial', 'epsilon', 'sigma', 'dense', 'triple', 'molarMass'],
+    make(c: CarbonDioxideViscosityConstants, engine) {
+      const viscosity = carbonDioxideViscosity(c);
+      return (s) => viscosity(s.T, engine.point(s).density);
+    },
+  },
+  'carbon-dioxide-conductivity': {
+    constants: ['dilute', 'dense', 'temperature', 'density', 'critical'],
+    make(c: CarbonDioxideConductivityConstants, engine) {
+      let sample: Sample;
+      const conductivity = carbonDioxideConductivity(c, { viscosity: () => engine.value('viscosity', sample), equation: engine.equation! });
+      return (s) => {
+        sample = s;
+        return conductivity(engine.point(s));
+      };
+    },
+  },
+  'mixture-viscosity': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as HumidAir).viscosity(s.T, s.p) },
+  'mixture-conductivity': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as HumidAir).conductivity(s.T, s.p) },
+  'dew-point': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as HumidAir).dewPoint(s.T, s.p) },
   'saturation-pressure': { constants: [], make: (_c, engine) => (s) => engine.saturation(s.T) },
   'saturation-temperature': {
     constants: [],
@@ -113,5 +146,6 @@ export const equationModels: { readonly [name: string]: EquationModel } = {
     constants: ['gasConstant', 'region1', 'region2', 'region2Ideal', 'region3', 'region3Log', 'region5', 'region5Ideal', 'boundary23', 'saturation', 'liquid', 'vapour', 'scientific'],
     make: (c: WaterConstants) => if97(c),
   },
+  'humid-air': { constants: ['cross'], partners: ['air', 'water'], make: (c: Parameters<typeof humidAir>[0], partners, x) => humidAir(c, partners, x) },
   helmholtz: { constants: ['temperature', 'density', 'gasConstant', 'densest', 'ideal', 'residual', 'saturation?'], make: (c: HelmholtzConstants) => helmholtz(c) },
 };

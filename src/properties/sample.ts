@@ -17,6 +17,8 @@ export interface Engine {
   readonly equation?: EquationOfState;
   /** Thermodynamic properties at the sample; kept for the last state. */
   point(sample: Sample): Point;
+  /** The equation of state set to the composition of the sample. */
+  at(sample: Sample): EquationOfState;
   /** Another property of the same material at the same sample. */
   value(property: PropertyId, sample: Sample): number;
   /** Saturation pressure [Pa] at T. */

@@ -72,15 +72,46 @@ export const walther = (c: { T1: number; nu1: number; T2: number; nu2: number })
   return (T: number): number => 1e-6 * (10 ** 10 ** (A - B * Math.log10(T)) - 0.7);
 };
 
-/** Table with straight lines between its rows [x, y], beyond its ends carried on along the last piece. */
-export const table = (c: Scaled & { rows: readonly (readonly number[])[] }) => (T: number): number => {
+/** Table with straight lines between its rows [x, y] (or straight in ln y), beyond its ends carried on along the last piece. */
+export const table = (c: Scaled & { rows: readonly (readonly number[])[]; interpolate?: string }) => (T: number): number => {
   const x = inUnit(c, T);
   const rows = c.rows as readonly [number, number][];
   let i = 1;
   while (i < rows.length - 1 && x > rows[i]![0]) i++;
   const [x0, y0] = rows[i - 1]!;
   const [x1, y1] = rows[i] ?? rows[i - 1]!;
-  return toSI(c, x1 === x0 ? y0 : y0 + ((y1 - y0) * (x - x0)) / (x1 - x0));
+  const share = x1 === x0 ? 0 : (x - x0) / (x1 - x0);
+  return toSI(c, c.interpolate === 'logarithm' ? y0 * (y1 / y0) ** share : y0 + (y1 - y0) * share);
+};
+
+/** y = value / sum a_i x^i, x the temperature in the printed unit less `origin`. */
+export const reciprocalPolynomial = (c: Scaled & { value: number; terms: readonly number[]; origin?: number }) => (T: number): number => {
+  const x = inUnit(c, T) - (c.origin ?? 0);
+  let below = 0;
+  for (let i = c.terms.length - 1; i >= 0; i--) below = below * x + c.terms[i]!;
+  return toSI(c, c.value / below);
+};
+
+/** ln(p/p_c) = (T_c/T) sum n (1 - T/T_c)^e over rows [n, e]: vapour pressure. */
+export const saturationPowers = (c: { temperature: number; pressure: number; terms: readonly (readonly number[])[] }) => (T: number): number => {
+  const x = Math.max(0, 1 - T / c.temperature);
+  let sum = 0;
+  for (const [n, e] of c.terms as readonly [number, number][]) sum += n * x ** e;
+  return c.pressure * Math.exp((sum * c.temperature) / T);
+};
+
+/** A mixture by temperature and share: y (or ln y) = sum c_ij (T - origin)^i (x - share)^j. */
+export const mixturePolynomial = (c: Scaled & { origin: number; share: number; rows: readonly (readonly number[])[]; of?: string }) => (T: number, share: number): number => {
+  const t = T - c.origin;
+  const x = share - c.share;
+  let y = 0;
+  for (let i = c.rows.length - 1; i >= 0; i--) {
+    const row = c.rows[i]!;
+    let along = 0;
+    for (let j = row.length - 1; j >= 0; j--) along = along * x + row[j]!;
+    y = y * t + along;
+  }
+  return toSI(c, c.of === 'logarithm' ? Math.exp(y) : y);
 };
 
 /** log10 y = A - B/(C + x). */
