@@ -66,6 +66,8 @@ export class Workings {
   #next: Int32Array[] | undefined;
   readonly #followers = new Map<number, Int32Array>();
   #knowable: Uint8Array | undefined;
+  /** For a quantity pinned since: what could be known without the pin. */
+  readonly #knewWithout = new Map<number, Uint8Array>();
 
   constructor(nodes: ReadonlyMap<string, Node>, given: Readonly<Record<string, Given>>, laws: Laws = {}) {
     for (const node of nodes.values()) this.index.set(node.id, this.slots.push({ id: node.id, node, isWord: node.about.unit === 'word', ways: [] }) - 1);
@@ -157,9 +159,19 @@ export class Workings {
     const pin = value === undefined ? 0 : 1;
     if (typeof value === 'string') this.#word[i] = value;
     else if (value !== undefined) this.#base[i] = value;
-    if (this.#pinned[i] !== pin) this.#knowable = undefined;
+    if (this.#pinned[i] !== pin) this.#keepKnowable(i, pin);
     this.#pinned[i] = pin;
     this.#forget(i);
+  }
+
+  /** What can be known does not change by pinning a quantity that could be known, nor by setting it free again. */
+  #keepKnowable(i: number, pin: number): void {
+    if (pin === 1 && this.#knowable?.[i] === 1) {
+      this.#knewWithout.set(i, this.#knowable);
+      return;
+    }
+    if (pin === 0 && this.#knowable !== undefined && this.#knewWithout.get(i) === this.#knowable) return;
+    this.#knowable = undefined;
   }
 
   isPinned(i: number): boolean { return this.#pinned[i] === 1; }
