@@ -1,6 +1,5 @@
 export { convert, type Converted } from './convert.ts';
 export { type Dimension, dimensionless, dimensionText, sameDimension } from './dimension.ts';
-export { clean } from './number-text.ts';
 export { fromSI, type NumberParts, numberParts, type Printing, printNumber } from './print.ts';
 export { atmosphere, type Quantity, readQuantity } from './quantity.ts';
 export type { Spread } from './spread-text.ts';

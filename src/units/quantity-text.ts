@@ -68,7 +68,7 @@ function twice(text: string, says: string): Problem {
 export function takeWords(piece: string, whole: string, words: Words): { rest: string; words: Words } {
   let rest = piece.trimEnd();
   let out = words;
-  for (let again = true; again; ) {
+  for (let again = /[a-z)] *$/.test(rest); again; ) {
     again = false;
     for (const [pattern, says] of endings) {
       const found = pattern.exec(rest);

@@ -22,7 +22,8 @@ export interface Wanted {
 export interface WantedUnit extends Pick<Unit, 'dimension' | 'angle' | 'cycle' | 'byte'> {
   readonly kind: QuantityKind;
   readonly name: string;
-  readonly examples: string;
+  /** For a message; worked out only when there is one. */
+  readonly examples: () => string;
 }
 
 const kelvin: Dimension = [0, 0, 0, 1, 0, 0, 0];
@@ -64,15 +65,15 @@ export function wantedUnit(want: Wanted): WantedUnit {
   const found = want.unit === undefined ? undefined : unit(want.unit, want.exponentN ?? 1);
   const dimension = found?.dimension ?? want.dimension ?? [0, 0, 0, 0, 0, 0, 0];
   const kind = want.kind ?? (sameDimension(dimension, kelvin) ? (found?.difference ? 'temperatureDifference' : 'temperature') : 'plain');
-  const text = dimensionText(dimension);
-  const counts = found?.byte ? '64 GB, 500 MB' : text === '1' ? (found?.angle ? '30 deg, 0.5 rad' : '0.45, 45 %') : undefined;
+  const text = (): string => dimensionText(dimension);
+  const counts = (): string | undefined => (found?.byte ? '64 GB, 500 MB' : text() === '1' ? (found?.angle ? '30 deg, 0.5 rad' : '0.45, 45 %') : undefined);
   return {
     dimension,
     angle: found?.angle ?? 0,
     cycle: found?.cycle ?? 0,
     byte: found?.byte ?? 0,
     kind,
-    name: want.name ?? names[kind] ?? `quantity in ${want.unit === undefined || want.unit === '' ? text : want.unit}`,
-    examples: byKind[kind] ?? counts ?? examples[text] ?? `1 ${want.unit ?? text}`,
+    name: want.name ?? names[kind] ?? `quantity in ${want.unit === undefined || want.unit === '' ? text() : want.unit}`,
+    examples: () => byKind[kind] ?? counts() ?? examples[text()] ?? `1 ${want.unit ?? text()}`,
   };
 }
