@@ -84,6 +84,8 @@ export function factsOf(on: Case, flow: Flow, walls: WallKeys, target: { readonl
   else words['infiniteDepth'] = 'no';
   take('storage', 'cell-centred', 'the solver keeps its unknowns in cell centres');
   words['ductSection'] = 'other';
+  const confinement = on.word('confinement');
+  if (confinement !== undefined) words['generalConfinement'] = confinement;
   return { words: { ...words, ...flow.words }, assumed: assumed.filter((a) => flow.words[a.id] === undefined) };
 }
 

@@ -26,7 +26,7 @@ const scales: Definition[] = [
   ways('regionSpan', [way({ needs: sides, value: (of) => Math.max(of['sizes.width'], of['sizes.height']), formula: 'max(W, H)', source: geometry })]),
   ways('wallArea@walls.bottom', [plate()]),
   ways('wallArea@walls.top', [plate()]),
-  ways('wallArea@walls.sides', [way({ needs: ['sizes.height', 'sizes.length'], value: (of) => 2 * of['sizes.height'] * of['sizes.length'], formula: 'A_w = 2 H L', source: geometry })]),
+  ...['left', 'right'].map((side) => ways(`wallArea@walls.${side}`, [way({ needs: ['sizes.height', 'sizes.length'], value: (of) => of['sizes.height'] * of['sizes.length'], formula: 'A_w = H L', source: geometry })])),
   ways('passageHeight', [
     way({ needs: ['sizes.length'], when: { axis: 'upright' }, value: (of) => of['sizes.length'], formula: 'H_g = L', source: geometry }),
     way({ needs: ['sizes.height'], when: { axis: 'level' }, value: (of) => of['sizes.height'], formula: 'H_g = H', source: geometry }),
@@ -86,7 +86,7 @@ export const duct: Flow = {
     { key: 'height', name: 'inner height', unit: 'm' },
     { key: 'length', name: 'length that counts', unit: 'm' },
   ],
-  walls: ['bottom', 'sides', 'top'],
+  walls: ['left', 'right', 'top', 'bottom'],
   targetWall: 'bottom',
   stations: ['worst', 'target'],
   regions: ['entry', 'run'],

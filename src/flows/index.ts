@@ -1,2 +1,2 @@
-export { flowById, flows } from './registry.ts';
+export { flows } from './registry.ts';
 export type { Cut, Extent, Flow, Rung, Size } from './define.ts';
