@@ -14,7 +14,7 @@ export const effectIds: readonly string[] = [
 const readFirst: readonly string[] = ['turbulence', 'transition', 'buoyancy', 'buoyancy-driven', 'variable-density', 'nonlinear-density', 'variable-viscosity', 'radiation'];
 
 /** Option words of the choices, in the order in which a plan lists the choices. */
-export const optionWords: Readonly<Record<string, readonly string[]>> = {
+const optionWords: Readonly<Record<string, readonly string[]>> = {
   closure: ['none', 'k-epsilon', 'k-epsilon-variant', 'k-epsilon-low-re', 'k-omega', 'sst', 'one-equation', 'reynolds-stress', 'transition'],
   'second-closure': ['none', 'k-epsilon', 'k-epsilon-variant', 'k-epsilon-low-re', 'k-omega', 'sst', 'one-equation', 'reynolds-stress', 'transition'],
   'turbulence-treatment': ['none', 'rans', 'hybrid', 'wall-modelled-les', 'les', 'dns'],
@@ -31,6 +31,8 @@ export const optionWords: Readonly<Record<string, readonly string[]>> = {
   precision: ['none', 'single', 'mixed', 'double'],
 };
 export const choiceIds: readonly string[] = Object.keys(optionWords);
+/** The option words of a choice; undefined for one that a rule pack brings. */
+export const optionsOf = (choice: string): readonly string[] | undefined => (choiceIds.includes(choice) ? optionWords[choice] : undefined);
 
 /** A dimension, or any cuts joined by +, in the order in which a case lists them. */
 function cutWords(): string[] {

@@ -3,6 +3,7 @@ export type { ChoiceDecision } from './decide-choice.ts';
 export { decide, type DecideOptions, type Decisions, type EffectDecision } from './decide.ts';
 export type { EffectState } from './effects.ts';
 export { exampleOutcomes, type ExampleOutcome } from './examples.ts';
+export { everyFact } from './every-fact.ts';
 export { flips, type FlipAt, type FlipInput } from './flips.ts';
 export type { ChoiceRule, CompiledRules, Condition, EffectRule, Limit, PriceLine, Verdict } from './form.ts';
 export { choiceIds, effectIds, inOrder } from './ids.ts';

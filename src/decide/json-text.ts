@@ -11,7 +11,7 @@ interface Entry {
   readonly value: Node;
 }
 
-const deepest = 40;
+const deepest = 60;
 const largest = 262144;
 
 class Stop extends Error {

@@ -1,5 +1,5 @@
 import type { Definition } from '../workings/index.ts';
-import { choiceIds, effectIds, optionWords } from './ids.ts';
+import { choiceIds, effectIds, optionsOf } from './ids.ts';
 import { verdicts } from './form.ts';
 
 /** The facts that rules may name: every quantity, and the closed list of each word. */
@@ -29,7 +29,7 @@ export function knownFacts(definitions: readonly Definition[]): KnownFacts {
 export function decisionWords(fact: string, own: readonly string[]): readonly string[] | 'any' | 'unknown' | undefined {
   const [head, ...rest] = fact.split('.');
   const id = rest.join('.');
-  if (head === 'choice') return optionWords[id] ?? (own.includes(id) ? 'any' : 'unknown');
+  if (head === 'choice') return optionsOf(id) ?? (own.includes(id) ? 'any' : 'unknown');
   if (head !== 'verdict' && head !== 'kept' && head !== 'branch') return undefined;
   if (!effectIds.includes(id) && !own.includes(id)) return 'unknown';
   return head === 'verdict' ? verdicts : head === 'kept' ? ['yes', 'no'] : 'any';

@@ -40,7 +40,7 @@ function tolerance(workings: Workings, target: Target, value: number): number {
   const within = target.within ?? {};
   if (within.absolute !== undefined) return within.absolute;
   const difference = /difference/i.test(target.quantity);
-  if (within.ofChange === undefined && (difference || unitOf(workings, target.quantity) !== 'K')) return (within.relative ?? usual) * Math.abs(value);
+  if (difference || unitOf(workings, target.quantity) !== 'K') return (within.relative ?? within.ofChange ?? usual) * Math.abs(value);
   const from = workings.get('inletTemperature');
   const change = from !== undefined && from !== value ? Math.abs(value - from) : (workings.get('temperatureDifference') ?? Number.NaN);
   return (within.ofChange ?? within.relative ?? usual) * change;

@@ -1,4 +1,4 @@
-import { optionWords } from './ids.ts';
+import { optionsOf } from './ids.ts';
 import type { ChoiceExample, ChoiceRule, Option, Take } from './form.ts';
 import type { Node } from './json-text.ts';
 import { readCondition } from './read-condition.ts';
@@ -14,7 +14,7 @@ export function readChoice(reader: Reader, root: Node): ChoiceRule | undefined {
   if (map === undefined) return undefined;
   const get = (key: string): Node | undefined => map.get(key)?.value;
   const choice = readId(reader, get('choice'), 'the choice') ?? '';
-  const options = readOptions(reader, get('options'), optionWords[choice]);
+  const options = readOptions(reader, get('options'), optionsOf(choice));
   const valid = ['none', ...Object.keys(options)];
   const entries = [
     ...reader.list(get('first'), '"first"').flatMap((node) => readOption(reader, node, valid, true) ?? []),

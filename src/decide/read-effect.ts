@@ -20,12 +20,13 @@ export function readEffect(reader: Reader, root: Node): EffectRule | undefined {
   const branchNodes = reader.list(get('branches'), '"branches"');
   const branches = branchNodes.flatMap((node) => readBranch(reader, node) ?? []);
   const otherwise = readFixed(reader, get('otherwise'), '"otherwise"');
-  const last = branches.at(-1);
   if (branches.length === branchNodes.length) {
-    if ((last === undefined || last.when !== undefined) && !map.has('otherwise')) reader.complain(last === undefined ? root : (branchNodes.at(-1) as Node), 'missing-otherwise', 'the last branch has a condition, so that no branch may fit: "otherwise" must say what then holds');
-    if (last !== undefined && last.when === undefined && map.has('otherwise')) reader.complain(map.get('otherwise')?.key as Node, 'idle-otherwise', 'the last branch always fits, so that "otherwise" never counts');
+    const worst = get('combine')?.value === 'worst';
+    const sure = worst ? branches.some((b) => b.when === undefined) : branches.length > 0 && branches.at(-1)?.when === undefined;
+    if (!sure && !map.has('otherwise')) reader.complain(branchNodes.at(-1) ?? root, 'missing-otherwise', `${worst ? 'every' : 'the last'} branch has a condition, so that none may fit: "otherwise" must say what then holds`);
+    if (sure && map.has('otherwise')) reader.complain(map.get('otherwise')?.key as Node, 'idle-otherwise', `${worst ? 'a' : 'the last'} branch always fits, so that "otherwise" never counts`);
     const early = branches.findIndex((b) => b.when === undefined);
-    if (get('combine')?.value !== 'worst' && early >= 0 && early < branches.length - 1) reader.complain(branchNodes[early] as Node, 'hidden-branch', `the branch ${branches[early]?.id ?? ''} always fits and hides those after it`);
+    if (!worst && early >= 0 && early < branches.length - 1) reader.complain(branchNodes[early] as Node, 'hidden-branch', `the branch ${branches[early]?.id ?? ''} always fits and hides those after it`);
   }
   branches.forEach((b, k) => branches.findIndex((other) => other.id === b.id) === k || reader.complain(branchNodes[k] as Node, 'double-id', `the branch ${b.id} stands twice`));
   const rule: EffectRule = {

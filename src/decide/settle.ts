@@ -4,7 +4,7 @@ import { leavesOf } from './conditions.ts';
 import { judge, type EffectState, type Point } from './effects.ts';
 import { Overlaid, WorkingsFacts, type FactSource } from './facts.ts';
 import type { Branch, CompiledRules, Condition, EffectRule, Verdict } from './form.ts';
-import { choiceIds, choicesInReadingOrder, effectsInReadingOrder, inOrder } from './ids.ts';
+import { choicesInReadingOrder, effectsInReadingOrder } from './ids.ts';
 import type { Interval } from './judge.ts';
 import type { Target } from './price.ts';
 
@@ -16,6 +16,8 @@ export interface SettleOptions {
   readonly rangeOf?: Interval | undefined;
   /** Low and high end of its spread. */
   readonly spreadOf?: Interval | undefined;
+  /** Choices that the case states, by id. */
+  readonly chosen?: Readonly<Record<string, string>> | undefined;
 }
 /** All decisions at one point of the workings. */
 export interface State {
@@ -32,25 +34,19 @@ const absent: EffectState = { rule: undefined, applies: 'unknown', whyNot: [], j
 interface Session {
   readonly effects: readonly (readonly [string, EffectRule | undefined])[];
   readonly choices: readonly string[];
-  readonly stated: ReadonlyMap<string, string>;
   readonly places: (rule: EffectRule) => readonly (string | undefined)[];
 }
 const sessions = new WeakMap<Workings, WeakMap<CompiledRules, Session>>();
-const stated = new WeakMap<Workings, ReadonlyMap<string, string>>();
 
 function sessionOf(workings: Workings, rules: CompiledRules): Session {
   const kept = sessions.get(workings) ?? new WeakMap<CompiledRules, Session>();
   sessions.set(workings, kept);
   let session = kept.get(rules);
   if (session === undefined) {
-    const choices = inOrder(Object.keys(rules.choices), choiceIds);
-    const said = stated.get(workings) ?? new Map(choices.flatMap((id) => { const word = workings.word(`choice.${id}`); return word === undefined ? [] : [[id, word]]; }));
-    stated.set(workings, said);
     const places = new Map<EffectRule, readonly (string | undefined)[]>();
     session = {
       effects: effectsInReadingOrder(Object.keys(rules.effects)).map((id) => [id, rules.effects[id]]),
       choices: choicesInReadingOrder(Object.keys(rules.choices)),
-      stated: said,
       places: (rule) => {
         let found = places.get(rule);
         if (found === undefined) places.set(rule, (found = placesOf(workings, rule)));
@@ -106,7 +102,7 @@ export function settle(workings: Workings, rules: CompiledRules, targets: readon
     facts: new WorkingsFacts(workings, options.askable ?? (() => true)), words: new Map(), prices: new Map(),
   };
   const { effects, passes } = settleEffects(point, session);
-  const choices = settleChoices(point, session, rules, effects);
+  const choices = settleChoices(point, session, rules, effects, new Map(Object.entries(options.chosen ?? {})));
   for (const [id, state] of effects) pin(workings, `verdict.${id}`, state.verdict);
   for (const [id, state] of choices) if (state.rule !== undefined || state.given) pin(workings, `choice.${id}`, state.chosen);
   return { effects, choices, passes, point };
@@ -169,21 +165,21 @@ class ChoiceFacts implements FactSource {
   }
 }
 
-function settleChoices(point: Point, session: Session, rules: CompiledRules, effects: ReadonlyMap<string, EffectState>): Map<string, ChoiceState> {
+function settleChoices(point: Point, session: Session, rules: CompiledRules, effects: ReadonlyMap<string, EffectState>, stated: ReadonlyMap<string, string>): Map<string, ChoiceState> {
   const undecided = [...effects].flatMap(([id, e]) => (e.verdict === 'undecided' && e.judged ? [id] : []));
   const words = new Map(point.words);
   for (const [id, e] of effects) {
     words.set(`kept.${id}`, kept(e) ? 'yes' : 'no');
     if (!e.judged) words.set(`verdict.${id}`, 'leave-out'); // none of its numbers can be had
   }
-  for (const [id, word] of session.stated) words.set(`choice.${id}`, word);
+  for (const [id, word] of stated) words.set(`choice.${id}`, word);
   const facts = new ChoiceFacts(words, new Overlaid(point.facts, point.words));
   const out = new Map<string, ChoiceState>();
   for (let round = 0, more = true; more && round < mostPasses; round++) {
     more = false;
     for (const id of session.choices) {
       const rule = rules.choices[id];
-      const said = session.stated.get(id);
+      const said = stated.get(id);
       const next = rule === undefined ? unread(said) : choose(rule, facts, undecided, said);
       if (out.get(id)?.chosen !== next.chosen) more = true;
       out.set(id, next);
