@@ -86,6 +86,7 @@ export function engineOf(record: MaterialRecord, collection: Collection): Materi
       return equation as NonNullable<Engine['equation']>;
     },
     point(s) {
+      if (s.density !== undefined) return engine.equation!.of(s.T, s.density);
       if (s.T !== keptT || s.p !== keptP || s.x !== keptX || s.side !== keptSide || kept === undefined) {
         composition = s.x;
         kept = engine.equation!.at(s.T, s.p, s.side);

@@ -44,7 +44,7 @@ export interface PhaseAt {
   readonly flags: readonly string[];
 }
 
-const K = (T: number): string => `${Number(T.toPrecision(5))} K`;
+const K = (T: number): string => `${Number(T.toPrecision(5))} K (${Number((T - 273.15).toFixed(2))} degC)`;
 
 /**
  * The stable phase of a material at temperature and pressure.
@@ -119,7 +119,7 @@ export function takenPhase(material: Material, state: State): PhaseAt & { readon
     throw new Problem({ code: 'no-such-phase', message: `${material.name} is ${words[found.phase]} ${where}, not ${asked === 'vapour' ? 'a vapour' : `a ${asked}`}`, expected: boils === undefined ? `a state where it is ${asked}` : `a temperature ${asked === 'vapour' ? 'above' : 'below'} ${K(boils)} at this pressure` });
   }
   if (!material.phases.includes(stable) && !(stable === 'vapour' && found.phase === 'supercritical')) {
-    throw new Problem({ code: 'not-covered', message: `${material.name} is ${words[found.phase]} ${where}, and its record covers ${material.phases.join(' and ')} only`, expected: found.flags[0] ?? 'another state, or the properties themselves' });
+    throw new Problem({ code: 'not-covered', message: `${material.name} is ${words[found.phase]} ${where}, and its record covers ${material.phases.join(' and ')} only`, expected: stable === 'solid' && found.flags[0] !== undefined ? `a temperature that is not ${found.flags[0]}` : 'another state, or the properties themselves' });
   }
   return { ...found, side: stable };
 }

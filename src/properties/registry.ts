@@ -4,7 +4,7 @@ import { humidAir, type HumidAir } from './models/humid-air.ts';
 import { if97, type WaterConstants } from './models/if97.ts';
 import * as laws from './models/laws.ts';
 import { lemmonJacobsenConductivity, lemmonJacobsenViscosity, type GasConductivityConstants, type GasViscosityConstants } from './models/gas-transport.ts';
-import { waterConductivity, waterViscosity, type WaterConductivityConstants, type WaterViscosityConstants } from './models/water-transport.ts';
+import { waterConductivity, waterCriticalFactor, waterViscosity, type WaterConductivityConstants, type WaterViscosityConstants } from './models/water-transport.ts';
 import type { EquationModel, PropertyModel, Sample } from './sample.ts';
 
 type OfTemperature = (c: never) => (T: number) => number;
@@ -64,10 +64,15 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
     },
   },
   'water-viscosity': {
-    constants: ['H0', 'H1'],
+    constants: ['H0', 'H1', 'A'],
     make(c: WaterViscosityConstants, engine) {
       const viscosity = waterViscosity(c);
-      return (s) => viscosity(s.T, engine.point(s).density);
+      return (s) => {
+        const { density, compressibility } = engine.point(s);
+        // Farther from the critical point the factor differs from 1 by less than 0.1 %.
+        const near = s.T > 620 && s.T < 700 && density > 100 && density < 600;
+        return viscosity(s.T, density) * (near ? waterCriticalFactor({ temperature: s.T, density, compressibility, A: c.A }) : 1);
+      };
     },
   },
   'water-conductivity': {
@@ -143,7 +148,7 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
 /** Equations of state by the name that records use. */
 export const equationModels: { readonly [name: string]: EquationModel } = {
   'water-if97': {
-    constants: ['gasConstant', 'region1', 'region2', 'region2Ideal', 'region3', 'region3Log', 'region5', 'region5Ideal', 'boundary23', 'saturation', 'liquid', 'vapour', 'scientific'],
+    constants: ['gasConstant', 'region1', 'region2', 'region2Ideal', 'region3', 'region3Log', 'region5', 'region5Ideal', 'boundary23', 'saturation', 'liquid', 'vapour', 'atmospheric', 'scientific'],
     make: (c: WaterConstants) => if97(c),
   },
   'humid-air': { constants: ['cross'], partners: ['air', 'water'], make: (c: Parameters<typeof humidAir>[0], partners, x) => humidAir(c, partners, x) },

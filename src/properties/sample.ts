@@ -10,6 +10,8 @@ export interface Sample {
   side: Side;
   /** Share of the second component by mass, or relative humidity; 0 where the material takes none. */
   x: number;
+  /** [kg/m^3]; where given, the state is temperature and density and `p` is not read. */
+  readonly density?: number;
 }
 
 /** What a correlation may ask its material for. */

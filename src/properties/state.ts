@@ -35,8 +35,9 @@ export interface StateText extends Omit<State, 'temperature' | 'pressure' | 'pha
  * @throws          {Problem} incomplete-state, no-saturation
  */
 export function stateOf(material: Material, said: StateText): State {
-  const { saturated, temperature, pressure, ...rest } = said;
-  const phase = rest.phase ?? saturated ?? undefined;
+  const { saturated, temperature, pressure } = said;
+  const rest = { ...(said.humidity === undefined ? {} : { humidity: said.humidity }), ...(said.composition === undefined ? {} : { composition: said.composition }) };
+  const phase = said.phase ?? saturated;
   if (saturated === undefined) {
     if (temperature === undefined || (pressure === undefined && material.kind === 'fluid')) {
       const missing = temperature === undefined ? 'temperature' : 'pressure';

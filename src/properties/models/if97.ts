@@ -1,5 +1,6 @@
 import { ancillary, type Ancillary } from './ancillary.ts';
 import { helmholtz, type HelmholtzConstants } from './helmholtz.ts';
+import { atmosphericWaterDensity, type AtmosphericWaterConstants } from './water-at-atmosphere.ts';
 import { region1, region2, region3, region5, type If97Constants } from './if97-regions.ts';
 import type { EquationOfState, Point, Side } from './point.ts';
 
@@ -12,6 +13,8 @@ export interface WaterConstants extends If97Constants {
   /** Saturated densities, start of the density search in region 3. */
   readonly liquid: Ancillary;
   readonly vapour: Ancillary;
+  /** Liquid at 0.1 MPa, which sharpens the density of region 1 near the atmosphere. */
+  readonly atmospheric: AtmosphericWaterConstants;
   /** The scientific formulation, for what the industrial one leaves out: above 100 MPa, and by temperature and density. */
   readonly scientific: HelmholtzConstants;
 }
@@ -63,6 +66,7 @@ export function if97(c: WaterConstants): EquationOfState {
   const scientific = lazily(() => helmholtz(c.scientific));
   const liquid = ancillary(c.liquid);
   const vapour = ancillary(c.vapour);
+  const atmospheric = atmosphericWaterDensity(c.atmospheric);
   const psat = saturationPressure(c.saturation);
   const [b1, b2, b3] = c.boundary23 as [number, number, number];
   const boundary = (T: number): number => 1e6 * (b1 + b2 * T + b3 * T * T);
@@ -86,10 +90,24 @@ export function if97(c: WaterConstants): EquationOfState {
     return { ...region(T, rho), pressure: p };
   };
 
+  /** Region 1 with its density scaled to the atmospheric line, by up to 1.5e-5; the scaling fades between 353 K and 383 K. */
+  let scaledT = Number.NaN;
+  let scale = 1;
+  const liquidAt = (T: number, p: number): Point => {
+    if (T !== scaledT) {
+      const share = T <= 353.15 ? 1 : T >= 383.15 ? 0 : (383.15 - T) / 30;
+      scale = share === 0 ? 1 : 1 + share * (atmospheric(T) / first()(T, 1e5).density - 1);
+      scaledT = T;
+    }
+    const point = first()(T, p);
+    point.density *= scale;
+    return point;
+  };
+
   const at = (T: number, p: number, side: Side): Point => {
     if (p > 100e6) return scientific().at(T, p, 'liquid');
     if (T > 1073.15) return p > 50e6 ? scientific().at(T, p, 'vapour') : fifth()(T, p);
-    if (T <= edge13) return side === 'liquid' ? first()(T, p) : second()(T, p);
+    if (T <= edge13) return side === 'liquid' ? liquidAt(T, p) : second()(T, p);
     return T < 863.15 && p > boundary(T) ? byDensity(T, p, side) : second()(T, p);
   };
   return {

@@ -6,6 +6,8 @@ export interface WaterViscosityConstants {
   readonly H0: readonly number[];
   /** Rows [i, j, n]. */
   readonly H1: readonly (readonly number[])[];
+  /** Five rows of six: reduced compressibility at 1.5 T_c per range of density (IAPWS R15-11, eq. 25), for the critical factor. */
+  readonly A: readonly (readonly number[])[];
 }
 
 export interface WaterConductivityConstants {
