@@ -5,6 +5,8 @@ export { blank } from './leaf.ts';
 export { wallNames } from './names.ts';
 export type { Position } from './place.ts';
 export { readCase, type ReadOptions } from './read.ts';
+export { jsonSchema } from './schema.ts';
+export { caseTemplate } from './template.ts';
 export { largestCase } from './text.ts';
 export * from './vocabulary.ts';
 export { wallEntries } from './walls.ts';

@@ -34,8 +34,7 @@ export function readLeaf(text: string, field: LeafField, beside: Beside): Value 
       return { kind: 'flag', value: text === 'true', assumed: [] };
     case 'text':
       return { kind: 'text', value: textOf(text, field.example), assumed: [] };
-    case 'word':
-    case 'words':
+    default:
       if (!Object.hasOwn(field.words, text)) throw wrongWord(text, Object.keys(field.words));
       return { kind: field.kind, value: field.kind === 'word' ? text : [text], assumed: [] };
   }

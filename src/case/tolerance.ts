@@ -21,10 +21,10 @@ function isTemperature(quantity: string, temperatures: readonly string[]): boole
  * @throws              {Problem} percent-of-temperature, not-positive and those of readQuantity
  */
 export function readTolerance(text: string, quantity: string, temperatures: readonly string[]): Value {
+  if (/\.\.|±|\+\/?-/.test(text)) throw new Problem({ code: 'wrong-tolerance', message: `"${text.slice(0, 80)}" is a range or has a spread`, expected });
   const plain = /%\s*$|% +of\b/.test(text) ? undefined : unitBehind(text);
   const temperature = isTemperature(quantity, temperatures) || (plain !== undefined && sameDimension(plain, kelvin));
   const read = readQuantity(text, temperature ? { unit: 'K', kind: 'temperatureDifference', orShare: true } : plain === undefined ? { unit: 'm', orShare: true, name: 'tolerance' } : { dimension: plain, name: 'tolerance' });
-  if (read.range !== undefined || read.spread !== undefined) throw new Problem({ code: 'wrong-tolerance', message: `"${text}" is a range or has a spread`, expected });
   if (!(read.value > 0)) throw new Problem({ code: 'not-positive', message: `"${text}" is not above zero`, expected });
   if (read.share !== undefined) return { kind: 'quantity', value: read.value, unit: '1', writtenUnit: read.unit, share: read.share, assumed: read.assumed };
   return { kind: 'quantity', value: read.value, unit: temperature ? 'K' : dimensionText(plain ?? kelvin), writtenUnit: read.unit, assumed: read.assumed };

@@ -52,15 +52,15 @@ export function parseTree(text: string, complaints: Complaints): MapTree | undef
     syntaxComplaints(broken, text, complaints);
     return undefined;
   }
-  const root = document.contents as ParsedNode | null;
+  const root = document.contents;
   if (root === null || !isMap(root)) {
     complaints.add(root === null ? { from: 0, to: 1 } : { from: root.range[0], to: root.range[1] }, { code: 'wrong-shape', message: 'the case file holds no keys', expected: 'keys such as flow, sizes, fluid, each with a value behind a colon' });
     return undefined;
   }
-  return treeOf(root, text, complaints, 0) as MapTree | undefined;
+  return treeOf(root, complaints, 0) as MapTree | undefined;
 }
 
-function treeOf(node: ParsedNode, text: string, complaints: Complaints, depth: number): Tree | undefined {
+function treeOf(node: ParsedNode, complaints: Complaints, depth: number): Tree | undefined {
   const span = { from: node.range[0], to: node.range[1] };
   if (isAlias(node)) return complaints.add(span, { code: 'no-alias', message: `"*${node.source}" points to another place of the file, which a case does not take`, expected: 'the value itself' });
   if (node.anchor !== undefined) return complaints.add(span, { code: 'no-anchor', message: `"&${node.anchor}" names a value for use elsewhere, which a case does not take`, expected: 'the value without it' });
@@ -73,14 +73,14 @@ function treeOf(node: ParsedNode, text: string, complaints: Complaints, depth: n
     return { kind: 'scalar', ...span, text: source, lead: quoted ? 1 : 0, empty: plain && (source === '' || source === '~' || source === 'null') };
   }
   if (isSeq(node)) {
-    const items = node.items.map((item) => treeOf(item as ParsedNode, text, complaints, depth + 1)).filter((item) => item !== undefined);
+    const items = node.items.map((item) => treeOf(item, complaints, depth + 1)).filter((item) => item !== undefined);
     return { kind: 'list', ...span, items };
   }
   if (!isMap(node)) return undefined;
   const pairs = new Map<string, Pair>();
   for (const { key: keyNode, value: valueNode } of node.items as readonly { key: ParsedNode | null; value: ParsedNode | null }[]) {
     if (keyNode === null) continue;
-    const key = treeOf(keyNode, text, complaints, depth + 1);
+    const key = treeOf(keyNode, complaints, depth + 1);
     if (key === undefined) continue;
     if (key.kind !== 'scalar' || key.text === '') {
       complaints.add(key, { code: 'wrong-key', message: 'a key is a single word', expected: 'key: value' });
@@ -96,7 +96,7 @@ function treeOf(node: ParsedNode, text: string, complaints: Complaints, depth: n
       complaints.add(key, { code: 'duplicate-key', message: `"${key.text}" is given twice, first in line ${line}`, expected: 'each key once' });
       continue;
     }
-    const value = valueNode === null ? ({ kind: 'scalar', from: key.to, to: key.to, text: '', lead: 0, empty: true } as const) : treeOf(valueNode, text, complaints, depth + 1);
+    const value = valueNode === null ? ({ kind: 'scalar', from: key.to, to: key.to, text: '', lead: 0, empty: true } as const) : treeOf(valueNode, complaints, depth + 1);
     if (value !== undefined) pairs.set(key.text, { key: key.text, keyAt: key, value });
   }
   return { kind: 'map', ...span, pairs: [...pairs.values()] };

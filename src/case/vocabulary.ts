@@ -113,6 +113,8 @@ export interface FlowWords {
   readonly sizes: Fields;
   /** Names of its walls; empty where it has one that is called `wall`. */
   readonly walls: readonly string[];
+  /** Paths that usually drive it, for a case that is still empty. */
+  readonly needs: readonly string[];
 }
 
 /** All keys of a case file: one description for the reader, the JSON Schema and the template. */

@@ -10,4 +10,6 @@ export interface Entry {
 export const COMMANDS: Readonly<Record<string, Entry>> = {
   grids: { summary: 'grid or step convergence of a table of results: order, value at size zero, band', load: () => import('./grids.ts') },
   convert: { summary: 'a quantity in another unit', load: () => import('./convert.ts') },
+  template: { summary: 'a commented case file to fill in', load: () => import('./template.ts') },
+  schema: { summary: 'JSON Schema of the case file, for editors', load: () => import('./schema.ts') },
 };

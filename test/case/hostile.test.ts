@@ -68,16 +68,18 @@ describe('any bytes give a clear problem', () => {
     const good = new TextEncoder().encode('flow: pipe\nsizes: { diameter: 25 mm, length: 8 m }\nfluid: { material: water, pressure: 2 bar abs }\ninlet: { speed: 0.4 m/s }\nwalls: [{ name: wall, temperature: 20 degC }]\n');
     let seed = 7;
     const random = (below: number): number => (seed = (seed * 48271) % 2147483647) % below;
-    const odd = [...'{}[]:,-&*!|>%@`"\'#?\t\n 0e.'].map((c) => c.charCodeAt(0)).concat(0, 0xff, 0xc3, 0x1b);
+    const odd = [...new TextEncoder().encode('{}[]:,-&*!|>%@`"\'#?\t\n 0e.'), 0, 0xff, 0xc3, 0x1b];
+    const other: unknown[] = [];
     for (let i = 0; i < 600; i++) {
       const broken = good.slice();
       for (let n = 0; n <= i % 4; n++) broken[random(broken.length)] = odd[random(odd.length)] as number;
       try {
         readCase(broken, 'case.yaml', vocabulary);
       } catch (error) {
-        expect(error).toBeInstanceOf(Problem);
+        if (!(error instanceof Problem)) other.push(error);
       }
     }
+    expect(other).toEqual([]);
   });
 
   it('nothing reaches the prototype of objects', () => {

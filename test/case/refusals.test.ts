@@ -116,7 +116,7 @@ describe('refusals', () => {
   });
 
   it('takes one or more of two ways to drive a flow: the plan holds them against each other', () => {
-    const read = readCase(`${good.replace('speed: 0.4 m/s', 'speed: 0.4 m/s, massFlow: 0.2 kg/s')}`, 'case.yaml', vocabulary);
+    const read = readCase(good.replace('speed: 0.4 m/s', 'speed: 0.4 m/s, massFlow: 0.2 kg/s'), 'case.yaml', vocabulary);
     expect([read.number('inlet.speed'), read.number('inlet.massFlow')]).toEqual([0.4, 0.2]);
   });
 });
