@@ -6,7 +6,7 @@ import { timeDefinitions } from '../../src/time/index.ts';
 import { numericsDefinitions } from '../../src/numerics/index.ts';
 import { costDefinitions } from '../../src/cost/index.ts';
 import type { Flow } from '../../src/flows/index.ts';
-import { joinDefinitions, quantity, way, Workings, type Definition, type Given, type Places } from '../../src/workings/index.ts';
+import { joinDefinitions, quantity, way, Workings, type Definition, type Given, type Laws, type Places } from '../../src/workings/index.ts';
 
 /** Units of the paths of a case file for a flow. */
 export function pathUnits(flow: Flow): ReadonlyMap<string, string> {
@@ -41,7 +41,7 @@ export function placesOf(flow: Flow): Places {
 }
 
 /** A graph of the flow with its words and the given numbers and words; properties given hold at every state. */
-export function workingsOf(flow: Flow, given: Readonly<Record<string, number | string>>, more: readonly Definition[] = []): Workings {
+export function workingsOf(flow: Flow, given: Readonly<Record<string, number | string>>, laws: Laws = {}): Workings {
   const states = ['', 'Wall', 'Bulk', 'Film', 'Hot', 'Cold'];
   const properties = ['density', 'viscosity', 'thermalConductivity', 'specificHeatCapacity', 'thermalExpansion'];
   const numbers: Record<string, Given> = {};
@@ -49,5 +49,5 @@ export function workingsOf(flow: Flow, given: Readonly<Record<string, number | s
     if (properties.includes(id)) for (const s of states) numbers[`${id}${s}`] = { value };
     else numbers[id] = { value };
   }
-  return new Workings(joinDefinitions([...definitionsOf(flow), ...more], placesOf(flow)), numbers);
+  return new Workings(joinDefinitions(definitionsOf(flow), placesOf(flow)), numbers, laws);
 }
