@@ -1,2 +1,2 @@
+export { compareText } from './compare.ts';
 export { gridsDocument, gridsText } from './grids.ts';
-export { wrapped } from './wrap.ts';

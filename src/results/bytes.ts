@@ -2,7 +2,7 @@ import { readFileSync, statSync } from 'node:fs';
 import { Problem } from '../problems/index.ts';
 
 /** Largest file of results that is read: 20 MB are about two million numbers. */
-export const largestFile = 20e6;
+const largestFile = 20e6;
 
 /**
  * Text of the bytes of a file of results.
@@ -43,7 +43,7 @@ export function readResultText(path: string): string {
   } catch (error) {
     if (error instanceof Problem) throw error;
     const code = (error as NodeJS.ErrnoException).code;
-    const why = code === 'ENOENT' ? 'does not exist' : code === 'EACCES' ? 'may not be read' : 'cannot be read';
+    const why = code === 'ENOENT' || code === 'ENOTDIR' ? 'does not exist' : code === 'EACCES' ? 'may not be read' : 'cannot be read';
     throw new Problem({ code: 'missing-file', message: `${path} ${why}`, expected: 'the path of a file of comma-separated values' });
   }
 }

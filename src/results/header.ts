@@ -62,17 +62,6 @@ export function doubled(heads: readonly Head[], file: string): ProblemData[] {
   });
 }
 
-/**
- * The column of a name, in any case.
- *
- * @param heads  the heads of a table
- * @param names  the names it may have
- * @returns      its index, or -1
- */
-export function indexOfName(heads: readonly Head[], names: readonly string[]): number {
-  return heads.findIndex((head) => names.some((name) => name.toLowerCase() === head.name.toLowerCase()));
-}
-
 /** `nearest` of a problem, absent where no name is near. */
 export function near(name: string, valid: readonly string[]): { nearest?: string } {
   const nearest = nearestName(name, valid);

@@ -118,7 +118,7 @@ function judgeThree(triplet: Triplet, { formalOrder, iterationError }: Family): 
  * @example        asymptoticRatio({ fine: 0.9705, medium: 0.96854, coarse: 0.96178, ratioFine: 2, ratioCoarse: 2 }, 1.7862) // 1.002
  * @source         Roache, Verification and Validation in Computational Science and Engineering (1998), chapter 5
  */
-export function asymptoticRatio(triplet: Triplet, order: number): number {
+function asymptoticRatio(triplet: Triplet, order: number): number {
   const { fine, medium, coarse, ratioFine, ratioCoarse } = triplet;
   const fineIndex = indexHalfWidth({ fine, medium, ratio: ratioFine, order, safetyFactor: 1.25 }) / Math.abs(fine);
   const coarseIndex = indexHalfWidth({ fine: medium, medium: coarse, ratio: ratioCoarse, order, safetyFactor: 1.25 }) / Math.abs(medium);

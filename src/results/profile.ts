@@ -1,5 +1,5 @@
-import { pchip } from '../references/kernels/index.ts';
 import { Problem } from '../problems/index.ts';
+import { pchip } from '../references/index.ts';
 import type { Table } from './table.ts';
 
 export type Interpolation = 'pchip' | 'linear';

@@ -1,6 +1,6 @@
 import { Problem, type ProblemData } from '../problems/index.ts';
 import { csvRows, delimiterOf, type Cell, type Delimiter } from './csv.ts';
-import { doubled, headOf, inSi, type Head } from './header.ts';
+import { doubled, headOf, type Head } from './header.ts';
 import { readNumber } from './number.ts';
 
 /** A column of numbers in SI units. */
@@ -27,7 +27,7 @@ const mostProblems = 10;
  * @param text  the file, decoded
  * @param file  its name, for problems
  * @returns     columns in SI units with the places of their numbers
- * @throws      {Problem} every fault of the file in one go (the first ten): not-a-number, not-finite, decimal-comma, missing-cell,
+ * @throws      {Problem} every fault of the file in one go (the first ten): not-a-number, not-finite, out-of-range, decimal-comma, missing-cell,
  *              extra-cell, duplicate-column, no-rows, too-many-columns, and those of reader and header
  */
 export function readTable(text: string, file: string): Table {
@@ -38,57 +38,72 @@ export function readTable(text: string, file: string): Table {
   const cells = withoutLastEmpty(first.value);
   if (cells.length > mostColumns) throw new Problem({ code: 'too-many-columns', message: `the file has ${cells.length} columns`, file, line: cells[0]?.line ?? 1, expected: `at most ${mostColumns}` });
 
-  const problems: ProblemData[] = [];
-  const gathered = gather(problems);
-  const heads = cells.flatMap((cell) => gathered(() => headOf(cell, file)) ?? []);
-  problems.push(...doubled(heads, file));
-  if (problems.length > 0) throw new Problem(problems);
+  const faults = new Faults(file);
+  const heads = cells.flatMap((cell) => faults.of(() => headOf(cell, file)) ?? []);
+  doubled(heads, file).forEach((one) => faults.add(one));
+  faults.settle();
 
-  const values: number[][] = heads.map(() => []);
-  const starts: number[][] = heads.map(() => []);
-  const lines: number[][] = heads.map(() => []);
-  const lastDigits = heads.map(() => Infinity);
-  let found = 0;
+  const read = heads.map((): Readings => ({ values: [], lines: [], starts: [], lastDigit: Infinity }));
   let count = 0;
   for (const row of rows) {
     count += 1;
     const wrong = wrongLength(row, heads.length, delimiter, file);
-    if (wrong !== undefined) {
-      found += 1;
-      if (problems.length < mostProblems) problems.push(wrong);
-      continue;
-    }
-    heads.forEach((head, k) => {
-      const cell = row[k] as Cell;
-      const read = readNumber(cell, head.name, file);
-      if ('code' in read) {
-        found += 1;
-        if (problems.length < mostProblems) problems.push(read);
-        return;
-      }
-      (values[k] as number[]).push(inSi(head, read.value));
-      (starts[k] as number[]).push(cell.column);
-      (lines[k] as number[]).push(cell.line);
-      if (read.lastDigit < (lastDigits[k] as number)) lastDigits[k] = read.lastDigit;
-    });
+    if (wrong !== undefined) faults.add(wrong);
+    else heads.forEach((head, k) => take(row[k] as Cell, head, read[k] as Readings, faults));
   }
-  if (found > problems.length) problems.push({ code: 'more-problems', message: `${found - problems.length} more cells or rows like these`, file });
-  if (count === 0) problems.push({ code: 'no-rows', message: 'the file has a header and no rows', file, expected: 'one row of numbers or more' });
-  if (problems.length > 0) throw new Problem(problems);
-  const columns = heads.map((head, k) => ({ ...head, values: values[k] as number[], lastDigit: (lastDigits[k] as number) * head.unit.factor }));
-  return { file, columns, rowCount: count, place: (row, k) => ({ file, line: lines[k]?.[row] ?? 1, column: starts[k]?.[row] ?? 1 }) };
+  if (count === 0) faults.add({ code: 'no-rows', message: 'the file has a header and no rows', file, expected: 'one row of numbers or more' });
+  faults.settle();
+  const columns = heads.map((head, k) => ({ ...head, values: (read[k] as Readings).values, lastDigit: (read[k] as Readings).lastDigit }));
+  return { file, columns, rowCount: count, place: (row, k) => ({ file, line: read[k]?.lines[row] ?? 1, column: read[k]?.starts[row] ?? 1 }) };
 }
 
-function gather(problems: ProblemData[]): <T>(work: () => T) => T | undefined {
-  return (work) => {
+/** What has been read of one column [SI], with the places of the numbers. */
+interface Readings {
+  readonly values: number[];
+  readonly lines: number[];
+  readonly starts: number[];
+  lastDigit: number;
+}
+
+function take(cell: Cell, head: Head, readings: Readings, faults: Faults): void {
+  const found = readNumber(cell, head, faults.file);
+  if ('code' in found) return faults.add(found);
+  readings.values.push(found.value);
+  readings.lines.push(cell.line);
+  readings.starts.push(cell.column);
+  if (found.lastDigit < readings.lastDigit) readings.lastDigit = found.lastDigit;
+}
+
+/** Problems of one file: the first are kept, the others counted. */
+class Faults {
+  readonly file: string;
+  readonly #kept: ProblemData[] = [];
+  #more = 0;
+
+  constructor(file: string) {
+    this.file = file;
+  }
+
+  add(problem: ProblemData): void {
+    if (this.#kept.length < mostProblems) this.#kept.push(problem);
+    else this.#more += 1;
+  }
+
+  of<T>(work: () => T): T | undefined {
     try {
       return work();
     } catch (error) {
       if (!(error instanceof Problem)) throw error;
-      problems.push(...error.list.slice(0, Math.max(0, mostProblems - problems.length)));
+      error.list.forEach((one) => this.add(one));
       return undefined;
     }
-  };
+  }
+
+  settle(): void {
+    if (this.#kept.length === 0) return;
+    const more: ProblemData[] = this.#more === 0 ? [] : [{ code: 'more-problems', message: `${this.#more} more cells or rows like these`, file: this.file }];
+    throw new Problem([...this.#kept, ...more]);
+  }
 }
 
 /** A separator at the end of a line adds no column. */

@@ -53,6 +53,8 @@ describe('tables that are refused, with the place', () => {
     ['NaN', 'x,u\n1,nan\n', { code: 'not-finite', line: 2, column: 3 }],
     ['infinity', 'x,u\n1,2\n-Inf,2\n', { code: 'not-finite', line: 3, column: 1 }],
     ['overflow', 'x\n1e999\n', { code: 'not-finite', line: 2, column: 1 }],
+    ['beyond any size', 'x\n-1e61\n', { code: 'out-of-range', line: 2, column: 1 }],
+    ['too small to be told from zero', 'x\n1e-320\n', { code: 'out-of-range', line: 2, column: 1 }],
     ['an empty cell', 'x,u\n1,\n2,\n', { code: 'missing-cell', line: 2 }],
     ['a short row', 'x,u\n1\n', { code: 'missing-cell', line: 2, column: 1 }],
     ['a long row', 'x,u\n1,2.5,3\n', { code: 'extra-cell', line: 2 }],
