@@ -1,6 +1,6 @@
 import { wallEntries, type Case } from '../case/index.ts';
 import { costDefinitions } from '../cost/index.ts';
-import { flows, type Flow } from '../flows/index.ts';
+import { flows, rungDefinitions, type Flow } from '../flows/index.ts';
 import { meshDefinitions } from '../mesh/index.ts';
 import { numericsDefinitions } from '../numerics/index.ts';
 import { Problem } from '../problems/index.ts';
@@ -49,6 +49,13 @@ export interface Assembled {
   askable(id: string): boolean;
 }
 
+/** Everything that is defined whatever the case, and what each flow adds: for the build of rules and for tests. */
+export function allDefinitions(): Definition[] {
+  return [...general(), ...Object.values(flows).flatMap((f) => f.definitions)];
+}
+
+const general = (): Definition[] => [...generalDefinitions, ...meshDefinitions, ...timeDefinitions, ...numericsDefinitions, ...costDefinitions];
+
 /**
  * Joins a case with its flow, fluid, walls and all definitions into one graph.
  *
@@ -60,7 +67,7 @@ export interface Assembled {
 export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
   const flow = flowOf(on);
   const walls = wallEntries(on, flow.walls, vocabulary);
-  const base: Definition[] = [...generalDefinitions, ...meshDefinitions, ...timeDefinitions, ...numericsDefinitions, ...costDefinitions, ...(options.words ?? []), ...flow.definitions];
+  const base: Definition[] = [...general(), ...(options.words ?? []), ...flow.definitions, ...rungDefinitions(flow)];
   const units = new Map(base.flatMap((d) => ('more' in d ? [] : [[d.id, d.unit] as const])));
   const exists = (id: string): boolean => units.has(id);
   const fluid = fluidOf(on, options.materials);

@@ -1,4 +1,4 @@
-export { assemble, type Assembled, type AssembleOptions, type Assumption } from './assemble.ts';
+export { allDefinitions, assemble, type Assembled, type AssembleOptions, type Assumption } from './assemble.ts';
 export type { Range } from './given.ts';
 export { wallPlaces, type Leaf } from './leaves.ts';
 export type { BoundTarget } from './targets.ts';

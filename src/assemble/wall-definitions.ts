@@ -3,7 +3,7 @@ import type { Case, Entry } from '../case/index.ts';
 import type { Flow } from '../flows/index.ts';
 import { Problem } from '../problems/index.ts';
 import { layerDefinitions, type Layer } from '../quantities/index.ts';
-import { quantity, ways, type Definition, type Law } from '../workings/index.ts';
+import { ways, type Definition, type Law } from '../workings/index.ts';
 import type { WallKeys } from './facts.ts';
 import { placed } from './fluid.ts';
 import { wallPlaces } from './leaves.ts';
@@ -43,7 +43,6 @@ export function wallDefinitions(on: Case, flow: Flow, walls: WallKeys, materials
       definitions.push(ways(`${id}@${place}`, [{ needs: [entry.path], value: (of) => of[entry.path] as number, formula: `as given: ${entry.path}`, source: 'the case' }]));
     }
     if (layers.length > 0) {
-      for (const l of layers) if (l.law !== undefined) definitions.push(quantity(l.conductivity, { symbol: 'k_s', name: `thermal conductivity of ${l.law.formula.replace(/^of /, '')}`, unit: 'W/(m K)' }));
       definitions.push(...layerDefinitions(place, layers));
     }
   });

@@ -99,9 +99,6 @@ function heat(): Definition[] {
     quantity('gasHeating', { symbol: 'q+', name: 'wall heat flux over the enthalpy carried', unit: '1' }, [
       way({ needs: ['wallHeatFlux', 'density', 'speed', 'specificHeatCapacityBulk', 'bulkTemperature'], value: (of) => Math.abs(of.wallHeatFlux) / (of.density * of.speed * of.specificHeatCapacityBulk * of.bulkTemperature), formula: 'q+ = |q|/(rho U cp_b T_b)', source: 'McEligot, Coon and Perkins, Int. J. Heat Mass Transfer 13 (1970) 431' }),
     ]),
-    quantity('biotWall', { symbol: 'Bi_w', name: 'resistance of the wall over that of the fluid', unit: '1' }, [
-      way({ needs: ['wallResistance', 'heatTransferCoefficientPlain'], value: ({ wallResistance, heatTransferCoefficientPlain }) => wallResistance * heatTransferCoefficientPlain, formula: 'Bi_w = R_w h_0', source: definition }),
-    ]),
     quantity('jakob', { symbol: 'Ja', name: 'Jakob number of the hottest wall', unit: '1', signed: true }, [
       way({ needs: ['specificHeatCapacity', 'highestTemperature', 'saturationTemperature', 'latentHeat'], value: (of) => (of.specificHeatCapacity * (of.highestTemperature - of.saturationTemperature)) / of.latentHeat, formula: 'Ja = cp (T_max - T_sat)/h_fg', source: iso }),
     ]),

@@ -1,7 +1,13 @@
 import type { Definition } from '../workings/index.ts';
 import { branches } from './branches.ts';
 import { groups } from './groups.ts';
+import { conduction } from './conduction.ts';
+import { entrance } from './entrance.ts';
+import { species } from './species.ts';
+import { roughness } from './roughness.ts';
+import { compressibility } from './compressibility.ts';
 import { layers } from './layers.ts';
+import { phase } from './phase.ts';
 import { properties } from './property-states.ts';
 import { results } from './results.ts';
 import { scales } from './scales.ts';
@@ -27,4 +33,10 @@ export const generalDefinitions: Definition[] = [
   ...groups,
   ...branches,
   ...turbulence,
+  ...compressibility,
+  ...phase,
+  ...conduction,
+  ...entrance,
+  ...roughness,
+  ...species,
 ];

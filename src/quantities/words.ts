@@ -3,14 +3,19 @@ import { quantity, wordWay, type Definition, type QuantityAbout } from '../worki
 /** What a case can name at all; absent unless its key stands in the case. */
 export const features = ['species', 'reactions', 'particles', 'otherFluid', 'rheology', 'magneticField', 'frame', 'motion', 'porous', 'period', 'ramp', 'swirl', 'humidity', 'burning', 'roughness', 'layers', 'gravity', 'sources', 'wallMotion'] as const;
 
+const degree = Math.PI / 180;
 const yesNo = ['yes', 'no'] as const;
 const word = (id: string, name: string, words: readonly string[], about: Partial<QuantityAbout> = {}, ways: Parameters<typeof quantity>[2] = []): Definition => quantity(id, { symbol: '', name, unit: 'word', words, ...about }, ways);
 
 /** The closed lists of words that select ways and that rules may ask for. */
 export const words: Definition[] = [
   word('flowClass', 'class of flow', ['internal', 'body', 'jet', 'continuum', 'enclosure', 'solid']),
-  word('axis', 'axis of the flow against gravity', ['level', 'inclined', 'upright']),
-  word('ascent', 'sense of the main direction against gravity', ['up', 'down', 'none']),
+  word('axis', 'axis of the flow against gravity', ['level', 'inclined', 'upright'], {}, [
+    wordWay({ needs: ['inclination'], word: ({ inclination }) => (Math.abs(inclination) < 5 * degree ? 'level' : Math.abs(inclination) > 85 * degree ? 'upright' : 'inclined'), formula: 'level within 5 degrees, upright from 85 degrees', source: 'common practice' }),
+  ]),
+  word('ascent', 'sense of the main direction against gravity', ['up', 'down', 'none'], {}, [
+    wordWay({ needs: ['inclination'], word: ({ inclination }) => (Math.abs(inclination) < 5 * degree ? 'none' : inclination > 0 ? 'up' : 'down'), formula: 'sign of the inclination', source: 'definition' }),
+  ]),
   word('medium', 'state of matter of the fluid', ['gas', 'liquid', 'solid']),
   word('transparency', 'whether heat radiation passes the fluid', ['transparent', 'opaque']),
   word('imposedFlow', 'a flow is imposed', yesNo),

@@ -6,7 +6,7 @@
  * @param graetz   over the heated length
  * @param prandtl  at the bulk temperature; very large for a developed velocity profile
  * @returns        mean Nusselt number
- * @example        laminarMeanNusselt({ graetz: 100, prandtl: 1e12 }) // 7.155
+ * @example        laminarMeanNusselt({ graetz: 100, prandtl: 1e12 }) // 7.1798
  * @range          graetz up to 1e4; within 1.3 % of the exact value for a developed profile
  * @scatter        5 %
  * @source         Baehr and Stephan, Heat and Mass Transfer (2006), eq. 3.252

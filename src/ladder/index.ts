@@ -1,0 +1,1 @@
+export { ladderDetails, ladderOf, type CaseRung, type RungDetail } from './ladder.ts';

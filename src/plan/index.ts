@@ -1,0 +1,3 @@
+export { plan, settleCase, type PlanOptions, type Settled } from './plan.ts';
+export { compileFiles, shippedRules } from './rules.ts';
+export * from './types.ts';

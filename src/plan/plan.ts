@@ -1,0 +1,155 @@
+import { createHash } from 'node:crypto';
+import { basename } from 'node:path';
+import { assemble, type Assembled } from '../assemble/index.ts';
+import type { Case } from '../case/index.ts';
+import { decide, definitionsOfVerdicts, settle, type CompiledRules, type Decisions, type FlipInput, type Target } from '../decide/index.ts';
+import { ladderOf } from '../ladder/index.ts';
+import type { Collection } from '../properties/index.ts';
+import { flagsIn, spreads, type Settle, type Spread, type Workings } from '../workings/index.ts';
+import { contradictionsOf } from './contradictions.ts';
+import type { Ground, StageResult } from './ground.ts';
+import { closure, planQuantity, rangesOf } from './numbers.ts';
+import { shippedRules } from './rules.ts';
+import { stages } from './stages/index.ts';
+import { sectionNames, type Check, type Plan, type PlanChoice, type PlanEffect, type PlanQuantity, type PlanTarget, type Section, type SectionName } from './types.ts';
+
+export interface PlanOptions {
+  readonly version: string;
+  readonly rules?: CompiledRules;
+  readonly materials?: Collection;
+  /** Seek the values at which each input flips a verdict: costs a scan per input. */
+  readonly flips?: boolean;
+}
+
+/** The graph of a case with its decisions settled: what `plan`, `trace`, `vary` and the interview stand on. */
+export interface Settled {
+  readonly assembled: Assembled;
+  readonly rules: CompiledRules;
+  readonly targets: readonly Target[];
+  /** Settles verdicts and choices again after an input moved. */
+  readonly settle: Settle;
+}
+
+/**
+ * Assembles a case and settles its decisions by the synchronous reading of the rules.
+ *
+ * @param on       the case
+ * @param options  rules and materials
+ * @returns        the graph at its nominal point
+ * @throws         {Problem} what `assemble` finds
+ */
+export function settleCase(on: Case, options: Omit<PlanOptions, 'version' | 'flips'> = {}): Settled {
+  const rules = options.rules ?? shippedRules();
+  const assembled = assemble(on, { words: definitionsOfVerdicts(rules), ...(options.materials === undefined ? {} : { materials: options.materials }) });
+  const targets: Target[] = assembled.targets.map((t) => ({ id: t.id, quantity: t.quantity, within: t.within, computed: t.computed }));
+  const again: Settle = (workings) => void settle(workings, rules, targets, { askable: assembled.askable, chosen: assembled.chosen });
+  again(assembled.workings);
+  return { assembled, rules, targets, settle: again };
+}
+
+/**
+ * Plans a case: every number, decision, section and check.
+ *
+ * @param on       the case
+ * @param options  program version, rules, materials, whether flip values are sought
+ * @returns        the Plan
+ * @throws         {Problem} what cannot be planned, at the place of the value
+ */
+export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
+  const { assembled, rules, targets, settle: again } = settleCase(on, options);
+  const { workings, ranges } = assembled;
+  const deciding = decidingIds(rules, workings);
+  const spread = spreads(workings, deciding);
+  const range = rangesOf(workings, ranges, deciding, again);
+  const decisions = await decide(workings, rules, targets, {
+    askable: assembled.askable,
+    chosen: assembled.chosen,
+    spreadOf: (id) => spread.get(id),
+    rangeOf: (id) => { const r = range.get(id); return r === undefined ? undefined : { low: r.from, high: r.to }; },
+    ...(options.flips === true ? { inputs: flipInputs(assembled) } : {}),
+  });
+  const ladder = ladderOf(assembled);
+  const ground = groundOf(assembled, decisions, ladder);
+  const built = Object.fromEntries(sectionNames.map((name) => [name, stages[name](ground)])) as Record<SectionName, StageResult>;
+  const contradictions = contradictionsOf(ground);
+  const named = namedIds(built, decisions, assembled, ladder);
+  const ids = closure(workings, named);
+  return {
+    program: `runbrief ${options.version}`,
+    format: 1,
+    case: { file: basename(on.file), title: on.title ?? '', sha256: createHash('sha256').update(on.text).digest('hex') },
+    targets: assembled.targets.map(planTarget),
+    quantities: quantitiesOf(workings, ids, spreads(workings, ids), rangesOf(workings, ranges, ids, again)),
+    effects: decisions.effects as readonly PlanEffect[],
+    choices: decisions.choices as readonly PlanChoice[],
+    ladder,
+    sections: Object.fromEntries(sectionNames.map((name) => [name, { lines: built[name].lines, tables: built[name].tables }])) as Record<SectionName, Section>,
+    checklist: sectionNames.flatMap((name) => built[name].checklist ?? []) as readonly Check[],
+    contradictions,
+  };
+}
+
+function planTarget({ id, quantity, place, mean, within, computed }: Assembled['targets'][number]): PlanTarget {
+  return { id, quantity, ...(place === undefined ? {} : { place }), ...(mean === undefined ? {} : { mean }), ...(within === undefined ? {} : { within: within.written }), computed };
+}
+
+/** Numbers the rules decide on, at their places. */
+function decidingIds(rules: CompiledRules, workings: Workings): string[] {
+  const plain = new Set(Object.values(rules.effects).flatMap((r) => r.branches.flatMap((b) => (b.band === undefined ? [] : [b.band.deciding]))));
+  return [...workings.index.keys()].filter((id) => plain.has(id.split('@')[0] as string));
+}
+
+/** Inputs with a number, from a thirtieth to thirty times it; temperatures within 100 K. */
+function flipInputs(assembled: Assembled): FlipInput[] {
+  return assembled.leaves.flatMap(({ path, unit }) => {
+    const given = assembled.case.get(path);
+    const value = given?.value;
+    if (typeof value !== 'number' || !Number.isFinite(value) || path.startsWith('computing.')) return [];
+    if (unit === 'K') return [{ path, lo: Math.max(1, value - 100), hi: value + 100 }];
+    return value > 0 ? [{ path, lo: value / 30, hi: value * 30 }] : [];
+  });
+}
+
+/** What every stage stands on. */
+export function groundOf(assembled: Assembled, decisions: Decisions, ladder: Plan['ladder']): Ground {
+  const { workings } = assembled;
+  const effect = (id: string): PlanEffect => decisions.effects.find((e) => e.id === id) as PlanEffect;
+  const choice = (id: string): PlanChoice => decisions.choices.find((c) => c.id === id) as PlanChoice;
+  return {
+    assembled, decisions, ladder, effect, choice,
+    has: (id) => workings.get(id) !== undefined,
+    number: (id) => workings.get(id),
+    word: (id) => workings.word(id),
+    kept: (id) => { const e = effect(id); return e.verdict === 'include' || (e.verdict === 'undecided' && e.judged) || (e.verdict === 'borderline' && e.firstRun !== 'leave-out'); },
+  };
+}
+
+/** Every id that stands in the plan. */
+function namedIds(built: Readonly<Record<SectionName, StageResult>>, decisions: Decisions, assembled: Assembled, ladder: Plan['ladder']): Set<string> {
+  const ids = new Set<string>();
+  for (const { lines, tables } of Object.values(built)) {
+    for (const l of lines) for (const id of l.quantities) ids.add(id);
+    for (const t of tables) for (const row of t.rows) for (const cell of row) if (typeof cell !== 'string') ids.add(cell.id);
+  }
+  for (const e of decisions.effects) {
+    if (e.deciding !== undefined) ids.add(e.deciding.quantity);
+    for (const p of e.prices ?? []) ids.add(p.of);
+  }
+  for (const t of assembled.targets) ids.add(t.quantity);
+  for (const r of ladder) ids.add(r.quantity);
+  for (const id of reliedOn) ids.add(id);
+  return ids;
+}
+
+/** Numbers that other programs rely on, wherever they can be had. */
+const reliedOn = 'density viscosity kinematicViscosity thermalConductivity specificHeatCapacity thermalExpansion thermalDiffusivity electricalConductivity speedOfSound speed length hydraulicDiameter temperatureDifference filmTemperature reynolds prandtl peclet grashof rayleigh richardson mach knudsen brinkman eckert biot fourier schmidt lewis pecletMass sherwood damkohler damkohlerDiffusive thiele weber froude capillary ohnesorge eotvos morton stokes womersley strouhal rossby ekman taylorCylinders dean graetz hartmann binghamNumber deborah radiationShare frictionFactorDarcy skinFrictionCoefficient wallShear frictionVelocity nusselt heatTransferCoefficient pressureDrop outletTemperature heatRate dragCoefficient sheddingFrequency boundaryLayerThickness thermalLayerThickness entranceLength entranceLengthThermal kolmogorovLength kolmogorovTime batchelorLength turbulenceIntensity turbulentKineticEnergy dissipationRate specificDissipationRate yPlusTarget firstCellHeight firstNodeDistance growthRatio layerCount layerStackHeight coreCellSize cellCount cellPeclet timeStep timeStepConvective timeStepDiffusive timeStepAcoustic timeStepCapillary timeStepReaction timeStepPeriod flowThroughTime runTime stepCount coreHours memory'.split(' ');
+
+function quantitiesOf(workings: Workings, ids: readonly string[], spread: ReadonlyMap<string, Spread>, range: ReadonlyMap<string, { from: number; to: number }>): Record<string, PlanQuantity> {
+  const flags = flagsIn(workings);
+  const out: Record<string, PlanQuantity> = {};
+  for (const id of ids) {
+    const q = planQuantity(workings, id, spread.get(id), range.get(id), flags(id));
+    if (q !== undefined) out[id] = q;
+  }
+  return out;
+}

@@ -1,0 +1,38 @@
+import { quantity, way, type Definition } from '../workings/index.ts';
+
+/** How near the fluid comes to another phase: cavitation, boiling, condensation, freezing. */
+export const phase: Definition[] = [
+  quantity('pressureCoefficientMin', { symbol: '|C_p,min|', name: 'magnitude of the lowest pressure coefficient on the speed scale', unit: '1' }, [
+    way({ needs: [], as: 'assumed', value: () => 1, formula: '|C_p,min| = 1', source: 'common practice for straight passages, steps, cavities and tanks, on the safe side' }),
+  ]),
+  quantity('cavitationNumber', { symbol: 'sigma_c', name: 'cavitation number', unit: '1' }, [
+    way({ needs: ['lowestPressure', 'vapourPressure', 'density', 'speed'], when: { medium: 'liquid' }, value: ({ lowestPressure, vapourPressure, density, speed }) => (lowestPressure - vapourPressure) / (0.5 * density * speed ** 2), formula: 'sigma_c = (p_min - p_v)/(rho U^2/2)', source: 'definition' }),
+  ]),
+  quantity('cavitationMargin', { symbol: 'sigma_c/|C_p,min|', name: 'cavitation number over the lowest pressure coefficient', unit: '1' }, [
+    way({ needs: ['cavitationNumber', 'pressureCoefficientMin'], value: ({ cavitationNumber, pressureCoefficientMin }) => cavitationNumber / pressureCoefficientMin, formula: 'sigma_c/|C_p,min|', source: 'definition' }),
+  ]),
+  quantity('cavitationDeficit', { symbol: 'dp_v', name: 'how far a single-phase field falls below the vapour pressure', unit: 'Pa' }, [
+    way({ needs: ['cavitationNumber', 'pressureCoefficientMin', 'density', 'speed'], value: ({ cavitationNumber, pressureCoefficientMin, density, speed }) => Math.max(0, pressureCoefficientMin - cavitationNumber) * 0.5 * density * speed ** 2, formula: 'dp_v = (|C_p,min| - sigma_c) rho U^2/2', source: 'definition' }),
+  ]),
+  quantity('boilingMargin', { symbol: 'T_w - T_sat', name: 'wall above saturation at the lowest pressure', unit: 'K', signed: true, per: ['wall'], plain: 'largest' }, [
+    way({ needs: ['wallTemperature', 'saturationTemperature'], when: { medium: 'liquid' }, value: ({ wallTemperature, saturationTemperature }) => wallTemperature - saturationTemperature, formula: 'T_w - T_sat(p_min)', source: 'definition' }),
+  ]),
+  quantity('boilingOnset', { symbol: 'dT_ONB', name: 'wall superheat at which boiling begins', unit: 'K', signed: true, per: ['wall'], plain: 'target' }, [
+    way({ needs: ['surfaceTension', 'saturationTemperature', 'wallHeatFlux', 'vapourDensity', 'latentHeat', 'thermalConductivityWall'], scatter: 0.5, value: ({ surfaceTension, saturationTemperature, wallHeatFlux, vapourDensity, latentHeat, thermalConductivityWall }) => Math.sqrt((8 * surfaceTension * saturationTemperature * Math.max(0, wallHeatFlux)) / (vapourDensity * latentHeat * thermalConductivityWall)), formula: 'dT_ONB = sqrt(8 sigma T_sat q/(rho_v h_fg k_l))', source: 'Davis and Anderson, AIChE J. 12 (1966) 774' }),
+    way({ needs: [], as: 'assumed', value: () => 5, formula: 'dT_ONB = 5 K', source: 'common practice where the heat flux is not known', dimensional: 'a temperature difference from practice' }),
+  ]),
+  quantity('dewTemperature', { symbol: 'T_dew', name: 'dew point of the fluid that arrives', unit: 'K', signed: true }, [
+    way({ needs: ['fluid.humidity', 'farTemperature'], when: { medium: 'gas' }, range: { farTemperature: [233.15, 373.15] }, value: (of) => {
+      const t = of.farTemperature - 273.15;
+      const x = Math.log(Math.max(of['fluid.humidity'], 1e-6)) + (17.625 * t) / (t + 243.04);
+      return 273.15 + (243.04 * x) / (17.625 - x);
+    }, formula: 'T_dew from phi exp(17.625 t/(t + 243.04 degC)) = exp(17.625 t_dew/(t_dew + 243.04 degC))', source: 'Alduchov and Eskridge, J. Appl. Meteor. 35 (1996) 601, within 0.1 K', dimensional: 'constants in degrees Celsius' }),
+    way({ needs: ['saturationTemperature'], when: { medium: 'gas', 'has.humidity': 'no' }, value: ({ saturationTemperature }) => saturationTemperature, formula: 'T_dew = T_sat(p)', source: 'a pure vapour condenses at its saturation temperature' }),
+  ]),
+  quantity('condensationMargin', { symbol: 'T_w - T_dew', name: 'coldest wall above the dew point', unit: 'K', signed: true }, [
+    way({ needs: ['lowestTemperature', 'dewTemperature'], when: { medium: 'gas' }, value: ({ lowestTemperature, dewTemperature }) => lowestTemperature - dewTemperature, formula: 'T_min - T_dew', source: 'definition' }),
+  ]),
+  quantity('freezingMargin', { symbol: 'T_min - T_m', name: 'lowest temperature above the melting point', unit: 'K', signed: true }, [
+    way({ needs: ['lowestTemperature', 'meltingTemperature'], value: ({ lowestTemperature, meltingTemperature }) => lowestTemperature - meltingTemperature, formula: 'T_min - T_m', source: 'definition' }),
+  ]),
+];
