@@ -1,7 +1,7 @@
 import type { Workings } from '../workings/index.ts';
 import { testOf } from './conditions.ts';
 import { choiceOutput, type ChoiceDecision } from './decide-choice.ts';
-import { weighed, type EffectState, type MovedBy } from './effects.ts';
+import { lackingOf, weighed, type EffectState, type MovedBy } from './effects.ts';
 import { placedId } from './facts.ts';
 import { engineVerdicts } from './engine.ts';
 import { fillIn } from './fill-in.ts';
@@ -123,7 +123,7 @@ function reasonOf(e: EffectState, state: State, fill: (text: string) => string):
   const branch = e.reading?.branch;
   const without = branch?.band !== undefined && e.facts !== undefined && e.verdict !== 'undecided' && bandNumbers(branch.band, e.facts) === undefined && e.bounded === undefined ? branch.band.without?.because : undefined;
   if (e.verdict === 'undecided' && e.judged) {
-    const names = e.lacking.map((id) => state.point.workings.slots[state.point.workings.index.get(placedId(state.point.workings, id, e.place)) ?? -1]?.node.about.name ?? id);
+    const names = lackingOf(e, state.point).map((id) => state.point.workings.slots[state.point.workings.index.get(placedId(state.point.workings, id, e.place)) ?? -1]?.node.about.name ?? id);
     return `not known: ${[...new Set(names)].join(', ')}`;
   }
   const parts = [without ?? fill((branch ?? e.reading?.fixed)?.because ?? '')];
@@ -141,5 +141,5 @@ function allPrices(e: EffectState, state: State): Weighed[] {
 }
 
 function missingPaths(e: EffectState, state: State): string[] {
-  return [...new Set(e.lacking.flatMap((id) => state.point.facts.at(e.place).missing(id) ?? []))];
+  return [...new Set(lackingOf(e, state.point).flatMap((id) => state.point.facts.at(e.place).missing(id) ?? []))];
 }

@@ -21,8 +21,6 @@ export interface EffectState {
   readonly reading?: Reading;
   readonly facts?: FactSource;
   readonly place?: string;
-  /** The facts for want of which it is undecided. */
-  readonly lacking: readonly string[];
   /** Why a missing input does not matter: both ends of its bounds give this verdict. */
   readonly bounded?: readonly string[];
   /** The two states between which it alternates. */
@@ -42,22 +40,24 @@ export interface Point {
   readonly rangeOf: Interval | undefined;
   readonly spreadOf: Interval | undefined;
   readonly prices: Map<string, readonly Weighed[]>;
+  readonly plain: FactSource;
+  readonly views: Map<EffectRule, readonly View[]>;
 }
+/** One reading of a rule: at a place, in a regime. */
+interface View { readonly place: string | undefined; readonly regime: string; readonly facts: FactSource }
 
 const laminar = new Map([['verdict.turbulence', 'leave-out'], ['regime', 'laminar']]);
 const turbulent = new Map([['verdict.turbulence', 'include'], ['regime', 'turbulent']]);
 
 /** The readings a rule asks for at a point: each place, and both regimes where the regime is open. */
-export function viewsOf(rule: EffectRule, point: Point): { place: string | undefined; regime: string; facts: FactSource }[] {
-  const open = readsRegime(rule) && ['borderline', 'undecided'].includes(point.words.get('verdict.turbulence') ?? '');
-  return point.places(rule).flatMap((place) => {
-    const facts = new Overlaid(point.facts.at(place), point.words);
-    if (!open) return [{ place, regime: '', facts }];
-    return [{ place, regime: 'laminar', facts: new Overlaid(facts, laminar) }, { place, regime: 'turbulent', facts: new Overlaid(facts, turbulent) }];
-  });
+export function viewsOf(rule: EffectRule, point: Point): readonly View[] {
+  const regime = point.words.get('verdict.turbulence');
+  const open = (regime === 'borderline' || regime === 'undecided') && readsRegime(rule);
+  let closed = point.views.get(rule);
+  if (closed === undefined) point.views.set(rule, (closed = point.places(rule).map((place) => ({ place, regime: '', facts: place === undefined ? point.plain : new Overlaid(point.facts.at(place), point.words) }))));
+  return open ? closed.flatMap(({ place, facts }) => [{ place, regime: 'laminar', facts: new Overlaid(facts, laminar) }, { place, regime: 'turbulent', facts: new Overlaid(facts, turbulent) }]) : closed;
 }
 
-type View = ReturnType<typeof viewsOf>[number];
 interface Worst { readonly reading: Reading; readonly view: View; readonly bounded?: readonly string[] }
 
 /**
@@ -68,22 +68,25 @@ interface Worst { readonly reading: Reading; readonly view: View; readonly bound
  * @returns      its state; an earlier verdict of its own never enters
  */
 export function judge(rule: EffectRule, point: Point): EffectState {
-  const plain = new Overlaid(point.facts, point.words);
+  const { plain } = point;
   const truth = testOf(rule.applies)(plain, false);
-  if (truth === 0 && rule.applies !== undefined) return { rule, applies: false, whyNot: whyFalse(rule.applies, plain), judged: true, verdict: 'leave-out', base: 'leave-out', lacking: [] };
+  if (truth === 0 && rule.applies !== undefined) return { rule, applies: false, whyNot: whyFalse(rule.applies, plain), judged: true, verdict: 'leave-out', base: 'leave-out' };
   const views = viewsOf(rule, point);
   const nominal = worst(views, (view) => ({ reading: readRule(rule, view.facts), view }));
-  const counted = nominal.reading.verdict !== 'undecided' || !nominal.reading.judged ? nominal : worst(views, (view) => bounded(rule, view, point));
+  const counted = nominal.reading.verdict !== 'undecided' || !nominal.reading.judged || rule.branches.every((b) => b.band === undefined || b.band.bounds.length === 0) ? nominal : worst(views, (view) => bounded(rule, view, point));
   const { reading, view } = counted;
   const head = {
     rule, applies: truth === 1 || ('unknown' as const), whyNot: [], judged: reading.judged, base: reading.verdict, reading, facts: view.facts,
     ...(view.place === undefined ? {} : { place: view.place }), ...(counted.bounded === undefined ? {} : { bounded: counted.bounded }),
   };
-  if (reading.verdict === 'undecided') {
-    const lacking = reading.judged ? [...new Set([...(truth === 2 ? leavesOf(rule.applies).map((l) => l.fact).filter((f) => plain.of(f) === undefined) : []), ...lackingFacts(rule, view.facts)])] : [];
-    return { ...head, verdict: 'undecided', lacking };
-  }
-  return { ...head, lacking: [], ...moved(rule, reading, views, view, point) };
+  return reading.verdict === 'undecided' ? { ...head, verdict: 'undecided' } : { ...head, ...moved(rule, reading, views, view, point) };
+}
+
+/** The facts for want of which an effect is undecided. */
+export function lackingOf(e: EffectState, point: Point): string[] {
+  if (e.verdict !== 'undecided' || !e.judged || e.rule === undefined || e.facts === undefined) return [];
+  const open = e.applies === 'unknown' ? leavesOf(e.rule.applies).map((l) => l.fact).filter((f) => point.plain.of(f) === undefined) : [];
+  return [...new Set([...open, ...lackingFacts(e.rule, e.facts)])];
 }
 
 function worst(views: readonly View[], read: (view: View) => Worst): Worst {

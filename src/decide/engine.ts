@@ -1,17 +1,28 @@
-import type { NestedCondition, RuleProperties } from 'json-rules-engine';
+import type { NestedCondition, RuleProperties, TopLevelCondition } from 'json-rules-engine';
 import { numberOf } from './conditions.ts';
 import { viewsOf } from './effects.ts';
 import type { FactSource } from './facts.ts';
 import { verdicts, type Band, type Branch, type Condition, type EffectRule, type Leaf, type Limit, type Operator, type Verdict } from './form.ts';
-import { combine, worse, type Outcome } from './judge.ts';
+import { combine, setOf, worse, type Outcome } from './judge.ts';
 import type { State } from './settle.ts';
 
 const opposite: Readonly<Record<Operator, Operator>> = {
   equal: 'notEqual', notEqual: 'equal', in: 'notIn', notIn: 'in', lessThan: 'greaterThanInclusive', greaterThanInclusive: 'lessThan', greaterThan: 'lessThanInclusive', lessThanInclusive: 'greaterThan',
 };
-const constant = (truth: boolean): NestedCondition => ({ fact: 'one', operator: 'equal', value: truth ? 1 : 0 });
-const all = (...parts: NestedCondition[]): NestedCondition => ({ all: parts });
-const any = (...parts: NestedCondition[]): NestedCondition => ({ any: parts });
+const yes: NestedCondition = { fact: 'one', operator: 'equal', value: 1 };
+const no: NestedCondition = { fact: 'one', operator: 'equal', value: 0 };
+const constant = (truth: boolean): NestedCondition => (truth ? yes : no);
+
+/** A group without what is settled already. */
+function group(kind: 'all' | 'any', parts: readonly NestedCondition[]): NestedCondition {
+  const [idle, settles] = kind === 'all' ? [yes, no] : [no, yes];
+  if (parts.includes(settles)) return settles;
+  const rest = parts.filter((part) => part !== idle);
+  if (rest.length < 2) return rest[0] ?? idle;
+  return kind === 'all' ? { all: rest } : { any: rest };
+}
+const all = (...parts: NestedCondition[]): NestedCondition => group('all', parts);
+const any = (...parts: NestedCondition[]): NestedCondition => group('any', parts);
 
 /** The facts of one run: flat, constant, finite. */
 type Flat = Map<string, number | string>;
@@ -35,7 +46,7 @@ class Derived {
     if (condition === undefined) return constant(!negated);
     if ('fact' in condition) return this.#leaf(condition, negated, gate, sure);
     const parts = ('all' in condition ? condition.all : condition.any).map((part) => this.may(part, negated, gate, sure));
-    return 'all' in condition !== negated ? { all: parts } : { any: parts };
+    return group('all' in condition !== negated ? 'all' : 'any', parts);
   }
 
   #leaf(leaf: Leaf, negated: boolean, gate: boolean, sure: boolean): NestedCondition {
@@ -111,31 +122,31 @@ export async function engineVerdicts(state: State): Promise<Map<string, Verdict 
   const flat: Flat = new Map([['one', 1]]);
   const rules: RuleProperties[] = [];
   const views = new Map<string, number>();
-  const say = (said: Said, condition: NestedCondition): number => rules.push({ name: `${said.effect} ${said.view} ${said.branch} ${said.says}`, conditions: { all: [condition] }, event: { type: 'said', params: { ...said } } });
+  const say = (said: Said, condition: NestedCondition): void => {
+    if (condition !== no) rules.push({ name: `${said.effect} ${said.view} ${said.branch} ${said.says}`, conditions: 'fact' in condition ? { all: [condition] } : (condition as TopLevelCondition), event: { type: 'said', params: { ...said } } });
+  };
   for (const [effect, { rule }] of state.effects) {
     if (rule === undefined) continue;
     const found = viewsOf(rule, state.point);
     views.set(effect, found.length);
     if (rule.applies !== undefined) {
-      const plain = new Derived(flat, plainFacts(state), '');
+      const plain = new Derived(flat, state.point.plain, '');
       say({ effect, view: -1, branch: -1, says: 'applies-not' }, plain.may(rule.applies, true, false, true));
       if (state.effects.get(effect)?.applies === false) continue; // what its branches would say is not asked
     }
     found.forEach((view, k) => {
       const derived = new Derived(flat, view.facts, view.place === undefined && view.regime === '' ? '' : ` at ${view.place ?? ''} ${view.regime}`);
       rule.branches.forEach((branch, b) => {
-        say({ effect, view: k, branch: b, says: 'fits' }, derived.may(branch.when));
-        if (branch.when !== undefined) say({ effect, view: k, branch: b, says: 'fits-not' }, derived.may(branch.when, true));
+        const fits = derived.may(branch.when);
+        if (fits === no) return;
+        say({ effect, view: k, branch: b, says: 'fits' }, fits);
+        say({ effect, view: k, branch: b, says: 'fits-not' }, derived.may(branch.when, true));
         for (const verdict of verdicts) say({ effect, view: k, branch: b, says: verdict }, derived.verdict(branch, verdict));
       });
     });
   }
   const { events } = await new Engine(rules).run(Object.fromEntries(flat));
   return tally(state, views, events.map((e) => e.params as Said));
-}
-
-function plainFacts(state: State): FactSource {
-  return { of: (id) => state.point.words.get(id) ?? state.point.facts.of(id), askable: (id) => state.point.facts.askable(id) };
 }
 
 function tally(state: State, views: ReadonlyMap<string, number>, events: readonly Said[]): Map<string, Verdict | 'not-applicable'> {
@@ -162,5 +173,5 @@ function tally(state: State, views: ReadonlyMap<string, number>, events: readonl
 
 function outcomeOf(says: ReadonlySet<Says>): Outcome {
   const fits = says.has('fits') ? (says.has('fits-not') ? 2 : 1) : 0;
-  return { fits, can: fits === 0 ? [] : verdicts.filter((v) => says.has(v)) };
+  return { fits, can: fits === 0 ? 0 : setOf(verdicts.filter((v) => says.has(v))) };
 }

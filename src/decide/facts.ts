@@ -1,4 +1,5 @@
 import { missing, type Workings } from '../workings/index.ts';
+import { askableNow, type Askable } from './askable.ts';
 
 /** What rules are read against: numbers, words, and whether a number that is not known could be given. */
 export interface FactSource {
@@ -27,13 +28,13 @@ export class Overlaid implements FactSource {
 /** The facts of one point of the workings, each looked up once; `at` reads those of one place. */
 export class WorkingsFacts implements FactSource {
   readonly #workings: Workings;
-  readonly #canAsk: (id: string) => boolean;
+  readonly #canAsk: Askable;
   readonly #place: string | undefined;
   readonly #seen = new Map<string, number | string | undefined>();
-  readonly #asked = new Map<string, readonly string[] | undefined>();
+  #askable: Askable | undefined;
   readonly #places = new Map<string, WorkingsFacts>();
 
-  constructor(workings: Workings, canAsk: (id: string) => boolean, place?: string) {
+  constructor(workings: Workings, canAsk: Askable, place?: string) {
     this.#workings = workings;
     this.#canAsk = canAsk;
     this.#place = place;
@@ -60,13 +61,13 @@ export class WorkingsFacts implements FactSource {
   }
 
   askable(id: string): boolean {
-    return this.missing(id) !== undefined;
+    this.#askable ??= askableNow(this.#workings, this.#canAsk);
+    return this.#askable(this.idOf(id));
   }
 
   /** The inputs that would make a fact known; undefined where none would. */
   missing(id: string): readonly string[] | undefined {
-    if (!this.#asked.has(id)) this.#asked.set(id, missing(this.#workings, this.idOf(id), this.#canAsk));
-    return this.#asked.get(id);
+    return missing(this.#workings, this.idOf(id), this.#canAsk);
   }
 
   /** Forgets what was looked up, after a number of the workings was moved. */

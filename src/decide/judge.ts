@@ -7,11 +7,13 @@ const bit: Readonly<Record<Verdict, number>> = { 'leave-out': 1, borderline: 2, 
 const ofBit: Readonly<Record<number, Verdict>> = { 1: 'leave-out', 2: 'borderline', 4: 'undecided', 8: 'include' };
 const weight = (verdict: Verdict): number => bit[verdict];
 
-/** What a branch says: whether it fits, and the verdicts it may give; more than one where a fact is not known. */
+/** What a branch says: whether it fits, and the set of verdicts it may give; more than one where a fact is not known. */
 export interface Outcome {
   readonly fits: Truth;
-  readonly can: readonly Verdict[];
+  readonly can: number;
 }
+/** A set of verdicts. */
+export const setOf = (of: readonly Verdict[]): number => of.reduce((set, v) => set | bit[v], 0);
 /** The interval a deciding quantity runs over, by its spread or by the operating range. */
 export type Interval = (id: string) => { readonly low: number; readonly high: number } | undefined;
 
@@ -71,7 +73,7 @@ function lacking(band: Band, facts: FactSource): string {
  */
 export function outcome(branch: Branch, facts: FactSource, interval?: Interval): Outcome {
   const fits = testOf(branch.when)(facts, true);
-  return { fits, can: fits === 0 ? [] : unpack(branchBits(branch, facts, interval)) };
+  return { fits, can: fits === 0 ? 0 : branchBits(branch, facts, interval) };
 }
 
 function branchBits(branch: Branch, facts: FactSource, interval: Interval | undefined): number {
@@ -92,8 +94,7 @@ function capped(bits: number, from: number, truth: Truth): number {
   return (truth === 1 ? bits & ~from : bits) | bit.borderline;
 }
 
-const unpack = (bits: number): Verdict[] => [1, 2, 4, 8].flatMap((b) => ((bits & b) === 0 ? [] : [ofBit[b] as Verdict]));
-const single = (can: readonly Verdict[]): Verdict => (can.length === 1 ? (can[0] as Verdict) : 'undecided');
+const single = (can: number): Verdict => ofBit[can] ?? 'undecided';
 
 /**
  * The verdict of a rule from what its branches say: the first that fits, or the worst of those that fit.
@@ -108,17 +109,17 @@ export function combine(rule: EffectRule, outcomes: readonly Outcome[]): { verdi
 
 function combineFirst(rule: EffectRule, outcomes: readonly Outcome[]): ReturnType<typeof combine> {
   const fitting: number[] = [];
-  const can = new Set<Verdict>();
+  let can = 0;
   let sure = false;
   for (let k = 0; k < outcomes.length && !sure; k++) {
     const o = outcomes[k] as Outcome;
     if (o.fits === 0) continue;
     fitting.push(k);
-    for (const v of o.can) can.add(v);
+    can |= o.can;
     sure = o.fits === 1;
   }
-  if (!sure && rule.otherwise !== undefined) can.add(rule.otherwise.verdict);
-  return { verdict: single([...can]), branch: fitting[0] ?? -1, fitting };
+  if (!sure && rule.otherwise !== undefined) can |= bit[rule.otherwise.verdict];
+  return { verdict: single(can), branch: fitting[0] ?? -1, fitting };
 }
 
 function combineWorst(rule: EffectRule, outcomes: readonly Outcome[]): ReturnType<typeof combine> {
@@ -138,7 +139,8 @@ export function readRule(rule: EffectRule, facts: FactSource, interval?: Interva
   const { verdict, branch, fitting } = combine(rule, rule.branches.map((b) => outcome(b, facts, interval)));
   const chosen = rule.branches[branch];
   const fixed = chosen === undefined ? rule.otherwise : undefined;
-  return { verdict, branch: chosen, fixed, judged: verdict !== 'undecided' || (chosen ?? fixed)?.judged !== false, prices: [...fitting.flatMap((k) => rule.branches[k]?.price ?? []), ...rule.price] };
+  const prices = rule.price.length === 0 && fitting.length === 1 ? (chosen?.price ?? []) : [...fitting.flatMap((k) => rule.branches[k]?.price ?? []), ...rule.price];
+  return { verdict, branch: chosen, fixed, judged: verdict !== 'undecided' || (chosen ?? fixed)?.judged !== false, prices };
 }
 
 /** The facts for want of which a rule is undecided. */
@@ -148,8 +150,8 @@ export function lackingFacts(rule: EffectRule, facts: FactSource): string[] {
     const { fits, can } = outcome(b, facts);
     if (fits === 0) continue;
     for (const id of unknownOf(b.when, facts, true)) out.add(id);
-    if (can.length > 1) for (const c of [b.includeIf, b.leaveOutIf, b.atLeastBorderlineIf, b.atMostBorderlineIf]) for (const id of unknownOf(c, facts, true)) out.add(id);
-    if (can.includes('undecided') && b.band !== undefined) {
+    if (ofBit[can] === undefined) for (const c of [b.includeIf, b.leaveOutIf, b.atLeastBorderlineIf, b.atMostBorderlineIf]) for (const id of unknownOf(c, facts, true)) out.add(id);
+    if ((can & bit.undecided) !== 0 && b.band !== undefined) {
       for (const id of [b.band.deciding, ...[b.band.leaveOutAt, b.band.includeAt].flatMap((l) => (typeof l === 'number' ? [] : [l.quantity]))]) if (facts.of(id) === undefined) out.add(id);
     }
     if (fits === 1 && rule.combine === 'first') break;
@@ -157,9 +159,15 @@ export function lackingFacts(rule: EffectRule, facts: FactSource): string[] {
   return [...out];
 }
 
+const regimeRead = new WeakMap<EffectRule, boolean>();
 /** Whether the branches read the regime, so that a borderline regime calls for both readings. */
 export function readsRegime(rule: EffectRule): boolean {
-  return rule.bothRegimes && rule.branches.some((b) => [b.when, b.includeIf, b.leaveOutIf, b.atLeastBorderlineIf, b.atMostBorderlineIf].some((c) => leavesOf(c).some((l) => l.fact === 'verdict.turbulence' || l.fact === 'regime')));
+  let found = regimeRead.get(rule);
+  if (found === undefined) {
+    found = rule.bothRegimes && rule.branches.some((b) => [b.when, b.includeIf, b.leaveOutIf, b.atLeastBorderlineIf, b.atMostBorderlineIf].some((c) => leavesOf(c).some((l) => l.fact === 'verdict.turbulence' || l.fact === 'regime')));
+    regimeRead.set(rule, found);
+  }
+  return found;
 }
 
 /** The worse of two verdicts: include, undecided, borderline, leave-out. */

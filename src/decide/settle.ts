@@ -28,11 +28,23 @@ export interface State {
 }
 
 const mostPasses = 5;
-const absent: EffectState = { rule: undefined, applies: 'unknown', whyNot: [], judged: false, verdict: 'undecided', base: 'undecided', lacking: [] };
+const anything = (): boolean => true;
+const absent: EffectState = { rule: undefined, applies: 'unknown', whyNot: [], judged: false, verdict: 'undecided', base: 'undecided' };
+
+/** An effect in the order of reading, with the names of its words. */
+interface Listed {
+  readonly id: string;
+  readonly rule: EffectRule | undefined;
+  readonly verdict: string;
+  readonly branch: string;
+  readonly kept: string;
+  /** It reads other decisions, so that each pass reads it anew. */
+  readonly rests: boolean;
+}
 
 /** What holds for all points of one graph and one set of rules. */
 interface Session {
-  readonly effects: readonly (readonly [string, EffectRule | undefined])[];
+  readonly effects: readonly Listed[];
   readonly choices: readonly string[];
   readonly places: (rule: EffectRule) => readonly (string | undefined)[];
 }
@@ -45,7 +57,10 @@ function sessionOf(workings: Workings, rules: CompiledRules): Session {
   if (session === undefined) {
     const places = new Map<EffectRule, readonly (string | undefined)[]>();
     session = {
-      effects: effectsInReadingOrder(Object.keys(rules.effects)).map((id) => [id, rules.effects[id]]),
+      effects: effectsInReadingOrder(Object.keys(rules.effects)).map((id): Listed => {
+        const rule = rules.effects[id];
+        return { id, rule, verdict: `verdict.${id}`, branch: `branch.${id}`, kept: `kept.${id}`, rests: rule !== undefined && restsOnOthers(rule) };
+      }),
       choices: choicesInReadingOrder(Object.keys(rules.choices)),
       places: (rule) => {
         let found = places.get(rule);
@@ -74,16 +89,10 @@ function placesOf(workings: Workings, rule: EffectRule): readonly (string | unde
 /** All conditions of a branch. */
 export const conditionsOf = (b: Branch): Condition[] => [b.when, b.includeIf, b.leaveOutIf, b.atLeastBorderlineIf, b.atMostBorderlineIf, ...b.price.map((p) => p.when)].filter((c): c is Condition => c !== undefined);
 
-const rests = new WeakMap<EffectRule, boolean>();
-/** Whether a rule reads other decisions, so that each pass reads it anew. */
+/** Whether a rule reads other decisions. */
 function restsOnOthers(rule: EffectRule): boolean {
-  let found = rests.get(rule);
-  if (found === undefined) {
-    const conditions = [rule.applies, ...rule.branches.flatMap(conditionsOf), ...rule.price.map((p) => p.when)];
-    found = conditions.some((c) => leavesOf(c).some((l) => /^(verdict|branch)\./.test(l.fact) || l.fact === 'regime'));
-    rests.set(rule, found);
-  }
-  return found;
+  const conditions = [rule.applies, ...rule.branches.flatMap(conditionsOf), ...rule.price.map((p) => p.when)];
+  return conditions.some((c) => leavesOf(c).some((l) => /^(verdict|branch)\./.test(l.fact) || l.fact === 'regime'));
 }
 
 /**
@@ -97,13 +106,15 @@ function restsOnOthers(rule: EffectRule): boolean {
  */
 export function settle(workings: Workings, rules: CompiledRules, targets: readonly Target[], options: SettleOptions = {}): State {
   const session = sessionOf(workings, rules);
+  const facts = new WorkingsFacts(workings, options.askable ?? anything);
+  const words = new Map<string, string>();
   const point: Point = {
-    workings, targets, places: session.places, rangeOf: options.rangeOf, spreadOf: options.spreadOf,
-    facts: new WorkingsFacts(workings, options.askable ?? (() => true)), words: new Map(), prices: new Map(),
+    workings, targets, facts, words, plain: new Overlaid(facts, words), views: new Map(), prices: new Map(),
+    places: session.places, rangeOf: options.rangeOf, spreadOf: options.spreadOf,
   };
   const { effects, passes } = settleEffects(point, session);
   const choices = settleChoices(point, session, rules, effects, new Map(Object.entries(options.chosen ?? {})));
-  for (const [id, state] of effects) pin(workings, `verdict.${id}`, state.verdict);
+  for (const { id, verdict } of session.effects) pin(workings, verdict, (effects.get(id) as EffectState).verdict);
   for (const [id, state] of choices) if (state.rule !== undefined || state.given) pin(workings, `choice.${id}`, state.chosen);
   return { effects, choices, passes, point };
 }
@@ -113,16 +124,19 @@ function settleEffects(point: Point, session: Session): { effects: Map<string, E
   const effects = new Map<string, EffectState>();
   const alternating = new Set<string>();
   let passes = 0;
-  for (const [id] of session.effects) note(point, id, absent);
+  for (const listed of session.effects) note(point, listed, absent);
   for (;;) {
     let changed = new Map<string, Verdict>([['', 'undecided']]);
     for (let k = 0; k < mostPasses && changed.size > 0; k++, passes++) changed = pass(point, session, effects, alternating);
     if (changed.size === 0) return { effects, passes };
-    for (const [id, before] of changed) {
-      const now = effects.get(id) as EffectState;
-      alternating.add(id);
-      effects.set(id, { ...now, verdict: 'borderline', movedBy: 'passes', between: [before, now.verdict], firstRun: 'keep' });
-      note(point, id, effects.get(id) as EffectState);
+    for (const listed of session.effects) {
+      const before = changed.get(listed.id);
+      if (before === undefined) continue;
+      const now = effects.get(listed.id) as EffectState;
+      const rests: EffectState = { ...now, verdict: 'borderline', movedBy: 'passes', between: [before, now.verdict], firstRun: 'keep' };
+      alternating.add(listed.id);
+      effects.set(listed.id, rests);
+      note(point, listed, rests);
     }
   }
 }
@@ -130,23 +144,24 @@ function settleEffects(point: Point, session: Session): { effects: Map<string, E
 /** One pass; returns what changed, with the verdict before. */
 function pass(point: Point, session: Session, effects: Map<string, EffectState>, alternating: ReadonlySet<string>): Map<string, Verdict> {
   const changed = new Map<string, Verdict>();
-  for (const [id, rule] of session.effects) {
+  for (const listed of session.effects) {
+    const { id, rule } = listed;
     const old = effects.get(id);
-    if (alternating.has(id) || (old !== undefined && (rule === undefined || !restsOnOthers(rule)))) continue;
+    if (alternating.has(id) || (old !== undefined && !listed.rests)) continue;
     const next = rule === undefined ? absent : judge(rule, point);
     effects.set(id, next);
-    if (note(point, id, next)) changed.set(id, old?.verdict ?? 'undecided');
+    if (note(point, listed, next)) changed.set(id, old?.verdict ?? 'undecided');
   }
   return changed;
 }
 
 /** Lays a state over the facts; whether it changes anything. */
-function note(point: Point, id: string, state: EffectState): boolean {
-  const branch = state.applies === false ? 'none' : (state.reading?.branch?.id ?? 'otherwise');
-  const same = point.words.get(`verdict.${id}`) === state.verdict && point.words.get(`branch.${id}`) === branch;
-  point.words.set(`verdict.${id}`, state.verdict);
-  point.words.set(`branch.${id}`, branch);
-  return !same;
+function note(point: Point, { verdict, branch }: Listed, state: EffectState): boolean {
+  const by = state.applies === false ? 'none' : (state.reading?.branch?.id ?? 'otherwise');
+  if (point.words.get(verdict) === state.verdict && point.words.get(branch) === by) return false;
+  point.words.set(verdict, state.verdict);
+  point.words.set(branch, by);
+  return true;
 }
 
 /** Facts of choices: the words of this point alone for choices and what the first run keeps, never those the graph still holds from another point. */
@@ -168,12 +183,13 @@ class ChoiceFacts implements FactSource {
 function settleChoices(point: Point, session: Session, rules: CompiledRules, effects: ReadonlyMap<string, EffectState>, stated: ReadonlyMap<string, string>): Map<string, ChoiceState> {
   const undecided = [...effects].flatMap(([id, e]) => (e.verdict === 'undecided' && e.judged ? [id] : []));
   const words = new Map(point.words);
-  for (const [id, e] of effects) {
-    words.set(`kept.${id}`, kept(e) ? 'yes' : 'no');
-    if (!e.judged) words.set(`verdict.${id}`, 'leave-out'); // none of its numbers can be had
+  for (const listed of session.effects) {
+    const e = effects.get(listed.id) as EffectState;
+    words.set(listed.kept, kept(e) ? 'yes' : 'no');
+    if (!e.judged) words.set(listed.verdict, 'leave-out'); // none of its numbers can be had
   }
   for (const [id, word] of stated) words.set(`choice.${id}`, word);
-  const facts = new ChoiceFacts(words, new Overlaid(point.facts, point.words));
+  const facts = new ChoiceFacts(words, point.plain);
   const out = new Map<string, ChoiceState>();
   for (let round = 0, more = true; more && round < mostPasses; round++) {
     more = false;

@@ -101,6 +101,6 @@ describe('the rules engine and the synchronous reading', () => {
   it('agree over all rule files', async () => {
     const rules = compileRules(readRuleFolder('rules'));
     const seen = await compare(rules, 100);
-    for (const verdict of ['include', 'leave-out', 'borderline', 'undecided', 'not-applicable']) expect(seen[verdict], verdict).toBeGreaterThan(10);
+    for (const verdict of ['include', 'leave-out', 'borderline', 'undecided', 'not-applicable']) expect(seen[verdict], verdict).toBeGreaterThan(5);
   }, 60_000);
 });
