@@ -5,11 +5,14 @@ type More<F> = Partial<Omit<F, 'kind' | 'doc' | 'example' | 'unit'>>;
 /** A number with a unit. */
 export const quantity = (doc: string, unit: string, example: string, more: More<QuantityField> = {}): QuantityField => ({ kind: 'quantity', doc, unit, example, ...more });
 
-/** A positive length. */
-export const length = (doc: string, example: string, more: More<QuantityField> = {}): QuantityField => quantity(doc, 'm', example, { name: 'length', above: 0, ...more });
+/** Above zero unless the field says from where on. */
+const positive = (more: More<QuantityField>): More<QuantityField> => (more.atLeast === undefined ? { above: 0, ...more } : more);
 
-/** A positive number without unit. */
-export const number = (doc: string, example: string, more: More<QuantityField> = {}): QuantityField => quantity(doc, '1', example, { name: 'plain number', above: 0, ...more });
+/** A length, above zero unless `atLeast` is given. */
+export const length = (doc: string, example: string, more: More<QuantityField> = {}): QuantityField => quantity(doc, 'm', example, { name: 'length', ...positive(more) });
+
+/** A number without unit, above zero unless `atLeast` is given. */
+export const number = (doc: string, example: string, more: More<QuantityField> = {}): QuantityField => quantity(doc, '1', example, { name: 'plain number', ...positive(more) });
 
 /** A whole number from 1. */
 export const count = (doc: string, example: string, more: More<QuantityField> = {}): QuantityField => quantity(doc, '1', example, { name: 'whole number', atLeast: 1, whole: true, ...more });

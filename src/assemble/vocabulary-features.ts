@@ -14,7 +14,7 @@ export const species = list('substances carried by the fluid', '[{ name: salt, d
 export const reactions = list('chemical reactions', '[{ of: feed, where: fluid, order: 1, rateConstant: 2 1/s, rateAt: 350 degC }]', {
   of: text('the substance that reacts', 'feed'),
   where: word('where it reacts', 'fluid', { fluid: 'in the fluid', wall: 'on the wall', catalyst: 'within a catalyst', interface: 'where two fluids meet' }),
-  order: number('order of the reaction', '1', { above: -1, atLeast: 0, atMost: 5 }),
+  order: number('order of the reaction', '1', { atLeast: 0, atMost: 5 }),
   rateConstant: quantity('rate constant, in the unit of its order and place', '1/s', '2 1/s', { orUnits: ['m/s', 'm^3/(mol s)', 'mol/(m^3 s)', 'mol/(m^2 s)', 'm^6/(mol^2 s)', 'm^3/(kg s)', 'mol/(kg s)'], name: 'rate constant', above: 0 }),
   rateAt: temperature('temperature at which the rate constant holds', '350 degC'),
   activationEnergy: quantity('activation energy', 'J/mol', '110 kJ/mol', { name: 'activation energy', atLeast: 0 }),

@@ -50,7 +50,7 @@ function textOf(text: string, example: string): string {
   const control = text.search(/[\u0000-\u0008\u000b-\u001f\u007f-\u009f\u202a-\u202e\u2066-\u2069]/);
   if (control >= 0) throw new Problem({ code: 'control-character', message: 'a control character within a text', expected: 'printable text' });
   if (text.trim() === '') throw new Problem({ code: 'empty-value', message: 'a text without letters', expected: `for example ${example}` });
-  return text.trim();
+  return text.trim().replace(/\s+/g, ' ');
 }
 
 function quantityOf(text: string, field: QuantityField, beside: Beside): Value {

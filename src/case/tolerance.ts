@@ -21,6 +21,7 @@ function isTemperature(quantity: string, temperatures: readonly string[]): boole
  * @throws              {Problem} percent-of-temperature, not-positive and those of readQuantity
  */
 export function readTolerance(text: string, quantity: string, temperatures: readonly string[]): Value {
+  if (text.length > 200) throw new Problem({ code: 'wrong-tolerance', message: 'a tolerance longer than 200 characters', expected });
   if (/\.\.|±|\+\/?-/.test(text)) throw new Problem({ code: 'wrong-tolerance', message: `"${text.slice(0, 80)}" is a range or has a spread`, expected });
   const plain = /%\s*$|% +of\b/.test(text) ? undefined : unitBehind(text);
   const temperature = isTemperature(quantity, temperatures) || (plain !== undefined && sameDimension(plain, kelvin));

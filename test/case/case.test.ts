@@ -120,3 +120,24 @@ describe('together', () => {
     expect(pipe('inlet: { speed: 1 m/s +/- 5 %, temperature: 20 +/- 1 degC }\ntogether: [[inlet.speed, inlet.temperature]]').together).toEqual([['inlet.speed', 'inlet.temperature']]);
   });
 });
+
+describe('forms of the file', () => {
+  const lines = ['format: 1', 'flow: pipe # a comment', 'sizes:', '  diameter: 25 mm', 'fluid: { material: water }', 'purpose: >', '  does it', '  leak?', ''];
+
+  it.each([
+    { what: 'line feeds', text: lines.join('\n') },
+    { what: 'carriage returns and line feeds', text: lines.join('\r\n') },
+    { what: 'a byte order mark', text: `\ufeff${lines.join('\n')}` },
+    { what: 'bytes', text: new TextEncoder().encode(`\ufeff${lines.join('\n')}`) },
+  ])('$what', ({ text }) => {
+    const one = readCase(text, 'case.yaml', vocabulary);
+    expect(one.number('sizes.diameter')).toBe(0.025);
+    expect(one.get('sizes.diameter')?.position).toEqual({ line: 4, column: 13, length: 5 });
+    expect(one.purpose).toBe('does it leak?');
+  });
+
+  it('another format is refused; none at all is taken as 1, and said', () => {
+    expect(() => readCase('format: 2\nflow: sphere\nsizes: { diameter: 1 m }\nfluid: { material: water }', 'case.yaml', vocabulary)).toThrow('format: 2');
+    expect(readCase('flow: sphere\nsizes: { diameter: 1 m }\nfluid: { material: water }', 'case.yaml', vocabulary).warnings).toEqual(['format is not stated; format 1 is taken']);
+  });
+});
