@@ -1,0 +1,6 @@
+export { at } from './at.ts';
+export { brent } from './brent.ts';
+export { march } from './ode.ts';
+export { pchip } from './pchip.ts';
+export { integrate } from './quadrature.ts';
+export { besselJ, ellipticE, erf, erfc, erfcScaled } from './special.ts';
