@@ -6,6 +6,7 @@ import { passageDefinitions, turbulentLength } from './passage.ts';
 import { straightDefinitions } from './straight.ts';
 
 const geometry = 'geometry';
+const simulated = [180, 550, 1000, 2000, 5200];
 const gapOf = (formula: string, factor: number): ReturnType<typeof way> => way({ needs: ['sizes.gap'], value: (of) => factor * of['sizes.gap'], formula, source: geometry });
 
 const scales: Definition[] = [
@@ -25,6 +26,9 @@ const scales: Definition[] = [
     way({ needs: ['sizes.length'], when: { axis: 'upright' }, value: (of) => of['sizes.length'], formula: 'H_g = L', source: geometry }),
     way({ needs: ['sizes.gap'], when: { axis: 'level' }, value: (of) => of['sizes.gap'], formula: 'H_g = H', source: geometry }),
     way({ needs: ['sizes.gap', 'sizes.length', 'inclination'], value: (of) => of['sizes.length'] * Math.abs(Math.sin(of.inclination)) + of['sizes.gap'] * Math.abs(Math.cos(of.inclination)), formula: 'H_g = L sin(theta) + H cos(theta)', source: geometry }),
+  ]),
+  quantity('channelFrictionReynoldsData', { symbol: 'delta+_d', name: 'nearest friction Reynolds number with direct simulations', unit: '1' }, [
+    way({ needs: ['frictionReynolds'], value: ({ frictionReynolds }) => simulated.reduce((best, x) => (Math.abs(Math.log(x / frictionReynolds)) < Math.abs(Math.log(best / frictionReynolds)) ? x : best)), formula: 'nearest of 180, 550, 1000, 2000, 5200 in the logarithm', source: 'Lee and Moser, J. Fluid Mech. 774 (2015) 395' }),
   ]),
   quantity('channelKnudsenGap', { symbol: 'Kn_H', name: 'Knudsen number on the gap', unit: '1' }, [way({ needs: ['meanFreePath', 'sizes.gap'], value: (of) => of.meanFreePath / of['sizes.gap'], formula: 'Kn_H = lambda/H', source: 'definition' })]),
   ways('womersley', [way({ needs: ['time.period', 'gap', 'kinematicViscosity'], value: (of) => (of.gap / 2) * Math.sqrt((2 * Math.PI) / (of['time.period'] * of.kinematicViscosity)), formula: 'Wo = (H/2) sqrt(2 pi/(T nu))', source: 'Womersley, J. Physiol. 127 (1955) 553, on the half gap' })]),

@@ -42,6 +42,7 @@ const drag: Definition[] = [
     way({ needs: [...drive, 'packedBedRatio'], range: { packedBedRatio: [20, 1e6] }, scatter: 0.2, value: (of) => bedGradient({ drag: ergunDrag, ...flow(of) }), formula: '150 mu U (1 - e)^2/(d_p^2 e^3) + 1.75 rho U^2 (1 - e)/(d_p e^3)', source: ergun }),
     way({ needs: [...drive, 'packedBedRatio'], range: { packedBedRatio: [1.6, 250] }, scatter: 0.2, value: (of) => bedGradient({ drag: eisfeldDrag({ bedRatio: of.packedBedRatio, voidFraction: of.packedBedVoidFraction }), ...flow(of) }), formula: '154 A_w^2 mu U (1 - e)^2/(d_p^2 e^3) + (A_w/B_w) rho U^2 (1 - e)/(d_p e^3), A_w = 1 + 2/(3 (D/d_p)(1 - e)), B_w = (1.15 (d_p/D)^2 + 0.87)^2', source: 'Eisfeld and Schnitzlein, Chem. Eng. Sci. 56 (2001) 4321, wall counted' }),
   ]),
+  quantity('packedBedGradientViscous', { symbol: '(-dp/dx)_v', name: 'viscous part of the pressure fall per length', ...gradientUnit }, [way({ needs: ['viscosityBulk', 'speedBulk', 'packedBedPermeability'], value: ({ viscosityBulk, speedBulk, packedBedPermeability }) => (viscosityBulk * speedBulk) / packedBedPermeability, formula: '(-dp/dx)_v = mu U/K', source: 'Darcy 1856' })]),
   quantity('packedBedGradientSecond', { symbol: '(-dp/dx)_2', name: 'pressure fall per length by a second law', ...gradientUnit }, [
     way({ needs: [...drive, 'packedBedReynoldsPore'], range: { packedBedReynoldsPore: [1, 1e5] }, scatter: 0.15, value: (of) => ktaGradient(flow(of)), formula: 'psi (1 - e) rho U^2/(2 e^3 d_p), psi = 320/X + 6/X^0.1, X = Re_p/(1 - e)', source: 'KTA 3102.3 (1981)' }),
   ]),

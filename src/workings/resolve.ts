@@ -319,7 +319,8 @@ export class Workings {
   #take(i: number, slot: Slot, b: Bound, widen: number): boolean {
     for (let k = 0; k < b.needs.length; k++) b.of[b.way.needs[k] as string] = this.#value[b.needs[k] as number] as number;
     if (slot.isWord) {
-      this.#word[i] = b.way.word?.(b.of);
+      // The plain id of a word that exists once a place repeats the word of its place.
+      this.#word[i] = b.way.word === undefined && b.needs.length === 1 ? this.#word[b.needs[0] as number] : b.way.word?.(b.of);
       if (this.#word[i] === undefined) return false;
     } else {
       let v = b.way.value?.(b.of, b.laws) ?? Number.NaN;

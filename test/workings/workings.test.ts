@@ -140,3 +140,16 @@ describe('definitions', () => {
     expect(() => joinDefinitions([...defs, quantity('z', { symbol: '', name: '', unit: '1' }, [way({ needs: [], when: { regime: 'stormy' }, value: () => 1, formula: '', source: '' })])])).toThrow('stormy');
   });
 });
+
+describe('a word that exists once a place', () => {
+  it('is, without a place, the word of the target', () => {
+    const kind = quantity('kind', { symbol: '', name: 'kind', unit: 'word', words: ['hot', 'cold'], per: ['wall'], plain: 'target' });
+    const value = quantity('value', { symbol: '', name: 'value', unit: '1' }, [way({ needs: [], when: { kind: 'hot' }, value: () => 1, formula: '1', source: 'x' }), way({ needs: [], when: { kind: 'cold' }, value: () => 2, formula: '2', source: 'x' })]);
+    const nodes = joinDefinitions([kind, value], { of: { wall: ['left', 'right'] }, target: { wall: 'right' } });
+    const w = new Workings(nodes, { 'kind@left': { value: 'hot' }, 'kind@right': { value: 'cold' } });
+    expect(w.word('kind')).toBe('cold');
+    expect(w.get('value')).toBe(2);
+    w.set('kind@right', 'hot');
+    expect(w.get('value')).toBe(1);
+  });
+});
