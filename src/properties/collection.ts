@@ -1,25 +1,24 @@
-import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { nearestName, Problem } from '../problems/index.ts';
 import { compileMaterials } from './compile.ts';
 import { materialOf, type Material } from './material.ts';
-import type { Side } from './models/point.ts';
+import { collectionOf, plainName } from './names.ts';
+import { openStored } from './stored.ts';
 import type { Collection, MaterialRecord } from './record.ts';
 
 let shipped: Collection | undefined;
 
 /**
- * The records that come with the program: the compiled file beside it, or the folder of records in a source tree.
+ * The records that come with the program: the compiled ones in `materials` beside it, or the folder of records in a source tree.
  *
- * @returns  the collection, read once
+ * @returns  the collection, opened once
  * @throws   {Problem} missing-folder
  */
 export function shippedMaterials(): Collection {
   if (shipped !== undefined) return shipped;
   const here = fileURLToPath(new URL('.', import.meta.url));
-  const compiled = join(here, 'materials.json');
-  shipped = existsSync(compiled) ? (JSON.parse(readFileSync(compiled, 'utf8')) as Collection) : compileMaterials(join(here, '../../materials'));
+  shipped = openStored(join(here, 'materials')) ?? compileMaterials(join(here, '../../materials'));
   return shipped;
 }
 
@@ -31,23 +30,18 @@ export function shippedMaterials(): Collection {
  * @throws     {Problem} every fault in the user's files, with file, line and column
  */
 export function withMaterialsFrom(dir: string): Collection {
-  return { materials: { ...shippedMaterials().materials, ...compileMaterials(dir).materials } };
+  return collectionOf(materialRecords(compileMaterials(dir)), shippedMaterials());
 }
 
-interface Named {
-  readonly record: MaterialRecord;
-  readonly asked?: Side;
-}
-
-const plain = (name: string): string => name.trim().toLowerCase().replaceAll(/[\s_-]+/g, ' ');
-
-function namesOf(collection: Collection): Map<string, Named> {
-  const names = new Map<string, Named>();
-  for (const record of Object.values(collection.materials)) {
-    for (const name of [record.id, record.name, ...record.aliases, ...(record.formula === undefined ? [] : [record.formula])]) names.set(plain(name), { record });
-    for (const [name, asked] of Object.entries(record.phaseNames)) names.set(plain(name), { record, asked });
-  }
-  return names;
+/**
+ * All records of a collection.
+ *
+ * @param collection  the shipped one unless given
+ * @returns           records in the order of their names
+ */
+export function materialRecords(collection: Collection = shippedMaterials()): MaterialRecord[] {
+  const ids = new Set(Object.values(collection.names).map(({ id }) => id));
+  return [...ids].flatMap((id) => collection.record(id) ?? []).sort((a, b) => (a.name < b.name ? -1 : 1));
 }
 
 const ready = new WeakMap<Collection, Map<string, Material>>();
@@ -63,13 +57,13 @@ const ready = new WeakMap<Collection, Map<string, Material>>();
 export function loadMaterial(name: string, collection: Collection = shippedMaterials()): Material {
   const known = ready.get(collection) ?? new Map<string, Material>();
   ready.set(collection, known);
-  const key = plain(name);
+  const key = plainName(name);
   const before = known.get(key);
   if (before !== undefined) return before;
-  const names = namesOf(collection);
-  const found = names.get(key);
-  if (found === undefined) throw unknown(name, key, names);
-  const material = materialOf(found.record, collection, found.asked);
+  const found = Object.hasOwn(collection.names, key) ? collection.names[key] : undefined;
+  const record = found && collection.record(found.id);
+  if (found === undefined || record === undefined) throw unknown(name, key, collection);
+  const material = materialOf(record, collection, found.asked);
   known.set(key, material);
   return material;
 }
@@ -81,17 +75,23 @@ export function loadMaterial(name: string, collection: Collection = shippedMater
  * @returns           names in alphabetical order
  */
 export function materialNames(collection: Collection = shippedMaterials()): string[] {
-  return Object.values(collection.materials).map((record) => record.name).sort();
+  return [...new Set(Object.values(collection.names).map(({ name }) => name))].sort((a, b) => (a.toLowerCase() < b.toLowerCase() ? -1 : 1));
 }
 
-function unknown(name: string, key: string, names: Map<string, Named>): Problem {
+function unknown(name: string, key: string, collection: Collection): Problem {
+  const shown = name.slice(0, 60);
+  const entries = Object.entries(collection.names);
   const candidates = new Set<string>();
-  if (key.length >= 3) for (const [other, { record }] of names) if (other.split(' ').some((word) => word === key) || other.startsWith(`${key} `)) candidates.add(record.name);
-  if (candidates.size > 0) {
-    const list = [...candidates].sort().join(', ');
-    return new Problem({ code: 'ambiguous-material', message: `"${name}" does not say which material is meant`, expected: `one of ${list}` });
+  if (key.length >= 3) for (const [other, named] of entries) if (other.split(' ').includes(key)) candidates.add(named.name);
+  if (candidates.size > 1) {
+    return new Problem({ code: 'ambiguous-material', message: `"${shown}" does not say which material is meant`, expected: `one of ${[...candidates].sort().join(', ')}` });
   }
-  const nearest = nearestName(key, [...names.keys()]);
-  const all = [...new Set([...names.values()].map(({ record }) => record.name))].sort();
-  return new Problem({ code: 'unknown-material', message: `"${name}" is not a material of the collection`, expected: `one of ${all.join(', ')}; or give the fluid's properties instead of a material`, ...(nearest === undefined ? {} : { nearest: names.get(nearest)!.asked === undefined ? names.get(nearest)!.record.name : nearest }) });
+  const nearest = nearestName(key, Object.keys(collection.names)) ?? (candidates.size === 1 ? plainName([...candidates][0]!) : undefined);
+  const named = nearest === undefined ? undefined : collection.names[nearest];
+  return new Problem({
+    code: 'unknown-material',
+    message: `"${shown}" is not a material of the collection`,
+    expected: `one of ${materialNames(collection).join(', ')}; or give the fluid's properties instead of a material`,
+    ...(named === undefined ? {} : { nearest: named.asked === undefined ? named.name : (nearest as string) }),
+  });
 }

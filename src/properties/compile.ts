@@ -3,6 +3,7 @@ import { join } from 'node:path';
 import { Problem, type ProblemData } from '../problems/index.ts';
 import { readBands, readEntry } from './compile-entry.ts';
 import type { Side } from './models/point.ts';
+import { collectionOf, plainName } from './names.ts';
 import { propertyUnits, type Band, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
 import { yamlReader, type YamlReader } from './yaml-reader.ts';
 
@@ -89,12 +90,12 @@ function thermodynamics(reader: YamlReader, given: unknown): object {
  * Reads and checks all records of a folder.
  *
  * @param dir  folder with one `.yaml` file per material
- * @returns    the records by id, in SI, ready to be stored as JSON
+ * @returns    the collection, numbers in SI
  * @throws     {Problem} the faults of all files together; two-names where two records claim one name
  */
 export function compileMaterials(dir: string): Collection {
   const problems: ProblemData[] = [];
-  const materials: Record<string, MaterialRecord> = {};
+  const materials: MaterialRecord[] = [];
   const owner = new Map<string, string>();
   let files: string[];
   try {
@@ -106,16 +107,16 @@ export function compileMaterials(dir: string): Collection {
     try {
       const record = compileMaterial(readFileSync(join(dir, file), 'utf8'), file);
       for (const name of [record.name, ...record.aliases, ...Object.keys(record.phaseNames)]) {
-        const other = owner.get(name.toLowerCase());
+        const other = owner.get(plainName(name));
         if (other !== undefined && other !== file) problems.push({ code: 'two-names', message: `"${name}" names a material of ${other} as well`, file });
-        owner.set(name.toLowerCase(), file);
+        owner.set(plainName(name), file);
       }
-      materials[record.id] = record;
+      materials.push(record);
     } catch (error) {
       if (!(error instanceof Problem)) throw error;
       problems.push(...error.list);
     }
   }
   if (problems.length > 0) throw new Problem(problems);
-  return { materials };
+  return collectionOf(materials);
 }

@@ -1,4 +1,4 @@
-export { loadMaterial, materialNames, shippedMaterials, withMaterialsFrom } from './collection.ts';
+export { loadMaterial, materialNames, materialRecords, shippedMaterials, withMaterialsFrom } from './collection.ts';
 export { compileMaterial, compileMaterials } from './compile.ts';
 export { type Law, laws, type Laws } from './laws.ts';
 export type { Material } from './material.ts';
@@ -7,4 +7,5 @@ export { phaseAt, type PhaseAt, type Saturation, saturationOf } from './phase.ts
 export { boxText, propertyAt, propertyIn, type PropertyValue, takeState, type TakenState } from './property.ts';
 export { type Box, type Collection, type MaterialRecord, type Phase, type PropertyId, propertyUnits } from './record.ts';
 export { type State, stateOf, type StateText } from './state.ts';
+export { type StoredFile, storedMaterials } from './stored.ts';
 export { type PropertyTable, tableOver, type TableRow } from './table-over.ts';

@@ -1,7 +1,7 @@
-import type { Material } from './material.ts';
-import type { PropertyId } from './record.ts';
+import { fromEquation, insideAny, type Material } from './material.ts';
+import type { Point } from './models/point.ts';
 import { takeState, type TakenState } from './property.ts';
-import { inside } from './material.ts';
+import type { Box, PropertyId } from './record.ts';
 import { phaseAt } from './phase.ts';
 import type { State } from './state.ts';
 
@@ -32,48 +32,57 @@ export function laws(material: Material, state: State, factors: { readonly [prop
   const sample = { ...taken.sample };
   const settled = new Map<string, Law | undefined>();
 
-  const watch = (property: PropertyId): void => {
-    const ranges = record.thermodynamics !== undefined && record.thermodynamics.uncertainty[property] !== undefined ? record.thermodynamics.ranges : (engine.entry(property, sample, taken.solid ? 'solid' : undefined)?.ranges ?? []);
-    if (ranges.length > 0 && !ranges.some((box) => inside(box, sample))) raised.add(`${property} of ${material.name} is carried beyond its range`);
+  const rangesOf = (property: PropertyId): readonly Box[] | undefined => {
+    const equation = record.thermodynamics;
+    if (equation !== undefined && property in fromEquation) return equation.ranges;
+    return engine.entry(property, sample, taken.solid ? 'solid' : undefined)?.ranges;
   };
-  const raw = (property: PropertyId): ((T: number, p: number) => number) | undefined => {
+  /** The bare property at the sample, its correlation looked up once. */
+  const bare = (property: PropertyId): (() => number) => {
+    if (record.thermodynamics !== undefined && property in fromEquation) {
+      const f: (at: Point, gasConstant: number) => number = fromEquation[property as keyof typeof fromEquation];
+      return () => f(engine.point(sample), engine.equation!.gasConstant);
+    }
+    const list = record.properties[property];
+    if (list === undefined) return property === 'thermalExpansion' ? slopeOfDensity : () => engine.value(property, sample);
+    if (list.length > 1) return () => engine.evaluate(engine.entry(property, sample, taken.solid ? 'solid' : undefined)!, sample);
+    const f = engine.build(list[0]!);
+    return () => f(sample);
+  };
+  const slopeOfDensity = (): number => {
+    const T = sample.T;
+    sample.T = T + 0.5;
+    const above = engine.value('density', sample);
+    sample.T = T - 0.5;
+    const below = engine.value('density', sample);
+    sample.T = T;
+    return (below - above) / engine.value('density', sample);
+  };
+  const scaled = (property: PropertyId): (() => number) => {
+    const factor = factors[property];
+    const f = bare(property);
+    return factor === undefined ? f : () => f() * factor;
+  };
+  const call = (property: PropertyId): (() => number) | undefined => {
     if (!material.properties.includes(property)) return undefined;
-    const at = (id: PropertyId): number => {
-      const value = engine.value(id, sample);
-      return factors[id] === undefined ? value : value * factors[id];
-    };
-    const calls: { readonly [id: string]: () => number } = {
-      kinematicViscosity: () => at('viscosity') / at('density'),
-      thermalDiffusivity: () => at('thermalConductivity') / (at('density') * at('specificHeatCapacity')),
-      prandtl: () => (at('viscosity') * at('specificHeatCapacity')) / at('thermalConductivity'),
-      molarMass: () => material.molarMass ?? Number.NaN,
-    };
-    const slope = property === 'thermalExpansion' && record.thermodynamics === undefined && record.properties['thermalExpansion'] === undefined;
-    const call = slope
-      ? () => {
-          const T = sample.T;
-          sample.T = T + 0.5;
-          const above = engine.value('density', sample);
-          sample.T = T - 0.5;
-          const below = engine.value('density', sample);
-          sample.T = T;
-          return ((below - above) / engine.value('density', sample)) * (factors['thermalExpansion'] ?? 1);
-        }
-      : (calls[property] ?? (() => at(property)));
-    return (T, p) => {
-      sample.T = T;
-      sample.p = p;
-      return call();
-    };
+    if (property === 'molarMass') return () => material.molarMass ?? Number.NaN;
+    if (property === 'kinematicViscosity' || property === 'thermalDiffusivity' || property === 'prandtl') {
+      const [mu, k, rho, cp] = (['viscosity', 'thermalConductivity', 'density', 'specificHeatCapacity'] as const).map(scaled) as [() => number, () => number, () => number, () => number];
+      if (property === 'kinematicViscosity') return () => mu() / rho();
+      return property === 'prandtl' ? () => (mu() * cp()) / k() : () => k() / (rho() * cp());
+    }
+    return scaled(property);
   };
   return {
     law(property) {
       if (settled.has(property)) return settled.get(property);
-      const f = raw(property);
+      const f = call(property);
+      const boxes = rangesOf(property) ?? [];
       const law: Law | undefined = f && ((T, p = state.pressure) => {
-        const value = f(T, p);
-        watch(property);
-        return value;
+        sample.T = T;
+        sample.p = p;
+        if (boxes.length > 0 && !insideAny(boxes, sample)) raised.add(`${property} of ${material.name} is carried beyond its range`);
+        return f();
       });
       settled.set(property, law);
       return law;

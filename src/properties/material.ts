@@ -1,7 +1,7 @@
 import { Problem } from '../problems/index.ts';
 import type { Point, Side } from './models/point.ts';
 import { equationModels, propertyModels } from './registry.ts';
-import { propertyUnits, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
+import { propertyUnits, type Box, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
 import type { Engine, Sample } from './sample.ts';
 
 /** A material ready to be asked. */
@@ -37,6 +37,8 @@ export interface Material {
 /** Engine of one material: the correlations built from its record, each when first used. */
 export interface MaterialEngine extends Engine {
   evaluate(entry: Entry, sample: Sample): number;
+  /** The correlation of an entry, built once. */
+  build(entry: Entry): (sample: Sample) => number;
   /** The entry of a property that serves a side, best in range first. */
   entry(property: string, sample: Sample, asked?: Side | 'solid'): Entry | undefined;
 }
@@ -54,10 +56,15 @@ export const fromEquation = {
 
 export const gasConstantMolar = 8.31446261815324;
 
+const within = (range: readonly [number, number] | undefined, x: number): boolean => range === undefined || (x >= range[0] * (1 - 1e-9) && x <= range[1] * (1 + 1e-9));
+
 /** Whether a sample lies in a box; a small allowance for rounding at its edges. */
-export function inside(box: { readonly temperature?: readonly [number, number]; readonly pressure?: readonly [number, number]; readonly composition?: readonly [number, number] }, s: Sample): boolean {
-  const within = (range: readonly [number, number] | undefined, x: number): boolean => range === undefined || (x >= range[0] * (1 - 1e-9) && x <= range[1] * (1 + 1e-9));
-  return within(box.temperature, s.T) && within(box.pressure, s.p) && within(box.composition, s.x);
+export const inside = (box: Box, s: Sample): boolean => within(box.temperature, s.T) && within(box.pressure, s.p) && within(box.composition, s.x);
+
+/** Whether a sample lies in one of several boxes. */
+export function insideAny(boxes: readonly Box[], s: Sample): boolean {
+  for (const box of boxes) if (inside(box, s)) return true;
+  return false;
 }
 
 /**
@@ -107,13 +114,14 @@ export function engineOf(record: MaterialRecord, collection: Collection): Materi
       const entry = engine.entry(property, s);
       return entry === undefined ? Number.NaN : engine.evaluate(entry, s);
     },
-    evaluate(entry, s) {
+    evaluate: (entry, s) => engine.build(entry)(s),
+    build(entry) {
       let f = built.get(entry);
       if (f === undefined) {
         f = propertyModels[entry.model]!.make(entry.constants as never, engine);
         built.set(entry, f);
       }
-      return f(s);
+      return f;
     },
     entry(property, s, asked) {
       const list = record.properties[property];
@@ -122,7 +130,7 @@ export function engineOf(record: MaterialRecord, collection: Collection): Materi
       let first: Entry | undefined;
       for (const entry of list) {
         if (entry.phase !== undefined && entry.phase !== (asked ?? s.side)) continue;
-        if (entry.ranges.length === 0 || entry.ranges.some((box) => inside(box, s))) return entry;
+        if (entry.ranges.length === 0 || insideAny(entry.ranges, s)) return entry;
         first ??= entry;
       }
       return first;
@@ -132,7 +140,7 @@ export function engineOf(record: MaterialRecord, collection: Collection): Materi
 }
 
 function partner(collection: Collection, id: string): MaterialRecord {
-  const found = collection.materials[id];
+  const found = collection.record(id);
   if (found === undefined) throw new Problem({ code: 'missing-partner', message: `the record of ${id} is needed and missing` });
   return found;
 }

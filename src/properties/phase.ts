@@ -1,6 +1,6 @@
 import { Problem } from '../problems/index.ts';
 import type { Material } from './material.ts';
-import type { Side } from './models/point.ts';
+import type { SaturationLine, Side } from './models/point.ts';
 import { boilingTemperature } from './registry.ts';
 import type { Phase } from './record.ts';
 import type { State } from './state.ts';
@@ -24,23 +24,33 @@ export interface Saturation {
 export function saturationOf(material: Material, x = 0): Saturation | undefined {
   const line = material.record.thermodynamics === undefined ? undefined : material.engine.equation!.line;
   if (line !== undefined) {
-    return { from: line.from, to: line.to, bubble: (T) => line.bubble(T), dew: (T) => line.dew(T), boiling: (p, side = 'liquid') => within(line.from, line.to, side === 'liquid' ? (T) => line.bubble(T) : (T) => line.dew(T), p) };
+    let ready = lines.get(line);
+    if (ready === undefined) {
+      const ends = { low: line.bubble(line.from), high: line.bubble(line.to) };
+      const boiling = (p: number, side: Side = 'liquid'): number => {
+        if (p < ends.low * (1 - 1e-9) || p > ends.high * (1 + 1e-9)) return Number.NaN;
+        return line.boiling?.(p) ?? boilingTemperature(side === 'liquid' ? (T) => line.bubble(T) : (T) => line.dew(T), p, line.from, line.to);
+      };
+      ready = { from: line.from, to: line.to, bubble: (T) => line.bubble(T), dew: (T) => line.dew(T), boiling };
+      lines.set(line, ready);
+    }
+    return ready;
   }
   const entry = material.record.properties['vapourPressure']?.[0];
   const range = entry?.ranges[0]?.temperature;
   if (entry === undefined || range === undefined) return undefined;
   const pressure = (T: number): number => material.engine.evaluate(entry, { T, p: Number.NaN, side: 'liquid', x });
-  return { from: range[0], to: range[1], bubble: pressure, dew: pressure, boiling: (p) => within(range[0], range[1], pressure, p) };
+  const boiling = (p: number): number => (p < pressure(range[0]) * (1 - 1e-9) || p > pressure(range[1]) * (1 + 1e-9) ? Number.NaN : boilingTemperature(pressure, p, range[0], range[1]));
+  return { from: range[0], to: range[1], bubble: pressure, dew: pressure, boiling };
 }
 
-const within = (from: number, to: number, pressure: (T: number) => number, p: number): number =>
-  p < pressure(from) * (1 - 1e-9) || p > pressure(to) * (1 + 1e-9) ? Number.NaN : boilingTemperature(pressure, p, from, to);
+const lines = new WeakMap<SaturationLine, Saturation>();
 
 /** What is known about the phase at a state. */
 export interface PhaseAt {
   readonly phase: Phase;
   /** Saturation at this temperature [Pa] and this pressure [K], where they exist. */
-  readonly saturation?: { readonly pressure?: number; readonly temperature?: number };
+  readonly saturation?: { readonly pressure: number | undefined; readonly temperature: number | undefined };
   readonly flags: readonly string[];
 }
 
@@ -65,7 +75,7 @@ export function phaseAt(material: Material, T: number, p: number, x = 0): PhaseA
     if (melting !== undefined && T > melting) flags.push(`above the melting temperature of ${K(melting)}`);
     return { phase: 'solid', flags };
   }
-  const frozen = meltingAt(material, p, x);
+  const frozen = meltingAt(material, T, p, x);
   if (frozen !== undefined && T < frozen * (1 - 1e-6)) return { phase: 'solid', flags: [`below the melting temperature of ${K(frozen)}`] };
   const critical = material.critical;
   if (critical !== undefined && T > 0.97 * critical.temperature && T < 1.08 * critical.temperature && p > 0.75 * critical.pressure && p < 1.5 * critical.pressure) {
@@ -76,18 +86,25 @@ export function phaseAt(material: Material, T: number, p: number, x = 0): PhaseA
     const only: Phase = material.phases.includes('liquid') ? 'liquid' : 'gas';
     return { phase: only, flags };
   }
-  const boiling = p >= line.bubble(line.from) && p <= line.bubble(line.to) ? line.boiling(p) : undefined;
-  const pressure = T >= line.from && T <= line.to ? line.bubble(T) : undefined;
-  const saturation = { ...(pressure === undefined ? {} : { pressure }), ...(boiling === undefined || !Number.isFinite(boiling) ? {} : { temperature: boiling }) };
+  const saturation = {
+    get pressure() {
+      return T >= line.from && T <= line.to ? line.bubble(T) : undefined;
+    },
+    get temperature() {
+      const boiling = line.boiling(p);
+      return Number.isFinite(boiling) ? boiling : undefined;
+    },
+  };
   if (T >= line.to) return { phase: critical !== undefined && p >= critical.pressure ? 'supercritical' : 'gas', saturation, flags };
   const edge = Math.max(T, line.from);
   const phase: Phase = p > line.bubble(edge) * (1 + 1e-7) ? 'liquid' : p < line.dew(edge) * (1 - 1e-7) ? 'vapour' : 'two-phase';
   return { phase, saturation, flags };
 }
 
-function meltingAt(material: Material, p: number, x: number): number | undefined {
+function meltingAt(material: Material, T: number, p: number, x: number): number | undefined {
   const entry = material.record.properties['meltingTemperature']?.[0];
-  if (entry === undefined) return undefined;
+  // No record has a melting line that rises by more than this above its value at the atmosphere.
+  if (entry === undefined || T > (material.meltingTemperature ?? 0) * 1.002) return undefined;
   const range = entry.ranges[0]?.pressure;
   const at = range === undefined ? p : Math.min(range[1], Math.max(range[0], p));
   return material.engine.evaluate(entry, { T: Number.NaN, p: at, side: 'liquid', x });

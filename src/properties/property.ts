@@ -1,5 +1,5 @@
 import { Problem } from '../problems/index.ts';
-import { fromEquation, inside, type Material } from './material.ts';
+import { fromEquation, inside, insideAny, type Material } from './material.ts';
 import type { Side } from './models/point.ts';
 import { takenPhase } from './phase.ts';
 import type { Band, Box, Entry, Phase, PropertyId } from './record.ts';
@@ -85,7 +85,7 @@ export function propertyIn(material: Material, property: PropertyId, taken: Take
   }
   const entry = engine.entry(property, sample, solid ? 'solid' : undefined);
   if (entry !== undefined) {
-    if (ofSubstance.includes(property) && property !== 'emissivity' && !entry.ranges.some((box) => inside(box, sample))) return undefined;
+    if (ofSubstance.includes(property) && property !== 'emissivity' && !insideAny(entry.ranges, sample)) return undefined;
     return finished(material, property, engine.evaluate(entry, sample), entry, taken);
   }
   if (property === 'thermalExpansion') return expansionFromDensity(material, taken);

@@ -96,7 +96,18 @@ export interface MaterialRecord {
   readonly properties: { readonly [property: string]: readonly Entry[] };
 }
 
-/** All records by id. */
+/** What a name stands for. */
+export interface NamedMaterial {
+  readonly id: string;
+  /** The record's name. */
+  readonly name: string;
+  /** The phase the name asks for, such as that of steam. */
+  readonly asked?: Side;
+}
+
+/** Records, each read when it is asked for. */
 export interface Collection {
-  readonly materials: { readonly [id: string]: MaterialRecord };
+  /** Names, aliases and formulas in lower case with single spaces. */
+  readonly names: { readonly [plainName: string]: NamedMaterial };
+  record(id: string): MaterialRecord | undefined;
 }

@@ -16,16 +16,36 @@ const ofTemperature = (constants: readonly string[], law: OfTemperature): Proper
   },
 });
 
-/** Temperature at which a rising saturation pressure reaches p, by bisection in the logarithm and secants. */
+/**
+ * Temperature at which a rising saturation pressure reaches p: false position in 1/T and ln p, where the line is nearly straight.
+ *
+ * @param pressure  saturation pressure [Pa] of T [K], rising
+ * @param p         [Pa], between the pressures of both ends
+ * @param from      lowest temperature [K]
+ * @param to        highest temperature [K]
+ * @returns         temperature [K] to about 1e-11
+ */
 export function boilingTemperature(pressure: (T: number) => number, p: number, from: number, to: number): number {
-  let low = from;
-  let high = to;
-  for (let i = 0; i < 200 && high - low > 1e-10 * high; i++) {
-    const middle = 0.5 * (low + high);
-    if (pressure(middle) < p) low = middle;
-    else high = middle;
+  const aim = Math.log(p);
+  let [low, high] = [1 / from, 1 / to];
+  let [below, above] = [Math.log(pressure(from)) - aim, Math.log(pressure(to)) - aim];
+  let [weightBelow, weightAbove] = [below, above];
+  let u = low;
+  for (let i = 0; i < 80; i++) {
+    u = i % 8 === 7 ? 0.5 * (low + high) : high - (weightAbove * (high - low)) / (weightAbove - weightBelow);
+    const off = Math.log(pressure(1 / u)) - aim;
+    if (Math.abs(off) < 1e-13 || Math.abs(high - low) < 1e-14 * low) break;
+    if (off > 0) {
+      high = u;
+      weightBelow = Math.sign(off) === Math.sign(above) && i > 0 ? weightBelow * 0.5 : below;
+      weightAbove = above = off;
+    } else {
+      low = u;
+      weightAbove = Math.sign(off) === Math.sign(below) && i > 0 ? weightAbove * 0.5 : above;
+      weightBelow = below = off;
+    }
   }
-  return 0.5 * (low + high);
+  return 1 / u;
 }
 
 /** Correlations by the name that records use. */
@@ -130,7 +150,7 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
     constants: [],
     make(_c, engine) {
       const line = engine.equation!.line!;
-      return (s) => boilingTemperature(line.bubble, s.p, line.from, line.to);
+      return (s) => line.boiling?.(s.p) ?? boilingTemperature(line.bubble, s.p, line.from, line.to);
     },
   },
   'latent-heat': {

@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
-import { loadMaterial, propertyAt, shippedMaterials, type PropertyId } from '../../src/properties/index.ts';
+import { loadMaterial, materialRecords, propertyAt, type PropertyId } from '../../src/properties/index.ts';
 
 // Every record names checks from another work; each is met. The folder is walked: a new material is tested by being there.
-const rows = Object.values(shippedMaterials().materials).flatMap((record) => {
+const rows = materialRecords().flatMap((record) => {
   const entries = [...(record.thermodynamics === undefined ? [] : [record.thermodynamics]), ...Object.values(record.properties).flat()];
   return entries.flatMap((entry) => entry.checks.map((check) => ({ material: record.name, phase: entry.phase, ...check })));
 });
@@ -16,7 +16,7 @@ describe('checks of the material records', () => {
   });
 
   it('every entry states a source, an uncertainty and a range', () => {
-    for (const record of Object.values(shippedMaterials().materials)) {
+    for (const record of materialRecords()) {
       for (const [id, entries] of Object.entries(record.properties)) {
         for (const entry of entries) {
           expect(entry.source.length, `${record.name} ${id}`).toBeGreaterThan(10);

@@ -114,7 +114,7 @@ export function if97(c: WaterConstants): EquationOfState {
     gasConstant: c.gasConstant,
     at,
     of: (T, rho) => scientific().of(T, rho),
-    line: { from: 273.15, to: criticalTemperature, bubble: psat, dew: psat },
+    line: { from: 273.15, to: criticalTemperature, bubble: psat, dew: psat, boiling: saturationTemperature(c.saturation) },
   };
 }
 

@@ -124,12 +124,15 @@ export const iceMeltingLine = (c: { temperature: number; pressure: number; terms
     for (const [a, b] of c.terms as readonly [number, number][]) sum += a * (1 - (T / c.temperature) ** b);
     return sum * c.pressure;
   };
-  let low = 251;
-  let high = c.temperature + 0.01;
-  for (let i = 0; i < 60; i++) {
-    const middle = 0.5 * (low + high);
-    if (melting(middle) > p) low = middle;
-    else high = middle;
+  // The melting pressure falls steeply and smoothly with temperature: secants from both sides of the triple point.
+  let [a, b] = [c.temperature, c.temperature - 1];
+  let fa = melting(a) - p;
+  for (let i = 0; i < 20; i++) {
+    const fb = melting(b) - p;
+    if (Math.abs(fb) < 1e-9 * p || fb === fa) break;
+    const next = Math.min(c.temperature + 0.01, Math.max(251, b - (fb * (b - a)) / (fb - fa)));
+    [a, fa, b] = [b, fb, next];
+    if (Math.abs(b - a) < 1e-10) break;
   }
-  return 0.5 * (low + high);
+  return b;
 };

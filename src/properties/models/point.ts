@@ -32,6 +32,8 @@ export interface SaturationLine {
   bubble(T: number): number;
   /** Pressure [Pa] at which the vapour condenses at T [K]. */
   dew(T: number): number;
+  /** Boiling temperature [K] at p [Pa], where the source states it. */
+  boiling?(p: number): number;
 }
 
 /** What every equation of state offers. */

@@ -1,0 +1,36 @@
+import type { Collection, MaterialRecord, NamedMaterial } from './record.ts';
+
+/**
+ * A name as it is compared: lower case, single spaces for spaces, hyphens and underscores.
+ *
+ * @param name  as written
+ * @returns     the plain form
+ */
+export const plainName = (name: string): string => name.trim().toLowerCase().replaceAll(/[\s_-]+/g, ' ');
+
+/**
+ * Names of one record.
+ *
+ * @param record  the record
+ * @returns       plain name to what it stands for
+ */
+export function namesOf(record: MaterialRecord): { [plain: string]: NamedMaterial } {
+  const { id, name } = record;
+  const names: { [plain: string]: NamedMaterial } = {};
+  for (const one of [id, name, ...record.aliases, ...(record.formula === undefined ? [] : [record.formula])]) names[plainName(one)] = { id, name };
+  for (const [one, asked] of Object.entries(record.phaseNames)) names[plainName(one)] = { id, name, asked };
+  return names;
+}
+
+/**
+ * A collection of records in memory, on top of another one.
+ *
+ * @param records  the records
+ * @param under    the collection whose records these add to or replace
+ * @returns        the collection
+ */
+export function collectionOf(records: readonly MaterialRecord[], under?: Collection): Collection {
+  const byId = new Map(records.map((record) => [record.id, record]));
+  const below = Object.entries(under?.names ?? {}).filter(([, { id }]) => !byId.has(id));
+  return { names: { ...Object.fromEntries(below), ...Object.assign({}, ...records.map(namesOf)) as Collection['names'] }, record: (id) => byId.get(id) ?? under?.record(id) };
+}
