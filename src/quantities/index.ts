@@ -3,6 +3,8 @@ import { branches } from './branches.ts';
 import { groups } from './groups.ts';
 import { conduction } from './conduction.ts';
 import { entrance } from './entrance.ts';
+import { dimension } from './dimension.ts';
+import { unsteady } from './unsteady.ts';
 import { species } from './species.ts';
 import { roughness } from './roughness.ts';
 import { compressibility } from './compressibility.ts';
@@ -39,4 +41,6 @@ export const generalDefinitions: Definition[] = [
   ...entrance,
   ...roughness,
   ...species,
+  ...unsteady,
+  ...dimension,
 ];

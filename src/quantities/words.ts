@@ -33,6 +33,7 @@ export const words: Definition[] = [
   word('fluidGiven', 'how the fluid is given', ['material', 'constants']),
   word('ductSection', 'section of the passage', ['round', 'rectangular', 'flat', 'other']),
   word('infiniteDepth', 'the third direction has no end', yesNo),
+  word('curvedPassage', 'the passage is curved', yesNo, {}, [wordWay({ needs: [], word: () => 'no', formula: 'straight unless the flow says otherwise', source: 'definition' })]),
   word('storage', 'where the solver keeps its unknowns', ['cell-centred', 'node-centred']),
   word('heatDirection', 'what the wall does to the fluid', ['heating', 'cooling', 'none'], {}, [
     wordWay({ needs: [], when: { energySolved: 'no' }, word: () => 'none', formula: 'no energy equation', source: 'definition' }),
