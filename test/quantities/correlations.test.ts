@@ -49,7 +49,7 @@ describe('limits', () => {
       const reynolds = 4e3 * 10 ** (k / 10);
       const at = { reynolds, relativeRoughness };
       const off = (f: number): number => Math.abs(f / laws.colebrook(at) - 1);
-      for (const name of ['haaland', 'swameeJain', 'churchill'] as const) worst[name] = Math.max(worst[name], off(laws[name](at)));
+      for (const [name, law] of [['haaland', laws.haaland], ['swameeJain', laws.swameeJain], ['churchill', laws.churchill]] as const) worst[name] = Math.max(worst[name], off(law(at)));
       if (relativeRoughness === 0 && reynolds < 5e6) worst.petukhov = Math.max(worst.petukhov, off(laws.petukhovFriction({ reynolds })));
     }
     expect(worst.haaland).toBeLessThan(0.0143);
