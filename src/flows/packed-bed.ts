@@ -79,6 +79,12 @@ const extents: Definition[] = [
   ways('peakOverMean', [way({ needs: [], as: 'assumed', scatter: 0.3, value: () => 1.5, formula: 'u_max/U = 1.5', source: 'common practice: wall layer of a bed as a continuum, superficial' })]),
 ];
 
+const continuum: Definition[] = [
+  ways('permeability', [way({ needs: ['packedBedPermeability'], value: ({ packedBedPermeability }) => packedBedPermeability, formula: 'K of the bed', source: ergun })]),
+  ways('forchheimer', [way({ needs: ['packedBedForchheimer'], value: ({ packedBedForchheimer }) => packedBedForchheimer, formula: 'C_F of the bed', source: ergun })]),
+  ways('exchangeUnits', [way({ needs: ['nusseltPlain', 'thermalConductivityBulk', 'packedBedVoidFraction', 'sizes.particleDiameter', 'sizes.length', 'densityBulk', 'specificHeatCapacityBulk', 'speedBulk'], value: (of) => (6 * (1 - of.packedBedVoidFraction) * of.nusseltPlain * of.thermalConductivityBulk * of['sizes.length']) / (of['sizes.particleDiameter'] ** 2 * of.densityBulk * of.specificHeatCapacityBulk * of.speedBulk), formula: 'NTU = h_sf a L/(rho cp U), a = 6 (1 - e)/d_p', source: 'definition' })]),
+];
+
 export const packedBed: Flow = {
   id: 'packed-bed',
   title: 'Packed bed of particles',
@@ -93,7 +99,7 @@ export const packedBed: Flow = {
   stations: ['worst', 'target'],
   regions: ['bed', 'free'],
   words: { flow: 'packed-bed', flowClass: 'continuum', imposedFlow: 'yes', wallBounded: 'no', attached: 'yes', separated: 'no', ductSection: 'round', infiniteDepth: 'no' },
-  definitions: [...scales, ...regime, ...drag, ...transfer, ...extents],
+  definitions: [...scales, ...regime, ...drag, ...transfer, ...extents, ...continuum],
   leastRegion: 'Above ten particles across and 20 to 50 along: one- or two-dimensional continuum. Below: the particles themselves, 20 cells and more over each, contacts bridged or trimmed.',
   cuts: [
     { option: 'axisymmetric', holdsIf: 'more than ten particles across, wall conditions even all round' },

@@ -3,6 +3,7 @@ import { branches } from './branches.ts';
 import { groups } from './groups.ts';
 import { conduction } from './conduction.ts';
 import { entrance } from './entrance.ts';
+import { porous } from './porous.ts';
 import { dimension } from './dimension.ts';
 import { unsteady } from './unsteady.ts';
 import { species } from './species.ts';
@@ -42,5 +43,6 @@ export const generalDefinitions: Definition[] = [
   ...roughness,
   ...species,
   ...unsteady,
+  ...porous,
   ...dimension,
 ];
