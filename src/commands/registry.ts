@@ -9,6 +9,8 @@ export interface Entry {
 /** The commands in the order of a day's work, which is the order of the overview. */
 export const COMMANDS: Readonly<Record<string, Entry>> = {
   grids: { summary: 'grid or step convergence of a table of results: order, value at size zero, band', load: () => import('./grids.ts') },
+  rules: { summary: 'the decisions with their limits and sources; --check DIR checks a rule pack', load: () => import('./rules.ts') },
+  reference: { summary: 'known solutions, evaluated for given inputs', load: () => import('./reference.ts') },
   convert: { summary: 'a quantity in another unit', load: () => import('./convert.ts') },
   template: { summary: 'a commented case file to fill in', load: () => import('./template.ts') },
   schema: { summary: 'JSON Schema of the case file, for editors', load: () => import('./schema.ts') },

@@ -10,7 +10,7 @@ import { Reader, type Fields } from './reader.ts';
 /** A rule file as text. */
 export interface RuleFile {
   /** Its name for messages, as the user wrote it. */
-  readonly path: string;
+  readonly file: string;
   readonly text: string;
 }
 
@@ -20,7 +20,7 @@ const isNode = (read: Node | ProblemData): read is Node => 'value' in read;
 /**
  * Reads and checks rule files, and puts them over rules that stand already: a rule of the same id takes the place of the earlier one.
  *
- * @param files  the files, in the order of their paths
+ * @param files  the files, in the order of their names
  * @param known  the facts that rules may name; without them names of quantities are not checked
  * @param over   rules that stand already
  * @param pack   whether ids beyond those of the program are allowed
@@ -29,18 +29,18 @@ const isNode = (read: Node | ProblemData): read is Node => 'value' in read;
  */
 export function compileRules(files: readonly RuleFile[], known?: KnownFacts, over: CompiledRules = noRules, pack = false): CompiledRules {
   const problems: ProblemData[] = [];
-  const read = files.flatMap((file) => {
-    const root = readJson(file.text, file.path);
-    if (isNode(root)) return { file, root, id: idOf(root) };
+  const read = files.flatMap(({ file, text }) => {
+    const root = readJson(text, file);
+    if (isNode(root)) return { file, text, root, id: idOf(root) };
     problems.push(root);
     return [];
   });
   const own = pack ? [...Object.keys(over.effects), ...Object.keys(over.choices), ...read.map((r) => r.id)] : [];
   const effects: [string, EffectRule][] = [];
   const choices: [string, ChoiceRule][] = [];
-  for (const { file, root, id } of read) {
+  for (const { file, text, root, id } of read) {
     const isChoice = keysOf(root).has('choice');
-    const reader = new Reader(file.text, file.path, known, own, isChoice);
+    const reader = new Reader(text, file, known, own, isChoice);
     const valid = isChoice ? choiceIds : effectIds;
     if (id !== '' && !pack && !valid.includes(id)) reader.complain(root, 'unknown-decision', `no ${isChoice ? 'choice' : 'effect'} is called ${id}`, { name: id, valid });
     if ([...effects, ...choices].some(([other]) => other === id)) reader.complain(root, 'double-rule', `a second file decides ${id}`);

@@ -62,7 +62,7 @@ export function flips(workings: Workings, rules: CompiledRules, targets: readonl
     workings.set(input.path, pinned ? nominal : undefined);
   }
   settle(workings, rules, targets, options);
-  return new Map([...found].map(([id, list]) => [id, list.sort((a, b) => a.far - b.far).map(({ path, value, unit, verdict }) => ({ path, value, unit, verdict }))]));
+  return new Map([...found].map(([id, list]) => [id, list.sort((a, b) => steps(a.far) - steps(b.far)).map(({ path, value, unit, verdict }) => ({ path, value, unit, verdict }))]));
 }
 
 /** Points over the interval, even in the logarithm where both ends are positive, with the nominal value among them. */
@@ -73,5 +73,8 @@ function scan(input: FlipInput, nominal: number): number[] {
   if (nominal > lo && nominal < hi && !grid.includes(nominal)) grid.push(nominal);
   return grid.sort((a, b) => a - b);
 }
+
+/** Distances that differ by less than the bisection resolves are equal; inputs then keep their order. */
+const steps = (far: number): number => Math.round(far / (10 * within));
 
 const distance = (a: number, b: number): number => (a > 0 && b > 0 ? Math.abs(Math.log(a / b)) : Math.abs(a - b));

@@ -28,7 +28,7 @@ export interface Reading {
 }
 
 /** The verdict of a number between two limits; at the limit itself the physics is kept. */
-export function bandVerdict(band: Pick<Band, 'smallMatters'>, x: number, leaveOutAt: number, includeAt: number): Verdict {
+function bandVerdict(band: Pick<Band, 'smallMatters'>, x: number, leaveOutAt: number, includeAt: number): Verdict {
   const sign = band.smallMatters ? -1 : 1;
   if (sign * x >= sign * includeAt) return 'include';
   return sign * x < sign * leaveOutAt ? 'leave-out' : 'borderline';

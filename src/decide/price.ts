@@ -31,7 +31,7 @@ export interface Weighed {
 const usual = 0.02;
 
 /** Id of the number that a target asks for. */
-export const targetNode = (workings: Workings, target: Target): string => (target.place !== undefined && workings.has(`${target.quantity}@${target.place}`) ? `${target.quantity}@${target.place}` : target.quantity);
+const targetNode = (workings: Workings, target: Target): string => (target.place !== undefined && workings.has(`${target.quantity}@${target.place}`) ? `${target.quantity}@${target.place}` : target.quantity);
 
 const unitOf = (workings: Workings, id: string): string => workings.slots[workings.index.get(id) ?? -1]?.node.about.unit ?? '1';
 

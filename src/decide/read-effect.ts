@@ -187,7 +187,7 @@ function readExample(reader: Reader, node: Node): EffectExample | undefined {
 }
 
 /** Verdicts that a rule can give. */
-export function possible(rule: EffectRule): Set<Verdict> {
+function possible(rule: EffectRule): Set<Verdict> {
   const out = new Set<Verdict>();
   for (const b of rule.branches) {
     if (b.band === undefined) out.add(b.verdict ?? 'undecided');

@@ -87,7 +87,7 @@ function placesOf(workings: Workings, rule: EffectRule): readonly (string | unde
 }
 
 /** All conditions of a branch. */
-export const conditionsOf = (b: Branch): Condition[] => [b.when, b.includeIf, b.leaveOutIf, b.atLeastBorderlineIf, b.atMostBorderlineIf, ...b.price.map((p) => p.when)].filter((c): c is Condition => c !== undefined);
+const conditionsOf = (b: Branch): Condition[] => [b.when, b.includeIf, b.leaveOutIf, b.atLeastBorderlineIf, b.atMostBorderlineIf, ...b.price.map((p) => p.when)].filter((c): c is Condition => c !== undefined);
 
 /** Whether a rule reads other decisions. */
 function restsOnOthers(rule: EffectRule): boolean {

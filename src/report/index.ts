@@ -1,2 +1,4 @@
 export { compareText } from './compare.ts';
 export { gridsDocument, gridsText } from './grids.ts';
+export { choiceRuleText, effectRuleText, rulesListText } from './rules.ts';
+export { referenceCsv, referenceDocument, referenceList, referenceText } from './reference.ts';

@@ -19,7 +19,7 @@ type Rule = Record<string, unknown>;
 const text = (rule: Rule): string => JSON.stringify(rule, null, 2);
 const problemsOf = (source: string, pack = false): readonly ProblemData[] => {
   try {
-    compileRules([{ path: 'buoyancy.json', text: source }], known, undefined, pack);
+    compileRules([{ file: 'buoyancy.json', text: source }], known, undefined, pack);
     return [];
   } catch (error) {
     if (error instanceof Problem) return error.list;
@@ -34,7 +34,7 @@ const branch = (more: Rule, without: string[] = []): Rule => {
 
 describe('rule files', () => {
   it('accepts the form and leaves plain JSON', () => {
-    const rules = compileRules([{ path: 'buoyancy.json', text: text(good) }], known);
+    const rules = compileRules([{ file: 'buoyancy.json', text: text(good) }], known);
     expect(rules.effects['buoyancy']?.branches[0]?.band).toEqual({ deciding: 'richardson', leaveOutAt: 0.1, includeAt: 1, magnitude: false, smallMatters: false, bounds: [] });
     expect(JSON.parse(JSON.stringify(rules))).toEqual(rules);
   });
@@ -115,12 +115,12 @@ describe('rule files', () => {
   });
 
   it('lets a pack add its own ids and override ours', () => {
-    const ours = compileRules([{ path: 'buoyancy.json', text: text(good) }], known);
-    const both = compileRules([{ path: 'p/a.json', text: text({ ...good, effect: 'sediment-load' }) }, { path: 'p/b.json', text: text({ ...good, title: 'ours, stricter' }) }], known, ours, true);
+    const ours = compileRules([{ file: 'buoyancy.json', text: text(good) }], known);
+    const both = compileRules([{ file: 'p/a.json', text: text({ ...good, effect: 'sediment-load' }) }, { file: 'p/b.json', text: text({ ...good, title: 'ours, stricter' }) }], known, ours, true);
     expect(Object.keys(both.effects)).toEqual(['buoyancy', 'sediment-load']);
     expect(both.effects['buoyancy']?.title).toBe('ours, stricter');
     expect(problemsOf(text({ ...good, effect: 'sediment-load' })).map((p) => p.code)).toEqual(['unknown-decision']);
-    expect(() => compileRules([{ path: 'a.json', text: text(good) }, { path: 'b.json', text: text(good) }], known)).toThrow(/second file/);
+    expect(() => compileRules([{ file: 'a.json', text: text(good) }, { file: 'b.json', text: text(good) }], known)).toThrow(/second file/);
   });
 
   it('checks the options of a choice', () => {

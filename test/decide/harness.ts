@@ -13,7 +13,7 @@ export function graph(definitions: readonly Definition[], given: Readonly<Record
 
 /** A rule pack from objects, without asking for examples: each gets those that its form demands. */
 export function pack(...rules: readonly Record<string, unknown>[]): CompiledRules {
-  return compileRules(rules.map((rule, k) => ({ path: `${k}.json`, text: JSON.stringify(withExamples(rule)) })), undefined, undefined, true);
+  return compileRules(rules.map((rule, k) => ({ file: `${k}.json`, text: JSON.stringify(withExamples(rule)) })), undefined, undefined, true);
 }
 
 function withExamples(rule: Record<string, unknown>): Record<string, unknown> {

@@ -6,7 +6,7 @@ const files = readRuleFolder('rules');
 const known = everyFact();
 
 describe('every rule file', () => {
-  it.each(files)('$path stands in the form, and its examples give what they say', (file) => {
+  it.each(files)('$file stands in the form, and its examples give what they say', (file) => {
     try {
       const rules = compileRules([file], known);
       for (const { example, expected, got } of exampleOutcomes(rules)) expect(got, `example ${example}`).toBe(expected);
@@ -16,9 +16,9 @@ describe('every rule file', () => {
     }
   });
   it('is called after what it decides', () => {
-    for (const { path, text } of files) {
+    for (const { file, text } of files) {
       const rule = JSON.parse(text) as { effect?: string; choice?: string };
-      expect(path.split('/').at(-1)).toBe(`${rule.effect ?? rule.choice}.json`);
+      expect(file.split('/').at(-1)).toBe(`${rule.effect ?? rule.choice}.json`);
       expect(rule.effect === undefined ? choiceIds : effectIds).toContain(rule.effect ?? rule.choice);
     }
   });
