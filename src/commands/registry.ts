@@ -14,4 +14,5 @@ export const COMMANDS: Readonly<Record<string, Entry>> = {
   convert: { summary: 'a quantity in another unit', load: () => import('./convert.ts') },
   template: { summary: 'a commented case file to fill in', load: () => import('./template.ts') },
   schema: { summary: 'JSON Schema of the case file, for editors', load: () => import('./schema.ts') },
+  material: { summary: 'properties of a material with source, range and uncertainty', load: () => import('./material.ts') },
 };

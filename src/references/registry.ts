@@ -2,8 +2,8 @@ import { nearestName, Problem } from '../problems/index.ts';
 import * as all from './all.ts';
 import type { Reference } from './define.ts';
 
-/** Every known answer, one export line of all.ts each. */
-export const references: readonly Reference[] = Object.values(all);
+/** Every known answer, one export line of all.ts each, by name. */
+export const references: readonly Reference[] = Object.values(all).toSorted((a, b) => (a.id < b.id ? -1 : 1));
 
 /**
  * A known answer by its name.

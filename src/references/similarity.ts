@@ -1,4 +1,4 @@
-import { at, brent, march } from './kernels/index.ts';
+import { at, brent, integrate, march } from './kernels/index.ts';
 
 /** Shear at the wall of the layer on a plate, f''(0) of f''' + f f''/2 = 0 (Boyd, Exp. Math. 8 (1999) 381-394). */
 export const blasiusShear = 0.332057336215196;
@@ -58,14 +58,7 @@ export function plateHeat(prandtl: number): number {
 function gaussTail(prandtl: number, end: number, value: number): number {
   // Integral from the end of value exp(-Pr [(s - c)^2 - (end - c)^2]/4), c the displacement.
   const a = Math.sqrt(prandtl) / 2, z = a * (end - blasiusDisplacement);
-  let sum = 0;
-  const steps = 400, far = 8 / Math.max(1, z) + 4;
-  const integrand = (t: number): number => Math.exp(-t * (2 * z + t));
-  for (let i = 0; i < steps; i++) {
-    const t0 = (far * i) / steps, t1 = (far * (i + 1)) / steps;
-    sum += ((t1 - t0) / 6) * (integrand(t0) + 4 * integrand((t0 + t1) / 2) + integrand(t1));
-  }
-  return (value * sum) / a;
+  return (value / a) * integrate((t) => Math.exp(-t * (2 * z + t)), 0, 8 / Math.max(1, z) + 4, 20);
 }
 
 /**

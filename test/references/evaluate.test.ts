@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { Problem } from '../../src/problems/index.ts';
-import { evaluateReference, findReference, references, unknownInputs } from '../../src/references/index.ts';
+import { unknownInputs } from '../../src/references/evaluate.ts';
+import { evaluateReference, findReference, references } from '../../src/references/index.ts';
 
 describe('evaluation', () => {
   it('leaves out what lacks an input and names it', () => {

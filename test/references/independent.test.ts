@@ -1,6 +1,6 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
-import { besselJ, ellipticE, erf, erfc, erfcScaled, pchip } from '../../src/references/kernels/index.ts';
+import { besselJ, erf, erfc, erfcScaled, pchip } from '../../src/references/kernels/index.ts';
 import { evaluateReference, findReference } from '../../src/references/index.ts';
 
 interface Row { reference: string; given: Record<string, number>; value: string; expected: number; tolerance: number }
@@ -9,7 +9,7 @@ interface Kernel { kernel: string; args: number[]; expected: number; tolerance: 
 const { rows, kernels } = JSON.parse(readFileSync(new URL('independent.json', import.meta.url), 'utf8')) as { rows: Row[]; kernels: Kernel[] };
 
 const curve = pchip([0, 1, 2.5, 3, 5], [1, 2, 2.1, 0.3, 0.4]);
-const functions: Readonly<Record<string, (...x: number[]) => number>> = { erf, erfc, erfcScaled, besselJ, ellipticE, pchip: curve };
+const functions: Readonly<Record<string, (...x: number[]) => number>> = { erf, erfc, erfcScaled, besselJ, pchip: curve };
 
 describe('kernels against a library', () => {
   it.each(kernels)('$kernel $args', ({ kernel, args, expected, tolerance }) => {

@@ -3,4 +3,4 @@ export { brent } from './brent.ts';
 export { march } from './ode.ts';
 export { pchip } from './pchip.ts';
 export { integrate } from './quadrature.ts';
-export { besselJ, ellipticE, erf, erfc, erfcScaled } from './special.ts';
+export { besselJ, erf, erfc, erfcScaled } from './special.ts';

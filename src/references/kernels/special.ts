@@ -59,21 +59,3 @@ export function besselJ(order: number, x: number): number {
   }
   return sum / points;
 }
-
-/**
- * Complete elliptic integral of the second kind, by the arithmetic-geometric mean.
- *
- * @param m  parameter (square of the modulus), 0 .. 1
- * @returns  E(m)
- * @source   Abramowitz and Stegun 17.6
- */
-export function ellipticE(m: number): number {
-  if (m === 1) return 1;
-  let a = 1, b = Math.sqrt(1 - m), c = Math.sqrt(m), sum = (c * c) / 2, power = 1;
-  while (Math.abs(c) > 1e-16) {
-    [a, b, c] = [(a + b) / 2, Math.sqrt(a * b), (a - b) / 2];
-    sum += power * c * c;
-    power *= 2;
-  }
-  return (Math.PI / (2 * a)) * (1 - sum);
-}
