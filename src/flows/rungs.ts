@@ -1,4 +1,4 @@
-import { evaluateReference, references } from '../references/index.ts';
+import { referenceNumber, references } from '../references/index.ts';
 import { quantity, type Definition, type Way } from '../workings/index.ts';
 import type { Flow, Rung } from './define.ts';
 
@@ -31,18 +31,24 @@ export function rungDefinitions(flow: Flow): Definition[] {
     const answer = ref?.values.find((v) => v.id === rung.compares);
     if (ref === undefined || answer === undefined) return [];
     // Only what is mapped, or carries the name of a quantity of the case, is filled in; the rest keeps the default of the reference.
-    const pairs = Object.entries(rung.with);
-    const scatter = typeof answer.uncertainty === 'number' ? answer.uncertainty : ref.uncertainty;
+    const pairs = Object.entries(rung.with).filter(([, from]) => !isNumber(from));
+    const fixed = Object.fromEntries(Object.entries(rung.with).filter(([, from]) => isNumber(from)).map(([need, from]) => [need, Number(from)]));
+    const own = answer.uncertainty ?? ref.uncertainty;
+    const at = (of: Readonly<Record<string, number>>): ReturnType<typeof referenceNumber> => referenceNumber(ref, rung.compares, { ...fixed, ...Object.fromEntries(pairs.map(([need, from]) => [need, of[from]])) });
+    const scatter = typeof own === 'function' ? (of: Readonly<Record<string, number>>): number => at(of)?.uncertainty ?? ref.uncertainty : own;
     const w: Way = {
       needs: pairs.map(([, from]) => from),
-      value: (of) => evaluateReference(ref, Object.fromEntries(pairs.map(([need, from]) => [need, of[from]]))).values.find((v) => v.id === rung.compares)?.value ?? Number.NaN,
+      value: (of) => at(of)?.value ?? Number.NaN,
       formula: answer.formula,
       source: `reference ${ref.id}: ${ref.source}`,
       range: Object.fromEntries(pairs.flatMap(([need, from]) => { const range = ref.needs.find((n) => n.id === need)?.range; return range === undefined ? [] : [[from, range]]; })),
-      ...(scatter > 0 ? { scatter } : {}),
+      ...(scatter === 0 ? {} : { scatter }),
       ...(rung.when === undefined ? {} : { when: rung.when }),
       dimensional: 'a reference may hold constants with units',
     };
     return [quantity(id, { symbol: answer.id, name: `${answer.name} of the rung`, unit: answer.unit, signed: answer.unit === 'K' }, [w])];
   });
 }
+
+/** A rung may fix a need by a number, where the reference is known there only. */
+const isNumber = (text: string): boolean => Number.isFinite(Number(text));

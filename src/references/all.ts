@@ -48,3 +48,6 @@ export { movingWallStart } from './moving-wall-start.ts';
 export { oscillatingWall } from './oscillating-wall.ts';
 export { kovasznay } from './kovasznay.ts';
 export { advectionDiffusionLine } from './advection-diffusion-line.ts';
+export { slipPipe } from './slip-pipe.ts';
+export { slipChannel } from './slip-channel.ts';
+export { manufacturedSolution } from './manufactured-solution.ts';

@@ -52,21 +52,7 @@ class Missing {
  * @returns      values with their spread, tables, what is missing, flags and problems; it never throws
  */
 export function evaluateReference(ref: Reference, given: Readonly<Record<string, number | undefined>>, what: 'all' | 'values' = 'all'): Evaluation {
-  const inputs: Record<string, number> = {};
-  const flags: string[] = [];
-  const problems: ProblemData[] = [];
-  for (const need of ref.needs) {
-    const value = Object.hasOwn(given, need.id) ? given[need.id] : undefined;
-    if (value === undefined && need.default !== undefined) flags.push(`${need.id} taken as ${String(need.default)}${unitText(need.unit)}`);
-    const used = value ?? need.default;
-    if (used === undefined) continue;
-    const wrong = impossible(need, used);
-    if (wrong) problems.push(wrong);
-    else {
-      inputs[need.id] = used;
-      if (need.range && (used < need.range[0] || used > need.range[1])) flags.push(`${need.id} = ${short(used)} is outside ${short(need.range[0])} .. ${short(need.range[1])}${unitText(need.unit)}, where ${ref.id} holds`);
-    }
-  }
+  const { inputs, flags, problems } = checked(ref, given);
   const reader = guarded(ref.needs, inputs);
   const values: EvaluatedValue[] = [];
   const tables: EvaluatedTable[] = [];
@@ -83,8 +69,7 @@ export function evaluateReference(ref: Reference, given: Readonly<Record<string,
     attempt(answer.id, () => {
       const value = answer.value(reader);
       if (value === undefined) return;
-      const own = answer.uncertainty ?? ref.uncertainty;
-      const uncertainty = typeof own === 'function' ? own(reader) : own;
+      const uncertainty = spreadOf(ref, answer.uncertainty, reader);
       if (!Number.isFinite(value)) {
         problems.push({ code: 'not-finite', message: `${ref.id} has no finite ${answer.name} for these inputs` });
         return;
@@ -107,6 +92,28 @@ export function evaluateReference(ref: Reference, given: Readonly<Record<string,
 }
 
 /**
+ * One number of a known answer, for those who ask again and again.
+ *
+ * @param ref    the reference
+ * @param id     the number's id in it
+ * @param given  SI numbers by id
+ * @returns      the number in SI with its relative 95 % half-width; undefined where the reference has none for these inputs
+ */
+export function referenceNumber(ref: Reference, id: string, given: Readonly<Record<string, number | undefined>>): { readonly value: number; readonly uncertainty: number } | undefined {
+  const answer = ref.values.find((one) => one.id === id);
+  const reader = guarded(ref.needs, checked(ref, given).inputs);
+  try {
+    const value = answer?.value(reader);
+    return value !== undefined && Number.isFinite(value) ? { value, uncertainty: spreadOf(ref, answer?.uncertainty, reader) } : undefined;
+  } catch (error) {
+    if (error instanceof Missing) return undefined;
+    throw error;
+  }
+}
+
+const spreadOf = (ref: Reference, own: Reference['values'][number]['uncertainty'], reader: Readonly<Record<string, number>>): number => (typeof own === 'function' ? own(reader) : (own ?? ref.uncertainty));
+
+/**
  * Names among the inputs that the reference does not know.
  *
  * @param ref  the reference
@@ -119,6 +126,25 @@ export function unknownInputs(ref: Reference, ids: readonly string[]): ProblemDa
     const nearest = nearestName(id, known);
     return { code: 'unknown-input', message: `"${id}" is no input of ${ref.id}`, expected: known.length === 0 ? 'no inputs: its numbers are constants' : `one of ${known.join(', ')}`, ...(nearest === undefined ? {} : { nearest }) };
   });
+}
+
+function checked(ref: Reference, given: Readonly<Record<string, number | undefined>>): { inputs: Record<string, number>; flags: string[]; problems: ProblemData[] } {
+  const inputs: Record<string, number> = {};
+  const flags: string[] = [];
+  const problems: ProblemData[] = [];
+  for (const need of ref.needs) {
+    const value = Object.hasOwn(given, need.id) ? given[need.id] : undefined;
+    if (value === undefined && need.default !== undefined) flags.push(`${need.id} taken as ${String(need.default)}${unitText(need.unit)}`);
+    const used = value ?? need.default;
+    if (used === undefined) continue;
+    const wrong = impossible(need, used);
+    if (wrong) problems.push(wrong);
+    else {
+      inputs[need.id] = used;
+      if (need.range && (used < need.range[0] || used > need.range[1])) flags.push(`${need.id} = ${short(used)} is outside ${short(need.range[0])} .. ${short(need.range[1])}${unitText(need.unit)}, where ${ref.id} holds`);
+    }
+  }
+  return { inputs, flags, problems };
 }
 
 function guarded(needs: readonly Need[], inputs: Readonly<Record<string, number>>): Readonly<Record<string, number>> {

@@ -18,6 +18,7 @@ export const halfSpaceStep = reference('half-space-step', {
     diffusivity, conductivity, time, { id: 'depth', unit: 'm', name: 'depth below the surface', sign: 'not-negative' }, transfer,
   ],
   values: [
+    { id: 'penetrationFactor', name: 'depth that 1 % of the change has reached, over sqrt(alpha t)', unit: '1', formula: 'erfc(x/2) = 0.01', value: () => 3.6427727, uncertainty: 1e-7 },
     { id: 'temperatureRatio', name: 'share of the surface change that has arrived at the depth', unit: '1', formula: 'erfc(x/(2 sqrt(alpha t)))', value: (g) => erfc(g.depth / (2 * Math.sqrt(g.thermalDiffusivity * g.time))) },
     { id: 'temperature', name: 'temperature at the depth', unit: 'K', formula: 'T = T_i + (T_w - T_i) erfc(x/(2 sqrt(alpha t)))', value: (g) => g.startTemperature + (g.wallTemperature - g.startTemperature) * erfc(g.depth / (2 * Math.sqrt(g.thermalDiffusivity * g.time))) },
     { id: 'wallHeatFlux', name: 'heat flux into the body at the surface', unit: 'W/m^2', formula: 'q = k (T_w - T_i)/sqrt(pi alpha t)', value: (g) => (g.thermalConductivity * (g.wallTemperature - g.startTemperature)) / Math.sqrt(Math.PI * g.thermalDiffusivity * g.time) },

@@ -1,5 +1,5 @@
 export type { Column, Need, Reference } from './define.ts';
-export { evaluateReference, type EvaluatedTable, type EvaluatedValue, type Evaluation } from './evaluate.ts';
+export { evaluateReference, referenceNumber, type EvaluatedTable, type EvaluatedValue, type Evaluation } from './evaluate.ts';
 export { readGiven } from './given.ts';
 export { findReference, references } from './registry.ts';
 export { pchip } from './kernels/index.ts';

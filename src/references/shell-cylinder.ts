@@ -17,6 +17,7 @@ export const shellCylinder = reference('shell-cylinder', {
     { id: 'temperatureDifference', unit: 'K', name: 'inner minus outer surface temperature', sign: 'any' }, conductivity,
   ],
   values: [
+    { id: 'heatFactor', name: 'heat per length times ln(r2/r1), over k dT', unit: '1', formula: "Q' ln(r2/r1)/(k dT) = 2 pi", value: () => 2 * Math.PI },
     { id: 'heatPerLength', name: 'heat per length through the shell', unit: 'W/m', formula: '2 pi k dT/ln(r2/r1)', value: (g) => (2 * Math.PI * g.thermalConductivity * g.temperatureDifference) / Math.log(g.outerRadius / g.innerRadius) },
   ],
   tables: [

@@ -17,6 +17,7 @@ export const shellSphere = reference('shell-sphere', {
     { id: 'temperatureDifference', unit: 'K', name: 'inner minus outer surface temperature', sign: 'any' }, conductivity,
   ],
   values: [
+    { id: 'heatFactor', name: 'heat times (1/r1 - 1/r2), over k dT', unit: '1', formula: 'Q (1/r1 - 1/r2)/(k dT) = 4 pi', value: () => 4 * Math.PI },
     { id: 'nusselt', name: 'Nusselt number on the diameter of a sphere in an endless medium at rest', unit: '1', formula: 'Nu = 2', value: () => 2 },
     { id: 'heatRate', name: 'heat through the shell', unit: 'W', formula: '4 pi k dT/(1/r1 - 1/r2)', value: (g) => (4 * Math.PI * g.thermalConductivity * g.temperatureDifference) / (1 / g.innerRadius - 1 / g.outerRadius) },
   ],

@@ -24,7 +24,7 @@ export const turbulentPipe = reference('turbulent-pipe', {
   passLimit: 0.05,
   ifMissed: 'length of the development, or periodic ends; first cell and wall law; turbulent Prandtl number for heat',
   notes: ['The heat law holds for pipes of any wall condition within its scatter at Pr above 0.5; a liquid metal needs another.', 'At Re 1e6 the two friction laws differ by 2 %.'],
-  flows: ['pipe'],
+  flows: ['pipe', 'duct'],
   needs: [{ ...reynolds, range: [4000, 3.5e7] }, { ...prandtl, range: [0.5, 2000] }, { ...speed, name: 'mean speed' }, { ...length, name: 'diameter' }, { id: 'density', unit: 'kg/m^3', name: 'density' }],
   values: [
     { id: 'frictionFactorDarcy', name: 'Darcy friction factor', unit: '1', formula: '1/sqrt(f) = -2 log10(2.51/(Re sqrt(f))) to Re 1e6; 1/sqrt(f) = 1.930 log10(Re sqrt(f)) - 0.537 above', value: (g) => smooth(g.reynolds) },

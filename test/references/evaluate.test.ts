@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { Problem } from '../../src/problems/index.ts';
 import { unknownInputs } from '../../src/references/evaluate.ts';
-import { evaluateReference, findReference, references } from '../../src/references/index.ts';
+import { evaluateReference, findReference, referenceNumber, references } from '../../src/references/index.ts';
 
 describe('evaluation', () => {
   it('leaves out what lacks an input and names it', () => {
@@ -51,6 +51,13 @@ describe('evaluation', () => {
     for (const v of evaluateReference(findReference('lid-driven-square'), { reynolds: 1000 }).values) expect(v.low).toBeLessThanOrEqual(v.high);
   });
   it('ignores inherited names among the inputs', () => expect(evaluateReference(findReference('kovasznay'), Object.create({ reynolds: 20 }) as Record<string, number>).inputs).toEqual({ reynolds: 40 }));
+  it('gives one number alone, or none', () => {
+    const pipe = findReference('poiseuille-pipe');
+    expect(referenceNumber(pipe, 'frictionFactorDarcy', { reynolds: 100 })).toEqual({ value: 0.64, uncertainty: 0 });
+    expect(referenceNumber(pipe, 'frictionFactorDarcy', {})).toBeUndefined();
+    expect(referenceNumber(pipe, 'frictionFactorDarcy', { reynolds: -1 })).toBeUndefined();
+    expect(referenceNumber(pipe, 'nusselt', {})).toBeUndefined();
+  });
   it('says so where it holds no number', () => expect(evaluateReference(findReference('cylinder-free-stream'), { reynolds: 45 }).problems[0]?.code).toBe('no-answer'));
   it('names the nearest reference and the nearest input', () => {
     expect(() => findReference('graetz-pip')).toThrowError(Problem);
