@@ -78,9 +78,12 @@ describe('evaluation', () => {
   it('is fast: a plan asks some six of them', () => {
     const given = { reynolds: 1000, prandtl: 7, graetz: 50, peclet: 7000, grashofFluxOverReynolds: 30 };
     const six = ['poiseuille-pipe', 'developed-heat-pipe', 'graetz-pipe', 'mixed-convection-pipe', 'turbulent-pipe', 'slab-steady'].map(findReference);
-    for (const ref of six) evaluateReference(ref, given);
-    const start = performance.now();
-    for (let i = 0; i < 10; i++) for (const ref of six) evaluateReference(ref, given);
-    expect((performance.now() - start) / 10).toBeLessThan(10);
+    // Best of twenty, since other work shares the machine.
+    const times = Array.from({ length: 20 }, () => {
+      const start = performance.now();
+      for (const ref of six) evaluateReference(ref, given, 'values');
+      return performance.now() - start;
+    });
+    expect(Math.min(...times)).toBeLessThan(5);
   });
 });
