@@ -91,7 +91,7 @@ function unknown(name: string, key: string, collection: Collection): Problem {
   return new Problem({
     code: 'unknown-material',
     message: `"${shown}" is not a material of the collection`,
-    expected: `one of ${materialNames(collection).join(', ')}; or give the fluid's properties instead of a material`,
+    expected: named === undefined ? `one of ${materialNames(collection).join(', ')}; or the properties themselves` : 'a material by name, alias or formula; or the properties themselves',
     ...(named === undefined ? {} : { nearest: named.asked === undefined ? named.name : (nearest as string) }),
   });
 }

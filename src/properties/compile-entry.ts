@@ -2,7 +2,7 @@ import { unit } from '../units/index.ts';
 import { Problem } from '../problems/index.ts';
 import { propertyUnits, type Band, type Box, type Constant, type Entry, type PropertyId, type RecordCheck } from './record.ts';
 import { equationModels, propertyModels } from './registry.ts';
-import type { YamlReader } from './yaml-reader.ts';
+import { quantityText, scaled, type YamlReader } from './yaml-reader.ts';
 
 type Path = readonly (string | number)[];
 type Raw = { readonly [key: string]: unknown };
@@ -11,7 +11,7 @@ const isMap = (value: unknown): value is Raw => typeof value === 'object' && val
 const startsAsNumber = /^[-+]?[\d.]/;
 
 /** Range boxes: `{ T: [..], p: [..], composition: [..] }`, one or a list. */
-export function readRanges(reader: YamlReader, path: Path, given: unknown): Box[] {
+function readRanges(reader: YamlReader, path: Path, given: unknown): Box[] {
   const list = given === undefined ? [] : Array.isArray(given) ? given : [given];
   return list.map((raw, i) => {
     const at = Array.isArray(given) ? [...path, i] : path;
@@ -78,9 +78,9 @@ function readConstant(reader: YamlReader, path: Path, key: string | number, give
   const asUnit = key === 'gives' || key === 'argument';
   if (!asUnit && !startsAsNumber.test(given)) return given;
   try {
-    const match = /^([-+]?(?:\d+\.?\d*|\.\d+)(?:[eE][-+]?\d+)?)\s*(.*)$/.exec(given);
+    const match = quantityText.exec(given);
     const { factor, offset } = unit(asUnit ? given : (match?.[2] ?? given));
-    return asUnit ? { factor, offset } : Number(match?.[1]) * factor + offset;
+    return asUnit ? { factor, offset } : scaled(Number(match?.[1]), factor, offset);
   } catch (error) {
     if (!(error instanceof Problem)) throw error;
     reader.complain(path, { code: 'wrong-quantity', message: `"${given}": ${error.list[0]?.message ?? ''}` });

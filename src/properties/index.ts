@@ -1,11 +1,14 @@
 export { loadMaterial, materialNames, materialRecords, shippedMaterials, withMaterialsFrom } from './collection.ts';
 export { compileMaterial, compileMaterials } from './compile.ts';
+export { stateOf } from './complete-state.ts';
 export { type Law, laws, type Laws } from './laws.ts';
 export type { Material } from './material.ts';
+export { propertyNames } from './names-of-properties.ts';
 export { parseRange, parseState, type StateRange } from './parse-state.ts';
 export { phaseAt, type PhaseAt, type Saturation, saturationOf } from './phase.ts';
-export { boxText, propertyAt, propertyIn, type PropertyValue, takeState, type TakenState } from './property.ts';
+export { boxText, emissivities, propertyAt, propertyIn, type PropertyValue, takeState, type TakenState } from './property.ts';
 export { type Box, type Collection, type MaterialRecord, type Phase, type PropertyId, propertyUnits } from './record.ts';
-export { type State, stateOf, type StateText } from './state.ts';
+export { propertySheet, type PropertySheet } from './sheet.ts';
+export type { State, StateText } from './state.ts';
 export { type StoredFile, storedMaterials } from './stored.ts';
 export { type PropertyTable, tableOver, type TableRow } from './table-over.ts';

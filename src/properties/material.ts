@@ -54,7 +54,7 @@ export const fromEquation = {
   isentropicExponent: (at) => (at.density * at.speedOfSound * at.speedOfSound) / at.pressure,
 } satisfies { [property: string]: (at: Point, gasConstant: number) => number };
 
-export const gasConstantMolar = 8.31446261815324;
+const gasConstantMolar = 8.31446261815324;
 
 const within = (range: readonly [number, number] | undefined, x: number): boolean => range === undefined || (x >= range[0] * (1 - 1e-9) && x <= range[1] * (1 + 1e-9));
 
@@ -74,7 +74,7 @@ export function insideAny(boxes: readonly Box[], s: Sample): boolean {
  * @param collection  where partner materials are found (humid air is made of air and water)
  * @returns           the engine; nothing is computed yet
  */
-export function engineOf(record: MaterialRecord, collection: Collection): MaterialEngine {
+function engineOf(record: MaterialRecord, collection: Collection): MaterialEngine {
   const built = new Map<Entry, (s: Sample) => number>();
   let composition = 0;
   let equation: Engine['equation'] | null = null;

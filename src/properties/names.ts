@@ -14,7 +14,7 @@ export const plainName = (name: string): string => name.trim().toLowerCase().rep
  * @param record  the record
  * @returns       plain name to what it stands for
  */
-export function namesOf(record: MaterialRecord): { [plain: string]: NamedMaterial } {
+function namesOf(record: MaterialRecord): { [plain: string]: NamedMaterial } {
   const { id, name } = record;
   const names: { [plain: string]: NamedMaterial } = {};
   for (const one of [id, name, ...record.aliases, ...(record.formula === undefined ? [] : [record.formula])]) names[plainName(one)] = { id, name };

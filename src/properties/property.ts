@@ -18,6 +18,8 @@ export interface PropertyValue {
   readonly phase: Phase;
   readonly flags: readonly string[];
   readonly notes?: string;
+  /** The properties it is formed from, for a derived one. */
+  readonly of?: readonly PropertyId[];
 }
 
 /** A state taken in one phase: asked once, it serves all properties. */
@@ -67,6 +69,18 @@ export function propertyAt(material: Material, property: PropertyId, state: Stat
   return propertyIn(material, property, takeState(material, state));
 }
 
+/**
+ * Emissivities of a solid, one for each surface that its record knows.
+ *
+ * @param material  the solid
+ * @param T         temperature [K]
+ * @returns         values with their surface in `notes`; empty where the record has none
+ */
+export function emissivities(material: Material, T: number): PropertyValue[] {
+  const taken: TakenState = { sample: { T, p: 101325, side: 'liquid', x: 0 }, phase: 'solid', solid: true, flags: [] };
+  return (material.record.properties['emissivity'] ?? []).map((entry) => finished(material, 'emissivity', material.engine.evaluate(entry, taken.sample), entry, taken));
+}
+
 /** As `propertyAt`, for a state already taken. */
 export function propertyIn(material: Material, property: PropertyId, taken: TakenState): PropertyValue | undefined {
   const { sample, phase, solid } = taken;
@@ -92,6 +106,8 @@ export function propertyIn(material: Material, property: PropertyId, taken: Take
   return undefined;
 }
 
+const noteOf = (entry: Entry): string | undefined => (entry.surface === undefined ? entry.notes : `surface: ${entry.surface}`);
+
 const plain = (value: number, phase: Phase, source: string): PropertyValue => ({ value, uncertainty: 1e-5, source, withinRange: true, range: {}, phase, flags: [] });
 
 function finished(material: Material, property: string, value: number, entry: Entry, taken: TakenState): PropertyValue {
@@ -108,16 +124,16 @@ function finished(material: Material, property: string, value: number, entry: En
     range: shown,
     phase: taken.phase,
     flags: within ? taken.flags : [...taken.flags, `${property} of ${material.name} is carried beyond its range ${entry.ranges.map(boxText).join(' or ')}`],
-    ...(entry.notes === undefined ? {} : { notes: entry.notes }),
+    ...(noteOf(entry) === undefined ? {} : { notes: noteOf(entry) as string }),
   };
 }
 
-/** A range as text: `273.15 K to 623.15 K, up to 100 MPa`. */
+/** A range as text: `273.15 K to 623.15 K, up to 1000 bar`. */
 export function boxText(box: Box): string {
   const n = (x: number): string => String(Number(x.toPrecision(6)));
   const parts = [
     ...(box.temperature === undefined ? [] : [`${n(box.temperature[0])} K to ${n(box.temperature[1])} K`]),
-    ...(box.pressure === undefined ? [] : [`${n(box.pressure[0] / 1e5)} bar to ${n(box.pressure[1] / 1e5)} bar`]),
+    ...(box.pressure === undefined ? [] : [box.pressure[0] === 0 ? `up to ${n(box.pressure[1] / 1e5)} bar` : `${n(box.pressure[0] / 1e5)} bar to ${n(box.pressure[1] / 1e5)} bar`]),
     ...(box.composition === undefined ? [] : [`${n(box.composition[0] * 100)} % to ${n(box.composition[1] * 100)} %`]),
   ];
   return parts.length === 0 ? 'any state' : parts.join(', ');
@@ -147,7 +163,7 @@ function combine(material: Material, taken: TakenState, factors: readonly (reado
     range = narrower(range, one.range);
     within &&= one.withinRange;
   }
-  return { value, uncertainty: Math.sqrt(square), source: [...sources].join('; '), withinRange: within, range, phase: taken.phase, flags: [...flags] };
+  return { value, uncertainty: Math.sqrt(square), source: [...sources].join('; '), withinRange: within, range, phase: taken.phase, flags: [...flags], of: factors.map(([id]) => id) };
 }
 
 function narrower(a: Box, b: Box): Box {

@@ -3,7 +3,8 @@ import type { Material } from './material.ts';
 import type { StateRange } from './parse-state.ts';
 import { propertyIn, takeState, type PropertyValue } from './property.ts';
 import type { PropertyId } from './record.ts';
-import { stateOf, type State } from './state.ts';
+import { stateOf } from './complete-state.ts';
+import type { State } from './state.ts';
 
 /** One row of a property table. */
 export interface TableRow {

@@ -13,7 +13,11 @@ export interface YamlReader {
   finish(): void;
 }
 
-const quantityText = /^([-+]?(?:\d+\.?\d*|\.\d+)(?:[eE][-+]?\d+)?)\s*(.*)$/;
+/** A number and what follows it. */
+export const quantityText = /^([-+]?(?:\d+\.?\d*|\.\d+)(?:[eE][-+]?\d+)?)\s*(.*)$/;
+
+/** A number in SI, without the last digit's dust of the conversion. */
+export const scaled = (value: number, factor: number, offset: number): number => Number((value * factor + offset).toPrecision(15));
 
 /**
  * Opens a YAML text.
@@ -51,7 +55,7 @@ export function yamlReader(text: string, file: string): YamlReader {
         const found = unit(match[2]!);
         const wanted = unit(inUnit);
         if (found.dimension.some((e, i) => e !== wanted.dimension[i])) complain(path, { code: 'wrong-dimension', message: `"${shown(given)}" is not in a unit of ${inUnit}`, expected });
-        return Number(match[1]) * found.factor + found.offset;
+        return scaled(Number(match[1]), found.factor, found.offset);
       } catch (error) {
         if (!(error instanceof Problem)) throw error;
         complain(path, { code: 'wrong-quantity', message: `"${shown(given)}": ${error.list[0]?.message ?? ''}`, expected });

@@ -1,0 +1,49 @@
+import { Problem } from '../problems/index.ts';
+import { loadMaterial, materialNames, parseRange, parseState, propertySheet, shippedMaterials, stateOf, tableOver, withMaterialsFrom } from '../properties/index.ts';
+import { materialCsv, materialDocument, materialTableDocument, materialTableText, materialText, wrapped } from '../report/index.ts';
+import { Args, Base, Flags } from './base.ts';
+
+/** `runbrief material`: properties of a material at a state or over a range. */
+export default class Material extends Base {
+  static override examples = [
+    { command: 'runbrief material water --at "60 degC, 2 bar"', description: 'every property with source, range and uncertainty' },
+    { command: 'runbrief material steam --at "6 bar, saturated vapour"', description: 'a saturated state' },
+    { command: 'runbrief material "humid air" --at "20 degC, 1 atm, humidity 60 %"', description: 'air with its moisture' },
+    { command: 'runbrief material water --over "20 degC .. 90 degC, 2 bar" --table', description: 'a table as CSV' },
+    { command: 'runbrief material', description: 'the names of all materials' },
+  ];
+
+  static override args = { name: Args.string({ description: 'name, alias or formula; without it all materials are listed' }) };
+
+  static override flags = {
+    at: Flags.string({ helpValue: 'STATE', description: 'temperature and pressure, or one of them with "saturated liquid" or "saturated vapour"; humidity or composition where the material takes them', exclusive: ['over'] }),
+    over: Flags.string({ helpValue: 'RANGE', description: 'a state of which one number is a range' }),
+    table: Flags.boolean({ description: 'the range as CSV with all properties', dependsOn: ['over'] }),
+    points: Flags.integer({ default: 15, min: 2, max: 2000, helpValue: 'N', description: 'rows of a range' }),
+    materials: Flags.string({ helpValue: 'DIR', description: 'a folder with records of your own' }),
+  };
+
+  async run(): Promise<object> {
+    const { args, flags } = await this.parse(Material);
+    const collection = flags.materials === undefined ? shippedMaterials() : withMaterialsFrom(flags.materials);
+    if (args.name === undefined) {
+      const names = materialNames(collection);
+      this.say(wrapped(names.join(', '), ''));
+      return { materials: names };
+    }
+    const material = loadMaterial(args.name, collection);
+    if (flags.over !== undefined) {
+      const range = parseRange(flags.over);
+      const table = tableOver(material, range, flags.points);
+      for (const assumed of range.assumed) this.remark(`assumed: ${assumed}`);
+      if (flags.table) for (const note of table.notes) this.remark(note);
+      this.say(flags.table ? materialCsv(table) : materialTableText(material.name, table));
+      return materialTableDocument(material.name, table);
+    }
+    if (flags.at === undefined) throw new Problem({ code: 'missing-argument', message: 'a state is needed', expected: '--at "60 degC, 2 bar", --at "60 degC, saturated liquid" or --over "20 degC .. 90 degC, 2 bar"' });
+    const said = parseState(flags.at);
+    const sheet = propertySheet(material, stateOf(material, said));
+    this.say([materialText(sheet), ...said.assumed.map((one) => `  assumed: ${one}`)].join('\n'));
+    return materialDocument(sheet);
+  }
+}

@@ -1,0 +1,48 @@
+import { describe, expect, it } from 'vitest';
+import { runbrief } from './harness.ts';
+
+describe('runbrief material', () => {
+  it('prints every property with spread and source within 80 columns', async () => {
+    const { code, stdout } = await runbrief(['material', 'water', '--at', '60 degC, 2 bar']);
+    expect(code).toBe(0);
+    expect(stdout).toContain('water, liquid, at 60 degC (333.15 K), 2 bar abs');
+    expect(stdout).toMatch(/density +983\.24 kg\/m\^3 +\+\/- 0\.005 %/);
+    expect(stdout).toContain('IAPWS R12-08');
+    expect(stdout).toContain('the pressure is read as absolute');
+    for (const line of stdout.split('\n')) expect(line.length).toBeLessThanOrEqual(80);
+  });
+
+  it('gives the document of the design with --json', async () => {
+    const { stdout } = await runbrief(['material', 'H2O', '--at', '2 bar, saturated vapour', '--json']);
+    const document = JSON.parse(stdout) as { material: string; state: Record<string, unknown>; properties: Record<string, Record<string, unknown>> };
+    expect(Object.keys(document)).toEqual(['material', 'state', 'properties']);
+    expect(document.material).toBe('water');
+    expect(document.state).toEqual({ temperature: expect.closeTo(393.36, 1) as number, pressure: 2e5, phase: 'vapour' });
+    expect(Object.keys(document.properties['density']!)).toEqual(['value', 'unit', 'uncertainty', 'source', 'withinRange', 'range']);
+    expect(document.properties['density']).toMatchObject({ unit: 'kg/m^3', withinRange: true });
+    for (const id of ['density', 'viscosity', 'thermalConductivity', 'specificHeatCapacity', 'thermalExpansion', 'speedOfSound', 'kinematicViscosity', 'thermalDiffusivity', 'prandtl', 'vapourPressure', 'saturationTemperature', 'latentHeat', 'surfaceTension', 'meltingTemperature', 'molarMass']) expect(document.properties).toHaveProperty(id);
+  });
+
+  it('writes a range as CSV, remarks on stderr', async () => {
+    const { code, stdout, stderr } = await runbrief(['material', 'water', '--over', '20 degC .. 90 degC, 2 bar', '--table', '--points', '3']);
+    const lines = stdout.trimEnd().split('\n');
+    expect([code, lines.length]).toEqual([0, 4]);
+    expect(lines[0]).toContain('temperature [K],pressure [Pa],phase,density [kg/m^3]');
+    expect(lines[1]).toMatch(/^293\.15,200000,liquid,998\.25/);
+    expect(stderr).toContain('assumed');
+  });
+
+  it.each([
+    [['material', 'steam', '--at', '60 degC, 2 bar'], 1, 'a temperature above 393.36 K (120.21 degC)'],
+    [['material', 'watr', '--at', '60 degC, 2 bar'], 1, 'nearest   water'],
+    [['material', 'oil', '--at', '60 degC, 2 bar'], 1, 'engine oil, heat-transfer oil, light oil'],
+    [['material', 'water'], 2, 'a state is needed'],
+    [['material', 'water', '--over', '60 degC, 2 bar'], 1, 'the state has no range'],
+  ])('%j', async (argv, code, says) => {
+    const ended = await runbrief(argv);
+    expect([ended.code, ended.stdout]).toEqual([code, '']);
+    expect(ended.stderr).toContain(says);
+  });
+
+  it('lists the materials', async () => expect((await runbrief(['material'])).stdout).toContain('lead-bismuth eutectic'));
+});

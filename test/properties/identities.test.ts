@@ -1,0 +1,100 @@
+import { describe, expect, it } from 'vitest';
+import { laws, loadMaterial, materialRecords, phaseAt, propertyAt, saturationOf, type PropertyId } from '../../src/properties/index.ts';
+
+// What must hold between properties, whatever the correlation: derivatives against differences, definitions, round trips.
+const states = [
+  ['water', 300, 1e5], ['water', 450, 5e6], ['water', 630, 25e6], ['water', 660, 23e6], ['water', 500, 1e5], ['water', 1500, 1e6], ['water', 300, 2e8],
+  ['air', 300, 101325], ['air', 150, 5e6], ['nitrogen', 90, 1e6], ['carbon dioxide', 310, 9e6], ['carbon dioxide', 260, 5e6], ['oxygen', 200, 1e6], ['argon', 300, 1e7],
+] as const;
+
+const of = (name: string, id: PropertyId, temperature: number, pressure: number): number => propertyAt(loadMaterial(name), id, { temperature, pressure })?.value ?? Number.NaN;
+
+describe.each(states)('%s at %d K and %d Pa', (name, T, p) => {
+  const h = 1e-3 * T ** 0.5;
+
+  it('heat capacity is the slope of the enthalpy', () => {
+    const slope = (of(name, 'enthalpy', T + h, p) - of(name, 'enthalpy', T - h, p)) / (2 * h);
+    expect(of(name, 'specificHeatCapacity', T, p) / slope).toBeCloseTo(1, 4);
+  });
+
+  it('expansion is the slope of the density', () => {
+    const slope = -(of(name, 'density', T + h, p) - of(name, 'density', T - h, p)) / (2 * h * of(name, 'density', T, p));
+    // Liquid water near the atmosphere has its density scaled by up to 1.5e-5, which its expansion does not follow.
+    const off = Math.abs(of(name, 'thermalExpansion', T, p) - slope);
+    expect(off).toBeLessThan(Math.max(1e-4 * slope, name === 'water' && T < 390 ? 1.5e-6 : 0));
+  });
+
+  it('speed of sound follows from expansion, compressibility and heat capacity', () => {
+    const step = 1e-4 * p;
+    const rho = of(name, 'density', T, p);
+    const slope = (of(name, 'density', T, p + step) - of(name, 'density', T, p - step)) / (2 * step);
+    const beta = of(name, 'thermalExpansion', T, p);
+    const square = 1 / (slope - (T * beta * beta) / of(name, 'specificHeatCapacity', T, p));
+    expect(Math.abs(of(name, 'speedOfSound', T, p) / Math.sqrt(square) - 1)).toBeLessThan(rho > 100 && p < 1e6 ? 1e-3 : 1e-4);
+  });
+
+  it('derived properties keep their definitions', () => {
+    expect(of(name, 'prandtl', T, p) / (of(name, 'kinematicViscosity', T, p) / of(name, 'thermalDiffusivity', T, p))).toBeCloseTo(1, 12);
+    expect(of(name, 'kinematicViscosity', T, p) / (of(name, 'viscosity', T, p) / of(name, 'density', T, p))).toBeCloseTo(1, 12);
+  });
+});
+
+describe('saturation', () => {
+  it.each(['water', 'nitrogen', 'oxygen', 'argon', 'carbon dioxide', 'sodium', 'mercury'])('%s: boiling temperature and vapour pressure are each other\'s inverse', (name) => {
+    const line = saturationOf(loadMaterial(name))!;
+    for (const share of [0.05, 0.3, 0.6, 0.9, 0.97]) {
+      const T = line.from + share * (line.to - line.from);
+      expect(line.boiling(line.bubble(T)) / T).toBeCloseTo(1, 8);
+    }
+  });
+
+  it('a gas at low pressure has beta = 1/T and Z = 1', () => {
+    for (const name of ['air', 'nitrogen', 'argon']) {
+      expect(of(name, 'thermalExpansion', 300, 10) * 300).toBeCloseTo(1, 5);
+      expect(of(name, 'compressibilityFactor', 300, 10)).toBeCloseTo(1, 6);
+    }
+    expect(of('air', 'thermalExpansion', 250, 1e7) * 250).toBeGreaterThan(1.3); // not where it is dense
+  });
+});
+
+describe('laws', () => {
+  it('give what propertyAt gives, for every material', () => {
+    for (const record of materialRecords()) {
+      const material = loadMaterial(record.name);
+      const melting = material.meltingTemperature;
+      const temperature = material.kind === 'solid' || melting === undefined ? 310 : Math.max(310, melting + 20);
+      const state = { temperature, pressure: 101325, humidity: 0.4, composition: 0.4 };
+      if (record.name === 'ice') continue; // melts below 310 K
+      const found = laws(material, state);
+      for (const id of material.properties) {
+        const value = propertyAt(material, id, state)?.value;
+        if (value === undefined || id === 'emissivity') continue;
+        expect(found.law(id)!(temperature) / value, `${record.name} ${id}`).toBeCloseTo(1, 9);
+      }
+    }
+  });
+
+  it('carry the factor of a property to those formed from it', () => {
+    const water = loadMaterial('water');
+    const state = { temperature: 300, pressure: 1e5 };
+    const plain = laws(water, state);
+    const thick = laws(water, state, { viscosity: 1.1 });
+    expect(thick.law('viscosity')!(320) / plain.law('viscosity')!(320)).toBeCloseTo(1.1, 12);
+    expect(thick.law('prandtl')!(320) / plain.law('prandtl')!(320)).toBeCloseTo(1.1, 12);
+    expect(thick.law('density')!(320)).toBe(plain.law('density')!(320));
+  });
+
+  it('stay in their phase beyond saturation and say so', () => {
+    const water = loadMaterial('water');
+    const found = laws(water, { temperature: 350, pressure: 1e5 });
+    const density = found.law('density')!;
+    expect(density(360)).toBeGreaterThan(900);
+    expect(found.flags()).toEqual([]);
+    expect(phaseAt(water, 390, 1e5).phase).toBe('vapour');
+    expect(density(390)).toBeGreaterThan(900);
+    expect(found.flags().join()).toContain('beyond its saturation');
+    expect(laws(loadMaterial('copper'), state()).law('viscosity')).toBeUndefined();
+  });
+});
+
+const state = (): { temperature: number; pressure: number } => ({ temperature: 300, pressure: 1e5 });

@@ -1,0 +1,140 @@
+import { describe, expect, it } from 'vitest';
+import { loadMaterial, parseRange, parseState, phaseAt, propertyAt, stateOf, tableOver, takeState } from '../../src/properties/index.ts';
+import { Problem } from '../../src/problems/index.ts';
+
+const codeOf = (task: () => unknown): string => {
+  try {
+    task();
+  } catch (error) {
+    if (error instanceof Problem) return error.list[0]?.code ?? '';
+    throw error;
+  }
+  return 'none';
+};
+const at = (name: string, text: string) => {
+  const material = loadMaterial(name);
+  return takeState(material, stateOf(material, parseState(text)));
+};
+
+describe('states from text', () => {
+  it.each([
+    ['60 degC, 2 bar', { temperature: 333.15, pressure: 2e5 }],
+    ['2 bar, 60 degC', { temperature: 333.15, pressure: 2e5 }],
+    ['1 bar gauge, 20 degC', { temperature: 293.15, pressure: 201325 }],
+    ['60 degC, saturated liquid', { temperature: 333.15, saturated: 'liquid' }],
+    ['2 bar, saturated vapour', { pressure: 2e5, saturated: 'vapour' }],
+    ['20 degC, 1 atm, humidity 60 %', { temperature: 293.15, pressure: 101325, humidity: 0.6 }],
+    ['20 degC, 1 bar, composition 30 % mass', { temperature: 293.15, pressure: 1e5, composition: 0.3 }],
+    ['300 K, 1 bar, liquid', { temperature: 300, pressure: 1e5, phase: 'liquid' }],
+  ])('%s', (text, state) => {
+    const { assumed: _, ...rest } = parseState(text);
+    expect(Object.keys(rest).sort()).toEqual(Object.keys(state).sort());
+    for (const [key, value] of Object.entries(state)) {
+      if (typeof value === 'number') expect(rest[key as 'temperature']).toBeCloseTo(value, 6);
+      else expect(rest[key as 'phase']).toBe(value);
+    }
+  });
+
+  it.each([
+    ['60 degC, 2 bar, 3 bar', 'said-twice'],
+    ['60 degC, saturatd liquid', 'unreadable-state'],
+    ['60 degC,, 2 bar', 'unreadable-state'],
+    ['60 furlong, 2 bar', 'unknown-unit'],
+    ['60 degC .. 80 degC, 2 bar', 'range-in-state'],
+    ['60 degC, composition 30 % mol', 'wrong-basis'],
+    ['60 C, 2 bar', 'ambiguous-unit'],
+    ['60 +/- 1 degC, 2 bar', 'unreadable-state'],
+  ])('%s is a problem', (text, code) => expect(codeOf(() => parseState(text))).toBe(code));
+
+  it('places the problem in the text', () => {
+    try {
+      parseState('60 degC, saturatd liquid');
+      expect.unreachable();
+    } catch (error) {
+      expect((error as Problem).list[0]).toMatchObject({ at: 9, length: 15, nearest: 'saturated liquid' });
+    }
+  });
+});
+
+describe('phases', () => {
+  it.each([
+    // Boiling at 2 bar: 120.21 degC; critical point 647.096 K, 22.064 MPa (IAPWS R2-83, R7-97)
+    [333.15, 2e5, 'liquid'],
+    [393.3, 2e5, 'liquid'],
+    [393.4, 2e5, 'vapour'],
+    [700, 1e5, 'gas'],
+    [700, 25e6, 'supercritical'],
+    [500, 25e6, 'liquid'],
+    [263.15, 1e5, 'solid'],
+  ])('water at %d K and %d Pa is %s', (T, p, phase) => expect(phaseAt(loadMaterial('water'), T, p).phase).toBe(phase));
+
+  it('gives saturation and warns near the critical point', () => {
+    const found = phaseAt(loadMaterial('water'), 640, 21e6);
+    expect(found.saturation?.pressure).toBeCloseTo(20.265e6, -4);
+    expect(found.flags.join()).toContain('near the critical point');
+    expect(phaseAt(loadMaterial('water'), 400, 1e6).flags).toEqual([]);
+  });
+
+  it.each([
+    ['steam', '60 degC, 2 bar', 'no-such-phase'],
+    ['water', '200 degC, 1 bar, liquid', 'no-such-phase'],
+    ['water', '-5 degC, 1 bar', 'not-covered'],
+    ['sodium', '1200 K, 1 bar', 'not-covered'],
+    ['sodium', '300 K, 1 bar', 'not-covered'],
+    ['humid air', '20 degC, 1 atm', 'missing-humidity'],
+    ['humid air', '150 degC, 1 atm, humidity 50 %', 'impossible-humidity'],
+    ['ethylene glycol-water', '20 degC, 1 bar', 'missing-composition'],
+    ['ethylene glycol-water', '-30 degC, 1 bar, composition 30 %', 'not-covered'],
+    ['engine oil', '2 bar, saturated vapour', 'no-saturation'],
+    ['water', '400 degC, saturated liquid', 'no-saturation'],
+    ['water', '2 bar, saturated vapour, 60 degC', 'incomplete-state'],
+    ['water', '60 degC', 'incomplete-state'],
+  ])('%s at %s is refused', (name, text, code) =>
+    expect(
+      codeOf(() => {
+        const taken = at(name, text);
+        propertyAt(loadMaterial(name), 'density', { temperature: taken.sample.T, pressure: taken.sample.p, humidity: taken.sample.x, composition: taken.sample.x });
+      }),
+    ).toBe(code));
+
+  it('takes the side that is asked for on the saturation line', () => {
+    expect(at('water', '60 degC, saturated liquid').phase).toBe('liquid');
+    expect(at('water', '60 degC, saturated vapour').phase).toBe('vapour');
+    expect(at('steam', '6 bar, saturated vapour').phase).toBe('vapour');
+    expect(codeOf(() => at('water', '100 degC, 101418 Pa'))).toBe('none');
+    const water = loadMaterial('water');
+    const p = phaseAt(water, 373.15, 1e5).saturation?.pressure ?? 0;
+    expect(codeOf(() => takeState(water, { temperature: 373.15, pressure: p }))).toBe('between-phases');
+  });
+
+  it('refuses what no state can be', () => {
+    for (const [temperature, pressure] of [[0, 1e5], [-1, 1e5], [300, 0], [Number.NaN, 1e5], [300, Infinity]] as const) {
+      expect(codeOf(() => propertyAt(loadMaterial('water'), 'density', { temperature, pressure }))).toBe('impossible-state');
+    }
+  });
+});
+
+describe('ranges', () => {
+  it('runs over a range and leaves out what cannot be', () => {
+    const table = tableOver(loadMaterial('steam'), parseRange('100 degC .. 150 degC, 2 bar'), 6);
+    expect(table.rows.length).toBe(3);
+    expect(table.notes.join()).toContain('left out: water is a liquid');
+    expect(codeOf(() => tableOver(loadMaterial('steam'), parseRange('10 degC .. 20 degC, 2 bar'), 6))).toBe('no-such-phase');
+    expect(codeOf(() => tableOver(loadMaterial('water'), parseRange('10 degC, 2 bar')))).toBe('no-range');
+  });
+
+  it('beyond its range a value is kept, flagged, with its uncertainty doubled', () => {
+    const oil = loadMaterial('light oil');
+    const inside = propertyAt(oil, 'viscosity', { temperature: 300, pressure: 1e5 });
+    const outside = propertyAt(oil, 'viscosity', { temperature: 450, pressure: 1e5 });
+    expect([inside?.withinRange, outside?.withinRange]).toEqual([true, false]);
+    expect(outside?.uncertainty).toBeCloseTo(2 * (inside?.uncertainty ?? 0), 12);
+    expect(outside?.flags.join()).toContain('carried beyond its range 273 K to 423 K');
+  });
+
+  it('a property that a material does not have is undefined', () => {
+    expect(propertyAt(loadMaterial('copper'), 'viscosity', { temperature: 300, pressure: 1e5 })).toBeUndefined();
+    expect(propertyAt(loadMaterial('water'), 'surfaceTension', { temperature: 700, pressure: 1e5 })).toBeUndefined();
+    expect(propertyAt(loadMaterial('water'), 'isentropicExponent', { temperature: 300, pressure: 1e5 })).toBeUndefined();
+  });
+});
