@@ -14,11 +14,11 @@ interface Place { readonly eta: number; readonly f: number; readonly speed: numb
  * Marches the layer on a plate from the wall with the classical Runge-Kutta method, together with the integral of [f''/f''(0)]^Pr.
  * Written in plain numbers: a plan evaluates it cold.
  */
-function walk(end: number, steps: number, prandtl: number, note: (place: Place) => void): number {
+function walk(end: number, steps: number, prandtl: number, note: (eta: number, f: number, speed: number, shear: number) => void): number {
   const h = end / steps;
   const weight = (shear: number): number => (Math.max(shear, 0) / blasiusShear) ** prandtl;
   let f = 0, p = 0, s = blasiusShear, integral = 0;
-  note({ eta: 0, f, speed: p, shear: s });
+  note(0, f, p, s);
   for (let i = 1; i <= steps; i++) {
     const s1 = (-f * s) / 2;
     const f2 = f + (h / 2) * p, p2 = p + (h / 2) * s, sh2 = s + (h / 2) * s1, s2 = (-f2 * sh2) / 2;
@@ -28,7 +28,7 @@ function walk(end: number, steps: number, prandtl: number, note: (place: Place) 
     f += (h / 6) * (p + 2 * p2 + 2 * p3 + p4);
     p += (h / 6) * (s + 2 * sh2 + 2 * sh3 + sh4);
     s += (h / 6) * (s1 + 2 * s2 + 2 * s3 + s4);
-    note({ eta: i * h, f, speed: p, shear: s });
+    note(i * h, f, p, s);
   }
   return integral;
 }
@@ -36,7 +36,7 @@ function walk(end: number, steps: number, prandtl: number, note: (place: Place) 
 /** Rows eta, f, f', f'' of the layer on a plate, eta 0 .. 10 in steps of 0.01. */
 export function blasiusLayer(): Place[] {
   const rows: Place[] = [];
-  walk(10, 1000, 1, (place) => rows.push(place));
+  walk(10, 1000, 1, (eta, f, speed, shear) => rows.push({ eta, f, speed, shear }));
   return rows;
 }
 
@@ -51,7 +51,7 @@ export function plateHeat(prandtl: number): number {
   // Beyond eta = 10 the stream function is eta minus the displacement, to ten digits.
   const end = 10, layer = Math.min(end, 16 / prandtl ** (1 / 3));
   let last = 0;
-  const inner = walk(layer, 1000, prandtl, ({ shear }) => (last = shear));
+  const inner = walk(layer, 700, prandtl, (_eta, _f, _speed, shear) => (last = shear));
   return 1 / (inner + (layer < end ? 0 : gaussTail(prandtl, end, (last / blasiusShear) ** prandtl)));
 }
 

@@ -29,7 +29,7 @@ export const uprightPlateSimilarity = reference('upright-plate-similarity', {
   passLimit: 0.01,
   ifMissed: 'domain ten layers wide; fluid free to enter from the side and below; cells inside the thermal layer; leave out the first 5 % of the height',
   notes: ['The full equations differ from the boundary-layer solution at low Grashof numbers, by the order of Gr^(-1/4): compare above Gr 1e5.', 'Ostrach printed 0.0812 for -theta\'(0) at Pr 0.01; the converged value is 0.0806.'],
-  flows: ['plate'],
+  flows: ['plate', 'cylinder'],
   needs: [
     { id: 'grashof', unit: '1', name: 'Grashof number g beta dT x^3/nu^2 on the height', range: [1e4, 4e9] },
     { ...prandtl, range: [0.01, 1000] },
