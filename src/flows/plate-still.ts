@@ -69,6 +69,9 @@ const heat: Definition[] = [
 
 const shearNeeds = ['plateGrashof', 'prandtl', 'length', 'viscosity', 'kinematicViscosity'] as const;
 const layers: Definition[] = [
+  quantity('plateConductionTime', { symbol: 't_c', name: 'time in which conduction alone would fill the thermal layer', unit: 's' }, [
+    way({ needs: ['thermalLayerThickness', 'thermalDiffusivity'], value: ({ thermalLayerThickness, thermalDiffusivity }) => (thermalLayerThickness / 3.642773) ** 2 / thermalDiffusivity, formula: 't = (delta_T/3.643)^2/alpha, 1 % of the change has arrived', source: 'half-space with a sudden wall temperature' }),
+  ]),
   quantity('plateLayerGrashof', { symbol: 'Gr_s', name: 'Grashof number that the layer of a level plate is judged by', unit: '1' }, [way({ needs: ['grashof'], when: level, value: ({ grashof }) => grashof, formula: 'Gr on area over perimeter', source: practice })]),
   ways('wallShearPlain', [
     way({ needs: shearNeeds, when: { ...standing, regime: 'laminar' }, range: { prandtl: prandtls }, scatter: 0.05, value: (of) => laminarShear(of.plateGrashof, of), formula: "tau_w = 2 mu nu/L^2 Gr^(1/2) f''(0) (Gr/4)^(1/4) at the upper edge", source: ostrach }),

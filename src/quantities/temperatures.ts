@@ -28,7 +28,8 @@ export const temperatures: Definition[] = [
     way({ needs: ['inletTemperature'], when: { flowClass: through, energySolved: 'no' }, value: ({ inletTemperature }) => inletTemperature, formula: 'T_b = T_in', source: 'one temperature throughout' }),
     loop({ needs: ['inletTemperature'], when: { flowClass: through }, start: ({ inletTemperature }) => inletTemperature, closes: 'bulkTemperatureNext', formula: 'T_b = (T_in + T_out)/2', source: 'convention: internal flow at the mean of inlet and outlet' }),
     way({ needs: ['inletTemperature'], when: { flowClass: through }, as: 'assumed', value: ({ inletTemperature }) => inletTemperature, formula: 'T_b = T_in', source: 'outlet temperature not known: the inlet is taken' }),
-    way({ needs: ['referenceTemperature'], when: { flowClass: ['body', 'jet', 'enclosure', 'solid'] }, value: ({ referenceTemperature }) => referenceTemperature, formula: 'T_b = T_ref', source: 'convention: no bulk in an open flow' }),
+    way({ needs: ['farTemperature'], when: { flowClass: ['body', 'jet', 'solid'] }, value: ({ farTemperature }) => farTemperature, formula: 'T_b = T_far', source: 'convention: no bulk in an open flow; heat passes between wall and far fluid' }),
+    way({ needs: ['referenceTemperature'], when: { flowClass: 'enclosure' }, value: ({ referenceTemperature }) => referenceTemperature, formula: 'T_b = T_ref', source: 'convention: a closed box at the mean of its walls' }),
   ]),
   quantity('bulkTemperatureNext', { symbol: 'T_b', name: 'mean bulk temperature that the heat balance gives', ...kelvin }, [
     way({ needs: ['inletTemperature', 'outletTemperature'], value: ({ inletTemperature, outletTemperature }) => (inletTemperature + outletTemperature) / 2, formula: '(T_in + T_out)/2', source: 'definition' }),

@@ -31,7 +31,7 @@ export function cylinderDrag({ reynolds }: { reynolds: number }): number {
  * @example         whiteCylinderDrag({ reynolds: 1000 }) // 1.1
  * @range           reynolds 1 to 2e5
  * @scatter         20 %
- * @source          White, Viscous Fluid Flow, 3rd ed. (2006), eq. (3-225)
+ * @source          White, Viscous Fluid Flow, 3rd ed. (2006)
  */
 export function whiteCylinderDrag({ reynolds }: { reynolds: number }): number {
   return 1 + 10 * reynolds ** (-2 / 3);

@@ -22,7 +22,7 @@ export function pohlhausenMean({ reynolds, prandtl }: { reynolds: number; prandt
  * @param prandtl   at the film temperature
  * @param wall      kind of wall condition
  * @returns         local at the end; mean: of the coefficient (temperature), or flux over the mean temperature difference (flux)
- * @example         churchillOzoe({ reynolds: 1e5, prandtl: 0.7, wall: 'temperature' }).mean // 183.5
+ * @example         churchillOzoe({ reynolds: 1e5, prandtl: 0.7, wall: 'temperature' }).mean // 183.086
  * @range           prandtl 0.001 to 1e4
  * @scatter         1.3 %
  * @source          Churchill and Ozoe, J. Heat Transfer 95 (1973) 78 and 416
@@ -40,10 +40,10 @@ export function churchillOzoe({ reynolds, prandtl, wall }: { reynolds: number; p
  * @param prandtl     at the film temperature
  * @param transition  Reynolds number of transition; 0 for a layer turbulent from the edge
  * @returns           mean Nusselt number; the laminar one where the length ends ahead of transition
- * @example           mixedPlateNusselt({ reynolds: 1.884e6, prandtl: 0.7154, transition: 5e5 }) // 2687
+ * @example           mixedPlateNusselt({ reynolds: 1.884e6, prandtl: 0.7154, transition: 5e5 }) // 2686.35
  * @range             prandtl 0.6 to 60, reynolds up to 1e8
  * @scatter           15 %
- * @source            Incropera and DeWitt, Fundamentals of Heat and Mass Transfer, eq. (7.38)
+ * @source            Incropera and DeWitt, Fundamentals of Heat and Mass Transfer, ch. 7
  */
 export function mixedPlateNusselt({ reynolds, prandtl, transition }: { reynolds: number; prandtl: number; transition: number }): number {
   if (reynolds < transition) return pohlhausenMean({ reynolds, prandtl });
@@ -56,7 +56,7 @@ export function mixedPlateNusselt({ reynolds, prandtl, transition }: { reynolds:
  * @param share  length of the unheated start over the whole length
  * @param layer  laminar or turbulent
  * @returns      factor on the mean Nusselt number that the whole length would have
- * @example      unheatedStart({ share: 0.5, layer: 'laminar' }) // 1.0916
+ * @example      unheatedStart({ share: 0.5, layer: 'laminar' }) // 1.09551
  * @range        share 0 to below 1
  * @source       Ameel, Int. Commun. Heat Mass Transfer 24 (1997) 1113
  */

@@ -5,7 +5,7 @@
  *
  * @param intensity  turbulence intensity of the stream, a share (0.01 is 1 %)
  * @returns          Reynolds number on the distance from the edge
- * @example          plateTransition({ intensity: 0.01 }) // 637000
+ * @example          plateTransition({ intensity: 0.01 }) // 641220
  * @range            intensity 0.001 to 0.05, no pressure gradient
  * @scatter          a factor of 1.5
  * @source           Abu-Ghannam and Shaw, J. Mech. Eng. Sci. 22 (1980) 213
