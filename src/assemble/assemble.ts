@@ -12,7 +12,8 @@ import { factsOf } from './facts.ts';
 import { fluidOf } from './fluid.ts';
 import { givenOf, type Range } from './given.ts';
 import { leafDefinitions, leavesOf, wallPlaces, type Leaf } from './leaves.ts';
-import { bindTargets, kindsOf, type BoundTarget } from './targets.ts';
+import { targetDefinitions } from './target-definitions.ts';
+import { bindTargets, estimated, kindsOf, type BoundTarget } from './targets.ts';
 import { vocabulary } from './vocabulary.ts';
 import { wallDefinitions } from './wall-definitions.ts';
 
@@ -86,6 +87,7 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
     ]),
     ...wall.definitions,
     ...(fluid.laws === undefined ? [] : materialWays(fluid.laws.about)),
+    ...targetDefinitions(on, estimated(on, base, flow.walls)),
     ...[...on.entries.keys()].flatMap((path) => (path.startsWith('fluid.') && isProperty(path.slice(6)) ? givenPropertyWays(path.slice(6), path) : [])),
   ];
   const places = {

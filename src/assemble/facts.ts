@@ -2,6 +2,7 @@ import type { Case, wallEntries } from '../case/index.ts';
 import type { Flow } from '../flows/index.ts';
 import { features } from '../quantities/index.ts';
 import { wallPlaces } from './leaves.ts';
+import { outerFace } from './wall-definitions.ts';
 
 /** Words of the case that select ways and that rules may ask for, with those that were taken without being said. */
 export interface Facts {
@@ -72,6 +73,8 @@ export function factsOf(on: Case, flow: Flow, walls: WallKeys, target: { readonl
     const has = (key: string): boolean => walls.get(name)?.has(key) === true;
     const kind = has('temperature') ? 'temperature' : has('heatFlux') || has('heat') ? 'flux' : has('heatTransferCoefficient') ? 'coefficient' : 'adiabatic';
     words[`wallKind@${place}`] = kind;
+    const keys = walls.get(name) ?? new Map<string, never>();
+    words[`wallFace@${place}`] = kind === 'temperature' && !outerFace(keys, [...keys.keys()].some((key) => key.startsWith('layers.'))) ? 'wetted' : 'outer';
     if (kind === 'adiabatic' && !has('adiabatic') && words['energySolved'] === 'yes') assumed.push({ id: `wallKind@${place}`, says: `${place} is adiabatic: no temperature, flux or coefficient is given` });
   }
   const profile = on.word('inlet.profile');
@@ -86,6 +89,8 @@ export function factsOf(on: Case, flow: Flow, walls: WallKeys, target: { readonl
   words['ductSection'] = 'other';
   const confinement = on.word('confinement');
   if (confinement !== undefined) words['generalConfinement'] = confinement;
+  const facing = on.word('facing');
+  if (facing !== undefined) words['plateFacing'] = facing;
   return { words: { ...words, ...flow.words }, assumed: assumed.filter((a) => flow.words[a.id] === undefined) };
 }
 

@@ -29,7 +29,8 @@ export function leavesOf(vocabulary: Vocabulary, flow: string, walls: readonly s
   const one = (field: Field, path: string, places: readonly string[]): void => {
     switch (field.kind) {
       case 'quantity': {
-        const gives = (field.gives ?? []).flatMap((id) => (id.endsWith('@') ? places.map((p) => `${id}${p}`) : [id]));
+        // Which face a wall temperature belongs to is told by its walls, not by the key alone.
+        const gives = (field.gives ?? []).filter((id) => id !== 'wallTemperature@' && id !== 'outerTemperature@').flatMap((id) => (id.endsWith('@') ? places.map((p) => `${id}${p}`) : [id]));
         out.push({ path, unit: field.unit, name: field.name ?? field.doc, gives });
         break;
       }

@@ -1,6 +1,7 @@
-import type { Case, Tolerance } from '../case/index.ts';
+import type { Case, Target, Tolerance } from '../case/index.ts';
 import { nearestName } from '../problems/index.ts';
-import type { Workings } from '../workings/index.ts';
+import type { Definition, Workings } from '../workings/index.ts';
+import type { TargetNode } from './target-definitions.ts';
 
 /** A target of the case bound to a quantity, or words that name none. */
 export interface BoundTarget {
@@ -51,9 +52,7 @@ export function kindsOf(on: Case, unit: (id: string) => string | undefined): Tar
 export function bindTargets(on: Case, workings: Workings, walls: readonly string[]): BoundTarget[] {
   const ids = [...workings.index.keys()].filter((id) => !/[.@]/.test(id));
   return on.targets.map((t) => {
-    const wall = walls.find((w) => t.place !== undefined && t.place.toLowerCase().split(/[\s,]+/).includes(w));
-    const tries = [...(t.mean === 'peak' ? [`${t.quantity}Peak`] : []), ...(wall === undefined ? [] : [`${t.quantity}@walls.${wall}`]), t.quantity];
-    const id = tries.find((one) => workings.has(one));
+    const id = triesOf(t, walls).find((one) => workings.has(one));
     const near = nearestName(t.quantity, ids);
     return {
       id: t.path,
@@ -64,6 +63,32 @@ export function bindTargets(on: Case, workings: Workings, walls: readonly string
       computed: id !== undefined && workings.get(id) !== undefined,
       ...(id === undefined ? { nearest: near === undefined ? alike(t.quantity, ids) : [near] } : {}),
     };
+  });
+}
+
+/** Ids a target may stand for, the most particular first. */
+function triesOf(t: Target, walls: readonly string[]): string[] {
+  const wall = walls.find((w) => t.place !== undefined && t.place.toLowerCase().split(/[\s,]+/).includes(w));
+  return [...(t.mean === 'peak' ? [`${t.quantity}Peak`] : []), ...(wall === undefined ? [] : [`${t.quantity}@walls.${wall}`]), t.quantity];
+}
+
+/**
+ * Targets that some definition estimates, before there is a graph.
+ *
+ * @param on           the case
+ * @param definitions  all but those of the case itself
+ * @param walls        names of the walls of the flow
+ */
+export function estimated(on: Case, definitions: readonly Definition[], walls: readonly string[]): TargetNode[] {
+  const known = new Map(definitions.flatMap((d) => ('more' in d ? [] : [[d.id, d] as const])));
+  return on.targets.flatMap((target) => {
+    for (const id of triesOf(target, walls)) {
+      const [plain, place] = id.split('@') as [string, string?];
+      const about = known.get(plain);
+      if (about === undefined || about.unit === 'word' || (place !== undefined && (about.per ?? []).join() !== 'wall')) continue;
+      return [{ target, id, unit: about.unit, name: about.name }];
+    }
+    return [];
   });
 }
 

@@ -1,10 +1,9 @@
 import { loadMaterial, type Collection } from '../properties/index.ts';
-import type { Case, Entry } from '../case/index.ts';
+import type { Case, Entry, wallEntries } from '../case/index.ts';
 import type { Flow } from '../flows/index.ts';
 import { Problem } from '../problems/index.ts';
 import { layerDefinitions, type Layer } from '../quantities/index.ts';
 import { ways, type Definition, type Law } from '../workings/index.ts';
-import type { WallKeys } from './facts.ts';
 import { placed } from './fluid.ts';
 import { wallPlaces } from './leaves.ts';
 import { solidLaw } from './material-laws.ts';
@@ -29,7 +28,7 @@ export interface WallPart {
  * @param exists     whether a quantity is defined
  * @throws           {Problem} unknown-material, no-conductivity, at the place of the value
  */
-export function wallDefinitions(on: Case, flow: Flow, walls: WallKeys, materials: Collection | undefined, exists: (id: string) => boolean): WallPart {
+export function wallDefinitions(on: Case, flow: Flow, walls: ReturnType<typeof wallEntries>, materials: Collection | undefined, exists: (id: string) => boolean): WallPart {
   const definitions: Definition[] = [];
   const laws: Record<string, Law> = {};
   const names: Record<string, string[]> = {};
@@ -38,7 +37,7 @@ export function wallDefinitions(on: Case, flow: Flow, walls: WallKeys, materials
     const keys = walls.get(name) ?? new Map<string, Entry>();
     const layers = layersOf(on, keys, materials, (law, value) => { laws[law] = value; }, (material) => (names[place] ??= []).push(material));
     for (const [key, entry] of keys) {
-      const id = key === 'temperature' ? (outer(keys, layers) ? 'outerTemperature' : 'wettedTemperature') : gives[key];
+      const id = key === 'temperature' ? (outerFace(keys, layers.length > 0) ? 'outerTemperature' : 'wettedTemperature') : gives[key];
       if (id === undefined || !exists(id) || typeof entry.value !== 'number') continue;
       definitions.push(ways(`${id}@${place}`, [{ needs: [entry.path], value: (of) => of[entry.path] as number, formula: `as given: ${entry.path}`, source: 'the case' }]));
     }
@@ -49,7 +48,8 @@ export function wallDefinitions(on: Case, flow: Flow, walls: WallKeys, materials
   return { definitions, laws, materials: names };
 }
 
-const outer = (keys: ReadonlyMap<string, Entry>, layers: readonly Layer[]): boolean => layers.length > 0 && keys.get('at')?.value !== 'wetted-face';
+/** Whether a temperature of the wall is that of its outer face: with layers, unless the case says otherwise. */
+export const outerFace = (keys: ReadonlyMap<string, Entry>, layered: boolean): boolean => layered && keys.get('at')?.value !== 'wetted-face';
 
 function layersOf(on: Case, keys: ReadonlyMap<string, Entry>, materials: Collection | undefined, add: (name: string, law: Law) => void, named: (material: string) => void): Layer[] {
   const out: Layer[] = [];

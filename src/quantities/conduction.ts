@@ -15,6 +15,7 @@ export const conduction: Definition[] = [
   ]),
   quantity('conjugateFactorHeat', { symbol: 'F_w', name: 'heat with the wall over heat without its resistance', unit: '1', per: ['wall'], plain: 'target' }, [
     way({ needs: [], when: { wallKind: ['flux', 'adiabatic'] }, value: () => 1, formula: 'F = 1', source: 'the heat of the wall is given' }),
+    way({ needs: [], when: { wallFace: 'wetted' }, value: () => 1, formula: 'F = 1', source: 'the temperature of the wetted face is given' }),
     way({ needs: ['biotWall'], value: ({ biotWall }) => 1 / (1 + biotWall), formula: 'F = 1/(1 + Bi_w)', source: 'resistances in series' }),
     none,
   ]),

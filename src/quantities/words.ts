@@ -3,12 +3,19 @@ import { quantity, wordWay, type Definition, type QuantityAbout } from '../worki
 /** What a case can name at all; absent unless its key stands in the case. */
 export const features = ['species', 'reactions', 'particles', 'otherFluid', 'rheology', 'magneticField', 'frame', 'motion', 'porous', 'period', 'ramp', 'swirl', 'humidity', 'burning', 'roughness', 'layers', 'gravity', 'sources', 'wallMotion'] as const;
 
+/** Configurations that a case can name. */
+const flowNames = [
+  'pipe', 'duct', 'annulus', 'channel', 'coil', 'fitting', 'backward-step', 'nozzle', 'mixing-tee', 'packed-bed', 'porous-layer', 'tube-bank', 'plate', 'cylinder', 'sphere', 'building', 'bluff-body', 'aerofoil',
+  'side-heated-cavity', 'bottom-heated-cavity', 'open-cavity', 'lid-driven-cavity', 'room', 'free-jet', 'impinging-jet', 'plume', 'rotating-cylinders', 'rotating-disk', 'stirred-tank', 'open-channel', 'sloshing-tank',
+  'column-collapse', 'drop', 'bubble', 'pellet', 'flame', 'shock-tube', 'storage-tank', 'solid', 'general',
+] as const;
 const degree = Math.PI / 180;
 const yesNo = ['yes', 'no'] as const;
 const word = (id: string, name: string, words: readonly string[], about: Partial<QuantityAbout> = {}, ways: Parameters<typeof quantity>[2] = []): Definition => quantity(id, { symbol: '', name, unit: 'word', words, ...about }, ways);
 
 /** The closed lists of words that select ways and that rules may ask for. */
 export const words: Definition[] = [
+  word('flow', 'configuration', flowNames),
   word('flowClass', 'class of flow', ['internal', 'body', 'jet', 'continuum', 'enclosure', 'solid']),
   word('axis', 'axis of the flow against gravity', ['level', 'inclined', 'upright'], {}, [
     wordWay({ needs: ['inclination'], word: ({ inclination }) => (Math.abs(inclination) < 5 * degree ? 'level' : Math.abs(inclination) > 85 * degree ? 'upright' : 'inclined'), formula: 'level within 5 degrees, upright from 85 degrees', source: 'common practice' }),
@@ -29,6 +36,7 @@ export const words: Definition[] = [
   word('energySolved', 'the energy equation is solved', yesNo),
   word('inletProfile', 'shape of the inlet profile', ['uniform', 'developed', 'power', 'log', 'table', 'none']),
   word('wallKind', 'thermal kind of a wall', ['temperature', 'flux', 'coefficient', 'adiabatic'], { per: ['wall'], plain: 'target' }),
+  word('wallFace', 'face of the wall whose temperature is given', ['outer', 'wetted'], { per: ['wall'], plain: 'target' }),
   word('character', 'nature of the problem in time', ['unknown', 'steady', 'periodic', 'transient']),
   word('fluidGiven', 'how the fluid is given', ['material', 'constants']),
   word('ductSection', 'section of the passage', ['round', 'rectangular', 'flat', 'other']),

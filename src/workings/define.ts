@@ -94,6 +94,8 @@ export interface QuantityAbout {
   readonly plain?: 'smallest' | 'largest' | 'target' | 'sum';
   /** It may change sign, or is a temperature: its spread adds instead of multiplying. */
   readonly signed?: boolean;
+  /** Where the program sets the number and no way gives it: how it is got. */
+  readonly set?: { readonly formula: string; readonly source: string };
 }
 export interface Quantity extends QuantityAbout {
   readonly id: string;

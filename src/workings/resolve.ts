@@ -345,40 +345,51 @@ export class Workings {
     return true;
   }
 
-  /** Fixed point x = closes(x), by secant steps on closes(x) - x, falling back on plain repetition; undefined where `closes` cannot be had. */
+  /**
+   * Fixed point x = closes(x), by secant steps on closes(x) - x; undefined where `closes` cannot be had. What the last trial computed stays:
+   * it belongs to x, so loops within loops are not opened again.
+   */
   #close(i: number, b: Bound, start: number): number | undefined {
-    const followers = new Set(this.followers(i));
-    const kept = [...followers].map((f) => [f, this.#stamp[f] as number] as const);
+    // Quantities on trial in a loop around this one keep their trial value.
+    const open = this.followers(i).filter((f) => !this.#trying.has(f));
+    const before = open.map((f) => this.#stamp[f] as number);
+    this.#trying.add(i);
+    const kept = this.closed.has(i) && Number.isFinite(this.#value[i] as number) ? (this.#value[i] as number) : start;
+    const x = this.#search(i, b, kept, open) ?? (kept === start ? undefined : this.#search(i, b, start, open));
+    this.#trying.delete(i);
+    // A quantity that is being asked further out is so still, unless the loop has computed it on its way.
+    open.forEach((f, k) => { if (this.#stamp[f] !== this.#round) this.#stamp[f] = before[k] === this.#round + 1 ? this.#round + 1 : 0; });
+    if (x === undefined) for (const f of open) if (this.#stamp[f] === this.#round) this.#stamp[f] = 0;
+    return x;
+  }
+  readonly #trying = new Set<number>();
+
+  #search(i: number, b: Bound, start: number, open: Int32Array): number | undefined {
     const within = b.way.within ?? 1e-10;
     const trial = (x: number): number => {
-      for (const [f, s] of kept) this.#stamp[f] = s === -this.#round || s === this.#round + 1 || s === this.#round ? 0 : s;
+      for (const f of open) this.#stamp[f] = 0;
       this.#value[i] = x;
       this.#stamp[i] = this.#round;
       return this.#of(b.closes) ? (this.#value[b.closes] as number) : Number.NaN;
     };
     let x0 = start;
-    let g0 = trial(x0);
-    let x = g0;
-    let change = Number.POSITIVE_INFINITY;
-    let passes = 1;
-    for (; passes < mostPasses && Number.isFinite(x); passes++) {
-      const g = trial(x);
-      change = Math.abs(g - x) / Math.max(Math.abs(x), 1e-300);
-      if (change <= within) { x = g; break; }
-      const r0 = g0 - x0;
-      const r = g - x;
-      const slope = (r - r0) / (x - x0);
-      const step = Number.isFinite(slope) && slope !== 0 ? -r / slope : r;
-      [x0, g0] = [x, g];
-      x = Math.abs(step) <= 5 * Math.abs(r) ? x + step : g;
+    let r0 = trial(x0) - x0;
+    if (Number.isNaN(r0)) return undefined;
+    if (Math.abs(r0) <= within * Math.abs(x0)) return this.#closedAt(i, x0, 1, r0);
+    let x = x0 + r0;
+    for (let passes = 2; passes <= mostPasses && Number.isFinite(x); passes++) {
+      const r = trial(x) - x;
+      if (Math.abs(r) <= within * Math.abs(x)) return this.#closedAt(i, x, passes, r);
+      const step = (-r * (x - x0)) / (r - r0);
+      [x0, r0] = [x, r];
+      x += Number.isFinite(step) && Math.abs(step) <= 5 * Math.abs(r) ? step : r;
     }
-    for (const [f, s] of kept) this.#stamp[f] = s === this.#round + 1 ? s : 0;
-    if (Number.isNaN(x)) return undefined;
-    if (!(change <= within)) {
-      this.failures.set(i, { code: 'loop-open', message: `${this.slots[i]?.id ?? ''}: the loop ${b.way.formula} did not close in ${mostPasses} passes (last change ${change.toExponential(1)})` });
-      return Number.NaN;
-    }
-    this.closed.set(i, { passes, change });
+    this.failures.set(i, { code: 'loop-open', message: `${this.slots[i]?.id ?? ''}: the loop ${b.way.formula} did not close in ${mostPasses} passes (last residual ${r0.toExponential(1)})` });
+    return undefined;
+  }
+
+  #closedAt(i: number, x: number, passes: number, residual: number): number {
+    this.closed.set(i, { passes, change: Math.abs(residual) / Math.max(Math.abs(x), 1e-300) });
     return x;
   }
 

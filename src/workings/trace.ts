@@ -14,6 +14,10 @@ export interface Step {
   readonly needs: readonly string[];
   /** Words that selected the way. */
   readonly when: readonly { readonly id: string; readonly word: string }[];
+  /** Where the formula holds, by need. */
+  readonly ranges?: readonly { readonly need: string; readonly range: readonly [number, number] }[];
+  /** 95 % half-width of the logarithm that the formula itself brings. */
+  readonly scatter?: number;
   readonly outside: readonly { readonly need: string; readonly value: number; readonly range: readonly [number, number] }[];
   readonly loop?: { readonly passes: number; readonly change: number };
   readonly note?: string;
@@ -28,6 +32,8 @@ export function stepOf(workings: Workings, id: string): Step | undefined {
   const { node, isWord } = workings.slots[i] as Workings['slots'][number];
   const bound = workings.used[i];
   const given = workings.given[i];
+  const ranges = bound?.way.needs.flatMap((name, k) => { const range = bound.way.range?.[name]; return range === undefined ? [] : [{ need: bound.ids[k] as string, range }]; }) ?? [];
+  const scatter = typeof bound?.way.scatter === 'function' ? bound.way.scatter(bound.of) : bound?.way.scatter;
   const loop = bound !== undefined && bound.closes >= 0 ? workings.closed.get(i) : undefined;
   return {
     id,
@@ -35,11 +41,13 @@ export function stepOf(workings: Workings, id: string): Step | undefined {
     name: node.about.name,
     unit: node.about.unit,
     value: isWord ? (workings.wordAt(i) as string) : workings.value(i),
-    kind: bound === undefined ? (given?.kind ?? (given === undefined ? 'decided' : 'given')) : (bound.way.as ?? 'computed'),
-    formula: bound?.way.formula ?? (given === undefined ? 'decided' : given.kind === 'assumed' ? 'assumed' : 'given'),
-    source: bound?.way.source ?? 'the case',
+    kind: bound === undefined ? (given?.kind ?? (given !== undefined ? 'given' : node.about.set === undefined ? 'decided' : 'computed')) : (bound.way.as ?? 'computed'),
+    formula: bound?.way.formula ?? (given === undefined ? (node.about.set?.formula ?? 'decided') : given.kind === 'assumed' ? 'assumed' : 'given'),
+    source: bound?.way.source ?? (given === undefined ? node.about.set?.source : undefined) ?? 'the case',
     needs: bound?.ids ?? [],
     when: (bound?.when ?? []).map((w) => ({ id: (workings.slots[w.slot] as Workings['slots'][number]).id, word: workings.wordAt(w.slot) ?? '' })),
+    ...(ranges.length === 0 ? {} : { ranges }),
+    ...(scatter === undefined ? {} : { scatter }),
     outside: workings.outside(i),
     ...(loop === undefined ? {} : { loop }),
     ...(bound?.way.note === undefined ? {} : { note: bound.way.note }),
