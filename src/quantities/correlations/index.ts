@@ -1,6 +1,17 @@
 export * from './bed.ts';
+export * from './cavity.ts';
+export * from './cylinder-heat.ts';
+export * from './cylinder.ts';
 export * from './duct-heat.ts';
 export * from './entry.ts';
 export * from './friction.ts';
+export * from './layer-stack.ts';
+export * from './mixed-convection.ts';
+export * from './natural-convection.ts';
 export * from './passage-friction.ts';
+export * from './plate-heat.ts';
+export * from './plate.ts';
+export * from './property-ratio.ts';
+export * from './step.ts';
 export { between, type Table } from './table.ts';
+export * from './wall-laws.ts';
