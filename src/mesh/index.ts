@@ -1,3 +1,7 @@
 import type { Definition } from '../workings/index.ts';
+import { cuts } from './cuts.ts';
+import { regions } from './regions.ts';
+import { sizes } from './sizes.ts';
 
-export const meshDefinitions: Definition[] = [];
+/** What the mesh consists of. */
+export const meshDefinitions: Definition[] = [...cuts, ...sizes, ...regions];

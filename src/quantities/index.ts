@@ -30,6 +30,7 @@ import { wallTemperatures } from './walls.ts';
 import { words } from './words.ts';
 
 export * from './correlations/index.ts';
+export { layersBelow, layersToCover, layersToMatch, stackHeight } from './layer-stack.ts';
 export { layerDefinitions, type Layer } from './layers.ts';
 export { termIds } from './terms.ts';
 export { features } from './words.ts';

@@ -5,6 +5,7 @@ import { meshDefinitions } from '../../src/mesh/index.ts';
 import { timeDefinitions } from '../../src/time/index.ts';
 import { numericsDefinitions } from '../../src/numerics/index.ts';
 import { costDefinitions } from '../../src/cost/index.ts';
+import { definitionsOfVerdicts } from '../../src/decide/index.ts';
 import type { Flow } from '../../src/flows/index.ts';
 import { joinDefinitions, quantity, way, Workings, type Definition, type Given, type Laws, type Places } from '../../src/workings/index.ts';
 
@@ -13,7 +14,7 @@ export function pathUnits(flow: Flow): ReadonlyMap<string, string> {
   return new Map(leavesOf(vocabulary, flow.id, flow.walls, () => []).map((leaf) => [leaf.path, leaf.unit]));
 }
 
-const general = [...generalDefinitions, ...meshDefinitions, ...timeDefinitions, ...numericsDefinitions, ...costDefinitions];
+const general = [...generalDefinitions, ...meshDefinitions, ...timeDefinitions, ...numericsDefinitions, ...costDefinitions, ...definitionsOfVerdicts()];
 
 /** General definitions, those of the flow, and as plain leaves whatever a way needs that none of them defines: the paths of a case above all. A factor nobody defines is 1. */
 export function definitionsOf(flow: Flow): Definition[] {

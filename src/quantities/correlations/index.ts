@@ -5,7 +5,6 @@ export * from './cylinder.ts';
 export * from './duct-heat.ts';
 export * from './entry.ts';
 export * from './friction.ts';
-export * from './layer-stack.ts';
 export * from './mixed-convection.ts';
 export * from './natural-convection.ts';
 export * from './passage-friction.ts';

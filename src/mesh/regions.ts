@@ -1,0 +1,66 @@
+import { quantity, way, ways, type Definition, type Way } from '../workings/index.ts';
+import { plane } from './cuts.ts';
+
+const practice = 'common practice';
+const geometry = 'geometry';
+const treatment = 'choice.turbulence-treatment';
+const perRegion = { per: ['region'] as const };
+
+const stacks = (n: number, where: string): Way => ({ needs: [], value: () => n, formula: `n_w = ${n}: ${where}`, source: geometry });
+
+/** A size along or along the span: that of the core, in wall regions of resolved turbulence no more than so many viscous lengths. */
+const limited = (direction: 'along' | 'span', stretch: string, walls: string, plus: Readonly<Record<'les' | 'dns', number>>): Way[] => [
+  ...(['les', 'dns'] as const).map((word): Way => ({
+    needs: ['coreCellSize', 'regionCoarsening', stretch, walls, 'viscousLength'],
+    when: { [treatment]: word },
+    value: (of) => (of[walls] as number) > 0 ? Math.min((of['coreCellSize'] as number) * (of['regionCoarsening'] as number) * (of[stretch] as number), plus[word] * (of['viscousLength'] as number)) : (of['coreCellSize'] as number) * (of['regionCoarsening'] as number) * (of[stretch] as number),
+    formula: `h_${direction === 'along' ? 'x' : 'z'} = ${plus[word]} nu/u_tau at walls, at most h_c a_c a`,
+    source: word === 'les' ? 'Piomelli and Balaras, Annu. Rev. Fluid Mech. 34 (2002) 349' : 'Moser, Kim and Mansour, Phys. Fluids 11 (1999) 943',
+  })),
+  { needs: ['coreCellSize', 'regionCoarsening', stretch], value: (of) => (of['coreCellSize'] as number) * (of['regionCoarsening'] as number) * (of[stretch] as number), formula: `h_${direction === 'along' ? 'x' : 'z'} = h_c a_c a`, source: practice },
+];
+
+/** Cells over a width of which so many wall stacks take their part. */
+function across(width: string, size: string, walls: string, symbol: string): Way[] {
+  return [
+    way({ needs: [width, size, walls, 'layerCount', 'layerStackHeight'], value: (of) => Math.ceil((of[walls] as number) * (of['layerCount'] as number) + Math.max(0, (of[width] as number) - (of[walls] as number) * (of['layerStackHeight'] as number)) / (of[size] as number) - 1e-9), formula: `n = n_w N_l + (${symbol} - n_w S)/h, rounded up`, source: 'layers at each wall, equal cells between' }),
+    way({ needs: [width, size], value: (of) => Math.ceil((of[width] as number) / (of[size] as number) - 1e-9), formula: `n = ${symbol}/h, rounded up`, source: 'equal cells' }),
+  ];
+}
+
+/** The mesh region by region: extents, sizes and cells in each direction. A flow gives the extents. */
+export const regions: Definition[] = [
+  quantity('regionAlong', { symbol: 'L_r', name: 'extent of a region along the flow', unit: 'm', ...perRegion }),
+  quantity('regionAcross', { symbol: 'W_r', name: 'extent of a region across the flow', unit: 'm', ...perRegion }),
+  quantity('regionSpan', { symbol: 'B_r', name: 'extent of a region in the third direction', unit: 'm', ...perRegion }),
+  quantity('regionSpanStretch', { symbol: 'a_z', name: 'cell along the span over the cell across', unit: '1', ...perRegion }, [way({ needs: [], value: () => 1, formula: 'a_z = 1', source: practice })]),
+  quantity('regionWalls', { symbol: 'n_w', name: 'stacks of wall layers that a line across a region passes', unit: '1', ...perRegion }, [
+    way({ needs: ['meshDimension'], when: { flowClass: 'internal', ductSection: 'round' }, value: ({ meshDimension }) => (meshDimension === 3 ? 4 : 2), formula: 'n_w = 4 in three directions: the wall closes round the section', source: geometry }),
+    way({ needs: [], when: { flowClass: ['internal', 'enclosure'] }, value: () => 2, formula: 'n_w = 2: walls on both sides', source: geometry }),
+    stacks(0, 'no wall in this region'),
+  ]),
+  ...['near', 'surface', 'layer', 'layers'].map((place) => ways(`regionWalls@${place}`, [{ ...stacks(1, 'one wall'), when: { flowClass: ['body', 'jet'] } }])),
+  quantity('regionSpanWalls', { symbol: 'n_wz', name: 'stacks of wall layers along the span', unit: '1', ...perRegion }, [
+    way({ needs: [], when: { flowClass: 'internal', ductSection: 'rectangular', infiniteDepth: 'no' }, value: () => 2, formula: 'n_wz = 2: side walls', source: geometry }),
+    stacks(0, 'no side walls'),
+  ]),
+  quantity('regionSizeAcross', { symbol: 'h_y', name: 'cell of a region across the flow, away from walls', unit: 'm', ...perRegion }, [
+    way({ needs: ['coreCellSize', 'regionCoarsening'], value: ({ coreCellSize, regionCoarsening }) => coreCellSize * regionCoarsening, formula: 'h_y = h_c a_c', source: practice }),
+  ]),
+  quantity('regionSizeAlong', { symbol: 'h_x', name: 'cell of a region along the flow', unit: 'm', ...perRegion, plain: 'smallest' }, limited('along', 'regionStretch', 'regionWalls', { les: 70, dns: 10 })),
+  quantity('regionSizeSpan', { symbol: 'h_z', name: 'cell of a region along the span', unit: 'm', ...perRegion }, limited('span', 'regionSpanStretch', 'regionWalls', { les: 20, dns: 5 })),
+  quantity('cellsAlong', { symbol: 'n_x', name: 'cells of a region along the flow', unit: '1', ...perRegion }, [
+    way({ needs: ['regionAlong', 'regionSizeAlong'], value: ({ regionAlong, regionSizeAlong }) => Math.ceil(regionAlong / regionSizeAlong - 1e-9), formula: 'n_x = L_r/h_x, rounded up', source: 'equal cells' }),
+  ]),
+  quantity('cellsAcross', { symbol: 'n_y', name: 'cells of a region across the flow', unit: '1', ...perRegion }, across('regionAcross', 'regionSizeAcross', 'regionWalls', 'W_r')),
+  quantity('cellsSpan', { symbol: 'n_z', name: 'cells of a region along the span', unit: '1', ...perRegion }, [
+    way({ needs: [], when: { 'choice.dimension-and-cuts': plane }, value: () => 1, formula: 'n_z = 1', source: 'the chosen cuts' }),
+    ...across('regionSpan', 'regionSizeSpan', 'regionSpanWalls', 'B_r'),
+  ]),
+  quantity('regionCells', { symbol: 'N_r', name: 'cells of a region', unit: '1', ...perRegion, plain: 'sum' }, [
+    way({ needs: ['cellsAlong', 'cellsAcross', 'cellsSpan', 'cutShare'], value: ({ cellsAlong, cellsAcross, cellsSpan, cutShare }) => cellsAlong * cellsAcross * cellsSpan * cutShare, formula: 'N_r = n_x n_y n_z s_c', source: 'product of the directions' }),
+  ]),
+  quantity('regionPeclet', { symbol: 'Pe_r', name: 'cell Peclet number of a region, along the flow', unit: '1', ...perRegion }, [
+    way({ needs: ['speed', 'regionSizeAlong', 'smallestDiffusivity'], value: ({ speed, regionSizeAlong, smallestDiffusivity }) => (speed * regionSizeAlong) / smallestDiffusivity, formula: 'Pe_r = U h_x/Gamma', source: 'Patankar 1980' }),
+  ]),
+];
