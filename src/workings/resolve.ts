@@ -58,6 +58,7 @@ export class Workings {
   readonly #shift: Float64Array;
   readonly #inputSource: Int32Array;
   readonly #pinned: Uint8Array;
+  readonly #trying: Uint8Array;
   /** What a pinned quantity is set to, before any shift. */
   readonly #base: Float64Array;
   /** The slots each source of spread acts on directly. */
@@ -65,7 +66,10 @@ export class Workings {
   readonly #round = 2;
   #next: Int32Array[] | undefined;
   readonly #followers = new Map<number, Int32Array>();
+  /** How many sources stand off their nominal point. */
+  #shifted = 0;
   #knowable: Uint8Array | undefined;
+  readonly #lawSource = new Map<string, number>();
   /** For a quantity pinned since: what could be known without the pin. */
   readonly #knewWithout = new Map<number, Uint8Array>();
 
@@ -75,6 +79,7 @@ export class Workings {
     this.#value = new Float64Array(n);
     this.#stamp = new Int32Array(n);
     this.#pinned = new Uint8Array(n);
+    this.#trying = new Uint8Array(n);
     this.#base = new Float64Array(n);
     this.#inputSource = new Int32Array(n).fill(-1);
     const sourceOf = new Map<unknown, number>();
@@ -125,6 +130,7 @@ export class Workings {
     const out: Record<string, Law> = {};
     for (const [name, law] of Object.entries(laws)) {
       const i = source(`law ${name}`, { key: name, label: name, kind: 'property' });
+      this.#lawSource.set(name, i);
       out[name] = Object.assign((t: number, p: number) => { const s = this.#shift[i] as number; return s === 0 ? law(t, p) : law(t, p) * (1 + law.uncertainty(t, p)) ** s; }, { uncertainty: law.uncertainty });
     }
     return out;
@@ -178,9 +184,31 @@ export class Workings {
 
   /** Moves one source of spread by so many 95 % half-widths. */
   shift(source: number, by: number): void {
-    if (this.#shift[source] === by) return;
+    const was = this.#shift[source] as number;
+    if (was === by) return;
+    this.#shifted += (by === 0 ? 0 : 1) - (was === 0 ? 0 : 1);
     this.#shift[source] = by;
     for (const i of this.#acts[source] ?? []) this.#forget(i);
+  }
+
+  /** The sources of spread that act on quantities as they were got: inputs, scatter and property laws on their way. */
+  activeSources(slots: readonly number[]): number[] {
+    const seen = new Set<number>();
+    const found = new Set<number>();
+    const visit = (i: number): void => {
+      if (seen.has(i) || !this.#of(i)) return;
+      seen.add(i);
+      if (this.#pinned[i] === 1 && (this.#inputSource[i] as number) >= 0) found.add(this.#inputSource[i] as number);
+      const b = this.#pinned[i] === 1 ? undefined : this.used[i];
+      if (b === undefined) return;
+      if (b.source >= 0) found.add(b.source);
+      for (const law of b.way.laws ?? []) found.add(this.#lawSource.get(law) as number);
+      for (const w of b.when) visit(w.slot);
+      for (const n of b.needs) visit(n);
+      if (b.closes >= 0) visit(b.closes);
+    };
+    for (const i of slots) visit(i);
+    return [...found].sort((a, b) => a - b);
   }
 
   /** The slots a source of spread acts on, and all that follows from them. */
@@ -350,24 +378,28 @@ export class Workings {
    * it belongs to x, so loops within loops are not opened again.
    */
   #close(i: number, b: Bound, start: number): number | undefined {
+    const open = this.followers(i);
+    const before = new Int32Array(open.length);
+    for (let k = 0; k < open.length; k++) before[k] = this.#stamp[open[k] as number] as number;
     // Quantities on trial in a loop around this one keep their trial value.
-    const open = this.followers(i).filter((f) => !this.#trying.has(f));
-    const before = open.map((f) => this.#stamp[f] as number);
-    this.#trying.add(i);
+    this.#trying[i] = 1;
     const kept = this.closed.has(i) && Number.isFinite(this.#value[i] as number) ? (this.#value[i] as number) : start;
     const x = this.#search(i, b, kept, open) ?? (kept === start ? undefined : this.#search(i, b, start, open));
-    this.#trying.delete(i);
-    // A quantity that is being asked further out is so still, unless the loop has computed it on its way.
-    open.forEach((f, k) => { if (this.#stamp[f] !== this.#round) this.#stamp[f] = before[k] === this.#round + 1 ? this.#round + 1 : 0; });
-    if (x === undefined) for (const f of open) if (this.#stamp[f] === this.#round) this.#stamp[f] = 0;
+    this.#trying[i] = 0;
+    for (let k = 0; k < open.length; k++) {
+      const f = open[k] as number;
+      if (this.#trying[f] === 1) continue;
+      // A quantity that is being asked further out is so still, unless the loop has computed it on its way.
+      if (this.#stamp[f] !== this.#round || x === undefined) this.#stamp[f] = before[k] === this.#round + 1 ? this.#round + 1 : 0;
+    }
     return x;
   }
-  readonly #trying = new Set<number>();
 
   #search(i: number, b: Bound, start: number, open: Int32Array): number | undefined {
-    const within = b.way.within ?? 1e-10;
+    // A slope over a half-width needs no more.
+    const within = this.#shifted > 0 ? 1e-7 : (b.way.within ?? 1e-10);
     const trial = (x: number): number => {
-      for (const f of open) this.#stamp[f] = 0;
+      for (let k = 0; k < open.length; k++) if (this.#trying[open[k] as number] === 0) this.#stamp[open[k] as number] = 0;
       this.#value[i] = x;
       this.#stamp[i] = this.#round;
       return this.#of(b.closes) ? (this.#value[b.closes] as number) : Number.NaN;

@@ -1,4 +1,4 @@
-import type { Workings } from './resolve.ts';
+import type { Source, Workings } from './resolve.ts';
 
 /** Spread of one number: 95 % bounds, and what share each source has of its square, largest first. */
 export interface Spread {
@@ -28,7 +28,9 @@ export function spreads(workings: Workings, ids: readonly string[]): Map<string,
   });
   const words = computedWords(workings);
   const before = words.map((w) => workings.wordAt(w));
-  workings.sources.forEach((source, s) => {
+  const active = workings.activeSources(rows.map((r) => r.i));
+  active.forEach((s) => {
+    const source = workings.sources[s] as Source;
     const reach = workings.reach(s);
     const hit = rows.filter((r) => reach.has(r.i));
     if (hit.length === 0) return;
@@ -55,7 +57,7 @@ export function spreads(workings: Workings, ids: readonly string[]): Map<string,
   });
   const out = new Map<string, Spread>();
   const sampled = rows.filter((r) => r.jumps);
-  const percentiles = sampled.length === 0 ? new Map<number, [number, number]>() : sample(workings, sampled.map((r) => r.i));
+  const percentiles = sampled.length === 0 ? new Map<number, [number, number]>() : sample(workings, sampled.map((r) => r.i), active);
   for (const r of rows) {
     const square = r.parts.reduce((s, p) => s + p.d * p.d, 0);
     if (square === 0 && !r.jumps) continue;
@@ -75,14 +77,13 @@ function computedWords(workings: Workings): number[] {
 }
 
 /** 2.5 and 97.5 % points over all sources at once: Halton points through the normal quantile, half-width = 1.96 sigma. */
-function sample(workings: Workings, slots: readonly number[]): Map<number, [number, number]> {
+function sample(workings: Workings, slots: readonly number[], active: readonly number[]): Map<number, [number, number]> {
   const values = slots.map(() => [] as number[]);
-  const n = workings.sources.length;
   for (let k = 1; k <= samples; k++) {
-    for (let s = 0; s < n; s++) workings.shift(s, normalQuantile(halton(k, prime(s))) / 1.959964);
+    active.forEach((s, d) => workings.shift(s, normalQuantile(halton(k, prime(d))) / 1.959964));
     slots.forEach((i, j) => { if (workings.known(i)) values[j]?.push(workings.value(i)); });
   }
-  for (let s = 0; s < n; s++) workings.shift(s, 0);
+  for (const s of active) workings.shift(s, 0);
   return new Map(slots.map((i, j) => {
     const sorted = (values[j] as number[]).sort((a, b) => a - b);
     const nominal = workings.known(i) ? workings.value(i) : Number.NaN;
