@@ -86,7 +86,7 @@ function unknown(name: string, key: string, collection: Collection): Problem {
   if (candidates.size > 1) {
     return new Problem({ code: 'ambiguous-material', message: `"${shown}" does not say which material is meant`, expected: `one of ${[...candidates].sort().join(', ')}` });
   }
-  const nearest = nearestName(key, Object.keys(collection.names)) ?? (candidates.size === 1 ? plainName([...candidates][0]!) : undefined);
+  const nearest = nearestName(key, Object.keys(collection.names)) ?? [...candidates].map(plainName)[0];
   const named = nearest === undefined ? undefined : collection.names[nearest];
   return new Problem({
     code: 'unknown-material',

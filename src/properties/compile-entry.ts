@@ -2,7 +2,7 @@ import { unit } from '../units/index.ts';
 import { Problem } from '../problems/index.ts';
 import { propertyUnits, type Band, type Box, type Constant, type Entry, type PropertyId, type RecordCheck } from './record.ts';
 import { equationModels, propertyModels } from './registry.ts';
-import { quantityText, scaled, type YamlReader } from './yaml-reader.ts';
+import { quantityText, scaled, shown, type YamlReader } from './yaml-reader.ts';
 
 type Path = readonly (string | number)[];
 type Raw = { readonly [key: string]: unknown };
@@ -53,7 +53,7 @@ export function readBands(reader: YamlReader, path: Path, given: unknown, inUnit
     }
     reader.keys(at, raw, ['T', 'p', 'composition', 'phase', 'value', 'absolute']);
     const phase = raw['phase'];
-    if (phase !== undefined && phase !== 'liquid' && phase !== 'vapour') reader.complain([...at, 'phase'], { code: 'wrong-phase', message: `"${String(phase)}" is not a phase`, expected: 'liquid or vapour' });
+    if (phase !== undefined && phase !== 'liquid' && phase !== 'vapour') reader.complain([...at, 'phase'], { code: 'wrong-phase', message: `"${shown(phase)}" is not a phase`, expected: 'liquid or vapour' });
     return {
       ...readBox(reader, at, raw),
       ...(phase === 'liquid' || phase === 'vapour' ? { phase } : {}),
@@ -97,7 +97,7 @@ function readChecks(reader: YamlReader, path: Path, given: unknown, property: st
   return given.filter(isMap).map((raw, i) => {
     const at = [...path, i];
     reader.keys(at, raw, ['property', 'at', 'expect', 'within', 'source']);
-    const of = String(raw['property'] ?? property);
+    const of = typeof raw['property'] === 'string' ? raw['property'] : property;
     const where = isMap(raw['at']) ? raw['at'] : {};
     reader.keys([...at, 'at'], where, ['T', 'p', 'humidity', 'composition']);
     const value = (key: string, inUnit: string, name: string): object => (where[key] === undefined ? {} : { [name]: reader.quantity([...at, 'at', key], where[key], inUnit) });
@@ -143,7 +143,7 @@ export function readEntry(reader: YamlReader, path: Path, raw: unknown, property
   if (typeof raw['source'] !== 'string') reader.complain(path, { code: 'missing-source', message: `${property} names no source` });
   if (raw['uncertainty'] === undefined) reader.complain(path, { code: 'missing-uncertainty', message: `${property} states no uncertainty` });
   const phase = raw['phase'];
-  if (phase !== undefined && phase !== 'liquid' && phase !== 'vapour' && phase !== 'solid') reader.complain([...path, 'phase'], { code: 'wrong-phase', message: `"${String(phase)}" is not a phase`, expected: 'liquid, vapour or solid' });
+  if (phase !== undefined && phase !== 'liquid' && phase !== 'vapour' && phase !== 'solid') reader.complain([...path, 'phase'], { code: 'wrong-phase', message: `"${shown(phase)}" is not a phase`, expected: 'liquid, vapour or solid' });
   const word = (key: 'notes' | 'surface'): object => (typeof raw[key] === 'string' ? { [key]: raw[key] } : {});
   return {
     model,

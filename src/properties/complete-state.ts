@@ -25,9 +25,8 @@ export function stateOf(material: Material, said: StateText): State {
   if ((temperature === undefined) === (pressure === undefined)) throw new Problem({ code: 'incomplete-state', message: 'a saturated state takes a temperature or a pressure, not both', expected: '"60 degC, saturated liquid" or "2 bar, saturated vapour"' });
   const line = saturationOf(material, rest.composition ?? rest.humidity ?? 0);
   if (line === undefined) throw new Problem({ code: 'no-saturation', message: `${material.name} has no saturation line in its record` });
-  const on = saturated === 'liquid' ? line.bubble : line.dew;
   const T = temperature ?? line.boiling(pressure as number, saturated);
-  const p = pressure ?? on(T);
+  const p = pressure ?? (saturated === 'liquid' ? line.bubble(T) : line.dew(T));
   if (!(T >= line.from && T <= line.to) || !Number.isFinite(p)) {
     throw new Problem({ code: 'no-saturation', message: `${material.name} is not saturated at ${temperature === undefined ? `${Number((pressure as number).toPrecision(6))} Pa` : `${Number(T.toPrecision(6))} K`}`, expected: `a temperature from ${line.from} K to ${line.to} K` });
   }

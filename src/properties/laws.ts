@@ -41,13 +41,19 @@ export function laws(material: Material, state: State, factors: { readonly [prop
   const bare = (property: PropertyId): (() => number) => {
     if (record.thermodynamics !== undefined && property in fromEquation) {
       const f: (at: Point, gasConstant: number) => number = fromEquation[property as keyof typeof fromEquation];
-      return () => f(engine.point(sample), engine.equation!.gasConstant);
+      return () => f(engine.point(sample), engine.equation.gasConstant);
     }
     const list = record.properties[property];
     if (list === undefined) return property === 'thermalExpansion' ? slopeOfDensity : () => engine.value(property, sample);
-    if (list.length > 1) return () => engine.evaluate(engine.entry(property, sample, taken.solid ? 'solid' : undefined)!, sample);
-    const f = engine.build(list[0]!);
-    return () => f(sample);
+    const [only, second] = list;
+    if (only !== undefined && second === undefined) {
+      const f = engine.build(only);
+      return () => f(sample);
+    }
+    return () => {
+      const entry = engine.entry(property, sample, taken.solid ? 'solid' : undefined);
+      return entry === undefined ? Number.NaN : engine.evaluate(entry, sample);
+    };
   };
   const slopeOfDensity = (): number => {
     const T = sample.T;

@@ -1,5 +1,5 @@
 import { Problem } from '../problems/index.ts';
-import type { Point, Side } from './models/point.ts';
+import { lineOf, type Point, type Side } from './models/point.ts';
 import { equationModels, propertyModels } from './registry.ts';
 import { propertyUnits, type Box, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
 import type { Engine, Sample } from './sample.ts';
@@ -87,16 +87,17 @@ function engineOf(record: MaterialRecord, collection: Collection): MaterialEngin
       if (equation === null) {
         const entry = record.thermodynamics;
         const model = entry && equationModels[entry.model];
-        const partners = (model?.partners ?? []).map((id) => engineOf(partner(collection, id), collection));
-        equation = model?.make(entry!.constants as never, partners, () => composition);
+        if (entry === undefined || model === undefined) throw new Error(`${record.id} has no equation of state`);
+        const partners = (model.partners ?? []).map((id) => engineOf(partner(collection, id), collection));
+        equation = model.make(entry.constants as never, partners, () => composition);
       }
-      return equation as NonNullable<Engine['equation']>;
+      return equation;
     },
     point(s) {
-      if (s.density !== undefined) return engine.equation!.of(s.T, s.density);
+      if (s.density !== undefined) return engine.equation.of(s.T, s.density);
       if (s.T !== keptT || s.p !== keptP || s.x !== keptX || s.side !== keptSide || kept === undefined) {
         composition = s.x;
-        kept = engine.equation!.at(s.T, s.p, s.side);
+        kept = engine.equation.at(s.T, s.p, s.side);
         keptT = s.T;
         keptP = s.p;
         keptX = s.x;
@@ -106,11 +107,11 @@ function engineOf(record: MaterialRecord, collection: Collection): MaterialEngin
     },
     at(s) {
       composition = s.x;
-      return engine.equation!;
+      return engine.equation;
     },
-    saturation: (T) => engine.equation!.line!.bubble(T),
+    saturation: (T) => lineOf(engine.equation).bubble(T),
     value(property, s) {
-      if (record.thermodynamics !== undefined && property in fromEquation) return fromEquation[property as keyof typeof fromEquation](engine.point(s), engine.equation!.gasConstant);
+      if (record.thermodynamics !== undefined && property in fromEquation) return fromEquation[property as keyof typeof fromEquation](engine.point(s), engine.equation.gasConstant);
       const entry = engine.entry(property, s);
       return entry === undefined ? Number.NaN : engine.evaluate(entry, s);
     },
@@ -118,7 +119,9 @@ function engineOf(record: MaterialRecord, collection: Collection): MaterialEngin
     build(entry) {
       let f = built.get(entry);
       if (f === undefined) {
-        f = propertyModels[entry.model]!.make(entry.constants as never, engine);
+        const model = propertyModels[entry.model];
+        if (model === undefined) throw new Error(`${record.id} names the unknown model ${entry.model}`);
+        f = model.make(entry.constants as never, engine);
         built.set(entry, f);
       }
       return f;
@@ -126,7 +129,8 @@ function engineOf(record: MaterialRecord, collection: Collection): MaterialEngin
     entry(property, s, asked) {
       const list = record.properties[property];
       if (list === undefined) return undefined;
-      if (list.length === 1 && list[0]!.phase === undefined) return list[0];
+      const [only, second] = list;
+      if (second === undefined && only?.phase === undefined) return only;
       let first: Entry | undefined;
       for (const entry of list) {
         if (entry.phase !== undefined && entry.phase !== (asked ?? s.side)) continue;

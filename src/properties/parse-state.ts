@@ -98,7 +98,7 @@ export function parseRange(text: string): StateRange {
       if (phase !== undefined) out.phase = phase;
     } else if (named !== null) {
       const key = named[1] === 'composition' ? 'composition' : 'humidity';
-      const found = read(part, part.text.slice(part.text.length - named[2]!.length), { unit: '1', kind: 'fraction', name: key === 'humidity' ? 'relative humidity' : 'share' });
+      const found = read(part, part.text.slice(part.text.length - (named[2] ?? '').length), { unit: '1', kind: 'fraction', name: key === 'humidity' ? 'relative humidity' : 'share' });
       if (key === 'composition' && found.basis !== undefined && found.basis !== 'mass') throw fault(part, 'wrong-basis', `"${part.text}": the composition is a share by mass here`, 'composition 30 % mass');
       put(part, key, found);
     } else if (isTemperature(part.text)) put(part, 'temperature', read(part, part.text, { unit: 'K', kind: 'temperature' }));

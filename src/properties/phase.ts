@@ -22,7 +22,7 @@ export interface Saturation {
  * @returns         the line, or undefined where the record has none
  */
 export function saturationOf(material: Material, x = 0): Saturation | undefined {
-  const line = material.record.thermodynamics === undefined ? undefined : material.engine.equation!.line;
+  const line = material.record.thermodynamics === undefined ? undefined : material.engine.equation.line;
   if (line !== undefined) {
     let ready = lines.get(line);
     if (ready === undefined) {

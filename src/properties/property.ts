@@ -93,7 +93,7 @@ export function propertyIn(material: Material, property: PropertyId, taken: Take
   if ((property === 'compressibilityFactor' || property === 'isentropicExponent') && !gaseous) return undefined;
   const equation = record.thermodynamics;
   if (equation !== undefined && property in fromEquation) {
-    const value = fromEquation[property as keyof typeof fromEquation](engine.point(sample), engine.equation!.gasConstant);
+    const value = fromEquation[property as keyof typeof fromEquation](engine.point(sample), engine.equation.gasConstant);
     const bands = equation.uncertainty[property] ?? equation.uncertainty['density'] ?? [];
     return finished(material, property, value, { ...equation, uncertainty: bands }, taken);
   }

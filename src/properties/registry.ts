@@ -3,6 +3,7 @@ import { helmholtz, type HelmholtzConstants } from './models/helmholtz.ts';
 import { humidAir, type HumidAir } from './models/humid-air.ts';
 import { if97, type WaterConstants } from './models/if97.ts';
 import * as laws from './models/laws.ts';
+import { lineOf } from './models/point.ts';
 import { lemmonJacobsenConductivity, lemmonJacobsenViscosity, type GasConductivityConstants, type GasViscosityConstants } from './models/gas-transport.ts';
 import { waterConductivity, waterCriticalFactor, waterViscosity, type WaterConductivityConstants, type WaterViscosityConstants } from './models/water-transport.ts';
 import type { EquationModel, PropertyModel, Sample } from './sample.ts';
@@ -102,7 +103,7 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
       const conductivity = waterConductivity(c, () => engine.value('viscosity', sample));
       return (s) => {
         sample = s;
-        return conductivity(engine.point(s), engine.equation!.gasConstant);
+        return conductivity(engine.point(s), engine.equation.gasConstant);
       };
     },
   },
@@ -117,7 +118,7 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
     constants: ['molarMass', 'epsilon', 'sigma', 'temperature', 'density', 'dilute', 'terms', 'critical'],
     make(c: GasConductivityConstants, engine) {
       let sample: Sample;
-      const conductivity = lemmonJacobsenConductivity(c, { viscosity: () => engine.value('viscosity', sample), equation: engine.equation! });
+      const conductivity = lemmonJacobsenConductivity(c, { viscosity: () => engine.value('viscosity', sample), equation: engine.equation });
       return (s) => {
         sample = s;
         return conductivity(engine.point(s));
@@ -135,7 +136,7 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
     constants: ['dilute', 'dense', 'temperature', 'density', 'critical'],
     make(c: CarbonDioxideConductivityConstants, engine) {
       let sample: Sample;
-      const conductivity = carbonDioxideConductivity(c, { viscosity: () => engine.value('viscosity', sample), equation: engine.equation! });
+      const conductivity = carbonDioxideConductivity(c, { viscosity: () => engine.value('viscosity', sample), equation: engine.equation });
       return (s) => {
         sample = s;
         return conductivity(engine.point(s));
@@ -149,16 +150,16 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
   'saturation-temperature': {
     constants: [],
     make(_c, engine) {
-      const line = engine.equation!.line!;
-      return (s) => line.boiling?.(s.p) ?? boilingTemperature(line.bubble, s.p, line.from, line.to);
+      const line = lineOf(engine.equation);
+      return (s) => line.boiling?.(s.p) ?? boilingTemperature((T) => line.bubble(T), s.p, line.from, line.to);
     },
   },
   'latent-heat': {
     constants: [],
     make(_c, engine) {
-      const equation = engine.equation!;
+      const equation = engine.equation;
       return (s) => {
-        const p = equation.line!.bubble(s.T);
+        const p = lineOf(equation).bubble(s.T);
         return equation.at(s.T, p, 'vapour').enthalpy - equation.at(s.T, p, 'liquid').enthalpy;
       };
     },

@@ -16,7 +16,8 @@ export interface Sample {
 
 /** What a correlation may ask its material for. */
 export interface Engine {
-  readonly equation?: EquationOfState;
+  /** Throws where the record has none: the caller knows that it has. */
+  readonly equation: EquationOfState;
   /** Thermodynamic properties at the sample; kept for the last state. */
   point(sample: Sample): Point;
   /** The equation of state set to the composition of the sample. */

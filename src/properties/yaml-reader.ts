@@ -45,14 +45,14 @@ export function yamlReader(text: string, file: string): YamlReader {
     value,
     complain,
     quantity(path, given, inUnit) {
-      const match = quantityText.exec(String(given));
+      const match = quantityText.exec(shown(given));
       const expected = `a number with a unit of ${inUnit}`;
       if ((typeof given !== 'string' && typeof given !== 'number') || match === null) {
         complain(path, { code: 'wrong-quantity', message: `"${shown(given)}" is not a quantity`, expected });
         return Number.NaN;
       }
       try {
-        const found = unit(match[2]!);
+        const found = unit(match[2] ?? '');
         const wanted = unit(inUnit);
         if (found.dimension.some((e, i) => e !== wanted.dimension[i])) complain(path, { code: 'wrong-dimension', message: `"${shown(given)}" is not in a unit of ${inUnit}`, expected });
         return scaled(Number(match[1]), found.factor, found.offset);
@@ -75,7 +75,8 @@ export function yamlReader(text: string, file: string): YamlReader {
   };
 }
 
-const shown = (given: unknown): string => (typeof given === 'object' ? JSON.stringify(given) : String(given)).slice(0, 80);
+/** What was given, as a short text for a message. */
+export const shown = (given: unknown): string => (typeof given === 'string' ? given : (JSON.stringify(given) ?? 'nothing')).slice(0, 80);
 
 function place(lines: LineCounter, offset: number): { line: number; column: number } {
   const { line, col } = lines.linePos(offset);

@@ -18,7 +18,7 @@ describe('runbrief material', () => {
     expect(Object.keys(document)).toEqual(['material', 'state', 'properties']);
     expect(document.material).toBe('water');
     expect(document.state).toEqual({ temperature: expect.closeTo(393.36, 1) as number, pressure: 2e5, phase: 'vapour' });
-    expect(Object.keys(document.properties['density']!)).toEqual(['value', 'unit', 'uncertainty', 'source', 'withinRange', 'range']);
+    expect(Object.keys(document.properties['density'] ?? {})).toEqual(['value', 'unit', 'uncertainty', 'source', 'withinRange', 'range']);
     expect(document.properties['density']).toMatchObject({ unit: 'kg/m^3', withinRange: true });
     for (const id of ['density', 'viscosity', 'thermalConductivity', 'specificHeatCapacity', 'thermalExpansion', 'speedOfSound', 'kinematicViscosity', 'thermalDiffusivity', 'prandtl', 'vapourPressure', 'saturationTemperature', 'latentHeat', 'surfaceTension', 'meltingTemperature', 'molarMass']) expect(document.properties).toHaveProperty(id);
   });

@@ -64,8 +64,8 @@ export const carbonDioxideConductivity = (c: CarbonDioxideConductivityConstants,
   const t = at.temperature / c.temperature;
   const delta = at.density / c.density;
   let below = 0;
-  for (let i = c.dilute.length - 1; i >= 0; i--) below = below / t + c.dilute[i]!;
+  for (let i = c.dilute.length - 1; i >= 0; i--) below = below / t + (c.dilute[i] as number);
   let dense = 0;
-  for (let i = c.dense.length - 1; i >= 0; i--) dense = (dense + c.dense[i]![0]! + c.dense[i]![1]! * t) * delta;
+  for (const [b1, b2] of c.dense.toReversed() as [number, number][]) dense = (dense + b1 + b2 * t) * delta;
   return (1e-3 * Math.sqrt(t)) / below + dense + criticalEnhancement({ constants: c.critical, at, viscosity: given.viscosity, equation: given.equation });
 };

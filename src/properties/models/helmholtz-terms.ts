@@ -45,23 +45,23 @@ export function residualPart(terms: ResidualTerms): { first: (tau: number, delta
   const run = (tau: number, delta: number, full: boolean): Residual => {
     if (tau !== tauKept) {
       const log = Math.log(tau);
-      for (let i = 0; i < count; i++) warmed[i] = n[i]! * Math.exp(t[i]! * log);
+      for (let i = 0; i < count; i++) warmed[i] = (n[i] as number) * Math.exp((t[i] as number) * log);
       tauKept = tau;
     }
     powers[0] = 1;
-    for (let i = 1; i < powers.length; i++) powers[i] = powers[i - 1]! * delta;
-    for (let i = 1; i < decays.length; i++) decays[i] = Math.exp(-powers[i]!);
+    for (let i = 1; i < powers.length; i++) powers[i] = (powers[i - 1] as number) * delta;
+    for (let i = 1; i < decays.length; i++) decays[i] = Math.exp(-(powers[i] as number));
     let a = 0, ad = 0, add = 0, at = 0, att = 0, adt = 0;
     for (let i = 0; i < count; i++) {
-      const ci = c[i]!;
-      const bend = ci === 0 ? 0 : ci * powers[ci]!;
-      const v = warmed[i]! * powers[d[i]!]! * (ci === 0 ? 1 : decays[ci]!);
-      const slope = d[i]! - bend;
+      const ci = (c[i] as number);
+      const bend = ci === 0 ? 0 : ci * (powers[ci] as number);
+      const v = (warmed[i] as number) * (powers[d[i] as number] as number) * (ci === 0 ? 1 : (decays[ci] as number));
+      const slope = (d[i] as number) - bend;
       a += v;
       ad += v * slope;
       add += v * (slope * (slope - 1) - ci * bend);
       if (full) {
-        const ti = t[i]!;
+        const ti = (t[i] as number);
         at += v * ti;
         att += v * ti * (ti - 1);
         adt += v * ti * slope;

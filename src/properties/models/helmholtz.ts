@@ -15,6 +15,17 @@ export interface IdealTerms {
   readonly mixed?: readonly (readonly number[])[];
 }
 
+/** Saturated densities and pressures as printed: `pressure` of a pure fluid, `bubble` and `dew` of a mixture. */
+interface SaturationStart {
+  readonly from: number;
+  readonly to: number;
+  readonly liquid: Ancillary;
+  readonly vapour: Ancillary;
+  readonly pressure?: Ancillary;
+  readonly bubble?: Ancillary;
+  readonly dew?: Ancillary;
+}
+
 export interface HelmholtzConstants {
   /** Reducing temperature [K] and density [kg/m^3]. */
   readonly temperature: number;
@@ -26,7 +37,7 @@ export interface HelmholtzConstants {
   readonly ideal: IdealTerms;
   readonly residual: ResidualTerms;
   /** Start values of the saturation line. */
-  readonly saturation?: { readonly from: number; readonly to: number; readonly liquid: Ancillary; readonly vapour: Ancillary; readonly pressure?: Ancillary; readonly bubble?: Ancillary; readonly dew?: Ancillary };
+  readonly saturation?: SaturationStart;
 }
 
 /** tau alpha0_tau and tau^2 alpha0_tautau. */
@@ -70,8 +81,8 @@ export function helmholtz(constants: HelmholtzConstants): EquationOfState {
   const residual = residualPart(constants.residual);
   const ideal = idealPart(constants.ideal);
   const start = constants.saturation;
-  const liquidStart = start && ancillary(start.liquid);
-  const vapourStart = start && ancillary(start.vapour);
+  const liquidStart = start === undefined ? () => 0 : ancillary(start.liquid);
+  const vapourStart = start === undefined ? () => constants.densest : ancillary(start.vapour);
 
   const of = (T: number, rho: number): Point => {
     const tau = Tr / T;
@@ -104,9 +115,9 @@ export function helmholtz(constants: HelmholtzConstants): EquationOfState {
       const edge = Math.max(T, start.from);
       // The start values err by up to a few parts in a thousand; beyond them lies the region without a stable state.
       if (side === 'liquid') {
-        low = liquidStart!(edge) * 0.99;
+        low = liquidStart(edge) * 0.99;
         rho = low * 1.012;
-      } else high = Math.min(constants.densest, vapourStart!(edge) * 1.05);
+      } else high = Math.min(constants.densest, vapourStart(edge) * 1.05);
     }
     if (!(rho < high)) rho = low + 0.7 * (high - low);
     for (let i = 0; i < 60; i++) {
@@ -127,13 +138,12 @@ export function helmholtz(constants: HelmholtzConstants): EquationOfState {
     return rho;
   };
 
-  const line = start && lineOf(constants, residual);
+  const line = start && lineOf(constants, start, residual);
   return { gasConstant: R, of, at: (T, p, side) => of(T, densityAt(T, p, side)), ...(line === undefined ? {} : { line }) };
 }
 
-function lineOf(constants: HelmholtzConstants, residual: ReturnType<typeof residualPart>): SaturationLine {
-  const start = constants.saturation!;
+function lineOf(constants: HelmholtzConstants, start: SaturationStart, residual: ReturnType<typeof residualPart>): SaturationLine {
   if (start.bubble !== undefined && start.dew !== undefined) return { from: start.from, to: start.to, bubble: ancillary(start.bubble), dew: ancillary(start.dew) };
-  const equal = saturationByMaxwell({ ...constants, liquid: ancillary(start.liquid), vapour: ancillary(start.vapour), pressure: ancillary(start.pressure!), first: residual.first, to: start.to });
+  const equal = saturationByMaxwell({ ...constants, liquid: ancillary(start.liquid), vapour: ancillary(start.vapour), pressure: ancillary(start.pressure as Ancillary), first: residual.first, to: start.to });
   return { from: start.from, to: start.to, bubble: equal, dew: equal };
 }

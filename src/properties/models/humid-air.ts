@@ -59,12 +59,12 @@ export function humidAir(c: { cross: readonly (readonly number[])[] }, partners:
 
   const virials = (T: number): Virials => {
     if (T === keptT) return kept;
-    const thin = air.equation!.of(T, 0.01);
-    const steam = water.equation!.at(T, 200, 'vapour');
+    const thin = air.equation.of(T, 0.01);
+    const steam = water.equation.at(T, 200, 'vapour');
     keptT = T;
     kept = {
-      air: (thin.pressure / (thin.density * air.equation!.gasConstant * T) - 1) / (thin.density / Ma),
-      water: ((200 / (steam.density * water.equation!.gasConstant * T) - 1) * R * T) / 200,
+      air: (thin.pressure / (thin.density * air.equation.gasConstant * T) - 1) / (thin.density / Ma),
+      water: ((200 / (steam.density * water.equation.gasConstant * T) - 1) * R * T) / 200,
       cross: crossVirial(c.cross, T),
     };
     return kept;
@@ -73,7 +73,7 @@ export function humidAir(c: { cross: readonly (readonly number[])[] }, partners:
     const ps = water.saturation(T);
     if (p <= ps) return 1;
     const B = virials(T);
-    const liquid = Mw / water.equation!.at(T, p, 'liquid').density;
+    const liquid = Mw / water.equation.at(T, p, 'liquid').density;
     let f = 1;
     for (let i = 0; i < 4; i++) {
       const xa = Math.max(0, 1 - (f * ps) / p);
@@ -99,7 +99,7 @@ export function humidAir(c: { cross: readonly (readonly number[])[] }, partners:
     const x = m.water;
     const w = (x * Mw) / m.molarMass;
     const dry = { ...air.point({ T, p, side: 'vapour', x: 0 }) };
-    const steam = x > 0 ? water.equation!.at(T, Math.max(x * p, 1), 'vapour') : undefined;
+    const steam = x > 0 ? water.equation.at(T, Math.max(x * p, 1), 'vapour') : undefined;
     const v = volume(T, p, x);
     const step = 0.05;
     const vT = (volume(T + step, p, x) - volume(T - step, p, x)) / (2 * step);

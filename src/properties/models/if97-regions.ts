@@ -65,7 +65,7 @@ export function region1(c: If97Constants): Region {
 
 function vapourRegion(R: number, ideal: readonly (readonly number[])[], residual: readonly (readonly number[])[], reducingT: number, shift: number): Region {
   const real = powerSum(residual);
-  const gas = powerSum(ideal.map(([J, n]) => [0, J!, n!]));
+  const gas = powerSum((ideal as readonly (readonly [number, number])[]).map(([J, n]) => [0, J, n]));
   const g: Gibbs = { p: 0, pp: 0, t: 0, tt: 0, pt: 0 };
   return (T, p) => {
     const pi = p / 1e6;

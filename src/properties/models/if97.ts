@@ -27,10 +27,10 @@ export interface WaterConstants extends If97Constants {
  * @source   IAPWS R7-97(2012), eq. (30), table 34
  */
 export const saturationPressure = (n: readonly number[]) => (T: number): number => {
-  const theta = T + n[8]! / (T - n[9]!);
-  const A = theta * theta + n[0]! * theta + n[1]!;
-  const B = n[2]! * theta * theta + n[3]! * theta + n[4]!;
-  const C = n[5]! * theta * theta + n[6]! * theta + n[7]!;
+  const theta = T + (n[8] as number) / (T - (n[9] as number));
+  const A = theta * theta + (n[0] as number) * theta + (n[1] as number);
+  const B = (n[2] as number) * theta * theta + (n[3] as number) * theta + (n[4] as number);
+  const C = (n[5] as number) * theta * theta + (n[6] as number) * theta + (n[7] as number);
   return 1e6 * ((2 * C) / (-B + Math.sqrt(B * B - 4 * A * C))) ** 4;
 };
 
@@ -43,11 +43,11 @@ export const saturationPressure = (n: readonly number[]) => (T: number): number 
  */
 export const saturationTemperature = (n: readonly number[]) => (p: number): number => {
   const beta = (p / 1e6) ** 0.25;
-  const E = beta * beta + n[2]! * beta + n[5]!;
-  const F = n[0]! * beta * beta + n[3]! * beta + n[6]!;
-  const G = n[1]! * beta * beta + n[4]! * beta + n[7]!;
+  const E = beta * beta + (n[2] as number) * beta + (n[5] as number);
+  const F = (n[0] as number) * beta * beta + (n[3] as number) * beta + (n[6] as number);
+  const G = (n[1] as number) * beta * beta + (n[4] as number) * beta + (n[7] as number);
   const D = (2 * G) / (-F - Math.sqrt(F * F - 4 * E * G));
-  return (n[9]! + D - Math.sqrt((n[9]! + D) ** 2 - 4 * (n[8]! + n[9]! * D))) / 2;
+  return ((n[9] as number) + D - Math.sqrt(((n[9] as number) + D) ** 2 - 4 * ((n[8] as number) + (n[9] as number) * D))) / 2;
 };
 
 /**

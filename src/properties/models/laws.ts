@@ -12,7 +12,7 @@ const toSI = (c: Scaled, y: number): number => (c.gives === undefined ? y : y * 
 export const polynomial = (c: Scaled & { terms: readonly number[]; origin?: number; scale?: number }) => (T: number): number => {
   const x = (inUnit(c, T) - (c.origin ?? 0)) / (c.scale ?? 1);
   let y = 0;
-  for (let i = c.terms.length - 1; i >= 0; i--) y = y * x + c.terms[i]!;
+  for (let i = c.terms.length - 1; i >= 0; i--) y = y * x + (c.terms[i] as number);
   return toSI(c, y);
 };
 
@@ -77,9 +77,9 @@ export const table = (c: Scaled & { rows: readonly (readonly number[])[]; interp
   const x = inUnit(c, T);
   const rows = c.rows as readonly [number, number][];
   let i = 1;
-  while (i < rows.length - 1 && x > rows[i]![0]) i++;
-  const [x0, y0] = rows[i - 1]!;
-  const [x1, y1] = rows[i] ?? rows[i - 1]!;
+  while (i < rows.length - 1 && x > (rows[i] as [number, number])[0]) i++;
+  const [x0, y0] = rows[i - 1] as [number, number];
+  const [x1, y1] = rows[i] ?? [x0, y0];
   const share = x1 === x0 ? 0 : (x - x0) / (x1 - x0);
   return toSI(c, c.interpolate === 'logarithm' ? y0 * (y1 / y0) ** share : y0 + (y1 - y0) * share);
 };
@@ -88,7 +88,7 @@ export const table = (c: Scaled & { rows: readonly (readonly number[])[]; interp
 export const reciprocalPolynomial = (c: Scaled & { value: number; terms: readonly number[]; origin?: number }) => (T: number): number => {
   const x = inUnit(c, T) - (c.origin ?? 0);
   let below = 0;
-  for (let i = c.terms.length - 1; i >= 0; i--) below = below * x + c.terms[i]!;
+  for (let i = c.terms.length - 1; i >= 0; i--) below = below * x + (c.terms[i] as number);
   return toSI(c, c.value / below);
 };
 
@@ -106,9 +106,9 @@ export const mixturePolynomial = (c: Scaled & { origin: number; share: number; r
   const x = share - c.share;
   let y = 0;
   for (let i = c.rows.length - 1; i >= 0; i--) {
-    const row = c.rows[i]!;
+    const row = c.rows[i] as readonly number[];
     let along = 0;
-    for (let j = row.length - 1; j >= 0; j--) along = along * x + row[j]!;
+    for (let j = row.length - 1; j >= 0; j--) along = along * x + (row[j] as number);
     y = y * t + along;
   }
   return toSI(c, c.of === 'logarithm' ? Math.exp(y) : y);

@@ -36,6 +36,12 @@ export interface SaturationLine {
   boiling?(p: number): number;
 }
 
+/** The saturation line of an equation of state that has one. */
+export function lineOf(equation: EquationOfState): SaturationLine {
+  if (equation.line === undefined) throw new Error('this equation of state has no saturation line');
+  return equation.line;
+}
+
 /** What every equation of state offers. */
 export interface EquationOfState {
   /** Properties at T [K] and p [Pa]; `side` is used only below the critical temperature. The caller has checked the phase. */

@@ -15,9 +15,9 @@ export interface Sum {
  * @returns     function of x and y, both nonzero, that fills and returns one shared record
  */
 export function powerSum(rows: readonly (readonly number[])[]): (x: number, y: number) => Sum {
-  const I = Int32Array.from(rows, (row) => row[0]!);
-  const J = Int32Array.from(rows, (row) => row[1]!);
-  const n = Float64Array.from(rows, (row) => row[2]!);
+  const I = Int32Array.from(rows, (row) => (row[0] as number));
+  const J = Int32Array.from(rows, (row) => (row[1] as number));
+  const n = Float64Array.from(rows, (row) => (row[2] as number));
   const xs = ladder(I);
   const ys = ladder(J);
   const at = Int32Array.from(I, (i) => i - xs.lowest);
@@ -28,9 +28,9 @@ export function powerSum(rows: readonly (readonly number[])[]): (x: number, y: n
     ys.fill(y);
     let s = 0, sx = 0, sxx = 0, sy = 0, syy = 0, sxy = 0;
     for (let k = 0; k < n.length; k++) {
-      const v = n[k]! * xs.values[at[k]!]! * ys.values[to[k]!]!;
-      const i = I[k]!;
-      const j = J[k]!;
+      const v = (n[k] as number) * (xs.values[at[k] as number] as number) * (ys.values[to[k] as number] as number);
+      const i = (I[k] as number);
+      const j = (J[k] as number);
       s += v;
       sx += v * i;
       sxx += v * i * (i - 1);
@@ -55,15 +55,15 @@ export function powerSum(rows: readonly (readonly number[])[]): (x: number, y: n
  * @returns     function of x and y
  */
 export function polynomialOfTwo(rows: readonly (readonly number[])[]): (x: number, y: number) => number {
-  const width = Math.max(...rows.map((row) => row[1]!)) + 1;
-  const height = Math.max(...rows.map((row) => row[0]!)) + 1;
+  const width = Math.max(...rows.map((row) => (row[1] as number))) + 1;
+  const height = Math.max(...rows.map((row) => (row[0] as number))) + 1;
   const full = new Float64Array(width * height);
   for (const [i, j, n] of rows as readonly [number, number, number][]) full[i * width + j] = n;
   return (x, y) => {
     let sum = 0;
     for (let i = height - 1; i >= 0; i--) {
       let row = 0;
-      for (let j = width - 1; j >= 0; j--) row = row * y + full[i * width + j]!;
+      for (let j = width - 1; j >= 0; j--) row = row * y + (full[i * width + j] as number);
       sum = sum * x + row;
     }
     return sum;
@@ -83,9 +83,9 @@ function ladder(exponents: Int32Array): { lowest: number; values: Float64Array; 
       if (x === kept) return;
       kept = x;
       values[-lowest] = 1;
-      for (let i = 1 - lowest; i < values.length; i++) values[i] = values[i - 1]! * x;
+      for (let i = 1 - lowest; i < values.length; i++) values[i] = (values[i - 1] as number) * x;
       const inverse = 1 / x;
-      for (let i = -lowest - 1; i >= 0; i--) values[i] = values[i + 1]! * inverse;
+      for (let i = -lowest - 1; i >= 0; i--) values[i] = (values[i + 1] as number) * inverse;
     },
   };
 }

@@ -30,9 +30,9 @@ function correlationLength(T: number, delta: number, zeta: number, reference: nu
 
 /** Reduced compressibility at 1.5 T_c as the release fits it over density. */
 function referenceCompressibility(A: readonly (readonly number[])[], delta: number): number {
-  const row = A[delta <= 0.310559006 ? 0 : delta <= 0.776397516 ? 1 : delta <= 1.242236025 ? 2 : delta <= 1.863354037 ? 3 : 4]!;
+  const row = A[delta <= 0.310559006 ? 0 : delta <= 0.776397516 ? 1 : delta <= 1.242236025 ? 2 : delta <= 1.863354037 ? 3 : 4] as readonly number[];
   let sum = 0;
-  for (let i = row.length - 1; i >= 0; i--) sum = sum * delta + row[i]!;
+  for (let i = row.length - 1; i >= 0; i--) sum = sum * delta + (row[i] as number);
   return 1 / sum;
 }
 
@@ -50,7 +50,7 @@ export function waterViscosity(c: WaterViscosityConstants): (T: number, rho: num
     const tau = 1 / t;
     const delta = rho / rhoc;
     let sum = 0;
-    for (let i = c.H0.length - 1; i >= 0; i--) sum = sum * tau + c.H0[i]!;
+    for (let i = c.H0.length - 1; i >= 0; i--) sum = sum * tau + (c.H0[i] as number);
     return ((1e-4 * Math.sqrt(t)) / sum) * Math.exp(delta * dense(tau - 1, delta - 1));
   };
 }
@@ -96,7 +96,7 @@ export function waterConductivity(c: WaterConductivityConstants, viscosity: (T: 
     const tau = 1 / t;
     const delta = at.density / rhoc;
     let sum = 0;
-    for (let i = c.L0.length - 1; i >= 0; i--) sum = sum * tau + c.L0[i]!;
+    for (let i = c.L0.length - 1; i >= 0; i--) sum = sum * tau + (c.L0[i] as number);
     const plain = (Math.sqrt(t) / sum) * Math.exp(delta * dense(tau - 1, delta - 1));
     const zeta = delta * at.compressibility * pc;
     const xi = correlationLength(T, delta, zeta, referenceCompressibility(c.A, delta));
