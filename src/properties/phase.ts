@@ -54,6 +54,28 @@ export interface PhaseAt {
   readonly flags: readonly string[];
 }
 
+/** Saturation at a state, computed when it is read: most states never ask. */
+class SaturationAt {
+  readonly #line: Saturation;
+  readonly #T: number;
+  readonly #p: number;
+
+  constructor(line: Saturation, T: number, p: number) {
+    this.#line = line;
+    this.#T = T;
+    this.#p = p;
+  }
+
+  get pressure(): number | undefined {
+    return this.#T >= this.#line.from && this.#T <= this.#line.to ? this.#line.bubble(this.#T) : undefined;
+  }
+
+  get temperature(): number | undefined {
+    const boiling = this.#line.boiling(this.#p);
+    return Number.isFinite(boiling) ? boiling : undefined;
+  }
+}
+
 const K = (T: number): string => `${Number(T.toPrecision(5))} K (${Number((T - 273.15).toFixed(2))} degC)`;
 
 /**
@@ -86,15 +108,7 @@ export function phaseAt(material: Material, T: number, p: number, x = 0): PhaseA
     const only: Phase = material.phases.includes('liquid') ? 'liquid' : 'gas';
     return { phase: only, flags };
   }
-  const saturation = {
-    get pressure() {
-      return T >= line.from && T <= line.to ? line.bubble(T) : undefined;
-    },
-    get temperature() {
-      const boiling = line.boiling(p);
-      return Number.isFinite(boiling) ? boiling : undefined;
-    },
-  };
+  const saturation = new SaturationAt(line, T, p);
   if (T >= line.to) return { phase: critical !== undefined && p >= critical.pressure ? 'supercritical' : 'gas', saturation, flags };
   const edge = Math.max(T, line.from);
   const phase: Phase = p > line.bubble(edge) * (1 + 1e-7) ? 'liquid' : p < line.dew(edge) * (1 - 1e-7) ? 'vapour' : 'two-phase';
@@ -124,19 +138,19 @@ export function takenPhase(material: Material, state: State): PhaseAt & { readon
   const x = state.composition ?? state.humidity ?? 0;
   const found = phaseAt(material, state.temperature, state.pressure, x);
   const asked = state.phase === undefined || state.phase === 'two-phase' ? material.asked : side(state.phase);
-  const where = `at ${K(state.temperature)} and ${Number((state.pressure / 1e5).toPrecision(5))} bar`;
+  const where = (): string => `at ${K(state.temperature)} and ${Number((state.pressure / 1e5).toPrecision(5))} bar`;
   if (found.phase === 'two-phase') {
-    if (asked === undefined || asked === 'solid') throw new Problem({ code: 'between-phases', message: `${material.name} is on its saturation line ${where}`, expected: 'the phase as well: saturated liquid or saturated vapour' });
+    if (asked === undefined || asked === 'solid') throw new Problem({ code: 'between-phases', message: `${material.name} is on its saturation line ${where()}`, expected: 'the phase as well: saturated liquid or saturated vapour' });
     return { ...found, phase: asked, side: asked };
   }
   const stable = side(found.phase);
   const either = found.phase === 'supercritical' || (found.phase === 'liquid' && material.critical !== undefined && state.pressure >= material.critical.pressure);
   if (asked !== undefined && asked !== stable && !either) {
     const boils = found.saturation?.temperature;
-    throw new Problem({ code: 'no-such-phase', message: `${material.name} is ${words[found.phase]} ${where}, not ${asked === 'vapour' ? 'a vapour' : `a ${asked}`}`, expected: boils === undefined ? `a state where it is ${asked}` : `a temperature ${asked === 'vapour' ? 'above' : 'below'} ${K(boils)} at this pressure` });
+    throw new Problem({ code: 'no-such-phase', message: `${material.name} is ${words[found.phase]} ${where()}, not ${asked === 'vapour' ? 'a vapour' : `a ${asked}`}`, expected: boils === undefined ? `a state where it is ${asked}` : `a temperature ${asked === 'vapour' ? 'above' : 'below'} ${K(boils)} at this pressure` });
   }
   if (!material.phases.includes(stable) && !(stable === 'vapour' && found.phase === 'supercritical')) {
-    throw new Problem({ code: 'not-covered', message: `${material.name} is ${words[found.phase]} ${where}, and its record covers ${material.phases.join(' and ')} only`, expected: stable === 'solid' && found.flags[0] !== undefined ? `a temperature that is not ${found.flags[0]}` : 'another state, or the properties themselves' });
+    throw new Problem({ code: 'not-covered', message: `${material.name} is ${words[found.phase]} ${where()}, and its record covers ${material.phases.join(' and ')} only`, expected: stable === 'solid' && found.flags[0] !== undefined ? `a temperature that is not ${found.flags[0]}` : 'another state, or the properties themselves' });
   }
   return { ...found, side: stable };
 }

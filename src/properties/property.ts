@@ -56,6 +56,9 @@ function shareOf(material: Material, state: State): number {
   return given;
 }
 
+/** The state last asked for, by material: properties are asked for one after the other. */
+const taken = new WeakMap<Material, State & { readonly taken: TakenState }>();
+
 /**
  * A property of a material at a state.
  *
@@ -66,7 +69,12 @@ function shareOf(material: Material, state: State): number {
  * @throws          {Problem} see takeState; not-a-number where the correlation fails
  */
 export function propertyAt(material: Material, property: PropertyId, state: State): PropertyValue | undefined {
-  return propertyIn(material, property, takeState(material, state));
+  const { temperature, pressure, humidity, composition, phase } = state;
+  const last = taken.get(material);
+  if (last !== undefined && last.temperature === temperature && last.pressure === pressure && last.humidity === humidity && last.composition === composition && last.phase === phase) return propertyIn(material, property, last.taken);
+  const now = takeState(material, state);
+  taken.set(material, { ...state, taken: now });
+  return propertyIn(material, property, now);
 }
 
 /**
@@ -78,7 +86,7 @@ export function propertyAt(material: Material, property: PropertyId, state: Stat
  */
 export function emissivities(material: Material, T: number): PropertyValue[] {
   const taken: TakenState = { sample: { T, p: 101325, side: 'liquid', x: 0 }, phase: 'solid', solid: true, flags: [] };
-  return (material.record.properties['emissivity'] ?? []).map((entry) => finished(material, 'emissivity', material.engine.evaluate(entry, taken.sample), entry, taken));
+  return (material.record.properties['emissivity'] ?? []).map((entry) => finished(material, 'emissivity', material.engine.evaluate(entry, taken.sample), entry, taken, entry.uncertainty));
 }
 
 /** As `propertyAt`, for a state already taken. */
@@ -95,27 +103,27 @@ export function propertyIn(material: Material, property: PropertyId, taken: Take
   if (equation !== undefined && property in fromEquation) {
     const value = fromEquation[property as keyof typeof fromEquation](engine.point(sample), engine.equation.gasConstant);
     const bands = equation.uncertainty[property] ?? equation.uncertainty['density'] ?? [];
-    return finished(material, property, value, { ...equation, uncertainty: bands }, taken);
+    return finished(material, property, value, equation, taken, bands);
   }
   const entry = engine.entry(property, sample, solid ? 'solid' : undefined);
   if (entry !== undefined) {
     if (ofSubstance.includes(property) && property !== 'emissivity' && !insideAny(entry.ranges, sample)) return undefined;
-    return finished(material, property, engine.evaluate(entry, sample), entry, taken);
+    return finished(material, property, engine.evaluate(entry, sample), entry, taken, entry.uncertainty);
   }
   if (property === 'thermalExpansion') return expansionFromDensity(material, taken);
   return undefined;
 }
 
-const noteOf = (entry: Entry): string | undefined => (entry.surface === undefined ? entry.notes : `surface: ${entry.surface}`);
+const noteOf = (entry: Omit<Entry, 'uncertainty'>): string | undefined => (entry.surface === undefined ? entry.notes : `surface: ${entry.surface}`);
 
 const plain = (value: number, phase: Phase, source: string): PropertyValue => ({ value, uncertainty: 1e-5, source, withinRange: true, range: {}, phase, flags: [] });
 
-function finished(material: Material, property: string, value: number, entry: Entry, taken: TakenState): PropertyValue {
+function finished(material: Material, property: string, value: number, entry: Omit<Entry, 'uncertainty'>, taken: TakenState, bands: readonly Band[]): PropertyValue {
   if (!Number.isFinite(value)) throw new Problem({ code: 'not-a-number', message: `${property} of ${material.name} cannot be computed at ${Number(taken.sample.T.toPrecision(6))} K and ${Number(taken.sample.p.toPrecision(6))} Pa`, expected: `a state within ${entry.ranges.map(boxText).join(' or ')}` });
   const box = entry.ranges.find((one) => inside(one, taken.sample));
   const within = box !== undefined || entry.ranges.length === 0;
   const shown = box ?? entry.ranges[0] ?? {};
-  const uncertainty = bandOf(entry.uncertainty, taken.sample, value) * (within ? 1 : 2);
+  const uncertainty = bandOf(bands, taken.sample, value) * (within ? 1 : 2);
   return {
     value,
     uncertainty,
@@ -181,7 +189,7 @@ function expansionFromDensity(material: Material, taken: TakenState): PropertyVa
   const step = 0.5;
   const at = (T: number): number => material.engine.evaluate(entry, { ...taken.sample, T });
   const value = -(at(taken.sample.T + step) - at(taken.sample.T - step)) / (2 * step * at(taken.sample.T));
-  return finished(material, 'thermalExpansion', value, { ...entry, source: `slope of the density: ${entry.source}`, uncertainty: [{ value: 0.1 }] }, taken);
+  return finished(material, 'thermalExpansion', value, { ...entry, source: `slope of the density: ${entry.source}` }, taken, [{ value: 0.1 }]);
 }
 
 export type { Side };
