@@ -28,9 +28,10 @@ const regime: Definition[] = [
 ];
 
 const heat: Definition[] = [
+  quantity('sideHeatedCavityCoreExcess', { symbol: 'Nu - 1', name: 'what the core flow of a shallow box adds to conduction', unit: '1' }, [way({ needs: ['rayleighHeight', aspect], value: (of) => shallowCavity({ rayleighHeight: of.rayleighHeight, aspect: of[aspect] }) - 1, formula: '(H/W)^2 Ra_H^2/362880', source: 'Cormack, Leal and Imberger, J. Fluid Mech. 65 (1974) 209' })]),
   ways('nusseltPlain', [
-    way({ needs: ['rayleigh', 'rayleighHeight', 'prandtl', aspect], range: { [aspect]: [0.01, 1] }, scatter: 0.15, value: (of) => shallow(of.rayleigh, of.rayleighHeight, of.prandtl, of[aspect]), formula: 'Nu = 1 + (H/W)^2 Ra_H^2/362880 while the second term is below 0.5, else the square', source: `Cormack, Leal and Imberger, J. Fluid Mech. 65 (1974) 209, from memory of this work; ${source}`, note: 'beyond the core regime the law of the square is carried over to a shallow box' }),
     way({ needs, range: { [aspect]: [1, 2], prandtl: [1e-3, 1e5], rayleigh: [1, 1e10] }, scatter: 0.12, value: (of) => berkovskyPolevikov({ rayleigh: of.rayleigh, prandtl: of.prandtl, aspect: Math.min(of[aspect], 1.999) }), formula: 'Nu = 0.18 (Pr Ra/(0.2 + Pr))^0.29, at least 1', source }),
+    way({ needs: ['sideHeatedCavityCoreExcess', aspect], range: { [aspect]: [0.001, 1], sideHeatedCavityCoreExcess: [0, 0.5] }, scatter: 0.15, value: ({ sideHeatedCavityCoreExcess }) => 1 + sideHeatedCavityCoreExcess, formula: 'Nu = 1 + (H/W)^2 Ra_H^2/362880, shallow box', source: 'Cormack, Leal and Imberger, J. Fluid Mech. 65 (1974) 209; from memory of this work' }),
     way({ needs, range: { [aspect]: [2, 10], prandtl: [1e-3, 1e5], rayleigh: [1, 1e10] }, scatter: 0.15, value: (of) => berkovskyPolevikov({ rayleigh: of.rayleigh, prandtl: of.prandtl, aspect: Math.max(2, of[aspect]) }), formula: 'Nu = 0.22 (Pr Ra/(0.2 + Pr))^0.28 (H/W)^(-1/4), at least 1', source }),
     way({ needs, range: { [aspect]: [10, 110], prandtl: [0.5, 1], rayleigh: [1, 2e7] }, scatter: 0.12, value: (of) => elSherbiny({ rayleigh: of.rayleigh, aspect: of[aspect] }), formula: 'Nu = max(0.0605 Ra^(1/3), (1 + (0.104 Ra^0.293/(1 + (6310/Ra)^1.36))^3)^(1/3), 0.242 (Ra W/H)^0.272)', source: elsherbinySource, note: 'the data end near Ra 2e5 at H/W 40' }),
     way({ needs, range: { [aspect]: [10, 40], prandtl: [1, 2e4], rayleigh: [1, 1e7] }, scatter: 0.15, value: (of) => macgregorEmery({ rayleigh: of.rayleigh, prandtl: of.prandtl, aspect: of[aspect] }).layer, formula: 'Nu = 0.42 Ra^(1/4) Pr^0.012 (H/W)^(-0.3), at least 1', source: macgregor }),
@@ -39,15 +40,10 @@ const heat: Definition[] = [
     way({ needs, range: { [aspect]: [5, 110], prandtl: [0.5, 1], rayleigh: [1e2, 2e7] }, scatter: 0.12, value: (of) => elSherbiny({ rayleigh: of.rayleigh, aspect: of[aspect] }), formula: 'as for tall slots of air', source: elsherbinySource }),
     way({ needs, range: { [aspect]: [1, 40], prandtl: [1, 20], rayleigh: [1e6, 1e9] }, scatter: 0.2, value: (of) => macgregorEmery({ rayleigh: of.rayleigh, prandtl: of.prandtl, aspect: of[aspect] }).turbulent, formula: 'Nu = 0.046 Ra^(1/3)', source: macgregor }),
   ]),
-  ways('heatRate', [way({ needs: ['heatTransferCoefficient', 'wallArea@walls.left', 'hotTemperature', 'coldTemperature'], value: (of) => of.heatTransferCoefficient * of['wallArea@walls.left'] * (of.hotTemperature - of.coldTemperature), formula: 'Q = h H depth (T_h - T_c)', source: definition })]),
+  ways('heatRate', [way({ needs: ['heatTransferCoefficient', 'wallArea@walls.left', 'hotTemperature', 'coldTemperature', 'radiationFactorHeat'], value: (of) => of.radiationFactorHeat * of.heatTransferCoefficient * of['wallArea@walls.left'] * (of.hotTemperature - of.coldTemperature), formula: 'Q = h H depth (T_h - T_c), times F_r', source: definition })]),
   ways('biotWall', [way({ needs: ['wallResistance', 'heatTransferCoefficientPlain'], value: ({ wallResistance, heatTransferCoefficientPlain }) => 2 * wallResistance * heatTransferCoefficientPlain, formula: 'Bi_w = R_w 2 h_0: wall against its own layer', source: definition })]),
   ways('innerResistance', [way({ needs: ['heatTransferCoefficient'], value: ({ heatTransferCoefficient }) => 1 / (2 * heatTransferCoefficient), formula: 'R_i = 1/(2 h), from a wall to the mean of hot and cold', source: 'half of the resistance between hot and cold wall: the field is point symmetric' })]),
 ];
-
-function shallow(rayleigh: number, rayleighHeight: number, prandtl: number, ratio: number): number {
-  const core = shallowCavity({ rayleighHeight, aspect: ratio });
-  return core < 1.5 ? core : Math.max(1.5, berkovskyPolevikov({ rayleigh, prandtl, aspect: 1 }));
-}
 
 const layerNeeds = ['sideHeatedCavityLayerGrashof', 'prandtl', 'passageHeight', 'sizes.width'] as const;
 const prandtls = [0.01, 1000] as const;

@@ -161,6 +161,7 @@ export function materialOf(record: MaterialRecord, collection: Collection, asked
   const engine = engineOf(record, collection);
   const has = new Set<string>(Object.keys(record.properties));
   if (record.thermodynamics !== undefined) for (const id of Object.keys(record.thermodynamics.uncertainty)) has.add(id);
+  if (record.thermodynamics !== undefined && record.molarMass !== undefined) for (const id of ['compressibilityFactor', 'isentropicExponent']) has.add(id);
   if (has.has('density')) has.add('thermalExpansion');
   if (has.has('density') && has.has('viscosity')) has.add('kinematicViscosity');
   if (has.has('density') && has.has('specificHeatCapacity') && has.has('thermalConductivity')) has.add('thermalDiffusivity');

@@ -1,4 +1,4 @@
-import { quantity, way, type Definition } from '../workings/index.ts';
+import { quantity, way, wordWay, type Definition } from '../workings/index.ts';
 
 /** How near the fluid comes to another phase: cavitation, boiling, condensation, freezing. */
 export const phase: Definition[] = [
@@ -28,6 +28,12 @@ export const phase: Definition[] = [
       return 273.15 + (243.04 * x) / (17.625 - x);
     }, formula: 'T_dew from phi exp(17.625 t/(t + 243.04 degC)) = exp(17.625 t_dew/(t_dew + 243.04 degC))', source: 'Alduchov and Eskridge, J. Appl. Meteor. 35 (1996) 601, within 0.1 K', dimensional: 'constants in degrees Celsius' }),
     way({ needs: ['saturationTemperature'], when: { medium: 'gas', 'has.humidity': 'no' }, value: ({ saturationTemperature }) => saturationTemperature, formula: 'T_dew = T_sat(p)', source: 'a pure vapour condenses at its saturation temperature' }),
+  ]),
+  quantity('moisture', { symbol: '', name: 'what of the gas can condense', unit: 'word', words: ['humid', 'vapour', 'possible', 'no'] }, [
+    wordWay({ needs: ['fluid.humidity'], when: { medium: 'gas' }, word: () => 'humid', formula: 'humidity is given', source: 'the case' }),
+    wordWay({ needs: ['saturationTemperature'], when: { medium: 'gas' }, word: () => 'vapour', formula: 'the record has a saturation line', source: 'material record' }),
+    wordWay({ needs: ['lowestTemperature', 'farTemperature'], when: { medium: 'gas' }, word: ({ lowestTemperature, farTemperature }) => (lowestTemperature < 288.15 && lowestTemperature < farTemperature - 0.01 ? 'possible' : 'no'), formula: 'a wall below 15 degC and colder than the gas', source: 'common practice: real air is moist', dimensional: 'a temperature from practice' }),
+    wordWay({ needs: [], word: () => 'no', formula: 'a liquid, or no temperatures', source: 'definition' }),
   ]),
   quantity('condensationMargin', { symbol: 'T_w - T_dew', name: 'coldest wall above the dew point', unit: 'K', signed: true }, [
     way({ needs: ['lowestTemperature', 'dewTemperature'], when: { medium: 'gas' }, value: ({ lowestTemperature, dewTemperature }) => lowestTemperature - dewTemperature, formula: 'T_min - T_dew', source: 'definition' }),
