@@ -68,3 +68,4 @@ export const generalDefinitions: Definition[] = [
   ...radiation,
   ...nearWall,
 ];
+export { mostQuantities, piGroups, type Dimensioned, type PiGroup, type PiGroups } from './pi-groups.ts';
