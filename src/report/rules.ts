@@ -57,7 +57,7 @@ function branchText(b: EffectRule['branches'][number]): string[] {
 }
 
 function exampleText(facts: EffectRule['examples'][number]['facts'], outcome: string, why: string | undefined): string[] {
-  const given = Object.entries(facts).map(([id, value]) => `${id} ${value}`).join(', ');
+  const given = Object.entries(facts).map(([id, value]) => `${id} ${typeof value === 'number' ? Number(value.toPrecision(6)) : value}`).join(', ');
   return line(`${outcome}: ${given === '' ? 'nothing known' : given}${why === undefined ? '' : ` (${why})`}`, 2);
 }
 

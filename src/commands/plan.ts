@@ -1,0 +1,57 @@
+import about from '../../package.json' with { type: 'json' };
+import { vocabulary, type Assembled } from '../assemble/index.ts';
+import { readCaseFile } from '../case/index.ts';
+import { ladderDetails } from '../ladder/index.ts';
+import { plan, settleCase } from '../plan/index.ts';
+import { tableOver } from '../properties/index.ts';
+import { evaluateReference } from '../references/index.ts';
+import { asText, materialCsv, planBlocks, planDocument, planFiles, screen, writingOf, type PlanTables } from '../report/index.ts';
+import { Args, Base, Flags } from './base.ts';
+import { ownData, ownDataFlags } from './own-data.ts';
+import { writeInto } from './written.ts';
+
+/** `runbrief plan`: the plan of a case on one screen, in full, as JSON or as files. */
+export default class Plan extends Base {
+  static override examples = [
+    { command: 'runbrief plan line.case.yaml', description: 'the plan on one screen' },
+    { command: 'runbrief plan line.case.yaml --full', description: 'every section, decision and number as text' },
+    { command: 'runbrief plan line.case.yaml --into line', description: 'plan.md, plan.html, plan.json, checklist.md, near-wall.csv, properties.csv and the tables of the ladder' },
+    { command: 'runbrief plan line.case.yaml --json', description: 'the plan for other programs, numbers in SI' },
+  ];
+  static override args = { file: Args.string({ required: true, description: 'the case file; `runbrief template pipe` writes one to fill in' }) };
+  static override flags = {
+    full: Flags.boolean({ description: 'every section as text' }),
+    into: Flags.string({ helpValue: 'DIR', description: 'write the files of the plan into this folder' }),
+    force: Flags.boolean({ description: 'overwrite files that exist', dependsOn: ['into'] }),
+    ...ownDataFlags,
+  };
+
+  async run(): Promise<object> {
+    const { args, flags } = await this.parse(Plan);
+    const options = ownData(flags);
+    const on = readCaseFile(args.file, vocabulary);
+    const far = flags.full || flags.into !== undefined || this.jsonEnabled();
+    const made = await plan(on, { ...options, version: about.version, flips: far });
+    const writing = writingOf(made.quantities, on);
+    if (flags.full) this.say(asText(planBlocks(made, writing)));
+    else {
+      const chalk = await this.colours();
+      const paint = { strong: chalk.bold, warn: chalk.yellow.bold };
+      this.say(screen(made, writing, { file: args.file, paint, ...(on.purpose === undefined ? {} : { purpose: on.purpose }) }));
+    }
+    if (flags.into !== undefined) {
+      const files = planFiles(made, writing, tablesOf(settleCase(on, options).assembled));
+      for (const path of writeInto(flags.into, files, flags.force)) this.remark(`written: ${path}`);
+    }
+    return planDocument(made, writing);
+  }
+}
+
+/** What the files hold beside the plan: the tables of the ladder, the properties over the temperatures of the case. */
+function tablesOf(assembled: Assembled): PlanTables {
+  const { fluid, workings } = assembled;
+  const ladder = ladderDetails(assembled).map(({ rung, reference, inputs }) => ({ rung: rung.id, tables: evaluateReference(reference, inputs).tables }));
+  const [from, to, pressure, humidity] = ['lowestTemperature', 'highestTemperature', 'pressure', 'fluid.humidity'].map((id) => workings.get(id));
+  if (fluid === undefined || from === undefined || to === undefined || pressure === undefined || !(to > from)) return { ladder };
+  return { ladder, properties: materialCsv(tableOver(fluid, { pressure, ...(humidity === undefined ? {} : { humidity }), over: { of: 'temperature', from, to }, assumed: [] })) };
+}

@@ -1,0 +1,77 @@
+import { padded } from './columns.ts';
+
+/** A labelled part of the screen: items by importance, the first being the most important. An item may be several lines. */
+export interface Part {
+  readonly label: string;
+  readonly items: readonly string[];
+  /** As many items stay whatever else has to go. */
+  readonly least: number;
+  /** An empty line stands before it. */
+  readonly apart?: true;
+  /** Its label warns. */
+  readonly warns?: true;
+}
+
+/** What a terminal may add to text; without effect in a pipe. */
+export interface Paint {
+  readonly strong: (text: string) => string;
+  readonly warn: (text: string) => string;
+}
+export const noPaint: Paint = { strong: (text) => text, warn: (text) => text };
+
+export const gutter = 12;
+
+/**
+ * Parts as lines behind a column of labels, cut to a height: the part with most to spare gives up its least important item, and says how many are hidden.
+ *
+ * @param parts   parts in the order in which they stand
+ * @param height  largest number of lines
+ * @param paint   emphasis of labels
+ * @returns       lines
+ */
+export function fitted(parts: readonly Part[], height: number, paint: Paint): string[] {
+  const drawn = parts.filter((part) => part.items.length > 0);
+  const shown = drawn.map((part) => part.items.length);
+  const spare = (k: number): number => (shown[k] as number) - (drawn[k] as Part).least;
+  const total = (): number => drawn.reduce((sum, part, k) => sum + linesOf(part, shown[k] as number).length + (part.apart === true ? 1 : 0), 0);
+  while (total() > height) {
+    const k = drawn.reduce((best, _, i) => (spare(i) > 0 && (best < 0 || spare(i) > spare(best)) ? i : best), -1);
+    if (k < 0) break;
+    shown[k] = (shown[k] as number) - 1;
+  }
+  return drawn.flatMap((part, k) => {
+    const label = (part.warns === true ? paint.warn : paint.strong)(padded(part.label, gutter));
+    return [...(part.apart === true ? [''] : []), ...linesOf(part, shown[k] as number).map((text, i) => `${i === 0 ? label : ' '.repeat(gutter)}${text}`.trimEnd())];
+  });
+}
+
+function linesOf(part: Part, shown: number): string[] {
+  const hidden = part.items.length - shown;
+  return [...part.items.slice(0, shown).flatMap((item) => item.split('\n')), ...(hidden > 0 ? [`and ${hidden} more (--full)`] : [])];
+}
+
+/**
+ * As many pieces as fit into a line, most important first; the first always stands, cut at a word where it must be.
+ *
+ * @param pieces  pieces of text
+ * @param width   columns
+ * @param joint   what stands between them
+ * @returns       one line
+ */
+export function joined(pieces: readonly string[], width: number, joint: string): string {
+  let line = cut(pieces[0] ?? '', width);
+  for (const piece of pieces.slice(1)) {
+    if (piece === '') continue;
+    const longer = `${line}${joint}${piece}`;
+    if (longer.length <= width) line = longer;
+  }
+  return line;
+}
+
+/** Text cut between words to a width, with dots in place of the rest. */
+export function cut(text: string, width: number): string {
+  if (text.length <= width) return text;
+  const room = text.slice(0, width - 3);
+  const end = room.lastIndexOf(' ');
+  return `${(end > width / 3 ? room.slice(0, end) : room).trimEnd()} ...`.slice(0, width);
+}

@@ -1,0 +1,49 @@
+import type { Plan } from '../plan/index.ts';
+import type { Part } from './fit.ts';
+import { joined } from './fit.ts';
+import type { Writing } from './writing.ts';
+
+/**
+ * The parts of the screen that say what to set up: the wall, the mesh, the step, the cost.
+ *
+ * @param plan     the plan
+ * @param writing  how its numbers are written
+ * @param room     columns of an item
+ * @returns        parts, those without a number left out
+ */
+export function setUpParts(plan: Plan, writing: Writing, room: number): Part[] {
+  const has = (id: string): boolean => plan.quantities[id] !== undefined;
+  const say = (words: string, id: string): string => (has(id) ? `${words} ${writing.number(id)}` : '');
+  const item = (...pieces: readonly string[]): string[] => {
+    const known = pieces.filter((piece) => piece !== '');
+    return known.length === 0 ? [] : [joined(known, room, '; ')];
+  };
+  const meshes = ['cellCountCoarse', 'cellCountMedium', 'cellCountFine'].filter(has).map((id) => plainNumber(writing, id));
+  return [
+    {
+      label: 'Wall',
+      items: [
+        ...item(say('first cell', 'firstCellHeight'), say('its node at', 'firstNodeDistance'), say('y+', 'yPlusTarget')),
+        ...item(say('growth', 'growthRatio'), say('layers', 'layerCount'), say('stack', 'layerStackHeight'), say('boundary layer', 'boundaryLayerThickness')),
+      ],
+      least: 2,
+      apart: true,
+    },
+    { label: 'Mesh', items: item(say('core cell', 'coreCellSize'), meshes.length === 0 ? say('cells', 'cellCount') : `cells ${meshes.join(' / ')}`, say('cell Peclet', 'cellPeclet')), least: 1 },
+    { label: 'Time', items: item(say('step', 'timeStep'), binding(plan), say('run', 'runTime'), say('steps', 'stepCount'), say('flow-through', 'flowThroughTime')), least: 1 },
+    { label: 'Cost', items: item(hours(plan, writing), say('memory', 'memory')), least: 1 },
+  ];
+}
+
+const plainNumber = (writing: Writing, id: string): string => writing.parts(id).number;
+
+function hours(plan: Plan, writing: Writing): string {
+  return plan.quantities['coreHours'] === undefined ? '' : `${writing.number('coreHours')} on one core`;
+}
+
+/** The limit that the step follows from, as the step itself states it. */
+function binding(plan: Plan): string {
+  const step = plan.quantities['timeStep'];
+  const limit = step?.needs.find((id) => /^timeStep[A-Z]/.test(id) && plan.quantities[id]?.value === step.value);
+  return limit === undefined ? '' : `bound by ${plan.quantities[limit]?.name ?? limit}`;
+}

@@ -1,0 +1,139 @@
+import type { Plan, PlanChoice, PlanEffect, PlanTarget } from '../plan/index.ts';
+import { broken } from './columns.ts';
+import { cut, fitted, gutter, joined, noPaint, type Paint, type Part } from './fit.ts';
+import { setUpParts } from './screen-set-up.ts';
+import { cautionLines, decidingText, factorText, priceText, titled } from './words.ts';
+import { oneLine, type Writing } from './writing.ts';
+
+/** Columns and lines that a screen has at least. */
+const width = 80;
+const height = 48;
+const room = width - gutter;
+
+/** What the screen shows beside the plan. */
+export interface ScreenOptions {
+  /** The case file as the user wrote its name, for the commands that lead further. */
+  readonly file: string;
+  /** The sentence that says what the run is for. */
+  readonly purpose?: string;
+  readonly paint?: Paint;
+}
+
+/**
+ * The plan on one screen: at most 48 lines of 80 columns. What matters least is cut first, with the number of what is not shown.
+ *
+ * @param plan     the plan
+ * @param writing  how its numbers are written
+ * @param options  file name, purpose, paint
+ * @returns        text without a last newline
+ */
+export function screen(plan: Plan, writing: Writing, options: ScreenOptions): string {
+  const paint = options.paint ?? noPaint;
+  const head = [paint.strong(cut(titled(plan), width)), ...(options.purpose === undefined ? [] : broken(oneLine(options.purpose), width).slice(0, 2))];
+  const parts: Part[] = [
+    { label: 'At odds', items: plan.contradictions.map((c) => wrap(`${oneLine(c.says)}: ${oneLine(c.effect)}. Cure: ${oneLine(c.cure)}`, 3)), least: 2, apart: true, warns: true },
+    { label: 'Mind first', items: [...cautionLines(plan, writing).map((text) => wrap(text, 3)), ...strained(plan)], least: 2, apart: true, warns: true },
+    { label: 'Target', items: plan.targets.map((t) => targetText(t, plan, writing)), least: 2, apart: true },
+    ...effectParts(plan, writing),
+    { label: 'Choices', items: choiceItems(plan), least: 2 },
+    ...setUpParts(plan, writing, room),
+    { label: 'Ladder', items: plan.ladder.map((r) => rungText(r, writing)), least: 2, apart: true },
+    { label: 'Taken', items: assumed(plan, writing), least: 1 },
+    { label: 'More', items: moreItems(options.file, plan), least: 2, apart: true },
+  ];
+  return [...head, ...fitted(parts, height - head.length, paint)].join('\n');
+}
+
+const wrap = (text: string, most: number): string => {
+  const lines = broken(text, room);
+  return (lines.length <= most ? lines : [...lines.slice(0, most - 1), cut(lines.slice(most - 1).join(' '), room)]).join('\n');
+};
+
+function targetText(t: PlanTarget, plan: Plan, writing: Writing): string {
+  const name = `${oneLine(t.quantity)}${t.place === undefined ? '' : ` at ${oneLine(t.place)}`}`;
+  if (!t.computed) return joined([name, 'no hand estimate', t.within === undefined ? '' : `asked within ${oneLine(t.within)}`], room, '; ');
+  const range = plan.quantities[t.quantity]?.range;
+  return joined([
+    `${name} ${writing.number(t.quantity)}`,
+    t.within === undefined ? '' : `asked within ${oneLine(t.within)}`,
+    range === undefined ? '' : `${writing.like(t.quantity, range.from)} to ${writing.like(t.quantity, range.to)} over the range`,
+  ], room, '; ');
+}
+
+function effectParts(plan: Plan, writing: Writing): Part[] {
+  const judged = plan.effects.filter((e) => e.applies !== false && e.judged);
+  const of = (verdict: PlanEffect['verdict']): PlanEffect[] => judged.filter((e) => e.verdict === verdict);
+  const wide = Math.min(26, Math.max(12, ...judged.filter((e) => e.verdict !== 'leave-out').map((e) => e.id.length))) + 2;
+  const row = (e: PlanEffect, ...pieces: readonly string[]): string => `${e.id.padEnd(wide)}${joined(pieces.filter((p) => p !== ''), room - Math.max(wide, e.id.length), '; ')}`;
+  const price = (e: PlanEffect): string => (e.price === undefined ? '' : `${priceText(e.price)} without it`);
+  const margin = (e: PlanEffect): string => (factorText(e) === '' ? '' : `${factorText(e)} past the limit`);
+  return [
+    { label: 'Include', items: sortedBy(of('include'), closeness).map((e) => row(e, decidingText(e, writing), price(e), margin(e), e.deciding === undefined ? writing.fill(e.because) : '')), least: 3, apart: true },
+    { label: 'Check', items: of('borderline').map((e) => row(e, decidingText(e, writing) || writing.fill(e.because), price(e), e.firstRun === 'leave-out' ? 'first run without it' : 'first run with it', e.check === undefined ? '' : writing.fill(e.check))), least: 2 },
+    { label: 'Open', items: of('undecided').map((e) => row(e, (e.missing ?? []).length === 0 ? writing.fill(e.because) : `needs ${(e.missing ?? []).map((m) => oneLine(m).replaceAll('|', ' or ')).join(', ')}`)), least: 2, warns: true },
+    { label: 'Leave out', items: leftOut(plan, sortedBy(of('leave-out'), closeness)), least: 2 },
+  ];
+}
+
+/** Effects nearest to their limit first: these are the ones to look at. */
+const closeness = (e: PlanEffect): number => e.deciding?.margin ?? Infinity;
+const sortedBy = <T>(items: readonly T[], by: (item: T) => number): T[] => [...items].sort((a, b) => by(a) - by(b) || 0);
+
+function leftOut(plan: Plan, effects: readonly PlanEffect[]): string[] {
+  const each = effects.map((e) => (factorText(e) === '' ? e.id : `${e.id} ${factorText(e)}`));
+  const absent = plan.effects.filter((e) => e.applies === false).length;
+  const byHand = plan.effects.filter((e) => !e.judged);
+  return [
+    ...packed(each),
+    ...(absent === 0 ? [] : [`${absent} more effects cannot occur here`]),
+    ...(byHand.length === 0 ? [] : [joined([`${byHand.length} to judge by hand: ${byHand[0]?.id ?? ''}`, ...byHand.slice(1).map((e) => e.id)], room, ', ')]),
+  ];
+}
+
+/** Short texts packed into lines, separated by commas. */
+function packed(texts: readonly string[]): string[] {
+  const lines: string[] = [];
+  for (const [i, text] of texts.entries()) {
+    const piece = i === texts.length - 1 ? text : `${text},`;
+    const last = lines.at(-1);
+    if (last !== undefined && last.length + 1 + piece.length <= room) lines[lines.length - 1] = `${last} ${piece}`;
+    else lines.push(cut(piece, room));
+  }
+  return lines;
+}
+
+function choiceItems(plan: Plan): string[] {
+  const made = plan.choices.filter((c) => c.applies !== false && c.judged !== false && c.chosen !== 'none');
+  const text = (c: PlanChoice): string => `${c.id} ${c.chosen}${c.given === true ? ' (given)' : ''}`;
+  const disputed = made.filter((c) => c.advised !== undefined && c.advised !== c.chosen);
+  return [...disputed.map((c) => joined([`${text(c)}, advised is ${c.advised ?? ''}`, oneLine(c.because)], room, ': ')), ...packed(made.filter((c) => !disputed.includes(c)).map(text))];
+}
+
+function rungText(r: Plan['ladder'][number], writing: Writing): string {
+  const { atLeast, atMost } = r.limit;
+  const bound = (value: number): string => writing.like(r.quantity, value, r.limit.unit);
+  const limit = atLeast !== undefined && atMost !== undefined ? `passes ${bound(atLeast)} .. ${bound(atMost)}` : atMost !== undefined ? `passes up to ${bound(atMost)}` : atLeast !== undefined ? `passes from ${bound(atLeast)}` : '';
+  const name = r.id.padEnd(25);
+  return `${name} ${joined([r.value === undefined ? 'no number for these inputs' : `${writing.symbol(r.quantity)} = ${writing.number(r.quantity)}`, limit, oneLine(r.changes)], room - name.length - 1, '; ')}`;
+}
+
+/** Numbers that a formula gave outside its range. */
+function strained(plan: Plan): string[] {
+  const ids = [...new Set(Object.values(plan.quantities).flatMap((q) => q.outside ?? []))];
+  return ids.length === 0 ? [] : [wrap(`outside the range of their formula, spread doubled: ${ids.join(', ')}`, 2)];
+}
+
+function assumed(plan: Plan, writing: Writing): string[] {
+  const ids = Object.entries(plan.quantities).filter(([, q]) => q.kind === 'assumed').map(([id]) => id);
+  if (ids.length === 0) return [];
+  const each = ids.map((id) => `${id} ${writing.number(id)}`);
+  return [wrap(`${ids.length} assumed, not given: ${each.join(', ')}`, 2)];
+}
+
+function moreItems(file: string, plan: Plan): string[] {
+  const name = /^[\w./@%+-]+$/.test(file) ? file : 'FILE';
+  return [
+    cut(`runbrief plan ${name} --full      every section; --into DIR writes the files`, room),
+    cut(`runbrief trace ${name} ${plan.quantities['firstCellHeight'] === undefined ? 'ID' : 'firstCellHeight'}      where a number comes from`, room),
+  ];
+}

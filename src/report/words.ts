@@ -1,0 +1,51 @@
+import type { Plan, PlanEffect, Price } from '../plan/index.ts';
+import { printNumber } from '../units/index.ts';
+import { oneLine, type Writing } from './writing.ts';
+
+/** The title of a plan; its file where the case has none. */
+export const titled = (plan: Plan): string => oneLine(plan.case.title === '' ? plan.case.file : plan.case.title);
+
+const few = (value: number): string => printNumber({ value, unit: '1', digits: 2 });
+
+/** How far a decision is from its nearer limit: `9.3 times`, `12 K`; empty where that is not finite. */
+export function factorText(e: PlanEffect): string {
+  const d = e.deciding;
+  if (d?.margin === undefined) return '';
+  return d.marginKind === 'difference' ? printNumber({ value: d.margin, unit: 'K', digits: 2 }) : `${few(d.margin)} times`;
+}
+
+/** The number that decides, beside the limit on the side of the verdict: `Re = 2.1e4 +/- 5 % (limit 2300)`. */
+export function decidingText(e: PlanEffect, writing: Writing): string {
+  const d = e.deciding;
+  if (d === undefined) return '';
+  const { symbol, number } = decider(e, writing);
+  const limit = (value: number): string => writing.like(d.quantity, value);
+  const limits = d.leaveOutAt === d.includeAt ? `limit ${limit(d.includeAt)}` : e.verdict === 'include' ? `limit ${limit(d.includeAt)}` : e.verdict === 'leave-out' ? `limit ${limit(d.leaveOutAt)}` : `between ${limit(d.leaveOutAt)} and ${limit(d.includeAt)}`;
+  return `${symbol} = ${number} (${limits})`;
+}
+
+function decider(e: PlanEffect, writing: Writing): { symbol: string; number: string } {
+  const id = e.deciding?.quantity ?? '';
+  const known = writing.number(id);
+  return { symbol: writing.symbol(id), number: known === 'not known' ? few(e.deciding?.value ?? Number.NaN) : known };
+}
+
+/** What leaving an effect out costs a target. */
+export function priceText(p: Price): string {
+  const of = oneLine(p.of);
+  if (p.signChange === true) return `changes the sign of ${of}`;
+  if (p.value !== undefined) return `${printNumber({ value: p.value, unit: p.unit ?? '1', difference: true, digits: 2 })} of ${of}`;
+  if (p.relative === undefined) return '';
+  return `${percent(p.relative)} of ${of}`;
+}
+
+/** A share as `+12 %`, `-0.3 %`, `below 0.01 %`. */
+function percent(share: number): string {
+  if (Math.abs(share) < 1e-4) return 'below 0.01 %';
+  return `${share > 0 ? '+' : ''}${Number((100 * share).toPrecision(2))} %`;
+}
+
+/** Cautions of the plan in its order. */
+export function cautionLines(plan: Plan, writing: Writing): string[] {
+  return plan.sections.cautions.lines.map((line) => writing.fill(line.text));
+}
