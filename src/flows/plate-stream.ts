@@ -119,8 +119,8 @@ const layers: Definition[] = [
     way({ needs: ['sizes.length', 'peclet'], when: laminar, scatter: 0.25, value: (of) => (3.64 * of['sizes.length']) / Math.sqrt(of.peclet), formula: 'delta_T = 3.64 L Pe^(-1/2), Pr below 0.6', source: 'limit of small Pr: the layer moves at U, error function to 99 %' }),
     way({ needs: ['boundaryLayerThickness'], when: behind, scatter: 0.2, value: ({ boundaryLayerThickness }) => boundaryLayerThickness, formula: 'delta_T = delta', source: 'turbulent mixing carries both alike' }),
   ]),
-  thick('plateDisplacementThickness', 'displacement thickness', 'delta*', 1.721, 1 / 8),
-  thick('plateMomentumThickness', 'momentum thickness', 'theta', 0.664, 7 / 72),
+  thick('plateDisplacementThickness', 'displacement thickness', 'delta*', 1.7208, 1 / 8),
+  thick('plateMomentumThickness', 'momentum thickness', 'theta', 0.66412, 7 / 72),
   ways('peakOverMean', [way({ needs: [], when: stream, value: () => 1, formula: 'u_max/U = 1', source: 'flat plate without pressure gradient' })]),
 ];
 

@@ -19,7 +19,7 @@ export function cylinderDrag({ reynolds }: { reynolds: number }): number {
     const s = 1 / Math.log(7.406 / reynolds);
     return ((8 * Math.PI) / reynolds) * (s - 0.87 * s ** 3);
   }
-  if (reynolds > 20 && reynolds < 200) return between(Math.log(reynolds), anchors);
+  if (reynolds >= 20 && reynolds <= 200) return between(Math.log(reynolds), anchors);
   return 1.18 + 6.8 * reynolds ** -0.89 + 1.96 / Math.sqrt(reynolds) - (0.0004 * reynolds) / (1 + 3.64e-7 * reynolds ** 2);
 }
 
