@@ -33,7 +33,7 @@ export function choose(rule: ChoiceRule, facts: FactSource, undecided: readonly 
   const counted = new Overlaid(facts, new Map(undecided.flatMap((id) => [[`verdict.${id}`, 'include'], [`kept.${id}`, 'yes']])));
   const truth = testOf(rule.applies)(counted, false);
   if (truth === 0 && rule.applies !== undefined) {
-    return { rule, applies: false, whyNot: whyFalse(rule.applies, counted), chosen: stated ?? 'none', advised: 'none', given, assumed: [], lacking: [] };
+    return { rule, applies: false, whyNot: [...new Set(whyFalse(rule.applies, counted))], chosen: stated ?? 'none', advised: 'none', given, assumed: [], lacking: [] };
   }
   const lacking: string[] = [];
   for (const entry of rule.entries) {

@@ -3,7 +3,7 @@ import { leavesOf, testOf, whyFalse } from './conditions.ts';
 import { Overlaid, placedId, type FactSource, type WorkingsFacts } from './facts.ts';
 import type { EffectRule, PriceLine, Verdict } from './form.ts';
 import { lackingFacts, outcome, readRule, readsRegime, worse, type Interval, type Reading } from './judge.ts';
-import { pricesOf, type Target, type Weighed } from './price.ts';
+import { pricesOf, readTargets, type Read, type Target, type Weighed } from './price.ts';
 
 export type MovedBy = 'range' | 'spread' | 'price' | 'passes';
 
@@ -40,6 +40,8 @@ export interface Point {
   readonly rangeOf: Interval | undefined;
   readonly spreadOf: Interval | undefined;
   readonly prices: Map<string, readonly Weighed[]>;
+  /** The targets with their values as printed, read when the first price is asked for. */
+  read: readonly Read[] | undefined;
   readonly plain: FactSource;
   readonly views: Map<EffectRule, readonly View[]>;
 }
@@ -70,7 +72,7 @@ interface Worst { readonly reading: Reading; readonly view: View; readonly bound
 export function judge(rule: EffectRule, point: Point): EffectState {
   const { plain } = point;
   const truth = testOf(rule.applies)(plain, false);
-  if (truth === 0 && rule.applies !== undefined) return { rule, applies: false, whyNot: whyFalse(rule.applies, plain), judged: true, verdict: 'leave-out', base: 'leave-out' };
+  if (truth === 0 && rule.applies !== undefined) return { rule, applies: false, whyNot: [...new Set(whyFalse(rule.applies, plain))], judged: true, verdict: 'leave-out', base: 'leave-out' };
   const views = viewsOf(rule, point);
   const nominal = worst(views, (view) => ({ reading: readRule(rule, view.facts), view }));
   const counted = nominal.reading.verdict !== 'undecided' || !nominal.reading.judged || rule.branches.every((b) => b.band === undefined || b.band.bounds.length === 0) ? nominal : worst(views, (view) => bounded(rule, view, point));
@@ -126,7 +128,7 @@ export function weighed(line: PriceLine, facts: FactSource, place: string | unde
   if (testOf(line.when)(facts, true) !== 1) return [];
   const key = `${line.factor ?? ''}|${line.value ?? ''}|${line.of}|${place ?? ''}|${acts}`;
   let found = point.prices.get(key);
-  if (found === undefined) point.prices.set(key, (found = pricesOf(point.workings, line, place, point.targets, acts)));
+  if (found === undefined) point.prices.set(key, (found = pricesOf(point.workings, line, place, (point.read ??= readTargets(point.workings, point.targets)), acts)));
   return found;
 }
 

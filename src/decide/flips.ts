@@ -21,7 +21,7 @@ const points = 15;
 const within = 1e-4;
 
 /**
- * Where each input alone changes a verdict: one scan per input for all effects, then bisection between neighbouring points.
+ * Where each input alone changes the verdict of the nominal value (range, spread and price aside): one scan per input for all effects, then bisection between neighbouring points.
  *
  * @param workings  the graph; it stands at its nominal point, settled, afterwards
  * @param rules     compiled rules
@@ -43,7 +43,7 @@ export function flips(workings: Workings, rules: CompiledRules, targets: readonl
       let read = seen.get(x);
       if (read === undefined) {
         workings.set(input.path, x);
-        const state = settle(workings, rules, targets, { askable: options.askable });
+        const state = settle(workings, rules, [], { askable: options.askable, chosen: options.chosen });
         seen.set(x, (read = new Map([...state.effects].map(([id, e]) => [id, e.verdict]))));
       }
       return read;

@@ -46,52 +46,63 @@ function tolerance(workings: Workings, target: Target, value: number): number {
   return (within.ofChange ?? within.relative ?? usual) * change;
 }
 
+/** A computed target with its node and value as printed, read once a point. */
+export interface Read {
+  readonly target: Target;
+  readonly node: string;
+  readonly value: number;
+}
+
+/** The targets that have a number. */
+export function readTargets(workings: Workings, targets: readonly Target[]): Read[] {
+  return targets.flatMap((target) => {
+    const node = targetNode(workings, target);
+    const value = target.computed ? workings.get(node) : undefined;
+    return value === undefined ? [] : [{ target, node, value }];
+  });
+}
+
 /**
  * The prices of one line for every target: the factor is set to 1 and the targets are read again.
  *
  * @param workings  the graph; it stands as before afterwards
  * @param line      factor F = with / without, or a number that is the price itself
  * @param place     where the rule was read
- * @param targets   targets of the case
+ * @param targets   targets with their values as printed
  * @param acts      false where the effect or the line is exempt
  * @returns         one entry for each target that follows; where none does, one under the quantity's own name that does not act
  */
-export function pricesOf(workings: Workings, line: PriceLine, place: string | undefined, targets: readonly Target[], acts: boolean): Weighed[] {
-  const known = targets.filter((t) => t.computed && workings.get(targetNode(workings, t)) !== undefined);
-  return line.factor === undefined ? valuePrices(workings, line, place, known, acts) : factorPrices(workings, line.factor, line.of, place, known, acts);
+export function pricesOf(workings: Workings, line: PriceLine, place: string | undefined, targets: readonly Read[], acts: boolean): Weighed[] {
+  return line.factor === undefined ? valuePrices(workings, line, place, targets, acts) : factorPrices(workings, line.factor, line.of, place, targets, acts);
 }
 
-function factorPrices(workings: Workings, named: string, of: string, place: string | undefined, targets: readonly Target[], acts: boolean): Weighed[] {
-  const factor = placedId(workings, named, place);
-  const f = workings.get(factor);
+function factorPrices(workings: Workings, named: string, of: string, place: string | undefined, targets: readonly Read[], acts: boolean): Weighed[] {
+  const factors = copiesOf(workings, placedId(workings, named, place));
+  const f = workings.get(factors[0] as string);
   if (f === undefined) return [];
   const formula = f > 0 ? `1/F - 1, F = ${named} = ${short(f)}` : `F = ${named} = ${short(f)} is not positive`;
-  const routes: [string, number][] = [[factor, 1]];
-  const ofId = placedId(workings, of, place);
-  const ofValue = workings.get(ofId);
-  if (f > 0 && ofValue !== undefined) routes.push([ofId, ofValue / f]);
   const out: Weighed[] = [];
   let rest = targets;
-  for (const [pin, to] of routes) {
-    const follow = rest.filter((t) => follows(workings, pin, targetNode(workings, t)));
-    const before = follow.map((t) => workings.get(targetNode(workings, t)) as number);
-    if (follow.length === 0 || f <= 0) {
-      out.push(...follow.map((t) => ({ price: { target: t.id, of, signChange: true as const, acts, formula }, share: acts ? Number.POSITIVE_INFINITY : 0 })));
-      rest = rest.filter((t) => !follow.includes(t));
-      continue;
+  // Where the targets do not hold the factor itself, the quantity that it multiplies is divided by it.
+  for (const pins of [factors.map((id): Pin => [id, 1]), f > 0 ? copiesOf(workings, placedId(workings, of, place)).map((id): Pin => [id, (workings.get(id) ?? Number.NaN) / f]) : []]) {
+    const follow = rest.filter((t) => pins.some(([id]) => follows(workings, id, t.node)));
+    if (follow.length === 0) continue;
+    if (f <= 0) out.push(...follow.map((t) => ({ price: { target: t.target.id, of, signChange: true as const, acts, formula }, share: acts ? Number.POSITIVE_INFINITY : 0 })));
+    else {
+      const idle = factors.every((id) => workings.get(id) === 1);
+      const without = idle ? follow.map((t) => t.value) : withPins(workings, pins, () => follow.map((t) => workings.get(t.node)));
+      rest = rest.filter((t) => !follow.includes(t) || (!idle && without[follow.indexOf(t)] === t.value));
+      follow.forEach((t, k) => {
+        const then = without[k];
+        if (then !== undefined && !rest.includes(t)) out.push(weigh(workings, t, of, then, acts, formula));
+      });
     }
-    const without = withPin(workings, pin, to, () => follow.map((t) => workings.get(targetNode(workings, t))));
-    rest = rest.filter((t) => !follow.includes(t) || (f !== 1 && without[follow.indexOf(t)] === before[follow.indexOf(t)]));
-    follow.forEach((t, k) => {
-      const then = without[k];
-      if (then !== undefined && !rest.includes(t)) out.push(weigh(workings, t, of, before[k] as number, then, acts, formula));
-    });
   }
   if (out.length > 0) return out;
   return [{ price: { of, acts: false, formula, ...(f > 0 ? { relative: 1 / f - 1 } : { signChange: true as const }) }, share: 0 }];
 }
 
-function weigh(workings: Workings, target: Target, of: string, before: number, without: number, acts: boolean, formula: string): Weighed {
+function weigh(workings: Workings, { target, value: before }: Read, of: string, without: number, acts: boolean, formula: string): Weighed {
   const share = acts ? Math.abs(without - before) / tolerance(workings, target, before) : 0;
   const head = { target: target.id, of };
   const unit = unitOf(workings, target.quantity);
@@ -101,19 +112,28 @@ function weigh(workings: Workings, target: Target, of: string, before: number, w
   return { price: { ...head, relative: without / before - 1, acts, formula }, share: weighed };
 }
 
-function valuePrices(workings: Workings, line: PriceLine, place: string | undefined, targets: readonly Target[], acts: boolean): Weighed[] {
+function valuePrices(workings: Workings, line: PriceLine, place: string | undefined, targets: readonly Read[], acts: boolean): Weighed[] {
   const id = placedId(workings, line.value as string, place);
   const value = workings.get(id);
   if (value === undefined) return [];
   const unit = unitOf(workings, id);
   const formula = `${line.value as string} = ${short(value)} ${unit === '1' ? '' : unit}`.trim();
-  const out = targets.flatMap((t): Weighed[] => {
-    const node = targetNode(workings, t);
-    if (t.quantity !== line.of && !(unitOf(workings, node) === unit && follows(workings, placedId(workings, line.of, place), node))) return [];
-    const share = Math.abs(value) / tolerance(workings, t, workings.get(node) as number);
-    return [{ price: { target: t.id, of: line.of, value, unit, acts, formula }, share: acts && !Number.isNaN(share) ? share : 0 }];
+  const out = targets.flatMap(({ target, node, value: printed }): Weighed[] => {
+    if (target.quantity !== line.of && !(unitOf(workings, node) === unit && follows(workings, placedId(workings, line.of, place), node))) return [];
+    const share = Math.abs(value) / tolerance(workings, target, printed);
+    return [{ price: { target: target.id, of: line.of, value, unit, acts, formula }, share: acts && !Number.isNaN(share) ? share : 0 }];
   });
   return out.length > 0 ? out : [{ price: { of: line.of, value, unit, acts: false, formula }, share: 0 }];
+}
+
+const copies = new WeakMap<Workings, Map<string, readonly string[]>>();
+/** An id and, where it is a plain one, its copies at all places: left out is left out everywhere. */
+function copiesOf(workings: Workings, id: string): readonly string[] {
+  const mine = copies.get(workings) ?? new Map<string, readonly string[]>();
+  copies.set(workings, mine);
+  let found = mine.get(id);
+  if (found === undefined) mine.set(id, (found = id.includes('@') ? [id] : [id, ...[...workings.index.keys()].filter((other) => other.startsWith(`${id}@`))]));
+  return found;
 }
 
 function follows(workings: Workings, from: string, to: string): boolean {
@@ -122,13 +142,14 @@ function follows(workings: Workings, from: string, to: string): boolean {
   return a !== undefined && b !== undefined && workings.followers(a).includes(b);
 }
 
-/** Reads with one quantity pinned, and sets it free again. */
-function withPin<T>(workings: Workings, id: string, value: number, read: () => T): T {
-  const i = workings.index.get(id) as number;
-  const kept = workings.isPinned(i) ? workings.get(id) : undefined;
-  workings.set(id, value);
+type Pin = readonly [id: string, value: number];
+/** Reads with quantities pinned, and sets them free again. */
+function withPins<T>(workings: Workings, pins: readonly Pin[], read: () => T): T {
+  const known = pins.filter(([id, value]) => workings.has(id) && !Number.isNaN(value));
+  const before = known.map(([id]) => (workings.isPinned(workings.index.get(id) as number) ? workings.get(id) : undefined));
+  for (const [id, value] of known) workings.set(id, value);
   const out = read();
-  workings.set(id, kept);
+  known.forEach(([id], k) => workings.set(id, before[k]));
   return out;
 }
 

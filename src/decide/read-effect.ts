@@ -24,7 +24,7 @@ export function readEffect(reader: Reader, root: Node): EffectRule | undefined {
     const worst = get('combine')?.value === 'worst';
     const sure = worst ? branches.some((b) => b.when === undefined) : branches.length > 0 && branches.at(-1)?.when === undefined;
     if (!sure && !map.has('otherwise')) reader.complain(branchNodes.at(-1) ?? root, 'missing-otherwise', `${worst ? 'every' : 'the last'} branch has a condition, so that none may fit: "otherwise" must say what then holds`);
-    if (sure && map.has('otherwise')) reader.complain(map.get('otherwise')?.key as Node, 'idle-otherwise', `${worst ? 'a' : 'the last'} branch always fits, so that "otherwise" never counts`);
+    if (sure && !worst && map.has('otherwise')) reader.complain(map.get('otherwise')?.key as Node, 'idle-otherwise', 'the last branch always fits, so that "otherwise" never counts');
     const early = branches.findIndex((b) => b.when === undefined);
     if (!worst && early >= 0 && early < branches.length - 1) reader.complain(branchNodes[early] as Node, 'hidden-branch', `the branch ${branches[early]?.id ?? ''} always fits and hides those after it`);
   }

@@ -109,7 +109,7 @@ export function settle(workings: Workings, rules: CompiledRules, targets: readon
   const facts = new WorkingsFacts(workings, options.askable ?? anything);
   const words = new Map<string, string>();
   const point: Point = {
-    workings, targets, facts, words, plain: new Overlaid(facts, words), views: new Map(), prices: new Map(),
+    workings, targets, facts, words, plain: new Overlaid(facts, words), views: new Map(), prices: new Map(), read: undefined,
     places: session.places, rangeOf: options.rangeOf, spreadOf: options.spreadOf,
   };
   const { effects, passes } = settleEffects(point, session);
