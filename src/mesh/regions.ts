@@ -49,7 +49,7 @@ export const regions: Definition[] = [
   ]),
   quantity('regionSizeAlong', { symbol: 'h_x', name: 'cell of a region along the flow', unit: 'm', ...perRegion, plain: 'smallest' }, limited('along', 'regionStretch', 'regionWalls', { les: 70, dns: 10 })),
   quantity('regionSizeSpan', { symbol: 'h_z', name: 'cell of a region along the span', unit: 'm', ...perRegion }, limited('span', 'regionSpanStretch', 'regionWalls', { les: 20, dns: 5 })),
-  quantity('cellsAlong', { symbol: 'n_x', name: 'cells of a region along the flow', unit: '1', ...perRegion }, [
+  quantity('cellsAlong', { symbol: 'n_x', name: 'cells of a region along the flow', unit: '1', ...perRegion, plain: 'sum' }, [
     way({ needs: ['regionAlong', 'regionSizeAlong'], value: ({ regionAlong, regionSizeAlong }) => Math.ceil(regionAlong / regionSizeAlong - 1e-9), formula: 'n_x = L_r/h_x, rounded up', source: 'equal cells' }),
   ]),
   quantity('cellsAcross', { symbol: 'n_y', name: 'cells of a region across the flow', unit: '1', ...perRegion }, across('regionAcross', 'regionSizeAcross', 'regionWalls', 'W_r')),
