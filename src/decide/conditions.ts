@@ -97,6 +97,6 @@ const signs = { equal: 'is', notEqual: 'is', in: 'is', notIn: 'is', lessThan: 'i
 function inWords(leaf: Leaf, facts: FactSource): string {
   const { fact, operator, value } = leaf;
   if (typeof facts.of(fact) === 'string') return `${fact} is ${facts.of(fact)}`;
-  if (operator === 'equal' || operator === 'notEqual') return `${fact} is ${operator === 'equal' ? 'not ' : ''}${String(value)}`;
-  return `${fact} ${signs[operator]} ${typeof value === 'object' ? facts.of((value as { quantity: string }).quantity) ?? '' : value}`;
+  const right = typeof value !== 'object' ? value : 'quantity' in value ? (numberOf(value, facts) ?? value.quantity) : value.join(' or ');
+  return `${fact} ${operator === 'equal' ? 'is not' : signs[operator]} ${right}`;
 }

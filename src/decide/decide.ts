@@ -91,6 +91,7 @@ function effectOutput(id: string, e: EffectState, state: State, flipsAt: readonl
     ...(prices.length === 0 ? {} : { price: (prices[0] as Weighed).price, prices: prices.map((p) => p.price) }),
     ...(check === undefined || e.verdict === 'include' || e.verdict === 'leave-out' ? {} : { check }),
     ...(e.verdict === 'borderline' ? { firstRun: e.firstRun ?? 'keep' } : {}),
+    // oxlint-disable-next-line unicorn/no-thenable -- the key of rule files and plans; it holds words
     ...(carried && rule.then.length > 0 ? { then: hold(rule.then) } : {}),
     ...(carried && rule.attributes.length > 0 ? { attributes: hold(rule.attributes) } : {}),
     ...(e.verdict === 'undecided' ? { missing: missingPaths(e, state) } : {}),

@@ -1,4 +1,4 @@
-import type { NestedCondition, RuleProperties, TopLevelCondition } from 'json-rules-engine';
+import type { NestedCondition, RuleProperties } from 'json-rules-engine';
 import { numberOf } from './conditions.ts';
 import { viewsOf } from './effects.ts';
 import type { FactSource } from './facts.ts';
@@ -123,7 +123,7 @@ export async function engineVerdicts(state: State): Promise<Map<string, Verdict 
   const rules: RuleProperties[] = [];
   const views = new Map<string, number>();
   const say = (said: Said, condition: NestedCondition): void => {
-    if (condition !== no) rules.push({ name: `${said.effect} ${said.view} ${said.branch} ${said.says}`, conditions: 'fact' in condition ? { all: [condition] } : (condition as TopLevelCondition), event: { type: 'said', params: { ...said } } });
+    if (condition !== no) rules.push({ name: `${said.effect} ${said.view} ${said.branch} ${said.says}`, conditions: 'fact' in condition ? { all: [condition] } : (condition), event: { type: 'said', params: { ...said } } });
   };
   for (const [effect, { rule }] of state.effects) {
     if (rule === undefined) continue;

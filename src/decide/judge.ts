@@ -130,7 +130,7 @@ function combineWorst(rule: EffectRule, outcomes: readonly Outcome[]): ReturnTyp
     if (o.fits === 1 && (branch < 0 || weight(single(o.can)) > weight(single((outcomes[branch] as Outcome).can)))) branch = k;
   }
   const sure = branch < 0 ? (rule.otherwise?.verdict ?? 'undecided') : single((outcomes[branch] as Outcome).can);
-  const open = fitting.find((k) => outcomes[k]?.fits === 2 && (branch < 0 ? single((outcomes[k] as Outcome).can) !== sure : weight(single((outcomes[k] as Outcome).can)) > weight(sure)));
+  const open = fitting.find((k) => outcomes[k]?.fits === 2 && (branch < 0 ? single((outcomes[k]).can) !== sure : weight(single((outcomes[k]).can)) > weight(sure)));
   return open === undefined || sure === 'include' ? { verdict: sure, branch, fitting } : { verdict: 'undecided', branch: branch < 0 ? open : branch, fitting };
 }
 

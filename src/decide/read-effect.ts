@@ -37,6 +37,7 @@ export function readEffect(reader: Reader, root: Node): EffectRule | undefined {
     price: readPrices(reader, get('price')),
     exempt: reader.flag(get('exempt'), '"exempt"') ?? false,
     bothRegimes: reader.flag(get('bothRegimes'), '"bothRegimes"') ?? true,
+    // oxlint-disable-next-line unicorn/no-thenable -- the key of rule files and plans; it holds words
     then: readSaid(reader, get('then'), '"then"'),
     attributes: readSaid(reader, get('attributes'), '"attributes"'),
     examples: reader.list(get('examples'), '"examples"').flatMap((node) => readExample(reader, node) ?? []),
@@ -102,7 +103,7 @@ function readBand(reader: Reader, node: Node, map: Fields, name: string): Band |
   return {
     deciding, leaveOutAt, includeAt, bounds,
     magnitude: reader.flag(get('magnitude'), '"magnitude"') ?? false,
-    smallMatters: numbers ? (leaveOutAt as number) > (includeAt as number) : (said ?? false),
+    smallMatters: numbers ? (leaveOutAt) > (includeAt) : (said ?? false),
     ...(verdict === undefined || because === undefined ? {} : { without: { verdict, because } }),
   };
 }
@@ -139,7 +140,7 @@ function readPrices(reader: Reader, node: Node | undefined): PriceLine[] {
       when: readCondition(reader, map.get('when')?.value, '"when" of a price'),
       exempt: reader.flag(map.get('exempt')?.value, '"exempt"'),
     });
-    return of === undefined ? [] : [{ of, ...parts } as PriceLine];
+    return of === undefined ? [] : [{ of, ...parts }];
   });
 }
 

@@ -8,6 +8,7 @@ const rule = {
   effect: 'weir-overfall', title: 'Overfall at a weir',
   applies: { all: [{ fact: 'gravity', operator: 'greaterThan', value: 0, else: 'no gravity' }] },
   branches: [{ id: 'broad', deciding: 'reynolds', leaveOutAt: 100, includeAt: 2000, because: 'Re = {reynolds}', source: 'house practice, 2019' }],
+  // oxlint-disable-next-line unicorn/no-thenable -- the key of rule files and plans; it holds words
   then: ['a free surface'],
   examples: [
     { facts: { reynolds: 50 }, verdict: 'leave-out' }, { facts: { reynolds: 100 }, verdict: 'borderline', why: 'at the limit' }, { facts: { reynolds: 2000 }, verdict: 'include' },

@@ -78,8 +78,7 @@ describe('rule files', () => {
   ];
   it.each(rows)('refuses $name', ({ rule, code, nearest, message }) => {
     const found = problemsOf(text(rule)).find((p) => p.code === code);
-    expect(found, JSON.stringify(problemsOf(text(rule)))).toMatchObject({ file: 'buoyancy.json', line: expect.any(Number), column: expect.any(Number), ...(nearest === undefined ? {} : { nearest }) });
-    if (message !== undefined) expect(found?.message).toMatch(message);
+    expect(found).toMatchObject({ file: 'buoyancy.json', line: expect.any(Number), column: expect.any(Number), message: expect.stringMatching(message ?? /./), ...(nearest === undefined ? {} : { nearest }) });
   });
 
   it('says where, and everything at once', () => {
