@@ -43,7 +43,7 @@ export interface PlanQuantity {
 
 export type Verdict = 'include' | 'leave-out' | 'borderline' | 'undecided';
 export interface Price {
-  readonly target: string;
+  readonly target?: string;
   readonly of: string;
   readonly relative?: number;
   readonly value?: number;
