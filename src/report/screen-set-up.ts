@@ -30,7 +30,7 @@ export function setUpParts(plan: Plan, writing: Writing, room: number): Part[] {
       apart: true,
     },
     { label: 'Mesh', items: item(say('core cell', 'coreCellSize'), meshes.length === 0 ? say('cells', 'cellCount') : `cells ${meshes.join(' / ')}`, say('cell Peclet', 'cellPeclet')), least: 1 },
-    { label: 'Time', items: item(say('step', 'timeStep'), binding(plan), say('run', 'runTime'), say('steps', 'stepCount'), say('flow-through', 'flowThroughTime')), least: 1 },
+    { label: 'Time', items: item(say(marches(plan) ? 'pseudo-step' : 'step', 'timeStep'), binding(plan, writing), say('run', 'runTime'), say('steps', 'stepCount'), say('flow-through', 'flowThroughTime')), least: 1 },
     { label: 'Cost', items: item(hours(plan, writing), say('memory', 'memory')), least: 1 },
   ];
 }
@@ -38,11 +38,15 @@ export function setUpParts(plan: Plan, writing: Writing, room: number): Part[] {
 const plainNumber = (writing: Writing, id: string): string => writing.parts(id).number;
 
 function hours(plan: Plan, writing: Writing): string {
-  return plan.quantities['coreHours'] === undefined ? '' : `${writing.number('coreHours')} on one core`;
+  return plan.quantities['coreHours'] === undefined ? '' : `${writing.number('coreHours')} of one core`;
 }
 
-/** The limit that the step follows from, as the step itself states it. */
-function binding(plan: Plan): string {
+/** A run to a steady state has no step in time but one that only drives it there. */
+const marches = (plan: Plan): boolean => plan.choices.some((c) => c.id === 'run-character' && (c.chosen === 'steady' || c.chosen === 'march'));
+
+/** The limit that the step follows from. */
+function binding(plan: Plan, writing: Writing): string {
+  if (plan.quantities['timeStepLimit'] !== undefined) return `${writing.number('timeStepLimit')} limit`;
   const step = plan.quantities['timeStep'];
   const limit = step?.needs.find((id) => /^timeStep[A-Z]/.test(id) && plan.quantities[id]?.value === step.value);
   return limit === undefined ? '' : `bound by ${plan.quantities[limit]?.name ?? limit}`;

@@ -65,15 +65,17 @@ function effectParts(plan: Plan, writing: Writing): Part[] {
   const of = (verdict: PlanEffect['verdict']): PlanEffect[] => judged.filter((e) => e.verdict === verdict);
   const wide = Math.min(26, Math.max(12, ...judged.filter((e) => e.verdict !== 'leave-out').map((e) => e.id.length))) + 2;
   const row = (e: PlanEffect, ...pieces: readonly string[]): string => `${e.id.padEnd(wide)}${joined(pieces.filter((p) => p !== ''), room - Math.max(wide, e.id.length), '; ')}`;
-  const price = (e: PlanEffect): string => (e.price === undefined ? '' : `${priceText(e.price)} without it`);
-  const margin = (e: PlanEffect): string => (factorText(e) === '' ? '' : `${factorText(e)} past the limit`);
+  const price = (e: PlanEffect): string => (e.price === undefined ? '' : `price ${shortPrice(e.price, plan)}`);
   return [
-    { label: 'Include', items: sortedBy(of('include'), closeness).map((e) => row(e, decidingText(e, writing), price(e), margin(e), e.deciding === undefined ? writing.fill(e.because) : '')), least: 3, apart: true },
+    { label: 'Include', items: sortedBy(of('include'), closeness).map((e) => row(e, decidingText(e, writing), price(e), e.deciding === undefined ? writing.fill(e.because) : '')), least: 3, apart: true },
     { label: 'Check', items: of('borderline').map((e) => row(e, decidingText(e, writing) || writing.fill(e.because), price(e), e.firstRun === 'leave-out' ? 'first run without it' : 'first run with it', e.check === undefined ? '' : writing.fill(e.check))), least: 2 },
     { label: 'Open', items: of('undecided').map((e) => row(e, (e.missing ?? []).length === 0 ? writing.fill(e.because) : `needs ${(e.missing ?? []).map((m) => oneLine(m).replaceAll('|', ' or ')).join(', ')}`)), least: 2, warns: true },
     { label: 'Leave out', items: leftOut(plan, sortedBy(of('leave-out'), closeness)), least: 2 },
   ];
 }
+
+/** The price without the name of the target where there is one target alone. */
+const shortPrice = (price: NonNullable<PlanEffect['price']>, plan: Plan): string => (plan.targets.length === 1 ? priceText(price).replace(/ of \S+$/, '') : priceText(price));
 
 /** Effects nearest to their limit first: these are the ones to look at. */
 const closeness = (e: PlanEffect): number => e.deciding?.margin ?? Infinity;
@@ -132,8 +134,6 @@ function assumed(plan: Plan, writing: Writing): string[] {
 
 function moreItems(file: string, plan: Plan): string[] {
   const name = /^[\w./@%+-]+$/.test(file) ? file : 'FILE';
-  return [
-    cut(`runbrief plan ${name} --full      every section; --into DIR writes the files`, room),
-    cut(`runbrief trace ${name} ${plan.quantities['firstCellHeight'] === undefined ? 'ID' : 'firstCellHeight'}      where a number comes from`, room),
-  ];
+  const id = plan.quantities['firstCellHeight'] === undefined ? 'ID' : 'firstCellHeight';
+  return [joined([`runbrief trace ${name.length > 36 ? 'FILE' : name} ${id}`, 'where a number comes from'], room, '   '), 'the same with --full: every section; --into DIR: files; --json: data'];
 }

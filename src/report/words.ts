@@ -14,14 +14,16 @@ export function factorText(e: PlanEffect): string {
   return d.marginKind === 'difference' ? printNumber({ value: d.margin, unit: 'K', digits: 2 }) : `${few(d.margin)} times`;
 }
 
-/** The number that decides, beside the limit on the side of the verdict: `Re = 2.1e4 +/- 5 % (limit 2300)`. */
+/** The number that decides, beside the limit on the side of the verdict: `Re = 22600 +/- 5 %, 9.8 times past 2300`. */
 export function decidingText(e: PlanEffect, writing: Writing): string {
   const d = e.deciding;
   if (d === undefined) return '';
   const { symbol, number } = decider(e, writing);
   const limit = (value: number): string => writing.like(d.quantity, value);
-  const limits = d.leaveOutAt === d.includeAt ? `limit ${limit(d.includeAt)}` : e.verdict === 'include' ? `limit ${limit(d.includeAt)}` : e.verdict === 'leave-out' ? `limit ${limit(d.leaveOutAt)}` : `between ${limit(d.leaveOutAt)} and ${limit(d.includeAt)}`;
-  return `${symbol} = ${number} (${limits})`;
+  if (e.verdict === 'borderline' && d.leaveOutAt !== d.includeAt) return `${symbol} = ${number}, limits ${limit(d.leaveOutAt)} and ${limit(d.includeAt)}`;
+  const nearer = limit(e.verdict === 'leave-out' ? d.leaveOutAt : d.includeAt);
+  const margin = factorText(e);
+  return `${symbol} = ${number}, ${margin === '' || e.verdict === 'borderline' ? `limit ${nearer}` : `${margin} past ${nearer}`}`;
 }
 
 function decider(e: PlanEffect, writing: Writing): { symbol: string; number: string } {
