@@ -72,14 +72,14 @@ export function morgan({ rayleigh }: { rayleigh: number }): number {
  * @param rayleigh  on area over perimeter
  * @returns         mean Nusselt number on area over perimeter
  * @example         levelPlateUnstable({ rayleigh: 1e6 }) // 17.0763
- * @range           rayleigh 1 to 1e11; 6 % jump at 1e7
+ * @range           rayleigh 1 to 1e11, held below 1; 6 % jump at 1e7
  * @scatter         25 %
  * @source          Goldstein, Sparrow and Jones, Int. J. Heat Mass Transfer 16 (1973) 1025 (below 1e4); Lloyd and Moran, J. Heat Transfer 96 (1974) 443
  */
 export function levelPlateUnstable({ rayleigh }: { rayleigh: number }): number {
   if (rayleigh > 1e7) return 0.15 * rayleigh ** (1 / 3);
   if (rayleigh > 1e4) return 0.54 * rayleigh ** 0.25;
-  return rayleigh > 200 ? 0.59 * rayleigh ** 0.25 : 0.96 * rayleigh ** (1 / 6);
+  return rayleigh > 200 ? 0.59 * rayleigh ** 0.25 : 0.96 * Math.max(1, rayleigh) ** (1 / 6);
 }
 
 /**
@@ -88,12 +88,13 @@ export function levelPlateUnstable({ rayleigh }: { rayleigh: number }): number {
  * @param rayleigh  on area over perimeter
  * @returns         the two published laws
  * @example         levelPlateStable({ rayleigh: 1e6 }).first // 8.53815
- * @range           first: rayleigh 1e5 to 1e10; second: 1e4 to 1e9, prandtl above 0.7
+ * @range           first: rayleigh 1e5 to 1e10; second: 1e4 to 1e9, prandtl above 0.7; held below 1
  * @scatter         25 %
  * @source          McAdams, Heat Transmission, 3rd ed. (1954); Radziemska and Lewandowski, Appl. Energy 68 (2001) 347
  */
 export function levelPlateStable({ rayleigh }: { rayleigh: number }): { first: number; second: number } {
-  return { first: 0.27 * rayleigh ** 0.25, second: 0.52 * rayleigh ** 0.2 };
+  const ra = Math.max(1, rayleigh);
+  return { first: 0.27 * ra ** 0.25, second: 0.52 * ra ** 0.2 };
 }
 
 /** By Pr: -theta'(0), f''(0), f'_max, eta of f'_max, eta at 1 % of the temperature, eta at 1 % of the largest speed. */
