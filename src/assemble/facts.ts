@@ -31,7 +31,7 @@ const featureKeys: Readonly<Record<(typeof features)[number], (on: Case, walls: 
   roughness: (_, w) => any(w, 'sandGrain'),
   layers: (c) => c.list('wall.layers').length > 0 || c.list('walls').some((w) => c.list(`walls.${w}.layers`).length > 0),
   gravity: (c) => c.has('gravity'),
-  sources: (c) => c.has('sources'),
+  sources: (c) => c.has('sources') || c.has('drive.heatRelease'),
   wallMotion: (_, w) => any(w, 'speed') || any(w, 'rotation'),
 };
 
