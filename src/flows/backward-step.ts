@@ -1,5 +1,6 @@
 import { quantity, way, ways, type Definition } from '../workings/index.ts';
 import { backwardStepLaws } from './backward-step-laws.ts';
+import { inlet, outlet, wall } from './boundaries.ts';
 import type { Flow, Rung } from './define.ts';
 
 const geometry = 'geometry';
@@ -83,6 +84,13 @@ export const backwardStep: Flow = {
   domain: [
     { side: 'upstream', id: 'domainUpstream', source: 'common practice' },
     { side: 'downstream', id: 'domainDownstream', source: 'common practice: 20 step heights behind reattachment' },
+  ],
+  boundaries: [
+    inlet('inlet, ahead of the step', { velocity: [{ says: 'value: developed profile with mean {speed}', when: { inletProfile: 'developed' } }, { says: 'value: the given profile with mean {speed}; its layer at the edge belongs to the result', when: { inletProfile: ['power', 'log', 'table'] } }, { says: 'value: even, {speed}; a thin layer stands at the edge' }] }),
+    wall('upper wall', 'walls.top'),
+    wall('wall ahead of the step, and its face', 'walls.bottom', { temperature: 'adiabatic' }),
+    wall('lower wall behind the step', 'walls.bottom'),
+    outlet('outlet', { temperature: 'no slope; returns at {inletTemperature}' }),
   ],
   simplifications: [
     'Steady and two-dimensional holds for laminar flow up to Re 400 on twice the inlet height; steady but three-dimensional from there to 1200.',

@@ -1,5 +1,6 @@
-import { deanChannelFriction, ductEntryLoss, laminarEntranceLength, laminarNusselt } from '../quantities/index.ts';
+import { deanChannelFriction, ductEntryLoss, facingWalls, laminarEntranceLength, laminarNusselt } from '../quantities/index.ts';
 import { quantity, way, ways, wordWay, type Definition } from '../workings/index.ts';
+import { inlet, outlet, wall } from './boundaries.ts';
 import type { Flow } from './define.ts';
 import { channelLadder } from './channel-ladder.ts';
 import { passageDefinitions, turbulentLength } from './passage.ts';
@@ -107,7 +108,7 @@ export const channel: Flow = {
   stations: ['worst', 'target'],
   regions: ['entry', 'run'],
   words: { flow: 'channel', flowClass: 'internal', imposedFlow: 'yes', wallBounded: 'yes', attached: 'yes', separated: 'no', ductSection: 'flat' },
-  definitions: [...scales, ...regime, ...laws, ...lengths, ...straightDefinitions],
+  definitions: [...scales, ...regime, ...laws, ...lengths, ...straightDefinitions, ...facingWalls('walls.bottom', 'walls.top')],
   leastRegion: 'Half the gap where both walls do the same and gravity does not act across. Resolved turbulence: a box of at least 2 pi gaps along and pi gaps across the span, ends and sides repeating.',
   cuts: [
     { option: 'two-dimensional', holdsIf: 'width above ten gaps and averaged or laminar flow' },
@@ -118,6 +119,7 @@ export const channel: Flow = {
     { side: 'upstream', id: 'domainUpstream', source: 'entrance length, or none where the profile is given' },
     { side: 'downstream', id: 'domainDownstream', source: 'common practice' },
   ],
+  boundaries: [inlet(), wall('bottom wall', 'walls.bottom'), wall('top wall', 'walls.top'), outlet()],
   simplifications: [
     'Two-dimensional flow holds for laminar or averaged flow wider than ten gaps.',
     'A two-dimensional run of resolved turbulence has no meaning at any width.',

@@ -1,5 +1,6 @@
 import { quantity, way, ways, type Definition } from '../workings/index.ts';
 import { cylinderLaws } from './cylinder-laws.ts';
+import { entraining, open, slipping, stream as streaming, wall } from './boundaries.ts';
 import type { Flow, Rung } from './define.ts';
 
 const geometry = 'geometry';
@@ -85,6 +86,14 @@ export const cylinder: Flow = {
     { side: 'upstream', id: 'domainUpstream', source: 'common practice' },
     { side: 'downstream', id: 'domainDownstream', source: 'common practice' },
     { side: 'sides', id: 'domainSides', source: 'blockage below 3 %' },
+  ],
+  boundaries: [
+    streaming('inlet', { when: stream }),
+    wall('cylinder', 'wall'),
+    slipping('sides', { when: stream, velocity: [{ says: 'sticks: the walls of the channel, {sizes.channelHeight} apart' }, { says: 'slips, {domainSides} away' }] }),
+    open('outlet', { when: stream, velocity: [{ says: 'leaves freely; eddies pass out at {speed}' }], temperature: 'no slope', turbulence: 'no slope' }),
+    entraining('sides and below', { when: still }),
+    open('above', { when: still, pressure: 'value 0 above the hydrostatic pressure of the fluid at {farTemperature}', turbulence: 'no slope; low where it returns' }),
   ],
   simplifications: [
     'Attached below Re 5; closed steady wake to 47; laminar shedding to 180 or 190; three-dimensional beyond; drag crisis between 2e5 and 4e5.',

@@ -23,6 +23,31 @@ export interface Extent {
   readonly source: string;
 }
 
+/** What is given for one variable at a boundary; numbers are quantities in braces. */
+export interface Condition {
+  readonly says: string;
+  readonly when?: When;
+  /** Effect that the model must carry for it. */
+  readonly kept?: string;
+}
+
+/** One sentence, or several of which the first counts whose words and effects hold and whose numbers are known. */
+export type Conditions = string | readonly Condition[];
+
+/** A row of the table of boundaries: what each variable has there. Variables that are not solved are left out. */
+export interface Boundary {
+  readonly name: string;
+  readonly is: 'wall' | 'inlet' | 'outlet' | 'open' | 'mirror' | 'joined' | 'point';
+  /** Place of its quantities, such as `walls.left`. */
+  readonly place?: string;
+  readonly when?: When;
+  readonly velocity: Conditions;
+  readonly pressure: Conditions;
+  readonly temperature: Conditions;
+  readonly turbulence: Conditions;
+  readonly species?: Conditions;
+}
+
 /** One step of the ladder: a reference, the one thing that changes, what is compared and how close it must come. */
 export interface Rung {
   readonly reference: string;
@@ -57,6 +82,8 @@ export interface Flow {
   readonly leastRegion: string;
   readonly cuts: readonly Cut[];
   readonly domain: readonly Extent[];
+  /** Every boundary with the condition of each variable. */
+  readonly boundaries: readonly Boundary[];
   /** When common simplifications hold and when they fail. */
   readonly simplifications: readonly string[];
   /** What a right picture must show, and what the usual wrong ones look like. */

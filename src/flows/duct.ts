@@ -1,5 +1,6 @@
 import { between, ductEntryLoss, ductFrictionReynolds, ductNusseltFlux, ductNusseltTemperature, ductPeakOverMean, jonesDiameterRatio, type Table } from '../quantities/index.ts';
 import { quantity, way, ways, type Definition } from '../workings/index.ts';
+import { inlet, outlet, wall } from './boundaries.ts';
 import type { Flow } from './define.ts';
 import { ductLadder } from './duct-ladder.ts';
 import { passageDefinitions, turbulentLength } from './passage.ts';
@@ -103,6 +104,7 @@ export const duct: Flow = {
     { side: 'upstream', id: 'domainUpstream', source: 'entrance length, or none where the profile is given' },
     { side: 'downstream', id: 'domainDownstream', source: 'common practice' },
   ],
+  boundaries: [inlet(), ...['left', 'right', 'top', 'bottom'].map((side) => wall(`${side} wall`, `walls.${side}`)), outlet()],
   simplifications: [
     'Two-dimensional flow only below a tenth of side ratio: side walls add 13 % to the friction at 0.1 and 6 % at 0.05.',
     'Closures with one eddy viscosity give none of the secondary flow in the corners, 1 to 3 % of the mean speed: take a quadratic or a Reynolds-stress closure where corner heat or the shear along the wall is wanted.',

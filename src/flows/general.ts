@@ -1,5 +1,6 @@
 import { laminarFriction, petukhovFriction } from '../quantities/index.ts';
 import { quantity, way, ways, wordWay, type Definition } from '../workings/index.ts';
+import { entraining, inlet, open, outlet, slipping, stream, wall } from './boundaries.ts';
 import type { Flow } from './define.ts';
 import { generalBody, generalDrag } from './general-laws.ts';
 
@@ -106,6 +107,18 @@ export const general: Flow = {
     { side: 'downstream', id: 'domainDownstream', source: 'common practice' },
     { side: 'sides', id: 'domainSides', source: 'common practice, blockage below 3 to 5 %' },
     { side: 'above', id: 'domainAbove', source: 'common practice, blockage below 3 to 5 %' },
+  ],
+  boundaries: [
+    inlet('inlet', { when: { ...inside, imposedFlow: 'yes' } }),
+    stream('inlet', { when: { generalConfinement: ['outside', 'free'], imposedFlow: 'yes' } }),
+    wall('walls', 'wall', { when: { generalConfinement: ['inside', 'outside'] } }),
+    slipping('far sides', { when: { ...outside, imposedFlow: 'yes' } }),
+    entraining('far sides', { when: { ...free, imposedFlow: 'yes' } }),
+    entraining('far sides and below', { when: { generalConfinement: ['outside', 'free'], imposedFlow: 'no' } }),
+    outlet('outlet', { when: { ...inside, imposedFlow: 'yes' } }),
+    open('outlet', { when: { generalConfinement: ['outside', 'free'], imposedFlow: 'yes' } }),
+    open('above', { when: { generalConfinement: ['outside', 'free'], imposedFlow: 'no' }, turbulence: 'no slope; low where it returns' }),
+    open('openings', { when: { ...inside, imposedFlow: 'no' } }),
   ],
   simplifications: ['None is granted. Every number is by analogy and of low confidence: name the nearest flow instead.'],
   look: {

@@ -1,3 +1,3 @@
 export { flows } from './registry.ts';
-export type { Cut, Extent, Flow, Rung, Size } from './define.ts';
-export { rungDefinitions, rungsOf, type NamedRung } from './rungs.ts';
+export type { Boundary, Conditions, Cut, Extent, Flow, Rung, Size } from './define.ts';
+export { rungDefinitions, rungInputs, rungsOf, type NamedRung } from './rungs.ts';

@@ -1,5 +1,6 @@
 import { bedGradient, eisfeldDrag, ergunDrag, gnielinskiBed, ktaGradient, wakao, wenYu } from '../quantities/index.ts';
 import { quantity, way, ways, type Definition } from '../workings/index.ts';
+import { inlet, outlet, slipping, wall } from './boundaries.ts';
 import type { Flow } from './define.ts';
 import { packedBedLadder } from './packed-bed-ladder.ts';
 
@@ -108,6 +109,15 @@ export const packedBed: Flow = {
   domain: [
     { side: 'upstream', id: 'domainUpstream', source: 'common practice' },
     { side: 'downstream', id: 'domainDownstream', source: 'common practice' },
+  ],
+  boundaries: [
+    inlet('inlet', { velocity: 'value {speed}, even, superficial', turbulence: 'none: the drag law holds the turbulence of the pores' }),
+    wall('wall of the bed', 'wall', {
+      velocity: [{ says: 'slips where the bed is a continuum; sticks where a layer of {brinkmanLayer} is resolved, with voids rising to 1 within {packedBedChannelling}' }, { says: 'slips where the bed is a continuum' }],
+      turbulence: 'none: the drag law holds it',
+    }),
+    slipping('both ends of the bed', { is: 'joined', velocity: 'joined: the same superficial speed', pressure: 'continuous', temperature: 'joined; two equations where solid and fluid differ', turbulence: 'none in the bed', species: 'joined' }),
+    outlet('outlet, free of particles', { turbulence: 'none' }),
   ],
   simplifications: [
     'No closure of turbulence and no y+ inside a continuum: the drag law holds inertia and turbulence of the pores.',

@@ -1,5 +1,6 @@
 import { laminarEntranceLength, laminarNusselt, pipeEntryLoss } from '../quantities/index.ts';
 import { way, ways, type Definition } from '../workings/index.ts';
+import { inlet, outlet, wall } from './boundaries.ts';
 import type { Flow } from './define.ts';
 import { passageDefinitions, turbulentLength } from './passage.ts';
 import { pipeLadder } from './pipe-ladder.ts';
@@ -80,6 +81,7 @@ export const pipe: Flow = {
     { side: 'upstream', id: 'domainUpstream', source: 'entrance length, or none where the profile is given' },
     { side: 'downstream', id: 'domainDownstream', source: 'common practice' },
   ],
+  boundaries: [inlet(), wall('wall'), outlet()],
   simplifications: [
     'Steady and axisymmetric holds for an upright pipe, or where buoyancy is left out, with no swirl and more than 50 diameters of straight pipe ahead.',
     'It fails in a level heated pipe with laminar flow (two rolls side by side), behind bends, and with heating on one side.',

@@ -1,4 +1,5 @@
 import { quantity, way, ways, wordWay, type Definition } from '../workings/index.ts';
+import { entraining, open, slipping, stream as streaming, wall } from './boundaries.ts';
 import type { Flow } from './define.ts';
 import { plateLadder } from './plate-ladder.ts';
 import { plateStill } from './plate-still.ts';
@@ -96,6 +97,16 @@ export const plate: Flow = {
     { side: 'upstream', id: 'domainUpstream', source: 'common practice' },
     { side: 'downstream', id: 'domainDownstream', source: 'common practice' },
     { side: 'above', id: 'domainAbove', source: 'common practice: ten layers' },
+  ],
+  boundaries: [
+    streaming('inlet, ahead of the edge', { when: { plateSetting: 'stream' } }),
+    slipping('strip before the edge', { when: { plateSetting: 'stream' }, temperature: 'adiabatic' }),
+    wall('plate', 'wall'),
+    open('top', { when: { plateSetting: 'stream' } }),
+    open('outlet', { when: { plateSetting: 'stream' }, temperature: 'no slope', turbulence: 'no slope' }),
+    entraining('far side and below', { when: { plateSetting: ['upright', 'inclined'] } }),
+    entraining('all sides', { when: { plateSetting: ['unstable', 'stable'] } }),
+    open('above', { when: { plateSetting: still }, velocity: 'leaves freely', pressure: 'value 0 above the hydrostatic pressure of the fluid at {farTemperature}', turbulence: 'no slope; low where it returns' }),
   ],
   simplifications: [
     'Two-dimensional and steady holds unless the side edges, the turbulence of the stream or the place of transition matter.',

@@ -1,4 +1,5 @@
 import { quantity, way, ways, type Definition } from '../workings/index.ts';
+import { level as referenceLevel, wall } from './boundaries.ts';
 import type { Flow, Rung } from './define.ts';
 import { sideHeatedCavityLaws } from './side-heated-cavity-laws.ts';
 
@@ -72,6 +73,7 @@ export const sideHeatedCavity: Flow = {
   leastRegion: 'Two-dimensional where the depth is above three heights, the end walls are adiabatic and Pr is 0.7 or more; else the whole box. No mirror: the field is symmetric about a point.',
   cuts: [{ option: 'two-dimensional', holdsIf: 'depth above three heights, adiabatic end walls, Pr of 0.7 or more, steady flow' }],
   domain: [],
+  boundaries: [wall('left wall', 'walls.left'), wall('right wall', 'walls.right'), wall('floor', 'walls.bottom'), wall('ceiling', 'walls.top'), referenceLevel()],
   simplifications: [
     'Below Ra_W = 500 H/W conduction rules; above it layers stand on the walls and the core is stratified.',
     'Adiabatic floor and lid are rarely true for air: radiation and conduction change the heat by 10 to 30 %.',

@@ -1,1 +1,2 @@
-export { ladderDetails, ladderOf, type CaseRung, type RungDetail } from './ladder.ts';
+export { fillReference, type FilledReference } from './compare-inputs.ts';
+export { ladderDetails, ladderOf, ladderTables, skippedRungs, type CaseRung, type RungDetail, type SkippedRung } from './ladder.ts';

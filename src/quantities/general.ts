@@ -4,8 +4,10 @@ import { branches } from './branches.ts';
 import { groups } from './groups.ts';
 import { conduction } from './conduction.ts';
 import { entrance } from './entrance.ts';
+import { expected } from './expected.ts';
 import { porous } from './porous.ts';
 import { dimension } from './dimension.ts';
+import { domain } from './domain.ts';
 import { unsteady } from './unsteady.ts';
 import { species } from './species.ts';
 import { roughness } from './roughness.ts';
@@ -55,6 +57,8 @@ export const generalDefinitions: Definition[] = [
   ...unsteady,
   ...porous,
   ...dimension,
+  ...domain,
+  ...expected,
   ...onset,
   ...buoyancy,
   ...density,
