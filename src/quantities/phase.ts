@@ -2,6 +2,11 @@ import { quantity, way, wordWay, type Definition } from '../workings/index.ts';
 
 /** How near the fluid comes to another phase: cavitation, boiling, condensation, freezing. */
 export const phase: Definition[] = [
+  ...([['volatile', 'vapourPressure', 'a vapour pressure'], ['boils', 'saturationTemperature', 'a saturation line'], ['melts', 'meltingTemperature', 'a melting point']] as const).map(([id, need, what]) =>
+    quantity(id, { symbol: '', name: `the fluid has ${what}`, unit: 'word', words: ['yes', 'no'] }, [
+      wordWay({ needs: [need], word: () => 'yes', formula: `${what} is known`, source: 'material record' }),
+      wordWay({ needs: [], word: () => 'no', formula: `${what} is not known`, source: 'material record' }),
+    ])),
   quantity('pressureCoefficientMin', { symbol: '|C_p,min|', name: 'magnitude of the lowest pressure coefficient on the speed scale', unit: '1' }, [
     way({ needs: [], as: 'assumed', value: () => 1, formula: '|C_p,min| = 1', source: 'common practice for straight passages, steps, cavities and tanks, on the safe side' }),
   ]),

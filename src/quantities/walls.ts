@@ -21,6 +21,10 @@ export const wallTemperatures: Definition[] = [
   quantity('wallTemperatureNext', { symbol: 'T_w', name: 'wetted face that the wall fluxes give', ...kelvin, per: ['wall'], plain: 'target' }, [
     way({ needs: ['bulkTemperature', 'wallHeatFlux', 'innerResistance'], value: ({ bulkTemperature, wallHeatFlux, innerResistance }) => bulkTemperature + wallHeatFlux * innerResistance, formula: 'T_b + q/h', source: 'definition of the heat-transfer coefficient' }),
   ]),
+  quantity('wallTemperaturePeak', { symbol: 'T_w,p', name: 'hottest place of the wetted face of a wall', ...kelvin, per: ['wall'], plain: 'target' }, [
+    way({ needs: ['outletTemperature', 'wallHeatFlux', 'nusseltOutlet', 'thermalConductivityBulk', 'length'], when: { wallKind: 'flux', flowClass: 'internal' }, value: ({ outletTemperature, wallHeatFlux, nusseltOutlet, thermalConductivityBulk, length }) => outletTemperature + (wallHeatFlux * length) / (nusseltOutlet * thermalConductivityBulk), formula: 'T_w,p = T_out + q L/(Nu_out k_b), at the outlet', source: 'definition of the heat-transfer coefficient' }),
+    way({ needs: ['wallTemperature'], when: { wallKind: ['temperature', 'coefficient', 'adiabatic'] }, value: ({ wallTemperature }) => wallTemperature, formula: 'T_w,p = T_w', source: 'a wall of one temperature' }),
+  ]),
   quantity('wallHeat', { symbol: 'Q_w', name: 'heat given at a wall', unit: 'W', signed: true, per: ['wall'], plain: 'target' }),
   quantity('wallArea', { symbol: 'A_w', name: 'wetted area of a wall, one passage', unit: 'm^2', per: ['wall'], plain: 'target' }),
   quantity('wallHeatFlux', { symbol: 'q', name: 'heat flux from the wall into the fluid', unit: 'W/m^2', signed: true, per: ['wall'], plain: 'target' }, [
