@@ -1,4 +1,4 @@
-import { berkovskyPolevikov, eckertJackson, elSherbiny, macgregorEmery, shallowCavity, uprightSimilar } from '../quantities/index.ts';
+import { berkovskyPolevikov, eckertJackson, elSherbiny, facingWalls, macgregorEmery, shallowCavity, uprightSimilar } from '../quantities/index.ts';
 import { quantity, way, ways, type Definition } from '../workings/index.ts';
 
 const definition = 'definition';
@@ -80,4 +80,4 @@ const field: Definition[] = [
 ];
 
 /** Heat transfer, wall layers and core of a box heated from the side. */
-export const sideHeatedCavityLaws: Definition[] = [...regime, ...heat, ...field];
+export const sideHeatedCavityLaws: Definition[] = [...regime, ...heat, ...field, ...facingWalls('walls.left', 'walls.right')];

@@ -56,10 +56,9 @@ function elsewhere(): Definition[] {
     quantity('conductionRayleigh', { symbol: 'Ra_cond', name: 'Rayleigh number on the height below which a side-heated gap only conducts', unit: '1' }, [
       way({ needs: ['passageHeight', 'gap'], when: { flowClass: 'enclosure' }, scatter: 0.5, value: ({ passageHeight, gap }) => 500 * (passageHeight / gap) ** 4, formula: 'Ra_H = 500 (H/W)^4, from Ra_W = 500 H/W', source: 'Batchelor, Q. Appl. Math. 12 (1954) 209' }),
     ]),
-    quantity('gradientRichardson', { symbol: 'Ri_f', name: 'stratification over shear in the sheared layer, with a turbulent Prandtl number of 0.85', unit: '1' }, [
-      ...([['internal', 'gap', 0.5, 'H/2'], ['body', 'boundaryLayerThickness', 1, 'delta'], ['enclosure', 'boundaryLayerThickness', 1, 'delta'], ['jet', 'length', 0.5, 'L/2']] as const).map(([flowClass, layer, share, symbol]) =>
-        way({ needs: ['gravity', 'thermalExpansion', 'temperatureDifference', 'speed', layer], when: { flowClass }, scatter: 1, value: (of) => ((of.gravity * Math.abs(of.thermalExpansion) * of.temperatureDifference * share * ((of as Readonly<Record<string, number>>)[layer] as number)) / of.speed ** 2) / 0.85, formula: `g |beta| dT delta/(U^2 Pr_t), delta = ${symbol}`, source: 'estimate before a run, common practice' })),
-    ]),
+    quantity('gradientRichardson', { symbol: 'Ri_f', name: 'stratification over shear in the sheared layer, with a turbulent Prandtl number of 0.85', unit: '1' },
+      ([['internal', 'gap', 0.5, 'H/2'], ['body', 'boundaryLayerThickness', 1, 'delta'], ['enclosure', 'boundaryLayerThickness', 1, 'delta'], ['jet', 'length', 0.5, 'L/2']] as const).map(([flowClass, layer, share, symbol]) =>
+        way({ needs: ['gravity', 'thermalExpansion', 'temperatureDifference', 'speed', layer], when: { flowClass }, scatter: 1, value: (of) => ((of.gravity * Math.abs(of.thermalExpansion) * of.temperatureDifference * share * ((of as Readonly<Record<string, number>>)[layer] as number)) / of.speed ** 2) / 0.85, formula: `g |beta| dT delta/(U^2 Pr_t), delta = ${symbol}`, source: 'estimate before a run, common practice' }))),
     quantity('stratificationFactorViscosity', { symbol: 'F_nu', name: 'eddy viscosity in a stable layer over that without stratification', unit: '1' }, [
       way({ needs: ['gradientRichardson'], value: ({ gradientRichardson }) => 1 / Math.sqrt(1 + 10 * 0.85 * gradientRichardson), formula: 'F = (1 + 10 Ri_g)^(-1/2), Ri_g = 0.85 Ri_f', source: 'Munk and Anderson, J. Mar. Res. 7 (1948) 276' }),
     ]),

@@ -1,6 +1,7 @@
 export { generalDefinitions } from './general.ts';
 export * from './correlations/index.ts';
 export { layersBelow, layersToCover, layersToMatch, stackHeight } from './layer-stack.ts';
+export { facingWalls } from './radiation.ts';
 export { layerDefinitions, type Layer } from './layers.ts';
 export { termIds } from './terms.ts';
 export { features } from './words.ts';

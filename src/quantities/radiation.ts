@@ -8,8 +8,17 @@ const stefan = 'Stefan-Boltzmann law, gray diffuse surfaces; constant of CODATA 
 const definition = 'definition';
 const clear = { transparency: 'transparent', energySolved: 'yes' } as const;
 const black = (hot: number, cold: number): number => sigma * (hot ** 4 - cold ** 4);
-/** Net flux between two large parallel surfaces. */
-const parallel = (hot: number, cold: number, e1: number, e2: number): number => black(hot, cold) / (1 / e1 + 1 / e2 - 1);
+
+/**
+ * Exchange between two named walls of a flow, each with its own emissivity.
+ *
+ * @param one    place of a wall, such as `walls.left`
+ * @param other  place of the wall opposite
+ * @returns      ways that a flow adds
+ */
+export function facingWalls(one: string, other: string): Definition[] {
+  return [ways('exchangeEmissivity', [{ needs: [`emissivity@${one}`, `emissivity@${other}`], value: (of) => 1 / (1 / (of[`emissivity@${one}`] as number) + 1 / (of[`emissivity@${other}`] as number) - 1), formula: 'eps_12 = 1/(1/eps_1 + 1/eps_2 - 1)', source: 'two large parallel gray surfaces' }])];
+}
 
 /** Radiation: between surfaces, from the outer face, by the gas itself, in turbulent flames. */
 export const radiation: Definition[] = [...surfaces(), ...outerFace(), ...gas()];
@@ -17,15 +26,15 @@ export const radiation: Definition[] = [...surfaces(), ...outerFace(), ...gas()]
 function surfaces(): Definition[] {
   return [
     quantity('emissivity', { symbol: 'eps', name: 'emissivity of a wall', unit: '1', per: ['wall'], plain: 'target' }),
-    quantity('partnerEmissivity', { symbol: 'eps_2', name: 'emissivity of the surface that the target wall sees', unit: '1' }, [
-      way({ needs: ['emissivity'], as: 'assumed', value: ({ emissivity }) => emissivity, formula: 'eps_2 = eps', source: 'the surface opposite is taken as alike' }),
+    quantity('exchangeEmissivity', { symbol: 'eps_12', name: 'emissivity of the exchange between the hottest and the coldest wall', unit: '1' }, [
+      way({ needs: ['emissivity'], as: 'assumed', value: ({ emissivity }) => emissivity / (2 - emissivity), formula: 'eps_12 = 1/(2/eps - 1)', source: 'both walls are taken as alike' }),
     ]),
     quantity('wallTemperatureSpan', { symbol: 'dT_w', name: 'hottest against coldest wall', unit: 'K' }, [
       way({ needs: ['wallTemperatureMax', 'wallTemperatureMin'], value: ({ wallTemperatureMax, wallTemperatureMin }) => wallTemperatureMax - wallTemperatureMin, formula: 'T_w,max - T_w,min', source: definition }),
     ]),
     quantity('radiativeFlux', { symbol: 'q_r', name: 'net radiation from the target wall', unit: 'W/m^2', signed: true }, [
       way({ needs: ['wallTemperature', 'surroundingsTemperature', 'emissivity'], when: { ...clear, flowClass: 'body' }, value: (of) => of.emissivity * black(of.wallTemperature, of.surroundingsTemperature), formula: 'q_r = eps sigma (T_w^4 - T_sur^4), large surroundings', source: stefan, dimensional: constant }),
-      way({ needs: ['wallTemperatureMax', 'wallTemperatureMin', 'emissivity', 'partnerEmissivity'], when: { ...clear, flowClass: ['enclosure', 'internal'] }, value: (of) => parallel(of.wallTemperatureMax, of.wallTemperatureMin, of.emissivity, of.partnerEmissivity), formula: 'q_r = sigma (T_1^4 - T_2^4)/(1/eps_1 + 1/eps_2 - 1), hottest and coldest wall as large parallel surfaces', source: stefan, dimensional: constant }),
+      way({ needs: ['wallTemperatureMax', 'wallTemperatureMin', 'exchangeEmissivity'], when: { ...clear, flowClass: ['enclosure', 'internal'] }, value: (of) => of.exchangeEmissivity * black(of.wallTemperatureMax, of.wallTemperatureMin), formula: 'q_r = eps_12 sigma (T_1^4 - T_2^4), hottest and coldest wall as large parallel surfaces', source: stefan, dimensional: constant }),
     ]),
     quantity('convectiveFluxPlain', { symbol: 'q_c', name: 'convective flux from the target wall with the plain Nusselt number', unit: 'W/m^2', signed: true }, [
       way({ needs: ['heatTransferCoefficientPlain', 'wallTemperature', 'farTemperature'], when: { flowClass: 'body' }, value: (of) => of.heatTransferCoefficientPlain * (of.wallTemperature - of.farTemperature), formula: 'q_c = h_0 (T_w - T_far)', source: definition }),

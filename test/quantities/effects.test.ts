@@ -2,6 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { findReference } from '../../src/references/index.ts';
 import { jacksonFactor, uprightLaminar } from '../../src/quantities/index.ts';
 import { loadMaterial, laws as lawsOf } from '../../src/properties/index.ts';
+import { flows } from '../../src/flows/index.ts';
+import { workingsOf } from '../flows/harness.ts';
 import { given, numberOf } from './effects.harness.ts';
 
 type Values = Readonly<Record<string, number | string>>;
@@ -66,7 +68,7 @@ const rows: readonly Row[] = [
   { id: 'pressureWorkRise', of: { thermalExpansion: 1 / 300, referenceTemperature: 300, mixedRise: -7 }, value: -7, rtol: 1e-12, source: 'ideal gas: beta T = 1, so that both rises cancel in a throttle' },
   // Radiation: plate of 60 degC in surroundings of 20 degC with emissivity 0.9 and h = 3.962.
   { id: 'radiationShare', of: { flowClass: 'body', transparency: 'transparent', energySolved: 'yes', emissivity: 0.9, wallTemperature: 333.15, farTemperature: 293.15, surroundingsTemperature: 293.15, heatTransferCoefficientPlain: 3.962 }, value: 0.6136964, rtol: 1e-6, source: 'numpy; h_r = 6.294' },
-  { id: 'radiativeFlux', of: { flowClass: 'enclosure', transparency: 'transparent', energySolved: 'yes', wallTemperatureMax: 350, wallTemperatureMin: 300, emissivity: 0.8, partnerEmissivity: 0.6 }, value: 204.31838, rtol: 1e-7, source: 'two gray plates, numpy' },
+  { id: 'radiativeFlux', of: { flowClass: 'enclosure', transparency: 'transparent', energySolved: 'yes', wallTemperatureMax: 350, wallTemperatureMin: 300, exchangeEmissivity: 1 / (1 / 0.8 + 1 / 0.6 - 1) }, value: 204.31838, rtol: 1e-7, source: 'two gray plates, numpy' },
   { id: 'outerRadiationCoefficient', of: { wallKind: 'coefficient', emissivity: 0.9, wallTemperature: 420, surroundingsTemperature: 288, wallResistance: 0.02, outerCoefficient: 9, outerAreaRatio: 1.3 }, value: 7.7485869, rtol: 1e-7, source: 'outer face by scipy brentq: 379.956 K' },
   { id: 'gasRadiationShare', of: { flowClass: 'internal', opticalThickness: 0.0225, bulkTemperature: 1500, wallTemperature: 800, convectiveFluxPlain: -8400 }, value: 0.4113543, rtol: 1e-6, source: 'burner tube, numpy' },
   { id: 'gasRadiationShare', of: { flowClass: 'internal', opticalThickness: 6.49963e-4, bulkTemperature: 1500, wallTemperature: 800, convectiveFluxPlain: -8400 }, value: 0.02, rtol: 1e-5, source: 'the thickness at which the share is 2 %, scipy brentq' },
@@ -164,5 +166,12 @@ describe('limits of the linear density law, Gray and Giorgini 1976', () => {
   it('the sign of the slope tells a maximum between', () => {
     expect(numberOf({ thermalExpansionCold: water(274.15, 101325), thermalExpansionHot: water(283.15, 101325) }, 'expansionSign')).toBeLessThan(0);
     expect(numberOf({ thermalExpansionCold: water(283.15, 101325), thermalExpansionHot: water(293.15, 101325) }, 'expansionSign')).toBeGreaterThan(0);
+  });
+});
+
+describe('two walls with emissivities of their own', () => {
+  it.each([['side-heated-cavity', 'walls.left', 'walls.right'], ['channel', 'walls.bottom', 'walls.top']])('%s: exchange by 1/(1/0.8 + 1/0.6 - 1) = 0.52174 (worked by hand)', (flow, one, other) => {
+    const at = workingsOf(flows[flow] as NonNullable<(typeof flows)[string]>, { [`emissivity@${one}`]: 0.8, [`emissivity@${other}`]: 0.6 });
+    expect(at.get('exchangeEmissivity')).toBeCloseTo(0.52174, 5);
   });
 });
