@@ -40,7 +40,7 @@ export const work: Definition[] = [
     way({ needs: ['coresMost'], as: 'assumed', value: ({ coresMost }) => Math.min(16, coresMost), formula: 'n_c = min(16, n_max)', source: 'taken where the case names no machine' }),
   ]),
   quantity('parallelEfficiency', { symbol: 'eta_p', name: 'share of the cores that does work', unit: '1' }, [
-    way({ needs: ['cores', 'coresMost'], value: ({ cores, coresMost }) => 1 / (1 + cores / coresMost), formula: 'eta_p = 1/(1 + n_c/n_max)', source: uncalibrated }),
+    way({ needs: ['cores', 'coresMost'], value: ({ cores, coresMost }) => 1 / (1 + (cores - 1) / coresMost), formula: 'eta_p = 1/(1 + (n_c - 1)/n_max)', source: uncalibrated }),
   ]),
   quantity('coreHours', { symbol: 't_c', name: 'core hours of the run on the medium mesh', unit: '1' }, [
     way({ needs: ['cellCount', 'totalPasses', 'cellUpdateRate', 'parallelEfficiency'], value: (of) => (of.cellCount * of.totalPasses) / (of.cellUpdateRate * of.parallelEfficiency) / 3600, formula: 't_c = N N_i/(theta eta_p)/3600 s', source: 'definition', dimensional: 'hours are counted, of 3600 s each' }),

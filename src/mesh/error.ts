@@ -12,6 +12,7 @@ export const meshErrors: Definition[] = [
   ]),
   quantity('wallError', { symbol: 'e_w', name: 'error of the gradient at the wall', unit: '1' }, [
     way({ needs: ['thinnestLayer', 'firstCellHeight'], when: { regime: 'laminar' }, scatter: 2, value: ({ thinnestLayer, firstCellHeight }) => firstCellHeight / (4 * thinnestLayer), formula: 'e_w = h_1/(4 delta_min), linear in the first cell', source: 'parabolic layer' }),
+    way({ needs: ['coreError'], when: { 'choice.near-wall-treatment': ['law-of-the-wall', 'rough-law'] }, value: ({ coreError }) => coreError, formula: 'e_w = e_c: a law holds the wall, its own error is no mesh error', source: 'definition' }),
     way({ needs: ['cellsInLayer'], scatter: 2, value: ({ cellsInLayer }) => 3.5 / Math.max(1, cellsInLayer) ** 2, formula: 'e_w = 3.5/n_l^2', source: `${forecast}: exponential layer` }),
   ]),
   quantity('coreError', { symbol: 'e_c', name: 'error made away from walls', unit: '1' }, [

@@ -6,6 +6,7 @@ import { regions } from './regions.ts';
 import { sizes } from './sizes.ts';
 
 export { plane } from './cuts.ts';
+export { geometricBetween, geometricRatio, inverseSinhc, tanhStretching } from './grading.ts';
 export { wallModelledCells, wallResolvedCells } from './eddies.ts';
 
 /** What the mesh consists of, and the error it is expected to leave. */

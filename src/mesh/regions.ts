@@ -1,5 +1,6 @@
 import { quantity, way, ways, type Definition, type Way } from '../workings/index.ts';
 import { plane } from './cuts.ts';
+import { geometricRatio } from './grading.ts';
 
 const practice = 'common practice';
 const geometry = 'geometry';
@@ -20,11 +21,14 @@ const limited = (direction: 'along' | 'span', stretch: string, walls: string, pl
   { needs: ['coreCellSize', 'regionCoarsening', stretch], value: (of) => (of['coreCellSize'] as number) * (of['regionCoarsening'] as number) * (of[stretch] as number), formula: `h_${direction === 'along' ? 'x' : 'z'} = h_c a_c a`, source: practice },
 ];
 
+/** Up to the next multiple, so that the whole family has whole counts; nothing stays nothing. */
+const upTo = (count: number, multiple: number): number => (count <= 0 ? 0 : multiple * Math.ceil(count / multiple - 1e-9));
+
 /** Cells over a width of which so many wall stacks take their part. */
 function across(width: string, size: string, walls: string, symbol: string): Way[] {
   return [
-    way({ needs: [width, size, walls, 'layerCount', 'layerStackHeight'], value: (of) => Math.ceil((of[walls] as number) * (of['layerCount'] as number) + Math.max(0, (of[width] as number) - (of[walls] as number) * (of['layerStackHeight'] as number)) / (of[size] as number) - 1e-9), formula: `n = n_w N_l + (${symbol} - n_w S)/h, rounded up`, source: 'layers at each wall, equal cells between' }),
-    way({ needs: [width, size], value: (of) => Math.ceil((of[width] as number) / (of[size] as number) - 1e-9), formula: `n = ${symbol}/h, rounded up`, source: 'equal cells' }),
+    way({ needs: [width, size, walls, 'layerCount', 'layerStackHeight', 'countMultiple'], value: (of) => upTo((of[walls] as number) * (of['layerCount'] as number) + Math.max(0, (of[width] as number) - (of[walls] as number) * (of['layerStackHeight'] as number)) / (of[size] as number), of['countMultiple'] as number), formula: `n = n_w N_l + (${symbol} - n_w S)/h, up to the multiple`, source: 'layers at each wall, equal cells between' }),
+    way({ needs: [width, size, 'countMultiple'], value: (of) => upTo((of[width] as number) / (of[size] as number), of['countMultiple'] as number), formula: `n = ${symbol}/h, up to the multiple`, source: 'equal cells' }),
   ];
 }
 
@@ -50,12 +54,15 @@ export const regions: Definition[] = [
   quantity('regionSizeAlong', { symbol: 'h_x', name: 'cell of a region along the flow', unit: 'm', ...perRegion, plain: 'smallest' }, limited('along', 'regionStretch', 'regionWalls', { les: 70, dns: 10 })),
   quantity('regionSizeSpan', { symbol: 'h_z', name: 'cell of a region along the span', unit: 'm', ...perRegion }, limited('span', 'regionSpanStretch', 'regionWalls', { les: 20, dns: 5 })),
   quantity('cellsAlong', { symbol: 'n_x', name: 'cells of a region along the flow', unit: '1', ...perRegion, plain: 'sum' }, [
-    way({ needs: ['regionAlong', 'regionSizeAlong'], value: ({ regionAlong, regionSizeAlong }) => Math.ceil(regionAlong / regionSizeAlong - 1e-9), formula: 'n_x = L_r/h_x, rounded up', source: 'equal cells' }),
+    way({ needs: ['regionAlong', 'regionSizeAlong', 'countMultiple'], value: ({ regionAlong, regionSizeAlong, countMultiple }) => upTo(regionAlong / regionSizeAlong, countMultiple), formula: 'n_x = L_r/h_x, up to the multiple', source: 'equal cells' }),
   ]),
   quantity('cellsAcross', { symbol: 'n_y', name: 'cells of a region across the flow', unit: '1', ...perRegion }, across('regionAcross', 'regionSizeAcross', 'regionWalls', 'W_r')),
   quantity('cellsSpan', { symbol: 'n_z', name: 'cells of a region along the span', unit: '1', ...perRegion }, [
     way({ needs: [], when: { 'choice.dimension-and-cuts': plane }, value: () => 1, formula: 'n_z = 1', source: 'the chosen cuts' }),
     ...across('regionSpan', 'regionSizeSpan', 'regionSpanWalls', 'B_r'),
+  ]),
+  quantity('edgeRatio', { symbol: 'g_e', name: 'ratio of neighbouring cells on the edge from the wall, all cells of the edge counted', unit: '1', ...perRegion }, [
+    way({ needs: ['regionAcross', 'cellsAcross', 'regionWalls', 'firstCellHeight'], value: (of) => edgeRatio(of), formula: 'g_e: h_1 (g^n - 1)/(g - 1) = W_r over n cells, both halved between two walls', source: 'geometric series, root by bisection and Newton steps' }),
   ]),
   quantity('regionCells', { symbol: 'N_r', name: 'cells of a region', unit: '1', ...perRegion, plain: 'sum' }, [
     way({ needs: ['cellsAlong', 'cellsAcross', 'cellsSpan', 'cutShare'], value: ({ cellsAlong, cellsAcross, cellsSpan, cutShare }) => cellsAlong * cellsAcross * cellsSpan * cutShare, formula: 'N_r = n_x n_y n_z s_c', source: 'product of the directions' }),
@@ -64,3 +71,10 @@ export const regions: Definition[] = [
     way({ needs: ['speed', 'regionSizeAlong', 'smallestDiffusivity'], value: ({ speed, regionSizeAlong, smallestDiffusivity }) => (speed * regionSizeAlong) / smallestDiffusivity, formula: 'Pe_r = U h_x/Gamma', source: 'Patankar 1980' }),
   ]),
 ];
+
+/** Not finite where no wall is met or the cells of the edge are larger than it. */
+function edgeRatio(of: { readonly regionAcross: number; readonly cellsAcross: number; readonly regionWalls: number; readonly firstCellHeight: number }): number {
+  if (of.regionWalls === 0) return Number.NaN;
+  const parts = Math.min(2, of.regionWalls);
+  return geometricRatio({ first: of.firstCellHeight, length: of.regionAcross / parts, cells: of.cellsAcross / parts });
+}

@@ -24,6 +24,9 @@ export const sizes: Definition[] = [
   quantity('refinementRatio', { symbol: 'r', name: 'linear ratio of two meshes of the family', unit: '1' }, [
     way({ needs: ['meshDimension', 'coreCellsCoarse', 'coreCellsFine'], as: 'decided', value: (of) => (of.meshDimension === 2 && of.coreCellsFine >= 4 * of.coreCellsCoarse ? 2 : 1.5), formula: 'r = 2 in two directions, 1.5 in three', source: 'Celik et al., J. Fluids Eng. 130 (2008) 078001: at least 1.3' }),
   ]),
+  quantity('countMultiple', { symbol: 'k', name: 'whole number that divides the cells of every edge', unit: '1' }, [
+    way({ needs: ['refinementRatio'], value: ({ refinementRatio }) => (refinementRatio === 2 ? 4 : 6), formula: 'k = 6 for 9:6:4, k = 4 for 4:2:1', source: 'exact coarsening' }),
+  ]),
   quantity('cellCountMedium', { symbol: 'N_2', name: 'cells of the medium mesh', unit: '1' }, [
     way({ needs: ['cellCount'], value: ({ cellCount }) => cellCount, formula: 'N_2 = N', source: definition }),
   ]),

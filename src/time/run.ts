@@ -52,11 +52,12 @@ export const runLength: Definition[] = [
     way({ needs: ['length', 'speed'], value: ({ length, speed }) => (75 * length) / speed, formula: 'T_min = 75 L/U', source: practice }),
   ]),
   quantity('averagingTime', { symbol: 'T_avg', name: 'time over which is averaged', unit: 's' }, [
+    way({ needs: ['leastWindow'], when: { [run]: 'transient', regime: 'laminar' }, value: ({ leastWindow }) => leastWindow, formula: 'T_avg = T_min: a pure tone averages out over whole periods', source: practice }),
     way({ needs: ['integralTime', 'fluctuationShare', 'statisticsTolerance', 'leastWindow'], when: { [run]: 'transient' }, value: (of) => Math.max(of.leastWindow, 7.7 * of.integralTime * (of.fluctuationShare / of.statisticsTolerance) ** 2), formula: 'T_avg = max(T_min, 7.7 T_int ((s/phi)/w)^2)', source: '95 % of the mean of a correlated signal: 2 (1.96)^2 T_int (s/(w phi))^2' }),
     way({ needs: ['leastWindow'], when: { [run]: 'transient' }, value: ({ leastWindow }) => leastWindow, formula: 'T_avg = T_min', source: practice }),
   ]),
   quantity('averagingError', { symbol: 'e_s', name: 'error of the mean that the averaging leaves, 95 %', unit: '1' }, [
-    way({ needs: ['integralTime', 'fluctuationShare', 'averagingTime'], value: (of) => of.fluctuationShare * Math.sqrt((7.7 * of.integralTime) / of.averagingTime), formula: 'e_s = (s/phi) sqrt(7.7 T_int/T_avg)', source: '95 % of the mean of a correlated signal' }),
+    way({ needs: ['integralTime', 'fluctuationShare', 'averagingTime'], when: { regime: ['transitional', 'turbulent'] }, value: (of) => of.fluctuationShare * Math.sqrt((7.7 * of.integralTime) / of.averagingTime), formula: 'e_s = (s/phi) sqrt(7.7 T_int/T_avg)', source: '95 % of the mean of a correlated signal' }),
   ]),
   quantity('runTime', { symbol: 't_run', name: 'time that the run covers', unit: 's' }, [
     way({ needs: ['time.duration'], when: { [run]: ['transient', 'march'] }, value: (of) => of['time.duration'], formula: 't_run = the duration asked for', source: 'the case' }),

@@ -41,8 +41,8 @@ export const step: Definition[] = [
     courant(10, { [run]: ['steady', 'march'] }, `${practice}: pseudo-steps of 5 to 50 cells`),
     courant(0.5, { 'choice.turbulence-treatment': ['les', 'dns', 'wall-modelled-les', 'hybrid'] }, `${practice}: at most 0.5 where eddies are resolved`),
     courant(0.5, { 'has.otherFluid': 'yes' }, `${practice}: at most 0.5 where an interface is captured`),
-    courant(2, { 'choice.turbulence-treatment': 'rans' }, `${practice}: 1 to 5 for averaged turbulence`),
-    courant(1, {}, practice),
+    courant(1, explicit, `${practice}: below the limit of the explicit scheme`),
+    courant(2, {}, `${practice}: 1 to 5 with an implicit scheme`),
   ]),
   ...rates,
   quantity('timeStep', { symbol: 'dt', name: 'time step', unit: 's' }, [
