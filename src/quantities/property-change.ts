@@ -49,21 +49,21 @@ function passageFactors(): Definition[] {
   const [mu, t] = ['viscosityBulkOverWall', 'temperatureBulkOverWall'];
   return [
     ...factor('viscosityFactorNusselt', { symbol: 'F_mu,Nu', name: 'Nusselt number with properties that vary to the wall over that without' }, [
-      ...regimes('liquid', mu as string, liquidNusseltFactor, {
+      ...regimes('liquid', mu, liquidNusseltFactor, {
         laminar: { formula: 'F = (mu_b/mu_w)^0.14', source: siederTate, range: [0.0044, 9.75], scatter: 0.03 },
         turbulent: { formula: 'F = (mu_b/mu_w)^0.11 heated, ^0.25 cooled', source: petukhov, range: [0.025, 12.5], scatter: 0.05 },
       }),
-      ...regimes('gas', t as string, gasNusseltFactor, {
+      ...regimes('gas', t, gasNusseltFactor, {
         laminar: { formula: 'F = 1', source: kays, range: [0.5, 2], scatter: 0.05 },
         turbulent: { formula: 'F = (T_b/T_w)^0.45 heated, 1 cooled', source: 'Gnielinski, Int. Chem. Eng. 16 (1976) 359', range: [0.5, 2], scatter: 0.05 },
       }),
     ]),
     ...factor('viscosityFactorFriction', { symbol: 'F_mu,f', name: 'friction with properties that vary to the wall over that without' }, [
-      ...regimes('liquid', mu as string, liquidFrictionFactor, {
+      ...regimes('liquid', mu, liquidFrictionFactor, {
         laminar: { formula: 'F = (mu_w/mu_b)^0.55', source: exponential, range: [0.2, 5], scatter: 0.03 },
         turbulent: { formula: 'F = (7 - mu_b/mu_w)/6 heated, (mu_w/mu_b)^0.24 cooled', source: petukhov, range: [0.5, 2.86], scatter: 0.05 },
       }),
-      ...regimes('gas', t as string, gasFrictionFactor, {
+      ...regimes('gas', t, gasFrictionFactor, {
         laminar: { formula: 'F = T_w/T_b heated, (T_w/T_b)^0.81 cooled', source: kays, range: [0.33, 2], scatter: 0.1 },
         turbulent: { formula: 'F = (T_w/T_b)^-0.1', source: kays, range: [0.33, 2], scatter: 0.1 },
       }),
