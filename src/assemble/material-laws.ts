@@ -28,8 +28,8 @@ export function fluidLaws(material: Material, state: State): MaterialLaws {
     if (law === undefined) return;
     const here = propertyIn(material, property, taken);
     if (here === undefined) return;
-    const uncertainty = (T: number, p: number): number => propertyIn(material, property, { ...taken, sample: { ...taken.sample, T, p } })?.uncertainty ?? here.uncertainty;
-    laws[id] = Object.assign(at((T, p) => law(T, p)), { uncertainty });
+    // One uncertainty for all states of a material and property, that of the state which settles its phase.
+    laws[id] = Object.assign(at((T, p) => law(T, p)), { uncertainty: () => here.uncertainty });
     const { temperature, pressure } = here.range;
     about[id] = { formula: `${symbol}(T, p) of ${material.name}, ${here.phase}`, source: here.source, ...(temperature === undefined ? {} : { temperature }), ...(pressure === undefined ? {} : { pressure }) };
   };
@@ -67,7 +67,7 @@ export function solidLaw(material: Material, property: PropertyId): { law: Law; 
   if (law === undefined) return undefined;
   const { temperature } = here.range;
   return {
-    law: Object.assign((T: number) => law(T, 101325), { uncertainty: (T: number) => at(T)?.uncertainty ?? here.uncertainty }),
+    law: Object.assign((T: number) => law(T, 101325), { uncertainty: () => here.uncertainty }),
     about: { formula: `of ${material.name}`, source: here.source, ...(temperature === undefined ? {} : { temperature }) },
   };
 }

@@ -53,7 +53,6 @@ export function bindTargets(on: Case, workings: Workings, walls: readonly string
   const ids = [...workings.index.keys()].filter((id) => !/[.@]/.test(id));
   return on.targets.map((t) => {
     const id = triesOf(t, walls).find((one) => workings.has(one));
-    const near = nearestName(t.quantity, ids);
     return {
       id: t.path,
       quantity: id ?? t.quantity,
@@ -61,7 +60,7 @@ export function bindTargets(on: Case, workings: Workings, walls: readonly string
       ...(t.mean === undefined ? {} : { mean: t.mean }),
       ...(t.within === undefined ? {} : { within: t.within }),
       computed: id !== undefined && workings.get(id) !== undefined,
-      ...(id === undefined ? { nearest: near === undefined ? alike(t.quantity, ids) : [near] } : {}),
+      ...(id === undefined ? { nearest: nearIds(t.quantity, ids) } : {}),
     };
   });
 }
@@ -90,6 +89,12 @@ export function estimated(on: Case, definitions: readonly Definition[], walls: r
     }
     return [];
   });
+}
+
+/** The id that was misspelt, else those alike. */
+function nearIds(text: string, ids: readonly string[]): readonly string[] {
+  const near = nearestName(text, ids);
+  return near === undefined ? alike(text, ids) : [near];
 }
 
 /** Ids that share a word with what was written. */

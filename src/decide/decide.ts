@@ -41,6 +41,8 @@ export interface Decisions {
 export interface DecideOptions extends SettleOptions {
   /** Inputs whose flip values are sought, with the interval to look in. */
   readonly inputs?: readonly FlipInput[] | undefined;
+  /** The decisions as `settle` left them at this point, with the same options; settled here unless given. */
+  readonly settled?: State | undefined;
 }
 
 /**
@@ -55,7 +57,7 @@ export interface DecideOptions extends SettleOptions {
  */
 export async function decide(workings: Workings, rules: CompiledRules, targets: readonly Target[], options: DecideOptions = {}): Promise<Decisions> {
   const flipsAt = options.inputs === undefined ? undefined : flips(workings, rules, targets, options.inputs, options);
-  const state = settle(workings, rules, targets, options);
+  const state = options.settled !== undefined && flipsAt === undefined ? options.settled : settle(workings, rules, targets, options);
   const nominal = await engineVerdicts(state);
   for (const [id, effect] of state.effects) agree(id, effect, nominal.get(id));
   return {

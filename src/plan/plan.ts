@@ -2,12 +2,12 @@ import { createHash } from 'node:crypto';
 import { basename } from 'node:path';
 import { assemble, type Assembled } from '../assemble/index.ts';
 import type { Case } from '../case/index.ts';
-import { decide, definitionsOfVerdicts, settle, type CompiledRules, type Decisions, type FlipInput, type Target } from '../decide/index.ts';
+import { decide, definitionsOfVerdicts, settle, type CompiledRules, type DecideOptions, type Decisions, type FlipInput, type State, type Target } from '../decide/index.ts';
 import { ladderOf } from '../ladder/index.ts';
 import type { Collection } from '../properties/index.ts';
 import { flagsIn, spreads, type Settle, type Spread, type Workings } from '../workings/index.ts';
 import { contradictionsOf } from './contradictions.ts';
-import type { Ground, StageResult } from './ground.ts';
+import { idsIn, type Ground, type StageResult } from './ground.ts';
 import { closure, planQuantity, rangesOf } from './numbers.ts';
 import { shippedRules } from './rules.ts';
 import { stages } from './stages/index.ts';
@@ -26,12 +26,14 @@ export interface Settled {
   readonly assembled: Assembled;
   readonly rules: CompiledRules;
   readonly targets: readonly Target[];
-  /** Settles verdicts and choices again after an input moved. */
+  readonly state: State;
+  readonly decideOptions: DecideOptions;
+  /** Settles verdicts and choices at the point where the graph stands, spread and range left aside. */
   readonly settle: Settle;
 }
 
 /**
- * Assembles a case and settles its decisions by the synchronous reading of the rules.
+ * Assembles a case and settles its decisions by the synchronous reading of the rules, spread and operating range counted.
  *
  * @param on       the case
  * @param options  rules and materials
@@ -41,10 +43,21 @@ export interface Settled {
 export function settleCase(on: Case, options: Omit<PlanOptions, 'version' | 'flips'> = {}): Settled {
   const rules = options.rules ?? shippedRules();
   const assembled = assemble(on, { words: definitionsOfVerdicts(rules), ...(options.materials === undefined ? {} : { materials: options.materials }) });
+  const { workings, askable, chosen } = assembled;
   const targets: Target[] = assembled.targets.map((t) => ({ id: t.id, quantity: t.quantity, within: t.within, computed: t.computed }));
-  const again: Settle = (workings) => void settle(workings, rules, targets, { askable: assembled.askable, chosen: assembled.chosen });
-  again(assembled.workings);
-  return { assembled, rules, targets, settle: again };
+  const again: Settle = (at) => void settle(at, rules, targets, { askable, chosen });
+  // The numbers that decide need no price and no target.
+  settle(workings, rules, [], { askable, chosen });
+  const deciding = decidingIds(rules, workings);
+  const spread = spreads(workings, deciding);
+  const range = rangesOf(workings, assembled.ranges, deciding, (at) => void settle(at, rules, [], { askable, chosen }));
+  const decideOptions: DecideOptions = {
+    askable,
+    chosen,
+    spreadOf: (id) => spread.get(id),
+    rangeOf: (id) => { const r = range.get(id); return r === undefined ? undefined : { low: r.from, high: r.to }; },
+  };
+  return { assembled, rules, targets, decideOptions, state: settle(workings, rules, targets, decideOptions), settle: again };
 }
 
 /**
@@ -56,30 +69,23 @@ export function settleCase(on: Case, options: Omit<PlanOptions, 'version' | 'fli
  * @throws         {Problem} what cannot be planned, at the place of the value
  */
 export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
-  const { assembled, rules, targets, settle: again } = settleCase(on, options);
+  const { assembled, rules, targets, state, decideOptions, settle: again } = settleCase(on, options);
   const { workings, ranges } = assembled;
-  const deciding = decidingIds(rules, workings);
-  const spread = spreads(workings, deciding);
-  const range = rangesOf(workings, ranges, deciding, again);
-  const decisions = await decide(workings, rules, targets, {
-    askable: assembled.askable,
-    chosen: assembled.chosen,
-    spreadOf: (id) => spread.get(id),
-    rangeOf: (id) => { const r = range.get(id); return r === undefined ? undefined : { low: r.from, high: r.to }; },
-    ...(options.flips === true ? { inputs: flipInputs(assembled) } : {}),
-  });
+  const decisions = await decide(workings, rules, targets, { ...decideOptions, settled: state, ...(options.flips === true ? { inputs: flipInputs(assembled) } : {}) });
   const ladder = ladderOf(assembled);
   const ground = groundOf(assembled, decisions, ladder);
   const built = Object.fromEntries(sectionNames.map((name) => [name, stages[name](ground)])) as Record<SectionName, StageResult>;
   const contradictions = contradictionsOf(ground);
-  const named = namedIds(built, decisions, assembled, ladder);
-  const ids = closure(workings, named);
+  const ids = closure(workings, namedIds(built, decisions, assembled, ladder));
+  const spread = spreads(workings, ids);
+  const range = rangesOf(workings, ranges, ids, again);
+  if (ranges.length > 0) settle(workings, rules, targets, decideOptions);
   return {
     program: `runbrief ${options.version}`,
     format: 1,
     case: { file: basename(on.file), title: on.title ?? '', sha256: createHash('sha256').update(on.text).digest('hex') },
     targets: assembled.targets.map(planTarget),
-    quantities: quantitiesOf(workings, ids, spreads(workings, ids), rangesOf(workings, ranges, ids, again)),
+    quantities: quantitiesOf(workings, ids, spread, range),
     effects: decisions.effects as readonly PlanEffect[],
     choices: decisions.choices as readonly PlanChoice[],
     ladder,
@@ -127,9 +133,10 @@ export function groundOf(assembled: Assembled, decisions: Decisions, ladder: Pla
 /** Every id that stands in the plan. */
 function namedIds(built: Readonly<Record<SectionName, StageResult>>, decisions: Decisions, assembled: Assembled, ladder: Plan['ladder']): Set<string> {
   const ids = new Set<string>();
-  for (const { lines, tables } of Object.values(built)) {
+  for (const { lines, tables, checklist } of Object.values(built)) {
     for (const l of lines) for (const id of l.quantities) ids.add(id);
-    for (const t of tables) for (const row of t.rows) for (const cell of row) if (typeof cell !== 'string') ids.add(cell.id);
+    for (const c of checklist ?? []) for (const id of idsIn(`${c.text} ${c.limit ?? ''} ${c.where ?? ''}`)) ids.add(id);
+    for (const t of tables) for (const row of t.rows) for (const cell of row) for (const id of typeof cell === 'string' ? idsIn(cell) : [cell.id]) ids.add(id);
   }
   for (const e of decisions.effects) {
     if (e.deciding !== undefined) ids.add(e.deciding.quantity);

@@ -21,13 +21,13 @@ export const unsteady: Definition[] = [
   ]),
   quantity('imposedTime', { symbol: 't_p', name: 'time of what is imposed: period, ramp or duration', unit: 's' }, ['time.period', 'time.ramp', 'time.duration'].map((path) => way({ needs: [path], value: (of) => of[path] as number, formula: path, source: 'the case' }))),
   quantity('womersleyImposed', { symbol: 'Wo', name: 'Womersley number of what is imposed', unit: '1' }, [
-    way({ needs: ['hydraulicDiameter', 'angularFrequency', 'kinematicViscosity'], when: { flowClass: 'internal' }, value: ({ hydraulicDiameter, angularFrequency, kinematicViscosity }) => (hydraulicDiameter / 2) * Math.sqrt(angularFrequency / kinematicViscosity), formula: 'Wo = (D_h/2) sqrt(omega/nu)', source: 'Womersley 1955', dimensional: 'radians count as one' }),
+    way({ needs: ['hydraulicDiameter', 'angularFrequency', 'kinematicViscosity'], when: { flowClass: 'internal' }, value: ({ hydraulicDiameter, angularFrequency, kinematicViscosity }) => (hydraulicDiameter / 2) * Math.sqrt(angularFrequency / kinematicViscosity), formula: 'Wo = (D_h/2) sqrt(omega/nu)', source: 'Womersley 1955' }),
   ]),
   quantity('imposedRateTurbulent', { symbol: 'omega R/u_tau', name: 'imposed change against the turbulent time of the passage', unit: '1' }, [
-    way({ needs: ['angularFrequency', 'hydraulicDiameter', 'frictionVelocityPlain'], when: { flowClass: 'internal' }, value: ({ angularFrequency, hydraulicDiameter, frictionVelocityPlain }) => (angularFrequency * hydraulicDiameter) / (2 * frictionVelocityPlain), formula: 'omega (D_h/2)/u_tau', source: practice, dimensional: 'radians count as one' }),
+    way({ needs: ['angularFrequency', 'hydraulicDiameter', 'frictionVelocityPlain'], when: { flowClass: 'internal' }, value: ({ angularFrequency, hydraulicDiameter, frictionVelocityPlain }) => (angularFrequency * hydraulicDiameter) / (2 * frictionVelocityPlain), formula: 'omega (D_h/2)/u_tau', source: practice }),
   ]),
   quantity('imposedRateBody', { symbol: 'omega L/U', name: 'imposed change against the passage of the stream', unit: '1' }, [
-    way({ needs: ['angularFrequency', 'length', 'speed'], value: ({ angularFrequency, length, speed }) => (angularFrequency * length) / speed, formula: 'omega L/U', source: practice, dimensional: 'radians count as one' }),
+    way({ needs: ['angularFrequency', 'length', 'speed'], value: ({ angularFrequency, length, speed }) => (angularFrequency * length) / speed, formula: 'omega L/U', source: practice }),
   ]),
   quantity('fourierImposed', { symbol: 'Fo_p', name: 'Fourier number of what is imposed', unit: '1' }, [
     way({ needs: ['thermalDiffusivity', 'imposedTime', 'gap'], value: ({ thermalDiffusivity, imposedTime, gap }) => (thermalDiffusivity * imposedTime) / (gap / 2) ** 2, formula: 'Fo_p = alpha t_p/(H/2)^2', source: 'definition' }),

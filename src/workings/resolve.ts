@@ -191,35 +191,48 @@ export class Workings {
     for (const i of this.#acts[source] ?? []) this.#forget(i);
   }
 
-  /** The sources of spread that act on quantities as they were got: inputs, scatter and property laws on their way. */
-  activeSources(slots: readonly number[]): number[] {
-    const seen = new Set<number>();
-    const found = new Set<number>();
-    const visit = (i: number): void => {
-      if (seen.has(i) || !this.#of(i)) return;
-      seen.add(i);
-      if (this.#pinned[i] === 1 && (this.#inputSource[i] as number) >= 0) found.add(this.#inputSource[i] as number);
-      const b = this.#pinned[i] === 1 ? undefined : this.used[i];
-      if (b === undefined) return;
-      if (b.source >= 0) found.add(b.source);
-      for (const law of b.way.laws ?? []) found.add(this.#lawSource.get(law) as number);
-      for (const w of b.when) visit(w.slot);
-      for (const n of b.needs) visit(n);
-      if (b.closes >= 0) visit(b.closes);
-    };
-    for (const i of slots) visit(i);
-    return [...found].sort((a, b) => a - b);
+  /** Counts changes of the point: what was read off an earlier one no longer holds. */
+  version = 0;
+
+  /** Source of spread of an input, or -1. */
+  inputSource(i: number): number { return this.#inputSource[i] as number; }
+
+  /** The way a quantity was got by, tried with one need at another value; nothing else moves. */
+  tryWay(i: number, need: number, value: number): number {
+    const b = this.used[i] as Bound;
+    this.#fill(b);
+    b.of[b.way.needs[need] as string] = value;
+    return b.way.value?.(b.of, b.laws) ?? Number.NaN;
   }
 
-  /** The slots a source of spread acts on, and all that follows from them. */
-  reach(source: number): Set<number> {
-    const out = new Set<number>();
-    for (const i of this.#acts[source] ?? []) for (const f of this.followers(i)) out.add(f);
-    return out;
+  /** The same with each property law moved by its half-width: source and value. */
+  tryLaws(i: number): (readonly [number, number])[] {
+    const b = this.used[i] as Bound;
+    return (b.way.laws ?? []).map((law) => {
+      const source = this.#lawSource.get(law) as number;
+      this.#fill(b);
+      this.#shift[source] = 1;
+      const value = b.way.value?.(b.of, b.laws) ?? Number.NaN;
+      this.#shift[source] = 0;
+      return [source, value] as const;
+    });
+  }
+
+  /** Half-width of the logarithm that the scatter of a quantity's way gives it; doubled outside its range. */
+  scatterOf(i: number): number {
+    const b = this.used[i];
+    if (b === undefined || b.source < 0) return 0;
+    this.#fill(b);
+    return (typeof b.way.scatter === 'function' ? b.way.scatter(b.of) : (b.way.scatter ?? 0)) * (this.#outside(b) > 0 ? 2 : 1);
+  }
+
+  #fill(b: Bound): void {
+    for (let k = 0; k < b.needs.length; k++) b.of[b.way.needs[k] as string] = this.#value[b.needs[k] as number] as number;
   }
 
   /** A quantity and all that follows from it are asked again. */
   #forget(i: number): void {
+    this.version++;
     for (const f of this.followers(i)) {
       this.#stamp[f] = 0;
       this.failures.delete(f);
@@ -345,7 +358,7 @@ export class Workings {
   }
 
   #take(i: number, slot: Slot, b: Bound, widen: number): boolean {
-    for (let k = 0; k < b.needs.length; k++) b.of[b.way.needs[k] as string] = this.#value[b.needs[k] as number] as number;
+    this.#fill(b);
     if (slot.isWord) {
       // The plain id of a word that exists once a place repeats the word of its place.
       this.#word[i] = b.way.word === undefined && b.needs.length === 1 ? this.#word[b.needs[0] as number] : b.way.word?.(b.of);

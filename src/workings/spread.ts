@@ -1,4 +1,5 @@
-import type { Source, Workings } from './resolve.ts';
+import { adds, Linear } from './linear.ts';
+import type { Bound, Slot, Workings } from './resolve.ts';
 
 /** Spread of one number: 95 % bounds, and what share each source has of its square, largest first. */
 export interface Spread {
@@ -22,58 +23,73 @@ const samples = 96;
 export function spreads(workings: Workings, ids: readonly string[]): Map<string, Spread> {
   const rows = ids.flatMap((id) => {
     const i = workings.index.get(id);
-    if (i === undefined || !workings.known(i)) return [];
-    const { node, isWord } = workings.slots[i] as Workings['slots'][number];
-    return isWord ? [] : [{ id, i, value: workings.value(i), adds: node.about.signed === true || node.about.unit === 'K', parts: [] as { source: number; d: number }[], jumps: false }];
+    return i === undefined || !workings.known(i) || (workings.slots[i] as Slot).isWord ? [] : [{ id, i }];
   });
-  const words = computedWords(workings);
-  const before = words.map((w) => workings.wordAt(w));
-  const active = workings.activeSources(rows.map((r) => r.i));
-  active.forEach((s) => {
-    const source = workings.sources[s] as Source;
-    const reach = workings.reach(s);
-    const hit = rows.filter((r) => reach.has(r.i));
-    if (hit.length === 0) return;
-    const changed = new Set<number>();
-    const at = (by: number): (number | undefined)[] => {
-      workings.shift(s, by);
-      const values = hit.map((r) => (workings.known(r.i) ? workings.value(r.i) : undefined));
-      words.forEach((w, k) => { if (reach.has(w) && (!workings.known(w) || workings.wordAt(w) !== before[k])) changed.add(w); });
-      return values;
-    };
-    const up = at(1);
-    const down = source.kind === 'input' || changed.size > 0 ? at(-1) : undefined;
-    workings.shift(s, 0);
-    const jumped = new Set<number>();
-    for (const w of changed) for (const f of workings.followers(w)) jumped.add(f);
-    hit.forEach((r, k) => {
-      const u = up[k];
-      const l = down === undefined ? undefined : down[k];
-      if (jumped.has(r.i)) r.jumps = true;
-      if (u === undefined) return;
-      const d = r.adds || r.value <= 0 || u <= 0 || (l !== undefined && l <= 0) ? (l === undefined ? u - r.value : (u - l) / 2) : l === undefined ? Math.log(u / r.value) : Math.log(u / l) / 2;
-      if (d !== 0) r.parts.push({ source: s, d });
-    });
-  });
+  const linear = linearOf(workings);
+  const jumps = jumpedWords(workings, linear, rows.map((r) => r.i));
+  const sampled = rows.filter((r) => jumps.has(r.i));
+  const percentiles = sampled.length === 0 ? new Map<number, [number, number]>() : sample(workings, sampled.map((r) => r.i), activeSources(linear, sampled.map((r) => r.i)));
   const out = new Map<string, Spread>();
-  const sampled = rows.filter((r) => r.jumps);
-  const percentiles = sampled.length === 0 ? new Map<number, [number, number]>() : sample(workings, sampled.map((r) => r.i), active);
-  for (const r of rows) {
-    const square = r.parts.reduce((s, p) => s + p.d * p.d, 0);
-    if (square === 0 && !r.jumps) continue;
+  for (const { id, i } of rows) {
+    const parts = [...linear.row(i)].flatMap((d, source) => (d === 0 ? [] : [{ source, square: d * d }]));
+    const square = parts.reduce((s, p) => s + p.square, 0);
+    const jump = percentiles.get(i);
+    if (square === 0 && jump === undefined) continue;
     const w = Math.sqrt(square);
-    const adds = r.adds || r.value <= 0;
-    const [low, high] = percentiles.get(r.i) ?? (adds ? [r.value - w, r.value + w] : [r.value * Math.exp(-w), r.value * Math.exp(w)]);
-    const shares = r.parts
-      .map((p) => ({ key: workings.sources[p.source]?.key ?? '', label: workings.sources[p.source]?.label ?? '', share: square === 0 ? 0 : (p.d * p.d) / square }))
-      .sort((a, b) => b.share - a.share);
-    out.set(r.id, { low, high, shares, how: r.jumps ? 'sampled' : 'derivatives' });
+    const value = workings.value(i);
+    const [low, high] = jump ?? (adds(workings, i) ? [value - w, value + w] : [value * Math.exp(-w), value * Math.exp(w)]);
+    const shares = parts
+      .map((p) => ({ key: workings.sources[p.source]?.key ?? '', label: workings.sources[p.source]?.label ?? '', share: square === 0 ? 0 : p.square / square }))
+      .sort((x, y) => y.share - x.share);
+    out.set(id, { low, high, shares, how: jump === undefined ? 'derivatives' : 'sampled' });
   }
   return out;
 }
 
-function computedWords(workings: Workings): number[] {
-  return workings.slots.flatMap((slot, i) => (slot.isWord && !workings.isPinned(i) && workings.known(i) ? [i] : []));
+const kept = new WeakMap<Workings, { version: number; linear: Linear }>();
+
+/** The derivatives at the point where the graph stands, kept until it moves. */
+function linearOf(workings: Workings): Linear {
+  const had = kept.get(workings);
+  if (had !== undefined && had.version === workings.version) return had.linear;
+  const linear = new Linear(workings);
+  kept.set(workings, { version: workings.version, linear });
+  return linear;
+}
+
+/** Sources that move any of the quantities. */
+function activeSources(linear: Linear, slots: readonly number[]): number[] {
+  const found = new Set<number>();
+  for (const i of slots) linear.row(i).forEach((d, s) => { if (d !== 0) found.add(s); });
+  return [...found].sort((a, b) => a - b);
+}
+
+/** Quantities on whose way a word changes within the half-width of one source. */
+function jumpedWords(workings: Workings, linear: Linear, wanted: readonly number[]): Set<number> {
+  const seen = new Set<number>();
+  const words: number[] = [];
+  const visit = (i: number): void => {
+    if (seen.has(i) || !workings.known(i)) return;
+    seen.add(i);
+    const b = workings.isPinned(i) ? undefined : workings.used[i];
+    if (b === undefined) return;
+    if ((workings.slots[i] as Slot).isWord) words.push(i);
+    for (const w of b.when) visit(w.slot);
+    for (const n of b.needs) visit(n);
+    if (b.closes >= 0) visit(b.closes);
+  };
+  for (const i of wanted) visit(i);
+  const out = new Set<number>();
+  for (const i of words) {
+    const b = workings.used[i] as Bound;
+    const numbers = [...b.needs].filter((n) => !(workings.slots[n] as Slot).isWord);
+    const changes = activeSources(linear, numbers).some((s) => [1, -1].some((by) => {
+      const of = Object.fromEntries(b.way.needs.map((name, k) => [name, linear.moved(b.needs[k] as number, s, by)]));
+      return b.way.word?.(of) !== workings.wordAt(i);
+    }));
+    if (changes) for (const f of workings.followers(i)) out.add(f);
+  }
+  return out;
 }
 
 /** 2.5 and 97.5 % points over all sources at once: Halton points through the normal quantile, half-width = 1.96 sigma. */
