@@ -39,19 +39,8 @@ function stateOf(workings: Workings): string {
 
 /** 1 where inputs that can be asked for would make the quantity known, and what is given does not. */
 function reachable(workings: Workings, canAsk: Askable): Uint8Array {
-  const given = Uint8Array.from(workings.slots, (_, i) => (workings.isPinned(i) ? 1 : 0));
-  const asked = Uint8Array.from(workings.slots, (slot, i) => (given[i] === 1 || (slot.ways.length === 0 && canAsk(slot.id)) ? 1 : 0));
-  const open = workings.slots.map((slot) => slot.ways.filter((b) => b.when.every((w) => !workings.known(w.slot) || w.words.includes(workings.wordAt(w.slot) as string))));
-  for (const can of [given, asked]) {
-    for (let more = true; more; ) {
-      more = false;
-      open.forEach((ways, i) => {
-        if (can[i] === 0 && ways.some((b) => b.needs.every((n) => can[n] === 1) && b.when.every((w) => can[w.slot] === 1))) {
-          can[i] = 1;
-          more = true;
-        }
-      });
-    }
-  }
+  const open = (b: Workings['slots'][number]['ways'][number]): boolean => b.when.every((w) => !workings.known(w.slot) || w.words.includes(workings.wordAt(w.slot) as string));
+  const given = workings.reachable(undefined, open);
+  const asked = workings.reachable((slot) => slot.ways.length === 0 && canAsk(slot.id), open);
   return asked.map((can, i) => (can === 1 && given[i] === 0 ? 1 : 0));
 }

@@ -2,6 +2,8 @@ import type { Slot, Workings } from './resolve.ts';
 
 const small = 1e-5;
 const mostLoops = 24;
+/** Above this slope in logarithms a step of 1e-5 has crossed a stair (a count rounded up), not followed a law. */
+const steepest = 50;
 
 /** Whether a slot spreads by plus and minus: temperatures, what can change sign, zero and below. */
 export function adds(workings: Workings, i: number): boolean {
@@ -11,7 +13,8 @@ export function adds(workings: Workings, i: number): boolean {
 
 /**
  * First derivatives of quantities with respect to every source of spread, each source in units of its 95 % half-width. A quantity that multiplies
- * is followed in its logarithm, one that adds in its value; loops are closed by solving their linear system.
+ * is followed in its logarithm, one that adds in its value; loops are closed by solving their linear system. Where a small step sees a stair, the
+ * secant over the half-width of the need counts.
  */
 export class Linear {
   readonly #workings: Workings;
@@ -71,8 +74,12 @@ export class Linear {
       if (from.every((d) => d === 0)) return;
       const v = w.value(n);
       const plus = adds(w, n);
+      const over = (h: number): number => slope(w.tryWay(i, k, plus ? v + h : v * Math.exp(h)), w.tryWay(i, k, plus ? v - h : v * Math.exp(-h)), 2 * h);
       const h = plus ? small * Math.max(Math.abs(v), 1e-3) : small;
-      add(row, slope(w.tryWay(i, k, plus ? v + h : v * (1 + h)), w.tryWay(i, k, plus ? v - h : v * (1 - h)), 2 * h), from);
+      const near = over(h);
+      const wide = Math.hypot(...from.subarray(0, this.#columns));
+      const stair = near === 0 || (!mine && !plus && Math.abs(near) > steepest);
+      add(row, stair && wide > h ? over(wide) : near, from);
     });
     const half = w.scatterOf(i);
     if (half !== 0) (row[bound.source] as number) += mine ? x * half : Math.log(1 + half);

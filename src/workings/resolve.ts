@@ -70,6 +70,8 @@ export class Workings {
   #shifted = 0;
   #knowable: Uint8Array | undefined;
   readonly #lawSource = new Map<string, number>();
+  /** Slope of closes(x) - x where each loop was last closed. */
+  readonly #slopes = new Map<number, number>();
   /** For a quantity pinned since: what could be known without the pin. */
   readonly #knewWithout = new Map<number, Uint8Array>();
 
@@ -263,17 +265,39 @@ export class Workings {
     return back.map((s) => Int32Array.from(s));
   }
 
-  /** What can be known at all, whatever the numbers: a fixpoint, so that loops hide nothing and nothing is asked in vain. */
-  #canKnow(): Uint8Array {
+  /**
+   * What can be known at all, whatever the numbers: a fixpoint, so that loops hide nothing and nothing is asked in vain.
+   *
+   * @param more  further quantities taken as known, such as inputs that could be asked for
+   * @param open  whether a way counts; all unless given
+   * @returns     1 for each slot that some chain of ways reaches
+   */
+  reachable(more: (slot: Slot, i: number) => boolean = () => false, open: (way: Bound) => boolean = () => true): Uint8Array {
     const can = Uint8Array.from(this.#pinned);
-    for (let more = true; more; ) {
-      more = false;
-      this.slots.forEach((slot, i) => {
-        if (can[i] === 0 && slot.ways.some((b) => b.needs.every((n) => can[n] === 1) && b.when.every((w) => can[w.slot] === 1))) {
-          can[i] = 1;
-          more = true;
-        }
-      });
+    this.slots.forEach((slot, i) => { if (can[i] === 0 && more(slot, i)) can[i] = 1; });
+    // Each way waits for the parts it still lacks; the last part to come makes its slot known.
+    const lacks: number[] = [];
+    const slotOf: number[] = [];
+    const waiting: (number[] | undefined)[] = [];
+    const found: number[] = [];
+    this.slots.forEach((slot, i) => {
+      if (can[i] === 1) return;
+      for (const b of slot.ways) {
+        if (can[i] === 1 || !open(b)) continue;
+        const way = slotOf.push(i) - 1;
+        let n = 0;
+        for (const need of b.needs) if (can[need] === 0) { n++; (waiting[need] ??= []).push(way); }
+        for (const w of b.when) if (can[w.slot] === 0) { n++; (waiting[w.slot] ??= []).push(way); }
+        lacks.push(n);
+        if (n === 0) { can[i] = 1; found.push(i); }
+      }
+    });
+    for (let i = found.pop(); i !== undefined; i = found.pop()) {
+      for (const way of waiting[i] ?? []) {
+        lacks[way] = (lacks[way] as number) - 1;
+        const slot = slotOf[way] as number;
+        if (lacks[way] === 0 && can[slot] === 0) { can[slot] = 1; found.push(slot); }
+      }
     }
     return can;
   }
@@ -285,7 +309,7 @@ export class Workings {
     if (stamp === -this.#round || stamp === this.#round + 1) return false;
     const slot = this.slots[i] as Slot;
     if (this.#pinned[i] === 1) return this.#takeGiven(i, slot);
-    this.#knowable ??= this.#canKnow();
+    this.#knowable ??= this.reachable();
     if (this.#knowable[i] === 0) return false;
     this.#stamp[i] = this.#round + 1;
     let nearest: Bound | undefined;
@@ -421,11 +445,15 @@ export class Workings {
     let r0 = trial(x0) - x0;
     if (Number.isNaN(r0)) return undefined;
     if (Math.abs(r0) <= within * Math.abs(x0)) return this.#closedAt(i, x0, 1, r0);
-    let x = x0 + r0;
+    // The slope of the last time serves until a new one is known.
+    const known = this.#slopes.get(i);
+    let x = x0 + (known === undefined ? r0 : -r0 / known);
     for (let passes = 2; passes <= mostPasses && Number.isFinite(x); passes++) {
       const r = trial(x) - x;
       if (Math.abs(r) <= within * Math.abs(x)) return this.#closedAt(i, x, passes, r);
-      const step = (-r * (x - x0)) / (r - r0);
+      const slope = (r - r0) / (x - x0);
+      const step = -r / slope;
+      if (Number.isFinite(step) && step !== 0) this.#slopes.set(i, slope);
       [x0, r0] = [x, r];
       x += Number.isFinite(step) && Math.abs(step) <= 5 * Math.abs(r) ? step : r;
     }
