@@ -92,6 +92,7 @@ export function materialWays(about: Readonly<Record<string, PropertyAbout>>): De
   return [
     ...propertyStates.flatMap(({ suffix, temperature }) => lawProperties.flatMap(({ id }) => one(`${id}${suffix}`, id, temperature, 'pressure'))),
     ...singleProperties.flatMap((p) => one(p.id, p.id, 'temperature' in p ? p.temperature : 'referenceTemperature', 'pressure' in p ? p.pressure : 'pressure')),
+    ...one('ambientSaturation', 'saturationTemperature', 'referenceTemperature', 'ambientPressure'),
   ];
 }
 

@@ -1,7 +1,40 @@
 import type { Stage } from '../ground.ts';
-import { sectionNames, type SectionName } from '../types.ts';
+import type { SectionName } from '../types.ts';
+import { boundaries } from './boundaries.ts';
+import { cautions } from './cautions.ts';
+import { cost } from './cost.ts';
+import { coupling } from './coupling.ts';
+import { documentation } from './documentation.ts';
+import { domain } from './domain.ts';
+import { mesh } from './mesh.ts';
+import { numerics } from './numerics.ts';
+import { physics } from './physics.ts';
+import { properties } from './properties.ts';
+import { question } from './question.ts';
+import { time } from './time.ts';
+import { turbulence } from './turbulence.ts';
+import { verification } from './verification.ts';
+import { ladder } from './ladder.ts';
 
 const empty: Stage = () => ({ lines: [], tables: [] });
 
 /** The stages of the plan by the section they write. */
-export const stages: Readonly<Record<SectionName, Stage>> = Object.fromEntries(sectionNames.map((n) => [n, empty])) as Record<SectionName, Stage>;
+export const stages: Readonly<Record<SectionName, Stage>> = {
+  question,
+  physics,
+  properties,
+  domain,
+  boundaries,
+  turbulence,
+  mesh,
+  time,
+  numerics,
+  coupling,
+  cost,
+  verification,
+  ladder,
+  watch: empty,
+  afterRun: empty,
+  documentation,
+  cautions,
+};

@@ -1,0 +1,45 @@
+import type { Assembled } from '../assemble/index.ts';
+
+/** Words that mark a substance, a use or a place as one that can hurt. Whole words, any case. */
+export const marks = {
+  hydrogen: ['hydrogen', 'h2', 'syngas'],
+  flammable: ['methane', 'natural gas', 'propane', 'butane', 'ethane', 'ethylene', 'acetylene', 'ethanol', 'methanol', 'acetone', 'toluene', 'benzene', 'hexane', 'petrol', 'gasoline', 'diesel', 'kerosene', 'fuel', 'ammonia', 'carbon monoxide', 'lpg', 'lng'],
+  oil: ['light oil', 'engine oil', 'heat-transfer oil', 'thermal oil', 'mineral oil', 'lubricating oil'],
+  dust: ['coal dust', 'flour', 'wood dust', 'sugar dust', 'starch', 'aluminium powder', 'metal powder'],
+  toxic: ['carbon monoxide', 'co', 'ammonia', 'nh3', 'chlorine', 'hydrogen sulphide', 'hydrogen sulfide', 'h2s', 'sulphur dioxide', 'so2', 'nitrogen dioxide', 'no2', 'phosgene', 'hydrogen fluoride', 'hydrogen chloride', 'formaldehyde', 'benzene', 'mercury', 'lead', 'lead-bismuth eutectic', 'flibe', 'beryllium', 'methanol'],
+  carbonDioxide: ['carbon dioxide', 'co2'],
+  inert: ['nitrogen', 'n2', 'argon', 'helium', 'carbon dioxide', 'co2', 'sulphur hexafluoride', 'sf6', 'xenon', 'krypton', 'neon'],
+  oxygen: ['oxygen', 'o2'],
+  liquidMetal: ['sodium', 'potassium', 'nak', 'lithium', 'lead', 'lead-bismuth eutectic', 'lead-lithium', 'gallium', 'mercury', 'tin'],
+  moltenSalt: ['solar salt', 'flibe', 'molten salt', 'nitrate salt', 'chloride salt', 'fluoride salt'],
+  medical: ['patient', 'blood', 'drug', 'implant', 'stent', 'lung', 'airway', 'medical', 'dialysis', 'inhaler', 'artery'],
+  nuclear: ['reactor core', 'nuclear', 'fuel rod', 'radioactive', 'spent fuel'],
+  hygiene: ['food', 'milk', 'drink', 'beverage', 'pasteurise', 'pasteurize', 'sterilise', 'sterilize', 'legionella', 'drinking water'],
+  vehicle: ['car', 'truck', 'aircraft', 'ship', 'hull', 'drone'],
+  release: ['chimney', 'flue gas', 'effluent', 'emission', 'exhaust plume'],
+  fire: ['fire', 'smoke', 'flame'],
+  closedValve: ['closed valve', 'blocked in', 'shut in'],
+} as const satisfies Readonly<Record<string, readonly string[]>>;
+export type Mark = keyof typeof marks;
+
+/** Where the words of a case stand. */
+export type Where = 'fluid' | 'solute' | 'text';
+
+/**
+ * Finds the first word of a mark in a case: in the fluid it flows with, in species and second fluids, in title, purpose and targets.
+ *
+ * @param assembled  the case
+ * @param mark       which list
+ * @param where      which part of the case is looked at
+ * @returns          the word as found, lower case; undefined where none stands there
+ */
+export function wordOf(assembled: Assembled, mark: Mark, where: readonly Where[]): string | undefined {
+  const text = where.flatMap((w) => textOf(assembled, w)).join(' | ').toLowerCase();
+  return marks[mark].find((word) => new RegExp(`(?<![a-z0-9])${word}(?![a-z0-9])`).test(text));
+}
+
+function textOf({ case: given, fluid }: Assembled, where: Where): string[] {
+  if (where === 'text') return [given.title ?? '', given.purpose ?? '', ...given.targets.map((t) => `${t.quantity} ${t.place ?? ''}`)];
+  if (where === 'fluid') return fluid === undefined ? [] : [fluid.id, fluid.name];
+  return [...given.list('species'), given.word('otherFluid.material') ?? '', given.word('burning.fuel') ?? '', ...given.list('fluid.composition'), ...given.list('sources').map((s) => given.word(`sources.${s}.of`) ?? ''), ...given.list('particles').map((p) => given.word(`particles.${p}.material`) ?? '')];
+}

@@ -1,0 +1,45 @@
+import { lines, type Ground, type StageResult } from '../ground.ts';
+import { hazardsOf } from '../hazards.ts';
+import { nameOf } from '../say.ts';
+import { outsideOf } from './cautions-range.ts';
+import { trapsOf } from './cautions-traps.ts';
+import type { Check, Line, Table } from '../types.ts';
+
+/** Cautions of this case alone, the worst first: what can hurt people, what can spoil the target, which laws are stretched. */
+export function cautions(on: Ground): StageResult {
+  const hazards = hazardsOf(on);
+  const traps = trapsOf(on);
+  const outside = outsideOf(on);
+  const first = [...hazards.map((h) => h.title), ...outside.map((o) => `stretched law for the ${o.name}`), ...traps.map((t) => t.title)].slice(0, 3);
+  return {
+    lines: [
+      opening(on),
+      ...lines(
+        hazards.length > 0 && 'What follows on dangers supports and never replaces qualified judgement, tests and the codes of the place; relief, structure and safety of life are decided by licensed practitioners.',
+        first.length > 0 && `First of all: ${first.join('; ')}.`,
+        ...hazards.map((h) => h.text),
+        ...outside.map((o) => o.text),
+        ...traps.map((t) => `${t.title}: ${t.text} Unmasked by: ${t.test}.`),
+      ),
+    ],
+    tables: trapTable(on),
+    checklist: [
+      ...hazards.map((h): Check => ({ id: `hazard-${h.id}`, stage: 'cautions', text: `${h.title.toLowerCase()}: a competent person has looked at it by the code of the place` })),
+      ...traps.map((t): Check => ({ id: `trap-${t.id}`, stage: 'cautions', text: t.test })),
+    ],
+  };
+}
+
+/** What the whole plan is worth, in the spread of its first target. */
+function opening(on: Ground): Line {
+  const main = on.assembled.targets.find((t) => t.computed);
+  const estimate = main === undefined ? 'none of the targets has an estimate to hold it against' : `the ${nameOf(on, main.quantity)} is put at {${main.quantity}}${on.has(`${main.id}.halfWidth`) ? `, a half-width of {${main.id}.halfWidth}` : ', without any spread because no input carries one'}`;
+  const rungs = on.ladder.length;
+  const known = rungs === 0 ? 'no known answer lies on the way to it' : rungs === 1 ? `the known answer ${on.ladder[0]?.id} is met` : `the ${rungs} known answers of its ladder are met, from ${on.ladder[0]?.id} on`;
+  return lines(`This is an estimate made before a run: ${estimate}. ${rungs === 0 ? `A simulation of it is no evidence by itself: ${known}.` : `A simulation is no evidence until ${known}.`}`)[0] as Line;
+}
+
+function trapTable(on: Ground): Table[] {
+  const traps = trapsOf(on);
+  return traps.length === 0 ? [] : [{ title: 'How this run could look right and be wrong', columns: ['what', 'moves the target by', 'test'], rows: traps.map((t) => [t.title, t.bias === undefined ? 'see text' : typeof t.bias === 'string' ? t.bias : { id: t.bias.id }, t.test]) }];
+}

@@ -1,0 +1,75 @@
+import { readFileSync } from 'node:fs';
+import { describe, expect, it } from 'vitest';
+import { linesOf, planOf, unknownIds } from './harness.ts';
+
+const line = (more: { fluid?: string; inlet?: string; wall?: string; title?: string; sizes?: string } = {}): string => `
+format: 1
+title: ${more.title ?? 'A straight line'}
+purpose: What pressure drop does the line take?
+targets: [{ quantity: pressureDrop, place: inlet to outlet, mean: area, within: 20 % }]
+flow: pipe
+sizes: ${more.sizes ?? '{ diameter: 50 mm, length: 6 m }'}
+inclination: horizontal
+fluid: ${more.fluid ?? '{ material: water, pressure: 1.2 bar abs }'}
+inlet: ${more.inlet ?? '{ speed: 0.5 m/s, temperature: 20 degC, profile: developed }'}
+${more.wall === undefined ? '' : `wall: ${more.wall}`}
+`;
+const hazardsOf = async (text: string): Promise<string[]> => (await planOf(text)).checklist.filter((c) => c.id.startsWith('hazard-')).map((c) => c.id.slice(7));
+
+/** Triggers from both sides; limits of the hazard classes, common practice. */
+const rows: readonly { what: string; text: string; hazards: readonly string[] }[] = [
+  { what: 'cold water at low pressure', text: line(), hazards: [] },
+  { what: 'water at 47 degC', text: line({ inlet: '{ speed: 0.5 m/s, temperature: 47 degC }' }), hazards: [] },
+  { what: 'water at 49 degC', text: line({ inlet: '{ speed: 0.5 m/s, temperature: 49 degC }' }), hazards: ['hot'] },
+  { what: 'a wall at 49 degC', text: line({ wall: '{ temperature: 49 degC }' }), hazards: ['hot'] },
+  { what: 'air 0.4 bar above ambient', text: line({ fluid: '{ material: air, pressure: 1.41 bar abs }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: [] },
+  { what: 'air 0.6 bar above ambient', text: line({ fluid: '{ material: air, pressure: 1.62 bar abs }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: ['pressure'] },
+  { what: 'cold water 8 bar above ambient', text: line({ fluid: '{ material: water, pressure: 9 bar abs }' }), hazards: [] },
+  { what: 'cold water 11 bar above ambient', text: line({ fluid: '{ material: water, pressure: 12.1 bar abs }' }), hazards: ['pressure'] },
+  { what: 'water at 130 degC under pressure flashes where it leaks', text: line({ fluid: '{ material: water, pressure: 5 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 130 degC }' }), hazards: ['pressure', 'steam', 'hot'] },
+  { what: 'air at 0.4 bar', text: line({ fluid: '{ material: air, pressure: 0.4 bar abs }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: ['vacuum'] },
+  { what: 'air at -60 degC', text: line({ fluid: '{ material: air, pressure: 1 atm }', inlet: '{ speed: 5 m/s, temperature: -60 degC }' }), hazards: ['cold'] },
+  { what: 'nitrogen at room temperature', text: line({ fluid: '{ material: nitrogen, pressure: 1 atm }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: ['asphyxiation'] },
+  { what: 'carbon dioxide', text: line({ fluid: '{ material: carbon dioxide, pressure: 1 atm }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: ['carbon-dioxide', 'asphyxiation'] },
+  { what: 'sodium', text: line({ fluid: '{ material: sodium, pressure: 1.2 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 300 degC }' }), hazards: ['hot', 'liquid-metal'] },
+  { what: 'steam', text: line({ fluid: '{ material: steam, pressure: 1.2 bar abs }', inlet: '{ speed: 5 m/s, temperature: 130 degC }' }), hazards: ['steam', 'hot'] },
+  { what: 'engine oil that is only warm', text: line({ fluid: '{ material: engine oil, pressure: 1.2 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 80 degC }' }), hazards: ['hot'] },
+  { what: 'a word that only looks like one of the list', text: line({ title: 'Cooling of the drug-free co-current lining of a cartridge' }), hazards: ['medical'] },
+  { what: 'blood in the title', text: line({ title: 'Test loop with a fluid like blood' }), hazards: ['medical'] },
+];
+
+describe('cautions', () => {
+  it.each(rows)('$what: $hazards', async ({ text, hazards }) => {
+    expect(await hazardsOf(text)).toEqual(hazards);
+  });
+
+  it('are set off by a number or a word of the case, and say which', async () => {
+    for (const { text, hazards } of rows) {
+      const p = await planOf(text);
+      const said = linesOf(p, 'cautions').slice(1);
+      for (const title of p.checklist.filter((c) => c.id.startsWith('hazard-')).map((c) => (c.text.split(':')[0] as string).toLowerCase())) {
+        const own = said.find((l) => l.toLowerCase().startsWith(`${title}:`));
+        expect(own).toMatch(/\{[A-Za-z.]+\}|the case names/);
+      }
+      expect(unknownIds(p, 'cautions')).toEqual([]);
+      expect(said.length === 0 || hazards.length > 0 || p.checklist.some((c) => c.id.startsWith('trap-'))).toBe(true);
+    }
+  });
+
+  it('stay away from a benign case but for the opening, which holds its number', async () => {
+    const said = linesOf(await planOf(line()), 'cautions');
+    expect(said).toHaveLength(1);
+    expect(said[0]).toContain('{pressureDrop}');
+  });
+
+  it('name a law outside its range with range and value', async () => {
+    const p = await planOf(line({ wall: '{ temperature: -5 degC }' }));
+    expect(linesOf(p, 'cautions').join('\n')).toMatch(/dynamic viscosity at the wall, \{viscosityWall\}, comes from a law outside its range .* is -5 degC where it holds from 0 degC to 160 degC/);
+  });
+
+  it('see only the hot water in the rinse line', async () => {
+    const p = await planOf(readFileSync('examples/rinse-line.case.yaml', 'utf8'));
+    expect(p.checklist.filter((c) => c.id.startsWith('hazard-')).map((c) => c.id)).toEqual(['hazard-hot']);
+    expect(linesOf(p, 'cautions')[2]).toMatch(/^First of all: Burns; /);
+  });
+});
