@@ -64,6 +64,9 @@ export const regions: Definition[] = [
   quantity('edgeRatio', { symbol: 'g_e', name: 'ratio of neighbouring cells on the edge from the wall, all cells of the edge counted', unit: '1', ...perRegion }, [
     way({ needs: ['regionAcross', 'cellsAcross', 'regionWalls', 'firstCellHeight'], value: (of) => edgeRatio(of), formula: 'g_e: h_1 (g^n - 1)/(g - 1) = W_r over n cells, both halved between two walls', source: 'geometric series, root by bisection and Newton steps' }),
   ]),
+  quantity('edgeLast', { symbol: 'h_e', name: 'last cell of the edge from the wall', unit: 'm', ...perRegion }, [
+    way({ needs: ['edgeRatio', 'cellsAcross', 'regionWalls', 'firstCellHeight'], value: (of) => of.firstCellHeight * of.edgeRatio ** (of.cellsAcross / Math.min(2, of.regionWalls) - 1), formula: 'h_e = h_1 g_e^(n - 1), n halved between two walls', source: 'geometric series' }),
+  ]),
   quantity('regionCells', { symbol: 'N_r', name: 'cells of a region', unit: '1', ...perRegion, plain: 'sum' }, [
     way({ needs: ['cellsAlong', 'cellsAcross', 'cellsSpan', 'cutShare'], value: ({ cellsAlong, cellsAcross, cellsSpan, cutShare }) => cellsAlong * cellsAcross * cellsSpan * cutShare, formula: 'N_r = n_x n_y n_z s_c', source: 'product of the directions' }),
   ]),

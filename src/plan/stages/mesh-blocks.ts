@@ -52,7 +52,7 @@ export function blockTable(on: Ground): Table[] {
     const [spans, sideWalls] = [on.number(`cellsSpan@${r}`) ?? 1, on.number(`regionSpanWalls@${r}`) ?? 0];
     return [
       [r, 'along', ...layout.along, cell(`cellsAlong@${r}`), cell(`regionSizeAlong@${r}`), cell(`regionSizeAlong@${r}`), 'equal', '1'],
-      [r, 'across', ...layout.across, cell(`cellsAcross@${r}`), graded ? cell('firstCellHeight') : cell(`regionSizeAcross@${r}`), walls > 1 && graded ? cell('firstCellHeight') : cell(`regionSizeAcross@${r}`), graded ? (walls > 1 ? 'geometric from both ends' : 'geometric') : 'equal', graded ? cell(`edgeRatio@${r}`) : '1'],
+      [r, 'across', ...layout.across, cell(`cellsAcross@${r}`), graded ? cell('firstCellHeight') : cell(`regionSizeAcross@${r}`), graded ? (walls > 1 ? cell('firstCellHeight') : cell(`edgeLast@${r}`)) : cell(`regionSizeAcross@${r}`), graded ? (walls > 1 ? 'geometric from both ends' : 'geometric') : 'equal', graded ? cell(`edgeRatio@${r}`) : '1'],
       ...(spans > 1 ? [[r, 'span', ...layout.span, cell(`cellsSpan@${r}`), sideWalls > 0 ? cell('firstCellHeight') : cell(`regionSizeSpan@${r}`), sideWalls > 0 ? cell('firstCellHeight') : cell(`regionSizeSpan@${r}`), sideWalls > 0 ? 'geometric from both ends' : 'equal', sideWalls > 0 ? cell('growthRatio') : '1']] : []),
     ];
   });

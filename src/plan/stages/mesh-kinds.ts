@@ -24,7 +24,7 @@ export function topologyTable(on: Ground): Table[] {
   if (!on.has('cellCount')) return [];
   const { chosen, rejected } = on.choice('mesh-topology');
   const reason = (word: string): string => (word === chosen ? 'chosen' : (rejected.find((r) => r.option === word)?.because ?? ''));
-  return [table('Topologies for this case', ['topology', 'cells for the same error', 'at the wall', 'refinement', 'effort', 'verdict'], topologies.map((t) => [t.word, `${t.cells} times`, t.wall, t.freedom, t.effort, reason(t.word)]))];
+  return [table('Topologies for this case', ['topology', 'cells for the same error, times', 'at the wall', 'refinement', 'effort', 'verdict'], topologies.map((t) => [t.word, t.cells, t.wall, t.freedom, t.effort, reason(t.word)]))];
 }
 
 /** Kinds of cell by place. */
