@@ -1,4 +1,4 @@
-import { berkovskyPolevikov, eckertJackson, elSherbiny, facingWalls, macgregorEmery, shallowCavity, uprightSimilar } from '../quantities/index.ts';
+import { berkovskyPolevikov, eckertJackson, elSherbiny, facingWalls, macgregorEmery, shallowCavity, squareOfAir, uprightSimilar } from '../quantities/index.ts';
 import { quantity, way, ways, type Definition } from '../workings/index.ts';
 
 const definition = 'definition';
@@ -30,6 +30,7 @@ const regime: Definition[] = [
 const heat: Definition[] = [
   quantity('sideHeatedCavityCoreExcess', { symbol: 'Nu - 1', name: 'what the core flow of a shallow box adds to conduction', unit: '1' }, [way({ needs: ['rayleighHeight', aspect], value: (of) => shallowCavity({ rayleighHeight: of.rayleighHeight, aspect: of[aspect] }) - 1, formula: '(H/W)^2 Ra_H^2/362880', source: 'Cormack, Leal and Imberger, J. Fluid Mech. 65 (1974) 209' })]),
   ways('nusseltPlain', [
+    way({ needs, range: { [aspect]: [0.97, 1.03], prandtl: [0.6, 0.8], rayleigh: [1e3, 1e8] }, scatter: 0.03, value: ({ rayleigh }) => squareOfAir({ rayleigh }), formula: 'Nu by the benchmark: 1.118, 2.243, 4.519, 8.825, 16.52, 30.23 at Ra 1e3 to 1e8, straight in logarithms', source: 'de Vahl Davis, Int. J. Numer. Methods Fluids 3 (1983) 249; Le Quere, Comput. Fluids 20 (1991) 29' }),
     way({ needs, range: { [aspect]: [1, 2], prandtl: [1e-3, 1e5], rayleigh: [1, 1e10] }, scatter: 0.12, value: (of) => berkovskyPolevikov({ rayleigh: of.rayleigh, prandtl: of.prandtl, aspect: Math.min(of[aspect], 1.999) }), formula: 'Nu = 0.18 (Pr Ra/(0.2 + Pr))^0.29, at least 1', source }),
     way({ needs: ['sideHeatedCavityCoreExcess', aspect], range: { [aspect]: [0.001, 1], sideHeatedCavityCoreExcess: [0, 0.5] }, scatter: 0.15, value: ({ sideHeatedCavityCoreExcess }) => 1 + sideHeatedCavityCoreExcess, formula: 'Nu = 1 + (H/W)^2 Ra_H^2/362880, shallow box', source: 'Cormack, Leal and Imberger, J. Fluid Mech. 65 (1974) 209; from memory of this work' }),
     way({ needs, range: { [aspect]: [2, 10], prandtl: [1e-3, 1e5], rayleigh: [1, 1e10] }, scatter: 0.15, value: (of) => berkovskyPolevikov({ rayleigh: of.rayleigh, prandtl: of.prandtl, aspect: Math.max(2, of[aspect]) }), formula: 'Nu = 0.22 (Pr Ra/(0.2 + Pr))^0.28 (H/W)^(-1/4), at least 1', source }),
@@ -37,6 +38,7 @@ const heat: Definition[] = [
     way({ needs, range: { [aspect]: [10, 40], prandtl: [1, 2e4], rayleigh: [1, 1e7] }, scatter: 0.15, value: (of) => macgregorEmery({ rayleigh: of.rayleigh, prandtl: of.prandtl, aspect: of[aspect] }).layer, formula: 'Nu = 0.42 Ra^(1/4) Pr^0.012 (H/W)^(-0.3), at least 1', source: macgregor }),
   ]),
   ways('nusseltSecond', [
+    way({ needs, range: { [aspect]: [0.97, 1.03], prandtl: [0.6, 0.8], rayleigh: [1e3, 1e8] }, scatter: 0.12, value: (of) => berkovskyPolevikov({ rayleigh: of.rayleigh, prandtl: of.prandtl, aspect: 1 }), formula: 'Nu = 0.18 (Pr Ra/(0.2 + Pr))^0.29', source }),
     way({ needs, range: { [aspect]: [5, 110], prandtl: [0.5, 1], rayleigh: [1e2, 2e7] }, scatter: 0.12, value: (of) => elSherbiny({ rayleigh: of.rayleigh, aspect: of[aspect] }), formula: 'as for tall slots of air', source: elsherbinySource }),
     way({ needs, range: { [aspect]: [1, 40], prandtl: [1, 20], rayleigh: [1e6, 1e9] }, scatter: 0.2, value: (of) => macgregorEmery({ rayleigh: of.rayleigh, prandtl: of.prandtl, aspect: of[aspect] }).turbulent, formula: 'Nu = 0.046 Ra^(1/3)', source: macgregor }),
   ]),

@@ -125,6 +125,15 @@ describe('spreads', () => {
     expect((spreads(make({ ...water, speed: 1 }), ['friction']).get('friction')?.high ?? 0) / (0.3164 * 20000 ** -0.25)).toBeCloseTo(1.05, 12);
     expect((spreads(make({ ...water, speed: 0.15 }), ['friction']).get('friction')?.high ?? 0) / (0.3164 * 3000 ** -0.25)).toBeCloseTo(1.1, 12);
   });
+  it('take a stair by its secant over the half-width, on its edge and between edges', () => {
+    const cells = [quantity('cells', { symbol: 'n', name: 'cells', unit: '1' }, [way({ needs: ['diameter'], value: ({ diameter }) => 4 * Math.ceil(diameter / 4 - 1e-9), formula: 'n = D/h, up to a multiple of 4', source: 'test' })])];
+    for (const diameter of [200, 202]) {
+      const s = spreads(make({ diameter: { value: diameter, half: 0.3, relative: true } }, cells), ['cells']).get('cells');
+      // a count near 200 with an extent known within 30 % is known within 30 %, give or take one multiple of 4
+      expect((s?.high ?? 0) / diameter, String(diameter)).toBeGreaterThan(1.26);
+      expect((s?.high ?? 0) / diameter, String(diameter)).toBeLessThan(1.34);
+    }
+  });
   it('are sampled across a change of word', () => {
     const s = spreads(make({ ...water, speed: { value: 0.11, half: 0.02 } }), ['friction']).get('friction');
     expect(s?.how).toBe('sampled');
