@@ -105,7 +105,7 @@ export const backwardStep: Flow = {
       'pressure rise of 2 s (1 - s) dynamic pressures, s the ratio of sections, by x_R + 5 to 10 h',
       'heated: Nusselt number largest at 0.9 to 1.0 x_R',
     ],
-    probes: ['wall shear at 0.6 x_R', 'a tenth of h off the wall at x_R - h and x_R + h', 'x = 4 h at lip height', 'x = 20 h'],
+    probes: ['wall shear at 0.6 x_R, with x_R = {reattachmentLength}', 'a tenth of h off the wall at x_R - h and x_R + h', 'x = 4 h at lip height', 'x = 20 h'],
     wrong: ['length moves by more than 10 % with the mesh: not yet there', 'no corner eddy, turbulent: wall law', 'length rises with the place of the outlet: outlet'],
   },
   ladder,

@@ -109,7 +109,7 @@ export const cylinder: Flow = {
       'shedding: lift at f with mean zero, drag at 2 f; rows 5.3 D apart at Re 100',
       'level in still fluid: layer thinnest at the bottom, plume at the top',
     ],
-    probes: ['1 and 2 D behind at half a diameter to each side', '5 D behind on the axis and 1 D to each side', 'surface at 90 degrees on both sides'],
+    probes: ['1 and 2 D behind at half a diameter to each side', '5 D behind on the axis and 1 D to each side, D = {length}', 'surface at 90 degrees on both sides'],
     wrong: [
       'symmetric wake above Re 47: no seed, a mirror, or damping of the scheme',
       'drag swings at f, not 2 f: incidence or outlet',

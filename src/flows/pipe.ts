@@ -95,7 +95,7 @@ export const pipe: Flow = {
       'bulk temperature falling to the wall temperature as exp(-4 Nu x/(D Re Pr)); straight with a uniform flux',
       'level, heated, laminar: two rolls mirrored on the upright plane, wall hottest on top',
     ],
-    probes: ['axis at half, one and two entrance lengths', '0.223 R from the wall at nine tenths of the length', 'wall temperature at 0.1, 0.5 and 0.9 of the length, top and bottom where gravity acts'],
+    probes: ['axis at half, one and two entrance lengths of {entranceLength}', '0.223 R from the wall at nine tenths of {flowLength}', 'wall temperature at 0.1, 0.5 and 0.9 of the length, top and bottom where gravity acts'],
     wrong: [
       'laminar axis speed stays below 1.9 times the mean: not developed, or swirl',
       'pressure line bends in the last diameter: outlet condition',

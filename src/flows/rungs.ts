@@ -1,12 +1,14 @@
 import { referenceNumber, references, type Reference } from '../references/index.ts';
 import { quantity, type Definition, type Way } from '../workings/index.ts';
 import type { Flow, Rung } from './define.ts';
+import { distanceDefinition } from './rung-distance.ts';
 
-/** A rung with its id in the plan and the quantities that hold its predicted number and its tolerance. */
+/** A rung with its id in the plan and the quantities that hold its predicted number, its tolerance and its distance from the case. */
 export interface NamedRung {
   readonly id: string;
   readonly quantity: string;
   readonly tolerance: string;
+  readonly distance: string;
   readonly rung: Rung;
 }
 
@@ -27,7 +29,7 @@ export function rungsOf(flow: Flow): NamedRung[] {
     const tries = [rung.reference, `${rung.reference}:${rung.compares}`];
     const id = tries.find((one) => !seen.has(one)) ?? `${rung.reference}:${rung.compares}-${seen.size}`;
     seen.add(id);
-    return { id, quantity: `rung.${id}`, tolerance: `rungTolerance.${id}`, rung };
+    return { id, quantity: `rung.${id}`, tolerance: `rungTolerance.${id}`, distance: `rungDistance.${id}`, rung };
   });
 }
 
@@ -46,10 +48,10 @@ export function rungInputs(rung: Rung): { readonly from: readonly (readonly [str
  * The predicted numbers of a flow's rungs as quantities, each with its tolerance: references evaluated for this case, traced like any other number.
  *
  * @param flow  the flow
- * @returns     two definitions a rung
+ * @returns     three definitions a rung
  */
 export function rungDefinitions(flow: Flow): Definition[] {
-  return rungsOf(flow).flatMap(({ quantity: id, tolerance, rung }) => {
+  return rungsOf(flow).flatMap(({ quantity: id, tolerance, distance, rung }) => {
     const ref = references.find((r) => r.id === rung.reference);
     const answer = ref?.values.find((v) => v.id === rung.compares);
     if (ref === undefined || answer === undefined) return [];
@@ -73,6 +75,7 @@ export function rungDefinitions(flow: Flow): Definition[] {
     const allowed: Way = { needs, value: (of) => Math.max(rung.limit, tolerated(ref, typeof scatter === 'function' ? scatter(of) : scatter)), ...about(ref, rung.limit), ...when, as: 'decided', dimensional: 'a reference may hold constants with units' };
     return [
       quantity(id, { symbol: answer.id, name: `${answer.name} of the rung`, unit: answer.unit, signed: answer.unit === 'K' }, [number]),
+      distanceDefinition(distance, ref, from, fixed),
       quantity(tolerance, { symbol: 'W', name: 'relative tolerance of the rung', unit: '1' }, [allowed]),
     ];
   });

@@ -86,7 +86,7 @@ export const sideHeatedCavity: Flow = {
       'square of air: largest upward speed 1.19 W Ra^(-1/4) from the wall, 0.218 (alpha/W) Ra^(1/2)',
       'core dT/dz of 0.53, 0.83, 1.07, 0.91 dT/H at Ra 1e3, 1e4, 1e5, 1e6; the wall flux largest at 0.09, 0.14, 0.08, 0.037 H on the hot wall',
     ],
-    probes: ['place of the largest upward speed at mid-height, both walls', 'core temperature at 0.25, 0.5 and 0.75 H', 'corner at 0.05 H'],
+    probes: ['place of the largest upward speed at mid-height, both walls', 'core temperature at 0.25, 0.5 and 0.75 of the height {passageHeight}', 'corner at 0.05 H'],
     wrong: [
       'symmetry broken by more than 1 %: properties vary, then expected, or mesh',
       'core slope far below 0.5 above Ra 1e5: heat lost at adiabatic walls, or time too short',

@@ -25,6 +25,8 @@ export interface RungDetail {
   readonly compares: string;
   /** Quantity that holds the relative tolerance. */
   readonly tolerance: string;
+  /** Quantity that holds the distance of the answer from this case. */
+  readonly distance: string;
   readonly order?: number;
   /** Needs of the reference by id, SI, as this case fills them. */
   readonly inputs: Readonly<Record<string, number>>;
@@ -67,7 +69,7 @@ function skipped({ workings }: Assembled, { rung }: NamedRung): SkippedRung['bec
   return effect === undefined ? undefined : { effect };
 }
 
-function detail({ workings }: Assembled, { id, quantity, tolerance, rung }: NamedRung, reference: Reference): RungDetail {
+function detail({ workings }: Assembled, { id, quantity, tolerance, distance, rung }: NamedRung, reference: Reference): RungDetail {
   const value = workings.get(quantity);
   const allowed = workings.get(tolerance) ?? rung.limit;
   const spread = spreads(workings, [quantity]).get(quantity);
@@ -79,6 +81,7 @@ function detail({ workings }: Assembled, { id, quantity, tolerance, rung }: Name
     reference,
     compares: rung.compares,
     tolerance,
+    distance,
     ...(rung.order === undefined ? {} : { order: rung.order }),
     inputs: { ...fixed, ...filled },
     from: from.map(([, one]) => one),

@@ -22,9 +22,12 @@ export interface StageResult extends Section {
 }
 export type Stage = (on: Ground) => StageResult;
 
+/** Ids that a text names in braces. */
+export const idsIn = (text: string): string[] => [...text.matchAll(/\{([^{}]+)\}/g)].map((m) => m[1] as string);
+
 /** A line of text; `{id}` names the quantities in it. */
 export function line(text: string): Line {
-  return { text, quantities: [...text.matchAll(/\{([^{}]+)\}/g)].map((m) => m[1] as string) };
+  return { text, quantities: idsIn(text) };
 }
 
 /** Lines of which those without text are left out. */

@@ -25,6 +25,9 @@ export const domain: Definition[] = [
     quantity(`domainErrorDrag${which}`, { symbol: 'F_b - 1', name: `what sides at ${which === '' ? 'the planned' : '1.5 times the planned'} distance add to the drag`, unit: '1' }, [
       { needs: ['length', needs, 'dragCoefficient'], when: { flowClass: 'body', imposedFlow: 'yes', separated: 'yes' }, range: { dragCoefficient: [0, 2] }, scatter: 0.5, value: (of) => { const b = (of['length'] as number) / ((of['length'] as number) + 2 * (of[needs] as number)); return (1 + 0.25 * (of['dragCoefficient'] as number) * b + 0.82 * b * b) ** 2 - 1; }, formula: '(1 + C_D b/4 + 0.82 b^2)^2 - 1, b = L/(L + 2 L_s)', source: 'Allen and Vincenti, NACA Report 782 (1944)' },
     ])),
+  quantity('calmLength', { symbol: '50 D_h', name: 'straight run after which a bend ahead is no longer felt', unit: 'm' }, [
+    way({ needs: ['hydraulicDiameter'], when: { flowClass: 'internal' }, value: ({ hydraulicDiameter }) => 50 * hydraulicDiameter, formula: '50 D_h', source: `${practice}: swirl behind a bend` }),
+  ]),
   quantity('featureLimit', { symbol: 'h_f', name: 'size below which a feature of a wall may be left out', unit: 'm' }, [
     way({ needs: ['kinematicViscosity', 'frictionVelocity'], when: { regime: ['transitional', 'turbulent'] }, value: (of) => (2.25 * of.kinematicViscosity) / of.frictionVelocity, formula: 'h_f = 2.25 nu/u_tau', source: 'Ligrani and Moffat, J. Fluid Mech. 162 (1986) 69: hydraulically smooth below' }),
     way({ needs: ['boundaryLayerThickness'], value: ({ boundaryLayerThickness }) => boundaryLayerThickness / 20, formula: 'h_f = delta/20', source: `${practice}: a wall cell of a laminar layer` }),

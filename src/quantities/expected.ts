@@ -24,7 +24,7 @@ export const expected: Definition[] = [
     way({ needs: ['frictionReynolds'], when: { flowClass: 'internal', regime: ['transitional', 'turbulent'] }, scatter: 0.5, value: ({ frictionReynolds }) => 0.07 * frictionReynolds, formula: 'nu_t/nu = 0.07 delta+', source: `${practice}: parabolic eddy viscosity of a duct` }),
   ]),
   quantity('logLayerTop', { symbol: 'y+_log', name: 'upper end of the logarithmic layer in viscous lengths', unit: '1' }, [
-    way({ needs: ['frictionReynolds'], when: { regime: ['transitional', 'turbulent'] }, value: ({ frictionReynolds }) => 0.2 * frictionReynolds, formula: 'y+ = 0.2 delta+', source: practice }),
+    way({ needs: ['frictionReynolds'], value: ({ frictionReynolds }) => 0.2 * frictionReynolds, formula: 'y+ = 0.2 delta+', source: practice }),
   ]),
   quantity('yPlusAccepted', { symbol: 'y+_max', name: 'largest distance of the first node that is accepted, in viscous lengths', unit: '1' }, [
     way({ needs: ['frictionReynolds'], when: { 'choice.near-wall-treatment': 'law-of-the-wall' }, value: ({ frictionReynolds }) => 0.2 * frictionReynolds, formula: 'y+ = 0.2 delta+', source: practice }),

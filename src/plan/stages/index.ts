@@ -1,11 +1,13 @@
 import type { Stage } from '../ground.ts';
 import type { SectionName } from '../types.ts';
+import { afterRun } from './after-run.ts';
 import { boundaries } from './boundaries.ts';
 import { cautions } from './cautions.ts';
 import { cost } from './cost.ts';
 import { coupling } from './coupling.ts';
 import { documentation } from './documentation.ts';
 import { domain } from './domain.ts';
+import { ladder } from './ladder.ts';
 import { mesh } from './mesh.ts';
 import { numerics } from './numerics.ts';
 import { physics } from './physics.ts';
@@ -14,9 +16,7 @@ import { question } from './question.ts';
 import { time } from './time.ts';
 import { turbulence } from './turbulence.ts';
 import { verification } from './verification.ts';
-import { ladder } from './ladder.ts';
-
-const empty: Stage = () => ({ lines: [], tables: [] });
+import { watch } from './watch.ts';
 
 /** The stages of the plan by the section they write. */
 export const stages: Readonly<Record<SectionName, Stage>> = {
@@ -33,8 +33,8 @@ export const stages: Readonly<Record<SectionName, Stage>> = {
   cost,
   verification,
   ladder,
-  watch: empty,
-  afterRun: empty,
+  watch,
+  afterRun,
   documentation,
   cautions,
 };
