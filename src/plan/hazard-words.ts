@@ -1,7 +1,7 @@
 import type { Assembled } from '../assemble/index.ts';
 
 /** Words that mark a substance, a use or a place as one that can hurt. Whole words, any case. */
-export const marks = {
+const marks = {
   hydrogen: ['hydrogen', 'h2', 'syngas'],
   flammable: ['methane', 'natural gas', 'propane', 'butane', 'ethane', 'ethylene', 'acetylene', 'ethanol', 'methanol', 'acetone', 'toluene', 'benzene', 'hexane', 'petrol', 'gasoline', 'diesel', 'kerosene', 'fuel', 'ammonia', 'carbon monoxide', 'lpg', 'lng'],
   oil: ['light oil', 'engine oil', 'heat-transfer oil', 'thermal oil', 'mineral oil', 'lubricating oil'],

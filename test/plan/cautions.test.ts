@@ -35,6 +35,7 @@ const rows: readonly { what: string; text: string; hazards: readonly string[] }[
   { what: 'steam', text: line({ fluid: '{ material: steam, pressure: 1.2 bar abs }', inlet: '{ speed: 5 m/s, temperature: 130 degC }' }), hazards: ['steam', 'hot'] },
   { what: 'engine oil that is only warm', text: line({ fluid: '{ material: engine oil, pressure: 1.2 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 80 degC }' }), hazards: ['hot'] },
   { what: 'a word that only looks like one of the list', text: line({ title: 'Cooling of the drug-free co-current lining of a cartridge' }), hazards: ['medical'] },
+  { what: 'a fire named where no heat is set free', text: line({ title: 'Feed line of a fire hydrant' }), hazards: [] },
   { what: 'blood in the title', text: line({ title: 'Test loop with a fluid like blood' }), hazards: ['medical'] },
 ];
 

@@ -5,12 +5,12 @@ import type { Check, Line, Table } from '../types.ts';
 import { missingInputs } from './question-inputs.ts';
 
 /** What makes a case harder to set up, and how much. */
-const one = ['turbulence', 'buoyancy', 'conjugate', 'species', 'variable-density', 'imposed-unsteadiness'];
-const two = ['transition', 'participating-radiation', 'reaction', 'free-surface', 'compressibility', 'viscoelasticity', 'cavitation', 'boiling', 'condensation', 'freezing'];
+const one = ['turbulence', 'buoyancy', 'conjugate', 'species', 'variable-density', 'imposed-unsteadiness', 'non-newtonian', 'swirl', 'rotation'];
+const two = ['transition', 'participating-radiation', 'reaction', 'free-surface', 'compressibility', 'viscoelasticity', 'magnetic', 'particle-coupling', 'cavitation', 'boiling', 'condensation', 'freezing'];
 
 /** Who should do it, from what the case holds. */
 export function skillLine(on: Ground): Line[] {
-  const acts = (id: string): boolean => on.effect(id)?.applies !== false && on.kept(id);
+  const acts = (id: string): boolean => { const e = on.effect(id); return e !== undefined && e.applies !== false && (on.kept(id) || (!e.judged && e.applies === true)); };
   const [simple, hard] = [one.filter(acts), two.filter(acts)];
   const points = simple.length + 2 * hard.length + Number(on.word('separated') === 'yes') + Number(['les', 'dns', 'hybrid', 'wall-modelled-les'].includes(on.choice('turbulence-treatment')?.chosen ?? '')) * 2;
   const parts = [...simple, ...hard, ...(on.word('separated') === 'yes' ? ['separation'] : [])];

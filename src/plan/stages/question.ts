@@ -1,3 +1,4 @@
+import { stepOf } from '../../workings/index.ts';
 import { lines, type Ground, type StageResult } from '../ground.ts';
 import { authors, listed, nameOf, percent } from '../say.ts';
 import { targetSpreads } from '../target-spread.ts';
@@ -31,6 +32,7 @@ function aboutTarget(on: Ground, t: Target): Line[] {
   if (!t.computed) return lines(`${t.quantity} is not computed and has no price: ${lackOf(on, t)}. The run alone answers it.`);
   const spread = targetSpreads(on.assembled).find((s) => s.id === t.id);
   const name = nameOf(on, t.quantity);
+  if (stepOf(on.assembled.workings, t.quantity)?.source === 'the case') return lines(`The ${name} is stated by the case, {${t.quantity}}: ${t.mean === 'peak' || t.mean === 'rms' ? `its ${t.mean} has no estimate here, and the run alone answers it` : 'nothing is left to compute'}.`);
   const missing = [...(t.place === undefined ? ['place'] : []), ...(t.mean === undefined ? ['mean'] : [])];
   const from = (spread?.from ?? []).slice(0, 3).filter((f) => f.share >= 0.02).map((f) => `${percent(f.share)} from ${f.kind === 'scatter' ? `the scatter of the law (${authors(f.label)})` : f.kind === 'property' ? `the ${nameOf(on, f.label)} of the fluid` : f.label}`);
   return [
