@@ -9,10 +9,11 @@ import { reviewChecks, reviewTables, skillLine } from './documentation-review.ts
 
 /** What a colleague needs to review the plan: assumptions, inputs without use, sources, steps of review, and what is not covered. */
 export function documentation(on: Ground): StageResult {
-  const assumed = register(on);
+  const ids = used(on);
+  const assumed = register(on, ids);
   return {
     lines: [...gapLines(on), ...registerLines(on, assumed), ...skillLine(on)],
-    tables: [...registerTable(assumed), ...departures(on), sources(on), ...reviewTables(on)],
+    tables: [...registerTable(assumed), ...departures(on), sources(on, ids), ...reviewTables(on)],
     checklist: [
       ...assumed.filter((a) => a.weighs).map((a): Check => ({ id: `assumption-${a.id}`, stage: 'documentation', text: `confirm the ${a.name}, which is assumed: ${a.says}` })),
       ...reviewChecks(on),
@@ -28,13 +29,13 @@ function used(on: Ground): string[] {
   return closure(workings, [...targets.filter((t) => t.computed).map((t) => t.quantity), ...effectsOf(on).flatMap((e) => (e.deciding === undefined || e.applies === false ? [] : [e.deciding.quantity]))]);
 }
 
-function register(on: Ground): Assumed[] {
+function register(on: Ground, ids: readonly string[]): Assumed[] {
   const { workings, assumptions } = on.assembled;
   const from = targetSpreads(on.assembled)[0]?.from ?? [];
   const share = (id: string): number => from.filter((f) => f.key === id || f.key.startsWith(`${id}: `)).reduce((s, f) => Math.max(s, f.share), 0);
   const stated = assumptions.map(({ id, says }): Assumed => ({ id, name: nameOf(on, id), says, value: on.has(id) ? { id } : '', share: share(id) > 0 ? percent(share(id)) : '', weighs: share(id) >= 0.1 }));
   const had = new Set(stated.map((a) => a.id));
-  const defaults = used(on).flatMap((id): Assumed[] => {
+  const defaults = ids.flatMap((id): Assumed[] => {
     const step = stepOf(workings, id);
     if (step === undefined || step.kind !== 'assumed' || had.has(id)) return [];
     return [{ id, name: step.name, says: step.formula === 'assumed' ? 'not given' : `${step.formula} (${step.source})`, value: typeof step.value === 'number' ? { id } : step.value, share: share(id) > 0 ? percent(share(id)) : '', weighs: share(id) >= 0.1 }];
@@ -65,11 +66,11 @@ function departures(on: Ground): Table[] {
   return rows.length === 0 ? [] : [{ title: 'Departures from the advice', columns: ['choice', 'advised', 'stated in the case', 'because'], rows }];
 }
 
-function sources(on: Ground): Table {
+function sources(on: Ground, ids: readonly string[]): Table {
   const by = new Map<string, string[]>();
   const add = (source: string, what: string): void => { by.set(source, [...(by.get(source) ?? []), what]); };
   const plain = new Set(['the case', 'definition', 'geometry', 'decided', 'material record']);
-  for (const id of used(on)) {
+  for (const id of ids) {
     const step = stepOf(on.assembled.workings, id);
     if (step !== undefined && !plain.has(step.source)) add(step.source, step.name);
   }
