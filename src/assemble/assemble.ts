@@ -15,6 +15,7 @@ import { leafDefinitions, leavesOf, wallPlaces, type Leaf } from './leaves.ts';
 import { targetDefinitions } from './target-definitions.ts';
 import { toleranceWays } from './tolerance-ways.ts';
 import { bindTargets, estimated, kindsOf, type BoundTarget } from './targets.ts';
+import { validationDefinitions } from './validation-definitions.ts';
 import { vocabulary } from './vocabulary.ts';
 import { wallDefinitions } from './wall-definitions.ts';
 
@@ -89,6 +90,7 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
     ...wall.definitions,
     ...(fluid.laws === undefined ? [] : materialWays(fluid.laws.about)),
     ...targetDefinitions(on, estimated(on, base, flow.walls)),
+    ...validationDefinitions(estimated(on, base, flow.walls)),
     ...toleranceWays(on, (id) => units.get(id)),
     ...[...on.entries.keys()].flatMap((path) => (path.startsWith('fluid.') && isProperty(path.slice(6)) ? givenPropertyWays(path.slice(6), path) : [])),
   ];
