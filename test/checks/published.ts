@@ -29,6 +29,6 @@ export function inputsOf(entry: Entry): Record<string, number> {
 
 /** Expected value and allowed departure in SI. */
 export function expectedOf(entry: Entry): { value: number; allowed: number } {
-  const u = unit(entry.unit);
+  const u = entry.unit === 'cells' ? { factor: 1 } : unit(entry.unit);
   return { value: si(entry.expected, entry.unit), allowed: Math.max((entry.tolerance.rel ?? 0) * Math.abs(entry.expected), entry.tolerance.abs ?? 0) * u.factor };
 }
