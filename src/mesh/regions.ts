@@ -9,17 +9,15 @@ const perRegion = { per: ['region'] as const };
 
 const stacks = (n: number, where: string): Way => ({ needs: [], value: () => n, formula: `n_w = ${n}: ${where}`, source: geometry });
 
-/** A size along or along the span: that of the core, in wall regions of resolved turbulence no more than so many viscous lengths. */
-const limited = (direction: 'along' | 'span', stretch: string, walls: string, plus: Readonly<Record<'les' | 'dns', number>>): Way[] => [
-  ...(['les', 'dns'] as const).map((word): Way => ({
-    needs: ['coreCellSize', 'regionCoarsening', stretch, walls, 'viscousLength'],
-    when: { [treatment]: word },
-    value: (of) => (of[walls] as number) > 0 ? Math.min((of['coreCellSize'] as number) * (of['regionCoarsening'] as number) * (of[stretch] as number), plus[word] * (of['viscousLength'] as number)) : (of['coreCellSize'] as number) * (of['regionCoarsening'] as number) * (of[stretch] as number),
-    formula: `h_${direction === 'along' ? 'x' : 'z'} = ${plus[word]} nu/u_tau at walls, at most h_c a_c a`,
-    source: word === 'les' ? 'Piomelli and Balaras, Annu. Rev. Fluid Mech. 34 (2002) 349' : 'Moser, Kim and Mansour, Phys. Fluids 11 (1999) 943',
-  })),
-  { needs: ['coreCellSize', 'regionCoarsening', stretch], value: (of) => (of['coreCellSize'] as number) * (of['regionCoarsening'] as number) * (of[stretch] as number), formula: `h_${direction === 'along' ? 'x' : 'z'} = h_c a_c a`, source: practice },
-];
+/** A size along or along the span. Where eddies are resolved cells are not stretched, and wall regions of resolved walls take so many viscous lengths at most. */
+function limited(axis: 'x' | 'z', stretch: string, plus: Readonly<Record<'les' | 'dns', number>>): Way[] {
+  const sources = { les: 'Piomelli and Balaras, Annu. Rev. Fluid Mech. 34 (2002) 349', dns: 'Moser, Kim and Mansour, Phys. Fluids 11 (1999) 943' };
+  return [
+    ...(['les', 'dns'] as const).map((word) => way({ needs: ['coreCellSize', 'regionCoarsening', 'regionWalls', 'viscousLength'], when: { [treatment]: word }, value: (of) => (of.regionWalls > 0 ? Math.min(of.coreCellSize * of.regionCoarsening, plus[word] * of.viscousLength) : of.coreCellSize * of.regionCoarsening), formula: `h_${axis} = ${plus[word]} nu/u_tau at walls, at most h_c a_c`, source: sources[word] })),
+    way({ needs: ['coreCellSize', 'regionCoarsening'], when: { [treatment]: ['wall-modelled-les', 'hybrid'] }, value: (of) => of.coreCellSize * of.regionCoarsening, formula: `h_${axis} = h_c a_c`, source: 'eddies have no long direction' }),
+    way({ needs: ['coreCellSize', 'regionCoarsening', stretch], value: (of) => (of['coreCellSize'] as number) * (of['regionCoarsening'] as number) * (of[stretch] as number), formula: `h_${axis} = h_c a_c a_${axis}`, source: practice }),
+  ];
+}
 
 /** Up to the next multiple, so that the whole family has whole counts; nothing stays nothing. */
 const upTo = (count: number, multiple: number): number => (count <= 0 ? 0 : multiple * Math.ceil(count / multiple - 1e-9));
@@ -51,8 +49,8 @@ export const regions: Definition[] = [
   quantity('regionSizeAcross', { symbol: 'h_y', name: 'cell of a region across the flow, away from walls', unit: 'm', ...perRegion }, [
     way({ needs: ['coreCellSize', 'regionCoarsening'], value: ({ coreCellSize, regionCoarsening }) => coreCellSize * regionCoarsening, formula: 'h_y = h_c a_c', source: practice }),
   ]),
-  quantity('regionSizeAlong', { symbol: 'h_x', name: 'cell of a region along the flow', unit: 'm', ...perRegion, plain: 'smallest' }, limited('along', 'regionStretch', 'regionWalls', { les: 70, dns: 10 })),
-  quantity('regionSizeSpan', { symbol: 'h_z', name: 'cell of a region along the span', unit: 'm', ...perRegion }, limited('span', 'regionSpanStretch', 'regionWalls', { les: 20, dns: 5 })),
+  quantity('regionSizeAlong', { symbol: 'h_x', name: 'cell of a region along the flow', unit: 'm', ...perRegion, plain: 'smallest' }, limited('x', 'regionStretch', { les: 70, dns: 10 })),
+  quantity('regionSizeSpan', { symbol: 'h_z', name: 'cell of a region along the span', unit: 'm', ...perRegion }, limited('z', 'regionSpanStretch', { les: 20, dns: 5 })),
   quantity('cellsAlong', { symbol: 'n_x', name: 'cells of a region along the flow', unit: '1', ...perRegion, plain: 'sum' }, [
     way({ needs: ['regionAlong', 'regionSizeAlong', 'countMultiple'], value: ({ regionAlong, regionSizeAlong, countMultiple }) => upTo(regionAlong / regionSizeAlong, countMultiple), formula: 'n_x = L_r/h_x, up to the multiple', source: 'equal cells' }),
   ]),

@@ -8,6 +8,7 @@ const gains = ['gainBuoyancy', 'gainViscosity', 'gainHeating', 'gainWall'] as co
 export const coupling: Definition[] = [
   gain('gainBuoyancy', 'q_b', 'gain of the loop of temperature and speed by buoyancy', [
     way({ needs: ['richardson'], when: { energySolved: 'yes', imposedFlow: 'yes' }, value: ({ richardson }) => -richardson / 2, formula: 'q_b = -Ri/2', source: `${passes}: heated lid-driven square` }),
+    way({ needs: ['timeStep', 'freeFallTime'], when: { energySolved: 'yes', imposedFlow: 'no', 'choice.run-character': ['march', 'transient'] }, value: (of) => -((of.timeStep / of.freeFallTime) ** 2) / 2, formula: 'q_b = -(dt/t_ff)^2/2 within a step', source: `${passes}: side-heated square, steps up to t_ff` }),
     way({ needs: ['rayleigh'], when: { energySolved: 'yes', imposedFlow: 'no' }, value: ({ rayleigh }) => -0.9 * (rayleigh / 1e4) ** 0.85, formula: 'q_b = -0.9 (Ra/1e4)^0.85', source: `${passes}: side-heated square, Ra 1e3 to 1e7` }),
     way({ needs: [], value: () => 0, formula: 'q_b = 0', source: 'no loop' }),
   ]),

@@ -25,7 +25,7 @@ const calibrated = (on: Ground): boolean => on.assembled.case.has('computing.cel
 
 function runLines(on: Ground): Line[] {
   return lines(
-    `One run on the medium mesh takes {coreHours} core hours, {wallTime} on {cores} cores, and {memory} of memory; the fine mesh {coreHoursFine} core hours and {memoryFine}.`,
+    `One run on the medium mesh takes {coreHours} core hours and {memory} of memory, done in {wallTime} (cores: {cores}); the fine mesh {coreHoursFine} core hours and {memoryFine}.`,
     calibrated(on) ? 'The rate {cellUpdateRate} is that of your machine.' : 'The rate {cellUpdateRate} is an order of magnitude: run 20 steps on two meshes, then give computing.cellUpdateRate, and every estimate follows.',
   );
 }
@@ -66,7 +66,7 @@ function meshTable(on: Ground): Table {
 function coreLines(on: Ground): Line[] {
   const cores = on.assembled.case.number('computing.cores');
   const most = on.number('coresMost') ?? 1;
-  return lines(cores !== undefined && cores > most ? 'Of the {computing.cores} cores only {coresMost} have work enough: run meshes side by side.' : 'Up to {coresMost} cores have work enough on the medium mesh; at {cores} a share of {parallelEfficiency} does work.');
+  return lines(cores !== undefined && cores > most ? 'Of the {computing.cores} cores only {coresMost} have work enough: run meshes side by side.' : 'Cores with work enough on the medium mesh: up to {coresMost}; with {cores} a share of {parallelEfficiency} does work.');
 }
 
 const checks = (): Check[] => [{ id: 'cost-pilot', stage: 'cost', text: 'pilot of 20 steps on the coarse and medium mesh: rate, memory per cell and passes against the plan', limit: 'within a factor of 2, the rate within 3' }];

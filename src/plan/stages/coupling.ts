@@ -72,7 +72,9 @@ function gainTable(on: Ground): Table[] {
 function orderLines(on: Ground): Line[] {
   const order = on.choice('solution-order');
   const gain = on.number('largestGain') ?? 0;
-  const first = on.word('imposedFlow') === 'no' ? 'properties, energy, momentum, pressure, turbulence' : 'properties, momentum, pressure, energy, turbulence';
+  const heat = on.word('energySolved') === 'yes';
+  const modelled = ['rans', 'hybrid'].includes(on.choice('turbulence-treatment').chosen);
+  const first = (on.word('imposedFlow') === 'no' ? ['properties', heat && 'energy', 'momentum', 'pressure'] : [heat && 'properties', 'momentum', 'pressure', heat && 'energy']).concat(on.word('has.species') === 'yes' ? ['species'] : [], modelled ? ['turbulence'] : []).filter(Boolean).join(', ');
   return lines(
     `Order: ${order.chosen}, for ${order.because}${order.applies === false ? '' : `; within a pass: ${first}`}.`,
     gain > 1e-3 && `The strongest loop multiplies its error by {largestGain} a pass: ${gain < 0.3 ? 'plain passes close it' : 'relaxed by {loopRelaxation} it closes'} to a thousandth in {loopPasses}. Read the gain within a factor of 2; the first passes replace it.`,
@@ -108,14 +110,17 @@ function timeLines(on: Ground): Line[] {
   return lines(`Slowest over fastest solved time: {slowestTime} over {fastestTime}, {stiffness}: ${s < 10 ? 'explicit or alternating passes run freely' : s < 1e3 ? 'take the fast part implicitly' : s < 1e6 ? 'the fast part wants a strongly damped implicit scheme' : 'the fast part is to be eliminated or taken as in balance'}.`);
 }
 
+/** Near or beyond the end of the steady state, where a steady answer may still be had. */
+const nearOnset = (on: Ground): boolean => { const x = on.number('unsteadyRatio') ?? 0; return x >= 0.8 && (x < 1.5 || on.choice('run-character').chosen !== 'transient'); };
+
 function uniqueLines(on: Ground): Line[] {
-  if (!on.has('unsteadyRatio') || (on.number('unsteadyRatio') ?? 0) < 0.8) return [];
+  if (!nearOnset(on)) return [];
   return lines('The group stands at {unsteadyRatio} of the value where the steady state ends: more than one state may exist. Start once from rest and once from a state beyond it, with a disturbance of 1 % of the speed, before the answer is called the only one.');
 }
 
 function checks(on: Ground): Check[] {
   return [
-    ...((on.number('unsteadyRatio') ?? 0) >= 0.8 ? [{ id: 'coupling-two-starts', stage: 'coupling', text: 'two different starts reach the same state', limit: 'iteration error', where: 'every target' }] : []),
+    ...(nearOnset(on) ? [{ id: 'coupling-two-starts', stage: 'coupling', text: 'two different starts reach the same state', limit: 'iteration error', where: 'every target' }] : []),
     ...(on.kept('conjugate') && on.has('biotWall') ? [{ id: 'coupling-joint', stage: 'coupling', text: 'heat matches across the joint of fluid and wall', limit: 'a tenth of the accuracy', where: 'wetted face of the wall' }] : []),
   ];
 }

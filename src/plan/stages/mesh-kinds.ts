@@ -15,7 +15,7 @@ export function topologyLines(on: Ground): Line[] {
   const separated = on.word('separated') === 'yes';
   return lines(
     `Topology: ${choice.chosen}, for ${choice.because}.`,
-    separated ? 'Mesh lines follow the wall to the point of separation and the wake behind it; the free shear layer is crossed at no less than 45 degrees.' : on.word('attached') === 'yes' && 'The flow keeps to its walls: mesh lines run along it within 10 to 15 degrees and leave the wall at 70 degrees or more.',
+    separated ? 'Mesh lines follow the wall to the point of separation and the wake behind it; the free shear layer is crossed at no less than 45 degrees.' : on.word('attached') === 'yes' && on.word('flowClass') !== 'continuum' && 'The flow keeps to its walls: mesh lines run along it within 10 to 15 degrees and leave the wall at 70 degrees or more.',
   );
 }
 

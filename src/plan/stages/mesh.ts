@@ -19,7 +19,7 @@ function countLines(on: Ground): Line[] {
   const largest = [...regions].sort((a, b) => (on.number(`regionCells@${b}`) ?? 0) - (on.number(`regionCells@${a}`) ?? 0))[0] as string;
   const share = (on.number(`regionCells@${largest}`) ?? 0) / (on.number('regionCells') ?? 1);
   return lines(
-    `The medium mesh has {cellCount} cells in ${on.number('meshDimension') === 2 ? 'two' : 'three'} directions: cells of {coreCellSize} away from walls, {coreCellsMedium} of them over the core length {coreLength}.`,
+    `The medium mesh has {cellCount} cells in ${on.number('meshDimension') === 2 ? 'two' : 'three'} directions: cells of {coreCellSize} away from walls${Math.abs((on.number('coreCellSize') ?? 0) * (on.number('coreCellsMedium') ?? 0) / (on.number('coreLength') ?? 1) - 1) < 1e-6 ? ', {coreCellsMedium} of them over the core length {coreLength}' : ''}.`,
     regions.length > 1 && `Most of them, ${Math.round(100 * share)} %, lie in the region ${largest}: coarsening along it is where cells are saved first, the layers at the wall are where none may be.`,
     (on.number('cutShare') ?? 1) < 1 && `The cuts leave {cutShare} of the region to be meshed.`,
     on.has('cellCountLes') && `Resolving the large eddies of the same walls would take about {cellCountLes} cells, resolving all {cellCountDns}.`,
@@ -57,7 +57,7 @@ function familyLines(on: Ground): Line[] {
   return lines(
     `Three meshes at a linear ratio of {refinementRatio} keep blocks, laws and end points; every edge is a multiple of {countMultiple} cells, so that they coarsen exactly.`,
     law ? 'The distance of the first node stays the same in all three, for moving it changes the model; the law of the wall is tested apart, at twice the distance.' : on.has('firstCellHeight') && 'The cell at the wall scales with the mesh: check that the coarsest still meets its height, and let the growth of a layer rise to the power {refinementRatio} there.',
-    on.has('meshError') && `Expected error of the medium mesh {meshError} (wall {wallError}, core {coreError}), to be believed within a factor of 3, at the order {plannedOrder}; ${enough ? 'it fits' : fineEnough ? 'the fine mesh, not the medium, fits' : 'no mesh of the family fits'} the share {meshTolerance} that the accuracy asked leaves to the mesh, which needs about {cellCountNeeded} cells.`,
+    on.has('meshError') && `Expected error of the medium mesh {meshError} (${on.has('wallError') ? 'wall {wallError}, ' : ''}core {coreError}), to be believed within a factor of 3, at the order {plannedOrder}; ${enough ? 'it fits' : fineEnough ? 'the fine mesh, not the medium, fits' : 'no mesh of the family fits'} the share {meshTolerance} that the accuracy asked leaves to the mesh, which needs about {cellCountNeeded} cells.`,
     on.has('meshChange') && 'From medium to fine the target should move by {meshChange}: three times that, or a third of it, means misjudged layers or no asymptotic range.',
   );
 }

@@ -25,7 +25,8 @@ function schemeLines(on: Ground): Line[] {
 }
 
 function diffusionLines(on: Ground): Line[] {
-  if (!on.has('numericalShare')) return [];
+  if (!on.has('numericalShare') || on.word('flowClass') === 'continuum') return [];
+  if (!['none', 'rans'].includes(on.choice('turbulence-treatment').chosen)) return lines('Mesh and scheme add {numericalDiffusion} in the core, {numericalShare} of the molecular diffusion there; it must stay below what the unresolved eddies are given.');
   const share = on.number('numericalShare') ?? 0;
   const solved = on.has('effectiveSchmidt') ? 'you will be solving Sc {effectiveSchmidt}, not {schmidt}' : on.has('effectivePeclet') ? 'you will be solving Pe {effectivePeclet}, not {peclet}' : 'you will be solving Re {effectiveReynolds}, not {reynolds}';
   const verdict = share <= 0.1 ? 'a tenth or less, it may stand' : share <= 1 ? 'more than a tenth, so refine or raise the scheme where the target is made' : 'more than the flow itself: the mesh sets the answer there';
@@ -84,7 +85,7 @@ function solveLines(on: Ground): Line[] {
   if (!on.has('cellCount')) return [];
   const cells = on.number('cellCount') ?? 0;
   const aspect = on.number('wallAspectRatio') ?? 1;
-  return lines(`The pressure solve has {cellCount} unknowns at a condition number of {pressureCondition}: ${cells > 5e4 ? 'multigrid' : cells > 1e3 ? 'conjugate gradients with an incomplete factor, or a direct solve in two directions' : 'a direct solve'}${aspect > 3 && cells > 5e4 ? `, coarsened across the layers first, for points stall at an aspect of {wallAspectRatio}` : ''}.`);
+  return lines(`The pressure solve has {cellCount} unknowns${on.has('pressureCondition') ? ' at a condition number of {pressureCondition}' : ''}: ${cells > 5e4 ? 'multigrid' : cells > 1e3 ? 'conjugate gradients with an incomplete factor, or a direct solve in two directions' : 'a direct solve'}${aspect > 3 && cells > 5e4 ? `, coarsened across the layers first, for points stall at an aspect of {wallAspectRatio}` : ''}.`);
 }
 
 function checks(on: Ground): Check[] {
