@@ -33,7 +33,11 @@ const featureKeys: Readonly<Record<(typeof features)[number], (on: Case, walls: 
   gravity: (c) => c.has('gravity'),
   sources: (c) => c.has('sources') || c.has('drive.heatRelease'),
   wallMotion: (_, w) => any(w, 'speed') || any(w, 'rotation'),
+  partHeated: (_, w) => { const heated = [...w.values()].filter((keys) => heating.some((key) => keys.has(key))).length; return heated > 0 && heated < w.size; },
 };
+
+/** Keys by which heat passes a wall. */
+const heating = ['temperature', 'heatFlux', 'heat', 'heatTransferCoefficient'];
 
 const any = (walls: WallKeys, key: string): boolean => [...walls.values()].some((keys) => keys.has(key));
 

@@ -19,6 +19,9 @@ export const conduction: Definition[] = [
     way({ needs: ['biotWall'], value: ({ biotWall }) => 1 / (1 + biotWall), formula: 'F = 1/(1 + Bi_w)', source: 'resistances in series' }),
     none,
   ]),
+  quantity('wallSpreadRatio', { symbol: 'l_f/(P/2)', name: 'how far heat spreads round the passage in the wall over half the wetted perimeter', unit: '1', per: ['wall'], plain: 'largest' }, [
+    way({ needs: ['wallAxialConductance', 'heatTransferCoefficientPlain', 'wettedPerimeter'], when: { flowClass: 'internal' }, value: ({ wallAxialConductance, heatTransferCoefficientPlain, wettedPerimeter }) => Math.sqrt(wallAxialConductance / (wettedPerimeter * heatTransferCoefficientPlain)) / (wettedPerimeter / 2), formula: 'l_f/(P/2), l_f = sqrt(k_s delta_s/h)', source: 'length of a fin that the fluid cools on one side' }),
+  ]),
   quantity('wallAxialRatio', { symbol: 'M_w', name: 'conduction along the wall over heat carried by the flow', unit: '1', per: ['wall'], plain: 'largest' }, [
     way({ needs: ['wallAxialConductance', 'flowLength', 'massFlow', 'specificHeatCapacityBulk', 'parallelPassages'], when: { flowClass: ['internal', 'continuum'] }, value: ({ wallAxialConductance, flowLength, massFlow, specificHeatCapacityBulk, parallelPassages }) => (wallAxialConductance * parallelPassages) / (flowLength * massFlow * specificHeatCapacityBulk), formula: 'M_w = (k_s A_s/L)/(m cp)', source: 'Maranzana, Perry and Maillet, Int. J. Heat Mass Transfer 47 (2004) 3993' }),
   ]),
