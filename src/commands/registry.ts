@@ -8,8 +8,10 @@ export interface Entry {
 
 /** The commands in the order of a day's work, which is the order of the overview. */
 export const COMMANDS: Readonly<Record<string, Entry>> = {
+  ask: { summary: 'an interview that asks what still matters and writes a case file', load: () => import('./ask.ts') },
   plan: { summary: 'the plan of a case: on one screen, in full, as JSON, or as files', load: () => import('./plan.ts') },
   trace: { summary: 'where a number of a plan comes from, down to inputs and sources', load: () => import('./trace.ts') },
+  compare: { summary: 'a result held against a known answer for the numbers of a case', load: () => import('./compare.ts') },
   grids: { summary: 'grid or step convergence of a table of results: order, value at size zero, band', load: () => import('./grids.ts') },
   rules: { summary: 'the decisions with their limits and sources; --check DIR checks a rule pack', load: () => import('./rules.ts') },
   reference: { summary: 'known solutions, evaluated for given inputs', load: () => import('./reference.ts') },

@@ -113,7 +113,7 @@ export const packedBed: Flow = {
   boundaries: [
     inlet('inlet', { velocity: 'value {speed}, even, superficial', turbulence: 'none: the drag law holds the turbulence of the pores' }),
     wall('wall of the bed', 'wall', {
-      velocity: [{ says: 'slips where the bed is a continuum; sticks where a layer of {brinkmanLayer} is resolved, with voids rising to 1 within {packedBedChannelling}' }, { says: 'slips where the bed is a continuum' }],
+      velocity: [{ says: 'slips where the bed is a continuum; voids rise to 1 within {packedBedChannelling}, where the fluid runs fast' }, { says: 'slips where the bed is a continuum' }],
       turbulence: 'none: the drag law holds it',
     }),
     slipping('both ends of the bed', { is: 'joined', velocity: 'joined: the same superficial speed', pressure: 'continuous', temperature: 'joined; two equations where solid and fluid differ', turbulence: 'none in the bed', species: 'joined' }),

@@ -122,8 +122,15 @@ export function ladderOf(assembled: Assembled): CaseRung[] {
  * The profiles that a run of each rung is held against.
  *
  * @param assembled  the settled case
- * @returns          tables in SI by rung; rungs whose reference has none are left out
+ * @returns          tables in SI by the name of the rung, fit for a file; rungs without tables, and those whose tables an earlier rung has, are left out
  */
 export function ladderTables(assembled: Assembled): { readonly rung: string; readonly tables: readonly EvaluatedTable[] }[] {
-  return ladderDetails(assembled).flatMap(({ rung, reference, inputs }) => { const { tables } = evaluateReference(reference, inputs); return tables.length === 0 ? [] : [{ rung: rung.id, tables }]; });
+  const seen = new Set<string>();
+  return ladderDetails(assembled).flatMap(({ rung, reference, inputs }) => {
+    const key = `${reference.id} ${JSON.stringify(inputs)}`;
+    const { tables } = evaluateReference(reference, inputs);
+    if (tables.length === 0 || seen.has(key)) return [];
+    seen.add(key);
+    return [{ rung: rung.id.replaceAll(':', '-'), tables }];
+  });
 }

@@ -32,10 +32,11 @@ function extentLine(on: Ground): string {
   const none = ends(on).filter((e) => on.number(e.id) === 0).map((e) => e.side);
   return `The region ends ${placed.length === 0 ? 'where the part ends' : listed(placed)}${none.length === 0 ? '' : `; nothing is added ${listed(none)}`}.`;
 }
-const short = (text: string): string => text.split(/[;,]/)[0] as string;
+const short = (text: string): string => (text.split(/[;,]/)[0] as string).replace(/^the /, '');
 
 function inletRun(on: Ground): string | false {
-  if (on.word('flowClass') !== 'internal') return said(on, 'The stream reaches the body undisturbed {domainUpstream} away from it.');
+  if (on.word('flowClass') === 'continuum') return said(on, 'Free space of {domainUpstream} ahead of the bed lets the stream even out before it meets the particles.');
+  if (on.word('flowClass') !== 'internal') return on.word('imposedFlow') === 'no' ? said(on, 'Still fluid is drawn in from at least {domainUpstream} away.') : said(on, 'The stream reaches the body undisturbed {domainUpstream} away from it.');
   const effect = said(on, 'Against a developed profile it makes the heat transfer {entranceFactorNusselt} times and the pressure drop {entranceFactorFriction} times as large.') || said(on, 'Against a developed profile it makes the pressure drop {entranceFactorFriction} times as large.') || '';
   if (on.word('inletProfile') === 'developed') return firstSaid(on, 'The profile is given developed at the inlet, so that no run goes ahead; to compute it instead, {entranceLength} of passage would have to be added, or a slice with repeating ends run first.', 'The profile is given developed at the inlet: no run goes ahead.');
   if (on.word('inletProfile') === 'uniform') return firstSaid(on, `An even stream enters and develops inside the region, over {entranceLength} of the {flowLength} that count. ${effect}`, `An even stream enters and develops inside the region. ${effect}`);
@@ -43,11 +44,12 @@ function inletRun(on: Ground): string | false {
 }
 
 function outletLines(on: Ground): (string | false)[] {
+  if (on.assembled.flow.domain.length === 0 || on.number('domainDownstream') === undefined) return [];
+  if (on.word('imposedFlow') === 'no') return [said(on, 'The end above, where the plume leaves, stands {domainDownstream} away.'), 'Test of the open ends after the run: no eddy stands on them and the fluid far away keeps its temperature.'];
   const behind = on.word('flowClass') === 'body' ? 'the body' : on.word('separated') === 'yes' ? 'the step' : 'the stretch that counts';
   const ahead = on.word('separated') === 'yes' && on.word('imposedFlow') === 'yes'
     ? firstSaid(on, `The outlet stands {domainDownstream} behind ${behind}, where the closed eddy ends {reattachmentLength} behind it.`, `The outlet stands {domainDownstream} behind ${behind}, beyond the wake of about {wakeLength}.`, `The outlet stands {domainDownstream} behind ${behind}.`)
     : said(on, `The outlet stands {domainDownstream} behind ${behind}, so that its even pressure does not reach back.`);
-  if (on.assembled.flow.domain.length === 0 || on.number('domainDownstream') === undefined) return [];
   return [ahead, firstSaid(on, 'Test of the outlet after the run: no more than {returningFlow} comes back through it, and contours of pressure do not bend over the last {hydraulicDiameter}.', 'Test of the outlet after the run: no fluid comes back through it near the body, and contours of pressure do not follow its shape.')];
 }
 

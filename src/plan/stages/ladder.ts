@@ -39,8 +39,14 @@ function rungTable(on: Ground, details: readonly RungDetail[]): Table {
     return [String(i), r.id, r.changes, on.has(r.quantity) ? { id: r.quantity } : 'no number for these inputs', d !== undefined && r.id !== 'manufactured-solution' && on.has(d.tolerance) ? { id: d.tolerance } : '', limitText(r), r.ifMissed];
   });
   const target = on.assembled.targets.find((t) => t.computed);
-  const last: Cell[][] = target === undefined ? [] : [[String(on.ladder.length), 'this case', 'the whole case: three meshes, the ends of the region, steps and closure as planned', { id: target.quantity }, on.has(`${target.id}.accuracyShare`) ? { id: `${target.id}.accuracyShare` } : '', on.has(`${target.id}.accuracy`) ? `within {${target.id}.accuracy} as band of all parts` : 'no accuracy asked', 'the difference to the hand estimate beyond both spreads']];
-  return table('Rungs', ['no', 'rung', 'what changes', 'predicted', 'tolerance', 'passes', 'if missed, look first at'], [...rows, ...last]);
+  const share = target === undefined ? '' : `${target.id}.accuracyShare`;
+  const last: Cell[] = [
+    String(on.ladder.length), 'this case', 'the whole case: three meshes, the ends of the region, steps and closure as planned',
+    target === undefined ? 'no estimate' : { id: target.quantity }, on.has(share) ? { id: share } : '',
+    target !== undefined && on.has(`${target.id}.accuracy`) ? `within {${target.id}.accuracy} as band of all parts` : 'no number to pass: three meshes that close in',
+    target === undefined ? 'the rung before it' : 'the difference to the hand estimate beyond both spreads',
+  ];
+  return table('Rungs', ['no', 'rung', 'what changes', 'predicted', 'tolerance', 'passes', 'if missed, look first at'], [...rows, last]);
 }
 
 function referenceTable(details: readonly RungDetail[]): Table[] {

@@ -18,7 +18,7 @@ const known: Readonly<Record<string, { readonly source: string; readonly does: R
 };
 
 /** What the target of this case hangs on. */
-export function featureOf(on: Ground): Feature {
+function featureOf(on: Ground): Feature {
   if (keeps(on, 'turbulence-buoyancy') || on.word('imposedFlow') === 'no') return 'buoyancy';
   if (on.word('separated') === 'yes') return 'separation';
   if (on.word('targetHeat') === 'yes') return keeps(on, 'secondary-flow') ? 'corner' : 'heat';

@@ -18,7 +18,7 @@ export function verification(on: Ground): StageResult {
 }
 
 /** The known answer that shares most with this case and is exact: its inputs come from the case itself. */
-export function sister(on: Ground): ReturnType<typeof ladderDetails>[number] | undefined {
+function sister(on: Ground): ReturnType<typeof ladderDetails>[number] | undefined {
   const exact = ladderDetails(on.assembled).filter((d) => d.reference.kind === 'exact' && d.reference.id !== 'manufactured-solution' && on.has(d.rung.quantity));
   return exact.reduce<(typeof exact)[number] | undefined>((best, d) => (best === undefined || d.from.length >= best.from.length ? d : best), undefined);
 }

@@ -19,7 +19,7 @@ export function healthMaps(on: Ground): Table {
     on.word('energySolved') === 'yes' && ['temperature below the lowest', cell(on, 'lowestTemperature', 'not known'), 'no cell at the target, one in 10 000 elsewhere', 'bounded scheme; skew cells'],
     on.word('energySolved') === 'yes' && ['temperature above the highest', cell(on, 'highestTemperature', 'not known'), 'no cell at the target, one in 10 000 elsewhere', 'bounded scheme; sign of a source'],
     keeps(on, 'cavitation') && ['absolute pressure', cell(on, 'lowestPressure', 'not known'), cell(on, 'vapourPressure', 'vapour pressure'), 'vapour forms: the case changes'],
-    ['cells in the layer', cell(on, 'cellsInLayer', 'not known'), '8 at the target', 'more layers at the wall'],
+    on.has('cellsInLayer') && ['cells in the layer', { id: 'cellsInLayer' }, '8 at the target', 'more layers at the wall'],
     ['error indicator, h^2 times second derivative', 'even', 'three times its median', 'refine there and nowhere else'],
   ];
   return table('Maps of health', ['map', 'expected', 'limit', 'beyond it'], rows.filter((r): r is Cell[] => r !== false));
@@ -32,7 +32,7 @@ export function derived(on: Ground): Table {
     internal && on.word('energySolved') === 'yes' && ['bulk temperature', 'integral of rho u c_p T over that of rho u c_p, over the section', cell(on, 'outletTemperature', 'at the outlet')],
     on.word('energySolved') === 'yes' && ['heat-transfer coefficient', internal ? 'wall flux over wall less bulk temperature at the same place; as mean: flux over the logarithmic mean difference' : on.word('flowClass') === 'enclosure' ? 'mean flux over hot less cold wall' : 'wall flux over wall less undisturbed temperature; radiation apart', cell(on, 'heatTransferCoefficient', 'not known')],
     on.word('energySolved') === 'yes' && ['wall heat flux', 'the flux that the scheme itself passes through the face, not a difference of plotted temperatures', cell(on, 'wallHeatFlux', 'not known')],
-    internal && ['pressure drop', 'difference of area means of pressure between equal sections; total pressure weighted by flow where sections differ', cell(on, 'pressureDrop', 'not known')],
+    (internal || on.word('flowClass') === 'continuum') && on.has('pressureDrop') && ['pressure drop', 'difference of area means of pressure between equal sections; total pressure weighted by flow where sections differ', cell(on, 'pressureDrop', 'not known')],
     internal && ['friction factor', 'from the pressure fall and from the wall shear: equal within 1 % where the flow is developed', cell(on, 'frictionFactorDarcy', 'not known')],
     on.has('dragCoefficient') && ['drag coefficient', 'pressure and friction parts apart, summed over the closed surface, on the frontal area', { id: 'dragCoefficient' }],
     on.word('separated') === 'yes' && on.has('reattachmentLength') && on.word('flow') === 'backward-step' && ['reattachment', 'zero of the mean wall shear, interpolated', { id: 'reattachmentLength' }],

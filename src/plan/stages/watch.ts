@@ -27,6 +27,8 @@ const heads: readonly (readonly [RegExp, (on: Ground) => boolean])[] = [
   [/^level\b[^:]*:/, (on) => on.word('axis') === undefined || on.word('axis') === 'level'],
   [/^upright\b[^:]*:/, (on) => on.word('axis') === undefined || on.word('axis') === 'upright'],
   [/^[^:]*\bheated\b[^:]*:/, (on) => on.word('energySolved') === 'yes'],
+  [/Re_x|displacement|skin friction|transition at the inlet|pushes the stream|U constant/, (on) => on.word('imposedFlow') === 'yes'],
+  [/temperature|\bheat\b|^front /, (on) => on.word('energySolved') === 'yes'],
   [/^shedding\b/, (on) => on.has('sheddingFrequency')],
 ];
 
@@ -61,11 +63,12 @@ function expectedLines(on: Ground): (string | false)[] {
 function cutsTable(on: Ground): Table {
   const target = on.assembled.targets[0];
   const rows: (Cell[] | false)[] = [
-    target !== undefined && [internal(on) ? 'line along the wall and on the axis' : on.word('flowClass') === 'enclosure' ? 'level and upright line through the middle' : 'line along the surface', `the ${target.computed ? nameOf(on, target.quantity) : target.quantity}: where is it made`, known(on, `{${target.quantity}}`) && target.computed ? { id: target.quantity } : 'no estimate'],
+    target !== undefined && [['internal', 'continuum'].includes(on.word('flowClass') ?? '') ? 'line along the wall and on the axis' : on.word('flowClass') === 'enclosure' ? 'level and upright line through the middle' : 'line along the surface', `the ${target.computed ? nameOf(on, target.quantity) : target.quantity}: where is it made`, known(on, `{${target.quantity}}`) && target.computed ? { id: target.quantity } : 'no estimate'],
     internal(on) && ['axis, speed along it', 'is the profile developed where it should be', on.has('entranceLength') ? { id: 'entranceLength' } : 'not known'],
-    ['plane through the main direction, speed with mesh', 'does the layer grow as thick as expected, in cells enough', on.has('boundaryLayerThickness') ? { id: 'boundaryLayerThickness' } : 'not known'],
+    on.has('boundaryLayerThickness') && ['plane through the main direction, speed with mesh', 'does the layer grow as thick as expected, in cells enough', { id: 'boundaryLayerThickness' }],
     heat(on) && ['surface of the target wall, heat flux', 'is the flux smooth, without marks of the mesh', on.has('wallHeatFlux') ? { id: 'wallHeatFlux' } : on.has('heatRate') ? { id: 'heatRate' } : 'not known'],
-    on.word('separated') === 'yes' && on.word('imposedFlow') === 'yes' && ['wall shear along the wall behind the edge', 'where does the eddy close: its zero, not the speed in the first cell', on.has('reattachmentLength') ? { id: 'reattachmentLength' } : 'not known'],
+    on.word('separated') === 'yes' && on.has('reattachmentLength') && [on.word('flowClass') === 'body' ? 'line through the wake, speed along it' : 'wall shear along the wall behind the edge', 'where does the eddy close: the zero, not the speed in the first cell', { id: 'reattachmentLength' }],
+    on.word('flowClass') === 'continuum' && ['pressure along the bed', 'is the fall straight and as steep as the drag law has it', on.has('pressureDrop') ? { id: 'pressureDrop' } : 'not known'],
     (keeps(on, 'buoyancy') || keeps(on, 'buoyancy-driven')) && ['sections across the flow with vectors in the plane', 'does gravity turn the flow as it should', on.has('richardson') ? { id: 'richardson' } : on.has('rayleigh') ? { id: 'rayleigh' } : 'not known'],
     chosen(on, 'dimension-and-cuts').includes('mirror') && ['pair of points either side of the mirror, in the run of the whole', 'is the cut allowed', 'equal means'],
     boundariesOf(on).some((b) => b.is === 'outlet' || b.is === 'open') && ['outlet and open sides, normal speed', 'does fluid come back', on.has('returningFlow') ? { id: 'returningFlow' } : 'none near the target'],
