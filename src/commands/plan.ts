@@ -40,10 +40,10 @@ export default class Plan extends Base {
       this.say(screen(made, writing, { file: args.file, paint, ...(on.purpose === undefined ? {} : { purpose: on.purpose }) }));
     }
     if (flags.into !== undefined) {
-      const files = planFiles(made, writing, tablesOf(settleCase(on, options).assembled));
+      const files = planFiles(made, on, tablesOf(settleCase(on, options).assembled));
       for (const path of writeInto(flags.into, files, flags.force)) this.remark(`written: ${path}`);
     }
-    return planDocument(made, writing);
+    return this.jsonEnabled() ? planDocument(made, writing) : made;
   }
 }
 

@@ -17,7 +17,7 @@ export interface FlipAt {
   readonly verdict: Verdict;
 }
 
-const points = 15;
+const points = 9;
 const within = 1e-4;
 
 /**

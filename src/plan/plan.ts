@@ -105,14 +105,14 @@ function decidingIds(rules: CompiledRules, workings: Workings): string[] {
   return [...workings.index.keys()].filter((id) => plain.has(id.split('@')[0] as string));
 }
 
-/** Inputs with a number, from a thirtieth to thirty times it; temperatures within 100 K. */
+/** Inputs with a number, from a tenth to ten times it; temperatures within 60 K. */
 function flipInputs(assembled: Assembled): FlipInput[] {
   return assembled.leaves.flatMap(({ path, unit }) => {
     const given = assembled.case.get(path);
     const value = given?.value;
     if (typeof value !== 'number' || !Number.isFinite(value) || path.startsWith('computing.')) return [];
-    if (unit === 'K') return [{ path, lo: Math.max(1, value - 100), hi: value + 100 }];
-    return value > 0 ? [{ path, lo: value / 30, hi: value * 30 }] : [];
+    if (unit === 'K') return [{ path, lo: Math.max(1, value - 60), hi: value + 60 }];
+    return value > 0 ? [{ path, lo: value / 10, hi: value * 10 }] : [];
   });
 }
 

@@ -40,7 +40,7 @@ export interface Closed {
   readonly change: number;
 }
 
-const mostPasses = 80;
+const mostPasses = 60;
 
 /** All quantities of a case, resolved on demand. Replace given numbers by `set` and ask again: the same graph serves every point of a sweep. */
 export class Workings {
@@ -445,17 +445,25 @@ export class Workings {
     let r0 = trial(x0) - x0;
     if (Number.isNaN(r0)) return undefined;
     if (Math.abs(r0) <= within * Math.abs(x0)) return this.#closedAt(i, x0, 1, r0);
-    // The slope of the last time serves until a new one is known.
+    // The slope of the last time serves until a new one is known. Once the residual has changed its sign, the root stays between the two ends:
+    // where a word changes on the way it may jump over zero, and the loop then rests at the jump.
     const known = this.#slopes.get(i);
     let x = x0 + (known === undefined ? r0 : -r0 / known);
+    let end: { x: number; r: number } | undefined;
     for (let passes = 2; passes <= mostPasses && Number.isFinite(x); passes++) {
       const r = trial(x) - x;
+      if (Number.isNaN(r)) return undefined;
       if (Math.abs(r) <= within * Math.abs(x)) return this.#closedAt(i, x, passes, r);
+      if (r * r0 < 0) end = { x: x0, r: r0 };
+      if (end !== undefined && Math.abs(end.x - x) <= Math.max(within, 1e-9) * Math.abs(x)) return this.#closedAt(i, x, passes, r);
       const slope = (r - r0) / (x - x0);
       const step = -r / slope;
-      if (Number.isFinite(step) && step !== 0) this.#slopes.set(i, slope);
+      const good = Number.isFinite(step) && step !== 0;
+      if (good) this.#slopes.set(i, slope);
+      const stuck = end !== undefined && Math.abs(r) > 0.5 * Math.abs(r0);
       [x0, r0] = [x, r];
-      x += Number.isFinite(step) && Math.abs(step) <= 5 * Math.abs(r) ? step : r;
+      x += good && Math.abs(step) <= 5 * Math.abs(r) ? step : r;
+      if (end !== undefined && (stuck || (x - x0) * (x - end.x) >= 0)) x = (x0 + end.x) / 2;
     }
     this.failures.set(i, { code: 'loop-open', message: `${this.slots[i]?.id ?? ''}: the loop ${b.way.formula} did not close in ${mostPasses} passes (last residual ${r0.toExponential(1)})` });
     return undefined;
