@@ -1,7 +1,7 @@
 export { compileRules, noRules, type RuleFile } from './compile.ts';
 export type { ChoiceDecision } from './decide-choice.ts';
 export { decide, type DecideOptions, type Decisions, type EffectDecision } from './decide.ts';
-export type { EffectState } from './effects.ts';
+export { lackingOf, type EffectState } from './effects.ts';
 export { exampleOutcomes, type ExampleOutcome } from './examples.ts';
 export { everyFact } from './every-fact.ts';
 export { flips, type FlipAt, type FlipInput } from './flips.ts';
