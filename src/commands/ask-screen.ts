@@ -39,8 +39,8 @@ export function questionLines(question: Question, number: number, paint: ChalkIn
   ];
 }
 
-/** An example, where no list of words tells enough. */
-const suchAs = ({ example, offers }: Question): string => (example === '' || offers.length > 0 ? '' : `such as ${example}`);
+/** An example, where the list of words does not tell enough. */
+const suchAs = ({ example, offers }: Question): string => (example === '' || offers.some(({ word }) => word === example) ? '' : `such as ${example}`);
 
 /** `inlet.volumeFlow` beside `inlet.speed` is `volumeFlow`. */
 function shared(first: string, other: string): string {

@@ -1,4 +1,4 @@
-import { existsSync, readFileSync } from 'node:fs';
+import { existsSync, readFileSync, statSync } from 'node:fs';
 import { basename, dirname } from 'node:path';
 import about from '../../package.json' with { type: 'json' };
 import { vocabulary } from '../assemble/index.ts';
@@ -84,9 +84,19 @@ export default class Ask extends Base {
     const found = { end, unknown: [...state.unknown.keys()], text };
     if (!save) return found;
     if (file === undefined) this.say(text.trimEnd());
-    else for (const path of writeInto(dirname(file), [{ name: basename(file), text }], true)) this.remark(`written: ${path}`);
+    else this.#write(file, text);
     if (end === 'stopped') this.remark(file === undefined ? 'In a file, this is gone on with by runbrief ask --into FILE.' : `runbrief ask --into ${file} goes on from it.`);
     return file === undefined ? found : { ...found, file };
+  }
+
+  /** Writes the file; where that fails, the case is printed, so that no answer is lost. */
+  #write(file: string, text: string): void {
+    try {
+      for (const path of writeInto(dirname(file), [{ name: basename(file), text }], true)) this.remark(`written: ${path}`);
+    } catch (error) {
+      this.say(text.trimEnd());
+      throw error;
+    }
   }
 }
 
@@ -101,9 +111,10 @@ function goneOn(file: string, force: boolean, settle: Settle): State {
 
 function textOf(file: string): string {
   try {
-    const bytes = readFileSync(file);
-    if (bytes.length > largestAnswers) throw new Problem({ code: 'too-large', message: `${file} has more than 256 kB`, expected: 'a list of answers' });
-    return bytes.toString('utf8');
+    const found = statSync(file); // before opening: a pipe would block
+    if (!found.isFile()) throw new Problem({ code: 'no-file', message: `${file} is not a file`, expected: 'a file with lines of `path: value`' });
+    if (found.size > largestAnswers) throw new Problem({ code: 'too-large', message: `${file} has more than 256 kB`, expected: 'a list of answers' });
+    return readFileSync(file, 'utf8');
   } catch (error) {
     if (error instanceof Problem) throw error;
     throw new Problem({ code: 'missing-file', message: `${file} cannot be read`, expected: 'the path of a file with lines of `path: value`' });

@@ -91,6 +91,15 @@ describe('at a terminal', () => {
     expect(one.seen).toContain('nothing is saved');
     expect(existsSync(at('none.case.yaml'))).toBe(false);
   });
+
+  it('without a file, escape asks for the name of one', { timeout: 60_000 }, async () => {
+    const one = new Terminal(['ask', '--flow', 'plate']);
+    await one.answer('fluid.material', 'air\r');
+    await one.answer('sizes.length', '\u001b');
+    await one.answer('The name of a new file', 'named.case.yaml\r');
+    expect(await one.ended).toBe(0);
+    expect(readFileSync(at('named.case.yaml'), 'utf8')).toMatch(/^ {2}material: air/m);
+  });
 });
 
 describe('without a terminal', () => {
@@ -135,6 +144,13 @@ describe('without a terminal', () => {
     expect(await runbrief(['ask', '--answers', at('bare.txt'), '--flow', 'pip'])).toMatchObject({ code: 1, stderr: expect.stringContaining('nearest   pipe') as string });
     expect(await runbrief(['ask', '--answers', at('wrong.txt')])).toMatchObject({ code: 1, stderr: expect.stringContaining('sizes.diameter') as string });
     expect(await runbrief(['ask', '--answers', at('not-there.txt')])).toMatchObject({ code: 1 });
+    expect(await runbrief(['ask', '--answers', folder])).toMatchObject({ code: 1 });
+  });
+
+  it('prints the case where its file cannot be written', async () => {
+    writeFileSync(at('known.txt'), known);
+    const { code, stdout } = await runbrief(['ask', '--answers', at('known.txt'), '--into', join(at('known.txt'), 'x.yaml')]);
+    expect([code, stdout.includes('flow: pipe')]).toEqual([1, true]);
   });
 
   it('gives one document with --json', async () => {

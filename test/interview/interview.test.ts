@@ -138,7 +138,7 @@ describe('after the start', () => {
   it('an assumption is asked for only where another answer would change a decision', async () => {
     let state = begun('plate');
     while (asked(state).paths[0] !== 'sizes.width') state = said(state, 'unknown');
-    expect(asked(state).settles).toEqual(['three-dimensionality']);
+    expect(asked(state).settles).toContain('three-dimensionality');
     const wide = await planned(talk.caseOf(said(state, 'infinite')));
     const narrow = await planned(talk.caseOf(said(state, '50 mm')));
     const verdict = (of: Plan): unknown => of.effects.find((effect) => effect.id === 'three-dimensionality')?.verdict;
