@@ -145,12 +145,7 @@ function follows(workings: Workings, from: string, to: string): boolean {
 type Pin = readonly [id: string, value: number];
 /** Reads with quantities pinned, and sets them free again. */
 function withPins<T>(workings: Workings, pins: readonly Pin[], read: () => T): T {
-  const known = pins.filter(([id, value]) => workings.has(id) && !Number.isNaN(value));
-  const before = known.map(([id]) => (workings.isPinned(workings.index.get(id) as number) ? workings.get(id) : undefined));
-  for (const [id, value] of known) workings.set(id, value);
-  const out = read();
-  known.forEach(([id], k) => workings.set(id, before[k]));
-  return out;
+  return workings.aside(pins.filter(([id, value]) => workings.has(id) && !Number.isNaN(value)), read);
 }
 
 const short = (x: number): string => String(Number(x.toPrecision(4)));

@@ -1,4 +1,3 @@
-import { createHash } from 'node:crypto';
 import { basename } from 'node:path';
 import { assemble, type Assembled } from '../assemble/index.ts';
 import type { Case } from '../case/index.ts';
@@ -19,6 +18,8 @@ export interface PlanOptions {
   readonly materials?: Collection;
   /** Seek the values at which each input flips a verdict: costs a scan per input. */
   readonly flips?: boolean;
+  /** Sections to write; the others stay empty. All unless given: a screen needs few of them. */
+  readonly sections?: readonly SectionName[];
 }
 
 /** The graph of a case with its decisions settled: what `plan`, `trace`, `vary` and the interview stand on. */
@@ -74,7 +75,8 @@ export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
   const decisions = await decide(workings, rules, targets, { ...decideOptions, settled: state, ...(options.flips === true ? { inputs: flipInputs(assembled) } : {}) });
   const ladder = ladderOf(assembled);
   const ground = groundOf(assembled, decisions, ladder);
-  const built = Object.fromEntries(sectionNames.map((name) => [name, stages[name](ground)])) as Record<SectionName, StageResult>;
+  const wanted = options.sections ?? sectionNames;
+  const built = Object.fromEntries(sectionNames.map((name) => [name, wanted.includes(name) ? stages[name](ground) : { lines: [], tables: [] }])) as Record<SectionName, StageResult>;
   const contradictions = contradictionsOf(ground);
   const ids = closure(workings, namedIds(built, decisions, assembled, ladder));
   const spread = spreads(workings, ids);
@@ -83,7 +85,7 @@ export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
   return {
     program: `runbrief ${options.version}`,
     format: 1,
-    case: { file: basename(on.file), title: on.title ?? '', sha256: createHash('sha256').update(on.text).digest('hex') },
+    case: { file: basename(on.file), title: on.title ?? '', sha256: await digest(on.text) },
     targets: assembled.targets.map(planTarget),
     quantities: quantitiesOf(workings, ids, spread, range),
     effects: decisions.effects as readonly PlanEffect[],
@@ -93,6 +95,12 @@ export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
     checklist: sectionNames.flatMap((name) => built[name].checklist ?? []) as readonly Check[],
     contradictions,
   };
+}
+
+/** Digest of the case file; the library behind it is loaded only here, since few commands need it. */
+async function digest(text: string): Promise<string> {
+  const { createHash } = await import('node:crypto');
+  return createHash('sha256').update(text).digest('hex');
 }
 
 function planTarget({ id, quantity, place, mean, within, computed }: Assembled['targets'][number]): PlanTarget {

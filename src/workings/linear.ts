@@ -1,9 +1,10 @@
 import type { Slot, Workings } from './resolve.ts';
 
-const small = 1e-5;
+/** Wide enough to pass the last digit of a rounded count, narrow enough for a slope good to six digits. */
+const small = 1e-3;
 const mostLoops = 24;
-/** Above this slope in logarithms a step of 1e-5 has crossed a stair (a count rounded up), not followed a law. */
-const steepest = 50;
+/** Above this slope in logarithms a small step has crossed a stair (a count rounded up to a multiple), not followed a law. */
+const steepest = 5;
 
 /** Whether a slot spreads by plus and minus: temperatures, what can change sign, zero and below. */
 export function adds(workings: Workings, i: number): boolean {

@@ -182,6 +182,37 @@ export class Workings {
     this.#knowable = undefined;
   }
 
+  /**
+   * What would be read with quantities pinned; the graph stands as before afterwards, every number where it was.
+   *
+   * @param pins  ids and the values they are pinned to
+   * @param read  reads what is wanted
+   */
+  aside<T>(pins: readonly (readonly [string, number | string])[], read: () => T): T {
+    const kept = { value: this.#value.slice(), base: this.#base.slice(), stamp: this.#stamp.slice(), pinned: this.#pinned.slice(), word: [...this.#word], used: [...this.used] };
+    const { version } = this;
+    const knowable = this.#knowable;
+    const closed = [...this.closed];
+    const failures = [...this.failures];
+    for (const [id, value] of pins) this.set(id, value);
+    try {
+      return read();
+    } finally {
+      this.#value.set(kept.value);
+      this.#base.set(kept.base);
+      this.#stamp.set(kept.stamp);
+      this.#pinned.set(kept.pinned);
+      kept.word.forEach((w, i) => { this.#word[i] = w; });
+      kept.used.forEach((u, i) => { this.used[i] = u; });
+      this.#knowable = knowable;
+      this.closed.clear();
+      for (const [i, c] of closed) this.closed.set(i, c);
+      this.failures.clear();
+      for (const [i, f] of failures) this.failures.set(i, f);
+      this.version = version;
+    }
+  }
+
   isPinned(i: number): boolean { return this.#pinned[i] === 1; }
 
   /** Moves one source of spread by so many 95 % half-widths. */
