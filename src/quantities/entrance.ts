@@ -7,6 +7,8 @@ const gnielinskiEntrance = 'entrance factor of Hausen, as in Gnielinski, Int. Ch
 
 /** Mean over developed Nusselt number of a wall with uniform flux in a round tube, x* = 1/Gz. */
 const meanUniformFlux = (gz: number): number => (gz >= 1 / 0.03 ? 1.953 * Math.cbrt(gz) : 4.364 + 0.0722 * gz) / 4.364;
+/** The same between plates that both give one flux, on the hydraulic diameter. */
+const meanFluxBetweenPlates = (gz: number): number => (gz >= 1000 ? 2.236 * Math.cbrt(gz) : gz >= 100 ? 2.236 * Math.cbrt(gz) + 0.9 : 8.235 + 0.0364 * gz) / 8.235;
 /** The same between plates of one temperature, on the hydraulic diameter. */
 const meanBetweenPlates = (gz: number): number => (gz >= 2000 ? 1.849 * Math.cbrt(gz) : gz >= 1 / 0.006 ? 1.849 * Math.cbrt(gz) + 0.6 : 7.541 + 0.0235 * gz) / 7.541;
 
@@ -20,7 +22,8 @@ export const entrance: Definition[] = [
   ]),
   quantity('entranceFactorNusselt', { symbol: 'F_e,Nu', name: 'mean over developed Nusselt number', unit: '1' }, [
     way({ needs: [], when: { energySolved: 'no' }, value: () => 1, formula: 'F = 1', source: 'one temperature throughout' }),
-    way({ needs: ['graetz', 'prandtlBulk'], when: { flowClass: 'internal', regime: 'laminar', wallKind: 'flux' }, scatter: 0.05, range: { graetz: [0, 1e5] }, value: ({ graetz }) => meanUniformFlux(graetz), formula: 'F = 1.953 Gz^(1/3)/4.364, (4.364 + 0.0722 Gz)/4.364 below Gz = 33', source: shahLondon, note: 'round tube; other sections alike within the scatter' }),
+    way({ needs: ['graetz'], when: { flowClass: 'internal', regime: 'laminar', ductSection: 'flat', wallKind: 'flux' }, scatter: 0.05, range: { graetz: [0, 1e5] }, value: ({ graetz }) => meanFluxBetweenPlates(graetz), formula: 'F = (2.236 Gz^(1/3) + 0.9)/8.235, without 0.9 from Gz = 1000, (8.235 + 0.0364 Gz)/8.235 below 100', source: shahLondon }),
+    way({ needs: ['graetz', 'prandtlBulk'], when: { flowClass: 'internal', regime: 'laminar', wallKind: 'flux' }, scatter: 0.05, range: { graetz: [0, 1e5] }, value: ({ graetz }) => meanUniformFlux(graetz), formula: 'F = 1.953 Gz^(1/3)/4.364, (4.364 + 0.0722 Gz)/4.364 below Gz = 33', source: shahLondon, note: 'round tube; rectangular sections alike within the scatter' }),
     way({ needs: ['graetz'], when: { flowClass: 'internal', regime: 'laminar', ductSection: 'flat' }, scatter: 0.05, range: { graetz: [0, 1e5] }, value: ({ graetz }) => meanBetweenPlates(graetz), formula: 'F = (1.849 Gz^(1/3) + 0.6)/7.541, (7.541 + 0.0235 Gz)/7.541 below Gz = 167', source: shahLondon }),
     way({ needs: ['graetz'], when: { flowClass: 'internal', regime: 'laminar', inletProfile: 'developed' }, scatter: 0.03, range: { graetz: [0, 1e4] }, value: ({ graetz }) => laminarMeanNusselt({ graetz, prandtl: 1e12 }) / 3.657, formula: 'F = {3.657/tanh(2.264 Gz^(-1/3) + 1.7 Gz^(-2/3)) + 0.0499 Gz tanh(1/Gz)}/3.657', source: 'Baehr and Stephan, Heat and Mass Transfer, developed velocity profile' }),
     way({ needs: ['graetz', 'prandtlBulk'], when: { flowClass: 'internal', regime: 'laminar' }, scatter: 0.05, range: { graetz: [0, 1e4], prandtlBulk: [0.1, 1e5] }, value: ({ graetz, prandtlBulk }) => laminarMeanNusselt({ graetz, prandtl: prandtlBulk }) / 3.657, formula: 'as for a developed profile, over tanh(2.432 Pr^(1/6) Gz^(-1/6))', source: 'Baehr and Stephan, Heat and Mass Transfer, simultaneous entrance' }),

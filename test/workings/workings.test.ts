@@ -134,6 +134,13 @@ describe('spreads', () => {
       expect((s?.high ?? 0) / diameter, String(diameter)).toBeLessThan(1.34);
     }
   });
+  it('do not follow the last digit of a rounded count', () => {
+    const cells = [quantity('cells', { symbol: 'n', name: 'cells', unit: '1' }, [way({ needs: ['diameter'], value: ({ diameter }) => Math.round(diameter), formula: 'n = D, rounded', source: 'test' })])];
+    for (const diameter of [3690.5, 3691, 29999.99]) {
+      const s = spreads(make({ diameter: { value: diameter, half: 0.3, relative: true } }, cells), ['cells']).get('cells');
+      expect(Math.abs((s?.high ?? 0) / (1.3 * diameter) - 1), String(diameter)).toBeLessThan(0.06); // one in 7 counts at the least
+    }
+  });
   it('are sampled across a change of word', () => {
     const s = spreads(make({ ...water, speed: { value: 0.11, half: 0.02 } }), ['friction']).get('friction');
     expect(s?.how).toBe('sampled');
