@@ -35,8 +35,13 @@ for (const run of runs) run.memory = memoryOf(run.args);
 
 const median = (times) => times.toSorted((a, b) => a - b)[Math.floor(times.length / 2)];
 process.stdout.write(`${'start of'.padEnd(22)}${'least ms'.padStart(10)}${'median ms'.padStart(11)}${'x bare'.padStart(8)}${'MB'.padStart(7)}  exit\n`);
+const plan = runs.at(-1);
 for (const { name, times, memory, code } of runs) {
   const shown = [Math.min(...times), median(times)].map((ms) => ms.toFixed(0));
   const bare = median(times) / median(runs[0].times);
   process.stdout.write(`${name.padEnd(22)}${shown[0].padStart(10)}${shown[1].padStart(11)}${bare.toFixed(1).padStart(8)}${memory.toFixed(0).padStart(7)}  ${code}\n`);
+}
+if (plan.name === 'runbrief plan') {
+  const ratio = median(plan.times) / median(runs[0].times);
+  process.stdout.write(`a plan takes ${ratio.toFixed(1)} times a bare start (limit 4) and ${plan.memory.toFixed(0)} MB (limit 120): ${ratio <= 4 && plan.memory <= 120 ? 'held' : 'MISSED'}\n`);
 }

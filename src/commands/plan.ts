@@ -33,7 +33,7 @@ export default class Plan extends Base {
     const far = flags.full || flags.into !== undefined || this.jsonEnabled();
     const made = await plan(on, { ...options, version: about.version, ...(far ? { flips: true } : { sections: ['cautions'] }) });
     const writing = writingOf(made.quantities, on);
-    if (flags.full) this.say(asText(planBlocks(made, writing)));
+    if (flags.full) this.say(asText(planBlocks(made, writing, false)));
     else {
       const chalk = await this.colours();
       const paint = { strong: chalk.bold, warn: chalk.yellow.bold };

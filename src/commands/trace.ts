@@ -26,8 +26,7 @@ export default class Trace extends Base {
     const { assembled } = settleCase(on, ownData(flags));
     const steps = trace(assembled.workings, args.id);
     if (steps.length === 0) throw new Problem(why(assembled, args.id));
-    const spread = spreads(assembled.workings, [args.id]).get(args.id);
-    const traced = { id: args.id, steps, ...(spread === undefined ? {} : { spread }) };
+    const traced = { id: args.id, steps, spreads: spreads(assembled.workings, steps.map((step) => step.id)) };
     this.say(traceText(traced, on));
     return traceDocument(traced);
   }

@@ -1,5 +1,5 @@
 import { randomBytes } from 'node:crypto';
-import { lstatSync, mkdirSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import { lstatSync, mkdirSync, renameSync, rmSync, statSync, writeFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { Problem } from '../problems/index.ts';
 
@@ -15,28 +15,39 @@ import { Problem } from '../problems/index.ts';
  */
 export function writeInto(folder: string, files: readonly { readonly name: string; readonly text: string }[], force: boolean): string[] {
   const paths = files.map(({ name }) => join(folder, ...name.split('/')));
-  const existing = paths.filter((path) => kindOf(path) !== undefined);
-  const blocked = existing.filter((path) => kindOf(path) === 'folder');
-  if (blocked.length > 0) throw new Problem(blocked.map((path) => ({ code: 'not-written', message: `${path} is a folder`, expected: 'another folder for the files' })));
-  if (existing.length > 0 && !force) throw new Problem(existing.map((path) => ({ code: 'would-overwrite', message: `${path} exists`, expected: 'another folder, or --force to overwrite' })));
-  const below = new Set(files.filter(({ name }) => name.includes('/')).map(({ name }) => join(folder, dirname(name))));
-  for (const path of below) if (kindOf(path) === 'other') throw new Problem({ code: 'not-written', message: `${path} is not a folder of its own`, expected: 'a folder, no link and no file' });
+  const below = [...new Set(files.filter(({ name }) => name.includes('/')).map(({ name }) => join(folder, dirname(name))))];
   const passing = paths.map((path) => join(dirname(path), `.${randomBytes(6).toString('hex')}.part`));
+  const begun: string[] = [];
   try {
-    mkdirSync(folder, { recursive: true });
-    for (const path of below) mkdirSync(path, { recursive: true });
-    files.forEach(({ text }, i) => writeFileSync(passing[i] as string, text, { flag: 'wx' }));
+    refuse(folder, paths, below, force);
+    for (const path of [folder, ...below]) mkdirSync(path, { recursive: true });
+    files.forEach(({ text }, i) => {
+      begun.push(passing[i] as string);
+      writeFileSync(passing[i] as string, text, { flag: 'wx' });
+    });
     paths.forEach((path, i) => renameSync(passing[i] as string, path));
   } catch (error) {
-    for (const path of passing) rmSync(path, { force: true });
-    const code = (error as NodeJS.ErrnoException).code;
-    throw new Problem({ code: 'not-written', message: `${folder} cannot be written: ${code === 'EEXIST' || code === 'ENOTDIR' ? 'it is a file' : code === 'EACCES' || code === 'EPERM' || code === 'EROFS' ? 'that is not allowed' : code === 'ENOSPC' ? 'the disk is full' : (code ?? 'unknown reason')}`, expected: 'a folder that can be written to' });
+    if (error instanceof Problem) throw error;
+    for (const path of begun) rmSync(path, { force: true });
+    const code = (error as NodeJS.ErrnoException).code ?? 'unknown reason';
+    throw new Problem({ code: 'not-written', message: `${folder} cannot be written: ${reasons[code] ?? code}`, expected: 'a folder that can be written to' });
   }
   return paths;
 }
 
+const reasons: Readonly<Record<string, string>> = { EEXIST: 'a file stands in its path', ENOTDIR: 'a file stands in its path', EACCES: 'that is not allowed', EPERM: 'that is not allowed', EROFS: 'that is not allowed', ENOSPC: 'the disk is full', ENAMETOOLONG: 'the name is too long' };
+
+function refuse(folder: string, paths: readonly string[], below: readonly string[], force: boolean): void {
+  const expected = 'a folder, or a name that does not exist yet';
+  if (statSync(folder, { throwIfNoEntry: false })?.isDirectory() === false) throw new Problem({ code: 'not-written', message: `${folder} is a file`, expected });
+  for (const path of below) if (kindOf(path) === 'other') throw new Problem({ code: 'not-written', message: `${path} is no folder but a file or a link`, expected });
+  const existing = paths.filter((path) => kindOf(path) !== undefined);
+  for (const path of existing) if (kindOf(path) === 'folder') throw new Problem({ code: 'not-written', message: `${path} is a folder`, expected: 'another folder for the files' });
+  if (existing.length > 0 && !force) throw new Problem(existing.map((path) => ({ code: 'would-overwrite', message: `${path} exists`, expected: 'another folder, or --force to overwrite' })));
+}
+
+/** What stands at a path itself, links not followed. */
 function kindOf(path: string): 'folder' | 'other' | undefined {
   const about = lstatSync(path, { throwIfNoEntry: false });
-  if (about === undefined) return undefined;
-  return about.isDirectory() ? 'folder' : 'other';
+  return about === undefined ? undefined : about.isDirectory() ? 'folder' : 'other';
 }

@@ -8,6 +8,8 @@ export interface Part {
   readonly least: number;
   /** An empty line stands before it. */
   readonly apart?: true;
+  /** How many things each item holds, where that is more than one. */
+  readonly counts?: readonly number[];
   /** Its label warns. */
   readonly warns?: true;
 }
@@ -19,7 +21,7 @@ export interface Paint {
 }
 export const noPaint: Paint = { strong: (text) => text, warn: (text) => text };
 
-export const gutter = 12;
+export const gutter = 11;
 
 /**
  * Parts as lines behind a column of labels, cut to a height: the part with most to spare gives up its least important item, and says how many are hidden.
@@ -46,7 +48,7 @@ export function fitted(parts: readonly Part[], height: number, paint: Paint): st
 }
 
 function linesOf(part: Part, shown: number): string[] {
-  const hidden = part.items.length - shown;
+  const hidden = part.items.slice(shown).reduce((sum, _, i) => sum + (part.counts?.[shown + i] ?? 1), 0);
   return [...part.items.slice(0, shown).flatMap((item) => item.split('\n')), ...(hidden > 0 ? [`and ${hidden} more (--full)`] : [])];
 }
 
@@ -66,6 +68,11 @@ export function joined(pieces: readonly string[], width: number, joint: string):
     if (longer.length <= width) line = longer;
   }
   return line;
+}
+
+/** The first of several wordings, the fullest first, that fits into a width; the last one cut where none does. */
+export function fitting(wordings: readonly string[], width: number): string {
+  return wordings.find((text) => text.length <= width) ?? cut(wordings.at(-1) ?? '', width);
 }
 
 /** Text cut between words to a width, with dots in place of the rest. */

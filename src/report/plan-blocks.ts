@@ -26,19 +26,43 @@ const titles: Readonly<Record<SectionName, string>> = {
 /**
  * The whole plan as blocks: cautions and contradictions first, the sections in their order, then every decision and every number.
  *
- * @param plan     the plan
- * @param writing  how its numbers are written
- * @returns        blocks for text, Markdown and the page
+ * @param plan         the plan
+ * @param writing      how its numbers are written
+ * @param everyNumber  a table of all quantities stands at the end; without it the command that shows them
+ * @returns            blocks for text, Markdown and the page
  */
-export function planBlocks(plan: Plan, writing: Writing): Block[] {
+export function planBlocks(plan: Plan, writing: Writing, everyNumber = true): Block[] {
   const order: readonly SectionName[] = ['cautions', ...sectionNames.filter((name) => name !== 'cautions')];
   return [
     heading(1, titled(plan)),
     paragraph(`${plan.program}; case ${oneLine(plan.case.file)}, SHA-256 ${plan.case.sha256}. An estimate made before a run: no simulation is evidence until the ladder has been climbed.`),
     ...contradictionBlocks(plan),
+    ...inShort(plan, writing),
     ...order.flatMap((name) => sectionBlocks(plan, writing, name)),
     ...decisionBlocks(plan, writing),
-    ...numberBlocks(plan, writing),
+    ...(everyNumber ? numberBlocks(plan, writing) : [paragraph('Where a number comes from: runbrief trace FILE ID. All numbers with formula and source stand in plan.md and plan.html of --into DIR.')]),
+  ];
+}
+
+/** What the one who decides has to know. */
+function inShort(plan: Plan, writing: Writing): Block[] {
+  const number = (name: string, ...ids: readonly string[]): string[][] => (ids.every((id) => plan.quantities[id] === undefined) ? [] : [[name, ids.filter((id) => plan.quantities[id] !== undefined).map((id) => writing.number(id)).join(', '), '']]);
+  const targets = plan.targets.map((t) => [`${oneLine(t.quantity)}${t.place === undefined ? '' : ` at ${oneLine(t.place)}`}`, t.computed ? writing.number(t.quantity) : 'no hand estimate', t.within === undefined ? '' : `within ${oneLine(t.within)}`]);
+  const of = (verdict: string): number => plan.effects.filter((e) => e.applies !== false && e.judged && e.verdict === verdict).length;
+  return [
+    heading(2, 'In short'),
+    ...tableOf('', ['what', 'number', 'asked'], [
+      ...targets,
+      ...number('first cell at the wall, its node', 'firstCellHeight', 'firstNodeDistance'),
+      ...number('core cell', 'coreCellSize'),
+      ...number('cells of the three meshes', 'cellCountCoarse', 'cellCountMedium', 'cellCountFine'),
+      ...number('time step', 'timeStep'),
+      ...number('run length', 'runTime'),
+      ...number('core hours', 'coreHours'),
+      ...number('time until it is done', 'wallTime'),
+      ...number('memory', 'memory'),
+    ]),
+    paragraph(`Effects: ${of('include')} included, ${of('borderline')} borderline, ${of('undecided')} open, ${of('leave-out')} left out by their numbers; ${plan.effects.filter((e) => e.applies === false).length} cannot occur here.`),
   ];
 }
 
@@ -84,6 +108,7 @@ function effectNotes(e: PlanEffect, writing: Writing): string[] {
     ...(e.check === undefined ? [] : [`Check: ${writing.fill(e.check)}.`]),
     ...(e.firstRun === undefined ? [] : [e.firstRun === 'keep' ? 'The first run keeps it.' : 'The first run leaves it out.']),
     ...((e.then ?? []).length === 0 ? [] : [`The model then needs: ${(e.then ?? []).map((t) => writing.fill(t)).join('; ')}.`]),
+    ...(e.attributes ?? []).map((a) => writing.fill(a)),
     ...((e.missing ?? []).length === 0 ? [] : [`Settled by giving ${(e.missing ?? []).map((m) => oneLine(m).replaceAll('|', ' or ')).join(', ')}.`]),
     ...((e.sources ?? []).length === 0 ? [] : [`Source: ${(e.sources ?? []).map(oneLine).join('; ')}.`]),
   ];

@@ -1,3 +1,4 @@
+import type { Case } from '../case/index.ts';
 import type { Plan } from '../plan/index.ts';
 import type { EvaluatedTable } from '../references/index.ts';
 import { asHtml } from './as-html.ts';
@@ -6,7 +7,7 @@ import { nearWallCsv } from './near-wall-csv.ts';
 import { checklistBlocks, planBlocks } from './plan-blocks.ts';
 import { planDocument } from './plan-json.ts';
 import { referenceCsv } from './reference.ts';
-import type { Writing } from './writing.ts';
+import { writingOf } from './writing.ts';
 
 /** A file to be written into the folder the user named. */
 export interface PlanFile {
@@ -26,17 +27,17 @@ export interface PlanTables {
 /**
  * Everything `plan --into` writes.
  *
- * @param plan     the plan
- * @param writing  how its numbers are written
- * @param tables   ladder and property tables
- * @returns        files in the order of their names below the folder
+ * @param plan    the plan
+ * @param on      the case, for the units that the user wrote; SI without it
+ * @param tables  ladder and property tables
+ * @returns       files with their names below the folder
  */
-export function planFiles(plan: Plan, writing: Writing, tables: PlanTables): PlanFile[] {
-  const blocks = planBlocks(plan, writing);
+export function planFiles(plan: Plan, on: Case | undefined, tables: PlanTables): PlanFile[] {
+  const writing = writingOf(plan.quantities, on);
   const nearWall = nearWallCsv(plan);
   return [
-    { name: 'plan.md', text: asMarkdown(blocks) },
-    { name: 'plan.html', text: asHtml(blocks) },
+    { name: 'plan.md', text: asMarkdown(planBlocks(plan, writing)) },
+    { name: 'plan.html', text: asHtml(planBlocks(plan, writingOf(plan.quantities, on, true))) },
     { name: 'plan.json', text: `${JSON.stringify(planDocument(plan, writing), null, 2)}\n` },
     { name: 'checklist.md', text: asMarkdown(checklistBlocks(plan, writing)) },
     ...(nearWall === undefined ? [] : [{ name: 'near-wall.csv', text: nearWall }]),

@@ -1,6 +1,5 @@
 import type { Plan } from '../plan/index.ts';
 import type { Part } from './fit.ts';
-import { joined } from './fit.ts';
 import type { Writing } from './writing.ts';
 
 /**
@@ -14,31 +13,41 @@ import type { Writing } from './writing.ts';
 export function setUpParts(plan: Plan, writing: Writing, room: number): Part[] {
   const has = (id: string): boolean => plan.quantities[id] !== undefined;
   const say = (words: string, id: string): string => (has(id) ? `${words} ${writing.number(id)}` : '');
-  const item = (...pieces: readonly string[]): string[] => {
-    const known = pieces.filter((piece) => piece !== '');
-    return known.length === 0 ? [] : [joined(known, room, '; ')];
-  };
+  const item = (...pieces: readonly string[]): string[] => flowing(pieces.filter((piece) => piece !== ''), room);
   const meshes = ['cellCountCoarse', 'cellCountMedium', 'cellCountFine'].filter(has).map((id) => plainNumber(writing, id));
   return [
     {
       label: 'Wall',
       items: [
-        ...item(say('first cell', 'firstCellHeight'), say('its node at', 'firstNodeDistance'), say('y+', 'yPlusTarget')),
-        ...item(say('growth', 'growthRatio'), say('layers', 'layerCount'), say('stack', 'layerStackHeight'), say('boundary layer', 'boundaryLayerThickness')),
+        ...item(say('first cell', 'firstCellHeight'), say('its node at', 'firstNodeDistance'), say('y+', 'yPlusTarget'), say('growth', 'growthRatio'), say('layers', 'layerCount'), say('stack', 'layerStackHeight'), say('boundary layer', 'boundaryLayerThickness')),
       ],
       least: 2,
       apart: true,
     },
     { label: 'Mesh', items: item(say('core cell', 'coreCellSize'), meshes.length === 0 ? say('cells', 'cellCount') : `cells ${meshes.join(' / ')}`, say('cell Peclet', 'cellPeclet')), least: 1 },
     { label: 'Time', items: item(say(marches(plan) ? 'pseudo-step' : 'step', 'timeStep'), binding(plan, writing), say('run', 'runTime'), say('steps', 'stepCount'), say('flow-through', 'flowThroughTime')), least: 1 },
-    { label: 'Cost', items: item(hours(plan, writing), say('memory', 'memory')), least: 1 },
+    { label: 'Cost', items: item(hours(plan, writing), say('done in', 'wallTime'), say('memory', 'memory')), least: 1 },
   ];
+}
+
+/** Pieces packed into lines, separated by semicolons. */
+function flowing(pieces: readonly string[], room: number): string[] {
+  const lines: string[] = [];
+  for (const [i, piece] of pieces.entries()) {
+    const text = i === pieces.length - 1 ? piece : `${piece};`;
+    const longer = `${lines.at(-1) ?? ''} ${text}`;
+    if (lines.length > 0 && longer.length <= room) lines[lines.length - 1] = longer;
+    else lines.push(text);
+  }
+  return lines;
 }
 
 const plainNumber = (writing: Writing, id: string): string => writing.parts(id).number;
 
 function hours(plan: Plan, writing: Writing): string {
-  return plan.quantities['coreHours'] === undefined ? '' : `${writing.number('coreHours')} of one core`;
+  if (plan.quantities['coreHours'] === undefined) return '';
+  const { number, spread } = writing.parts('coreHours');
+  return `${number} core hours${spread === '' ? '' : ` ${spread}`}`;
 }
 
 /** A run to a steady state has no step in time but one that only drives it there. */

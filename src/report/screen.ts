@@ -1,6 +1,6 @@
 import type { Plan, PlanChoice, PlanEffect, PlanTarget } from '../plan/index.ts';
 import { broken } from './columns.ts';
-import { cut, fitted, gutter, joined, noPaint, type Paint, type Part } from './fit.ts';
+import { cut, fitted, fitting, gutter, joined, noPaint, type Paint, type Part } from './fit.ts';
 import { setUpParts } from './screen-set-up.ts';
 import { cautionLines, decidingText, factorText, priceText, titled } from './words.ts';
 import { oneLine, type Writing } from './writing.ts';
@@ -32,10 +32,10 @@ export function screen(plan: Plan, writing: Writing, options: ScreenOptions): st
   const head = [paint.strong(cut(titled(plan), width)), ...(options.purpose === undefined ? [] : broken(oneLine(options.purpose), width).slice(0, 2))];
   const parts: Part[] = [
     { label: 'At odds', items: plan.contradictions.map((c) => wrap(`${oneLine(c.says)}: ${oneLine(c.effect)}. Cure: ${oneLine(c.cure)}`, 3)), least: 2, apart: true, warns: true },
-    { label: 'Mind first', items: [...cautionLines(plan, writing).map((text) => wrap(text, 3)), ...strained(plan)], least: 2, apart: true, warns: true },
+    { label: 'Mind first', items: [...cautionLines(plan, writing).map((text) => wrap(text, 3)), ...strained(plan)], least: 3, apart: true, warns: true },
     { label: 'Target', items: plan.targets.map((t) => targetText(t, plan, writing)), least: 2, apart: true },
     ...effectParts(plan, writing),
-    { label: 'Choices', items: choiceItems(plan), least: 2 },
+    { label: 'Choices', ...choiceItems(plan), least: 2 },
     ...setUpParts(plan, writing, room),
     { label: 'Ladder', items: plan.ladder.map((r) => rungText(r, writing)), least: 2, apart: true },
     { label: 'Taken', items: assumed(plan, writing), least: 1 },
@@ -63,60 +63,76 @@ function targetText(t: PlanTarget, plan: Plan, writing: Writing): string {
 function effectParts(plan: Plan, writing: Writing): Part[] {
   const judged = plan.effects.filter((e) => e.applies !== false && e.judged);
   const of = (verdict: PlanEffect['verdict']): PlanEffect[] => judged.filter((e) => e.verdict === verdict);
-  const wide = Math.min(26, Math.max(12, ...judged.filter((e) => e.verdict !== 'leave-out').map((e) => e.id.length))) + 2;
+  const wide = Math.min(26, Math.max(12, ...judged.filter((e) => e.verdict !== 'leave-out').map((e) => e.id.length))) + 1;
   const row = (e: PlanEffect, ...pieces: readonly string[]): string => `${e.id.padEnd(wide)}${joined(pieces.filter((p) => p !== ''), room - Math.max(wide, e.id.length), '; ')}`;
-  const price = (e: PlanEffect): string => (e.price === undefined ? '' : `price ${shortPrice(e.price, plan)}`);
+  const decided = (e: PlanEffect): string => (e.deciding === undefined ? writing.fill(e.because) : fitting(wordingsOf(e, price(e), writing), room - Math.max(wide, e.id.length)));
+  const price = (e: PlanEffect): string => (e.price === undefined ? '' : `; price ${shortPrice(e.price, plan, writing)}`);
   return [
-    { label: 'Include', items: sortedBy(of('include'), closeness).map((e) => row(e, decidingText(e, writing), price(e), e.deciding === undefined ? writing.fill(e.because) : '')), least: 3, apart: true },
-    { label: 'Check', items: of('borderline').map((e) => row(e, decidingText(e, writing) || writing.fill(e.because), price(e), e.firstRun === 'leave-out' ? 'first run without it' : 'first run with it', e.check === undefined ? '' : writing.fill(e.check))), least: 2 },
+    { label: 'Include', items: sortedBy(of('include'), closeness).map((e) => row(e, decided(e))), least: 3, apart: true },
+    { label: 'Check', items: of('borderline').map((e) => row(e, decided(e), e.firstRun === 'leave-out' ? 'first run without it' : 'first run with it', e.check === undefined ? '' : writing.fill(e.check))), least: 2 },
     { label: 'Open', items: of('undecided').map((e) => row(e, (e.missing ?? []).length === 0 ? writing.fill(e.because) : `needs ${(e.missing ?? []).map((m) => oneLine(m).replaceAll('|', ' or ')).join(', ')}`)), least: 2, warns: true },
-    { label: 'Leave out', items: leftOut(plan, sortedBy(of('leave-out'), closeness)), least: 2 },
+    { label: 'Leave out', ...leftOut(plan, sortedBy(of('leave-out'), closeness)), least: 2 },
   ];
 }
 
-/** The price without the name of the target where there is one target alone. */
-const shortPrice = (price: NonNullable<PlanEffect['price']>, plan: Plan): string => (plan.targets.length === 1 ? priceText(price).replace(/ of \S+$/, '') : priceText(price));
+/** From the fullest to the shortest: the price stays longest, then the margin. */
+function wordingsOf(e: PlanEffect, price: string, writing: Writing): string[] {
+  const full = decidingText(e, writing);
+  const plain = decidingText(e, writing, { spread: false });
+  return [`${full}${price}`, `${plain}${price}`, `${decidingText(e, writing, { spread: false, limit: false })}${price}`, full, plain];
+}
+
+/** The price without the name of the target where there is one target alone, else with its symbol. */
+const shortPrice = (price: NonNullable<PlanEffect['price']>, plan: Plan, writing: Writing): string => (plan.targets.length === 1 && plan.targets[0]?.quantity === price.of ? priceText(price).replace(/ of \S+$/, '') : priceText({ ...price, of: writing.symbol(price.of) }));
 
 /** Effects nearest to their limit first: these are the ones to look at. */
 const closeness = (e: PlanEffect): number => e.deciding?.margin ?? Infinity;
 const sortedBy = <T>(items: readonly T[], by: (item: T) => number): T[] => [...items].sort((a, b) => by(a) - by(b) || 0);
 
-function leftOut(plan: Plan, effects: readonly PlanEffect[]): string[] {
-  const each = effects.map((e) => (factorText(e) === '' ? e.id : `${e.id} ${factorText(e)}`));
+/** Items with the number of things in each. */
+type Packed = Pick<Part, 'items'> & { readonly counts: readonly number[] };
+
+function leftOut(plan: Plan, effects: readonly PlanEffect[]): Packed {
   const absent = plan.effects.filter((e) => e.applies === false).length;
-  const byHand = plan.effects.filter((e) => !e.judged);
-  return [
-    ...packed(each),
-    ...(absent === 0 ? [] : [`${absent} more effects cannot occur here`]),
-    ...(byHand.length === 0 ? [] : [joined([`${byHand.length} to judge by hand: ${byHand[0]?.id ?? ''}`, ...byHand.slice(1).map((e) => e.id)], room, ', ')]),
-  ];
+  const byHand = plan.effects.filter((e) => !e.judged).map((e) => e.id);
+  const { items, counts } = packed(effects.map((e) => (factorText(e) === '' ? e.id : `${e.id} ${factorText(e)}`)));
+  const others = [...(absent === 0 ? [] : [`${absent} effects cannot occur here`]), ...(byHand.length === 0 ? [] : [`to judge by hand: ${byHand.join(', ')}`])];
+  return others.length === 0 ? { items, counts } : { items: [cut(others.join('; '), room), ...items], counts: [1, ...counts] };
 }
 
 /** Short texts packed into lines, separated by commas. */
-function packed(texts: readonly string[]): string[] {
-  const lines: string[] = [];
+function packed(texts: readonly string[]): Packed {
+  const items: string[] = [];
+  const counts: number[] = [];
   for (const [i, text] of texts.entries()) {
     const piece = i === texts.length - 1 ? text : `${text},`;
-    const last = lines.at(-1);
-    if (last !== undefined && last.length + 1 + piece.length <= room) lines[lines.length - 1] = `${last} ${piece}`;
-    else lines.push(cut(piece, room));
+    const last = items.length - 1;
+    const longer = `${items[last] ?? ''} ${piece}`;
+    if (last >= 0 && longer.length <= room) {
+      items[last] = longer;
+      counts[last] = (counts[last] ?? 0) + 1;
+    } else {
+      items.push(cut(piece, room));
+      counts.push(1);
+    }
   }
-  return lines;
+  return { items, counts };
 }
 
-function choiceItems(plan: Plan): string[] {
+function choiceItems(plan: Plan): Packed {
   const made = plan.choices.filter((c) => c.applies !== false && c.judged !== false && c.chosen !== 'none');
   const text = (c: PlanChoice): string => `${c.id} ${c.chosen}${c.given === true ? ' (given)' : ''}`;
   const disputed = made.filter((c) => c.advised !== undefined && c.advised !== c.chosen);
-  return [...disputed.map((c) => joined([`${text(c)}, advised is ${c.advised ?? ''}`, oneLine(c.because)], room, ': ')), ...packed(made.filter((c) => !disputed.includes(c)).map(text))];
+  const others = packed(made.filter((c) => !disputed.includes(c)).map(text));
+  return { items: [...disputed.map((c) => joined([`${text(c)}, advised is ${c.advised ?? ''}`, oneLine(c.because)], room, ': ')), ...others.items], counts: [...disputed.map(() => 1), ...others.counts] };
 }
 
 function rungText(r: Plan['ladder'][number], writing: Writing): string {
   const { atLeast, atMost } = r.limit;
   const bound = (value: number): string => writing.like(r.quantity, value, r.limit.unit);
-  const limit = atLeast !== undefined && atMost !== undefined ? `passes ${bound(atLeast)} .. ${bound(atMost)}` : atMost !== undefined ? `passes up to ${bound(atMost)}` : atLeast !== undefined ? `passes from ${bound(atLeast)}` : '';
+  const limit = atLeast !== undefined && atMost !== undefined ? `, passes ${bound(atLeast)} .. ${bound(atMost)}` : atMost !== undefined ? `, passes up to ${bound(atMost)}` : atLeast !== undefined ? `, passes from ${bound(atLeast)}` : '';
   const name = r.id.padEnd(25);
-  return `${name} ${joined([r.value === undefined ? 'no number for these inputs' : `${writing.symbol(r.quantity)} = ${writing.number(r.quantity)}`, limit, oneLine(r.changes)], room - name.length - 1, '; ')}`;
+  return `${name} ${joined([r.value === undefined ? 'no number for these inputs' : `${writing.number(r.quantity)}${limit}`, r.value === undefined ? '' : writing.symbol(r.quantity), oneLine(r.changes)], room - name.length - 1, '; ')}`;
 }
 
 /** Numbers that a formula gave outside its range. */

@@ -8,20 +8,21 @@ export interface Traced {
   readonly id: string;
   /** Inputs first, the number itself last. */
   readonly steps: readonly Step[];
-  readonly spread?: Spread;
+  /** Spreads of the steps, by id; a step without any source of spread is left out. */
+  readonly spreads: ReadonlyMap<string, Spread>;
 }
 
 /**
  * The screen of `trace`: the number, what its spread comes from, then every step from the inputs to it.
  *
- * @param traced  the steps and the spread of the last one
+ * @param traced  the steps and their spreads
  * @param on      the case, for the units that the user wrote
  * @returns       text without a last newline, at most 80 columns wide but for words longer than that
  */
-export function traceText({ id, steps, spread }: Traced, on: Case): string {
+export function traceText({ id, steps, spreads }: Traced, on: Case): string {
   const places = new Map(steps.map((step, i) => [step.id, i + 1]));
-  const bounds = spread === undefined ? {} : { low: spread.low, high: spread.high };
-  const writing = writingOf(Object.fromEntries(steps.map((step) => [step.id, step.id === id ? { ...step, ...bounds } : step])), on);
+  const spread = spreads.get(id);
+  const writing = writingOf(Object.fromEntries(steps.map((step) => [step.id, { ...step, ...boundsOf(spreads.get(step.id)) }])), on);
   const strained = steps.filter((step) => step.outside.length > 0).map((step) => step.id);
   return [
     wrapped(`${id} = ${writing.number(id)}, ${oneLine(steps.at(-1)?.name ?? '')}`, '  ', ''),
@@ -31,6 +32,8 @@ export function traceText({ id, steps, spread }: Traced, on: Case): string {
     ...steps.map((step, i) => stepText(step, i + 1, places, writing)),
   ].join('\n');
 }
+
+const boundsOf = (spread: Spread | undefined): { low?: number; high?: number } => (spread === undefined ? {} : { low: spread.low, high: spread.high });
 
 /** Where a spread comes from, the largest shares first. */
 function sharesText({ shares, how }: Spread): string {
@@ -59,7 +62,7 @@ function notesOf(step: Step, places: ReadonlyMap<string, number>, writing: Writi
     ...(step.ranges ?? []).map(({ need, range }) => `holds for ${need} ${rangeText(need, range, writing)}`),
     ...step.outside.map(({ need, value }) => `! ${need} = ${writing.like(need, value)} lies outside that range: the nearest formula is kept, its scatter doubled`),
     ...(step.scatter === undefined ? [] : [`scatter +/- ${Number((100 * step.scatter).toPrecision(2))} %`]),
-    ...(step.loop === undefined ? [] : [`a loop, closed in ${step.loop.passes} passes (last change ${step.loop.change.toExponential(0)})`]),
+    ...(step.loop === undefined ? [] : [`a loop, closed in ${step.loop.passes} ${step.loop.passes === 1 ? 'pass' : 'passes'} (last change ${step.loop.change.toExponential(0)})`]),
     ...(step.note === undefined ? [] : [`note: ${oneLine(step.note)}`]),
     `source: ${oneLine(step.source)}`,
   ];
@@ -73,12 +76,13 @@ function rangeText(need: string, [from, to]: readonly [number, number], writing:
 /**
  * The document of `trace --json`.
  *
- * @param traced  the steps and the spread
+ * @param traced  the steps and their spreads
  * @returns       id, value, unit, spread with its shares, steps; numbers in SI
  */
-export function traceDocument({ id, steps, spread }: Traced): object {
+export function traceDocument({ id, steps, spreads }: Traced): object {
+  const spread = spreads.get(id);
   const last = steps.at(-1);
-  return { id, value: last?.value, unit: last?.unit, ...(spread === undefined ? {} : { low: spread.low, high: spread.high, coverage: 0.95, shares: spread.shares, how: spread.how }), steps: steps.map((step) => ({ ...step, ...(step.ranges === undefined ? {} : { ranges: step.ranges.map(finiteRange) }) })) };
+  return { id, value: last?.value, unit: last?.unit, ...(spread === undefined ? {} : { low: spread.low, high: spread.high, coverage: 0.95, shares: spread.shares, how: spread.how }), steps: steps.map((step) => ({ ...step, ...boundsOf(spreads.get(step.id)), ...(step.ranges === undefined ? {} : { ranges: step.ranges.map(finiteRange) }) })) };
 }
 
 /** An end that is not finite is left out. */

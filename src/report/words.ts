@@ -14,22 +14,25 @@ export function factorText(e: PlanEffect): string {
   return d.marginKind === 'difference' ? printNumber({ value: d.margin, unit: 'K', digits: 2 }) : `${few(d.margin)} times`;
 }
 
-/** The number that decides, beside the limit on the side of the verdict: `Re = 22600 +/- 5 %, 9.8 times past 2300`. */
-export function decidingText(e: PlanEffect, writing: Writing): string {
-  const d = e.deciding;
-  if (d === undefined) return '';
-  const { symbol, number } = decider(e, writing);
-  const limit = (value: number): string => writing.like(d.quantity, value);
-  if (e.verdict === 'borderline' && d.leaveOutAt !== d.includeAt) return `${symbol} = ${number}, limits ${limit(d.leaveOutAt)} and ${limit(d.includeAt)}`;
-  const nearer = limit(e.verdict === 'leave-out' ? d.leaveOutAt : d.includeAt);
-  const margin = factorText(e);
-  return `${symbol} = ${number}, ${margin === '' || e.verdict === 'borderline' ? `limit ${nearer}` : `${margin} past ${nearer}`}`;
+/** What may be left off where room is short. */
+export interface Shorter {
+  readonly spread?: false;
+  readonly limit?: false;
 }
 
-function decider(e: PlanEffect, writing: Writing): { symbol: string; number: string } {
-  const id = e.deciding?.quantity ?? '';
-  const known = writing.number(id);
-  return { symbol: writing.symbol(id), number: known === 'not known' ? few(e.deciding?.value ?? Number.NaN) : known };
+/** The number that decides, beside the limit on the side of the verdict: `Re 22600 +/- 5 %, 9.8 times past 2300`. */
+export function decidingText(e: PlanEffect, writing: Writing, shorter: Shorter = {}): string {
+  const d = e.deciding;
+  if (d === undefined) return '';
+  const symbol = writing.symbol(d.quantity);
+  const known = writing.number(d.quantity);
+  const number = known === 'not known' ? few(d.value) : shorter.spread === false ? known.replace(/ \+\/- .*$/, '') : known;
+  const limit = (value: number): string => writing.like(d.quantity, value);
+  if (e.verdict === 'borderline' && d.leaveOutAt !== d.includeAt) return `${symbol} ${number}, limits ${limit(d.leaveOutAt)} and ${limit(d.includeAt)}`;
+  const nearer = limit(e.verdict === 'leave-out' ? d.leaveOutAt : d.includeAt);
+  const margin = factorText(e);
+  if (shorter.limit === false && margin !== '' && e.verdict !== 'borderline') return `${symbol} ${number}, ${margin} past its limit`;
+  return `${symbol} ${number}, ${margin === '' || e.verdict === 'borderline' ? `limit ${nearer}` : `${margin} past ${nearer}`}`;
 }
 
 /** What leaving an effect out costs a target. */

@@ -37,9 +37,10 @@ const scales = ['degC', 'degF'];
  *
  * @param quantities  quantities by id
  * @param on          the case they belong to, for the units that the user wrote; SI without it
+ * @param unicode     signs beyond ASCII, for a page
  * @returns           printers of numbers by quantity id
  */
-export function writingOf(quantities: Writables, on?: Case): Writing {
+export function writingOf(quantities: Writables, on?: Case, unicode = false): Writing {
   const scale = scales.find((unit) => [...(on?.entries.values() ?? [])].some((e) => e.unit === 'K' && e.writtenUnit === unit));
   const unitFor = (id: string, q: Writable): Partial<Printing> => {
     const path = writtenAt(quantities, on, id);
@@ -47,11 +48,11 @@ export function writingOf(quantities: Writables, on?: Case): Writing {
     const temperature = isTemperature(id);
     const difference = q.unit === 'K' && !temperature;
     const toUnit = own ?? (temperature && q.unit === 'K' ? scale : undefined);
-    return { ...(toUnit === undefined || toUnit === '' ? {} : { toUnit }), ...(difference ? { difference } : {}), ...(path === undefined ? {} : { digits: 6 }) };
+    return { ...(toUnit === undefined || toUnit === '' ? {} : { toUnit }), ...(difference ? { difference } : {}), digits: path === undefined ? 4 : 6 };
   };
   const printing = (id: string, q: Writable): Printing | undefined => {
     if (typeof q.value === 'string') return undefined;
-    return { value: q.value, unit: q.unit, ...(q.low === undefined || q.high === undefined ? {} : { low: q.low, high: q.high }), ...unitFor(id, q) };
+    return { value: q.value, unit: q.unit, ...(q.low === undefined || q.high === undefined ? {} : { low: q.low, high: q.high }), ...unitFor(id, q), unicode };
   };
   const shown = <T>(id: string, show: (p: Printing) => T, word: (text: string) => T): T => {
     const q = quantities[id];
@@ -66,7 +67,7 @@ export function writingOf(quantities: Writables, on?: Case): Writing {
     symbol: (id) => { const symbol = oneLine(quantities[id]?.symbol ?? ''); return symbol === '' ? id : symbol; },
     like: (id, value, unit) => {
       const q = quantities[id];
-      return printNumber({ value, unit: unit ?? q?.unit ?? '1', ...(q === undefined ? unitOfPath(on, id, unit, scale) : unitFor(id, q)) });
+      return printNumber({ value, unicode, unit: unit ?? q?.unit ?? '1', ...(q === undefined ? unitOfPath(on, id, unit, scale) : unitFor(id, q)) });
     },
     fill: (text) => oneLine(text.replaceAll(/\{([^{}]+)\}/g, (_, id: string) => number(id))),
   };
@@ -94,5 +95,5 @@ function unitOfPath(on: Case | undefined, path: string, unit: string | undefined
 
 /** Temperatures have a zero of their scale, differences of temperature have none; both are measured in K. */
 function isTemperature(id: string): boolean {
-  return /temperature(?:Peak|Mean)?$/i.test(id.split('@')[0] as string);
+  return /(?:temperature(?:Peak|Mean|Max|Min)?|limit)$/i.test(id.split('@')[0] as string);
 }

@@ -3,7 +3,7 @@ import type { Plan } from '../../src/plan/index.ts';
 import { asText, planBlocks, planDocument, planFiles, writingOf } from '../../src/report/index.ts';
 import { planFixture } from './plan-fixture.ts';
 
-const files = (plan: Plan): Map<string, string> => new Map(planFiles(plan, writingOf(plan.quantities), { ladder: [{ rung: 'poiseuille-pipe', tables: [{ id: 'shape', title: 't', columns: [{ id: 'radius', name: 'r', unit: '1' }], rows: [[0], [1]] }, { id: 'velocity', title: 't', columns: [{ id: 'u', name: 'u', unit: 'm/s' }], rows: [[0.8]] }] as never }], properties: 'temperature [K]\n300' }).map(({ name, text }) => [name, text]));
+const files = (plan: Plan): Map<string, string> => new Map(planFiles(plan, undefined, { ladder: [{ rung: 'poiseuille-pipe', tables: [{ id: 'shape', title: 't', columns: [{ id: 'radius', name: 'r', unit: '1' }], rows: [[0], [1]] }, { id: 'velocity', title: 't', columns: [{ id: 'u', name: 'u', unit: 'm/s' }], rows: [[0.8]] }] as never }], properties: 'temperature [K]\n300' }).map(({ name, text }) => [name, text]));
 const plan = planFixture();
 const written = files(plan);
 const evil = `<script>alert(1)</script><img src=x onerror=y> | *b* [l](javascript:z) & "q" \u001b[2J`;
@@ -40,7 +40,8 @@ describe('the plan as text', () => {
     expect(flat).toContain('Becomes leave-out at inlet.temperature = 310 K.');
     expect(flat).toContain('Settled by giving wall.sandGrain or wall.Ra.');
     expect(flat).toContain('Not judged by this program, to be judged by hand: soret.');
-    for (const id of Object.keys(plan.quantities)) expect(flat.replaceAll(' ', '')).toContain(id.slice(0, 8));
+    const rows = (written.get('plan.md') ?? '').split('\n');
+    for (const [id, { source }] of Object.entries(plan.quantities)) expect(rows.some((row) => row.startsWith(`| ${id} |`) && row.includes(source)), id).toBe(true);
   });
 });
 

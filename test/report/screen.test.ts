@@ -22,9 +22,8 @@ describe('the screen', () => {
     const text = shown(planFixture());
     for (const piece of [
       /^Rinse water cooled in a jacketed line\n/, /Mind first +Hot water at/, /outletTemperature at outlet 326\.5 \+\/- 0\.8 K; asked within 1 K/, /lift of the line; no hand estimate/,
-      /Include +variable-viscosity +Re = 22600 \+\/- 5 %, 1\.3 times past 2300/, /Check +buoyancy +Gr\/Re = 55 \+\/- \d+ %, limits 20 and 100/, /Open +roughness +needs wall\.sandGrain or wall\.Ra/,
-      /Leave out +radiation 3\.2 times, compressibility 380 times/, /43 more effects cannot occur here/, /1 to judge by hand: soret/, /near-wall-treatment law-of-the-wall \(given\), advised is resolved/, /turbulence-treatment rans/,
-      /first cell 42\.0 um/, /growth 1\.2/, /core cell 1\.02 mm; cells 61000 \/ 206000 \/ 694000/, /step 2\.55 ms; bound by convection through a cell/, /poiseuille-pipe +f = 0\.032; passes 0\.03168 \.\. 0\.03232/, /1 assumed, not given: gravity 9\.807 m\/s\^2/,
+      /Include +variable-viscosity +Re 22600 \+\/- 5 %, 1\.3 times past 2300/, /Check +buoyancy +Gr\/Re 55, limits 20 and 100; price \+12 % of T_out/, /Open +roughness +needs wall\.sandGrain or wall\.Ra/,
+      /first cell 42\.0 um/, /growth 1\.2/, /core cell 1\.02 mm; cells 61000 \/ 206000 \/ 694000/, /step 2\.55 ms; bound by convection through a cell/, /poiseuille-pipe +0\.032, passes 0\.03168 \.\. 0\.03232/, /1 assumed, not given: gravity 9\.807 m\/s\^2/,
       /outside the range of their formula.*nusseltPlain/s, /--full/, /--into DIR/, /runbrief trace/,
     ]) expect(text).toMatch(piece);
     expect(text).not.toContain('inlet-turbulence'); // does not apply
@@ -36,7 +35,7 @@ describe('the screen', () => {
     const text = shown({ ...many, effects: [...many.effects, ...crowd], contradictions: Array.from({ length: 9 }, (_, i) => ({ code: 'c', path: 'inlet.speed', says: `the case says ${i} and also says not ${i}, at some length so that it has to be broken`, effect: 'the flow rate is off', cure: 'say it once' })) });
     expectFits(text);
     expect(text).toMatch(/and \d+ more \(--full\)/);
-    expect(text).toContain('Include     variable-viscosity'); // nearest to its limit
+    expect(text).toMatch(/Include +variable-viscosity/); // nearest to its limit
     expect(text).toContain('poiseuille-pipe');
     expect(text).toContain('At odds');
   });
