@@ -49,7 +49,7 @@ export interface Assembled {
   readonly chosen: Readonly<Record<string, string>>;
   readonly leaves: readonly Leaf[];
   /** Whether the user can give a number at a path. */
-  askable(id: string): boolean;
+  readonly askable: (id: string) => boolean;
 }
 
 /** Everything that is defined whatever the case, and what each flow adds: for the build of rules and for tests. */
@@ -84,9 +84,7 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
   const definitions: Definition[] = [
     ...base,
     ...leafDefinitions([...leaves, ...ownLeaves], exists),
-    ways('inletTemperature', [
-      ...['inlet.temperature', 'fluid.temperature', 'inlet.totalTemperature', 'initial.temperature'].map((path) => ({ needs: [path], value: (of: Readonly<Record<string, number>>) => of[path] as number, formula: `T_in as given: ${path}`, source: 'the case' })),
-    ]),
+    ways('inletTemperature', ['inlet.temperature', 'fluid.temperature', 'inlet.totalTemperature', 'initial.temperature'].map((path) => ({ needs: [path], value: (of: Readonly<Record<string, number>>) => of[path] as number, formula: `T_in as given: ${path}`, source: 'the case' }))),
     ...wall.definitions,
     ...(fluid.laws === undefined ? [] : materialWays(fluid.laws.about)),
     ...targetDefinitions(on, estimated(on, base, flow.walls)),
@@ -98,7 +96,7 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
     of: { wall: wallPlaces(flow.walls), station: flow.stations, region: flow.regions, inlet: on.list('inlets').map((n) => `inlets.${n}`), species: on.list('species').map((n) => `species.${n}`), particle: on.list('particles').map((n) => `particles.${n}`) },
     target: { wall: targetWall(on, flow, walls), station: 'target' },
   };
-  const nodes = joinDefinitions(definitions, places);
+  const nodes = joinDefinitions(definitions, places, fixedWords(facts.words, flow));
   const words = Object.fromEntries(Object.entries(facts.words).map(([id, value]) => [id, { value, kind: facts.assumed.some((a) => a.id === id) ? ('assumed' as const) : ('given' as const) }]));
   const workings = new Workings(nodes, { ...words, ...assumed, ...given, ...flowed.given }, { ...fluid.laws?.laws, ...wall.laws });
   const paths = new Set(leaves.map((l) => l.path));
@@ -123,6 +121,12 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
     leaves,
     askable: (id) => paths.has(id),
   };
+}
+
+/** Words that hold for good in this case: what the flow fixes, what the fluid is, which features are named. */
+function fixedWords(words: Readonly<Record<string, string>>, flow: Flow): Record<string, string> {
+  const fluid = ['medium', 'transparency', 'fluidGiven'];
+  return Object.fromEntries(Object.entries(words).filter(([id]) => id in flow.words || fluid.includes(id) || id.startsWith('has.')));
 }
 
 function flowOf(on: Case): Flow {

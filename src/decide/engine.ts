@@ -122,18 +122,23 @@ export async function engineVerdicts(state: State): Promise<Map<string, Verdict 
   const flat: Flat = new Map([['one', 1]]);
   const rules: RuleProperties[] = [];
   const views = new Map<string, number>();
+  const idle = new Set<string>();
   const say = (said: Said, condition: NestedCondition): void => {
     if (condition !== no) rules.push({ name: `${said.effect} ${said.view} ${said.branch} ${said.says}`, conditions: 'fact' in condition ? { all: [condition] } : (condition), event: { type: 'said', params: { ...said } } });
   };
   for (const [effect, { rule }] of state.effects) {
     if (rule === undefined) continue;
-    const found = viewsOf(rule, state.point);
-    views.set(effect, found.length);
     if (rule.applies !== undefined) {
+      // Whether a rule applies is checked before the run: the engine is asked again only where it does.
+      if (state.effects.get(effect)?.applies === false) {
+        idle.add(effect);
+        continue;
+      }
       const plain = new Derived(flat, state.point.plain, '');
       say({ effect, view: -1, branch: -1, says: 'applies-not' }, plain.may(rule.applies, true, false, true));
-      if (state.effects.get(effect)?.applies === false) continue; // what its branches would say is not asked
     }
+    const found = viewsOf(rule, state.point);
+    views.set(effect, found.length);
     found.forEach((view, k) => {
       const derived = new Derived(flat, view.facts, view.place === undefined && view.regime === '' ? '' : ` at ${view.place ?? ''} ${view.regime}`);
       rule.branches.forEach((branch, b) => {
@@ -146,7 +151,9 @@ export async function engineVerdicts(state: State): Promise<Map<string, Verdict 
     });
   }
   const { events } = await new Engine(rules).run(Object.fromEntries(flat));
-  return tally(state, views, events.map((e) => e.params as Said));
+  const out = tally(state, views, events.map((e) => e.params as Said));
+  for (const effect of idle) out.set(effect, 'not-applicable');
+  return out;
 }
 
 function tally(state: State, views: ReadonlyMap<string, number>, events: readonly Said[]): Map<string, Verdict | 'not-applicable'> {

@@ -1,3 +1,4 @@
+import { createRequire } from 'node:module';
 import { basename } from 'node:path';
 import { assemble, type Assembled } from '../assemble/index.ts';
 import type { Case } from '../case/index.ts';
@@ -9,6 +10,7 @@ import { contradictionsOf } from './contradictions.ts';
 import { idsIn, type Ground, type StageResult } from './ground.ts';
 import { closure, planQuantity, rangesOf } from './numbers.ts';
 import { shippedRules } from './rules.ts';
+import { targetSpreads } from './target-spread.ts';
 import { stages } from './stages/index.ts';
 import { sectionNames, type Check, type Plan, type PlanChoice, type PlanEffect, type PlanQuantity, type PlanTarget, type Section, type SectionName } from './types.ts';
 
@@ -73,6 +75,7 @@ export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
   const { assembled, rules, targets, state, decideOptions, settle: again } = settleCase(on, options);
   const { workings, ranges } = assembled;
   const decisions = await decide(workings, rules, targets, { ...decideOptions, settled: state, ...(options.flips === true ? { inputs: flipInputs(assembled) } : {}) });
+  targetSpreads(assembled);
   const ladder = ladderOf(assembled);
   const ground = groundOf(assembled, decisions, ladder);
   const wanted = options.sections ?? sectionNames;
@@ -85,11 +88,11 @@ export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
   return {
     program: `runbrief ${options.version}`,
     format: 1,
-    case: { file: basename(on.file), title: on.title ?? '', sha256: await digest(on.text) },
+    case: { file: basename(on.file), title: on.title ?? '', sha256: digest(on.text) },
     targets: assembled.targets.map(planTarget),
     quantities: quantitiesOf(workings, ids, spread, range),
-    effects: decisions.effects as readonly PlanEffect[],
-    choices: decisions.choices as readonly PlanChoice[],
+    effects: decisions.effects,
+    choices: decisions.choices,
     ladder,
     sections: Object.fromEntries(sectionNames.map((name) => [name, { lines: built[name].lines, tables: built[name].tables }])) as Record<SectionName, Section>,
     checklist: sectionNames.flatMap((name) => built[name].checklist ?? []) as readonly Check[],
@@ -97,9 +100,9 @@ export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
   };
 }
 
-/** Digest of the case file; the library behind it is loaded only here, since few commands need it. */
-async function digest(text: string): Promise<string> {
-  const { createHash } = await import('node:crypto');
+/** Digest of the case file; the library behind it is loaded here, since few commands need it. */
+function digest(text: string): string {
+  const { createHash } = createRequire(import.meta.url)('node:crypto') as typeof import('node:crypto');
   return createHash('sha256').update(text).digest('hex');
 }
 
@@ -125,7 +128,7 @@ function flipInputs(assembled: Assembled): FlipInput[] {
 }
 
 /** What every stage stands on. */
-export function groundOf(assembled: Assembled, decisions: Decisions, ladder: Plan['ladder']): Ground {
+function groundOf(assembled: Assembled, decisions: Decisions, ladder: Plan['ladder']): Ground {
   const { workings } = assembled;
   const effect = (id: string): PlanEffect => decisions.effects.find((e) => e.id === id) as PlanEffect;
   const choice = (id: string): PlanChoice => decisions.choices.find((c) => c.id === id) as PlanChoice;
@@ -157,7 +160,7 @@ function namedIds(built: Readonly<Record<SectionName, StageResult>>, decisions: 
 }
 
 /** Numbers that other programs rely on, wherever they can be had. */
-const reliedOn = 'density viscosity kinematicViscosity thermalConductivity specificHeatCapacity thermalExpansion thermalDiffusivity electricalConductivity speedOfSound speed length hydraulicDiameter temperatureDifference filmTemperature reynolds prandtl peclet grashof rayleigh richardson mach knudsen brinkman eckert biot fourier schmidt lewis pecletMass sherwood damkohler damkohlerDiffusive thiele weber froude capillary ohnesorge eotvos morton stokes womersley strouhal rossby ekman taylorCylinders dean graetz hartmann binghamNumber deborah radiationShare frictionFactorDarcy skinFrictionCoefficient wallShear frictionVelocity nusselt heatTransferCoefficient pressureDrop outletTemperature heatRate dragCoefficient sheddingFrequency boundaryLayerThickness thermalLayerThickness entranceLength entranceLengthThermal kolmogorovLength kolmogorovTime batchelorLength turbulenceIntensity turbulentKineticEnergy dissipationRate specificDissipationRate yPlusTarget firstCellHeight firstNodeDistance growthRatio layerCount layerStackHeight coreCellSize cellCount cellPeclet timeStep timeStepConvective timeStepDiffusive timeStepAcoustic timeStepCapillary timeStepReaction timeStepPeriod flowThroughTime runTime stepCount coreHours memory'.split(' ');
+const reliedOn = 'density viscosity kinematicViscosity thermalConductivity specificHeatCapacity thermalExpansion thermalDiffusivity electricalConductivity speedOfSound speed length hydraulicDiameter temperatureDifference filmTemperature reynolds prandtl peclet grashof rayleigh richardson mach knudsen brinkman eckert biot fourier schmidt lewis pecletMass sherwood damkohler damkohlerDiffusive thiele weber froude capillary ohnesorge eotvos morton stokes womersley strouhal rossby ekman taylorCylinders dean graetz hartmann binghamNumber deborah radiationShare frictionFactorDarcy skinFrictionCoefficient wallShear frictionVelocity nusselt heatTransferCoefficient pressureDrop outletTemperature heatRate dragCoefficient sheddingFrequency boundaryLayerThickness thermalLayerThickness entranceLength entranceLengthThermal kolmogorovLength kolmogorovTime batchelorLength turbulenceIntensity turbulentKineticEnergy dissipationRate specificDissipationRate yPlusTarget firstCellHeight firstNodeDistance growthRatio layerCount layerStackHeight coreCellSize cellCount cellCountCoarse cellCountMedium cellCountFine cellPeclet timeStep timeStepLimit timeStepConvective timeStepDiffusive timeStepAcoustic timeStepCapillary timeStepReaction timeStepPeriod flowThroughTime runTime stepCount coreHours wallTime memory'.split(' ');
 
 function quantitiesOf(workings: Workings, ids: readonly string[], spread: ReadonlyMap<string, Spread>, range: ReadonlyMap<string, { from: number; to: number }>): Record<string, PlanQuantity> {
   const flags = flagsIn(workings);

@@ -6,7 +6,7 @@ export interface Places {
   readonly of: Readonly<Partial<Record<PlaceKind, readonly string[]>>>;
   readonly target: Readonly<Partial<Record<PlaceKind, string>>>;
 }
-export const noPlaces: Places = { of: {}, target: {} };
+const noPlaces: Places = { of: {}, target: {} };
 
 /** A quantity at one place, or the plain one, with its ways in the order they are tried; needs are ids that exist. */
 export interface Node {
@@ -40,17 +40,20 @@ function placesOf(quantity: Quantity, places: Places): string[][] {
  *
  * @param definitions  in rising order of precedence: ways added later are tried earlier
  * @param places       the places of the case
+ * @param fixed        words that hold for good: ways that ask for another are left out, and those that ask for these ask no longer
  * @returns            nodes by id
  * @throws             {Problem} duplicate-definition, unknown-quantity, unknown-word: defects in definitions, found at build and by the tests
  */
-export function joinDefinitions(definitions: readonly Definition[], places: Places = noPlaces): Map<string, Node> {
+export function joinDefinitions(definitions: readonly Definition[], places: Places = noPlaces, fixed: Readonly<Record<string, string>> = {}): Map<string, Node> {
   const problems: ProblemData[] = [];
   const quantities = new Map<string, Quantity>();
   const added = new Map<string, MoreWays[]>();
   for (const d of definitions) {
     if ('more' in d) {
       const plain = d.id.split('@')[0] as string;
-      added.set(plain, [d, ...(added.get(plain) ?? [])]);
+      const had = added.get(plain);
+      if (had === undefined) added.set(plain, [d]);
+      else had.unshift(d);
     } else if (quantities.has(d.id)) problems.push({ code: 'duplicate-definition', message: `the quantity ${d.id} is defined twice` });
     else quantities.set(d.id, d);
   }
@@ -85,7 +88,8 @@ export function joinDefinitions(definitions: readonly Definition[], places: Plac
         lead.push(identity(`${q.id}@${target}`));
       } else if (q.plain !== undefined && q.plain !== 'target') lead.push(overPlaces(q.id, copies.map((c) => `${q.id}@${c.join('/')}`), q.plain));
     }
-    const bound = [...lead, ...own].map((way) => {
+    const holds = ([word, value]: [string, string | readonly string[]]): boolean => fixed[word] === undefined || (typeof value === 'string' ? value === fixed[word] : value.includes(fixed[word]));
+    const bound = [...lead, ...own].filter((way) => way.when === undefined || Object.entries(way.when).every(holds)).map((way) => {
       const needs = way.needs.map((n) => local(n, row));
       needs.forEach((n, k) => ids.has(n) || unknown(`a way to ${q.id} (${way.formula})`, way.needs[k] as string));
       const closes = way.closes === undefined ? undefined : local(way.closes, row);
@@ -102,7 +106,7 @@ export function joinDefinitions(definitions: readonly Definition[], places: Plac
       else for (const w of typeof value === 'string' ? [value] : value) {
         if (q.words !== undefined && !q.words.includes(w)) problems.push({ code: 'unknown-word', message: `a way to ${id} asks whether ${word} is ${w}, which is not in its list`, expected: q.words.join(', ') });
       }
-      out[local(word, row)] = value;
+      if (fixed[word] === undefined) out[local(word, row)] = value;
     }
     return out;
   };

@@ -76,7 +76,7 @@ export function wordWay<const N extends string>(w: Formula<N, never> & { readonl
  */
 export function loop<const N extends string>(w: About & { readonly needs: readonly N[]; readonly start: (of: Numbers<N>) => number; readonly closes: string; readonly within?: number }): Way {
   const { start, ...rest } = w;
-  return { ...rest, value: start as (of: Numbers) => number };
+  return { ...rest, value: start };
 }
 
 export type PlaceKind = 'wall' | 'station' | 'inlet' | 'region' | 'species' | 'particle';

@@ -1,8 +1,8 @@
 export { loop, quantity, way, ways, wordWay } from './define.ts';
 export type { Definition, Kind, Law, Laws, MoreWays, Numbers, PlaceKind, Quantity, QuantityAbout, Way, When } from './define.ts';
-export { joinDefinitions, noPlaces, type Node, type Places } from './build.ts';
+export { joinDefinitions, type Node, type Places } from './build.ts';
 export { Workings, type Bound, type Closed, type Given, type Slot, type Source } from './resolve.ts';
 export { flagsIn, stepOf, trace, type Step } from './trace.ts';
 export { missing } from './missing.ts';
-export { normalQuantile, spreads, type Settle, type Spread } from './spread.ts';
+export { spreads, type Settle, type Spread } from './spread.ts';
 export { flip, sweep } from './sweep.ts';

@@ -13,7 +13,7 @@ export interface Given {
 /** A way bound to slots: indices in place of names, and its argument, filled again each time. */
 export interface Bound {
   readonly way: Way;
-  readonly needs: Int32Array;
+  readonly needs: readonly number[];
   readonly ids: readonly string[];
   readonly when: readonly { readonly slot: number; readonly words: readonly string[] }[];
   readonly closes: number;
@@ -41,6 +41,7 @@ export interface Closed {
 }
 
 const mostPasses = 60;
+const never: Bound['when'] = [];
 
 /** All quantities of a case, resolved on demand. Replace given numbers by `set` and ask again: the same graph serves every point of a sweep. */
 export class Workings {
@@ -113,10 +114,10 @@ export class Workings {
         .map(({ way, needs, when, closes }): Bound => ({
           way,
           ids: needs,
-          needs: Int32Array.from(needs, (id) => this.index.get(id) as number),
+          needs: needs.map((id) => this.index.get(id) as number),
           when: this.#conditions(when),
           closes: closes === undefined ? -1 : (this.index.get(closes) as number),
-          of: Object.fromEntries(way.needs.map((id) => [id, Number.NaN])),
+          of: {},
           laws: shifted,
           source: way.scatter === undefined ? -1 : source(way.together ?? way, { key: way.together ?? `${slot.id}: ${way.formula}`, label: way.source, kind: 'scatter' }),
         }));
@@ -139,7 +140,7 @@ export class Workings {
   }
 
   #conditions(when: When | undefined): Bound['when'] {
-    return Object.entries(when ?? {}).map(([id, words]) => ({ slot: this.index.get(id) as number, words: typeof words === 'string' ? [words] : words }));
+    return when === undefined ? never : Object.entries(when).map(([id, words]) => ({ slot: this.index.get(id) as number, words: typeof words === 'string' ? [words] : words }));
   }
 
   has(id: string): boolean { return this.index.has(id); }
@@ -147,7 +148,7 @@ export class Workings {
   /** Number of a quantity, or undefined where it cannot be had. */
   get(id: string): number | undefined {
     const i = this.index.get(id);
-    return i === undefined || !this.#of(i) ? undefined : (this.#value[i] as number);
+    return i === undefined || !this.#of(i) ? undefined : this.#value[i];
   }
 
   /** Word of a word quantity, or undefined. */

@@ -131,7 +131,7 @@ function halton(k: number, base: number): number {
  * @returns  z with P(Z < z) = p, absolute error below 4.5e-4
  * @source   Abramowitz and Stegun, Handbook of Mathematical Functions (1964), 26.2.23
  */
-export function normalQuantile(p: number): number {
+function normalQuantile(p: number): number {
   const q = p < 0.5 ? p : 1 - p;
   const t = Math.sqrt(-2 * Math.log(Math.max(q, 1e-12)));
   const z = t - (2.515517 + 0.802853 * t + 0.010328 * t * t) / (1 + 1.432788 * t + 0.189269 * t * t + 0.001308 * t ** 3);

@@ -33,7 +33,7 @@ export function sweep<T>(workings: Workings, input: string, points: readonly num
  * @param within  relative width at which to stop
  * @returns       the input at which the reading changes, on the side of b
  */
-export function flip<T>(read: (x: number) => T, a: number, b: number, within = 1e-6): number {
+export function flip(read: (x: number) => unknown, a: number, b: number, within = 1e-6): number {
   const first = read(a);
   let [lo, hi] = [a, b];
   const log = lo > 0 && hi > 0;
