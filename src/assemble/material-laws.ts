@@ -1,5 +1,6 @@
 import { laws as lawsOf, propertyIn, takeState, type Material, type PropertyId, type State } from '../properties/index.ts';
 import { lawProperties, singleProperties, type PropertyAbout } from '../quantities/index.ts';
+import { Problem } from '../problems/index.ts';
 import type { Law } from '../workings/index.ts';
 
 /** A material as laws the workings can call, and what its record says of each. */
@@ -50,11 +51,16 @@ export function fluidLaws(material: Material, state: State): MaterialLaws {
 
 /** Density of saturated vapour as a function of pressure, where the record covers the vapour. */
 function saturatedVapour(material: Material, state: State): ((T: number, p: number) => number) | undefined {
-  if (!material.phases.includes('vapour' as never) || !material.properties.includes('saturationTemperature')) return undefined;
+  if (!material.phases.includes('vapour') || !material.properties.includes('saturationTemperature')) return undefined;
   return (_, p) => {
     const boiling = lawsOf(material, state).law('saturationTemperature')?.(state.temperature, p);
     if (boiling === undefined) return Number.NaN;
-    return propertyIn(material, 'density', takeState(material, { ...state, temperature: boiling, pressure: p, phase: 'vapour' }))?.value ?? Number.NaN;
+    try {
+      return propertyIn(material, 'density', takeState(material, { ...state, temperature: boiling, pressure: p, phase: 'vapour' }))?.value ?? Number.NaN;
+    } catch (problem) {
+      if (problem instanceof Problem) return Number.NaN; // below the triple point no liquid boils
+      throw problem;
+    }
   };
 }
 

@@ -41,7 +41,7 @@ export const results: Definition[] = [
     way({ needs: ['wallShear', 'density', 'speed'], value: ({ wallShear, density, speed }) => (2 * wallShear) / (density * speed ** 2), formula: 'c_f = 2 tau_w/(rho U^2)', source: 'definition' }),
   ]),
   quantity('frictionReynolds', { symbol: 'delta+', name: 'friction Reynolds number: layer in viscous units', unit: '1' }),
-  quantity('heatRate', { symbol: 'Q', name: 'heat from the walls, radiation included where it acts', unit: 'W', signed: true }, [
+  quantity('heatRate', { symbol: 'Q', name: 'heat from the walls', unit: 'W', signed: true }, [
     way({ needs: ['massFlow', 'specificHeatCapacityBulk', 'outletTemperature', 'inletTemperature'], when: { flowClass: ['internal', 'continuum'] }, value: ({ massFlow, specificHeatCapacityBulk, outletTemperature, inletTemperature }) => massFlow * specificHeatCapacityBulk * (outletTemperature - inletTemperature), formula: 'Q = m cp (T_out - T_in)', source: 'energy balance' }),
     way({ needs: ['heatTransferCoefficient', 'wallArea', 'wallTemperature', 'farTemperature', 'radiationFactorHeat'], when: { flowClass: 'body' }, value: ({ heatTransferCoefficient, wallArea, wallTemperature, farTemperature, radiationFactorHeat }) => radiationFactorHeat * heatTransferCoefficient * wallArea * (wallTemperature - farTemperature), formula: 'Q = F_r h A_w (T_w - T_far)', source: 'definition; F_r adds the radiation of the wall' }),
   ]),

@@ -4,6 +4,7 @@ import { nameOf } from '../say.ts';
 import { outsideOf } from './cautions-range.ts';
 import { trapsOf } from './cautions-traps.ts';
 import type { Check, Line, Table } from '../types.ts';
+import { targetSpreads } from '../target-spread.ts';
 
 /** Cautions of this case alone, the worst first: what can hurt people, what can spoil the target, which laws are stretched. */
 export function cautions(on: Ground): StageResult {
@@ -33,7 +34,7 @@ export function cautions(on: Ground): StageResult {
 /** What the whole plan is worth, in the spread of its first target. */
 function opening(on: Ground): Line {
   const main = on.assembled.targets.find((t) => t.computed);
-  const estimate = main === undefined ? 'none of the targets has an estimate to hold it against' : `the ${nameOf(on, main.quantity)} is put at {${main.quantity}}${on.has(`${main.id}.halfWidth`) ? `, a half-width of {${main.id}.halfWidth}` : ', without any spread because no input carries one'}`;
+  const estimate = main === undefined ? 'none of the targets has an estimate to hold it against' : `the ${nameOf(on, main.quantity)} is put at {${main.quantity}}${targetSpreads(on.assembled).some((s) => s.id === main.id) ? `, a half-width of {${main.id}.halfWidth}` : ', without any spread because no input carries one'}`;
   const rungs = on.ladder.length;
   const known = rungs === 0 ? 'no known answer lies on the way to it' : rungs === 1 ? `the known answer ${on.ladder[0]?.id} is met` : `the ${rungs} known answers of its ladder are met, from ${on.ladder[0]?.id} on`;
   return lines(`This is an estimate made before a run: ${estimate}. ${rungs === 0 ? `A simulation of it is no evidence by itself: ${known}.` : `A simulation is no evidence until ${known}.`}`)[0] as Line;

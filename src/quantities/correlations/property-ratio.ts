@@ -25,12 +25,13 @@ export function liquidNusseltFactor({ ratio, regime }: { ratio: number; regime: 
  * @param regime  laminar or turbulent
  * @returns       factor
  * @example       liquidFrictionFactor({ ratio: 2, regime: 'turbulent' }) // 0.83333
- * @range         ratio 0.2 to 5 laminar, 0.5 to 2.86 turbulent
+ * @range         ratio 0.2 to 5 laminar, 0.5 to 2.86 turbulent; beyond 2.86 a power that meets the line at 0.69, an extrapolation
  * @scatter       3 % laminar, 5 % turbulent
  * @source        laminar exponent 0.55 from the developed profile with viscosity exponential in temperature and uniform flux; turbulent Petukhov, Adv. Heat Transfer 6 (1970) 503
  */
 export function liquidFrictionFactor({ ratio, regime }: { ratio: number; regime: Regime }): number {
   if (regime === 'laminar') return ratio ** -0.55;
+  if (ratio > 2.86) return 0.69 * (ratio / 2.86) ** -0.353; // the straight line would reach zero at 7
   return ratio >= 1 ? (7 - ratio) / 6 : ratio ** -0.24;
 }
 
