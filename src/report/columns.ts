@@ -2,6 +2,9 @@ import stringWidth from 'fast-string-width';
 
 const gap = 2;
 
+/** Columns that a text takes; plain ASCII, which nearly all of it is, has one for each character. */
+const columnsOf = (text: string): number => (/^[ -~]*$/.test(text) ? text.length : stringWidth(text));
+
 /**
  * A table as lines with aligned columns; cells that are too long for their column are wrapped between words.
  *
@@ -20,8 +23,8 @@ export function columnLines(head: readonly string[], rows: readonly (readonly st
 function widthsFor(rows: readonly (readonly string[])[], width: number): number[] {
   const count = Math.max(...rows.map((row) => row.length));
   const over = (f: (cell: string) => number): number[] => Array.from({ length: count }, (_, k) => Math.max(1, ...rows.map((row) => f(row[k] ?? ''))));
-  const widths = over((cell) => stringWidth(cell));
-  const words = over((cell) => Math.max(0, ...cell.split(' ').map((word) => stringWidth(word))));
+  const widths = over((cell) => columnsOf(cell));
+  const words = over((cell) => Math.max(0, ...cell.split(' ').map((word) => columnsOf(word))));
   const room = width - gap * (count - 1);
   const total = (): number => widths.reduce((sum, w) => sum + w, 0);
   const shrink = (floor: readonly number[]): void => {
@@ -43,14 +46,14 @@ function cells(row: readonly string[], widths: readonly number[]): string[] {
 }
 
 /** Text filled up with blanks to a width. */
-export const padded = (text: string, width: number): string => text + ' '.repeat(Math.max(0, width - stringWidth(text)));
+export const padded = (text: string, width: number): string => text + ' '.repeat(Math.max(0, width - columnsOf(text)));
 
 /** Text in lines of a width, broken between words; a word longer than a line is broken where it must be. */
 export function broken(text: string, width: number): string[] {
   const lines: string[] = [];
   let line = '';
   const put = (word: string): void => {
-    if (line !== '' && stringWidth(line) + 1 + stringWidth(word) > width) {
+    if (line !== '' && columnsOf(line) + 1 + columnsOf(word) > width) {
       lines.push(line);
       line = '';
     }
@@ -61,11 +64,11 @@ export function broken(text: string, width: number): string[] {
 }
 
 function pieces(word: string, width: number): string[] {
-  if (stringWidth(word) <= width) return [word];
+  if (columnsOf(word) <= width) return [word];
   const out: string[] = [];
   let piece = '';
   for (const character of word) {
-    if (piece !== '' && stringWidth(piece + character) > width) {
+    if (piece !== '' && columnsOf(piece + character) > width) {
       out.push(piece);
       piece = '';
     }

@@ -33,18 +33,33 @@ export const gutter = 11;
  */
 export function fitted(parts: readonly Part[], height: number, paint: Paint): string[] {
   const drawn = parts.filter((part) => part.items.length > 0);
-  const shown = drawn.map((part) => part.items.length);
-  const spare = (k: number): number => (shown[k] as number) - (drawn[k] as Part).least;
-  const total = (): number => drawn.reduce((sum, part, k) => sum + linesOf(part, shown[k] as number).length + (part.apart === true ? 1 : 0), 0);
-  while (total() > height) {
-    const k = drawn.reduce((best, _, i) => (spare(i) > 0 && (best < 0 || spare(i) > spare(best)) ? i : best), -1);
-    if (k < 0) break;
-    shown[k] = (shown[k] as number) - 1;
-  }
+  const shown = shownOf(drawn, height);
   return drawn.flatMap((part, k) => {
     const label = (part.warns === true ? paint.warn : paint.strong)(padded(part.label, gutter));
     return [...(part.apart === true ? [''] : []), ...linesOf(part, shown[k] as number).map((text, i) => `${i === 0 ? label : ' '.repeat(gutter)}${text}`.trimEnd())];
   });
+}
+
+/** How many items of each part are shown: least important ones go until all fits, then what room is left is given back. */
+function shownOf(parts: readonly Part[], height: number): number[] {
+  const shown = parts.map((part) => part.items.length);
+  const total = (): number => parts.reduce((sum, part, k) => sum + linesOf(part, shown[k] as number).length + (part.apart === true ? 1 : 0), 0);
+  const most = (spare: (k: number) => number): number => parts.reduce((best, _, k) => (spare(k) > 0 && (best < 0 || spare(k) > spare(best)) ? k : best), -1);
+  while (total() > height) {
+    const beyond = most((k) => (shown[k] as number) - (parts[k] as Part).least);
+    const k = beyond >= 0 ? beyond : most((at) => (shown[at] as number) - 1);
+    if (k < 0) break;
+    shown[k] = (shown[k] as number) - 1;
+  }
+  parts.forEach((part, k) => {
+    while ((shown[k] as number) < part.items.length) {
+      shown[k] = (shown[k] as number) + 1;
+      if (total() <= height) continue;
+      shown[k] = (shown[k] as number) - 1;
+      break;
+    }
+  });
+  return shown;
 }
 
 function linesOf(part: Part, shown: number): string[] {

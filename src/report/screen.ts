@@ -32,12 +32,12 @@ export function screen(plan: Plan, writing: Writing, options: ScreenOptions): st
   const head = [paint.strong(cut(titled(plan), width)), ...(options.purpose === undefined ? [] : broken(oneLine(options.purpose), width).slice(0, 2))];
   const parts: Part[] = [
     { label: 'At odds', items: plan.contradictions.map((c) => wrap(`${oneLine(c.says)}: ${oneLine(c.effect)}. Cure: ${oneLine(c.cure)}`, 3)), least: 2, apart: true, warns: true },
-    { label: 'Mind first', items: [...cautionLines(plan, writing).map((text) => wrap(text, 3)), ...strained(plan)], least: 3, apart: true, warns: true },
+    { label: 'Mind first', items: [...cautionLines(plan, writing).map((text) => wrap(text, 2)), ...strained(plan)], least: 3, apart: true, warns: true },
     { label: 'Target', items: plan.targets.map((t) => targetText(t, plan, writing)), least: 2, apart: true },
     ...effectParts(plan, writing),
     { label: 'Choices', ...choiceItems(plan), least: 2 },
     ...setUpParts(plan, writing, room),
-    { label: 'Ladder', items: plan.ladder.map((r) => rungText(r, writing)), least: 2, apart: true },
+    { label: 'Ladder', items: plan.ladder.map((r) => rungText(r, writing)), least: 3, apart: true },
     { label: 'Taken', items: assumed(plan, writing), least: 1 },
     { label: 'More', items: moreItems(options.file, plan), least: 2, apart: true },
   ];
@@ -68,8 +68,8 @@ function effectParts(plan: Plan, writing: Writing): Part[] {
   const decided = (e: PlanEffect): string => (e.deciding === undefined ? writing.fill(e.because) : fitting(wordingsOf(e, price(e), writing), room - Math.max(wide, e.id.length)));
   const price = (e: PlanEffect): string => (e.price === undefined ? '' : `; price ${shortPrice(e.price, plan, writing)}`);
   return [
-    { label: 'Include', items: sortedBy(of('include'), closeness).map((e) => row(e, decided(e))), least: 3, apart: true },
-    { label: 'Check', items: of('borderline').map((e) => row(e, decided(e), e.firstRun === 'leave-out' ? 'first run without it' : 'first run with it', e.check === undefined ? '' : writing.fill(e.check))), least: 2 },
+    { label: 'Include', items: sortedBy(of('include'), closeness).map((e) => row(e, decided(e))), least: 6, apart: true },
+    { label: 'Check', items: of('borderline').map((e) => row(e, decided(e), e.firstRun === 'leave-out' ? 'first run without it' : 'first run with it', e.check === undefined ? '' : writing.fill(e.check))), least: 3 },
     { label: 'Open', items: of('undecided').map((e) => row(e, (e.missing ?? []).length === 0 ? writing.fill(e.because) : `needs ${(e.missing ?? []).map((m) => oneLine(m).replaceAll('|', ' or ')).join(', ')}`)), least: 2, warns: true },
     { label: 'Leave out', ...leftOut(plan, sortedBy(of('leave-out'), closeness)), least: 2 },
   ];
@@ -151,5 +151,5 @@ function assumed(plan: Plan, writing: Writing): string[] {
 function moreItems(file: string, plan: Plan): string[] {
   const name = /^[\w./@%+-]+$/.test(file) ? file : 'FILE';
   const id = plan.quantities['firstCellHeight'] === undefined ? 'ID' : 'firstCellHeight';
-  return [joined([`runbrief trace ${name.length > 36 ? 'FILE' : name} ${id}`, 'where a number comes from'], room, '   '), 'the same with --full: every section; --into DIR: files; --json: data'];
+  return [joined([`runbrief trace ${name.length > 36 ? 'FILE' : name} ${id}`, 'where it comes from'], room, '   '), 'the same with --full: every section; --into DIR: files; --json: data'];
 }
