@@ -27,5 +27,5 @@ function marked(text: string): string {
     .replaceAll('<', '&lt;')
     .replaceAll('>', '&gt;')
     .replace(/^[-+=#]/, (sign) => `\\${sign}`)
-    .replace(/^(\d+)([.)])/, String.raw`$1\$2`);
+    .replace(/^(\d+)([.)])(?=\s|$)/, String.raw`$1\$2`);
 }

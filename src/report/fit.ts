@@ -52,12 +52,12 @@ function shownOf(parts: readonly Part[], height: number): number[] {
     shown[k] = (shown[k] as number) - 1;
   }
   parts.forEach((part, k) => {
-    while ((shown[k] as number) < part.items.length) {
-      shown[k] = (shown[k] as number) + 1;
-      if (total() <= height) continue;
-      shown[k] = (shown[k] as number) - 1;
-      break;
+    const kept = shown[k] as number;
+    for (let more = part.items.length; more > kept; more--) {
+      shown[k] = more;
+      if (total() <= height) return;
     }
+    shown[k] = kept;
   });
   return shown;
 }
