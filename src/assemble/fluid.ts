@@ -3,8 +3,8 @@ import { Problem, type ProblemData } from '../problems/index.ts';
 import { loadMaterial, type Collection, type Material, type State } from '../properties/index.ts';
 import { fluidLaws, type MaterialLaws } from './material-laws.ts';
 
-export const assumedPressure = 101325;
-export const assumedTemperature = 293.15;
+const assumedPressure = 101325;
+const assumedTemperature = 293.15;
 
 /** The fluid of a case: its material with the state that settles its phase, or constants alone. */
 export interface Fluid {
@@ -54,7 +54,7 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   const share = on.list('fluid.composition')[0];
   const composition = share === undefined ? undefined : on.number(`fluid.composition.${share}`);
   const state: State = {
-    temperature: temperature ?? assumedTemperature,
+    temperature: meltOf(on, material) ?? temperature ?? assumedTemperature,
     pressure: pressure ?? assumedPressure,
     ...(humidity === undefined ? {} : { humidity }),
     ...(composition === undefined ? {} : { composition }),
@@ -64,8 +64,19 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   return { material, laws, medium: laws.phase === 'liquid' ? 'liquid' : laws.phase === 'solid' ? 'solid' : 'gas', state, assumed };
 }
 
+/** What flows where a solid melts is the melt: its state lies between the melting point and the hottest wall. */
+function meltOf(on: Case, { meltingTemperature: melting }: Material): number | undefined {
+  if (on.word('initial.state') !== 'solid' || melting === undefined) return undefined;
+  const hottest = Math.max(...wallTemperatures(on));
+  return hottest > melting ? (melting + hottest) / 2 : undefined;
+}
+
 /** Middle of the wall and surroundings temperatures, where nothing else tells the state. */
 function middle(on: Case): number | undefined {
-  const found = [...on.entries.values()].filter((e) => /^(walls?\..*temperature|surroundings\.temperature)$/.test(e.path) && typeof e.value === 'number').map((e) => e.value as number);
+  const found = wallTemperatures(on);
   return found.length === 0 ? undefined : (Math.min(...found) + Math.max(...found)) / 2;
+}
+
+function wallTemperatures(on: Case): number[] {
+  return [...on.entries.values()].filter((e) => /^(walls?\..*temperature|surroundings\.temperature)$/.test(e.path) && typeof e.value === 'number').map((e) => e.value as number);
 }

@@ -47,8 +47,13 @@ export function leavesOf(vocabulary: Vocabulary, flow: string, walls: readonly s
     }
   };
   const list = (item: MapField, ofWalls: boolean, path: string, places: readonly string[]): void => {
-    const names = ofWalls ? walls : items(path);
-    for (const name of names) visit(item.keys, `${path}.${name}`, ofWalls || places.length === 0 ? [`${path}.${name}`] : places);
+    const own = (name: string): readonly string[] => (places.length === 0 ? [`${path}.${name}`] : places);
+    if (!ofWalls) for (const name of items(path)) visit(item.keys, `${path}.${name}`, own(name));
+    else {
+      // A group such as `sides` speaks for its members; it stands first, so that a wall's own value counts before it.
+      for (const group of items(path).filter((name) => !walls.includes(name))) visit(item.keys, `${path}.${group}`, walls.filter((w) => vocabulary.wallGroups[group]?.includes(w)).map((w) => `${path}.${w}`));
+      for (const name of walls) visit(item.keys, `${path}.${name}`, [`${path}.${name}`]);
+    }
   };
   visit(vocabulary.keys, '', []);
   return out;

@@ -2,13 +2,24 @@ import type { Case } from '../case/index.ts';
 import { ways, type Definition, type Way } from '../workings/index.ts';
 
 /**
- * The accuracy of the strictest target, as a share: of the target, or of the driving difference where it is a temperature.
+ * The accuracy of the strictest target, as a share: of the target, or of the driving difference where it is a temperature;
+ * and the temperature that matters, the accuracy of the first target that states it in kelvins.
  *
  * @param on    the case
  * @param unit  SI unit of a quantity id, undefined where no definition has it
- * @returns     a way to `targetTolerance`; none where no target asks for an accuracy
+ * @returns     ways to `targetTolerance` and `temperatureTolerance`; none where no target asks for an accuracy
  */
 export function toleranceWays(on: Case, unit: (id: string) => string | undefined): Definition[] {
+  return [...strictest(on, unit), ...inKelvins(on)];
+}
+
+function inKelvins(on: Case): Definition[] {
+  const within = on.targets.find((t) => t.within?.absolute !== undefined && t.within.unit === 'K')?.within;
+  if (within === undefined) return [];
+  return [ways('temperatureTolerance', [{ needs: [], value: () => within.absolute as number, formula: `T_tol = ${within.written}`, source: 'the case', dimensional: 'kelvins that the case states' }])];
+}
+
+function strictest(on: Case, unit: (id: string) => string | undefined): Definition[] {
   const asked = on.targets.flatMap((t): Way[] => {
     const { relative, ofChange, absolute, written } = t.within ?? {};
     const share = relative ?? ofChange;

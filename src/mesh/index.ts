@@ -1,13 +1,4 @@
-import type { Definition } from '../workings/index.ts';
-import { cuts } from './cuts.ts';
-import { eddyCounts } from './eddies.ts';
-import { meshErrors } from './error.ts';
-import { regions } from './regions.ts';
-import { sizes } from './sizes.ts';
-
+export { meshDefinitions } from './definitions.ts';
 export { plane } from './cuts.ts';
 export { geometricBetween, geometricRatio, inverseSinhc, tanhStretching } from './grading.ts';
 export { wallModelledCells, wallResolvedCells } from './eddies.ts';
-
-/** What the mesh consists of, and the error it is expected to leave. */
-export const meshDefinitions: Definition[] = [...cuts, ...sizes, ...regions, ...meshErrors, ...eddyCounts];

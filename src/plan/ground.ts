@@ -26,7 +26,7 @@ export type Stage = (on: Ground) => StageResult;
 export const idsIn = (text: string): string[] => [...text.matchAll(/\{([^{}]+)\}/g)].map((m) => m[1] as string);
 
 /** A line of text; `{id}` names the quantities in it. */
-export function line(text: string): Line {
+function line(text: string): Line {
   return { text, quantities: idsIn(text) };
 }
 

@@ -3,7 +3,7 @@ import { stepOf, type Settle, type Spread, type Workings } from '../workings/ind
 import type { PlanQuantity } from './types.ts';
 
 /** The ends of the operating ranges, all combinations up to three ranges, beyond that one at a time. */
-export function cornersOf(ranges: readonly Range[]): Readonly<Record<string, number>>[] {
+function cornersOf(ranges: readonly Range[]): Readonly<Record<string, number>>[] {
   if (ranges.length === 0) return [];
   if (ranges.length > 3) return ranges.flatMap((r) => [{ [r.path]: r.from }, { [r.path]: r.to }]);
   let rows: Record<string, number>[] = [{}];

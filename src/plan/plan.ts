@@ -1,3 +1,4 @@
+import type * as Crypto from 'node:crypto';
 import { createRequire } from 'node:module';
 import { basename } from 'node:path';
 import { assemble, type Assembled } from '../assemble/index.ts';
@@ -102,7 +103,7 @@ export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
 
 /** Digest of the case file; the library behind it is loaded here, since few commands need it. */
 function digest(text: string): string {
-  const { createHash } = createRequire(import.meta.url)('node:crypto') as typeof import('node:crypto');
+  const { createHash } = createRequire(import.meta.url)('node:crypto') as typeof Crypto;
   return createHash('sha256').update(text).digest('hex');
 }
 

@@ -6,7 +6,7 @@
  * @returns     optimal string alignment distance
  * @source      Damerau 1964, Levenshtein 1966, optimal string alignment form
  */
-export function editDistance(a: string, b: string): number {
+function editDistance(a: string, b: string): number {
   const rows: number[][] = [Array.from({ length: b.length + 1 }, (_, j) => j)];
   for (let i = 1; i <= a.length; i++) {
     const row = [i];

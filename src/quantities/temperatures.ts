@@ -70,8 +70,8 @@ export const temperatures: Definition[] = [
   ...(['highest', 'lowest'] as const).map((which) => {
     const [wall, enclosed, join] = which === 'highest' ? (['wallTemperatureMax', 'hotTemperature', Math.max] as const) : (['wallTemperatureMin', 'coldTemperature', Math.min] as const);
     return quantity(`${which}Temperature`, { symbol: which === 'highest' ? 'T_max' : 'T_min', name: `${which} temperature of the case`, ...kelvin }, [
-      way({ needs: [enclosed], when: { flowClass: 'enclosure' }, value: (of) => of[enclosed] as number, formula: `T of the ${which === 'highest' ? 'hot' : 'cold'} wall`, source: 'definition' }),
-      way({ needs: [wall, 'farTemperature'], value: (of) => join(of[wall] as number, of['farTemperature'] as number), formula: `${which} of walls and arriving fluid`, source: 'definition' }),
+      way({ needs: [enclosed], when: { flowClass: 'enclosure' }, value: (of) => of[enclosed], formula: `T of the ${which === 'highest' ? 'hot' : 'cold'} wall`, source: 'definition' }),
+      way({ needs: [wall, 'farTemperature'], value: (of) => join(of[wall], of.farTemperature), formula: `${which} of walls and arriving fluid`, source: 'definition' }),
       way({ needs: ['farTemperature'], value: ({ farTemperature }) => farTemperature, formula: 'T_far', source: 'no wall temperature known' }),
     ]);
   }),

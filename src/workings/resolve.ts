@@ -452,7 +452,7 @@ export class Workings {
     for (let k = 0; k < open.length; k++) before[k] = this.#stamp[open[k] as number] as number;
     // Quantities on trial in a loop around this one keep their trial value.
     this.#trying[i] = 1;
-    const kept = this.closed.has(i) && Number.isFinite(this.#value[i] as number) ? (this.#value[i] as number) : start;
+    const kept = this.closed.has(i) && Number.isFinite(this.#value[i]) ? (this.#value[i] as number) : start;
     const x = this.#search(i, b, kept, open) ?? (kept === start ? undefined : this.#search(i, b, start, open));
     this.#trying[i] = 0;
     for (let k = 0; k < open.length; k++) {

@@ -1,0 +1,29 @@
+import { describe, expect, it } from 'vitest';
+import { vocabulary } from '../../src/assemble/index.ts';
+import { readCase } from '../../src/case/index.ts';
+import { settleCase } from '../../src/plan/index.ts';
+
+const duct = (more: string) => settleCase(readCase(`format: 1\ntitle: t\n${more}flow: duct\nsizes: { width: 20 mm, height: 10 mm, length: 1 m }\nfluid: { material: water, pressure: 2 bar abs }\ninlet: { speed: 1 m/s, temperature: 20 degC }\n`, 't.case.yaml', vocabulary)).assembled.workings;
+
+describe('walls named as a group', () => {
+  it('layers of the group count for each member: 2 mm over 40 W/(m K) is 5e-5 m^2 K/W', () => {
+    const w = duct('walls: [{ name: sides, temperature: 60 degC, layers: [{ thermalConductivity: 40 W/(m K), thickness: 2 mm }] }]\n');
+    expect(w.get('outerTemperature@walls.left')).toBeCloseTo(333.15, 9);
+    expect(w.get('outerTemperature@walls.right')).toBeCloseTo(333.15, 9);
+    expect(w.get('wallResistance@walls.left')).toBeCloseTo(5e-5, 9);
+    expect(w.get('wallResistance@walls.right')).toBeCloseTo(5e-5, 9);
+  });
+  it('a wall overrides its group', () => {
+    const w = duct('walls: [{ name: left, heatFlux: 3 kW/m^2 }, { name: sides, heatFlux: 1 kW/m^2 }]\n');
+    expect(w.get('wallHeatFlux@walls.left')).toBe(3000);
+    expect(w.get('wallHeatFlux@walls.right')).toBe(1000);
+  });
+});
+
+describe('the temperature that matters', () => {
+  it.each([
+    ['the first accuracy in kelvins', 'targets: [{ quantity: pressureDrop, within: 5 % }, { quantity: outletTemperature, within: 0.4 K }, { quantity: wallTemperature, within: 3 K }]\n', 0.4],
+    ['1 K where none is stated in kelvins', 'targets: [{ quantity: pressureDrop, within: 5 % }]\n', 1],
+    ['1 K where a share of the change is asked', 'targets: [{ quantity: outletTemperature, within: 5 % of change }]\n', 1],
+  ])('is %s', (_, targets, kelvins) => expect(duct(`${targets}wall: { temperature: 60 degC }\n`).get('temperatureTolerance')).toBe(kelvins));
+});
