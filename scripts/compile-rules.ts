@@ -1,6 +1,6 @@
-// Compiles rules/<topic>/*.json into one file.
+// Compiles rules/<topic>/*.json into one file, every id in them checked.
 import { writeFileSync } from 'node:fs';
-import { compileRules } from '../src/decide/index.ts';
+import { compileFiles } from '../src/plan/index.ts';
 import { textsUnder } from './texts.ts';
 
-writeFileSync('dist/rules.json', JSON.stringify(compileRules(textsUnder('rules', '.json'))));
+writeFileSync('dist/rules.json', JSON.stringify(compileFiles(textsUnder('rules', '.json'))));

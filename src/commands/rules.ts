@@ -1,4 +1,5 @@
-import { choiceIds, effectIds, everyFact, noRules, shippedRules, withPack } from '../decide/index.ts';
+import { choiceIds, effectIds, everyFact, noRules, withPack } from '../decide/index.ts';
+import { shippedRules } from '../plan/index.ts';
 import { nearestName, Problem } from '../problems/index.ts';
 import { choiceRuleText, effectRuleText, rulesListText } from '../report/index.ts';
 import { Args, Base, Flags } from './base.ts';

@@ -8,7 +8,7 @@ export { flips, type FlipAt, type FlipInput } from './flips.ts';
 export type { ChoiceRule, CompiledRules, Condition, EffectRule, Limit, PriceLine, Verdict } from './form.ts';
 export { choiceIds, effectIds, inOrder } from './ids.ts';
 export { knownFacts, type KnownFacts } from './known.ts';
-export { readRuleFolder, shippedRules, withPack } from './load.ts';
+export { readRuleFolder, withPack } from './load.ts';
 export type { Price, Target } from './price.ts';
 export { settle, type SettleOptions, type State } from './settle.ts';
 export { definitionsOfVerdicts } from './words.ts';

@@ -1,6 +1,5 @@
 import { readdirSync, readFileSync, statSync } from 'node:fs';
 import { join } from 'node:path';
-import { fileURLToPath } from 'node:url';
 import { Problem } from '../problems/index.ts';
 import { compileRules, noRules, type RuleFile } from './compile.ts';
 import { exampleOutcomes } from './examples.ts';
@@ -33,17 +32,6 @@ export function readRuleFolder(folder: string): RuleFile[] {
     if (about.size > largest) throw new Problem({ code: 'file-too-large', message: `${file} is larger than ${largest / 1024} kB`, file });
     return { file, text: readFileSync(file, 'utf8') };
   });
-}
-
-/**
- * The rules that come with the program: compiled by the build, or read from the folder of rules where the program runs from its source.
- *
- * @returns  compiled rules
- * @throws   {Problem} what is wrong in a rule file, where they are read from the folder
- */
-export function shippedRules(): CompiledRules {
-  if (import.meta.url.endsWith('.ts')) return compileRules(readRuleFolder(fileURLToPath(new URL('../../rules', import.meta.url))));
-  return JSON.parse(readFileSync(new URL('./rules.json', import.meta.url), 'utf8')) as CompiledRules;
 }
 
 /**

@@ -37,7 +37,15 @@ describe('the package in an empty folder, without a network', () => {
   it('is a library too', () => {
     const used = run(process.execPath, '--input-type=module', '-e', `import { Problem } from 'runbrief'; console.log(new Problem({ code: 'a', message: 'b' }).list.length)`);
     expect([used.stderr, used.stdout]).toEqual(['', '1\n']);
-    expect(readFileSync(join(folder, 'node_modules/runbrief/dist/types/index.d.ts'), 'utf8')).toContain('Problem');
+  });
+  it('has types that a strict program compiles against', () => {
+    writeFileSync(join(folder, 'use.mts'), `import { plan, readCaseFile, vocabulary, type Plan } from 'runbrief';
+export const made: Promise<Plan> = plan(readCaseFile('line.case.yaml', vocabulary), { version: '1' });
+// @ts-expect-error a number is no file name
+readCaseFile(3, vocabulary);
+`);
+    const checked = run(process.execPath, join(root, 'node_modules/typescript/bin/tsc'), '--noEmit', '--strict', '--module', 'nodenext', '--target', 'es2023', '--types', 'node', '--typeRoots', join(root, 'node_modules/@types'), 'use.mts');
+    expect(checked.stdout).toBe('');
   });
   it('carries no tests, sources or compiled code of this machine', () => {
     const held = readdirSync(join(folder, 'node_modules/runbrief'), { recursive: true, encoding: 'utf8' });
