@@ -75,8 +75,8 @@ const stack: Definition[] = [
     way({ needs: ['firstCellHeight', 'growthRatio', 'coreCellSize'], value: ({ firstCellHeight, growthRatio, coreCellSize }) => layersToMatch(firstCellHeight, growthRatio, coreCellSize), formula: 'N_m = 1 + ln(h_c/h_1)/ln g, rounded up', source: 'geometric series' }),
   ]),
   quantity('layerCount', { symbol: 'N_l', name: 'layers of cells at the wall', unit: '1' }, [
-    way({ needs: ['layersForCover', 'layersForMatch'], value: ({ layersForCover, layersForMatch }) => Math.max(layersForCover, layersForMatch), formula: 'N_l = max(N_c, N_m)', source: practice }),
-    way({ needs: ['layersForMatch'], value: ({ layersForMatch }) => layersForMatch, formula: 'N_l = N_m', source: `${practice}; the thickness of the layer is not known` }),
+    way({ as: 'decided', needs: ['layersForCover', 'layersForMatch'], value: ({ layersForCover, layersForMatch }) => Math.max(layersForCover, layersForMatch), formula: 'N_l = max(N_c, N_m)', source: practice }),
+    way({ as: 'decided', needs: ['layersForMatch'], value: ({ layersForMatch }) => layersForMatch, formula: 'N_l = N_m', source: `${practice}; the thickness of the layer is not known` }),
   ]),
   quantity('layerStackHeight', { symbol: 'S', name: 'height of the layers at the wall together', unit: 'm' }, [
     way({ needs: ['firstCellHeight', 'growthRatio', 'layerCount'], value: ({ firstCellHeight, growthRatio, layerCount }) => stackHeight(firstCellHeight, growthRatio, layerCount), formula: 'S = h_1 (g^N - 1)/(g - 1)', source: 'geometric series' }),

@@ -16,7 +16,7 @@ export const singleProperties = [
   { id: 'compressibilityFactor', symbol: 'Z', name: 'compressibility factor', unit: '1' },
   { id: 'electricalConductivity', symbol: 'sigma_e', name: 'electrical conductivity', unit: 'S/m' },
   { id: 'surfaceTension', symbol: 'sigma', name: 'surface tension', unit: 'N/m' },
-  { id: 'vapourPressure', symbol: 'p_v', name: 'vapour pressure at the highest temperature', unit: 'Pa', temperature: 'highestTemperature' },
+  { id: 'vapourPressure', symbol: 'p_v', name: 'vapour pressure of the warmest stream', unit: 'Pa', temperature: 'streamTemperatureMax' },
   { id: 'saturationTemperature', symbol: 'T_sat', name: 'saturation temperature at the lowest pressure', unit: 'K', pressure: 'lowestPressure' },
   { id: 'latentHeat', symbol: 'h_fg', name: 'latent heat of evaporation at the lowest pressure', unit: 'J/kg', pressure: 'lowestPressure' },
   { id: 'vapourDensity', symbol: 'rho_v', name: 'density of saturated vapour at the lowest pressure', unit: 'kg/m^3', pressure: 'lowestPressure' },

@@ -22,7 +22,9 @@ export const scales: Definition[] = [
   quantity('flowLength', { symbol: 'L_x', name: 'length along the flow', unit: 'm' }),
   quantity('span', { symbol: 'L_z', name: 'extent in the third direction', unit: 'm' }),
   quantity('gap', { symbol: 'H', name: 'smallest width between walls', unit: 'm' }),
-  quantity('passageHeight', { symbol: 'H_g', name: 'extent along gravity', unit: 'm' }),
+  quantity('passageHeight', { symbol: 'H_g', name: 'extent along gravity', unit: 'm' }, [
+    way({ needs: ['length'], when: { flowClass: 'body' }, as: 'assumed', value: ({ length }) => length, formula: 'H_g = L, at most', source: 'the setting of the body against gravity is not given' }),
+  ]),
   quantity('parallelPassages', { symbol: 'n', name: 'number of equal passages', unit: '1' }, [
     way({ needs: [], as: 'assumed', value: () => 1, formula: 'n = 1', source: 'one passage unless the case says otherwise' }),
   ]),

@@ -34,6 +34,10 @@ export const temperatures: Definition[] = [
   quantity('bulkTemperatureNext', { symbol: 'T_b', name: 'mean bulk temperature that the heat balance gives', ...kelvin }, [
     way({ needs: ['inletTemperature', 'outletTemperature'], value: ({ inletTemperature, outletTemperature }) => (inletTemperature + outletTemperature) / 2, formula: '(T_in + T_out)/2', source: 'definition' }),
   ]),
+  quantity('streamTemperatureMax', { symbol: 'T_s,max', name: 'warmest of the arriving fluid and the bulk', ...kelvin }, [
+    way({ needs: ['farTemperature', 'bulkTemperature'], value: ({ farTemperature, bulkTemperature }) => Math.max(farTemperature, bulkTemperature), formula: 'max(T_far, T_b)', source: 'definition; what boils at a wall is judged apart' }),
+    way({ needs: ['referenceTemperature'], value: ({ referenceTemperature }) => referenceTemperature, formula: 'T_ref', source: 'no bulk in a closed flow' }),
+  ]),
   quantity('outletTemperature', { symbol: 'T_out', name: 'mass-mean outlet temperature', ...kelvin }, [
     way({ needs: ['inletTemperature'], when: { flowClass: through, energySolved: 'no' }, value: ({ inletTemperature }) => inletTemperature, formula: 'T_out = T_in', source: 'one temperature throughout' }),
     way({

@@ -63,6 +63,8 @@ export class Linear {
       this.#closed = undefined;
       return;
     }
+    // A whole number that the plan decides is what it is.
+    if (bound.way.as === 'decided' && Number.isInteger(w.value(i))) return;
     for (const n of bound.needs) this.#visit(n);
     const mine = adds(w, i);
     const x = w.value(i);

@@ -1,6 +1,6 @@
 import { lines, type Ground, type StageResult } from '../ground.ts';
 import { hazardsOf } from '../hazards.ts';
-import { nameOf } from '../say.ts';
+import { listed, nameOf } from '../say.ts';
 import { outsideOf } from './cautions-range.ts';
 import { trapsOf } from './cautions-traps.ts';
 import type { Check, Line, Table } from '../types.ts';
@@ -11,13 +11,15 @@ export function cautions(on: Ground): StageResult {
   const hazards = hazardsOf(on);
   const traps = trapsOf(on);
   const outside = outsideOf(on);
+  const unjudged = on.decisions.effects.filter((e) => !e.judged && e.applies !== false).map((e) => e.id);
   const first = [...hazards.map((h) => h.title), ...outside.map((o) => `stretched law for the ${o.name}`), ...traps.map((t) => t.title)].slice(0, 3);
   return {
     lines: [
       opening(on),
       ...lines(
-        hazards.length > 0 && 'What follows on dangers supports and never replaces qualified judgement, tests and the codes of the place; relief, structure and safety of life are decided by licensed practitioners.',
         first.length > 0 && `First of all: ${first.join('; ')}.`,
+        unjudged.length > 0 && `Not in these numbers: ${listed(unjudged)}. The case names what they depend on, and no rule judges them yet: the spreads do not hold their effect.`,
+        hazards.length > 0 && 'What follows on dangers supports and never replaces qualified judgement, tests and the codes of the place; relief, structure and safety of life are decided by licensed practitioners.',
         ...hazards.map((h) => h.text),
         ...outside.map((o) => o.text),
         ...traps.map((t) => `${t.title}: ${t.text} Unmasked by: ${t.test}.`),
@@ -34,7 +36,7 @@ export function cautions(on: Ground): StageResult {
 /** What the whole plan is worth, in the spread of its first target. */
 function opening(on: Ground): Line {
   const main = on.assembled.targets.find((t) => t.computed);
-  const estimate = main === undefined ? 'none of the targets has an estimate to hold it against' : `the ${nameOf(on, main.quantity)} is put at {${main.quantity}}${targetSpreads(on.assembled).some((s) => s.id === main.id) ? `, a half-width of {${main.id}.halfWidth}` : ', without any spread because no input carries one'}`;
+  const estimate = main === undefined ? 'none of the targets has an estimate to hold it against' : `the ${nameOf(on, main.quantity)} is put at {${main.quantity}}${targetSpreads(on.assembled).some((s) => s.id === main.id) ? '' : ', without any spread because no input carries one'}`;
   const rungs = on.ladder.length;
   const known = rungs === 0 ? 'no known answer lies on the way to it' : rungs === 1 ? `the known answer ${on.ladder[0]?.id} is met` : `the ${rungs} known answers of its ladder are met, from ${on.ladder[0]?.id} on`;
   return lines(`This is an estimate made before a run: ${estimate}. ${rungs === 0 ? `A simulation of it is no evidence by itself: ${known}.` : `A simulation is no evidence until ${known}.`}`)[0] as Line;
