@@ -40,7 +40,8 @@ function closureTable(on: Ground): Table[] {
 
 function wallLines(on: Ground): Line[] {
   const wall = on.choice('near-wall-treatment');
-  if (wall.applies === false || !on.has('firstCellHeight')) return lines(`Near-wall treatment: none, ${wall.because}.`);
+  if (wall.applies === false) return lines(`Near-wall treatment: none, ${wall.because}.`);
+  if (!on.has('firstCellHeight')) return lines(`Near-wall treatment ${wall.chosen}: ${wall.because}. No first cell can be given: the friction at the wall is not known.`);
   const law = wall.chosen === 'law-of-the-wall' || wall.chosen === 'rough-law';
   const y = on.number('yPlusTarget') ?? 1;
   const log = (on.number('frictionReynolds') ?? 0) * 0.2;
