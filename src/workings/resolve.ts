@@ -67,7 +67,7 @@ export class Workings {
   readonly #round = 2;
   #next: Int32Array[] | undefined;
   readonly #followers = new Map<number, Int32Array>();
-  /** How many sources stand off their nominal point. */
+  /** How many sources stand off their nominal point, and readings aside of it. */
   #shifted = 0;
   #knowable: Uint8Array | undefined;
   readonly #lawSource = new Map<string, number>();
@@ -195,10 +195,12 @@ export class Workings {
     const knowable = this.#knowable;
     const closed = [...this.closed];
     const failures = [...this.failures];
+    this.#shifted++; // loops need close no more than a difference shows
     for (const [id, value] of pins) this.set(id, value);
     try {
       return read();
     } finally {
+      this.#shifted--;
       this.#value.set(kept.value);
       this.#base.set(kept.base);
       this.#stamp.set(kept.stamp);
@@ -465,7 +467,7 @@ export class Workings {
   }
 
   #search(i: number, b: Bound, start: number, open: Int32Array): number | undefined {
-    // A slope over a half-width needs no more.
+    // A difference against the nominal point needs no more.
     const within = this.#shifted > 0 ? 1e-7 : (b.way.within ?? 1e-10);
     const trial = (x: number): number => {
       for (let k = 0; k < open.length; k++) if (this.#trying[open[k] as number] === 0) this.#stamp[open[k] as number] = 0;
