@@ -116,7 +116,10 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
       ...[...on.entries.values()].flatMap((e) => e.assumed.map((says) => ({ id: e.path, says }))),
       ...on.warnings.map((says) => ({ id: 'case', says })),
     ],
-    unused: [...on.entries.values()].filter((e) => e.kind === 'quantity' && !e.path.startsWith('targets.') && e.path !== 'format' && !e.path.startsWith('computing.') && isUnused(workings, e.path)).map((e) => e.path),
+    // Looked for only where it is read: it walks the whole graph.
+    get unused() {
+      return [...on.entries.values()].filter((e) => e.kind === 'quantity' && !e.path.startsWith('targets.') && e.path !== 'format' && !e.path.startsWith('computing.') && isUnused(workings, e.path)).map((e) => e.path);
+    },
     chosen: chosenOf(on),
     leaves,
     askable: (id) => paths.has(id),

@@ -1,4 +1,3 @@
-import { randomBytes } from 'node:crypto';
 import { lstatSync, mkdirSync, renameSync, rmSync, statSync, writeFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { Problem } from '../problems/index.ts';
@@ -16,7 +15,7 @@ import { Problem } from '../problems/index.ts';
 export function writeInto(folder: string, files: readonly { readonly name: string; readonly text: string }[], force: boolean): string[] {
   const paths = files.map(({ name }) => join(folder, ...name.split('/')));
   const below = [...new Set(files.filter(({ name }) => name.includes('/')).map(({ name }) => join(folder, dirname(name))))];
-  const passing = paths.map((path) => join(dirname(path), `.${randomBytes(6).toString('hex')}.part`));
+  const passing = paths.map((path) => join(dirname(path), `.${Math.random().toString(36).slice(2, 10)}.part`));
   const begun: string[] = [];
   try {
     refuse(folder, paths, below, force);

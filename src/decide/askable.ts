@@ -23,7 +23,10 @@ export function askableNow(workings: Workings, canAsk: Askable): Askable {
     mine.set(canAsk, found);
   }
   const { can } = found;
-  return (id) => can[workings.index.get(id) ?? -1] === 1;
+  return (id) => {
+    const i = workings.index.get(id) ?? -1;
+    return can[i] === 1 && !workings.known(i);
+  };
 }
 
 /** The words that hold and what is pinned: all that the answer depends on. */
@@ -37,10 +40,8 @@ function stateOf(workings: Workings): string {
   return `${pinned} ${words.join(' ')}`;
 }
 
-/** 1 where inputs that can be asked for would make the quantity known, and what is given does not. */
+/** 1 where what is given and inputs that can be asked for would together make the quantity known. */
 function reachable(workings: Workings, canAsk: Askable): Uint8Array {
   const open = (b: Workings['slots'][number]['ways'][number]): boolean => b.when.every((w) => !workings.known(w.slot) || w.words.includes(workings.wordAt(w.slot) as string));
-  const given = workings.reachable(undefined, open);
-  const asked = workings.reachable((slot) => slot.ways.length === 0 && canAsk(slot.id), open);
-  return asked.map((can, i) => (can === 1 && given[i] === 0 ? 1 : 0));
+  return workings.reachable((slot) => slot.ways.length === 0 && canAsk(slot.id), open);
 }

@@ -190,10 +190,12 @@ export class Workings {
    * @param read  reads what is wanted
    */
   aside<T>(pins: readonly (readonly [string, number | string])[], read: () => T): T {
-    const kept = { value: this.#value.slice(), base: this.#base.slice(), stamp: this.#stamp.slice(), pinned: this.#pinned.slice(), word: [...this.#word], used: [...this.used] };
+    const touched = new Set<number>();
+    for (const [id] of pins) for (const f of this.followers(this.index.get(id) ?? -1)) touched.add(f);
+    const slots = [...touched];
+    const kept = slots.map((i) => [this.#value[i], this.#base[i], this.#stamp[i], this.#pinned[i], this.#word[i], this.used[i], this.closed.get(i)] as const);
     const { version } = this;
     const knowable = this.#knowable;
-    const closed = [...this.closed];
     const failures = [...this.failures];
     this.#shifted++; // loops need close no more than a difference shows
     for (const [id, value] of pins) this.set(id, value);
@@ -201,15 +203,18 @@ export class Workings {
       return read();
     } finally {
       this.#shifted--;
-      this.#value.set(kept.value);
-      this.#base.set(kept.base);
-      this.#stamp.set(kept.stamp);
-      this.#pinned.set(kept.pinned);
-      kept.word.forEach((w, i) => { this.#word[i] = w; });
-      kept.used.forEach((u, i) => { this.used[i] = u; });
+      slots.forEach((i, k) => {
+        const [value, base, stamp, pinned, word, used, closed] = kept[k] as (typeof kept)[number];
+        this.#value[i] = value as number;
+        this.#base[i] = base as number;
+        this.#stamp[i] = stamp as number;
+        this.#pinned[i] = pinned as number;
+        this.#word[i] = word;
+        this.used[i] = used;
+        if (closed === undefined) this.closed.delete(i);
+        else this.closed.set(i, closed);
+      });
       this.#knowable = knowable;
-      this.closed.clear();
-      for (const [i, c] of closed) this.closed.set(i, c);
       this.failures.clear();
       for (const [i, f] of failures) this.failures.set(i, f);
       this.version = version;
