@@ -37,7 +37,10 @@ export function placed<T>(entry: Entry | undefined, file: string, make: () => T)
 export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   const assumed: Record<string, number> = {};
   const pressure = on.number('fluid.pressure') ?? on.number('inlet.totalPressure');
-  const temperature = on.number('inlet.temperature') ?? on.number('fluid.temperature') ?? on.number('inlet.totalTemperature') ?? on.number('initial.temperature') ?? middle(on);
+  const humidity = on.number('fluid.humidity');
+  // Relative humidity is that of the air at rest around a body, not of the film at its wall.
+  const around = humidity === undefined ? undefined : on.number('surroundings.temperature');
+  const temperature = on.number('inlet.temperature') ?? on.number('fluid.temperature') ?? on.number('inlet.totalTemperature') ?? on.number('initial.temperature') ?? around ?? middle(on);
   const entry = on.get('fluid.material');
   if (typeof entry?.value !== 'string') {
     const density = on.number('fluid.density');
@@ -50,7 +53,6 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   if (temperature === undefined) assumed['fluid.temperature'] = assumedTemperature;
   const name = entry.value;
   const material = placed(entry, on.file, () => loadMaterial(name, materials));
-  const humidity = on.number('fluid.humidity');
   const share = on.list('fluid.composition')[0];
   const composition = share === undefined ? undefined : on.number(`fluid.composition.${share}`);
   const state: State = {

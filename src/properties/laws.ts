@@ -17,7 +17,7 @@ export interface Laws {
 
 /**
  * Laws of a material in the phase of a state, for ways that iterate. A law stays in its phase: beyond the saturation line it
- * goes on along the metastable branch and raises a flag, so that an iteration is not thrown off by a jump.
+ * goes on along the metastable branch and raises a flag, so that an iteration is not thrown off by a jump. Humid air keeps its water, not its relative humidity.
  *
  * @param material  the material
  * @param state     the state whose pressure, composition and phase the laws keep
@@ -30,6 +30,16 @@ export function laws(material: Material, state: State, factors: { readonly [prop
   const { engine, record } = material;
   const raised = new Set<string>();
   const sample = { ...taken.sample };
+  const from = { T: taken.sample.T, p: taken.sample.p };
+  const share = taken.sample.x;
+  const equation = record.thermodynamics === undefined ? undefined : engine.equation;
+  /** Moves the sample; the matter stays the same, so that a share counted against saturation moves with it. */
+  const move = (T: number, p: number): void => {
+    if (T === sample.T && p === sample.p) return;
+    sample.T = T;
+    sample.p = p;
+    if (equation?.carried !== undefined) sample.x = equation.carried(share, from, sample);
+  };
   const settled = new Map<string, Law | undefined>();
 
   const rangesOf = (property: PropertyId): readonly Box[] | undefined => {
@@ -85,8 +95,7 @@ export function laws(material: Material, state: State, factors: { readonly [prop
       const f = call(property);
       const boxes = rangesOf(property) ?? [];
       const law: Law | undefined = f && ((T, p = state.pressure) => {
-        sample.T = T;
-        sample.p = p;
+        move(T, p);
         if (boxes.length > 0 && !insideAny(boxes, sample)) raised.add(`${property} of ${material.name} is carried beyond its range`);
         return f();
       });

@@ -92,6 +92,18 @@ describe('laws', () => {
     expect(call(thick, 'density', 320)).toBe(call(plain, 'density', 320));
   });
 
+  it('keep the water of humid air, not its relative humidity', () => {
+    // 50 % at 20 degC: p_s = 2339.2 Pa (IAPWS R7-97), enhancement 1.004; at 60 degC the same mole fraction as ideal gases, whose departure is below 0.05 %.
+    const found = laws(loadMaterial('humid air'), { temperature: 293.15, pressure: 101325, humidity: 0.5 });
+    const water = (0.5 * 1.004 * 2339.2) / 101325;
+    const molarMass = (1 - water) * 0.0289655 + water * 0.0180153;
+    expect(Math.abs(call(found, 'density', 333.15) / ((101325 * molarMass) / (8.314462618 * 333.15)) - 1)).toBeLessThan(1e-3);
+    expect(call(found, 'saturationTemperature', 333.15)).toBeCloseTo(call(found, 'saturationTemperature', 293.15), 2);
+    // At 60 % held, the water alone would exceed the pressure here; the air of a room warmed to it does not.
+    const room = laws(loadMaterial('humid air'), { temperature: 303.15, pressure: 101325, humidity: 0.6 });
+    expect(call(room, 'density', 393.15)).toBeGreaterThan(0.8);
+  });
+
   it('stay in their phase beyond saturation and say so', () => {
     const water = loadMaterial('water');
     const found = laws(water, { temperature: 350, pressure: 1e5 });

@@ -136,6 +136,7 @@ export function humidAir(c: { cross: readonly (readonly number[])[] }, partners:
       throw new Error('humid air is asked by temperature and pressure');
     },
     moist,
+    carried: (phi, from, to) => (phi * enhancement(from.T, from.p) * water.saturation(Math.min(from.T, 647.096)) * to.p) / (from.p * enhancement(to.T, to.p) * water.saturation(Math.min(to.T, 647.096))),
     viscosity(T, p) {
       const { x, a, w } = parts(T, p);
       const mua = air.value('viscosity', a);

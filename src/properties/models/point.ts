@@ -49,6 +49,8 @@ export interface EquationOfState {
   /** Properties at T [K] and density [kg/m^3]: for transport correlations and verification tables. */
   of(T: number, rho: number): Point;
   readonly line?: SaturationLine;
+  /** The share at another state of the same matter, where it is counted against saturation: relative humidity falls as moist air warms. */
+  carried?(share: number, from: { readonly T: number; readonly p: number }, to: { readonly T: number; readonly p: number }): number;
   /** Specific gas constant [J/(kg K)]. */
   readonly gasConstant: number;
 }
