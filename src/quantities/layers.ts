@@ -21,8 +21,8 @@ export const layers: Definition[] = [
 /**
  * Definitions of the layers of one wall: conductivity at the mean of its faces, resistance on the wetted area, section times conductivity.
  *
- * @param wall    place, such as `wall` or `walls.left`
- * @param layers  from the wetted face outwards
+ * @param wall  place, such as `wall` or `walls.left`
+ * @param list  layers from the wetted face outwards
  * @returns       definitions to add for this case
  */
 export function layerDefinitions(wall: string, list: readonly Layer[]): Definition[] {

@@ -91,7 +91,7 @@ export function extrapolate({ fine, medium, ratio, order }: { fine: number; medi
  * @param order         order [1], > 0
  * @param safetyFactor  1.25 with three meshes and a believable order, else 3
  * @returns             half-width of the band, unit of the values
- * @example             indexHalfWidth({ fine: 6.063, medium: 5.972, ratio: 1.5, order: 1.5342, safetyFactor: 1.25 }) // 0.1319
+ * @example             indexHalfWidth({ fine: 6.063, medium: 5.972, ratio: 1.5, order: 1.5342, safetyFactor: 1.25 }) // 0.1318
  * @source              Roache, Annu. Rev. Fluid Mech. 29 (1997), 123-160; Celik et al. 2008, eq. (6) times the fine value
  */
 export function indexHalfWidth({ fine, medium, ratio, order, safetyFactor }: { fine: number; medium: number; ratio: number; order: number; safetyFactor: number }): number {

@@ -31,7 +31,11 @@ function read(on: Planned, expression: string): number {
 it('the opening caution of a plan names the spread of its target, whatever sections are asked for', async () => {
   const name = new URL('../../examples/rinse-line.case.yaml', import.meta.url);
   const made = await plan(readCase(readFileSync(name), 'rinse-line.case.yaml', vocabulary), { version: '0', sections: ['cautions'] });
-  expect(made.sections.cautions.lines[0]?.text).toContain('a half-width of {targets.0.halfWidth}');
+  const opening = made.sections.cautions.lines[0]?.text;
+  expect(opening).toContain('is put at {outletTemperature}.'); // printed with its spread
+  const { value, low, high } = made.quantities['outletTemperature'] ?? {};
+  expect(low).toBeLessThan(value as number);
+  expect(high).toBeGreaterThan(value as number);
 });
 
 it('flip values of a heated slot are sought down to pressures at which no liquid boils', async () => {
