@@ -11,7 +11,7 @@ const talk = new Interview({ settle: (on) => settleCase(on) });
 /** Answers to the start of three flows; what is not here is still open. */
 const starts: Readonly<Record<string, Readonly<Record<string, string>>>> = {
   pipe: { 'fluid.material': 'water', 'sizes.diameter': '25 mm', 'inlet.speed': '0.4 m/s', 'inlet.temperature': '65 degC', purpose: 'Does the water leave below 50 degC?', 'targets.0.quantity': 'outletTemperature', 'targets.0.within': '1 K', ifWrong: 'low', 'wall.temperature': '20 degC' },
-  plate: { 'fluid.material': 'air', 'sizes.length': '0.5 m', 'inlet.speed': '5 m/s', 'inlet.temperature': '20 degC', purpose: 'How large is the drag?', 'targets.0.quantity': 'dragCoefficient', 'targets.0.within': '5 %' },
+  plate: { 'fluid.material': 'air', 'sizes.length': '0.5 m', 'inlet.speed': '5 m/s', 'inlet.temperature': '20 degC', purpose: 'What does the plate lose?', 'targets.0.quantity': 'heatRate', 'targets.0.within': '5 %', 'wall.temperature': '60 degC' },
   'side-heated-cavity': { 'fluid.material': 'air', 'sizes.height': '300 mm', 'sizes.width': '100 mm', 'walls.left.temperature': '40 degC', 'walls.right.temperature': '20 degC', purpose: 'What does the box lose?', 'targets.0.quantity': 'nusselt', 'targets.0.within': '5 %' },
 };
 
@@ -150,7 +150,7 @@ describe('after the start', () => {
     while (asked(state).now === undefined) state = said(state, 'unknown');
     const question = asked(state);
     expect([question.paths, question.now]).toEqual([['inlet.speed'], '5 m/s +/- 20 %']);
-    expect(question.why).toMatch(/\d+ % of the spread of dragCoefficient/);
+    expect(question.why).toMatch(/\d+ % of the spread of heatRate/);
     const kept = said(state, 'skip');
     expect(kept.given.get('inlet.speed')?.text).toBe('5 m/s +/- 20 %');
     expect(talk.next(kept)).toEqual({ done: 'settled' });
