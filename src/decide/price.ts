@@ -79,7 +79,7 @@ export function pricesOf(workings: Workings, line: PriceLine, place: string | un
 function factorPrices(workings: Workings, named: string, of: string, place: string | undefined, targets: readonly Read[], acts: boolean): Weighed[] {
   const factors = copiesOf(workings, placedId(workings, named, place));
   const f = workings.get(factors[0] as string);
-  if (f === undefined) return [];
+  if (f === undefined || (f === 1 && fromNothing(workings, factors[0] as string))) return [];
   const formula = f > 0 ? `1/F - 1, F = ${named} = ${short(f)}` : `F = ${named} = ${short(f)} is not positive`;
   const out: Weighed[] = [];
   let rest = targets;
@@ -100,6 +100,15 @@ function factorPrices(workings: Workings, named: string, of: string, place: stri
   }
   if (out.length > 0) return out;
   return [{ price: { of, acts: false, formula, ...(f > 0 ? { relative: 1 / f - 1 } : { signChange: true as const }) }, share: 0 }];
+}
+
+/** Whether a factor is 1 for want of a law here: then there is no price, which is not a price of nothing. */
+function fromNothing(workings: Workings, id: string): boolean {
+  const i = workings.index.get(id) ?? -1;
+  const by = workings.isPinned(i) ? undefined : workings.used[i];
+  const [first, second] = by?.ids ?? [];
+  // The plain id of a factor that walls have repeats that of one of them.
+  return by !== undefined && (first === undefined || (second === undefined && first.startsWith(`${id}@`) && fromNothing(workings, first)));
 }
 
 function weigh(workings: Workings, { target, value: before }: Read, of: string, without: number, acts: boolean, formula: string): Weighed {

@@ -155,6 +155,14 @@ describe('price', () => {
   it('prints a change of sign, and no percentage', async () => {
     expect((await run({ x: 0.1, F: -0.2 }, [target('heatRate')]))).toMatchObject({ verdict: 'borderline', movedBy: 'price', price: { target: 'heatRate', signChange: true, acts: true } });
   });
+  it('has none where the factor is 1 for want of a law: include stays, and what is borderline is kept', async () => {
+    const idle = [number('x'), quantity('F', { symbol: 'F', name: 'F', unit: '1' }, [way({ needs: ['y'], value: ({ y }) => y, formula: 'F', source: 'test' }), way({ needs: [], value: () => 1, formula: 'F = 1', source: 'test' })]), number('y'), number('plainNusselt'), product('nusselt', ['plainNusselt', 'F']), product('heatRate', ['nusselt'], 'W')];
+    const included = await run({ x: 20 }, [target('heatRate')], {}, idle);
+    expect(included).toMatchObject({ verdict: 'include', base: 'include' });
+    expect(included?.price).toBeUndefined();
+    expect(await run({ x: 3 }, [target('heatRate')], {}, idle)).toMatchObject({ verdict: 'borderline', firstRun: 'keep' });
+    expect(await run({ x: 20, y: 1.003 }, [target('heatRate')], {}, idle)).toMatchObject({ verdict: 'borderline', movedBy: 'price' });
+  });
   it('divides the priced quantity by F where the factor itself is not in the target', async () => {
     const loose = [number('x'), number('F'), number('nusselt'), product('heatRate', ['nusselt'], 'W'), number('drag'), number('plainNusselt')];
     expect((await run({ x: 0.1, F: 1.1, nusselt: 5 }, [target('heatRate')], {}, loose))?.price).toMatchObject({ target: 'heatRate', relative: expect.closeTo(1 / 1.1 - 1, 12), acts: true });
