@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { flows, type Flow } from '../../src/flows/index.ts';
-import { churchillBernstein, churchillChuCylinder, churchillChuLaminar, cylinderDrag, cylinderStrouhal, elSherbiny, berkovskyPolevikov, hilpert, laminarStrouhal, leFevre, meanPlateFriction, morgan, roughPlateFriction, shipPlateFriction, sumOfLocal, turbulentPlateFriction, unheatedStart, uprightSimilar, whiteCylinderDrag, zukauskas } from './external-helpers.ts';
+import { churchillBernstein, churchillChuCylinder, churchillChuLaminar, cylinderDrag, cylinderStrouhal, elSherbiny, berkovskyPolevikov, hilpert, laminarStrouhal, leFevre, meanPlateFriction, morgan, roughPlateFriction, shipPlateFriction, sumOfLocal, turbulentPlateFriction, unheatedStart, uprightSimilar, whiteCylinderDrag, zukauskas } from './external-laws.ts';
 import { flagsIn, stepOf, type Workings } from '../../src/workings/index.ts';
 import { workingsOf } from './harness.ts';
 
