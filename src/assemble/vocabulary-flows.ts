@@ -49,7 +49,7 @@ const solidSizes: Fields = {
 
 const drops = (what: string): FlowWords => flow(`A single ${what}, or many of them`, { diameter: need(`diameter of the ${what}`, '3 mm'), ...standing });
 
-/** Flow, sizes, walls, as DESIGN.md section 6 lists them. */
+/** Flow, sizes, walls, as the case format lists them. */
 export const flows: Readonly<Record<string, FlowWords>> = {
   pipe: flow('Straight round pipe', { diameter: need('inner diameter', '25 mm'), length: may('length along the flow', '8 m') }),
   duct: flow('Rectangular duct', { width: need('inner width', '60 mm'), height: need('inner height', '30 mm'), length: may('length along the flow', '2 m') }, sides),

@@ -44,7 +44,7 @@ describe.each(flows)('template of %s', (flow) => {
 });
 
 it('all flows of the format are there', () => {
-  // the table of flows in DESIGN.md section 6
+  // the flows of the case format
   expect(flows).toEqual(expect.arrayContaining('pipe duct annulus channel coil fitting backward-step nozzle mixing-tee packed-bed porous-layer tube-bank plate cylinder sphere building bluff-body aerofoil storage-tank general side-heated-cavity bottom-heated-cavity open-cavity lid-driven-cavity room free-jet impinging-jet plume rotating-cylinders rotating-disk stirred-tank open-channel sloshing-tank column-collapse drop bubble pellet flame shock-tube solid'.split(' ')));
   expect(flows).toHaveLength(40);
 });
