@@ -98,6 +98,9 @@ function wanted(unit: string, field: QuantityField, beside: Beside): Wanted {
   };
 }
 
+/** In SI units; beyond them products of a few numbers leave what a computer can hold. */
+const [smallest, largest] = [1e-40, 1e40];
+
 function limits(quantity: Quantity, text: string, field: QuantityField): void {
   const { above, atLeast, atMost, whole, example } = field;
   const refuse = (says: string, code = 'out-of-bounds'): Problem => new Problem({ code, message: `"${shown(text)}" ${says}`, expected: `${field.doc}, for example ${example}`, at: 0, length: text.length });
@@ -105,6 +108,7 @@ function limits(quantity: Quantity, text: string, field: QuantityField): void {
     if (above !== undefined && value <= above) throw refuse(above === 0 ? 'is not above zero' : `is not above ${above} ${field.unit}`, above === 0 ? 'not-positive' : undefined);
     if (atLeast !== undefined && value < atLeast) throw refuse(atLeast === 0 ? 'is below zero' : `is below ${atLeast} ${field.unit}`, atLeast === 0 ? 'negative' : undefined);
     if (atMost !== undefined && value > atMost * (1 + 1e-12)) throw refuse(`is above ${atMost} ${field.unit}`);
+    if (value !== 0 && !(Math.abs(value) > smallest && Math.abs(value) < largest)) throw refuse('is the size of no quantity');
     if (whole === true && !Number.isInteger(value)) throw refuse('is no whole number', 'not-whole');
   }
 }

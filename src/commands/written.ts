@@ -19,7 +19,7 @@ export function writeInto(folder: string, files: readonly { readonly name: strin
   const begun: string[] = [];
   try {
     refuse(folder, paths, below, force);
-    for (const path of [folder, ...below]) mkdirSync(path, { recursive: true });
+    for (const path of [folder, ...below]) makeFolder(path);
     files.forEach(({ text }, i) => {
       begun.push(passing[i] as string);
       writeFileSync(passing[i] as string, text, { flag: 'wx' });
@@ -34,7 +34,15 @@ export function writeInto(folder: string, files: readonly { readonly name: strin
   return paths;
 }
 
-const reasons: Readonly<Record<string, string>> = { EEXIST: 'a file stands in its path', ENOTDIR: 'a file stands in its path', EACCES: 'that is not allowed', EPERM: 'that is not allowed', EROFS: 'that is not allowed', ENOSPC: 'the disk is full', ENAMETOOLONG: 'the name is too long' };
+const reasons: Readonly<Record<string, string>> = { ENOENT: 'no folder can be made there', EEXIST: 'a file stands in its path', ENOTDIR: 'a file stands in its path', EACCES: 'that is not allowed', EPERM: 'that is not allowed', EROFS: 'that is not allowed', ENOSPC: 'the disk is full', ENAMETOOLONG: 'the name is too long' };
+
+/** Makes a folder and those above it, one by one: where the system refuses one, that is an error and no endless trying. */
+function makeFolder(path: string): void {
+  if (statSync(path, { throwIfNoEntry: false })?.isDirectory() === true) return;
+  const above = dirname(path);
+  if (above !== path) makeFolder(above);
+  mkdirSync(path);
+}
 
 function refuse(folder: string, paths: readonly string[], below: readonly string[], force: boolean): void {
   const expected = 'a folder, or a name that does not exist yet';

@@ -44,6 +44,7 @@ describe('refusals', () => {
     { why: 'overflow', add: 'gravity: 1e999 m/s^2', code: 'not-a-number', at: '1e999', nearest: undefined },
     { why: 'comma', add: 'gravity: "9,81 m/s^2"', code: 'not-a-number', at: '9,81', nearest: '9.81' },
     { why: 'negative length', add: 'ground: { roughnessLength: -1 m }', code: 'not-positive', at: '-1 m', nearest: undefined },
+    { why: 'smaller than anything', add: 'ground: { roughnessLength: 1e-300 m }', code: 'out-of-bounds', at: '1e-300 m', nearest: undefined },
     { why: 'half a passage', add: 'parallel: 2.5', code: 'not-whole', at: '2.5', nearest: undefined },
     { why: 'below absolute zero', add: 'surroundings: { temperature: -300 degC }', code: 'below-absolute-zero', at: '-300', nearest: undefined },
     { why: 'wrong word', add: 'time: { character: steedy }', code: 'wrong-word', at: 'steedy', nearest: 'steady' },

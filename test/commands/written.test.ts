@@ -35,6 +35,10 @@ describe('files written into a folder', () => {
     expect(readFileSync(join(into, 'a.md'), 'utf8')).toBe('a\n');
   });
 
+  it.skipIf(process.platform !== 'linux')('are refused, and not tried for ever, where the system makes no folders', () => {
+    expect(codesOf(() => writeInto('/proc/runbrief-plan', files, false))).toEqual(['not-written']);
+  });
+
   it('never follow a link out of the folder', () => {
     const into = folder(), outside = folder();
     writeFileSync(join(outside, 'target'), 'kept');
