@@ -40,6 +40,8 @@ export interface Point {
   readonly rangeOf: Interval | undefined;
   readonly spreadOf: Interval | undefined;
   readonly prices: Map<string, readonly Weighed[]>;
+  /** Base verdicts alone: no price is weighed, no bound tried. */
+  readonly lean: boolean;
   /** The targets with their values as printed, read when the first price is asked for. */
   read: readonly Read[] | undefined;
   readonly plain: FactSource;
@@ -75,7 +77,7 @@ export function judge(rule: EffectRule, point: Point): EffectState {
   if (truth === 0 && rule.applies !== undefined) return { rule, applies: false, whyNot: [...new Set(whyFalse(rule.applies, plain))], judged: true, verdict: 'leave-out', base: 'leave-out' };
   const views = viewsOf(rule, point);
   const nominal = worst(views, (view) => ({ reading: readRule(rule, view.facts), view }));
-  const counted = nominal.reading.verdict !== 'undecided' || !nominal.reading.judged || rule.branches.every((b) => b.band === undefined || b.band.bounds.length === 0) ? nominal : worst(views, (view) => bounded(rule, view, point));
+  const counted = point.lean || nominal.reading.verdict !== 'undecided' || !nominal.reading.judged || rule.branches.every((b) => b.band === undefined || b.band.bounds.length === 0) ? nominal : worst(views, (view) => bounded(rule, view, point));
   const { reading, view } = counted;
   const head = {
     rule, applies: truth === 1 || ('unknown' as const), whyNot: [], judged: reading.judged, base: reading.verdict, reading, facts: view.facts,
@@ -118,7 +120,7 @@ function moved(rule: EffectRule, reading: Reading, views: readonly View[], view:
 
 /** The price with the largest share of a target's tolerance, of those that may move the verdict. */
 function actingPrice(rule: EffectRule, lines: readonly PriceLine[], view: View, point: Point): Weighed | undefined {
-  if (rule.exempt || lines.length === 0) return undefined;
+  if (rule.exempt || point.lean || lines.length === 0) return undefined;
   const all = lines.filter((l) => l.exempt !== true).flatMap((line) => weighed(line, view.facts, view.place, point, true));
   return all.filter((w) => w.price.acts).reduce<Weighed | undefined>((a, b) => (a === undefined || b.share > a.share ? b : a), undefined);
 }

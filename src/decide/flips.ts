@@ -43,26 +43,31 @@ export function flips(workings: Workings, rules: CompiledRules, targets: readonl
       let read = seen.get(x);
       if (read === undefined) {
         workings.set(input.path, x);
-        const state = settle(workings, rules, [], { askable: options.askable, chosen: options.chosen });
+        const state = settle(workings, rules, [], { askable: options.askable, chosen: options.chosen, lean: true });
         seen.set(x, (read = new Map([...state.effects].map(([id, e]) => [id, e.verdict]))));
       }
       return read;
     };
+    // On either side of the nominal value the nearest change of each effect is sought.
     const grid = scan(input, nominal);
-    for (let k = 1; k < grid.length; k++) {
-      const [a, b] = [grid[k - 1] as number, grid[k] as number];
-      for (const [id, verdict] of at(b)) {
-        if (at(a).get(id) === verdict) continue;
-        // Towards the nominal value lies the verdict that is left; beyond the flip value the one that is taken.
-        const outward = b > nominal;
-        const value = flip((x) => at(x).get(id), a, b, within);
-        found.set(id, [...(found.get(id) ?? []), { path: input.path, value, unit, verdict: outward ? verdict : (at(a).get(id) as Verdict), far: distance(value, nominal) }]);
+    const middle = grid.findIndex((x) => x >= nominal);
+    const outward = [grid.slice(middle === -1 ? grid.length - 1 : middle), grid.slice(0, middle === -1 ? grid.length : middle + 1).reverse()];
+    for (const side of outward) {
+      const met = new Set<string>();
+      for (let k = 1; k < side.length; k++) {
+        const [a, b] = [side[k - 1] as number, side[k] as number];
+        for (const [id, verdict] of at(b)) {
+          if (met.has(id) || at(a).get(id) === verdict) continue;
+          met.add(id);
+          const value = flip((x) => at(x).get(id), a, b, within);
+          found.set(id, [...(found.get(id) ?? []), { path: input.path, value, unit, verdict: at(value).get(id) as Verdict, far: distance(value, nominal) }]);
+        }
       }
     }
     workings.set(input.path, pinned ? nominal : undefined);
   }
   settle(workings, rules, targets, options);
-  return new Map([...found].map(([id, list]) => [id, list.sort((a, b) => steps(a.far) - steps(b.far)).map(({ path, value, unit, verdict }) => ({ path, value, unit, verdict }))]));
+  return new Map([...found].map(([id, list]) => [id, list.sort((a, b) => (Math.abs(a.far - b.far) <= alike ? 0 : a.far - b.far)).map(({ path, value, unit, verdict }) => ({ path, value, unit, verdict }))]));
 }
 
 /** Points over the interval, even in the logarithm where both ends are positive, with the nominal value among them. */
@@ -75,6 +80,6 @@ function scan(input: FlipInput, nominal: number): number[] {
 }
 
 /** Distances that differ by less than the bisection resolves are equal; inputs then keep their order. */
-const steps = (far: number): number => Math.round(far / (10 * within));
+const alike = 20 * within;
 
 const distance = (a: number, b: number): number => (a > 0 && b > 0 ? Math.abs(Math.log(a / b)) : Math.abs(a - b));

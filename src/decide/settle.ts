@@ -16,6 +16,8 @@ export interface SettleOptions {
   readonly rangeOf?: Interval | undefined;
   /** Low and high end of its spread. */
   readonly spreadOf?: Interval | undefined;
+  /** Base verdicts alone, for scans: no price is weighed, no bound of a missing input tried. */
+  readonly lean?: boolean | undefined;
   /** Choices that the case states, by id. */
   readonly chosen?: Readonly<Record<string, string>> | undefined;
 }
@@ -110,7 +112,7 @@ export function settle(workings: Workings, rules: CompiledRules, targets: readon
   const words = new Map<string, string>();
   const point: Point = {
     workings, targets, facts, words, plain: new Overlaid(facts, words), views: new Map(), prices: new Map(), read: undefined,
-    places: session.places, rangeOf: options.rangeOf, spreadOf: options.spreadOf,
+    places: session.places, rangeOf: options.rangeOf, spreadOf: options.spreadOf, lean: options.lean === true,
   };
   const { effects, passes } = settleEffects(point, session);
   const choices = settleChoices(point, session, rules, effects, new Map(Object.entries(options.chosen ?? {})));

@@ -51,10 +51,10 @@ export function settleCase(on: Case, options: Omit<PlanOptions, 'version' | 'fli
   const targets: Target[] = assembled.targets.map((t) => ({ id: t.id, quantity: t.quantity, within: t.within, computed: t.computed }));
   const again: Settle = (at) => void settle(at, rules, targets, { askable, chosen });
   // The numbers that decide need no price and no target.
-  settle(workings, rules, [], { askable, chosen });
+  settle(workings, rules, [], { askable, chosen, lean: true });
   const deciding = decidingIds(rules, workings);
   const spread = spreads(workings, deciding);
-  const range = rangesOf(workings, assembled.ranges, deciding, (at) => void settle(at, rules, [], { askable, chosen }));
+  const range = rangesOf(workings, assembled.ranges, deciding, (at) => void settle(at, rules, [], { askable, chosen, lean: true }));
   const decideOptions: DecideOptions = {
     askable,
     chosen,
