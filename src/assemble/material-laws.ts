@@ -41,6 +41,11 @@ export function fluidLaws(material: Material, state: State): MaterialLaws {
       about[id] = { formula: `constant of ${material.name}`, source: 'material record' };
     }
   }
+  const density = laws['density'];
+  if (laws['molarMass'] === undefined && density !== undefined && (taken.phase === 'gas' || taken.phase === 'vapour')) {
+    laws['molarMass'] = Object.assign((T: number, p: number) => (density(T, p) * 8.31446261815324 * T) / p, { uncertainty: density.uncertainty });
+    about['molarMass'] = { formula: 'M = rho R_u T/p, from the density of the mixture', source: about['density']?.source ?? 'material record' };
+  }
   const vapour = saturatedVapour(material, state);
   if (vapour !== undefined && 'saturationTemperature' in laws) {
     laws['vapourDensity'] = Object.assign(vapour, { uncertainty: () => 0.01 });

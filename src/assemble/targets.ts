@@ -43,7 +43,8 @@ export function kindsOf(on: Case, unit: (id: string) => string | undefined): Tar
   return {
     heat: is(heatUnits, heatWords),
     momentum: is(momentumUnits, momentumWords),
-    peak: on.targets.some((t) => ['peak', 'rms'].includes(t.mean ?? '') || /spectrum|fluctuation|swing|rms/i.test(t.quantity)),
+    // The peak of a temperature is a hot spot; other peaks, and all rms, are peaks in time.
+    peak: on.targets.some((t) => t.mean === 'rms' || (t.mean === 'peak' && !/temperature/i.test(t.quantity)) || /spectrum|fluctuation|swing|rms/i.test(t.quantity)),
     mean: on.targets.some((t) => overWalls.includes(t.quantity)),
   };
 }

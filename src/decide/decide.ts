@@ -129,7 +129,7 @@ function reasonOf(e: EffectState, state: State, fill: (text: string) => string):
     const names = lackingOf(e, state.point).map((id) => state.point.workings.slots[state.point.workings.index.get(placedId(state.point.workings, id, e.place)) ?? -1]?.node.about.name ?? id);
     return `not known: ${[...new Set(names)].join(', ')}`;
   }
-  const parts = [without ?? fill((branch ?? e.reading?.fixed)?.because ?? '')];
+  const parts = [e.bounded !== undefined ? '' : (without ?? fill((branch ?? e.reading?.fixed)?.because ?? ''))];
   if (e.bounded !== undefined) parts.push(`the same at both ends of ${e.bounded.join('; ')}`);
   if (e.movedBy !== undefined) parts.push(`${moves[e.movedBy]}${e.between === undefined ? '' : ` between ${e.between.join(' and ')}`}`);
   return parts.filter((p) => p !== '').join('; ');

@@ -83,7 +83,7 @@ export function judge(rule: EffectRule, point: Point): EffectState {
     rule, applies: truth === 1 || ('unknown' as const), whyNot: [], judged: reading.judged, base: reading.verdict, reading, facts: view.facts,
     ...(view.place === undefined ? {} : { place: view.place }), ...(counted.bounded === undefined ? {} : { bounded: counted.bounded }),
   };
-  return reading.verdict === 'undecided' ? { ...head, verdict: 'undecided' } : { ...head, ...moved(rule, reading, views, view, point) };
+  return reading.verdict === 'undecided' ? { ...head, verdict: 'undecided' } : { ...head, ...moved(rule, reading, views, view, point, counted.bounded !== undefined) };
 }
 
 /** The facts for want of which an effect is undecided. */
@@ -102,7 +102,7 @@ function worst(views: readonly View[], read: (view: View) => Worst): Worst {
   return found as Worst;
 }
 
-function moved(rule: EffectRule, reading: Reading, views: readonly View[], view: View, point: Point): Pick<EffectState, 'verdict' | 'movedBy' | 'acting' | 'firstRun'> {
+function moved(rule: EffectRule, reading: Reading, views: readonly View[], view: View, point: Point, isBounded: boolean): Pick<EffectState, 'verdict' | 'movedBy' | 'acting' | 'firstRun'> {
   const base = reading.verdict;
   const acting = actingPrice(rule, reading.prices, view, point);
   const price = acting === undefined ? {} : { acting };
@@ -110,7 +110,8 @@ function moved(rule: EffectRule, reading: Reading, views: readonly View[], view:
   const firstRun = keep ? ('keep' as const) : ('leave-out' as const);
   if (base === 'borderline') return { verdict: base, firstRun, ...price };
   for (const [movedBy, interval] of [['range', point.rangeOf], ['spread', point.spreadOf]] as const) {
-    if (interval === undefined) continue;
+    // What holds at both ends of a missing input has no number that a range or spread could move.
+    if (interval === undefined || isBounded) continue;
     const over = worst(views, (v) => ({ reading: readRule(rule, v.facts, (id) => interval(placedId(point.workings, id, v.place))), view: v }));
     if (over.reading.verdict !== base) return { verdict: 'borderline', movedBy, firstRun, ...price };
   }

@@ -43,7 +43,7 @@ export function flips(workings: Workings, rules: CompiledRules, targets: readonl
       let read = seen.get(x);
       if (read === undefined) {
         workings.set(input.path, x);
-        const state = settle(workings, rules, [], { askable: options.askable, chosen: options.chosen, lean: true });
+        const state = settle(workings, rules, [], { askable: options.askable, chosen: options.chosen, lean: true, verdictsOnly: true });
         seen.set(x, (read = new Map([...state.effects].map(([id, e]) => [id, e.verdict]))));
       }
       return read;

@@ -18,6 +18,8 @@ export interface SettleOptions {
   readonly spreadOf?: Interval | undefined;
   /** Base verdicts alone, for scans: no price is weighed, no bound of a missing input tried. */
   readonly lean?: boolean | undefined;
+  /** With `lean`: choices stay as they are. */
+  readonly verdictsOnly?: boolean | undefined;
   /** Choices that the case states, by id. */
   readonly chosen?: Readonly<Record<string, string>> | undefined;
 }
@@ -115,7 +117,7 @@ export function settle(workings: Workings, rules: CompiledRules, targets: readon
     places: session.places, rangeOf: options.rangeOf, spreadOf: options.spreadOf, lean: options.lean === true,
   };
   const { effects, passes } = settleEffects(point, session);
-  const choices = settleChoices(point, session, rules, effects, new Map(Object.entries(options.chosen ?? {})));
+  const choices = options.lean === true && options.verdictsOnly === true ? new Map<string, ChoiceState>() : settleChoices(point, session, rules, effects, new Map(Object.entries(options.chosen ?? {})));
   for (const { id, verdict } of session.effects) pin(workings, verdict, (effects.get(id) as EffectState).verdict);
   for (const [id, state] of choices) if (state.rule !== undefined || state.given) pin(workings, `choice.${id}`, state.chosen);
   return { effects, choices, passes, point };

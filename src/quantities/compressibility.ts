@@ -1,4 +1,4 @@
-import { quantity, way, type Definition } from '../workings/index.ts';
+import { quantity, way, wordWay, type Definition } from '../workings/index.ts';
 
 const none = way({ needs: [], value: () => 1, formula: 'F = 1', source: 'the effect does not act here' });
 
@@ -32,6 +32,10 @@ export const compressibility: Definition[] = [
   ]),
   quantity('reducedPressure', { symbol: 'p/p_c', name: 'reduced pressure', unit: '1' }, [
     way({ needs: ['pressure', 'criticalPressure'], value: ({ pressure, criticalPressure }) => pressure / criticalPressure, formula: 'p/p_c', source: 'definition' }),
+  ]),
+  quantity('nearCritical', { symbol: '', name: 'the gas is near its critical point', unit: 'word', words: ['yes', 'no'] }, [
+    wordWay({ needs: ['reducedTemperature', 'reducedPressure'], word: ({ reducedTemperature, reducedPressure }) => (reducedTemperature > 0.9 && reducedTemperature < 1.3 && reducedPressure > 0.6 ? 'yes' : 'no'), formula: '0.9 < T/T_c < 1.3 and p > 0.6 p_c', source: 'common practice' }),
+    wordWay({ needs: [], word: () => 'no', formula: 'no critical point in the record', source: 'material record' }),
   ]),
   quantity('columnRatio', { symbol: 'Pi_g', name: 'height over the scale height of the gas', unit: '1' }, [
     way({ needs: ['gravity', 'passageHeight', 'gasConstant', 'referenceTemperature'], when: { medium: 'gas' }, value: ({ gravity, passageHeight, gasConstant, referenceTemperature }) => (gravity * passageHeight) / (gasConstant * referenceTemperature), formula: 'Pi_g = g H/(R_s T)', source: 'hydrostatics of an ideal gas' }),

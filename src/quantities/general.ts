@@ -19,6 +19,7 @@ import { propertyChange } from './property-change.ts';
 import { viscousHeating } from './viscous-heating.ts';
 import { radiation } from './radiation.ts';
 import { layers } from './layers.ts';
+import { namedFields } from './named-fields.ts';
 import { nearWall } from './near-wall.ts';
 import { hazards } from './hazards.ts';
 import { phase } from './phase.ts';
@@ -66,4 +67,5 @@ export const generalDefinitions: Definition[] = [
   ...viscousHeating,
   ...radiation,
   ...nearWall,
+  ...namedFields,
 ];

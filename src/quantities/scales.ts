@@ -1,4 +1,4 @@
-import { quantity, way, type Definition } from '../workings/index.ts';
+import { loop, quantity, way, type Definition } from '../workings/index.ts';
 
 const continuity = 'conservation of mass';
 
@@ -13,6 +13,10 @@ export const scales: Definition[] = [
     way({ needs: ['inlet.speed'], value: (of) => of['inlet.speed'], formula: 'U as given at the inlet', source: 'the case' }),
     way({ needs: ['volumeFlow', 'flowArea', 'parallelPassages'], value: ({ volumeFlow, flowArea, parallelPassages }) => volumeFlow / (flowArea * parallelPassages), formula: 'U = Q/(n A)', source: continuity }),
     way({ needs: ['inlet.massFlow', 'density', 'flowArea', 'parallelPassages'], value: (of) => of['inlet.massFlow'] / (of.density * of.flowArea * of.parallelPassages), formula: 'U = m/(n rho A)', source: continuity }),
+    loop({ needs: ['drive.pressureDrop', 'density', 'hydraulicDiameter', 'flowLength'], when: { flowClass: 'internal' }, start: (of) => Math.sqrt((2 * of['drive.pressureDrop']) / (of.density * (0.02 * (of.flowLength / of.hydraulicDiameter) + 1.5))), closes: 'speedNext', formula: 'U so that dp = dp_given', source: 'pressure drop of the passage against the one given' }),
+  ]),
+  quantity('speedNext', { symbol: 'U', name: 'speed that the given pressure drop drives', unit: 'm/s' }, [
+    way({ needs: ['speed', 'drive.pressureDrop', 'pressureDrop'], value: (of) => of.speed * Math.sqrt(of['drive.pressureDrop'] / of.pressureDrop), formula: 'U sqrt(dp_given/dp)', source: 'pressure drop of the passage against the one given' }),
   ]),
   quantity('flowArea', { symbol: 'A', name: 'cross-section of one passage', unit: 'm^2' }),
   quantity('wettedPerimeter', { symbol: 'P', name: 'wetted perimeter of one passage', unit: 'm' }),

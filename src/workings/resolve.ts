@@ -454,7 +454,7 @@ export class Workings {
    * it belongs to x, so loops within loops are not opened again.
    */
   #close(i: number, b: Bound, start: number): number | undefined {
-    const open = this.followers(i);
+    const open = this.#moving(i);
     const before = new Int32Array(open.length);
     for (let k = 0; k < open.length; k++) before[k] = this.#stamp[open[k] as number] as number;
     // Quantities on trial in a loop around this one keep their trial value.
@@ -470,6 +470,23 @@ export class Workings {
     }
     return x;
   }
+
+  /** What moves with a loop variable while those of the loops around it stand: what is reached only through them need not be asked again. */
+  #moving(i: number): Int32Array {
+    const around: number[] = [];
+    for (let k = 0; k < this.#trying.length; k++) if (this.#trying[k] === 1) around.push(k);
+    if (around.length === 0) return this.followers(i);
+    const key = `${i} ${around.join(' ')}`;
+    let found = this.#movingBy.get(key);
+    if (found === undefined) {
+      const next = (this.#next ??= this.#reverse());
+      const seen = new Set<number>([i]);
+      for (const at of seen) for (const f of next[at] as Int32Array) if (this.#trying[f] === 0) seen.add(f);
+      this.#movingBy.set(key, (found = Int32Array.from(seen)));
+    }
+    return found;
+  }
+  readonly #movingBy = new Map<string, Int32Array>();
 
   #search(i: number, b: Bound, start: number, open: Int32Array): number | undefined {
     // A difference against the nominal point needs no more.

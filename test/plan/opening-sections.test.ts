@@ -87,9 +87,9 @@ describe('question, physics, properties, documentation', () => {
     const p = await plan(open);
     const table = p.sections.question.tables.find((t) => t.title.startsWith('Inputs missing'));
     const first = table?.rows[0] as readonly string[];
-    expect(first[0]).toBe('inlet.speed, inlet.volumeFlow or inlet.massFlow');
+    expect(first[0]).toBe('inlet.speed, inlet.volumeFlow, inlet.massFlow or drive.pressureDrop');
     expect(Number(first[1])).toBe((first[2] as string).split(/, | and /).length);
-    expect(p.effects.find((e) => e.id === 'turbulence')?.missing).toContain('inlet.speed|inlet.volumeFlow|inlet.massFlow');
+    expect(p.effects.find((e) => e.id === 'turbulence')?.missing).toContain('inlet.speed|inlet.volumeFlow|inlet.massFlow|drive.pressureDrop');
     expect(linesOf(p, 'documentation')[0]).toContain('No estimate, no price and no budget for pressureDrop');
     expect(linesOf(await plan(air), 'question').join('\n')).toContain('noise level is not computed');
   });
