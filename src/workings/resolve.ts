@@ -34,6 +34,13 @@ export interface Slot {
   readonly isWord: boolean;
   ways: Bound[];
 }
+/** What follows from what: next steps, and what they reach, found when first asked for. */
+interface Edges {
+  readonly next: readonly (readonly number[])[];
+  readonly followers: Map<number, Int32Array>;
+  /** By loop variable and the loops around it. */
+  readonly moving: Map<string, Int32Array>;
+}
 /** How a loop was closed. */
 export interface Closed {
   readonly passes: number;
@@ -65,8 +72,8 @@ export class Workings {
   /** The slots each source of spread acts on directly. */
   readonly #acts: number[][] = [];
   readonly #round = 2;
-  #next: Int32Array[] | undefined;
-  readonly #followers = new Map<number, Int32Array>();
+  /** What follows from what, for each state of what can be known. */
+  readonly #edges = new WeakMap<Uint8Array, Edges>();
   /** How many sources stand off their nominal point, and readings aside of it. */
   #shifted = 0;
   #knowable: Uint8Array | undefined;
@@ -168,7 +175,10 @@ export class Workings {
     const pin = value === undefined ? 0 : 1;
     if (typeof value === 'string') this.#word[i] = value;
     else if (value !== undefined) this.#base[i] = value;
-    if (this.#pinned[i] !== pin) this.#keepKnowable(i, pin);
+    if (this.#pinned[i] !== pin) {
+      this.#forget(i); // by the ways that held so far
+      this.#keepKnowable(i, pin);
+    }
     this.#pinned[i] = pin;
     this.#forget(i);
   }
@@ -282,26 +292,31 @@ export class Workings {
 
   /** Slots whose ways reach the slot, in any number of steps. */
   followers(i: number): Int32Array {
-    let found = this.#followers.get(i);
-    if (found === undefined) {
-      this.#next ??= this.#reverse();
-      const seen = new Set<number>([i]);
-      for (const at of seen) for (const f of this.#next[at] as Int32Array) seen.add(f);
-      this.#followers.set(i, (found = Int32Array.from(seen)));
-    }
+    const edges = this.#edgesNow();
+    let found = edges.followers.get(i);
+    if (found === undefined) edges.followers.set(i, (found = reached(edges.next, i, () => true)));
     return found;
   }
 
-  #reverse(): Int32Array[] {
+  #edgesNow(): Edges {
+    const can = (this.#knowable ??= this.reachable());
+    let edges = this.#edges.get(can);
+    if (edges === undefined) this.#edges.set(can, (edges = { next: this.#reverse(can), followers: new Map(), moving: new Map() }));
+    return edges;
+  }
+
+  /** Who needs whom, backwards, by the ways that can be taken at all. */
+  #reverse(can: Uint8Array): number[][] {
     const back: number[][] = this.slots.map(() => []);
     this.slots.forEach((slot, i) => {
       for (const b of slot.ways) {
+        if (!b.needs.every((n) => can[n] === 1) || !b.when.every((w) => can[w.slot] === 1)) continue;
         for (const n of b.needs) back[n]?.push(i);
         for (const w of b.when) back[w.slot]?.push(i);
         if (b.closes >= 0) back[b.closes]?.push(i);
       }
     });
-    return back.map((s) => Int32Array.from(s));
+    return back;
   }
 
   /**
@@ -465,8 +480,9 @@ export class Workings {
     for (let k = 0; k < open.length; k++) {
       const f = open[k] as number;
       if (this.#trying[f] === 1) continue;
-      // A quantity that is being asked further out is so still, unless the loop has computed it on its way.
-      if (this.#stamp[f] !== this.#round || x === undefined) this.#stamp[f] = before[k] === this.#round + 1 ? this.#round + 1 : 0;
+      // A quantity that is being asked further out is so still, unless the loop has computed it on its way. What was known stays so where the
+      // loop rests at its old value: else loops that follow from each other would open one another for ever.
+      if (this.#stamp[f] !== this.#round || x === undefined) this.#stamp[f] = x === kept || before[k] === this.#round + 1 ? (before[k] as number) : 0;
     }
     return x;
   }
@@ -476,17 +492,12 @@ export class Workings {
     const around: number[] = [];
     for (let k = 0; k < this.#trying.length; k++) if (this.#trying[k] === 1) around.push(k);
     if (around.length === 0) return this.followers(i);
+    const { next, moving } = this.#edgesNow();
     const key = `${i} ${around.join(' ')}`;
-    let found = this.#movingBy.get(key);
-    if (found === undefined) {
-      const next = (this.#next ??= this.#reverse());
-      const seen = new Set<number>([i]);
-      for (const at of seen) for (const f of next[at] as Int32Array) if (this.#trying[f] === 0) seen.add(f);
-      this.#movingBy.set(key, (found = Int32Array.from(seen)));
-    }
+    let found = moving.get(key);
+    if (found === undefined) moving.set(key, (found = reached(next, i, (f) => this.#trying[f] === 0)));
     return found;
   }
-  readonly #movingBy = new Map<string, Int32Array>();
 
   #search(i: number, b: Bound, start: number, open: Int32Array): number | undefined {
     // A difference against the nominal point needs no more.
@@ -540,6 +551,12 @@ export class Workings {
       return range !== undefined && (value < range[0] || value > range[1]) ? [{ need: b.ids[k] as string, value, range }] : [];
     });
   }
+}
+
+function reached(next: Edges['next'], from: number, through: (slot: number) => boolean): Int32Array {
+  const seen = new Set<number>([from]);
+  for (const at of seen) for (const f of next[at] as readonly number[]) if (through(f)) seen.add(f);
+  return Int32Array.from(seen);
 }
 
 function distance(v: number, end: number): number {
