@@ -48,17 +48,15 @@ export function flips(workings: Workings, rules: CompiledRules, targets: readonl
       }
       return read;
     };
-    // On either side of the nominal value the nearest change of each effect is sought.
+    // From the nominal value outwards: beyond a flip value lies the verdict that is taken.
     const grid = scan(input, nominal);
     const middle = grid.findIndex((x) => x >= nominal);
     const outward = [grid.slice(middle === -1 ? grid.length - 1 : middle), grid.slice(0, middle === -1 ? grid.length : middle + 1).reverse()];
     for (const side of outward) {
-      const met = new Set<string>();
       for (let k = 1; k < side.length; k++) {
         const [a, b] = [side[k - 1] as number, side[k] as number];
         for (const [id, verdict] of at(b)) {
-          if (met.has(id) || at(a).get(id) === verdict) continue;
-          met.add(id);
+          if (at(a).get(id) === verdict) continue;
           const value = flip((x) => at(x).get(id), a, b, within);
           found.set(id, [...(found.get(id) ?? []), { path: input.path, value, unit, verdict: at(value).get(id) as Verdict, far: distance(value, nominal) }]);
         }
