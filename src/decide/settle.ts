@@ -118,8 +118,10 @@ export function settle(workings: Workings, rules: CompiledRules, targets: readon
   };
   const { effects, passes } = settleEffects(point, session);
   const choices = options.lean === true && options.verdictsOnly === true ? new Map<string, ChoiceState>() : settleChoices(point, session, rules, effects, new Map(Object.entries(options.chosen ?? {})));
-  for (const { id, verdict } of session.effects) pin(workings, verdict, (effects.get(id) as EffectState).verdict);
-  for (const [id, state] of choices) if (state.rule !== undefined || state.given) pin(workings, `choice.${id}`, state.chosen);
+  pinWords(workings, [
+    ...session.effects.map(({ id, verdict }) => [verdict, (effects.get(id) as EffectState).verdict] as const),
+    ...[...choices].flatMap(([id, state]) => (state.rule !== undefined || state.given ? [[`choice.${id}`, state.chosen] as const] : [])),
+  ]);
   return { effects, choices, passes, point };
 }
 
@@ -215,7 +217,10 @@ const unread = (said: string | undefined): ChoiceState => ({ rule: undefined, ap
 /** Whether the model carries the effect in its first run. */
 const kept = (e: EffectState): boolean => e.verdict === 'include' || (e.verdict === 'undecided' && e.judged) || (e.verdict === 'borderline' && e.firstRun !== 'leave-out');
 
-function pin(workings: Workings, id: string, word: string): void {
-  const i = workings.index.get(id);
-  if (i !== undefined && !(workings.isPinned(i) && workings.wordAt(i) === word)) workings.set(id, word);
+/** Pins words in one go, since each change of the pins costs a look at all edges; what is not in the graph, or is pinned so already, is passed over. */
+function pinWords(workings: Workings, words: readonly (readonly [string, string])[]): void {
+  workings.setAll(words.filter(([id, word]) => {
+    const i = workings.index.get(id);
+    return i !== undefined && !(workings.isPinned(i) && workings.wordAt(i) === word);
+  }));
 }

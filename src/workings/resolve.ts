@@ -169,18 +169,19 @@ export class Workings {
   wordAt(i: number): string | undefined { return this.#word[i]; }
 
   /** Pins a quantity to a number or word, whatever its ways say; `undefined` frees it again. */
-  set(id: string, value: number | string | undefined): void {
-    const i = this.index.get(id);
-    if (i === undefined) return;
-    const pin = value === undefined ? 0 : 1;
-    if (typeof value === 'string') this.#word[i] = value;
-    else if (value !== undefined) this.#base[i] = value;
-    if (this.#pinned[i] !== pin) {
-      this.#forget(i); // by the ways that held so far
-      this.#keepKnowable(i, pin);
+  set(id: string, value: number | string | undefined): void { this.setAll([[id, value]]); }
+
+  /** The same for many at once: what can be known is looked at once, not once for each. */
+  setAll(pins: readonly (readonly [string, number | string | undefined])[]): void {
+    const slots = pins.flatMap(([id, value]) => { const i = this.index.get(id); return i === undefined ? [] : [{ i, value, pin: value === undefined ? 0 : 1 }]; });
+    for (const { i, pin } of slots) if (this.#pinned[i] !== pin) this.#forget(i); // by the ways that held so far
+    for (const { i, value, pin } of slots) {
+      if (typeof value === 'string') this.#word[i] = value;
+      else if (value !== undefined) this.#base[i] = value;
+      if (this.#pinned[i] !== pin) this.#keepKnowable(i, pin);
+      this.#pinned[i] = pin;
     }
-    this.#pinned[i] = pin;
-    this.#forget(i);
+    for (const { i } of slots) this.#forget(i);
   }
 
   /** What can be known does not change by pinning a quantity that could be known, nor by setting it free again. */
