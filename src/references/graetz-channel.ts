@@ -19,7 +19,7 @@ export const graetzChannel = reference('graetz-channel', {
   flows: ['channel'],
   needs: [
     { id: 'graetz', unit: '1', name: 'Graetz number Re Pr D_h/L', range: [1e-3, 1e8] },
-    { id: 'peclet', unit: '1', name: 'Peclet number Re Pr on the twice the gap', range: [100, 1e12] },
+    { id: 'peclet', unit: '1', name: 'Peclet number Re Pr on twice the gap', range: [100, 1e12] },
     { id: 'length', unit: 'm', name: 'twice the gap' },
     { id: 'inletTemperature', unit: 'K', name: 'inlet temperature' },
     { id: 'wallTemperature', unit: 'K', name: 'wall temperature' },
