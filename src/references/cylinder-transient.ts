@@ -1,34 +1,3 @@
-import { bodyTemperature, firstMode } from './body-series.ts';
-import { places, reference } from './define.ts';
+import { bodyTransient } from './body-transient.ts';
 
-export const cylinderTransient = reference('cylinder-transient', {
-  title: 'Long cylinder cooled or heated through its surface',
-  kind: 'exact',
-  assumes: ['one-dimensional', 'constant properties', 'uniform start temperature', 'uniform heat transfer coefficient and fluid temperature'],
-  verifies: ['conduction', 'time accuracy', 'surface condition'],
-  source: 'Carslaw and Jaeger, Conduction of Heat in Solids, 2nd ed. (1959)',
-  uncertainty: 0,
-  order: 2,
-  passLimit: 0.005,
-  ifMissed: 'Biot and Fourier number on the radius; small first steps; coefficient on the outer face only',
-  flows: ['solid', 'pellet'],
-  needs: [
-    { id: 'biot', unit: '1', name: 'Biot number h L/k on the radius' },
-    { id: 'fourier', unit: '1', name: 'Fourier number alpha t/L^2 on the radius', range: [1e-4, 1e3] },
-  ],
-  values: [
-    { id: 'eigenvalue', name: 'first eigenvalue', unit: '1', formula: 'lambda J1(lambda)/J0(lambda) = Bi', value: (g) => firstMode('cylinder', g.biot).lambda },
-    { id: 'coefficient', name: 'first coefficient', unit: '1', formula: 'C_1 of the series', value: (g) => firstMode('cylinder', g.biot).coefficient },
-    { id: 'centreTemperatureRatio', name: 'difference left in the middle over the start difference', unit: '1', formula: 'sum C_n exp(-lambda_n^2 Fo)', value: (g) => bodyTemperature('cylinder', g.biot, g.fourier, 0) },
-    { id: 'surfaceTemperatureRatio', name: 'difference left at the surface over the start difference', unit: '1', formula: 'sum C_n exp(-lambda_n^2 Fo) f(lambda_n)', value: (g) => bodyTemperature('cylinder', g.biot, g.fourier, 1) },
-    { id: 'meanTemperatureRatio', name: 'mean difference left over the start difference', unit: '1', formula: 'sum C_n exp(-lambda_n^2 Fo) <f>', value: (g) => bodyTemperature('cylinder', g.biot, g.fourier, 'mean') },
-  ],
-  tables: [
-    {
-      id: 'temperatureShape',
-      title: 'Difference left over the start difference, from the middle to the surface',
-      columns: [{ id: 'distance', name: 'x/L', unit: '1' }, { id: 'temperature', name: '(T - T_fluid)/(T_start - T_fluid)', unit: '1' }],
-      rows: (g) => places(0, 1, 10).map((x) => [x, bodyTemperature('cylinder', g.biot, g.fourier, x)]),
-    },
-  ],
-});
+export const cylinderTransient = bodyTransient('cylinder', { title: 'Long cylinder cooled or heated through its surface', half: 'radius', condition: 'lambda J1(lambda)/J0(lambda) = Bi' });
