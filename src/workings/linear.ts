@@ -1,4 +1,5 @@
-import type { Slot, Workings } from './resolve.ts';
+import type { Workings } from './resolve.ts';
+import type { Slot } from './slot.ts';
 
 /** Wide enough to pass the last digit of a rounded count, narrow enough for a slope good to six digits. */
 const small = 1e-3;

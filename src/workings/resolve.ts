@@ -1,46 +1,9 @@
 import type { ProblemData } from '../problems/index.ts';
 import type { Node } from './build.ts';
-import type { Kind, Law, Laws, Way, When } from './define.ts';
+import type { Law, Laws, When } from './define.ts';
+import { knowable, reached, whoNeeds, type Edges } from './reach.ts';
+import type { Bound, Given, Slot, Source } from './slot.ts';
 
-/** A number of the case as given: SI value, 95 % half-width (relative or absolute), whether it was given or assumed. */
-export interface Given {
-  readonly value: number | string;
-  readonly kind?: Kind;
-  readonly half?: number;
-  readonly relative?: boolean;
-}
-
-/** A way bound to slots: indices in place of names, and its argument, filled again each time. */
-export interface Bound {
-  readonly way: Way;
-  readonly needs: readonly number[];
-  readonly ids: readonly string[];
-  readonly when: readonly { readonly slot: number; readonly words: readonly string[] }[];
-  readonly closes: number;
-  readonly of: Record<string, number>;
-  readonly laws: Laws;
-  /** Index of its own scatter in the list of sources of spread, or -1. */
-  readonly source: number;
-}
-/** What a spread comes from: an input, the scatter of a way, the uncertainty of a property. */
-export interface Source {
-  readonly key: string;
-  readonly label: string;
-  readonly kind: 'input' | 'scatter' | 'property';
-}
-export interface Slot {
-  readonly id: string;
-  readonly node: Node;
-  readonly isWord: boolean;
-  ways: Bound[];
-}
-/** What follows from what: next steps, and what they reach, found when first asked for. */
-interface Edges {
-  readonly next: readonly (readonly number[])[];
-  readonly followers: Map<number, Int32Array>;
-  /** By loop variable and the loops around it. */
-  readonly moving: Map<string, Int32Array>;
-}
 /** How a loop was closed. */
 export interface Closed {
   readonly passes: number;
@@ -209,7 +172,7 @@ export class Workings {
     const knowable = this.#knowable;
     const failures = [...this.failures];
     this.#shifted++; // loops need close no more than a difference shows
-    for (const [id, value] of pins) this.set(id, value);
+    this.setAll(pins);
     try {
       return read();
     } finally {
@@ -302,59 +265,21 @@ export class Workings {
   #edgesNow(): Edges {
     const can = (this.#knowable ??= this.reachable());
     let edges = this.#edges.get(can);
-    if (edges === undefined) this.#edges.set(can, (edges = { next: this.#reverse(can), followers: new Map(), moving: new Map() }));
+    if (edges === undefined) this.#edges.set(can, (edges = { next: whoNeeds(this.slots, can), followers: new Map(), moving: new Map() }));
     return edges;
   }
 
-  /** Who needs whom, backwards, by the ways that can be taken at all. */
-  #reverse(can: Uint8Array): number[][] {
-    const back: number[][] = this.slots.map(() => []);
-    this.slots.forEach((slot, i) => {
-      for (const b of slot.ways) {
-        if (!b.needs.every((n) => can[n] === 1) || !b.when.every((w) => can[w.slot] === 1)) continue;
-        for (const n of b.needs) back[n]?.push(i);
-        for (const w of b.when) back[w.slot]?.push(i);
-        if (b.closes >= 0) back[b.closes]?.push(i);
-      }
-    });
-    return back;
-  }
-
   /**
-   * What can be known at all, whatever the numbers: a fixpoint, so that loops hide nothing and nothing is asked in vain.
+   * What can be known at all, whatever the numbers.
    *
    * @param more  further quantities taken as known, such as inputs that could be asked for
    * @param open  whether a way counts; all unless given
    * @returns     1 for each slot that some chain of ways reaches
    */
   reachable(more: (slot: Slot, i: number) => boolean = () => false, open: (way: Bound) => boolean = () => true): Uint8Array {
-    const can = Uint8Array.from(this.#pinned);
-    this.slots.forEach((slot, i) => { if (can[i] === 0 && more(slot, i)) can[i] = 1; });
-    // Each way waits for the parts it still lacks; the last part to come makes its slot known.
-    const lacks: number[] = [];
-    const slotOf: number[] = [];
-    const waiting: (number[] | undefined)[] = [];
-    const found: number[] = [];
-    this.slots.forEach((slot, i) => {
-      if (can[i] === 1) return;
-      for (const b of slot.ways) {
-        if (can[i] === 1 || !open(b)) continue;
-        const way = slotOf.push(i) - 1;
-        let n = 0;
-        for (const need of b.needs) if (can[need] === 0) { n++; (waiting[need] ??= []).push(way); }
-        for (const w of b.when) if (can[w.slot] === 0) { n++; (waiting[w.slot] ??= []).push(way); }
-        lacks.push(n);
-        if (n === 0) { can[i] = 1; found.push(i); }
-      }
-    });
-    for (let i = found.pop(); i !== undefined; i = found.pop()) {
-      for (const way of waiting[i] ?? []) {
-        lacks[way] = (lacks[way] as number) - 1;
-        const slot = slotOf[way] as number;
-        if (lacks[way] === 0 && can[slot] === 0) { can[slot] = 1; found.push(slot); }
-      }
-    }
-    return can;
+    const known = Uint8Array.from(this.#pinned);
+    this.slots.forEach((slot, i) => { if (known[i] === 0 && more(slot, i)) known[i] = 1; });
+    return knowable(this.slots, known, open);
   }
 
   // Stamps: the round means known, the round + 1 being asked (meeting it again is a loop: that way is not taken here), the negative round cannot be had.
@@ -552,12 +477,6 @@ export class Workings {
       return range !== undefined && (value < range[0] || value > range[1]) ? [{ need: b.ids[k] as string, value, range }] : [];
     });
   }
-}
-
-function reached(next: Edges['next'], from: number, through: (slot: number) => boolean): Int32Array {
-  const seen = new Set<number>([from]);
-  for (const at of seen) for (const f of next[at] as readonly number[]) if (through(f)) seen.add(f);
-  return Int32Array.from(seen);
 }
 
 function distance(v: number, end: number): number {

@@ -1,5 +1,6 @@
 import { adds, Linear } from './linear.ts';
-import type { Bound, Slot, Workings } from './resolve.ts';
+import type { Workings } from './resolve.ts';
+import type { Bound, Slot } from './slot.ts';
 
 /** Spread of one number: 95 % bounds, and what share each source has of its square, largest first. */
 export interface Spread {
