@@ -29,4 +29,6 @@ export async function start(): Promise<void> {
   }
   process.on('uncaughtException', (error) => process.exit(fail(error, false)));
   process.exitCode = await main(process.argv.slice(2));
+  // What the runtime still compiles in the background is of no use any more; without this it is waited for.
+  if (process.stdout.writableLength === 0 && process.stderr.writableLength === 0) process.exit();
 }

@@ -31,7 +31,7 @@ export default class Plan extends Base {
     const options = ownData(flags);
     const on = readCaseFile(args.file, vocabulary);
     const far = flags.full || flags.into !== undefined || this.jsonEnabled();
-    const made = await plan(on, { ...options, version: about.version, ...(far ? { flips: true } : { sections: ['cautions'] }) });
+    const made = await plan(on, { ...options, version: about.version, ...(far ? { flips: true } : { quick: true, sections: ['cautions'] }) });
     const writing = writingOf(made.quantities, on);
     if (flags.full) this.say(asText(planBlocks(made, writing, false)));
     else {

@@ -21,6 +21,8 @@ export interface PlanOptions {
   readonly materials?: Collection;
   /** Seek the values at which each input flips a verdict: costs a scan per input. */
   readonly flips?: boolean;
+  /** The synchronous reading of the rules alone, without the rules engine beside it: for a screen that is wanted at once. */
+  readonly quick?: boolean;
   /** Sections to write; the others stay empty. All unless given: a screen needs few of them. */
   readonly sections?: readonly SectionName[];
 }
@@ -75,7 +77,7 @@ export function settleCase(on: Case, options: Omit<PlanOptions, 'version' | 'fli
 export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
   const { assembled, rules, targets, state, decideOptions, settle: again } = settleCase(on, options);
   const { workings, ranges } = assembled;
-  const decisions = await decide(workings, rules, targets, { ...decideOptions, settled: state, ...(options.flips === true ? { inputs: flipInputs(assembled) } : {}) });
+  const decisions = await decide(workings, rules, targets, { ...decideOptions, settled: state, quick: options.quick, ...(options.flips === true ? { inputs: flipInputs(assembled) } : {}) });
   targetSpreads(assembled);
   const ladder = ladderOf(assembled);
   const ground = groundOf(assembled, decisions, ladder);
@@ -86,10 +88,11 @@ export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
   const spread = spreads(workings, ids);
   const range = rangesOf(workings, ranges, ids, again);
   if (ranges.length > 0) settle(workings, rules, targets, decideOptions);
+  let sha256: string | undefined;
   return {
     program: `runbrief ${options.version}`,
     format: 1,
-    case: { file: basename(on.file), title: on.title ?? '', sha256: digest(on.text) },
+    case: { file: basename(on.file), title: on.title ?? '', get sha256() { return (sha256 ??= digest(on.text)); } },
     targets: assembled.targets.map(planTarget),
     quantities: quantitiesOf(workings, ids, spread, range),
     effects: decisions.effects,

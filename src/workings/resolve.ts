@@ -1,7 +1,9 @@
 import type { ProblemData } from '../problems/index.ts';
+import { bind } from './bind.ts';
 import type { Node } from './build.ts';
-import type { Law, Laws, When } from './define.ts';
-import { knowable, reached, whoNeeds, type Edges } from './reach.ts';
+import type { Laws } from './define.ts';
+import { fixedPoint } from './fixed-point.ts';
+import { Reach, type Known } from './reach.ts';
 import type { Bound, Given, Slot, Source } from './slot.ts';
 
 /** How a loop was closed. */
@@ -10,18 +12,19 @@ export interface Closed {
   readonly change: number;
 }
 
-const mostPasses = 60;
-const never: Bound['when'] = [];
-
-/** All quantities of a case, resolved on demand. Replace given numbers by `set` and ask again: the same graph serves every point of a sweep. */
+/**
+ * All quantities of a case, resolved on demand. Replace given numbers by `set` and ask again: the same graph serves every point of a sweep.
+ *
+ * One file, since stamps, pins, shifts and loops are one state. Its inner loops count indices: most of them run a few times in a short program.
+ */
 export class Workings {
-  readonly slots: Slot[] = [];
-  readonly sources: Source[] = [];
+  readonly slots: readonly Slot[];
+  readonly sources: readonly Source[];
   readonly closed = new Map<number, Closed>();
   readonly failures = new Map<number, ProblemData>();
-  readonly index = new Map<string, number>();
+  readonly index: ReadonlyMap<string, number>;
   readonly used: (Bound | undefined)[] = [];
-  readonly given: (Given | undefined)[] = [];
+  readonly given: readonly (Given | undefined)[];
   readonly #value: Float64Array;
   readonly #word: (string | undefined)[] = [];
   readonly #stamp: Int32Array;
@@ -29,88 +32,47 @@ export class Workings {
   readonly #shift: Float64Array;
   readonly #inputSource: Int32Array;
   readonly #pinned: Uint8Array;
+  /** Loop variables on trial, the outermost first; and 1 for each of them. */
+  readonly #around: number[] = [];
   readonly #trying: Uint8Array;
   /** What a pinned quantity is set to, before any shift. */
   readonly #base: Float64Array;
-  /** The slots each source of spread acts on directly. */
-  readonly #acts: number[][] = [];
+  readonly #acts: readonly (readonly number[])[];
   readonly #round = 2;
-  /** What follows from what, for each state of what can be known. */
-  readonly #edges = new WeakMap<Uint8Array, Edges>();
+  readonly #reach: Reach;
   /** How many sources stand off their nominal point, and readings aside of it. */
   #shifted = 0;
-  #knowable: Uint8Array | undefined;
-  readonly #lawSource = new Map<string, number>();
+  #known: Known | undefined;
+  readonly #lawSource: ReadonlyMap<string, number>;
   /** Slope of closes(x) - x where each loop was last closed. */
   readonly #slopes = new Map<number, number>();
   /** For a quantity pinned since: what could be known without the pin. */
-  readonly #knewWithout = new Map<number, Uint8Array>();
+  readonly #knewWithout = new Map<number, Known>();
 
   constructor(nodes: ReadonlyMap<string, Node>, given: Readonly<Record<string, Given>>, laws: Laws = {}) {
-    for (const node of nodes.values()) this.index.set(node.id, this.slots.push({ id: node.id, node, isWord: node.about.unit === 'word', ways: [] }) - 1);
+    const bound = bind(nodes, given, laws, (source) => this.#shift[source] as number);
+    this.slots = bound.slots;
+    this.index = bound.index;
+    this.given = bound.given;
+    this.sources = bound.sources;
+    this.#acts = bound.acts;
+    this.#inputSource = bound.inputSource;
+    this.#lawSource = bound.lawSource;
     const n = this.slots.length;
     this.#value = new Float64Array(n);
     this.#stamp = new Int32Array(n);
     this.#pinned = new Uint8Array(n);
     this.#trying = new Uint8Array(n);
     this.#base = new Float64Array(n);
-    this.#inputSource = new Int32Array(n).fill(-1);
-    const sourceOf = new Map<unknown, number>();
-    const source = (key: unknown, s: Source): number => {
-      let i = sourceOf.get(key);
-      if (i === undefined) {
-        sourceOf.set(key, (i = this.sources.push(s) - 1));
-        this.#acts.push([]);
-      }
-      return i;
-    };
-    for (const [id, g] of Object.entries(given)) {
-      const i = this.index.get(id);
-      if (i === undefined) continue;
-      this.given[i] = g;
-      this.#pinned[i] = 1;
-      if (typeof g.value === 'string') this.#word[i] = g.value;
-      else this.#base[i] = g.value;
-      if (g.half !== undefined && g.half > 0) {
-        const s = source(id, { key: id, label: id, kind: 'input' });
-        this.#inputSource[i] = s;
-        this.#acts[s]?.push(i);
-      }
-    }
-    const shifted = this.#shiftedLaws(laws, source);
-    for (const slot of this.slots) {
-      slot.ways = slot.node.ways
-        .filter((w) => (w.way.laws ?? []).every((l) => laws[l] !== undefined))
-        .map(({ way, needs, when, closes }): Bound => ({
-          way,
-          ids: needs,
-          needs: needs.map((id) => this.index.get(id) as number),
-          when: this.#conditions(when),
-          closes: closes === undefined ? -1 : (this.index.get(closes) as number),
-          of: {},
-          laws: shifted,
-          source: way.scatter === undefined ? -1 : source(way.together ?? way, { key: way.together ?? `${slot.id}: ${way.formula}`, label: way.source, kind: 'scatter' }),
-        }));
-      for (const b of slot.ways) {
-        if (b.source >= 0) this.#acts[b.source]?.push(this.index.get(slot.id) as number);
-        for (const l of b.way.laws ?? []) this.#acts[sourceOf.get(`law ${l}`) as number]?.push(this.index.get(slot.id) as number);
-      }
-    }
     this.#shift = new Float64Array(this.sources.length);
-  }
-
-  #shiftedLaws(laws: Laws, source: (key: unknown, s: Source) => number): Laws {
-    const out: Record<string, Law> = {};
-    for (const [name, law] of Object.entries(laws)) {
-      const i = source(`law ${name}`, { key: name, label: name, kind: 'property' });
-      this.#lawSource.set(name, i);
-      out[name] = Object.assign((t: number, p: number) => { const s = this.#shift[i] as number; return s === 0 ? law(t, p) : law(t, p) * (1 + law.uncertainty(t, p)) ** s; }, { uncertainty: law.uncertainty });
+    this.#reach = new Reach(this.slots);
+    for (let i = 0; i < n; i++) {
+      const value = this.given[i]?.value;
+      if (value === undefined) continue;
+      this.#pinned[i] = 1;
+      if (typeof value === 'string') this.#word[i] = value;
+      else this.#base[i] = value;
     }
-    return out;
-  }
-
-  #conditions(when: When | undefined): Bound['when'] {
-    return when === undefined ? never : Object.entries(when).map(([id, words]) => ({ slot: this.index.get(id) as number, words: typeof words === 'string' ? [words] : words }));
   }
 
   has(id: string): boolean { return this.index.has(id); }
@@ -149,12 +111,12 @@ export class Workings {
 
   /** What can be known does not change by pinning a quantity that could be known, nor by setting it free again. */
   #keepKnowable(i: number, pin: number): void {
-    if (pin === 1 && this.#knowable?.[i] === 1) {
-      this.#knewWithout.set(i, this.#knowable);
+    if (pin === 1 && this.#known?.can[i] === 1) {
+      this.#knewWithout.set(i, this.#known);
       return;
     }
-    if (pin === 0 && this.#knowable !== undefined && this.#knewWithout.get(i) === this.#knowable) return;
-    this.#knowable = undefined;
+    if (pin === 0 && this.#known !== undefined && this.#knewWithout.get(i) === this.#known) return;
+    this.#known = undefined;
   }
 
   /**
@@ -164,12 +126,27 @@ export class Workings {
    * @param read  reads what is wanted
    */
   aside<T>(pins: readonly (readonly [string, number | string])[], read: () => T): T {
-    const touched = new Set<number>();
-    for (const [id] of pins) for (const f of this.followers(this.index.get(id) ?? -1)) touched.add(f);
-    const slots = [...touched];
-    const kept = slots.map((i) => [this.#value[i], this.#base[i], this.#stamp[i], this.#pinned[i], this.#word[i], this.used[i], this.closed.get(i)] as const);
+    const slots = this.#followersOf(pins.map(([id]) => this.index.get(id) ?? -1));
+    const n = slots.length;
+    const value = new Float64Array(n);
+    const base = new Float64Array(n);
+    const stamp = new Int32Array(n);
+    const pinned = new Uint8Array(n);
+    const words: (string | undefined)[] = [];
+    const used: (Bound | undefined)[] = [];
+    const closed: (Closed | undefined)[] = [];
+    for (let k = 0; k < n; k++) {
+      const i = slots[k] as number;
+      value[k] = this.#value[i] as number;
+      base[k] = this.#base[i] as number;
+      stamp[k] = this.#stamp[i] as number;
+      pinned[k] = this.#pinned[i] as number;
+      words.push(this.#word[i]);
+      used.push(this.used[i]);
+      closed.push(this.closed.get(i));
+    }
     const { version } = this;
-    const knowable = this.#knowable;
+    const known = this.#known;
     const failures = [...this.failures];
     this.#shifted++; // loops need close no more than a difference shows
     this.setAll(pins);
@@ -177,22 +154,39 @@ export class Workings {
       return read();
     } finally {
       this.#shifted--;
-      slots.forEach((i, k) => {
-        const [value, base, stamp, pinned, word, used, closed] = kept[k] as (typeof kept)[number];
-        this.#value[i] = value as number;
-        this.#base[i] = base as number;
-        this.#stamp[i] = stamp as number;
-        this.#pinned[i] = pinned as number;
-        this.#word[i] = word;
-        this.used[i] = used;
-        if (closed === undefined) this.closed.delete(i);
-        else this.closed.set(i, closed);
-      });
-      this.#knowable = knowable;
+      for (let k = 0; k < n; k++) {
+        const i = slots[k] as number;
+        this.#value[i] = value[k] as number;
+        this.#base[i] = base[k] as number;
+        this.#stamp[i] = stamp[k] as number;
+        this.#pinned[i] = pinned[k] as number;
+        this.#word[i] = words[k];
+        this.used[i] = used[k];
+        const was = closed[k];
+        if (was === undefined) this.closed.delete(i);
+        else this.closed.set(i, was);
+      }
+      this.#known = known;
       this.failures.clear();
       for (const [i, f] of failures) this.failures.set(i, f);
       this.version = version;
     }
+  }
+
+  /** All slots that follow from any of some. */
+  #followersOf(from: readonly number[]): readonly number[] {
+    const seen = new Uint8Array(this.slots.length);
+    const found: number[] = [];
+    for (let p = 0; p < from.length; p++) {
+      const one = this.followers(from[p] as number);
+      for (let k = 0; k < one.length; k++) {
+        const i = one[k] as number;
+        if (seen[i] === 1) continue;
+        seen[i] = 1;
+        found.push(i);
+      }
+    }
+    return found;
   }
 
   isPinned(i: number): boolean { return this.#pinned[i] === 1; }
@@ -248,26 +242,20 @@ export class Workings {
   /** A quantity and all that follows from it are asked again. */
   #forget(i: number): void {
     this.version++;
-    for (const f of this.followers(i)) {
-      this.#stamp[f] = 0;
-      this.failures.delete(f);
-    }
+    const follow = this.followers(i);
+    for (let k = 0; k < follow.length; k++) this.#stamp[follow[k] as number] = 0;
+    if (this.failures.size > 0) for (let k = 0; k < follow.length; k++) this.failures.delete(follow[k] as number);
   }
 
   /** Slots whose ways reach the slot, in any number of steps. */
   followers(i: number): Int32Array {
-    const edges = this.#edgesNow();
-    let found = edges.followers.get(i);
-    if (found === undefined) edges.followers.set(i, (found = reached(edges.next, i, () => true)));
+    const known = (this.#known ??= this.#knowAll());
+    let found = known.followers.get(i);
+    if (found === undefined) known.followers.set(i, (found = this.#reach.reached(known, i)));
     return found;
   }
 
-  #edgesNow(): Edges {
-    const can = (this.#knowable ??= this.reachable());
-    let edges = this.#edges.get(can);
-    if (edges === undefined) this.#edges.set(can, (edges = { next: whoNeeds(this.slots, can), followers: new Map(), moving: new Map() }));
-    return edges;
-  }
+  #knowAll(): Known { return this.#reach.known(Uint8Array.from(this.#pinned)); }
 
   /**
    * What can be known at all, whatever the numbers.
@@ -276,10 +264,10 @@ export class Workings {
    * @param open  whether a way counts; all unless given
    * @returns     1 for each slot that some chain of ways reaches
    */
-  reachable(more: (slot: Slot, i: number) => boolean = () => false, open: (way: Bound) => boolean = () => true): Uint8Array {
+  reachable(more: (slot: Slot, i: number) => boolean = () => false, open?: (way: Bound) => boolean): Uint8Array {
     const known = Uint8Array.from(this.#pinned);
-    this.slots.forEach((slot, i) => { if (known[i] === 0 && more(slot, i)) known[i] = 1; });
-    return knowable(this.slots, known, open);
+    for (let i = 0; i < known.length; i++) if (known[i] === 0 && more(this.slots[i] as Slot, i)) known[i] = 1;
+    return this.#reach.known(known, open).can;
   }
 
   // Stamps: the round means known, the round + 1 being asked (meeting it again is a loop: that way is not taken here), the negative round cannot be had.
@@ -289,13 +277,14 @@ export class Workings {
     if (stamp === -this.#round || stamp === this.#round + 1) return false;
     const slot = this.slots[i] as Slot;
     if (this.#pinned[i] === 1) return this.#takeGiven(i, slot);
-    this.#knowable ??= this.reachable();
-    if (this.#knowable[i] === 0) return false;
+    this.#known ??= this.#knowAll();
+    if (this.#known.can[i] === 0) return false;
     this.#stamp[i] = this.#round + 1;
     let nearest: Bound | undefined;
     let least = Number.POSITIVE_INFINITY;
     let looped = false;
-    for (const b of slot.ways) {
+    for (let k = 0; k < slot.ways.length; k++) {
+      const b = slot.ways[k] as Bound;
       const ready = this.#ready(b);
       if (ready === 'loop') looped = true;
       if (ready !== true) continue;
@@ -325,15 +314,16 @@ export class Workings {
   }
 
   #ready(b: Bound): boolean | 'loop' {
-    let looped = false;
-    for (const w of b.when) {
-      if (!this.#of(w.slot)) { looped ||= this.#busy(w.slot); return looped ? 'loop' : false; }
+    for (let k = 0; k < b.when.length; k++) {
+      const w = b.when[k] as Bound['when'][number];
+      if (!this.#of(w.slot)) return this.#busy(w.slot) ? 'loop' : false;
       if (!w.words.includes(this.#word[w.slot] as string)) return false;
     }
     // Twice, since closing a loop inside one need may have emptied another.
     for (let pass = 0; pass < 3; pass++) {
       let all = true;
-      for (const n of b.needs) {
+      for (let k = 0; k < b.needs.length; k++) {
+        const n = b.needs[k] as number;
         if (this.#stamp[n] === this.#round) continue;
         all = false;
         if (!this.#of(n)) return this.#busy(n) ? 'loop' : false;
@@ -391,7 +381,7 @@ export class Workings {
   }
 
   /**
-   * Fixed point x = closes(x), by secant steps on closes(x) - x; undefined where `closes` cannot be had. What the last trial computed stays:
+   * Closes a loop x = closes(x); undefined where `closes` cannot be had. What the last trial computed stays:
    * it belongs to x, so loops within loops are not opened again.
    */
   #close(i: number, b: Bound, start: number): number | undefined {
@@ -400,8 +390,10 @@ export class Workings {
     for (let k = 0; k < open.length; k++) before[k] = this.#stamp[open[k] as number] as number;
     // Quantities on trial in a loop around this one keep their trial value.
     this.#trying[i] = 1;
+    this.#around.push(i);
     const kept = this.closed.has(i) && Number.isFinite(this.#value[i]) ? (this.#value[i] as number) : start;
     const x = this.#search(i, b, kept, open) ?? (kept === start ? undefined : this.#search(i, b, start, open));
+    this.#around.pop();
     this.#trying[i] = 0;
     for (let k = 0; k < open.length; k++) {
       const f = open[k] as number;
@@ -415,50 +407,26 @@ export class Workings {
 
   /** What moves with a loop variable while those of the loops around it stand: what is reached only through them need not be asked again. */
   #moving(i: number): Int32Array {
-    const around: number[] = [];
-    for (let k = 0; k < this.#trying.length; k++) if (this.#trying[k] === 1) around.push(k);
-    if (around.length === 0) return this.followers(i);
-    const { next, moving } = this.#edgesNow();
-    const key = `${i} ${around.join(' ')}`;
-    let found = moving.get(key);
-    if (found === undefined) moving.set(key, (found = reached(next, i, (f) => this.#trying[f] === 0)));
+    if (this.#around.length === 0) return this.followers(i);
+    const known = (this.#known ??= this.#knowAll());
+    const key = `${i} ${this.#around.join(' ')}`;
+    let found = known.moving.get(key);
+    if (found === undefined) known.moving.set(key, (found = this.#reach.reached(known, i, this.#trying)));
     return found;
   }
 
   #search(i: number, b: Bound, start: number, open: Int32Array): number | undefined {
     // A difference against the nominal point needs no more.
     const within = this.#shifted > 0 ? 1e-7 : (b.way.within ?? 1e-10);
-    const trial = (x: number): number => {
+    const end = fixedPoint((x) => {
       for (let k = 0; k < open.length; k++) if (this.#trying[open[k] as number] === 0) this.#stamp[open[k] as number] = 0;
       this.#value[i] = x;
       this.#stamp[i] = this.#round;
       return this.#of(b.closes) ? (this.#value[b.closes] as number) : Number.NaN;
-    };
-    let x0 = start;
-    let r0 = trial(x0) - x0;
-    if (Number.isNaN(r0)) return undefined;
-    if (Math.abs(r0) <= within * Math.abs(x0)) return this.#closedAt(i, x0, 1, r0);
-    // The slope of the last time serves until a new one is known. Once the residual has changed its sign, the root stays between the two ends:
-    // where a word changes on the way it may jump over zero, and the loop then rests at the jump.
-    const known = this.#slopes.get(i);
-    let x = x0 + (known === undefined ? r0 : -r0 / known);
-    let end: { x: number; r: number } | undefined;
-    for (let passes = 2; passes <= mostPasses && Number.isFinite(x); passes++) {
-      const r = trial(x) - x;
-      if (Number.isNaN(r)) return undefined;
-      if (Math.abs(r) <= within * Math.abs(x)) return this.#closedAt(i, x, passes, r);
-      if (r * r0 < 0) end = { x: x0, r: r0 };
-      if (end !== undefined && Math.abs(end.x - x) <= Math.max(within, 1e-9) * Math.abs(x)) return this.#closedAt(i, x, passes, r);
-      const slope = (r - r0) / (x - x0);
-      const step = -r / slope;
-      const good = Number.isFinite(step) && step !== 0;
-      if (good) this.#slopes.set(i, slope);
-      const stuck = end !== undefined && Math.abs(r) > 0.5 * Math.abs(r0);
-      [x0, r0] = [x, r];
-      x += good && Math.abs(step) <= 5 * Math.abs(r) ? step : r;
-      if (end !== undefined && (stuck || (x - x0) * (x - end.x) >= 0)) x = (x0 + end.x) / 2;
-    }
-    this.failures.set(i, { code: 'loop-open', message: `${this.slots[i]?.id ?? ''}: the loop ${b.way.formula} did not close in ${mostPasses} passes (last residual ${r0.toExponential(1)})` });
+    }, start, within, this.#slopes.get(i));
+    if (end.slope !== undefined) this.#slopes.set(i, end.slope);
+    if (end.found) return this.#closedAt(i, end.x, end.passes, end.residual);
+    if (end.why === 'open') this.failures.set(i, { code: 'loop-open', message: `${this.slots[i]?.id ?? ''}: the loop ${b.way.formula} did not close in ${end.passes} passes (last residual ${end.residual.toExponential(1)})` });
     return undefined;
   }
 

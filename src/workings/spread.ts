@@ -32,19 +32,28 @@ export function spreads(workings: Workings, ids: readonly string[]): Map<string,
   const percentiles = sampled.length === 0 ? new Map<number, [number, number]>() : sample(workings, sampled.map((r) => r.i), activeSources(linear, sampled.map((r) => r.i)));
   const out = new Map<string, Spread>();
   for (const { id, i } of rows) {
-    const parts = [...linear.row(i)].flatMap((d, source) => (d === 0 ? [] : [{ source, square: d * d }]));
-    const square = parts.reduce((s, p) => s + p.square, 0);
+    const { at, by } = linear.row(i);
+    const square = by.reduce((sum, d) => sum + d * d, 0);
     const jump = percentiles.get(i);
     if (square === 0 && jump === undefined) continue;
     const w = Math.sqrt(square);
     const value = workings.value(i);
     const [low, high] = jump ?? (adds(workings, i) ? [value - w, value + w] : [value * Math.exp(-w), value * Math.exp(w)]);
-    const shares = parts
-      .map((p) => ({ key: workings.sources[p.source]?.key ?? '', label: workings.sources[p.source]?.label ?? '', share: square === 0 ? 0 : p.square / square }))
-      .sort((x, y) => y.share - x.share);
-    out.set(id, { low, high, shares, how: jump === undefined ? 'derivatives' : 'sampled' });
+    out.set(id, {
+      low, high, how: jump === undefined ? 'derivatives' : 'sampled',
+      get shares() { return sharesOf(workings, at, by, square); }, // asked for a few quantities only
+    });
   }
   return out;
+}
+
+function sharesOf(workings: Workings, at: readonly number[], by: readonly number[], square: number): Spread['shares'] {
+  const all = at.flatMap((source, k) => {
+    const { key = '', label = '' } = workings.sources[source] ?? {};
+    const d = by[k] as number;
+    return d === 0 ? [] : [{ source, key, label, share: square === 0 ? 0 : (d * d) / square }];
+  });
+  return all.sort((x, y) => y.share - x.share || x.source - y.source).map(({ key, label, share }) => ({ key, label, share }));
 }
 
 const kept = new WeakMap<Workings, { version: number; linear: Linear }>();
@@ -61,7 +70,10 @@ function linearOf(workings: Workings): Linear {
 /** Sources that move any of the quantities. */
 function activeSources(linear: Linear, slots: readonly number[]): number[] {
   const found = new Set<number>();
-  for (const i of slots) linear.row(i).forEach((d, s) => { if (d !== 0) found.add(s); });
+  for (const i of slots) {
+    const { at, by } = linear.row(i);
+    at.forEach((s, k) => { if (by[k] !== 0) found.add(s); });
+  }
   return [...found].sort((a, b) => a - b);
 }
 
