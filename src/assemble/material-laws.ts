@@ -30,7 +30,7 @@ export function fluidLaws(material: Material, state: State): MaterialLaws {
     const here = propertyIn(material, property, taken);
     if (here === undefined) return;
     // One uncertainty for all states of a material and property, that of the state which settles its phase.
-    laws[id] = Object.assign(at((T, p) => law(T, p)), { uncertainty: () => here.uncertainty });
+    laws[id] = Object.assign(at(remembered(law)), { uncertainty: () => here.uncertainty });
     const { temperature, pressure } = here.range;
     about[id] = { formula: `${symbol}(T, p) of ${material.name}, ${here.phase}`, source: here.source, ...(temperature === undefined ? {} : { temperature }), ...(pressure === undefined ? {} : { pressure }) };
   };
@@ -52,6 +52,20 @@ export function fluidLaws(material: Material, state: State): MaterialLaws {
     about['vapourDensity'] = { formula: `rho_v(p) of ${material.name}, saturated`, source: about['saturationTemperature']?.source ?? 'material record' };
   }
   return { laws, about, phase: taken.phase, flags: taken.flags };
+}
+
+/** The same law, which remembers what it gave at its last pressure: loops and derivatives come back to the same states. */
+function remembered(law: (T: number, p: number) => number): (T: number, p: number) => number {
+  const most = 256;
+  const given = new Map<number, number>();
+  let at = Number.NaN;
+  return (T, p) => {
+    if (p !== at || given.size >= most) given.clear();
+    at = p;
+    let value = given.get(T);
+    if (value === undefined) given.set(T, (value = law(T, p)));
+    return value;
+  };
 }
 
 /** Density of saturated vapour as a function of pressure, where the record covers the vapour. */

@@ -14,7 +14,17 @@ let shipped: CompiledRules | undefined;
 export function shippedRules(): CompiledRules {
   if (shipped !== undefined) return shipped;
   const compiled = fileURLToPath(new URL('./rules.json', import.meta.url));
-  return (shipped = existsSync(compiled) ? (JSON.parse(readFileSync(compiled, 'utf8')) as CompiledRules) : compileFiles(readRuleFolder(fileURLToPath(new URL('../../rules', import.meta.url)))));
+  return (shipped = existsSync(compiled) ? revived(readFileSync(compiled, 'utf8')) : compileFiles(readRuleFolder(fileURLToPath(new URL('../../rules', import.meta.url)))));
+}
+
+/** Rules as the build wrote them; the examples of a rule are read when they are asked for. */
+function revived(text: string): CompiledRules {
+  const rules = JSON.parse(text) as CompiledRules;
+  for (const rule of [...Object.values(rules.effects), ...Object.values(rules.choices)]) {
+    const written = rule.examples as unknown as string;
+    Object.defineProperty(rule, 'examples', { enumerable: true, get: (): unknown => JSON.parse(written) });
+  }
+  return rules;
 }
 
 /** Compiles rule files against all ids that the program defines. */

@@ -7,6 +7,7 @@ export interface Places {
   readonly target: Readonly<Partial<Record<PlaceKind, string>>>;
 }
 const noPlaces: Places = { of: {}, target: {} };
+const noPlace: readonly string[] = [];
 
 /** A quantity at one place, or the plain one, with its ways in the order they are tried; needs are ids that exist. */
 export interface Node {
@@ -29,10 +30,15 @@ const overPlaces = (id: string, copies: readonly string[], which: keyof typeof j
   source: 'definition',
 });
 
-function placesOf(quantity: Quantity, places: Places): string[][] {
+type Rows = readonly (readonly string[])[];
+const noRows: Rows = [];
+
+/** The places of a quantity: a row of one place of each kind it has; none for a quantity of the whole case. */
+function placesOf(quantity: Quantity, places: Places): Rows {
+  if (quantity.per === undefined || quantity.per.length === 0) return noRows;
   let rows: string[][] = [[]];
-  for (const kind of quantity.per ?? []) rows = rows.flatMap((row) => (places.of[kind] ?? []).map((place) => [...row, place]));
-  return rows.filter((row) => row.length > 0);
+  for (const kind of quantity.per) rows = rows.flatMap((row) => (places.of[kind] ?? []).map((place) => [...row, place]));
+  return rows;
 }
 
 /**
@@ -50,7 +56,8 @@ export function joinDefinitions(definitions: readonly Definition[], places: Plac
   const added = new Map<string, MoreWays[]>();
   for (const d of definitions) {
     if ('more' in d) {
-      const plain = d.id.split('@')[0] as string;
+      const where = d.id.indexOf('@');
+      const plain = where < 0 ? d.id : d.id.slice(0, where);
       const had = added.get(plain);
       if (had === undefined) added.set(plain, [d]);
       else had.unshift(d);
@@ -58,44 +65,51 @@ export function joinDefinitions(definitions: readonly Definition[], places: Plac
     else quantities.set(d.id, d);
   }
   const ids = new Set<string>(quantities.keys());
-  for (const q of quantities.values()) for (const row of placesOf(q, places)) ids.add(`${q.id}@${row.join('/')}`);
-  const known = [...quantities.keys()];
+  const rowsOf = new Map<string, Rows>();
+  quantities.forEach((q) => {
+    const rows = placesOf(q, places);
+    if (rows.length > 0) rowsOf.set(q.id, rows);
+    for (const row of rows) ids.add(`${q.id}@${row.join('/')}`);
+  });
   const unknown = (where: string, id: string): void => {
-    problems.push({ code: 'unknown-quantity', message: `${where} names ${id}, which no definition gives`, ...near(id, known) });
+    problems.push({ code: 'unknown-quantity', message: `${where} names ${id}, which no definition gives`, ...near(id, [...quantities.keys()]) });
   };
-  for (const plain of added.keys()) if (!quantities.has(plain)) unknown('an added way', plain);
+  added.forEach((_, plain) => { if (!quantities.has(plain)) unknown('an added way', plain); });
 
   const local = (need: string, row: readonly string[]): string => {
     if (row.length === 0 || need.includes('@')) return need;
-    const tries = [row.join('/'), ...row];
-    return tries.map((t) => `${need}@${t}`).find((id) => ids.has(id)) ?? need;
+    if (row.length > 1 && ids.has(`${need}@${row.join('/')}`)) return `${need}@${row.join('/')}`;
+    for (const part of row) if (ids.has(`${need}@${part}`)) return `${need}@${part}`;
+    return need;
   };
   const nodes = new Map<string, Node>();
+  const holds = (when: When): boolean => Object.entries(when).every(([word, value]) => fixed[word] === undefined || (typeof value === 'string' ? value === fixed[word] : value.includes(fixed[word])));
   const make = (q: Quantity, row: readonly string[]): void => {
     const id = row.length === 0 ? q.id : `${q.id}@${row.join('/')}`;
-    const fits = (m: MoreWays): boolean => {
-      const at = m.id.split('@')[1];
-      return at === undefined ? true : row.length > 0 && at.split('/').every((part) => row.includes(part));
+    const bound: Node['ways'][number][] = [];
+    const add = (way: Way): void => {
+      if (way.when !== undefined && !holds(way.when)) return;
+      const needs = row.length === 0 ? way.needs : way.needs.map((n) => local(n, row));
+      for (let k = 0; k < needs.length; k++) if (!ids.has(needs[k] as string)) unknown(`a way to ${q.id} (${way.formula})`, way.needs[k] as string);
+      const closes = way.closes === undefined ? undefined : local(way.closes, row);
+      if (closes !== undefined && !ids.has(closes)) unknown(`the loop of ${q.id}`, closes);
+      bound.push({ way, needs, closes, when: way.when === undefined ? undefined : checkWhen(q.id, way.when, row) });
     };
-    const own = [...(added.get(q.id) ?? []).filter(fits).flatMap((m) => m.more), ...q.ways];
-    const copies = row.length > 0 ? [] : placesOf(q, places);
+    const copies = row.length > 0 ? noRows : (rowsOf.get(q.id) ?? noRows);
     let at: string | undefined;
-    const lead: Way[] = [];
     if (copies.length > 0) {
       const target = (q.per ?? []).map((kind) => places.target[kind] ?? places.of[kind]?.[0]).join('/');
       if (q.plain === 'target' && ids.has(`${q.id}@${target}`)) {
         at = target;
-        lead.push(identity(`${q.id}@${target}`));
-      } else if (q.plain !== undefined && q.plain !== 'target') lead.push(overPlaces(q.id, copies.map((c) => `${q.id}@${c.join('/')}`), q.plain));
+        add(identity(`${q.id}@${target}`));
+      } else if (q.plain !== undefined && q.plain !== 'target') add(overPlaces(q.id, copies.map((c) => `${q.id}@${c.join('/')}`), q.plain));
     }
-    const holds = ([word, value]: [string, string | readonly string[]]): boolean => fixed[word] === undefined || (typeof value === 'string' ? value === fixed[word] : value.includes(fixed[word]));
-    const bound = [...lead, ...own].filter((way) => way.when === undefined || Object.entries(way.when).every(holds)).map((way) => {
-      const needs = way.needs.map((n) => local(n, row));
-      needs.forEach((n, k) => ids.has(n) || unknown(`a way to ${q.id} (${way.formula})`, way.needs[k] as string));
-      const closes = way.closes === undefined ? undefined : local(way.closes, row);
-      if (closes !== undefined && !ids.has(closes)) unknown(`the loop of ${q.id}`, closes);
-      return { way, needs, closes, when: way.when === undefined ? undefined : checkWhen(q.id, way.when, row) };
-    });
+    const more = added.get(q.id);
+    if (more !== undefined) for (const m of more) {
+      const where = m.id.indexOf('@');
+      if (where < 0 || (row.length > 0 && m.id.slice(where + 1).split('/').every((part) => row.includes(part)))) m.more.forEach(add);
+    }
+    for (let k = 0; k < q.ways.length; k++) add(q.ways[k] as Way);
     nodes.set(id, { id, about: q, ways: bound, ...(at === undefined ? {} : { at }) });
   };
   const checkWhen = (id: string, when: When, row: readonly string[]): When => {
@@ -110,10 +124,11 @@ export function joinDefinitions(definitions: readonly Definition[], places: Plac
     }
     return out;
   };
-  for (const q of quantities.values()) {
-    make(q, []);
-    for (const row of placesOf(q, places)) make(q, row);
-  }
+  quantities.forEach((q) => {
+    make(q, noPlace);
+    const rows = rowsOf.get(q.id);
+    if (rows !== undefined) for (const row of rows) make(q, row);
+  });
   if (problems.length > 0) throw new Problem(problems);
   return nodes;
 }
