@@ -82,8 +82,12 @@ export abstract class Base extends Command {
   /** Colours for a terminal; without effect in a pipe, with NO_COLOR and with `--json`. */
   protected async colours(): Promise<ChalkInstance> {
     const { Chalk, default: chalk } = await import('chalk');
-    const plain = this.jsonEnabled() || (process.env['NO_COLOR'] ?? '') !== '';
-    return plain ? new Chalk({ level: 0 }) : chalk;
+    return this.colourless ? new Chalk({ level: 0 }) : chalk;
+  }
+
+  /** Whether no colour can show, so that the library of colours need not be loaded. */
+  protected get colourless(): boolean {
+    return this.jsonEnabled() || (process.env['NO_COLOR'] ?? '') !== '' || (!process.stdout.isTTY && process.env['FORCE_COLOR'] === undefined);
   }
 
   override logJson(document: unknown): void {

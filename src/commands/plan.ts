@@ -35,9 +35,8 @@ export default class Plan extends Base {
     const writing = writingOf(made.quantities, on);
     if (flags.full) this.say(asText(planBlocks(made, writing, false)));
     else {
-      const chalk = await this.colours();
-      const paint = { strong: chalk.bold, warn: chalk.yellow.bold };
-      this.say(screen(made, writing, { file: args.file, paint, ...(on.purpose === undefined ? {} : { purpose: on.purpose }) }));
+      const chalk = this.colourless ? undefined : await this.colours();
+      this.say(screen(made, writing, { file: args.file, ...(chalk === undefined ? {} : { paint: { strong: chalk.bold, warn: chalk.yellow.bold } }), ...(on.purpose === undefined ? {} : { purpose: on.purpose }) }));
     }
     if (flags.into !== undefined) {
       const files = planFiles(made, on, tablesOf(settleCase(on, options).assembled));

@@ -43,7 +43,13 @@ export function fitted(parts: readonly Part[], height: number, paint: Paint): st
 /** How many items of each part are shown: least important ones go until all fits, then what room is left is given back. */
 function shownOf(parts: readonly Part[], height: number): number[] {
   const shown = parts.map((part) => part.items.length);
-  const total = (): number => parts.reduce((sum, part, k) => sum + linesOf(part, shown[k] as number).length + (part.apart === true ? 1 : 0), 0);
+  const tall = parts.map((part) => part.items.map((item) => item.split('\n').length));
+  const total = (): number => parts.reduce((sum, part, k) => {
+    const count = shown[k] as number;
+    let lines = sum + (part.apart === true ? 1 : 0) + (count < part.items.length ? 1 : 0);
+    for (let i = 0; i < count; i++) lines += tall[k]?.[i] as number;
+    return lines;
+  }, 0);
   const most = (spare: (k: number) => number): number => parts.reduce((best, _, k) => (spare(k) > 0 && (best < 0 || spare(k) > spare(best)) ? k : best), -1);
   while (total() > height) {
     const beyond = most((k) => (shown[k] as number) - (parts[k] as Part).least);
