@@ -1,4 +1,5 @@
 import type { Case, Target } from '../case/index.ts';
+import { lawProperties } from '../quantities/index.ts';
 import { readQuantity } from '../units/index.ts';
 import { quantity, type Definition, type Way } from '../workings/index.ts';
 
@@ -38,7 +39,7 @@ export interface TargetNode {
  * @returns       definitions `targets.0.within` and so on
  */
 export function targetDefinitions(on: Case, nodes: readonly TargetNode[]): Definition[] {
-  return nodes.flatMap((node) => [...accuracy(node), ...spread(on, node), ...decision(on, node)]);
+  return nodes.flatMap((node) => [...accuracy(node), ...spread(on, node), ...follows(node), ...decision(on, node)]);
 }
 
 const one = (id: string, symbol: string, name: string, unit: string, ways: readonly Way[], set?: { formula: string; source: string }): Definition =>
@@ -102,6 +103,16 @@ function spread(on: Case, node: TargetNode): Definition[] {
     one(`${at}.gain`, 'w/W_min', 'how much narrower than the hand estimate a run can be at best', '1', [way([`${at}.halfWidth`, `${at}.reach`], ([w, best]) => (w as number) / (best as number), 'w/W_min', 'definition')]),
     one(`${at}.standOffNeeded`, 'k_c', 'half-widths that an estimate must stand off a limit to decide alone', '1', [way([], () => needed, why, 'normal distribution of the estimate', on.ifWrong === undefined ? 'assumed' : undefined)]),
   ];
+}
+
+/** How the target follows each property, all its states moved together: an exponent, for a temperature the change by 1 %. Set once the derivatives are known. */
+function follows({ target, unit, name }: TargetNode): Definition[] {
+  return lawProperties.map((p) => quantity(`${target.path}.per.${p.id}`, {
+    symbol: unit === 'K' ? `0.01 dx/d ln ${p.symbol}` : `d ln x/d ln ${p.symbol}`,
+    name: unit === 'K' ? `change of the ${name} by 1 % of ${p.name}` : `exponent of the ${name} in the ${p.name}`,
+    unit: unit === 'K' ? 'K' : '1', signed: true,
+    set: { formula: 'first derivative, all states of the property moved together', source: 'first derivatives' },
+  }));
 }
 
 function decision(on: Case, { target, id, unit, name }: TargetNode): Definition[] {

@@ -13,6 +13,8 @@ export interface Bindings {
   /** Source of spread of each input, or -1. */
   readonly inputSource: Int32Array;
   readonly lawSource: ReadonlyMap<string, number>;
+  /** 95 % half-width of each source that is a law, relative, as it was last read. */
+  readonly lawHalf: Map<number, number>;
 }
 
 const never: Bound['when'] = [];
@@ -53,11 +55,19 @@ export function bind(nodes: ReadonlyMap<string, Node>, given: Readonly<Record<st
     acts[s]?.push(i);
   }
   const lawSource = new Map<string, number>();
+  const lawHalf = new Map<number, number>();
   const shifted: Record<string, Law> = {};
   for (const [name, law] of Object.entries(laws)) {
     const i = source(`law ${name}`, () => ({ key: name, label: name, kind: 'property' }));
     lawSource.set(name, i);
-    shifted[name] = Object.assign((t: number, p: number) => { const s = shiftOf(i); return s === 0 ? law(t, p) : law(t, p) * (1 + law.uncertainty(t, p)) ** s; }, { uncertainty: law.uncertainty });
+    const moved = (t: number, p: number): number => {
+      const s = shiftOf(i);
+      if (s === 0) return law(t, p);
+      const half = law.uncertainty(t, p);
+      lawHalf.set(i, half);
+      return law(t, p) * (1 + half) ** s;
+    };
+    shifted[name] = Object.assign(moved, { uncertainty: law.uncertainty });
   }
   const at = (id: string): number => index.get(id) as number;
   const conditions = (when: When | undefined): Bound['when'] => (when === undefined ? never : Object.entries(when).map(([id, words]) => ({ slot: at(id), words: typeof words === 'string' ? [words] : words })));
@@ -74,5 +84,5 @@ export function bind(nodes: ReadonlyMap<string, Node>, given: Readonly<Record<st
       });
     }
   });
-  return { slots, index, given: givenAt, sources, acts, inputSource, lawSource };
+  return { slots, index, given: givenAt, sources, acts, inputSource, lawSource, lawHalf };
 }

@@ -5,5 +5,5 @@ export { Workings, type Closed } from './resolve.ts';
 export type { Bound, Given, Slot, Source } from './slot.ts';
 export { flagsIn, stepOf, trace, type Step } from './trace.ts';
 export { missing } from './missing.ts';
-export { spreads, type Settle, type Spread } from './spread.ts';
+export { followsLaws, spreads, type Settle, type Spread } from './spread.ts';
 export { flip, sweep } from './sweep.ts';

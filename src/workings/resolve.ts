@@ -44,6 +44,7 @@ export class Workings {
   #shifted = 0;
   #known: Known | undefined;
   readonly #lawSource: ReadonlyMap<string, number>;
+  readonly #lawHalf: ReadonlyMap<number, number>;
   /** Slope of closes(x) - x where each loop was last closed. */
   readonly #slopes = new Map<number, number>();
   /** For a quantity pinned since: what could be known without the pin. */
@@ -58,6 +59,7 @@ export class Workings {
     this.#acts = bound.acts;
     this.#inputSource = bound.inputSource;
     this.#lawSource = bound.lawSource;
+    this.#lawHalf = bound.lawHalf;
     const n = this.slots.length;
     this.#value = new Float64Array(n);
     this.#stamp = new Int32Array(n);
@@ -205,6 +207,9 @@ export class Workings {
 
   /** Source of spread of an input, or -1. */
   inputSource(i: number): number { return this.#inputSource[i] as number; }
+
+  /** Relative half-width of a source that is a law, as it was last read; undefined for others. */
+  lawHalf(source: number): number | undefined { return this.#lawHalf.get(source); }
 
   /** The way a quantity was got by, tried with one need at another value; nothing else moves. */
   tryWay(i: number, need: number, value: number): number {

@@ -47,6 +47,25 @@ export function spreads(workings: Workings, ids: readonly string[]): Map<string,
   return out;
 }
 
+/**
+ * How a quantity follows each law of the fluid, all places of the law moved together: its exponent d ln x/d ln law, or, where the quantity adds
+ * (a temperature, a number of either sign), its change dx/d ln law.
+ *
+ * @param workings  the graph at its nominal point
+ * @param id        the quantity
+ * @returns         by name of the law; laws that do not move it, or whose uncertainty is nothing, are left out
+ */
+export function followsLaws(workings: Workings, id: string): Map<string, number> {
+  const i = workings.index.get(id);
+  if (i === undefined || !workings.known(i) || (workings.slots[i] as Slot).isWord) return new Map();
+  const { at, by } = linearOf(workings).row(i);
+  return new Map(at.flatMap((source, k) => {
+    const half = workings.lawHalf(source);
+    const d = by[k] as number;
+    return half === undefined || half === 0 || d === 0 ? [] : [[workings.sources[source]?.key ?? '', d / Math.log(1 + half)] as const];
+  }));
+}
+
 function sharesOf(workings: Workings, at: readonly number[], by: readonly number[], square: number): Spread['shares'] {
   const all = at.flatMap((source, k) => {
     const { key = '', label = '' } = workings.sources[source] ?? {};

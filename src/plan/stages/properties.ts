@@ -19,7 +19,7 @@ const others = { gas: ['molarMass', 'gasConstant', 'isentropicExponent', 'speedO
 
 /** Every property at its state, with source, uncertainty and range, and whether it may be held constant. */
 export function properties(on: Ground): StageResult {
-  return { lines: [...stateLines(on), ...variation(on), ...effectOnTarget(on), ...phaseLines(on)], tables: [stateTable(on), ...otherTable(on), ...wallTable(on)] };
+  return { lines: [...stateLines(on), ...variation(on), ...exponents(on), ...effectOnTarget(on), ...phaseLines(on)], tables: [stateTable(on), ...otherTable(on), ...wallTable(on)] };
 }
 
 const heated = (on: Ground): boolean => on.word('energySolved') === 'yes';
@@ -53,6 +53,18 @@ function effectOnTarget(on: Ground): Line[] {
     return lines(parts.length > 0
       ? `Of the squared spread of the ${nameOf(on, quantity)} ${listed(parts.map((f) => `${percent(f.share)} comes from the ${nameOf(on, f.label)}`))} of the fluid.`
       : from.some((f) => f.kind === 'property') && `No property of the fluid adds 1 % or more to the squared spread of the ${nameOf(on, quantity)}: better property data would not help.`);
+  });
+}
+
+/** How each target follows the properties. */
+function exponents(on: Ground): Line[] {
+  return on.assembled.targets.flatMap(({ id, quantity, computed }) => {
+    const followed = laws.filter((p) => on.has(`${id}.per.${p.id}`) && Math.abs(on.number(`${id}.per.${p.id}`) ?? 0) >= 5e-4);
+    if (!computed || followed.length === 0) return [];
+    const kelvin = on.assembled.workings.slots[on.assembled.workings.index.get(quantity) ?? -1]?.node.about.unit === 'K';
+    return lines(kelvin
+      ? `One per cent more moves the ${nameOf(on, quantity)} by ${listed(followed.map((p) => `{${id}.per.${p.id}} for ${nameOf(on, p.id)}`))}, every state of the property moved together.`
+      : `The ${nameOf(on, quantity)} goes with ${listed(followed.map((p) => `${nameOf(on, p.id)} to the power {${id}.per.${p.id}}`))}, every state of the property moved together.`);
   });
 }
 
