@@ -10,17 +10,34 @@ const elsherbinySource = 'ElSherbiny, Raithby and Hollands, J. Heat Transfer 104
 const macgregor = 'MacGregor and Emery, J. Heat Transfer 91 (1969) 391';
 const square = [0.9, 1.1] as const;
 
+const cells = 'Korpela, Gozum and Baxi, Int. J. Heat Mass Transfer 16 (1973) 1683';
+const batchelor = 'Batchelor, Q. Appl. Math. 12 (1954) 209';
+/** Tall slots of a gas or a metal: the height alone says nothing, since the layers of the two walls meet. */
+const slotNeeds = ['grashof', 'prandtl', aspect] as const;
+const slot: Readonly<Record<string, readonly [number, number]>> = { [aspect]: [12, 1e3], prandtl: [0, 1] };
+/** Rayleigh number on the height from which layers stand on the walls, Ra_W = 500 H/W. */
+const layersFrom = (of: number): number => 500 * of ** 4;
+
 const regime: Definition[] = [
-  ways('regimeGroup', [way({ needs: ['rayleighHeight'], value: ({ rayleighHeight }) => rayleighHeight, formula: 'Ra on the height', source: definition })]),
-  ways('regimeLow', [way({ needs: [], scatter: 0.5, value: () => 1e8, formula: 'Ra_lo = 1e8', source: practice })]),
-  ways('regimeHigh', [way({ needs: [], scatter: 0.5, value: () => 1e10, formula: 'Ra_hi = 1e10', source: practice })]),
+  ways('regimeGroup', [
+    way({ needs: slotNeeds, range: slot, value: ({ grashof }) => grashof, formula: 'Gr on W, tall slot', source: definition }),
+    way({ needs: ['rayleighHeight'], value: ({ rayleighHeight }) => rayleighHeight, formula: 'Ra on the height', source: definition }),
+  ]),
+  ways('regimeLow', [
+    way({ needs: slotNeeds, range: slot, scatter: 0.2, value: () => 8000, formula: 'Gr_lo = 8000: cells one above another; below it the flow is parallel', source: cells }),
+    way({ needs: [aspect], scatter: 0.5, value: (of) => Math.max(1e8, layersFrom(of[aspect])), formula: 'Ra_lo = 1e8, not below 500 (H/W)^4, where conduction rules and no layer stands free', source: `${practice}; ${batchelor}` }),
+  ]),
+  ways('regimeHigh', [
+    way({ needs: slotNeeds, range: slot, scatter: 0.5, value: (of) => Math.max(8000, 1e10 / (of.prandtl * of[aspect] ** 3)), formula: 'Gr_hi = 1e10/(Pr (H/W)^3): after the cells the walls stand as upright plates, Ra 1e10 on the height', source: practice }),
+    way({ needs: [aspect], scatter: 0.5, value: (of) => Math.max(1e10, layersFrom(of[aspect])), formula: 'Ra_hi = 1e10, not below 500 (H/W)^4', source: `${practice}; ${batchelor}` }),
+  ]),
   ways('unsteadyGroup', [
     way({ needs: ['grashof', aspect], range: { [aspect]: [12, 1e3] }, value: ({ grashof }) => grashof, formula: 'Gr on W, tall slot', source: definition }),
     way({ needs: ['rayleighHeight', 'prandtl'], range: { prandtl: [1e-4, 0.1] }, value: ({ rayleighHeight, prandtl }) => rayleighHeight / prandtl, formula: 'Gr on the height, Pr below 0.1', source: definition }),
     way({ needs: ['rayleighHeight'], value: ({ rayleighHeight }) => rayleighHeight, formula: 'Ra on the height', source: definition }),
   ]),
   ways('unsteadyFrom', [
-    way({ needs: [aspect], range: { [aspect]: [12, 1e3] }, scatter: 0.2, value: () => 8000, formula: 'Gr_on = 8000: cells one above another', source: 'Korpela, Gozum and Baxi, Int. J. Heat Mass Transfer 16 (1973) 1683' }),
+    way({ needs: [aspect], range: { [aspect]: [12, 1e3] }, scatter: 0.2, value: () => 8000, formula: 'Gr_on = 8000: cells one above another', source: cells }),
     way({ needs: ['prandtl'], range: { prandtl: [1e-4, 0.1] }, scatter: 1, value: () => 3e6, formula: 'Gr_on = 3e6', source: 'Gelfgat, Bar-Yoseph and Yarin, J. Fluid Mech. 388 (1999) 315; from memory of this work' }),
     way({ needs: [], scatter: 0.2, value: () => 1.8e8, formula: 'Ra_on = 1.8e8', source: 'Le Quere and Behnia, J. Fluid Mech. 359 (1998) 81: square of air, plane; lower in three dimensions' }),
   ]),
@@ -78,7 +95,7 @@ const field: Definition[] = [
   ]),
   ways('wallShear', [way({ needs: ['wallShearPlain', 'viscosityFactorFriction'], value: ({ wallShearPlain, viscosityFactorFriction }) => wallShearPlain * viscosityFactorFriction, formula: 'tau_w = tau_0 F_visc, largest on hot and cold wall', source: 'factors of the effects that act' })]),
   ways('frictionReynolds', [way({ needs: ['frictionVelocityPlain', 'boundaryLayerThickness', 'kinematicViscosity'], value: (of) => (of.frictionVelocityPlain * of.boundaryLayerThickness) / of.kinematicViscosity, formula: 'delta+ = u_tau delta/nu', source: definition })]),
-  ways('laminarShare', [way({ needs: ['regimeGroup', 'regimeLow'], value: ({ regimeGroup, regimeLow }) => Math.min(1, (regimeLow / regimeGroup) ** (1 / 3)), formula: 's = (Ra_lo/Ra)^(1/3), at most 1', source: 'Ra grows with the cube of the height' })]),
+  ways('laminarShare', [way({ needs: ['rayleighHeight'], scatter: 0.15, value: ({ rayleighHeight }) => Math.min(1, (1e8 / rayleighHeight) ** (1 / 3)), formula: 's = (1e8/Ra_H)^(1/3), at most 1', source: 'Ra grows with the cube of the height; 1e8 common practice' })]),
 ];
 
 /** Heat transfer, wall layers and core of a box heated from the side. */

@@ -272,6 +272,18 @@ describe('box heated from the side', () => {
     near(elSherbiny({ rayleigh: 1e5, aspect: 40 }), 3.0024, 1e-4);
     expect(berkovskyPolevikov({ rayleigh: 1e3, prandtl: 0.71, aspect: 10 })).toBe(1);
   });
+  // Gap of 5 mm, 1 m high: Gr_W = 9.80665/300 * 10 * 0.005^3/1.568e-5^2 = 166 although Ra_H is 9.4e8; 40 mm by 0.8 m: Gr_W = 85094, layers turbulent from 1e10/(0.71 20^3).
+  it.each([
+    ['a thin slot of air conducts and is laminar', 1, 0.005, {}, 166.2, 8000, 14085 / 8],
+    ['a wide tall slot has cells, turbulent layers by the height', 0.8, 0.04, {}, 85094, 8000, 1.7606e6],
+    ['a tall slot of oil conducts below Ra_W = 500 H/W', 1, 0.01, { prandtl: 100 }, undefined, 500 * 100 ** 4, 500 * 100 ** 4],
+    ['a box of four gaps goes by the height alone', 0.4, 0.1, {}, undefined, 1e8, 1e10],
+  ] as const)('%s', (_, height, width, more, group, low, high) => {
+    const w = box({ 'sizes.height': height, 'sizes.width': width, ...more });
+    near(got(w, 'regimeGroup'), group ?? got(w, 'rayleighHeight'), 0.002);
+    near(got(w, 'regimeLow'), low, 1e-9);
+    near(got(w, 'regimeHigh'), Math.max(low, high), 0.005);
+  });
   it('is unsteady from 1.8e8 for air, far earlier for metals, and in cells for tall slots', () => {
     expect([got(box(), 'unsteadyFrom'), got(box({ prandtl: 0.02 }), 'unsteadyFrom'), got(box({ 'sizes.height': 20 * side }), 'unsteadyFrom')]).toEqual([1.8e8, 3e6, 8000]);
   });
