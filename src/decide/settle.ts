@@ -117,11 +117,8 @@ export function settle(workings: Workings, rules: CompiledRules, targets: readon
     places: session.places, rangeOf: options.rangeOf, spreadOf: options.spreadOf, lean: options.lean === true,
   };
   const { effects, passes } = settleEffects(point, session);
-  const choices = options.lean === true && options.verdictsOnly === true ? new Map<string, ChoiceState>() : settleChoices(point, session, rules, effects, new Map(Object.entries(options.chosen ?? {})));
-  pinWords(workings, [
-    ...session.effects.map(({ id, verdict }) => [verdict, (effects.get(id) as EffectState).verdict] as const),
-    ...[...choices].flatMap(([id, state]) => (state.rule !== undefined || state.given ? [[`choice.${id}`, state.chosen] as const] : [])),
-  ]);
+  const moved = pinWords(workings, session.effects.map(({ id, verdict }) => [verdict, (effects.get(id) as EffectState).verdict]));
+  const choices = options.lean === true && options.verdictsOnly === true ? new Map<string, ChoiceState>() : restingChoices(point, session, rules, effects, options, moved);
   return { effects, choices, passes, point };
 }
 
@@ -186,7 +183,19 @@ class ChoiceFacts implements FactSource {
   }
 }
 
-function settleChoices(point: Point, session: Session, rules: CompiledRules, effects: ReadonlyMap<string, EffectState>, stated: ReadonlyMap<string, string>): Map<string, ChoiceState> {
+/** The numbers of a choice may rest on verdicts and on other choices, and the graph holds those of the point it stood at before: it is pinned and read again until it rests. */
+function restingChoices(point: Point, session: Session, rules: CompiledRules, effects: ReadonlyMap<string, EffectState>, options: SettleOptions, moved: boolean): Map<string, ChoiceState> {
+  const { workings } = point;
+  const stated = new Map(Object.entries(options.chosen ?? {}));
+  for (let round = 0, stale = moved; ; round++) {
+    const facts = stale ? new Overlaid(new WorkingsFacts(workings, options.askable ?? anything), point.words) : point.plain;
+    const choices = settleChoices(point, facts, session, rules, effects, stated);
+    stale = pinWords(workings, [...choices].flatMap(([id, state]) => (state.rule !== undefined || state.given ? [[`choice.${id}`, state.chosen] as const] : [])));
+    if (!stale || round === mostPasses) return choices;
+  }
+}
+
+function settleChoices(point: Point, plain: FactSource, session: Session, rules: CompiledRules, effects: ReadonlyMap<string, EffectState>, stated: ReadonlyMap<string, string>): Map<string, ChoiceState> {
   const undecided = [...effects].flatMap(([id, e]) => (e.verdict === 'undecided' && e.judged ? [id] : []));
   const words = new Map(point.words);
   for (const listed of session.effects) {
@@ -195,7 +204,7 @@ function settleChoices(point: Point, session: Session, rules: CompiledRules, eff
     if (!e.judged) words.set(listed.verdict, 'leave-out'); // none of its numbers can be had
   }
   for (const [id, word] of stated) words.set(`choice.${id}`, word);
-  const facts = new ChoiceFacts(words, point.plain);
+  const facts = new ChoiceFacts(words, plain);
   const out = new Map<string, ChoiceState>();
   for (let round = 0, more = true; more && round < mostPasses; round++) {
     more = false;
@@ -217,10 +226,12 @@ const unread = (said: string | undefined): ChoiceState => ({ rule: undefined, ap
 /** Whether the model carries the effect in its first run. */
 const kept = (e: EffectState): boolean => e.verdict === 'include' || (e.verdict === 'undecided' && e.judged) || (e.verdict === 'borderline' && e.firstRun !== 'leave-out');
 
-/** Pins words in one go, since each change of the pins costs a look at all edges; what is not in the graph, or is pinned so already, is passed over. */
-function pinWords(workings: Workings, words: readonly (readonly [string, string])[]): void {
-  workings.setAll(words.filter(([id, word]) => {
+/** Pins words in one go, since each change of the pins costs a look at all edges; what is not in the graph, or is pinned so already, is passed over. Whether anything changed. */
+function pinWords(workings: Workings, words: readonly (readonly [string, string])[]): boolean {
+  const fresh = words.filter(([id, word]) => {
     const i = workings.index.get(id);
     return i !== undefined && !(workings.isPinned(i) && workings.wordAt(i) === word);
-  }));
+  });
+  if (fresh.length > 0) workings.setAll(fresh);
+  return fresh.length > 0;
 }

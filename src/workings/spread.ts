@@ -124,11 +124,11 @@ function jumpedWords(workings: Workings, linear: Linear, wanted: readonly number
   return out;
 }
 
-/** 2.5 and 97.5 % points over all sources at once: Halton points through the normal quantile, half-width = 1.96 sigma. */
+/** 2.5 and 97.5 % points over all sources at once, half-width = 1.96 sigma. A source moves in its own order whoever asks, so a number has one spread. */
 function sample(workings: Workings, slots: readonly number[], active: readonly number[]): Map<number, [number, number]> {
   const values = slots.map(() => [] as number[]);
-  for (let k = 1; k <= samples; k++) {
-    active.forEach((s, d) => workings.shift(s, normalQuantile(halton(k, prime(d))) / 1.959964));
+  for (let k = 0; k < samples; k++) {
+    for (const s of active) workings.shift(s, drawsOf(s)[k] as number);
     slots.forEach((i, j) => { if (workings.known(i)) values[j]?.push(workings.value(i)); });
   }
   for (const s of active) workings.shift(s, 0);
@@ -140,20 +140,21 @@ function sample(workings: Workings, slots: readonly number[], active: readonly n
   }));
 }
 
-const primes = [2];
-function prime(k: number): number {
-  for (let c = (primes.at(-1) as number) + 1; primes.length <= k; c++) if (primes.every((p) => c % p !== 0)) primes.push(c);
-  return primes[k] as number;
+const drawn: (readonly number[])[] = [];
+/** Shifts of one source in half-widths: the middles of equal shares of the normal distribution, in an order of the source's own (Latin hypercube, McKay, Beckman and Conover 1979). */
+function drawsOf(source: number): readonly number[] {
+  return (drawn[source] ??= shuffled(Array.from({ length: samples }, (_, k) => normalQuantile((k + 0.5) / samples) / 1.959964), source + 1));
 }
-/** Radical inverse of k in a base: the Halton sequence (Halton 1960), started past its first points for large bases. */
-function halton(k: number, base: number): number {
-  let f = 1;
-  let r = 0;
-  for (let i = k + 19; i > 0; i = Math.floor(i / base)) {
-    f /= base;
-    r += f * (i % base);
+
+/** An order that depends on the seed alone: Fisher and Yates with a linear congruence (Park and Miller 1988). */
+function shuffled(values: number[], seed: number): number[] {
+  let state = (seed * 7919) % 2147483647;
+  for (let k = values.length - 1; k > 0; k--) {
+    state = (state * 48271) % 2147483647;
+    const j = Math.floor((state / 2147483647) * (k + 1));
+    [values[k], values[j]] = [values[j] as number, values[k] as number];
   }
-  return r;
+  return values;
 }
 
 /**
