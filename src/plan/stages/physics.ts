@@ -1,3 +1,4 @@
+import { spreads } from '../../workings/index.ts';
 import { lines, type Ground, type StageResult } from '../ground.ts';
 import { called, capital, effectsOf, listed, nameOf, noticeable, plain, priceText } from '../say.ts';
 import type { Cell, Check, Line, PlanEffect, Table } from '../types.ts';
@@ -51,11 +52,24 @@ function keptLines(on: Ground, judged: readonly PlanEffect[]): Line[] {
   );
 }
 
-/** Two published laws for the same number, where they differ. */
+const twice = [
+  ['frictionDisagreement', 'frictionPlain', 'frictionSecond', 'friction'],
+  ['nusseltDisagreement', 'nusseltPlain', 'nusseltSecond', 'heat transfer'],
+  ['plateFrictionDisagreement', 'plateFrictionEnd', 'plateFrictionSecond', 'skin friction'],
+  ['dragDisagreement', 'dragCoefficientPlain', 'dragCoefficientSecond', 'drag'],
+] as const;
+
+/** Two published laws for the same number, where they differ: both with their sources, and whether the spread of the first holds the second. */
 function lawLines(on: Ground): Line[] {
-  const pairs = [['frictionDisagreement', 'frictionPlain', 'frictionSecond', 'friction'], ['nusseltDisagreement', 'nusseltPlain', 'nusseltSecond', 'heat transfer']] as const;
-  const sourceOf = (id: string): string => { const { workings } = on.assembled; return workings.used[workings.index.get(id) ?? -1]?.way.source ?? ''; };
-  return lines(...pairs.map(([ratio, first, second, what]) => on.has(ratio) && on.number(ratio) !== 1 && `Two laws of ${what} apply: {${first}} and {${second}} (${sourceOf(second)}), their ratio {${ratio}}; the scatter of neither is smaller than that gap.`));
+  const { workings } = on.assembled;
+  const sourceOf = (id: string): string => workings.used[workings.index.get(id) ?? -1]?.way.source ?? '';
+  return lines(...twice.map(([ratio, first, second, what]) => {
+    const [a, b] = [on.number(first), on.number(second)];
+    if (!on.has(ratio) || a === undefined || b === undefined || a === b) return false;
+    const spread = spreads(workings, [first]).get(first);
+    const held = spread !== undefined && b >= spread.low && b <= spread.high;
+    return `Two laws of ${what} apply: {${first}} (${sourceOf(first)}) and {${second}} (${sourceOf(second)}), their ratio {${ratio}}; the spread of the first ${held ? 'holds the second' : 'does not hold the second: read what follows from it with that gap'}.`;
+  }));
 }
 
 function effectTable(judged: readonly PlanEffect[]): Table {
