@@ -96,6 +96,8 @@ function spread(on: Case, node: TargetNode): Definition[] {
   return [
     one(`${at}.halfWidth`, 'w', `half-width of the hand estimate of the ${name}`, unit, [], { formula: 'root of the squared sum over inputs, properties and scatter of laws, 95 %', source: 'first derivatives over the half-widths; sampled where a word changes' }),
     one(`${at}.inputWidth`, 'w_in', `half-width that inputs and properties alone give the ${name}`, unit, [], { formula: 'the same over inputs and properties alone', source: 'first derivatives over the half-widths' }),
+    one(`${at}.ifLaminar`, 'x_lam', `${name} if the flow stays laminar throughout`, unit, [], { formula: 'the estimate by its laminar law', source: 'the verdict on turbulence is open: both branches' }),
+    one(`${at}.ifTurbulent`, 'x_turb', `${name} if the flow is turbulent throughout`, unit, [], { formula: 'the estimate by its turbulent law', source: 'the verdict on turbulence is open: both branches' }),
     one(`${at}.model`, 'w_mod', `half-width that the closure of a run leaves in the ${name}`, unit, closure(node)),
     one(`${at}.reach`, 'W_min', 'best that a run could reach', unit, [way([`${at}.inputWidth`, `${at}.model`, `${at}.mesh`, `${at}.iteration`, `${at}.domain`], (x) => Math.hypot(...x), 'sqrt(w_in^2 + w_mod^2 + w_mesh^2 + w_it^2 + w_dom^2)', 'parts are independent')]),
     one(`${at}.widthRatio`, 'w/W', 'spread of the hand estimate over the accuracy asked', '1', [way([`${at}.halfWidth`, `${at}.accuracy`], ([w, W]) => (w as number) / (W as number), 'w/W', 'definition')]),

@@ -1,3 +1,4 @@
 export { plan, settleCase, type PlanOptions, type Settled } from './plan.ts';
 export { compileFiles, shippedRules } from './rules.ts';
 export * from './types.ts';
+export { targetSpreads } from './target-spread.ts';

@@ -14,7 +14,8 @@ export interface TargetSpread {
 const kept = new WeakMap<Assembled, readonly TargetSpread[]>();
 
 /**
- * Spreads of the targets, and what the graph needs of them: `targets.0.halfWidth` and `targets.0.inputWidth` are set in it.
+ * Spreads of the targets, and what the graph needs of them: `targets.0.halfWidth` and `targets.0.inputWidth` are set in it; where the verdict on turbulence is open and
+ * the two branches lie outside the spread, `targets.0.ifLaminar` and `targets.0.ifTurbulent` as well.
  *
  * @param assembled  the settled case
  * @returns          spreads of the targets that have an estimate; found once for a case
@@ -34,8 +35,22 @@ export function targetSpreads(assembled: Assembled): readonly TargetSpread[] {
   const followed = targets.filter((t) => t.computed).map((t) => ({ ...t, by: follows(workings, t.quantity) }));
   for (const one of out) setWidths(workings, one);
   for (const { id, quantity, by } of followed) for (const [property, n] of by) workings.set(`${id}.per.${property}`, inKelvin(workings, quantity) ? 0.01 * n : n);
+  setEnds(workings, targets.filter((t) => t.computed));
   kept.set(assembled, out);
   return out;
+}
+
+/** Both branches of the regime, where it is open: the scatter of one law does not hold the other. */
+function setEnds(workings: Workings, targets: readonly { readonly id: string; readonly quantity: string }[]): void {
+  if (!['borderline', 'undecided'].includes(workings.word('verdict.turbulence') ?? '')) return;
+  const at = (regime: string): readonly (number | undefined)[] => workings.aside([['regime', regime]], () => targets.map((t) => workings.get(t.quantity)));
+  const [laminar, turbulent] = [at('laminar'), at('turbulent')];
+  targets.forEach(({ id }, k) => {
+    const [low, high] = [laminar[k], turbulent[k]];
+    if (low === undefined || high === undefined || Math.abs(high - low) <= (workings.get(`${id}.halfWidth`) ?? 0)) return;
+    workings.set(`${id}.ifLaminar`, low);
+    workings.set(`${id}.ifTurbulent`, high);
+  });
 }
 
 /** The half-width, and the part of it that inputs and properties have: shares are of the square. */

@@ -105,7 +105,7 @@ function factors(): Definition[] {
       ...(section === round ? {} : { note: 'table of a round tube on D_h' }),
     }));
   const churchillSum = (flow: string, axis: string | readonly string[], exponent: number): ReturnType<typeof way> =>
-    way({ needs: ['naturalOverForced', 'buoyancySense'], when: { ...body, flow, axis }, scatter: 0.1, range: { naturalOverForced: [0, 3] }, value: ({ naturalOverForced, buoyancySense }) => mixedSum({ ratio: naturalOverForced, exponent, sense: buoyancySense }), formula: `F = |1 +- (Nu_N/Nu_F)^${exponent}|^(1/${exponent})`, source: churchill });
+    way({ needs: ['naturalOverForced', 'buoyancySense'], when: { ...body, flow, axis }, scatter: ({ naturalOverForced, buoyancySense }) => Math.min(0.1, Math.abs(mixedSum({ ratio: naturalOverForced, exponent, sense: buoyancySense }) - 1)), range: { naturalOverForced: [0, 3] }, value: ({ naturalOverForced, buoyancySense }) => mixedSum({ ratio: naturalOverForced, exponent, sense: buoyancySense }), formula: `F = |1 +- (Nu_N/Nu_F)^${exponent}|^(1/${exponent})`, source: churchill });
   const any = ['upright', 'inclined', 'level'];
   return [
     ...factor('buoyancyFactorNusselt', { symbol: 'F_b,Nu', name: 'Nusselt number with buoyancy over that without' }, [

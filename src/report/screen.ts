@@ -33,7 +33,7 @@ export function screen(plan: Plan, writing: Writing, options: ScreenOptions): st
   const parts: Part[] = [
     { label: 'At odds', items: plan.contradictions.map((c) => wrap(`${oneLine(c.says)}: ${oneLine(c.effect)}. Cure: ${oneLine(c.cure)}`, 3)), least: 2, apart: true, warns: true },
     { label: 'Mind first', items: [...cautionLines(plan, writing).map((text) => wrap(text, 2)), ...strained(plan)], least: 3, apart: true, warns: true },
-    { label: 'Target', items: plan.targets.map((t) => targetText(t, plan, writing)), least: 2, apart: true },
+    { label: 'Target', items: plan.targets.flatMap((t) => [targetText(t, plan, writing), ...branches(t, plan, writing)]), least: 2, apart: true },
     ...effectParts(plan, writing),
     { label: 'Choices', ...choiceItems(plan), least: 2 },
     ...setUpParts(plan, writing, room),
@@ -58,6 +58,12 @@ function targetText(t: PlanTarget, plan: Plan, writing: Writing): string {
     t.within === undefined ? '' : `asked within ${oneLine(t.within)}`,
     range === undefined ? '' : `${writing.like(t.quantity, range.from)} to ${writing.like(t.quantity, range.to)} over the range`,
   ], room, '; ');
+}
+
+/** Both ends of a target where laminar or turbulent is open. */
+function branches(t: PlanTarget, plan: Plan, writing: Writing): string[] {
+  const [laminar, turbulent] = [`${t.id}.ifLaminar`, `${t.id}.ifTurbulent`];
+  return plan.quantities[turbulent] === undefined ? [] : [cut(`open: ${writing.number(laminar)} if laminar, ${writing.number(turbulent)} if turbulent`, room)];
 }
 
 function effectParts(plan: Plan, writing: Writing): Part[] {

@@ -45,6 +45,12 @@ describe('runbrief trace', () => {
     expect(stderr).not.toContain('\u001b');
   });
 
+  it('follows what belongs to a target: the spread of its estimate', async () => {
+    const { code, stdout } = await runbrief(['trace', example, 'targets.0.halfWidth']);
+    expect(code).toBe(0);
+    expect(stdout).toMatch(/targets\.0\.halfWidth.* = 1\.\d+ K/);
+  });
+
   it('says which input is missing', async () => {
     const file = join(mkdtempSync(join(tmpdir(), 'runbrief-trace-')), 'a.case.yaml');
     writeFileSync(file, 'format: 1\nflow: pipe\nsizes: { diameter: 25 mm }\nfluid: { material: water, temperature: 20 degC }\ninlet: { speed: 1 m/s }\ntargets: [{ quantity: wallShear }]\n');

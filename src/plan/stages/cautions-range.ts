@@ -1,4 +1,4 @@
-import { flagsIn } from '../../workings/index.ts';
+import { flagsIn, spreads } from '../../workings/index.ts';
 import type { Ground } from '../ground.ts';
 import { authors, capital, inWords, listed, nameOf } from '../say.ts';
 
@@ -7,6 +7,18 @@ export interface Stretched {
   readonly id: string;
   readonly name: string;
   readonly text: string;
+}
+
+/** Share of the accuracy asked below which a number does not carry a target: that of the rule on prices. */
+const little = 0.2;
+
+/** Whether a stretched number carries another: moved by its own spread, it moves that one by more than the least that counts. */
+function moves(on: Ground, from: string, to: string, least: number): boolean {
+  const { workings } = on.assembled;
+  const [here, value] = [workings.get(to), workings.get(from)];
+  if (here === undefined || value === undefined || from === to) return true;
+  const spread = spreads(workings, [from]).get(from);
+  return [spread?.low ?? value / 1.3, spread?.high ?? value * 1.3].some((moved) => Math.abs((workings.aside([[from, moved]], () => workings.get(to)) ?? Number.POSITIVE_INFINITY) - here) > least);
 }
 
 const kept = new WeakMap<Ground, readonly Stretched[]>();
@@ -23,9 +35,9 @@ export function outsideOf(on: Ground): readonly Stretched[] {
   const { workings, targets } = on.assembled;
   const flags = flagsIn(workings);
   const users = new Map<string, string[]>();
-  const use = (id: string, who: string): void => { for (const f of flags(id)) users.set(f, [...(users.get(f) ?? []), who]); };
-  for (const t of targets) if (t.computed) use(t.quantity, `the target ${nameOf(on, t.quantity)}`);
-  for (const e of on.decisions.effects) if (e.deciding !== undefined && e.applies !== false) use(e.deciding.quantity, `the decision on ${e.id}`);
+  const use = (id: string, who: string, least: number): void => { for (const f of flags(id)) if (moves(on, f, id, least)) users.set(f, [...(users.get(f) ?? []), who]); };
+  for (const t of targets) if (t.computed) use(t.quantity, `the target ${nameOf(on, t.quantity)}`, little * (on.number(`${t.id}.accuracy`) ?? 0));
+  for (const e of on.decisions.effects) if (e.deciding !== undefined && e.applies !== false) use(e.deciding.quantity, `the decision on ${e.id}`, 0.01 * Math.abs(e.deciding.value));
   const out = [...users].flatMap(([id, who]): Stretched[] => {
     const i = workings.index.get(id) ?? -1;
     const way = workings.used[i]?.way;

@@ -12,7 +12,8 @@ export function cautions(on: Ground): StageResult {
   const traps = trapsOf(on);
   const outside = outsideOf(on);
   const unjudged = on.decisions.effects.filter((e) => !e.judged && e.applies !== false).map((e) => e.id);
-  const first = [...hazards.map((h) => h.title), ...outside.map((o) => `stretched law for the ${o.name}`), ...traps.map((t) => t.title)].slice(0, 3);
+  const open = ends(on);
+  const first = [...hazards.map((h) => h.title), ...(open.length === 0 ? [] : ['Laminar or turbulent is open']), ...outside.map((o) => `stretched law for the ${o.name}`), ...traps.map((t) => t.title)].slice(0, 3);
   return {
     lines: [
       opening(on),
@@ -21,6 +22,7 @@ export function cautions(on: Ground): StageResult {
         unjudged.length > 0 && `Not in these numbers: ${listed(unjudged)}. The case names what they depend on, and no rule judges them yet: the spreads do not hold their effect.`,
         hazards.length > 0 && 'What follows on dangers supports and never replaces qualified judgement, tests and the codes of the place; relief, structure and safety of life are decided by licensed practitioners.',
         ...hazards.map((h) => h.text),
+        ...open,
         ...outside.map((o) => o.text),
         ...traps.map((t) => `${t.title}: ${t.text} Unmasked by: ${t.test}.`),
       ),
@@ -40,6 +42,11 @@ function opening(on: Ground): Line {
   const rungs = on.ladder.length;
   const known = rungs === 0 ? 'no known answer lies on the way to it' : rungs === 1 ? `the known answer ${on.ladder[0]?.id} is met` : `the ${rungs} known answers of its ladder are met, from ${on.ladder[0]?.id} on`;
   return lines(`This is an estimate made before a run: ${estimate}. ${rungs === 0 ? `A simulation of it is no evidence by itself: ${known}.` : `A simulation is no evidence until ${known}.`}`)[0] as Line;
+}
+
+/** Laminar or turbulent is open, and a target differs by more than its spread: both ends, loudly. */
+function ends(on: Ground): string[] {
+  return on.assembled.targets.filter((t) => on.has(`${t.id}.ifTurbulent`)).map((t) => `Laminar or turbulent is open: the ${nameOf(on, t.quantity)} is {${t.id}.ifLaminar} if laminar, {${t.id}.ifTurbulent} if turbulent at once, as behind a trip or a blunt edge; the spread of the estimate does not hold that. The group is {regimeGroup} between {regimeLow} and {regimeHigh}.`);
 }
 
 function trapTable(on: Ground): Table[] {
