@@ -33,7 +33,17 @@ function cold(on: HazardView): string | undefined {
 function structure(on: HazardView): string | undefined {
   const flow = on.word('flow');
   if (flow === 'building' || flow === 'bluff-body' || flow === 'column-collapse') return `loads on a ${flow} in a stream of {speed}`;
-  return flow === 'sloshing-tank' && on.word('has.motion') === 'yes' ? 'a tank that is shaken' : undefined;
+  if (flow === 'sloshing-tank' && on.word('has.motion') === 'yes') return 'a tank that is shaken';
+  return wind(on);
+}
+
+/** Air that streams past something built, where a load or the beat of a wake is asked for; the words alone mean a draught or a tunnel too. */
+function wind(on: HazardView): string | undefined {
+  if (!gas(on) || on.word('flowClass') !== 'body' || on.word('imposedFlow') !== 'yes') return undefined;
+  const load = on.word('targetMomentum') === 'yes' || on.assembled.targets.some((t) => /^(?:sheddingFrequency|strouhal)/.test(t.quantity));
+  const built = on.mark('built', 'text');
+  if (!load || (built === undefined && (on.mark('wind', 'text') === undefined || on.mark('windTunnel', 'text') !== undefined))) return undefined;
+  return `wind at {speed} on ${built === undefined ? 'a body' : `a ${built}`}${on.has('sheddingFrequency') ? '; its wake beats at {sheddingFrequency}, which may meet a natural frequency of the structure' : ''}`;
 }
 
 function turning(on: HazardView): string | undefined {

@@ -16,7 +16,10 @@ const marks = {
   nuclear: ['reactor core', 'nuclear', 'fuel rod', 'radioactive', 'spent fuel'],
   hygiene: ['food', 'milk', 'drink', 'beverage', 'pasteurise', 'pasteurize', 'sterilise', 'sterilize', 'legionella', 'drinking water'],
   vehicle: ['car', 'truck', 'aircraft', 'ship', 'hull', 'drone'],
-  release: ['chimney', 'flue gas', 'effluent', 'emission', 'exhaust plume'],
+  release: ['flue gas', 'stack gas', 'effluent', 'emission', 'emissions', 'exhaust plume'],
+  built: ['building', 'chimney', 'mast', 'tower', 'bridge', 'facade', 'cladding', 'roof', 'awning', 'billboard', 'road sign', 'antenna', 'scaffold', 'solar panel', 'pylon', 'power line', 'stay cable', 'crane', 'fence', 'hoarding', 'wind turbine'],
+  windTunnel: ['wind tunnel', 'wind-tunnel'],
+  wind: ['wind', 'gust', 'gale', 'storm'],
   fire: ['fire', 'smoke', 'flame'],
   closedValve: ['closed valve', 'blocked in', 'shut in'],
 } as const satisfies Readonly<Record<string, readonly string[]>>;

@@ -16,6 +16,16 @@ ${more.wall === undefined ? '' : `wall: ${more.wall}`}
 `;
 const hazardsOf = async (text: string): Promise<string[]> => (await planOf(text)).checklist.filter((c) => c.id.startsWith('hazard-')).map((c) => c.id.slice(7));
 
+const body = (title: string, target = 'dragForce', more = 'inlet: { speed: 25 m/s, temperature: 10 degC }'): string => `
+format: 1
+title: ${title}
+targets: [{ quantity: ${target} }]
+flow: cylinder
+sizes: { diameter: 1.2 m, span: 20 m }
+fluid: { material: air, pressure: 1 atm }
+${more}
+`;
+
 /** Triggers from both sides; limits of the hazard classes, common practice. */
 const rows: readonly { what: string; text: string; hazards: readonly string[] }[] = [
   { what: 'cold water at low pressure', text: line(), hazards: [] },
@@ -36,6 +46,13 @@ const rows: readonly { what: string; text: string; hazards: readonly string[] }[
   { what: 'engine oil that is only warm', text: line({ fluid: '{ material: engine oil, pressure: 1.2 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 80 degC }' }), hazards: ['hot'] },
   { what: 'a word that only looks like one of the list', text: line({ title: 'Cooling of the drug-free co-current lining of a cartridge' }), hazards: ['medical'] },
   { what: 'a fire named where no heat is set free', text: line({ title: 'Feed line of a fire hydrant' }), hazards: [] },
+  { what: 'wind on a chimney, by its drag', text: body('Wind load on a chimney'), hazards: ['structure'] },
+  { what: 'wind on a mast, by its wake', text: body('A mast in a gale', 'sheddingFrequency'), hazards: ['structure'] },
+  { what: 'wind on a body without a name', text: body('Drag of a round body in wind'), hazards: ['structure'] },
+  { what: 'a cylinder in a wind tunnel', text: body('A cylinder in the wind tunnel'), hazards: [] },
+  { what: 'wind that cools, without a load', text: body('Wind cools a chimney', 'heatRate', 'inlet: { speed: 25 m/s, temperature: 10 degC }\nwall: { temperature: 30 degC }'), hazards: [] },
+  { what: 'a chimney effect is no release', text: line({ title: 'Chimney effect in a tube', fluid: '{ material: air, pressure: 1 atm }', inlet: '{ speed: 1 m/s, temperature: 20 degC }' }), hazards: [] },
+  { what: 'effluent', text: line({ title: 'Effluent line' }), hazards: ['release'] },
   { what: 'blood in the title', text: line({ title: 'Test loop with a fluid like blood' }), hazards: ['medical'] },
 ];
 
