@@ -1,3 +1,4 @@
+import { isTemperature } from '../quantities/index.ts';
 import { printNumber } from '../units/index.ts';
 import type { Workings } from '../workings/index.ts';
 import { placedId } from './facts.ts';
@@ -9,6 +10,7 @@ export function fillIn(text: string, workings: Workings, place: string | undefin
     if (i === undefined || !workings.known(i)) return 'not known';
     const slot = workings.slots[i];
     if (slot === undefined || slot.isWord) return workings.wordAt(i) ?? 'not known';
-    return printNumber({ value: workings.value(i), unit: slot.node.about.unit });
+    const { unit } = slot.node.about;
+    return printNumber({ value: workings.value(i), unit, ...(unit !== 'K' ? {} : isTemperature(named) ? { toUnit: 'degC' } : { difference: true }) });
   });
 }

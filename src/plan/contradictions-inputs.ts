@@ -41,12 +41,12 @@ function* drives(on: Ground): Generator<Contradiction> {
 
 function* pressures(on: Ground): Generator<Contradiction> {
   const [inlet, outlet] = [on.assembled.case.number('fluid.pressure'), on.assembled.case.number('outlet.pressure')];
-  if (inlet !== undefined && outlet !== undefined && outlet > inlet && on.word('imposedFlow') === 'yes' && ['internal', 'continuum'].includes(on.word('flowClass') ?? '')) {
+  if (inlet !== undefined && outlet !== undefined && outlet > inlet + Math.max(0, -(on.number('columnWeight') ?? 0)) && on.word('imposedFlow') === 'yes' && ['internal', 'continuum'].includes(on.word('flowClass') ?? '')) {
     yield contradiction(on, 'outlet-above-inlet', 'outlet.pressure', { says: `the outlet stands at ${inWords(on, 'outlet.pressure')}, above the inlet at ${inWords(on, 'fluid.pressure')}`, effect: 'the flow would run backwards, or the density of a gas would belong to the wrong end', cure: 'swap the two, or say gauge where gauge is meant' });
   }
   const lowest = on.number('lowestPressure');
   if (lowest !== undefined && lowest <= 0) {
-    yield contradiction(on, 'pressure-used-up', 'fluid.pressure', { says: `from ${inWords(on, 'pressure')} at the inlet the friction takes ${inWords(on, 'pressureDropPlain')}, which leaves ${inWords(on, 'lowestPressure')} absolute`, effect: 'no fluid can be at or below zero pressure: this flow cannot be driven through', cure: 'raise the pressure, lower the flow, or widen the passage' });
+    yield contradiction(on, 'pressure-used-up', 'fluid.pressure', { says: `from ${inWords(on, 'pressure')} at the inlet the friction takes ${inWords(on, 'pressureDropPlain')}${(on.number('columnWeight') ?? 0) > 0 ? ` and the weight of the column ${inWords(on, 'columnWeight')}` : ''}, which leaves ${inWords(on, 'lowestPressure')} absolute`, effect: 'no fluid can be at or below zero pressure: this flow cannot be driven through', cure: 'raise the pressure, lower the flow, or widen the passage' });
   }
 }
 

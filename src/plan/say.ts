@@ -1,3 +1,4 @@
+import { isTemperature } from '../quantities/index.ts';
 import { fromSI, printNumber } from '../units/index.ts';
 import type { Ground } from './ground.ts';
 import type { PlanEffect, Price } from './types.ts';
@@ -14,7 +15,7 @@ export function inWords(on: Ground, id: string, value: number | undefined = on.n
   const { workings, case: given } = on.assembled;
   const about = workings.slots[workings.index.get(id) ?? -1]?.node.about;
   const unit = about?.unit ?? '1';
-  const temperature = unit === 'K' && /(?:emperature|aturation|touchLimit|coldLimit)(?:@|$)/.test(id);
+  const temperature = unit === 'K' && isTemperature(id);
   const written = given.get(id)?.writtenUnit;
   if (temperature && written === undefined) return `${Number(fromSI(value, 'degC').toFixed(1)) + 0} degC`;
   return printNumber({ value, unit, digits: 4, ...(written === undefined ? {} : { toUnit: written }) });

@@ -4,6 +4,7 @@ export { layersBelow, layersToCover, layersToMatch, stackHeight } from './layer-
 export { facingWalls } from './radiation.ts';
 export { layerDefinitions, type Layer } from './layers.ts';
 export { termIds } from './terms.ts';
+export { isTemperature } from './temperature-ids.ts';
 export { features } from './words.ts';
 export { givenPropertyWays, isProperty, lawProperties, materialWays, propertyStates, singleProperties, type PropertyAbout } from './property-states.ts';
 export { mostQuantities, piGroups, type Dimensioned, type PiGroup, type PiGroups } from './pi-groups.ts';

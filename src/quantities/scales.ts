@@ -45,9 +45,13 @@ export const scales: Definition[] = [
   ]),
   quantity('pressure', { symbol: 'p', name: 'absolute pressure at the state of the plain numbers', unit: 'Pa' }),
   quantity('outletPressure', { symbol: 'p_out', name: 'absolute pressure at the outlet', unit: 'Pa' }, [
+    way({ needs: ['pressure', 'pressureDropPlain', 'columnWeight'], value: ({ pressure, pressureDropPlain, columnWeight }) => pressure - pressureDropPlain - columnWeight, formula: 'p_out = p - dp - rho g dz', source: 'definition' }),
     way({ needs: ['pressure', 'pressureDropPlain'], value: ({ pressure, pressureDropPlain }) => pressure - pressureDropPlain, formula: 'p_out = p - dp', source: 'definition' }),
   ]),
+  quantity('columnWeight', { symbol: 'rho g dz', name: 'pressure that the weight of the fluid takes from inlet to outlet', unit: 'Pa', signed: true }, ['densityBulk', 'density'].map((rho) =>
+    way({ needs: [rho, 'gravity', 'flowLength', 'inclination'], when: { flowClass: ['internal', 'continuum'] }, value: (of) => (of[rho] as number) * (of['gravity'] as number) * (of['flowLength'] as number) * Math.sin(of['inclination'] as number), formula: 'rho g L_x sin(theta)', source: 'hydrostatics; below zero where it runs down' }))),
   quantity('lowestPressure', { symbol: 'p_min', name: 'lowest static pressure of the case', unit: 'Pa' }, [
+    way({ needs: ['pressure', 'pressureDropPlain', 'columnWeight'], value: ({ pressure, pressureDropPlain, columnWeight }) => pressure - Math.max(0, pressureDropPlain + columnWeight), formula: 'p_min = p - max(0, dp + rho g dz): at the inlet or at the outlet', source: 'definition' }),
     way({ needs: ['pressure', 'pressureDropPlain'], value: ({ pressure, pressureDropPlain }) => pressure - Math.max(0, pressureDropPlain), formula: 'p_min = p - dp', source: 'definition' }),
     way({ needs: ['pressure'], value: ({ pressure }) => pressure, formula: 'p_min = p', source: 'no pressure drop known' }),
   ]),

@@ -1,5 +1,6 @@
 import type { Case } from '../case/index.ts';
 import { harmless } from '../problems/index.ts';
+import { isTemperature } from '../quantities/index.ts';
 import { numberParts, printNumber, type NumberParts, type Printing } from '../units/index.ts';
 
 /** How the numbers of one plan are written: given ones in the user's unit, others in SI with prefixes, temperatures in the scale of the case. */
@@ -91,9 +92,4 @@ function writtenAt(quantities: Writables, on: Case | undefined, id: string): str
 function unitOfPath(on: Case | undefined, path: string, unit: string | undefined, scale: string | undefined): Partial<Printing> {
   const toUnit = on?.get(path)?.writtenUnit ?? (unit === 'K' && isTemperature(path) ? scale : undefined);
   return toUnit === undefined || toUnit === '' ? {} : { toUnit };
-}
-
-/** Temperatures have a zero of their scale, differences of temperature have none; both are measured in K. */
-function isTemperature(id: string): boolean {
-  return /(?:temperature(?:Peak|Mean|Max|Min)?|limit)$/i.test(id.split('@')[0] as string);
 }
