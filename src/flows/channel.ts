@@ -1,7 +1,8 @@
 import { deanChannelFriction, ductEntryLoss, facingWalls, laminarEntranceLength, laminarNusselt } from '../quantities/index.ts';
-import { quantity, way, ways, wordWay, type Definition } from '../workings/index.ts';
+import { quantity, way, ways, type Definition } from '../workings/index.ts';
 import { inlet, outlet, wall } from './boundaries.ts';
 import type { Flow } from './define.ts';
+import { channelHeatingDefinitions } from './channel-one-sided.ts';
 import { channelLadder } from './channel-ladder.ts';
 import { passageDefinitions, turbulentLength } from './passage.ts';
 import { straightDefinitions } from './straight.ts';
@@ -43,12 +44,6 @@ const regime: Definition[] = [
   ways('unsteadyFrom', [way({ needs: [], value: () => 5772.22, formula: 'Re_c = 5772.22', source: 'Orszag, J. Fluid Mech. 50 (1971) 689' })]),
 ];
 
-/** One wall heated and the other adiabatic, or both at work. */
-const heating = quantity('channelHeating', { symbol: '', name: 'walls that exchange heat', unit: 'word', words: ['both', 'one'] }, [
-  ...['bottom', 'top'].map((wall) => wordWay({ needs: [], when: { [`wallKind@walls.${wall}`]: 'adiabatic' }, word: () => 'one', formula: `the ${wall} wall is adiabatic`, source: 'definition' })),
-  wordWay({ needs: [], word: () => 'both', formula: 'no wall is adiabatic', source: 'definition' }),
-]);
-
 const laminarSource = 'Shah and London, Laminar Flow Forced Convection in Ducts (1978), chapter VI';
 /** Mean over developed Nusselt number of the one wall that is heated: the thin layer that forms on it, met with the developed value. */
 function oneSidedEntrance(wallKind: string[], thin: number, developed: number, printed: string): ReturnType<typeof way> {
@@ -61,7 +56,7 @@ function oneSidedEntrance(wallKind: string[], thin: number, developed: number, p
 }
 
 const laws: Definition[] = [
-  heating,
+  ...channelHeatingDefinitions,
   ...passageDefinitions({
     needs: [],
     frictionReynolds: { value: () => 96, formula: 'f = 96/Re on 2 H', source: 'momentum balance between parallel plates' },
