@@ -24,14 +24,14 @@ export const channelHeatingDefinitions: Definition[] = [
     wordWay({ needs: [], word: () => 'both', formula: 'no wall is adiabatic', source: 'definition' }),
   ]),
   ways('viscosityFactorFrictionLaw', [
-    way({ needs: [viscosity], when: { ...material, medium: 'liquid', regime: 'laminar' }, range: { [viscosity]: [1 / 3, 2] }, scatter: 0.03, value: (of) => laminarLiquid(of[viscosity] as number), formula: 'F = (mu_w/mu_b)^(0.173 + 0.05 ln(mu_w/mu_b)), one wall heated', source: solved }),
+    way({ needs: [viscosity], when: { ...material, medium: 'liquid', regime: 'laminar' }, range: { [viscosity]: [1 / 3, 2] }, scatter: 0.03, value: (of) => laminarLiquid(of[viscosity]), formula: 'F = (mu_w/mu_b)^(0.173 + 0.05 ln(mu_w/mu_b)), one wall heated', source: solved }),
     half('liquid', 'turbulent', [0.5, 2.86], '(7 - mu_b/mu_w)/6 heated, (mu_w/mu_b)^0.24 cooled', 0.05),
     half('gas', 'laminar', [0.33, 2], 'T_w/T_b heated, (T_w/T_b)^0.81 cooled', 0.1),
     half('gas', 'turbulent', [0.33, 2], '(T_w/T_b)^-0.1', 0.1),
   ]),
   quantity('channelShearShare', { symbol: 'tau_w/tau_m', name: 'shear of a wall over the mean of both', unit: '1', per: ['wall'], plain: 'target' }, [
-    way({ needs: [viscosity, 'viscosityFactorFriction'], when: { ...material, medium: 'liquid', regime: 'laminar', wallKind: ['temperature', 'flux', 'coefficient'] }, range: { [viscosity]: [1 / 3, 2] }, value: (of) => (of[viscosity] as number) ** -0.397 / of.viscosityFactorFriction, formula: '(mu_w/mu_b)^0.397/F at the heated wall', source: solved }),
-    way({ needs: [viscosity, 'viscosityFactorFriction'], when: { ...material, medium: 'liquid', regime: 'laminar', wallKind: 'adiabatic' }, range: { [viscosity]: [1 / 3, 2] }, value: (of) => 2 - (of[viscosity] as number) ** -0.397 / of.viscosityFactorFriction, formula: '2 - (mu_w/mu_b)^0.397/F at the adiabatic wall', source: solved }),
+    way({ needs: [viscosity, 'viscosityFactorFriction'], when: { ...material, medium: 'liquid', regime: 'laminar', wallKind: ['temperature', 'flux', 'coefficient'] }, range: { [viscosity]: [1 / 3, 2] }, value: (of) => of[viscosity] ** -0.397 / of.viscosityFactorFriction, formula: '(mu_w/mu_b)^0.397/F at the heated wall', source: solved }),
+    way({ needs: [viscosity, 'viscosityFactorFriction'], when: { ...material, medium: 'liquid', regime: 'laminar', wallKind: 'adiabatic' }, range: { [viscosity]: [1 / 3, 2] }, value: (of) => 2 - of[viscosity] ** -0.397 / of.viscosityFactorFriction, formula: '2 - (mu_w/mu_b)^0.397/F at the adiabatic wall', source: solved }),
     way({ needs: ['viscosityFactorFriction'], when: { ...material, wallKind: ['temperature', 'flux', 'coefficient'] }, value: ({ viscosityFactorFriction }) => 2 - 1 / viscosityFactorFriction, formula: '2 - 1/F at the heated wall', source: balance }),
     way({ needs: ['viscosityFactorFriction'], when: { ...material, wallKind: 'adiabatic' }, value: ({ viscosityFactorFriction }) => 1 / viscosityFactorFriction, formula: '1/F at the adiabatic wall', source: balance }),
     way({ needs: [], value: () => 1, formula: '1', source: 'both walls alike' }),
