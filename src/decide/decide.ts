@@ -131,7 +131,7 @@ function reasonOf(e: EffectState, state: State, fill: (text: string) => string):
   const without = branch?.band !== undefined && e.facts !== undefined && e.verdict !== 'undecided' && bandNumbers(branch.band, e.facts) === undefined && e.bounded === undefined ? branch.band.without?.because : undefined;
   if (e.verdict === 'undecided' && e.judged) {
     const names = lackingOf(e, state.point).map((id) => state.point.workings.slots[state.point.workings.index.get(placedId(state.point.workings, id, e.place)) ?? -1]?.node.about.name ?? id);
-    return `not known: ${[...new Set(names)].join(', ')}`;
+    return `not known: ${[...new Set(names)].join(', ')}${missingPaths(e, state)[0] === 'flow' ? '; no input of this flow gives it, a flow named more closely would' : ''}`;
   }
   const parts = [e.bounded !== undefined ? '' : (without ?? fill((branch ?? e.reading?.fixed)?.because ?? ''))];
   if (e.bounded !== undefined) parts.push(`the same at both ends of ${e.bounded.join('; ')}`);
@@ -148,5 +148,6 @@ function allPrices(e: EffectState, state: State): Weighed[] {
 }
 
 function missingPaths(e: EffectState, state: State): string[] {
-  return [...new Set(lackingOf(e, state.point).flatMap((id) => state.point.facts.at(e.place).missing(id) ?? []))];
+  const paths = [...new Set(lackingOf(e, state.point).flatMap((id) => state.point.facts.at(e.place).missing(id) ?? []))];
+  return paths.length > 0 || !e.judged ? paths : ['flow']; // no input of this flow leads there: one named more closely has the law
 }
