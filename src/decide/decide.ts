@@ -9,7 +9,7 @@ import { flips, type FlipAt, type FlipInput } from './flips.ts';
 import type { CompiledRules, Verdict } from './form.ts';
 import { choiceIds, effectIds, inOrder, titleOf } from './ids.ts';
 import { bandNumbers } from './judge.ts';
-import type { Price, Target, Weighed } from './price.ts';
+import { notPriced, type Price, type Target, type Weighed } from './price.ts';
 import { settle, type SettleOptions, type State } from './settle.ts';
 
 /** One effect as the plan states it; absent keys are left out. */
@@ -135,8 +135,18 @@ function reasonOf(e: EffectState, state: State, fill: (text: string) => string):
   }
   const parts = [e.bounded !== undefined ? '' : (without ?? fill((branch ?? e.reading?.fixed)?.because ?? ''))];
   if (e.bounded !== undefined) parts.push(`the same at both ends of ${e.bounded.join('; ')}`);
+  parts.push(...unpriced(e, state));
   if (e.movedBy !== undefined) parts.push(`${moves[e.movedBy]}${e.between === undefined ? '' : ` between ${e.between.join(' and ')}`}`);
   return parts.filter((p) => p !== '').join('; ');
+}
+
+/** Lines of the rule that would price the effect, had their law a value here. */
+function unpriced(e: EffectState, state: State): string[] {
+  const { facts, reading } = e;
+  if (facts === undefined || reading === undefined || e.verdict === 'undecided') return [];
+  const why = reading.prices.flatMap((line) => (line.factor === undefined || testOf(line.when)(facts, true) !== 1 ? [] : [notPriced(state.point.workings, line.factor, e.place)]));
+  const said = [...new Set(why.filter((w): w is string => w !== undefined))];
+  return said.length === 0 ? [] : [`not priced: ${said.join('; ')}`];
 }
 
 /** All prices, those that act first, the largest share of a tolerance first. */

@@ -79,7 +79,7 @@ export function pricesOf(workings: Workings, line: PriceLine, place: string | un
 function factorPrices(workings: Workings, named: string, of: string, place: string | undefined, targets: readonly Read[], acts: boolean): Weighed[] {
   const factors = copiesOf(workings, placedId(workings, named, place));
   const f = workings.get(factors[0] as string);
-  if (f === undefined || (f === 1 && fromNothing(workings, factors[0] as string))) return [];
+  if (f === undefined || (f === 1 && fromNothing(workings, factors[0] as string)) || notPriced(workings, named, place) !== undefined) return [];
   const formula = f > 0 ? `1/F - 1, F = ${named} = ${short(f)}` : `F = ${named} = ${short(f)} is not positive`;
   const out: Weighed[] = [];
   let rest = targets;
@@ -100,6 +100,24 @@ function factorPrices(workings: Workings, named: string, of: string, place: stri
   }
   if (out.length > 0) return out;
   return [{ price: { of, acts: false, formula, ...(f > 0 ? { relative: 1 / f - 1 } : { signChange: true as const }) }, share: 0 }];
+}
+
+/**
+ * Why a factor has no price: the law behind it does not reach this point, and what it gives there may even change its sign.
+ *
+ * @param workings  the graph
+ * @param named     factor
+ * @param place     where the rule was read
+ * @returns         the range that was left, in words; undefined where the law holds
+ */
+export function notPriced(workings: Workings, named: string, place: string | undefined): string | undefined {
+  const factor = copiesOf(workings, placedId(workings, named, place))[0] as string;
+  for (const id of [factor, ...[workings.index.get(`${named}Law`)].flatMap((i) => (i === undefined ? [] : [`${named}Law`]))]) {
+    const i = workings.index.get(id);
+    const left = i === undefined || !workings.known(i) || workings.isPinned(i) ? undefined : workings.outside(i)[0];
+    if (left !== undefined) return `${left.need} is ${short(left.value)} where the law of ${named} holds from ${short(left.range[0])} to ${short(left.range[1])}`;
+  }
+  return undefined;
 }
 
 /** Whether a factor is 1 for want of a law here: then there is no price, which is not a price of nothing. */
