@@ -31,5 +31,6 @@ export const programme: Definition[] = [
   part('runsAll', 'P', 'cost of the programme over one run on the medium mesh', [way({ needs: parts, value: (of) => parts.reduce((sum, id) => sum + of[id], 0), formula: 'P = P_h + P_t + P_d + P_m + P_i + P_r', source: 'definition' })]),
   part('coreHoursAll', 't_all', 'core hours of the programme', [way({ needs: ['coreHours', 'runsAll'], value: ({ coreHours, runsAll }) => coreHours * runsAll, formula: 't_all = t_c P', source: 'definition' })]),
   part('coreHoursFine', 't_1', 'core hours of the fine mesh', [way({ needs: ['coreHours', 'runsFine'], value: ({ coreHours, runsFine }) => coreHours * runsFine, formula: 't_1 = t_c c_1', source: 'definition' })]),
+  quantity('wallTimeFine', { symbol: 't_w,1', name: 'time until the fine mesh is done', unit: 's' }, [way({ needs: ['wallTime', 'runsFine'], value: ({ wallTime, runsFine }) => wallTime * runsFine, formula: 't_w,1 = t_w c_1', source: 'definition' })]),
   quantity('memoryFine', { symbol: 'M_1', name: 'memory of the fine mesh', unit: 'B' }, [way({ needs: ['cellCountFine', 'memoryPerCell'], value: (of) => of.cellCountFine * of.memoryPerCell, formula: 'M_1 = N_1 m_c', source: 'definition' })]),
 ];

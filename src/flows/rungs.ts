@@ -72,7 +72,7 @@ export function rungDefinitions(flow: Flow): Definition[] {
       ...when,
       dimensional: 'a reference may hold constants with units',
     };
-    const allowed: Way = { needs, value: (of) => Math.max(rung.limit, tolerated(ref, typeof scatter === 'function' ? scatter(of) : scatter)), ...about(ref, rung.limit), ...when, as: 'decided', dimensional: 'a reference may hold constants with units' };
+    const allowed: Way = { needs: typeof scatter === 'function' ? needs : [], value: (of) => Math.max(rung.limit, tolerated(ref, typeof scatter === 'function' ? scatter(of) : scatter)), ...about(ref, rung.limit), ...when, as: 'decided', dimensional: 'a reference may hold constants with units' };
     return [
       quantity(id, { symbol: answer.id, name: `${answer.name} of the rung`, unit: answer.unit, signed: answer.unit === 'K' }, [number]),
       distanceDefinition(distance, ref, from, fixed),

@@ -77,7 +77,7 @@ function detail({ workings }: Assembled, { id, quantity, tolerance, distance, ru
   const { from, fixed } = rungInputs(rung);
   const filled = Object.fromEntries(from.flatMap(([need, one]) => { const v = workings.get(one); return v === undefined ? [] : [[need, v]]; }));
   return {
-    rung: { id, changes: rung.changes, quantity, ...(value === undefined ? {} : { value }), ...(spread === undefined ? {} : { low: spread.low, high: spread.high }), limit: { quantity, ...bounds(rung.reference, value, allowed), unit }, ifMissed: rung.ifMissed },
+    rung: { id, changes: rung.changes, quantity, ...(value === undefined ? {} : { value }), ...(spread === undefined ? {} : { low: spread.low, high: spread.high }), limit: value === undefined ? { quantity: tolerance, atMost: allowed, unit: '1' } : { quantity, ...bounds(rung.reference, value, allowed), unit }, ifMissed: rung.ifMissed },
     reference,
     compares: rung.compares,
     tolerance,

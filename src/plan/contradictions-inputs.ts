@@ -1,3 +1,4 @@
+import { overBudget } from './budget.ts';
 import { contradiction, without } from './contradiction.ts';
 import type { Ground } from './ground.ts';
 import { inWords, nameOf, percent } from './say.ts';
@@ -8,6 +9,7 @@ const near = 0.01;
 /** Drives, temperatures, pressures, walls and targets of the case against each other. */
 export function* inputContradictions(on: Ground): Generator<Contradiction> {
   yield* drives(on);
+  yield* budget(on);
   yield* pressures(on);
   yield* walls(on);
   yield* temperatures(on);
@@ -36,6 +38,18 @@ function* drives(on: Ground): Generator<Contradiction> {
   const own = on.number('pressureDrop');
   if (drop !== undefined && own !== undefined && first[0].startsWith('inlet.') && Math.abs(own / drop - 1) > 0.5 && without(on, 'drive.pressureDrop', 'pressureDrop') === own) {
     yield contradiction(on, 'flow-and-pressure-drop', 'drive.pressureDrop', { says: `a pressure drop of ${inWords(on, 'drive.pressureDrop')} is given beside ${first[0]}, which makes ${inWords(on, 'pressureDrop')}`, effect: 'a run cannot hold both: flow or pressure drop will be another than stated', cure: 'give one and let the other follow, or add what resists besides this passage' });
+  }
+}
+
+/** A deadline or a memory that not even the run on the medium mesh keeps to. */
+function* budget(on: Ground): Generator<Contradiction> {
+  for (const { path, estimate } of overBudget(on.assembled.workings, 'medium')) {
+    const time = path === 'computing.deadline';
+    yield contradiction(on, 'over-budget', path, {
+      says: `one run on the medium mesh ${time ? 'is done in' : 'takes'} ${inWords(on, estimate)} by the estimate${time ? `, ${inWords(on, 'coreHours')} core hours` : ''}, and the case gives ${inWords(on, path)}`,
+      effect: time ? 'no run of the plan ends in time, and no mesh study with it' : 'the run does not fit into the machine',
+      cure: `a cheaper treatment, a smaller region or ${time ? 'more cores' : 'more memory'}; 20 steps of a pilot run tell the cost within 20 %`,
+    });
   }
 }
 

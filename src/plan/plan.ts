@@ -7,6 +7,7 @@ import { decide, definitionsOfVerdicts, settle, type CompiledRules, type DecideO
 import { ladderOf } from '../ladder/index.ts';
 import type { Collection } from '../properties/index.ts';
 import { flagsIn, spreads, type Settle, type Spread, type Workings } from '../workings/index.ts';
+import { overBudget } from './budget.ts';
 import { contradictionsOf } from './contradictions.ts';
 import { idsIn, type Ground, type StageResult } from './ground.ts';
 import { closure, planQuantity, rangesOf } from './numbers.ts';
@@ -63,7 +64,13 @@ export function settleCase(on: Case, options: Omit<PlanOptions, 'version' | 'fli
     spreadOf: (id) => spread.get(id),
     rangeOf: (id) => { const r = range.get(id); return r === undefined ? undefined : { low: r.from, high: r.to }; },
   };
-  return { assembled, rules, targets, decideOptions, state: settle(workings, rules, targets, decideOptions), settle: again };
+  let state = settle(workings, rules, targets, decideOptions);
+  if (overBudget(workings, 'medium').length > 0) {
+    // Once: what follows from a cheaper choice is not asked again.
+    workings.set('budget', 'over');
+    state = settle(workings, rules, targets, decideOptions);
+  }
+  return { assembled, rules, targets, decideOptions, state, settle: again };
 }
 
 /**
@@ -158,7 +165,7 @@ function namedIds(built: Readonly<Record<SectionName, StageResult>>, decisions: 
     for (const p of e.prices ?? []) ids.add(p.of);
   }
   for (const t of assembled.targets) ids.add(t.quantity);
-  for (const r of ladder) ids.add(r.quantity);
+  for (const r of ladder) { ids.add(r.quantity); ids.add(r.limit.quantity); }
   for (const id of reliedOn) ids.add(id);
   return ids;
 }

@@ -2,7 +2,7 @@ import type { Plan, PlanChoice, PlanEffect, PlanTarget } from '../plan/index.ts'
 import { broken } from './columns.ts';
 import { cut, fitted, fitting, gutter, joined, noPaint, type Paint, type Part } from './fit.ts';
 import { setUpParts } from './screen-set-up.ts';
-import { cautionLines, decidingText, factorText, priceText, titled } from './words.ts';
+import { cautionLines, decidingText, factorText, percent, priceText, titled } from './words.ts';
 import { oneLine, type Writing } from './writing.ts';
 
 /** Columns and lines that a screen has at least. */
@@ -138,7 +138,7 @@ function rungText(r: Plan['ladder'][number], writing: Writing): string {
   const bound = (value: number): string => writing.like(r.quantity, value, r.limit.unit);
   const limit = atLeast !== undefined && atMost !== undefined ? `, passes ${bound(atLeast)} .. ${bound(atMost)}` : atMost !== undefined ? `, passes up to ${bound(atMost)}` : atLeast !== undefined ? `, passes from ${bound(atLeast)}` : '';
   const name = r.id.padEnd(25);
-  return `${name} ${joined([r.value === undefined ? 'no number for these inputs' : `${writing.number(r.quantity)}${limit}`, r.value === undefined ? '' : writing.symbol(r.quantity), oneLine(r.changes)], room - name.length - 1, '; ')}`;
+  return `${name} ${joined([r.value === undefined ? `no number for these inputs${atMost === undefined ? '' : `, passes within ${percent(atMost).slice(1)}`}` : `${writing.number(r.quantity)}${limit}`, r.value === undefined ? '' : writing.symbol(r.quantity), oneLine(r.changes)], room - name.length - 1, '; ')}`;
 }
 
 /** Numbers that a formula gave outside its range. */

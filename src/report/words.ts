@@ -45,7 +45,7 @@ export function priceText(p: Price): string {
 }
 
 /** A share as `+12 %`, `-0.3 %`, `below 0.01 %`. */
-function percent(share: number): string {
+export function percent(share: number): string {
   if (Math.abs(share) < 1e-4) return 'below 0.01 %';
   return `${share > 0 ? '+' : ''}${Number((100 * share).toPrecision(2))} %`;
 }

@@ -8,7 +8,9 @@ export const word = (id: string, words: readonly string[]): Definition => quanti
 /** A graph with the words of the decisions. */
 export function graph(definitions: readonly Definition[], given: Readonly<Record<string, number | string | Given>>, rules?: CompiledRules, places?: Places): Workings {
   const inputs = Object.fromEntries(Object.entries(given).map(([id, v]) => [id, typeof v === 'object' ? v : { value: v }]));
-  return new Workings(joinDefinitions([...definitions, ...definitionsOfVerdicts(rules)], places), inputs);
+  const own = definitionsOfVerdicts(rules);
+  const known = new Set(own.map((d) => d.id));
+  return new Workings(joinDefinitions([...definitions.filter((d) => !known.has(d.id)), ...own], places), inputs);
 }
 
 /** A rule pack from objects, without asking for examples: each gets those that its form demands. */

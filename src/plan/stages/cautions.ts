@@ -1,4 +1,5 @@
 import { lines, type Ground, type StageResult } from '../ground.ts';
+import { overBudget } from '../budget.ts';
 import { hazardsOf } from '../hazards.ts';
 import { listed, nameOf } from '../say.ts';
 import { outsideOf } from './cautions-range.ts';
@@ -23,6 +24,7 @@ export function cautions(on: Ground): StageResult {
         hazards.length > 0 && 'What follows on dangers supports and never replaces qualified judgement, tests and the codes of the place; relief, structure and safety of life are decided by licensed practitioners.',
         ...hazards.map((h) => h.text),
         ...open,
+        ...fineOver(on),
         ...outside.map((o) => o.text),
         ...traps.map((t) => `${t.title}: ${t.text} Unmasked by: ${t.test}.`),
       ),
@@ -47,6 +49,13 @@ function opening(on: Ground): Line {
 /** Laminar or turbulent is open, and a target differs by more than its spread: both ends, loudly. */
 function ends(on: Ground): string[] {
   return on.assembled.targets.filter((t) => on.has(`${t.id}.ifTurbulent`)).map((t) => `Laminar or turbulent is open: the ${nameOf(on, t.quantity)} is {${t.id}.ifLaminar} if laminar, {${t.id}.ifTurbulent} if turbulent at once, as behind a trip or a blunt edge; the spread of the estimate does not hold that. The group is {regimeGroup} between {regimeLow} and {regimeHigh}.`);
+}
+
+/** The run fits the budget and the fine mesh of its study does not. */
+function fineOver(on: Ground): string[] {
+  const { workings } = on.assembled;
+  const medium = overBudget(workings, 'medium').map((one) => one.path);
+  return overBudget(workings, 'fine').filter((one) => !medium.includes(one.path)).map(({ path, estimate }) => `Over the budget: the fine mesh alone ${path === 'computing.deadline' ? 'is done in' : 'takes'} {${estimate}} where {${path}} is given; without it the band of the mesh study is three times as wide.`);
 }
 
 function trapTable(on: Ground): Table[] {

@@ -25,7 +25,7 @@ const calibrated = (on: Ground): boolean => on.assembled.case.has('computing.cel
 
 function runLines(on: Ground): Line[] {
   return lines(
-    `One run on the medium mesh takes {coreHours} core hours and {memory} of memory, done in {wallTime} (cores: {cores}); the fine mesh {coreHoursFine} core hours and {memoryFine}.`,
+    `One run on the medium mesh takes {coreHours} core hours and {memory} of memory, done in {wallTime} (cores: {cores}); the fine mesh {coreHoursFine} core hours and {memoryFine}, done in {wallTimeFine}.`,
     calibrated(on) ? 'The rate {cellUpdateRate} is that of your machine.' : 'The rate {cellUpdateRate} is an order of magnitude: run 20 steps on two meshes, then give computing.cellUpdateRate, and every estimate follows.',
   );
 }
