@@ -29,8 +29,6 @@ export interface EffectDecision {
   readonly check?: string;
   readonly firstRun?: 'keep' | 'leave-out';
   readonly then?: readonly string[];
-  /** States beside the verdict. */
-  readonly attributes?: readonly string[];
   readonly missing?: readonly string[];
   readonly sources?: readonly string[];
 }
@@ -92,14 +90,14 @@ function effectOutput(id: string, e: EffectState, state: State, flipsAt: readonl
     ...(reading.judged ? { base: e.base } : {}),
     ...(e.movedBy === undefined ? {} : { movedBy: e.movedBy }),
     ...decidingOutput(e, state),
-    because: reasonOf(e, state, fill),
+    // What the rule states beside a verdict that is carried belongs to its reason.
+    because: [reasonOf(e, state, fill), ...(carried ? hold(rule.attributes) : [])].join('; '),
     ...(flipsAt === undefined || flipsAt.length === 0 ? {} : { flipsAt }),
     ...(prices.length === 0 ? {} : { price: (prices[0] as Weighed).price, prices: prices.map((p) => p.price) }),
     ...(check === undefined || e.verdict === 'include' || e.verdict === 'leave-out' ? {} : { check }),
     ...(e.verdict === 'borderline' ? { firstRun: e.firstRun ?? 'keep' } : {}),
     // oxlint-disable-next-line unicorn/no-thenable -- the key of rule files and plans; it holds words
     ...(carried && rule.then.length > 0 ? { then: hold(rule.then) } : {}),
-    ...(carried && rule.attributes.length > 0 ? { attributes: hold(rule.attributes) } : {}),
     ...(e.verdict === 'undecided' ? { missing: missingPaths(e, state) } : {}),
     ...(said?.source === undefined ? {} : { sources: [said.source] }),
   };

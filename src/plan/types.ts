@@ -68,8 +68,6 @@ export interface PlanEffect {
   readonly check?: string;
   readonly firstRun?: 'keep' | 'leave-out';
   readonly then?: readonly string[];
-  /** What the rule states beside the verdict. */
-  readonly attributes?: readonly string[];
   readonly missing?: readonly string[];
   readonly sources?: readonly string[];
 }

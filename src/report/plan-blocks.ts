@@ -108,7 +108,6 @@ function effectNotes(e: PlanEffect, writing: Writing): string[] {
     ...(e.check === undefined ? [] : [`Check: ${writing.fill(e.check)}.`]),
     ...(e.firstRun === undefined ? [] : [e.firstRun === 'keep' ? 'The first run keeps it.' : 'The first run leaves it out.']),
     ...((e.then ?? []).length === 0 ? [] : [`The model then needs: ${(e.then ?? []).map((t) => writing.fill(t)).join('; ')}.`]),
-    ...(e.attributes ?? []).map((a) => writing.fill(a)),
     ...((e.missing ?? []).length === 0 ? [] : [`Settled by giving ${(e.missing ?? []).map((m) => oneLine(m).replaceAll('|', ' or ')).join(', ')}.`]),
     ...((e.sources ?? []).length === 0 ? [] : [`Source: ${(e.sources ?? []).map(oneLine).join('; ')}.`]),
   ];
