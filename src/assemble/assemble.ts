@@ -5,9 +5,10 @@ import { meshDefinitions } from '../mesh/index.ts';
 import { numericsDefinitions } from '../numerics/index.ts';
 import { Problem } from '../problems/index.ts';
 import { propertyAt, type Collection, type Material } from '../properties/index.ts';
-import { generalDefinitions, givenPropertyWays, isProperty, materialWays } from '../quantities/index.ts';
+import { carriedDefinitions, commonDefinitions, givenPropertyWays, isProperty, massAnalogy, materialWays } from '../quantities/index.ts';
 import { timeDefinitions } from '../time/index.ts';
 import { joinDefinitions, ways, Workings, type Definition, type Given } from '../workings/index.ts';
+import { carries, reactionDefinitions, targetSpecies } from './carried.ts';
 import { factsOf } from './facts.ts';
 import { fluidOf } from './fluid.ts';
 import { givenOf, type Range } from './given.ts';
@@ -54,10 +55,13 @@ export interface Assembled {
 
 /** Everything that is defined whatever the case, and what each flow adds: for the build of rules and for tests. */
 export function allDefinitions(): Definition[] {
-  return [...general(), ...Object.values(flows).flatMap((f) => f.definitions)];
+  return [...general(true), ...Object.values(flows).flatMap((f) => ownOf(f, true))];
 }
 
-const general = (): Definition[] => [...generalDefinitions, ...meshDefinitions, ...timeDefinitions, ...numericsDefinitions, ...costDefinitions];
+const general = (carried: boolean): Definition[] => [...commonDefinitions, ...(carried ? carriedDefinitions : []), ...meshDefinitions, ...timeDefinitions, ...numericsDefinitions, ...costDefinitions];
+
+/** What a flow brings; for a species its laws of heat serve by analogy. */
+const ownOf = (flow: Flow, carried: boolean): Definition[] => [...flow.definitions, ...(carried ? [...massAnalogy(flow.definitions), ...(flow.carried ?? [])] : [])];
 
 /**
  * Joins a case with its flow, fluid, walls and all definitions into one graph.
@@ -70,7 +74,8 @@ const general = (): Definition[] => [...generalDefinitions, ...meshDefinitions, 
 export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
   const flow = flowOf(on);
   const walls = wallEntries(on, flow.walls, vocabulary);
-  const base: Definition[] = [...general(), ...(options.words ?? []), ...flow.definitions, ...rungDefinitions(flow)];
+  const carried = carries(on);
+  const base: Definition[] = [...general(carried), ...(options.words ?? []), ...ownOf(flow, carried), ...rungDefinitions(flow)];
   const units = new Map(base.flatMap((d) => ('more' in d ? [] : [[d.id, d.unit] as const])));
   const exists = (id: string): boolean => units.has(id);
   const fluid = fluidOf(on, options.materials);
@@ -86,6 +91,7 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
     ...leafDefinitions([...leaves, ...ownLeaves], exists),
     ways('inletTemperature', ['inlet.temperature', 'fluid.temperature', 'inlet.totalTemperature', 'initial.temperature'].map((path) => ({ needs: [path], value: (of: Readonly<Record<string, number>>) => of[path] as number, formula: `T_in as given: ${path}`, source: 'the case' }))),
     ...wall.definitions,
+    ...(carried ? reactionDefinitions(on) : []),
     ...(fluid.laws === undefined ? [] : materialWays(fluid.laws.about)),
     ...targetDefinitions(on, estimated(on, base, flow.walls)),
     ...validationDefinitions(estimated(on, base, flow.walls)),
@@ -93,8 +99,8 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
     ...[...on.entries.keys()].flatMap((path) => (path.startsWith('fluid.') && isProperty(path.slice(6)) ? givenPropertyWays(path.slice(6), path) : [])),
   ];
   const places = {
-    of: { wall: wallPlaces(flow.walls), station: flow.stations, region: flow.regions, inlet: on.list('inlets').map((n) => `inlets.${n}`), species: on.list('species').map((n) => `species.${n}`), particle: on.list('particles').map((n) => `particles.${n}`) },
-    target: { wall: targetWall(on, flow, walls), station: 'target' },
+    of: { wall: wallPlaces(flow.walls), station: flow.stations, region: flow.regions, inlet: on.list('inlets').map((n) => `inlets.${n}`), species: on.list('species').map((n) => `species.${n}`), reaction: on.list('reactions').map((n) => `reactions.${n}`), particle: on.list('particles').map((n) => `particles.${n}`) },
+    target: { wall: targetWall(on, flow, walls), station: 'target', ...targetSpecies(on) },
   };
   const nodes = joinDefinitions(definitions, places, fixedWords(facts.words, flow));
   const words = Object.fromEntries(Object.entries(facts.words).map(([id, value]) => [id, { value, kind: facts.assumed.some((a) => a.id === id) ? ('assumed' as const) : ('given' as const) }]));

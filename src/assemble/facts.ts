@@ -1,6 +1,7 @@
 import type { Case, wallEntries } from '../case/index.ts';
 import type { Flow } from '../flows/index.ts';
 import { features } from '../quantities/index.ts';
+import { asksForSpecies, carriedWords, hasLightGas, reacts } from './carried.ts';
 import { wallPlaces } from './leaves.ts';
 import { outerFace } from './wall-definitions.ts';
 
@@ -33,6 +34,12 @@ const featureKeys: Readonly<Record<(typeof features)[number], (on: Case, walls: 
   gravity: (c) => c.has('gravity'),
   sources: (c) => c.has('sources') || c.has('drive.heatRelease'),
   wallMotion: (_, w) => any(w, 'speed') || any(w, 'rotation'),
+  speciesWall: (c) => c.list('species').some((name) => c.has(`species.${name}.wall`)) || reacts(c, 'wall') || reacts(c, 'catalyst'),
+  fluidReaction: (c) => reacts(c, 'fluid'),
+  surfaceReaction: (c) => reacts(c, 'wall') || reacts(c, 'catalyst'),
+  catalystReaction: (c) => reacts(c, 'catalyst'),
+  filmReaction: (c) => reacts(c, 'interface'),
+  reactionHeat: (c) => c.list('reactions').some((name) => c.has(`reactions.${name}.enthalpy`)),
   partHeated: (_, w) => { const heated = [...w.values()].filter((keys) => heating.some((key) => keys.has(key))).length; return heated > 0 && heated < w.size; },
 };
 
@@ -51,7 +58,7 @@ const any = (walls: WallKeys, key: string): boolean => [...walls.values()].some(
  * @param medium  state of matter of the fluid where it is known
  * @returns      words by id; the flow's own words win
  */
-export function factsOf(on: Case, flow: Flow, walls: WallKeys, target: { readonly heat: boolean; readonly momentum: boolean; readonly peak: boolean; readonly mean: boolean }, medium: 'gas' | 'liquid' | 'solid' | undefined): Facts {
+export function factsOf(on: Case, flow: Flow, walls: WallKeys, target: { readonly heat: boolean; readonly thermal: boolean; readonly momentum: boolean; readonly peak: boolean; readonly mean: boolean }, medium: 'gas' | 'liquid' | 'solid' | undefined): Facts {
   const assumed: { id: string; says: string }[] = [];
   const yes = (b: boolean): string => (b ? 'yes' : 'no');
   const words: Record<string, string> = {};
@@ -63,9 +70,12 @@ export function factsOf(on: Case, flow: Flow, walls: WallKeys, target: { readonl
   words['imposedFlow'] = yes(['inlet.speed', 'inlet.volumeFlow', 'inlet.massFlow', 'inlet.totalPressure', 'inlets', 'drive', 'motion'].some((k) => on.has(k)) || words['has.wallMotion'] === 'yes');
   words['targetHeat'] = yes(target.heat);
   words['targetMomentum'] = yes(target.momentum);
+  words['targetSpecies'] = yes(asksForSpecies(on));
+  words['lightGas'] = yes(hasLightGas(on));
+  Object.assign(words, carriedWords(on, medium, take));
   words['targetPeak'] = yes(target.peak);
   words['targetMean'] = yes(target.mean);
-  words['energySolved'] = yes(target.heat || heated(on));
+  words['energySolved'] = yes(target.thermal || heated(on));
   words['character'] = on.word('time.character') ?? 'unknown';
   words['fluidGiven'] = on.has('fluid.material') ? 'material' : 'constants';
   if (medium !== undefined) {

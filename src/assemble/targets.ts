@@ -1,4 +1,5 @@
 import type { Case, Target, Tolerance } from '../case/index.ts';
+import { speciesNamed } from './carried.ts';
 import { nearestName } from '../problems/index.ts';
 import type { Definition, Workings } from '../workings/index.ts';
 import type { TargetNode } from './target-definitions.ts';
@@ -20,17 +21,21 @@ export interface BoundTarget {
 
 /** What kind of answer the targets ask for. */
 export interface TargetKinds {
+  /** Heat or mass transfer. */
   readonly heat: boolean;
+  readonly thermal: boolean;
   readonly momentum: boolean;
   readonly peak: boolean;
   readonly mean: boolean;
 }
 
 const heatUnits = ['K', 'W', 'W/m^2', 'W/(m^2 K)', 'm^2 K/W'];
-const heatWords = /temperature|heat|nusselt|sherwood|concentration|evaporat|condens|melt|mass transfer/i;
+const heatWords = /temperature|heat|nusselt|evaporat|condens|melt/i;
+const massUnits = ['kg/(m^2 s)'];
+const massWords = /sherwood|concentration|mass ?transfer|conversion|massFraction/i;
 const momentumUnits = ['Pa', 'N', 'N m', 'Pa/m'];
 const momentumWords = /pressure|drag|lift|force|torque|shear|friction|skin|loss/i;
-const overWalls = ['pressureDrop', 'heatRate', 'outletTemperature', 'frictionFactorDarcy', 'nusselt', 'heatTransferCoefficient', 'massFlow', 'volumeFlow'];
+const overWalls = ['pressureDrop', 'heatRate', 'outletTemperature', 'outletMassFraction', 'massTransferRate', 'frictionFactorDarcy', 'nusselt', 'heatTransferCoefficient', 'massFlow', 'volumeFlow'];
 
 /**
  * What the targets ask for, before there is a graph.
@@ -41,7 +46,8 @@ const overWalls = ['pressureDrop', 'heatRate', 'outletTemperature', 'frictionFac
 export function kindsOf(on: Case, unit: (id: string) => string | undefined): TargetKinds {
   const is = (units: readonly string[], wording: RegExp): boolean => on.targets.some((t) => { const u = unit(t.quantity); return (u !== undefined && units.includes(u)) || wording.test(t.quantity); });
   return {
-    heat: is(heatUnits, heatWords),
+    heat: is(heatUnits, heatWords) || is(massUnits, massWords),
+    thermal: is(heatUnits, heatWords),
     momentum: is(momentumUnits, momentumWords),
     // The peak of a temperature is a hot spot; other peaks, and all rms, are peaks in time.
     peak: on.targets.some((t) => t.mean === 'rms' || (t.mean === 'peak' && !/temperature/i.test(t.quantity)) || /spectrum|fluctuation|swing|rms/i.test(t.quantity)),
@@ -53,7 +59,7 @@ export function kindsOf(on: Case, unit: (id: string) => string | undefined): Tar
 export function bindTargets(on: Case, workings: Workings, walls: readonly string[]): BoundTarget[] {
   const ids = [...workings.index.keys()].filter((id) => !/[.@]/.test(id));
   return on.targets.map((t) => {
-    const id = triesOf(t, walls).find((one) => workings.has(one));
+    const id = triesOf(on, t, walls).find((one) => workings.has(one));
     return {
       id: t.path,
       quantity: id ?? t.quantity,
@@ -67,9 +73,10 @@ export function bindTargets(on: Case, workings: Workings, walls: readonly string
 }
 
 /** Ids a target may stand for, the most particular first. */
-function triesOf(t: Target, walls: readonly string[]): string[] {
+function triesOf(on: Case, t: Target, walls: readonly string[]): string[] {
+  const species = speciesNamed(on, [t]);
   const wall = walls.find((w) => t.place !== undefined && t.place.toLowerCase().split(/[\s,]+/).includes(w));
-  return [...(t.mean === 'peak' ? [`${t.quantity}Peak`] : []), ...(wall === undefined ? [] : [`${t.quantity}@walls.${wall}`]), t.quantity];
+  return [...(t.mean === 'peak' ? [`${t.quantity}Peak`] : []), ...(wall === undefined ? [] : [`${t.quantity}@walls.${wall}`]), ...(species === undefined ? [] : [`${t.quantity}@species.${species}`]), t.quantity];
 }
 
 /**
@@ -82,10 +89,10 @@ function triesOf(t: Target, walls: readonly string[]): string[] {
 export function estimated(on: Case, definitions: readonly Definition[], walls: readonly string[]): TargetNode[] {
   const known = new Map(definitions.flatMap((d) => ('more' in d ? [] : [[d.id, d] as const])));
   return on.targets.flatMap((target) => {
-    for (const id of triesOf(target, walls)) {
+    for (const id of triesOf(on, target, walls)) {
       const [plain, place] = id.split('@') as [string, string?];
       const about = known.get(plain);
-      if (about === undefined || about.unit === 'word' || (place !== undefined && (about.per ?? []).join() !== 'wall')) continue;
+      if (about === undefined || about.unit === 'word' || (place !== undefined && (about.per ?? []).join() !== (place.startsWith('species.') ? 'species' : 'wall'))) continue;
       return [{ target, id, unit: about.unit, name: about.name }];
     }
     return [];

@@ -5,19 +5,19 @@ const axes = { length: 'along the flow', width: 'across, level', height: 'across
 export const species = list('substances carried by the fluid', '[{ name: salt, diffusivity: 1.5e-9 m^2/s, inlet: 1 % mass }]', {
   name: text('name of the substance', 'salt'),
   diffusivity: quantity('diffusivity in the fluid', 'm^2/s', '1.5e-9 m^2/s', { name: 'diffusivity', above: 0, gives: ['diffusivity@'] }),
-  inlet: share('share at the inlet', '1 % mass'),
-  wall: share('share at the wall', '2 % mass'),
-  molarMass: quantity('molar mass', 'kg/mol', '58.4 g/mol', { name: 'molar mass', above: 0 }),
-  densityChange: quantity('relative change of density per unit of concentration', '1', '0.7', { name: 'plain number' }),
+  inlet: share('share at the inlet', '1 % mass', { gives: ['inletShare@'] }),
+  wall: share('share at the wall', '2 % mass', { gives: ['wallShare@'] }),
+  molarMass: quantity('molar mass', 'kg/mol', '58.4 g/mol', { name: 'molar mass', above: 0, gives: ['speciesMolarMass@'] }),
+  densityChange: quantity('relative change of density per unit of concentration', '1', '0.7', { name: 'plain number', gives: ['solutalSlope@'] }),
 }, { names: 'required' });
 
 export const reactions = list('chemical reactions', '[{ of: feed, where: fluid, order: 1, rateConstant: 2 1/s, rateAt: 350 degC }]', {
   of: text('the substance that reacts', 'feed'),
   where: word('where it reacts', 'fluid', { fluid: 'in the fluid', wall: 'on the wall', catalyst: 'within a catalyst', interface: 'where two fluids meet' }),
-  order: number('order of the reaction', '1', { atLeast: 0, atMost: 5 }),
-  rateConstant: quantity('rate constant, in the unit of its order and place', '1/s', '2 1/s', { orUnits: ['m/s', 'm^3/(mol s)', 'mol/(m^3 s)', 'mol/(m^2 s)', 'm^6/(mol^2 s)', 'm^3/(kg s)', 'mol/(kg s)'], name: 'rate constant', above: 0 }),
-  rateAt: temperature('temperature at which the rate constant holds', '350 degC'),
-  activationEnergy: quantity('activation energy', 'J/mol', '110 kJ/mol', { name: 'activation energy', atLeast: 0 }),
+  order: number('order of the reaction', '1', { atLeast: 0, atMost: 5, gives: ['reactionOrder@'] }),
+  rateConstant: quantity('rate constant, in the unit of its order and place', '1/s', '2 1/s', { orUnits: ['m/s', 'm^3/(mol s)', 'mol/(m^3 s)', 'mol/(m^2 s)', 'm^6/(mol^2 s)', 'm^3/(kg s)', 'mol/(kg s)'], name: 'rate constant', above: 0, gives: ['rateConstantGiven@'] }),
+  rateAt: temperature('temperature at which the rate constant holds', '350 degC', { gives: ['rateTemperature@'] }),
+  activationEnergy: quantity('activation energy', 'J/mol', '110 kJ/mol', { name: 'activation energy', atLeast: 0, gives: ['activationEnergy@'] }),
   enthalpy: quantity('enthalpy of reaction, negative where heat is released', 'J/mol', '-1300 kJ/mol', { name: 'enthalpy of reaction', orUnits: ['J/kg'] }),
 });
 

@@ -2,7 +2,7 @@ export type Verdict = 'include' | 'leave-out' | 'borderline' | 'undecided';
 export const verdicts: readonly Verdict[] = ['include', 'leave-out', 'borderline', 'undecided'];
 export const operators = ['equal', 'notEqual', 'in', 'notIn', 'lessThan', 'lessThanInclusive', 'greaterThan', 'greaterThanInclusive'] as const;
 export type Operator = (typeof operators)[number];
-export const perKinds = ['wall', 'inlet', 'region', 'species', 'particle'] as const;
+export const perKinds = ['wall', 'inlet', 'region', 'species', 'reaction', 'particle'] as const;
 
 /** A number that stands once: as such, or as a share of a quantity. */
 export interface Scaled {

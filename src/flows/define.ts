@@ -79,6 +79,8 @@ export interface Flow {
   /** Words this flow fixes, by the id of the word. */
   readonly words: Readonly<Record<string, string>>;
   readonly definitions: readonly Definition[];
+  /** What it adds where a species is carried, beside its laws of heat read by analogy. */
+  readonly carried?: readonly Definition[];
   readonly leastRegion: string;
   readonly cuts: readonly Cut[];
   readonly domain: readonly Extent[];

@@ -86,6 +86,17 @@ const continuum: Definition[] = [
   ways('exchangeUnits', [way({ needs: ['nusseltPlain', 'thermalConductivityBulk', 'packedBedVoidFraction', 'sizes.particleDiameter', 'sizes.length', 'densityBulk', 'specificHeatCapacityBulk', 'speedBulk'], value: (of) => (6 * (1 - of.packedBedVoidFraction) * of.nusseltPlain * of.thermalConductivityBulk * of['sizes.length']) / (of['sizes.particleDiameter'] ** 2 * of.densityBulk * of.specificHeatCapacityBulk * of.speedBulk), formula: 'NTU = h_sf a L/(rho cp U), a = 6 (1 - e)/d_p', source: 'definition' })]),
 ];
 
+const carried: Definition[] = [
+  ways('bodenstein', [way({ needs: ['packedBedPecletAxial', 'sizes.length', 'sizes.particleDiameter'], value: (of) => (of.packedBedPecletAxial * of['sizes.length']) / of['sizes.particleDiameter'], formula: 'Bo_d = Pe_ax L/d_p', source: 'definition, on the pore speed' })]),
+  ways('catalystLength', [way({ needs: ['sizes.particleDiameter'], value: (of) => of['sizes.particleDiameter'] / 6, formula: 'V/S = d_p/6', source: 'spheres' })]),
+  ways('damkohler', [
+    way({ needs: ['rateConstant', 'effectivenessFactor', 'wallReactionFactor', 'packedBedVoidFraction', 'sizes.length', 'speed'], when: { reactionWhere: 'catalyst' }, value: (of) => (of.rateConstant * of.effectivenessFactor * of.wallReactionFactor * (1 - of.packedBedVoidFraction) * of['sizes.length']) / of.speed, formula: 'Da = eta F_w k (1 - e) L/U', source: 'definition, the rate constant counts on the volume of the catalyst' }),
+    way({ needs: ['surfaceRateConstant', 'wallReactionFactor', 'packedBedVoidFraction', 'sizes.particleDiameter', 'sizes.length', 'speed'], when: { reactionWhere: ['catalyst', 'wall'] }, value: (of) => (6 * of.surfaceRateConstant * of.wallReactionFactor * (1 - of.packedBedVoidFraction) * of['sizes.length']) / (of['sizes.particleDiameter'] * of.speed), formula: 'Da = F_w k" 6 (1 - e) L/(d_p U)', source: 'definition, spheres' }),
+    way({ needs: ['rateConstant', 'packedBedVoidFraction', 'sizes.length', 'speed'], when: { reactionWhere: 'fluid' }, value: (of) => (of.rateConstant * of.packedBedVoidFraction * of['sizes.length']) / of.speed, formula: 'Da = k e L/U', source: 'definition, time in the pores' }),
+  ]),
+  ways('massTransferUnits', [way({ needs: ['massTransferCoefficient', 'stefanFactorFlux', 'packedBedVoidFraction', 'sizes.length', 'sizes.particleDiameter', 'speedBulk'], when: { wallShareGiven: 'yes' }, value: (of) => (6 * (1 - of.packedBedVoidFraction) * of.massTransferCoefficient * of.stefanFactorFlux * of['sizes.length']) / (of['sizes.particleDiameter'] * of.speedBulk), formula: 'N_m = k_c F_B a L/U, a = 6 (1 - e)/d_p', source: 'definition, the wall is that of the particles' })]),
+];
+
 export const packedBed: Flow = {
   id: 'packed-bed',
   title: 'Packed bed of particles',
@@ -101,6 +112,7 @@ export const packedBed: Flow = {
   regions: ['bed', 'free'],
   words: { flow: 'packed-bed', flowClass: 'continuum', imposedFlow: 'yes', wallBounded: 'no', attached: 'yes', separated: 'no', ductSection: 'round', infiniteDepth: 'no' },
   definitions: [...scales, ...regime, ...drag, ...transfer, ...extents, ...continuum],
+  carried,
   leastRegion: 'Above ten particles across and 20 to 50 along: one- or two-dimensional continuum. Below: the particles themselves, 20 cells and more over each, contacts bridged or trimmed.',
   cuts: [
     { option: 'axisymmetric', holdsIf: 'more than ten particles across, wall conditions even all round' },

@@ -45,6 +45,8 @@ export const sizes: Definition[] = [
     way({ needs: ['kinematicViscosity'], value: (of) => of.kinematicViscosity, formula: 'Gamma = nu', source: definition }),
   ]),
   quantity('largestDiffusivity', { symbol: 'Gamma_max', name: 'largest diffusivity of what is carried', unit: 'm^2/s' }, [
+    way({ needs: ['kinematicViscosity', 'thermalDiffusivity', 'diffusivity'], when: { energySolved: 'yes', 'has.species': 'yes' }, value: (of) => Math.max(of.kinematicViscosity, of.thermalDiffusivity, of.diffusivity), formula: 'Gamma_max = max(nu, alpha, D_m)', source: definition }),
+    way({ needs: ['kinematicViscosity', 'diffusivity'], when: { 'has.species': 'yes' }, value: (of) => Math.max(of.kinematicViscosity, of.diffusivity), formula: 'Gamma_max = max(nu, D_m)', source: definition }),
     way({ needs: ['kinematicViscosity', 'thermalDiffusivity'], when: { energySolved: 'yes' }, value: (of) => Math.max(of.kinematicViscosity, of.thermalDiffusivity), formula: 'Gamma_max = max(nu, alpha)', source: definition }),
     way({ needs: ['kinematicViscosity'], value: (of) => of.kinematicViscosity, formula: 'Gamma_max = nu', source: definition }),
   ]),

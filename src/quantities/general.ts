@@ -9,7 +9,11 @@ import { porous } from './porous.ts';
 import { dimension } from './dimension.ts';
 import { domain } from './domain.ts';
 import { unsteady } from './unsteady.ts';
-import { species } from './species.ts';
+import { massAnalogy } from './mass-analogy.ts';
+import { massTransfer } from './mass-transfer.ts';
+import { reacting, reactions } from './reactions.ts';
+import { composition, solutal } from './species.ts';
+import { thermalDiffusion } from './thermal-diffusion.ts';
 import { roughness } from './roughness.ts';
 import { compressibility } from './compressibility.ts';
 import { onset } from './onset.ts';
@@ -33,8 +37,8 @@ import { turbulence } from './turbulence.ts';
 import { wallTemperatures } from './walls.ts';
 import { words } from './words.ts';
 
-/** Every definition that all cases share, one file a topic. */
-export const generalDefinitions: Definition[] = [
+/** What every case has, whether or not a species is carried; one file a topic. */
+export const commonDefinitions: Definition[] = [
   ...words,
   ...scales,
   ...temperatures,
@@ -54,7 +58,6 @@ export const generalDefinitions: Definition[] = [
   ...conduction,
   ...entrance,
   ...roughness,
-  ...species,
   ...unsteady,
   ...porous,
   ...dimension,
@@ -69,3 +72,9 @@ export const generalDefinitions: Definition[] = [
   ...nearWall,
   ...namedFields,
 ];
+
+/** What a case has in addition that carries a species or lets one react. */
+export const carriedDefinitions: Definition[] = [...composition, ...solutal, ...massTransfer, ...thermalDiffusion, ...reactions, ...reacting, ...massAnalogy([...branches, ...entrance])];
+
+/** Every definition that cases share. */
+export const generalDefinitions: Definition[] = [...commonDefinitions, ...carriedDefinitions];

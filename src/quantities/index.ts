@@ -1,4 +1,5 @@
-export { generalDefinitions } from './general.ts';
+export { carriedDefinitions, commonDefinitions, generalDefinitions } from './general.ts';
+export { massAnalogy } from './mass-analogy.ts';
 export * from './correlations/index.ts';
 export { layersBelow, layersToCover, layersToMatch, stackHeight } from './layer-stack.ts';
 export { facingWalls } from './radiation.ts';

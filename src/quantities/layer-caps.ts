@@ -16,8 +16,8 @@ const shearDistance: Table = [
 /** What the layers of laminar flow, of heat, of species and of imposed oscillation allow the cell at the wall. */
 export const layerCaps: Definition[] = [
   quantity('thinnestLayer', { symbol: 'delta_min', name: 'thinnest layer at the wall', unit: 'm' }, [
-    way({ needs: ['boundaryLayerThickness', 'thermalLayerThickness', 'schmidt'], when: { 'has.species': 'yes', energySolved: 'yes' }, value: ({ boundaryLayerThickness, thermalLayerThickness, schmidt }) => Math.min(boundaryLayerThickness * Math.min(1, schmidt ** (-1 / 3)), thermalLayerThickness), formula: 'delta_min = min(delta, delta_T, delta Sc^(-1/3))', source: 'scaling of laminar layers' }),
-    way({ needs: ['boundaryLayerThickness', 'schmidt'], when: { 'has.species': 'yes' }, value: ({ boundaryLayerThickness, schmidt }) => boundaryLayerThickness * Math.min(1, schmidt ** (-1 / 3)), formula: 'delta_min = delta min(1, Sc^(-1/3))', source: 'scaling of laminar layers' }),
+    way({ needs: ['boundaryLayerThickness', 'thermalLayerThickness', 'concentrationLayerThickness'], when: { 'has.speciesWall': 'yes', energySolved: 'yes' }, value: ({ boundaryLayerThickness, thermalLayerThickness, concentrationLayerThickness }) => Math.min(boundaryLayerThickness, thermalLayerThickness, concentrationLayerThickness), formula: 'delta_min = min(delta, delta_T, delta_c)', source: definition }),
+    way({ needs: ['boundaryLayerThickness', 'concentrationLayerThickness'], when: { 'has.speciesWall': 'yes' }, value: ({ boundaryLayerThickness, concentrationLayerThickness }) => Math.min(boundaryLayerThickness, concentrationLayerThickness), formula: 'delta_min = min(delta, delta_c)', source: definition }),
     way({ needs: ['boundaryLayerThickness', 'thermalLayerThickness'], when: { energySolved: 'yes' }, value: ({ boundaryLayerThickness, thermalLayerThickness }) => Math.min(boundaryLayerThickness, thermalLayerThickness), formula: 'delta_min = min(delta, delta_T)', source: definition }),
     way({ needs: ['boundaryLayerThickness'], value: ({ boundaryLayerThickness }) => boundaryLayerThickness, formula: 'delta_min = delta', source: definition }),
     way({ needs: ['thermalLayerThickness'], value: ({ thermalLayerThickness }) => thermalLayerThickness, formula: 'delta_min = delta_T', source: definition }),
@@ -44,6 +44,6 @@ export const layerCaps: Definition[] = [
     way({ needs: ['prandtlWall', 'viscousLength'], when: { regime: ['transitional', 'turbulent'], energySolved: 'yes' }, range: { prandtlWall: [0.7, 1000] }, scatter: 0.1, value: ({ prandtlWall, viscousLength }) => 12.8 * prandtlWall ** (-1 / 3) * viscousLength, formula: 'y_T = 12.8 Pr^(-1/3) nu/u_tau', source: 'crossing of the two parts of Kader, Int. J. Heat Mass Transfer 24 (1981) 1541' }),
   ]),
   quantity('speciesSublayer', { symbol: 'y_c', name: 'thickness of the concentration sublayer', unit: 'm' }, [
-    way({ needs: ['schmidt', 'viscousLength'], when: { regime: ['transitional', 'turbulent'], 'has.species': 'yes' }, scatter: 0.1, value: ({ schmidt, viscousLength }) => 12 * schmidt ** (-1 / 3) * viscousLength, formula: 'y_c = 12 Sc^(-1/3) nu/u_tau', source: 'by the same law as for heat, Kader 1981' }),
+    way({ needs: ['schmidt', 'viscousLength'], when: { regime: ['transitional', 'turbulent'], 'has.speciesWall': 'yes' }, scatter: 0.1, value: ({ schmidt, viscousLength }) => 12 * schmidt ** (-1 / 3) * viscousLength, formula: 'y_c = 12 Sc^(-1/3) nu/u_tau', source: 'by the same law as for heat, Kader 1981' }),
   ]),
 ];

@@ -43,7 +43,7 @@ export const turbulence: Definition[] = [
     way({ needs: ['kinematicViscosity', 'meanDissipationRate'], value: ({ kinematicViscosity, meanDissipationRate }) => (kinematicViscosity * meanDissipationRate) ** 0.25, formula: 'u_eta = (nu eps)^(1/4)', source: 'Kolmogorov 1941' }),
   ]),
   quantity('batchelorLength', { symbol: 'eta_B', name: 'Batchelor length', unit: 'm' }, [
-    way({ needs: ['kolmogorovLength', 'schmidt'], value: ({ kolmogorovLength, schmidt }) => kolmogorovLength / Math.sqrt(schmidt), formula: 'eta_B = eta Sc^(-1/2)', source: 'Batchelor 1959' }),
+    way({ needs: ['kolmogorovLength', 'schmidt'], when: { 'has.species': 'yes' }, value: ({ kolmogorovLength, schmidt }) => kolmogorovLength / Math.sqrt(schmidt), formula: 'eta_B = eta Sc^(-1/2)', source: 'Batchelor 1959' }),
     way({ needs: ['kolmogorovLength', 'prandtl'], value: ({ kolmogorovLength, prandtl }) => kolmogorovLength * (prandtl >= 1 ? prandtl ** -0.5 : prandtl ** -0.75), formula: 'eta_B = eta Pr^(-1/2), eta Pr^(-3/4) below Pr = 1', source: 'Batchelor 1959; Obukhov 1949, Corrsin 1951' }),
   ]),
 ];

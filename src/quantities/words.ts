@@ -1,7 +1,7 @@
 import { quantity, wordWay, type Definition, type QuantityAbout } from '../workings/index.ts';
 
 /** What a case can name at all; absent unless its key stands in the case. */
-export const features = ['species', 'reactions', 'particles', 'otherFluid', 'rheology', 'magneticField', 'frame', 'motion', 'porous', 'period', 'ramp', 'swirl', 'humidity', 'burning', 'roughness', 'layers', 'gravity', 'sources', 'wallMotion', 'partHeated'] as const;
+export const features = ['species', 'reactions', 'particles', 'otherFluid', 'rheology', 'magneticField', 'frame', 'motion', 'porous', 'period', 'ramp', 'swirl', 'humidity', 'burning', 'roughness', 'layers', 'gravity', 'sources', 'wallMotion', 'partHeated', 'speciesWall', 'fluidReaction', 'surfaceReaction', 'catalystReaction', 'filmReaction', 'reactionHeat'] as const;
 
 /** Configurations that a case can name. */
 const flowNames = [
@@ -30,6 +30,7 @@ export const words: Definition[] = [
   word('attached', 'the flow follows its walls', yesNo),
   word('separated', 'the flow separates', yesNo),
   word('targetHeat', 'a target is heat or mass transfer', yesNo),
+  word('targetSpecies', 'a target hangs on a concentration', yesNo),
   word('targetMomentum', 'a target is a force, a shear or a pressure', yesNo),
   word('targetPeak', 'a target is a peak, an rms or a spectrum', yesNo),
   word('targetMean', 'a target is a mean over all walls', yesNo),
@@ -37,6 +38,13 @@ export const words: Definition[] = [
   word('inletProfile', 'shape of the inlet profile', ['uniform', 'developed', 'power', 'log', 'table', 'none']),
   word('wallKind', 'thermal kind of a wall', ['temperature', 'flux', 'coefficient', 'adiabatic'], { per: ['wall'], plain: 'target' }),
   word('wallFace', 'face of the wall whose temperature is given', ['outer', 'wetted'], { per: ['wall'], plain: 'target' }),
+  word('inletShareBasis', 'what the share of a species at the inlet counts', ['mass', 'mole'], { per: ['species'], plain: 'target' }),
+  word('wallShareBasis', 'what the share of a species at the wall counts', ['mass', 'mole'], { per: ['species'], plain: 'target' }),
+  word('wallShareGiven', 'a species has a share of its own at the wall', yesNo, { per: ['species'], plain: 'target' }),
+  word('lightGas', 'hydrogen or helium takes part', yesNo),
+  word('reactionWhere', 'where a reaction goes on', ['fluid', 'wall', 'catalyst', 'interface'], { per: ['reaction'], plain: 'target' }),
+  word('rateKind', 'what a rate constant counts on', ['volume', 'surface', 'mass'], { per: ['reaction'], plain: 'target' }),
+  word('enthalpyPer', 'what an enthalpy of reaction counts on', ['mole', 'mass'], { per: ['reaction'], plain: 'target' }),
   word('character', 'nature of the problem in time', ['unknown', 'steady', 'periodic', 'transient']),
   word('fluidGiven', 'how the fluid is given', ['material', 'constants']),
   word('ductSection', 'section of the passage', ['round', 'rectangular', 'flat', 'other']),

@@ -79,7 +79,7 @@ export function loop<const N extends string>(w: About & { readonly needs: readon
   return { ...rest, value: start };
 }
 
-export type PlaceKind = 'wall' | 'station' | 'inlet' | 'region' | 'species' | 'particle';
+export type PlaceKind = 'wall' | 'station' | 'inlet' | 'region' | 'species' | 'reaction' | 'particle';
 
 export interface QuantityAbout {
   readonly symbol: string;

@@ -18,8 +18,6 @@ export interface Mapped {
 }
 
 const n = (id: string, times = 1): Read => (on) => on.n(id) * times;
-const species = 'transport of species is not built yet';
-const reactions = 'reactions are not built yet';
 const magnetic = 'magnetic fields are not built yet';
 const unjudged = (what: string): Exception => ({ ours: 'undecided', why: `${what}: the plan says that it is not judged yet and lists it to judge by hand` });
 const atYPlus = (y: string): Read => ({ changes: [['wall: {', `choices: { yPlus: ${y} }\nwall: {`]], read: (on) => on.n('firstNodeDistance') });
@@ -120,10 +118,10 @@ export const mapped: Readonly<Record<string, Mapped>> = {
     within: { 'developed friction constant f Re (Fanning)': { rel: 0.01 }, 'bulk temperature rise': { rel: 0.02 } },
   },
   'tube-reactor': {
-    groups: { Re: n('reynolds'), Sc: n('schmidt'), Da: reactions, Fo_m: species, Pe_ax: (on) => (on.n('pecletMass') * 2) / 6.35e-3 },
+    groups: { Re: n('reynolds'), Sc: n('schmidt'), Da: n('damkohler'), Fo_m: n('fourierMass'), Pe_ax: (on) => (on.n('pecletMass') * 2) / 6.35e-3 },
     facts: {},
-    answers: { 'conversion without radial diffusion (segregated laminar)': reactions, 'conversion in plug flow': reactions },
-    exceptions: { 'decision: species': unjudged(species), 'decision: reaction': unjudged(reactions), 'decision: turbulence-chemistry': unjudged(reactions) },
+    answers: { 'conversion without radial diffusion (segregated laminar)': n('conversionSegregated'), 'conversion in plug flow': n('conversionPlug') },
+    within: { 'conversion without radial diffusion (segregated laminar)': { rel: 1e-4 }, 'conversion in plug flow': { rel: 1e-4 } },
   },
   'gallium-melting': {
     groups: { Ra: { changes: melt, read: (on) => on.n('rayleighHeight') }, Ste: 'the Stefan number is not computed', Pr: n('prandtl') },

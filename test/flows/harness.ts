@@ -1,4 +1,4 @@
-import { generalDefinitions } from '../../src/quantities/index.ts';
+import { generalDefinitions, massAnalogy } from '../../src/quantities/index.ts';
 import { leavesOf } from '../../src/assemble/leaves.ts';
 import { vocabulary } from '../../src/assemble/vocabulary.ts';
 import { meshDefinitions } from '../../src/mesh/index.ts';
@@ -18,7 +18,7 @@ const general = [...generalDefinitions, ...meshDefinitions, ...timeDefinitions, 
 
 /** General definitions, those of the flow, and as plain leaves whatever a way needs that none of them defines: the paths of a case above all. A factor nobody defines is 1. */
 export function definitionsOf(flow: Flow): Definition[] {
-  const own = [...general, ...flow.definitions];
+  const own = [...general, ...flow.definitions, ...massAnalogy(flow.definitions), ...(flow.carried ?? [])];
   const paths = pathUnits(flow);
   const known = new Set(own.flatMap((d) => ('more' in d ? [] : [d.id])));
   const leaves = new Map<string, string>(flow.sizes.map((s) => [`sizes.${s.key}`, s.unit]));

@@ -11,6 +11,7 @@ export * from './passage-friction.ts';
 export * from './plate-heat.ts';
 export * from './plate.ts';
 export * from './property-ratio.ts';
+export * from './reactor.ts';
 export * from './step.ts';
 export { between, type Table } from './table.ts';
 export * from './wall-laws.ts';
