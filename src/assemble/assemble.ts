@@ -8,7 +8,7 @@ import { propertyAt, type Collection, type Material } from '../properties/index.
 import { carriedDefinitions, commonDefinitions, givenPropertyWays, isProperty, massAnalogy, materialWays } from '../quantities/index.ts';
 import { timeDefinitions } from '../time/index.ts';
 import { joinDefinitions, ways, Workings, type Definition, type Given } from '../workings/index.ts';
-import { carries, reactionDefinitions, targetSpecies } from './carried.ts';
+import { carries, moleculeDefinitions, reactionDefinitions, targetSpecies } from './carried.ts';
 import { factsOf } from './facts.ts';
 import { fluidOf } from './fluid.ts';
 import { givenOf, type Range } from './given.ts';
@@ -88,6 +88,7 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
   const ownLeaves = extraLeaves(on, leaves, exists);
   const definitions: Definition[] = [
     ...base,
+    ...(carried ? moleculeDefinitions(on, fluid.material?.name ?? on.word('fluid.material')) : []),
     ...leafDefinitions([...leaves, ...ownLeaves], exists),
     ways('inletTemperature', ['inlet.temperature', 'fluid.temperature', 'inlet.totalTemperature', 'initial.temperature'].map((path) => ({ needs: [path], value: (of: Readonly<Record<string, number>>) => of[path] as number, formula: `T_in as given: ${path}`, source: 'the case' }))),
     ...wall.definitions,

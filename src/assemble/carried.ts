@@ -1,8 +1,38 @@
 import type { Case, Target } from '../case/index.ts';
+import { moleculeOf } from '../quantities/index.ts';
 import { ways, type Definition, type Way } from '../workings/index.ts';
 
 /** Whether a case carries a species or lets one react: without either, none of their quantities exist in its graph. */
 export const carries = (on: Case): boolean => on.has('species') || on.has('reactions');
+
+const known = (value: number, formula: string, source: string, dimensional?: string): Way => ({ needs: [], value: () => value, formula, source, ...(dimensional === undefined ? {} : { dimensional }) });
+const volumes = "Poling, Prausnitz and O'Connell, The Properties of Gases and Liquids, 5th ed. (2001), table 11-1";
+
+/**
+ * What is known of the molecules that a case names: molar mass, and the volumes that estimates of diffusivity take.
+ *
+ * @param on     the case
+ * @param fluid  name of its fluid
+ * @returns      ways below what the case gives
+ */
+export function moleculeDefinitions(on: Case, fluid: string | undefined): Definition[] {
+  const other = fluid === undefined ? undefined : moleculeOf(fluid);
+  const water = fluid !== undefined && /^water$/i.test(fluid);
+  return [
+    ...(other === undefined ? [] : [ways('fluidDiffusionVolume', [known(other.diffusionVolume, `v_B of ${fluid}`, volumes)])]),
+    ...(other === undefined || !water ? [] : [ways('solventMass', [known(other.molarMass, 'M_B of water', 'IUPAC 2021', 'a constant with unit')])]),
+    ...on.list('species').flatMap((name): Definition[] => {
+      const one = moleculeOf(name);
+      if (one === undefined) return [];
+      const at = `species.${name}`;
+      return [
+        ways(`speciesMolarMass@${at}`, [known(one.molarMass, `M of ${name}, by its atoms`, 'IUPAC 2021, abridged atomic weights', 'a constant with unit')]),
+        ways(`diffusionVolume@${at}`, [known(one.diffusionVolume, `v_A of ${name}`, volumes)]),
+        ...(one.boilingVolume === undefined ? [] : [ways(`boilingVolume@${at}`, [known(one.boilingVolume, `V of ${name} at its boiling point`, 'Wilke and Chang, AIChE J. 1 (1955) 264; from memory', 'a constant with unit')])]),
+      ];
+    }),
+  ];
+}
 
 /** What a reaction knows of its reactant, by the quantity of the species that gives it. */
 const fromSpecies: readonly (readonly [own: string, species: string])[] = [['reactantMassFraction', 'massFractionInlet'], ['reactantMolarMass', 'speciesMolarMass'], ['reactantDiffusivity', 'diffusivity'], ['reactantCoefficient', 'massTransferCoefficient'], ['reactantFourier', 'fourierMass']];
@@ -41,8 +71,8 @@ export function carriedWords(on: Case, medium: 'gas' | 'liquid' | 'solid' | unde
     for (const key of ['inlet', 'wall'] as const) {
       const basis = on.get(`${at}.${key}`)?.basis;
       const id = `${key}ShareBasis@${at}`;
-      if (basis !== undefined) words[id] = basis === 'mass' ? 'mass' : 'mole';
-      else if (on.has(`${at}.${key}`)) take(id, medium === 'gas' ? 'mole' : 'mass', `${at}.${key} counts ${medium === 'gas' ? 'moles, as is usual in gases' : 'mass, as is usual in liquids'}: mass or mol is not said`);
+      words[id] = basis === undefined ? (medium === 'gas' ? 'mole' : 'mass') : basis === 'mass' ? 'mass' : 'mole';
+      if (basis === undefined && on.has(`${at}.${key}`)) take(id, medium === 'gas' ? 'mole' : 'mass', `${at}.${key} counts ${medium === 'gas' ? 'moles, as is usual in gases' : 'mass, as is usual in liquids'}: mass or mol is not said`);
     }
   }
   for (const name of on.list('reactions')) {

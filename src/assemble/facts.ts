@@ -35,6 +35,7 @@ const featureKeys: Readonly<Record<(typeof features)[number], (on: Case, walls: 
   sources: (c) => c.has('sources') || c.has('drive.heatRelease'),
   wallMotion: (_, w) => any(w, 'speed') || any(w, 'rotation'),
   speciesWall: (c) => c.list('species').some((name) => c.has(`species.${name}.wall`)) || reacts(c, 'wall') || reacts(c, 'catalyst'),
+  severalSpecies: (c) => c.list('species').length > 1,
   fluidReaction: (c) => reacts(c, 'fluid'),
   surfaceReaction: (c) => reacts(c, 'wall') || reacts(c, 'catalyst'),
   catalystReaction: (c) => reacts(c, 'catalyst'),

@@ -1,5 +1,5 @@
 import type { Case, Target, Tolerance } from '../case/index.ts';
-import { speciesNamed } from './carried.ts';
+import { speciesNamed, targetSpecies } from './carried.ts';
 import { nearestName } from '../problems/index.ts';
 import type { Definition, Workings } from '../workings/index.ts';
 import type { TargetNode } from './target-definitions.ts';
@@ -74,7 +74,9 @@ export function bindTargets(on: Case, workings: Workings, walls: readonly string
 
 /** Ids a target may stand for, the most particular first. */
 function triesOf(on: Case, t: Target, walls: readonly string[]): string[] {
-  const species = speciesNamed(on, [t]);
+  // Plain ids stand for one species; another is named by its place.
+  const named = speciesNamed(on, [t]);
+  const species = targetSpecies(on).species === `species.${named}` ? undefined : named;
   const wall = walls.find((w) => t.place !== undefined && t.place.toLowerCase().split(/[\s,]+/).includes(w));
   return [...(t.mean === 'peak' ? [`${t.quantity}Peak`] : []), ...(wall === undefined ? [] : [`${t.quantity}@walls.${wall}`]), ...(species === undefined ? [] : [`${t.quantity}@species.${species}`]), t.quantity];
 }

@@ -27,7 +27,13 @@ export function inlet(name = 'inlet', more: Part = {}): Boundary {
       { says: 'value {inletTemperature}' },
     ],
     turbulence: arriving,
-    species: [{ says: 'total flux of the stream that enters', kept: 'dispersion' }, { says: 'value of the stream that enters' }],
+    species: [
+      { says: 'total flux of the stream that enters', kept: 'dispersion' },
+      { says: 'total flux: what is carried less what diffuses equals the stream, mass share {massFractionInlet}', kept: 'axial-conduction' },
+      { says: 'value: the mass shares of each species', when: { 'has.severalSpecies': 'yes' } },
+      { says: 'value, mass share {massFractionInlet}' },
+      { says: 'value of the stream that enters' },
+    ],
     ...more,
   };
 }
@@ -75,7 +81,13 @@ export function wall(name: string, place = 'wall', more: Part = {}): Boundary {
       { says: 'k = 0, omega or epsilon by the blended wall value', when: { 'choice.near-wall-treatment': 'blended' } },
       { says: 'k = 0, omega or epsilon by their values at the wall' },
     ],
-    species: 'tight, unless it reacts',
+    species: [
+      { says: 'flux equal to the rate of the reaction at the surface', when: { 'has.surfaceReaction': 'yes' }, kept: 'surface-reaction' },
+      { says: 'value: the mass share of each species that passes; the others tight', when: { 'has.speciesWall': 'yes', 'has.severalSpecies': 'yes' } },
+      { says: 'value, mass share {massFractionWall}; the speed across the wall that its flux makes', when: { 'has.speciesWall': 'yes' }, kept: 'stefan-flow' },
+      { says: 'value, mass share {massFractionWall}', when: { 'has.speciesWall': 'yes' } },
+      { says: 'tight' },
+    ],
     ...more,
   };
 }

@@ -78,7 +78,7 @@ const laws: Definition[] = [
     way({ needs: [], when: { channelHeating: 'one', wallKind: ['temperature', 'coefficient'] }, value: () => laminarNusselt.oneSided.temperature, formula: 'Nu = 4.861, one wall at a temperature, the other adiabatic', source: laminarSource }),
     way({ needs: [], when: { channelHeating: 'one', wallKind: 'flux' }, value: () => laminarNusselt.oneSided.flux, formula: 'Nu = 70/13, flux through one wall, the other adiabatic', source: laminarSource }),
   ]),
-  ways('entranceFactorNusselt', [oneSidedEntrance(['temperature', 'coefficient'], 1.849, laminarNusselt.oneSided.temperature, '4.861'), oneSidedEntrance(['flux'], 2.236, laminarNusselt.oneSided.flux, '70/13')]),
+  ways('entranceFactorNusseltLaw', [oneSidedEntrance(['temperature', 'coefficient'], 1.849, laminarNusselt.oneSided.temperature, '4.861'), oneSidedEntrance(['flux'], 2.236, laminarNusselt.oneSided.flux, '70/13')]),
   ways('entranceLengthThermal', [
     way({ needs: ['reynoldsBulk', 'prandtlBulk', 'hydraulicDiameter'], when: { regime: ['laminar', 'transitional'], channelHeating: 'one' }, scatter: 0.5, value: (of) => 0.04 * of.reynoldsBulk * of.prandtlBulk * of.hydraulicDiameter, formula: 'L_t = 0.04 Re Pr D_h', source: 'common practice: four times the length of both walls, the layer crosses the whole gap' }),
   ]),

@@ -34,7 +34,8 @@ export function distanceDefinition(id: string, reference: Reference, from: reado
     const yard = yardsticks[need.id];
     if (yard === undefined) return [];
     const at = mapped.get(need.id);
-    if (at?.startsWith(yard.group) === true) return []; // the answer is taken at the case's own number, at whatever state
+    // Where a species is carried its own number stands for that of heat.
+    if (at?.startsWith(yard.group) === true || at?.startsWith('schmidt') === true) return []; // the answer is taken at the case's own number, at whatever state
     const number = fixed[need.id] ?? (at === undefined ? need.default : undefined);
     return at === undefined && number === undefined ? [] : [{ ...yard, at, number }];
   });

@@ -6,7 +6,7 @@ const results: Readonly<Record<string, string>> = {
   nusseltLaminar: 'sherwoodLaminar',
   nusseltTurbulent: 'sherwoodTurbulent',
   nusseltBetween: 'sherwoodBetween',
-  entranceFactorNusselt: 'entranceFactorSherwood',
+  entranceFactorNusseltLaw: 'entranceFactorSherwoodLaw',
 };
 const needs: Readonly<Record<string, string>> = { ...results, prandtl: 'schmidt', prandtlBulk: 'schmidtBulk', prandtlFilm: 'schmidtFilm', prandtlWall: 'schmidtWall', graetz: 'graetzMass' };
 /** Where heat itself drives the flow, or the wall sets a flux, a species follows laws of its own. */

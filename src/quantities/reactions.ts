@@ -1,5 +1,6 @@
+import { dispersedConversion } from '../references/index.ts';
 import { quantity, way, ways, wordWay, type Definition } from '../workings/index.ts';
-import { dispersedConversion, effectiveness, laminarConversion, plugFlowConversion } from './correlations/index.ts';
+import { effectiveness, laminarConversion, plugFlowConversion } from './correlations/index.ts';
 
 const definition = 'definition';
 const per = { per: ['reaction' as const], plain: 'target' as const };
@@ -89,7 +90,7 @@ const groups: Definition[] = [
 
 /** How far a reaction gets, and how much heat it sets free. */
 const outcomes: Definition[] = [
-  quantity('conversion', { symbol: 'X', name: 'share of a reactant converted at the outlet', unit: '1', ...per }, [
+  quantity('conversion', { symbol: 'X', name: 'conversion at the outlet', unit: '1', ...per }, [
     way({ needs: ['damkohler', 'reactantFourier'], when: { ...inFluid, ...first, flowClass: 'internal', regime: 'laminar', ductSection: 'round' }, range: { damkohler: [0, 5] }, scatter: 0.02, value: ({ damkohler, reactantFourier }) => laminarConversion({ damkohler, fourier: reactantFourier }), formula: 'X = X_s + (1 - e^-Da - X_s) Fo_m/(Fo_m + 0.095 Da^0.9), X_s = 1 - (1 - y) e^-y - y^2 E_1(y), y = Da/2', source: 'Cleland and Wilhelm, AIChE J. 2 (1956) 489, segregated; diffusion across fitted to the equation solved by finite volumes' }),
     way({ needs: ['damkohler', 'reactionOrder'], when: { ...inFluid, flowClass: 'internal', regime: ['laminar', 'transitional'] }, scatter: 0.15, value: ({ damkohler, reactionOrder }) => plugFlowConversion({ damkohler, order: reactionOrder }), formula: 'X = 1 - e^-Da, order n X = 1 - [1 + (n - 1) Da]^(1/(1 - n))', source: `${levenspiel}, plug flow`, note: 'the profile of laminar flow lowers it by up to 13 %' }),
     way({ needs: ['damkohler', 'reactionOrder'], when: { ...inFluid, flowClass: 'internal', regime: 'turbulent' }, scatter: 0.02, value: ({ damkohler, reactionOrder }) => plugFlowConversion({ damkohler, order: reactionOrder }), formula: 'X = 1 - e^-Da, order n X = 1 - [1 + (n - 1) Da]^(1/(1 - n))', source: `${levenspiel}, plug flow` }),

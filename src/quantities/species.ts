@@ -1,7 +1,8 @@
 import { quantity, way, type Definition } from '../workings/index.ts';
 
 const per = { per: ['species' as const], plain: 'target' as const };
-const largest = { per: ['species' as const], plain: 'largest' as const };
+const largest = { per: ['species' as const], plain: 'largest' as const, whole: true as const };
+const sum = { per: ['species' as const], plain: 'sum' as const, whole: true as const };
 const definition = 'definition';
 const asGiven = 'the case';
 
@@ -59,7 +60,7 @@ const mixed: Definition[] = [
 /** What a species does to the density, and the forces that follow. */
 export const solutal: Definition[] = [
   quantity('solutalSlope', { symbol: 'beta_c', name: 'relative change of density per unit of share', unit: '1', signed: true, ...per }),
-  quantity('solutalDensityShift', { symbol: '(drho/rho)_c', name: 'relative density where a species is strongest or at the wall, less that where it arrives', unit: '1', signed: true, per: ['species'], plain: 'sum' }, [
+  quantity('solutalDensityShift', { symbol: '(drho/rho)_c', name: 'relative density where a species is strongest or at the wall, less that where it arrives', unit: '1', signed: true, ...sum }, [
     way({ needs: ['solutalSlope', 'inletShare', 'wallShare'], value: ({ solutalSlope, inletShare, wallShare }) => solutalSlope * (wallShare - inletShare), formula: 'beta_c (x_w - x_in)', source: definition }),
     way({ needs: ['solutalSlope', 'inletShare'], when: { wallShareGiven: 'no' }, value: ({ solutalSlope, inletShare }) => solutalSlope * inletShare, formula: 'beta_c x_in', source: 'against fluid that is free of it' }),
     way({ needs: ['massFractionInlet', 'massFractionWall', 'speciesMolarMass', 'molarMass'], when: { medium: 'gas' }, value: (of) => Math.log(meanMolarMass(of.massFractionWall, of.speciesMolarMass, of.molarMass) / meanMolarMass(of.massFractionInlet, of.speciesMolarMass, of.molarMass)), formula: 'ln(M_w/M_in), 1/M = Y/M_A + (1 - Y)/M_B', source: 'ideal gas of two components at one temperature and pressure' }),
@@ -68,7 +69,7 @@ export const solutal: Definition[] = [
   quantity('solutalDensityChange', { symbol: 'beta_c dc', name: 'relative density change that a species makes', unit: '1', ...largest }, [
     way({ needs: ['solutalDensityShift'], value: ({ solutalDensityShift }) => Math.abs(solutalDensityShift), formula: '|(drho/rho)_c|', source: definition }),
   ]),
-  quantity('solutalDensityBound', { symbol: '(beta_c dc)_max', name: 'density change that the species make, at most where it is not known', unit: '1', per: ['species'], plain: 'sum' }, [
+  quantity('solutalDensityBound', { symbol: '(beta_c dc)_max', name: 'density change that the species make, at most where it is not known', unit: '1', ...sum }, [
     way({ needs: ['solutalDensityChange'], value: ({ solutalDensityChange }) => solutalDensityChange, formula: 'beta_c dc', source: definition }),
     way({ needs: ['massFractionDifference'], when: { medium: 'liquid' }, as: 'assumed', value: ({ massFractionDifference }) => massFractionDifference, formula: 'dY, beta_c at most 1', source: 'common practice: salts about 0.7, sugars 0.4, most dissolved matter below 1' }),
   ]),

@@ -2,4 +2,4 @@ export type { Column, Need, Reference } from './define.ts';
 export { evaluateReference, referenceNumber, type EvaluatedTable, type EvaluatedValue, type Evaluation } from './evaluate.ts';
 export { readGiven } from './given.ts';
 export { findReference, references } from './registry.ts';
-export { pchip } from './kernels/index.ts';
+export { dispersedConversion, pchip, segregatedConversion } from './kernels/index.ts';

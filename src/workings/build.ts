@@ -104,12 +104,13 @@ export function joinDefinitions(definitions: readonly Definition[], places: Plac
         add(identity(`${q.id}@${target}`));
       } else if (q.plain !== undefined && q.plain !== 'target') add(overPlaces(q.id, copies.map((c) => `${q.id}@${c.join('/')}`), q.plain));
     }
-    const more = added.get(q.id);
+    const own = q.whole !== true || bound.length === 0; // else the number of its places is all it is
+    const more = own ? added.get(q.id) : undefined;
     if (more !== undefined) for (const m of more) {
       const where = m.id.indexOf('@');
       if (where < 0 || (row.length > 0 && m.id.slice(where + 1).split('/').every((part) => row.includes(part)))) m.more.forEach(add);
     }
-    for (let k = 0; k < q.ways.length; k++) add(q.ways[k] as Way);
+    if (own) for (let k = 0; k < q.ways.length; k++) add(q.ways[k] as Way);
     nodes.set(id, { id, about: q, ways: bound, ...(at === undefined ? {} : { at }) });
   };
   const checkWhen = (id: string, when: When, row: readonly string[]): When => {

@@ -92,6 +92,8 @@ export interface QuantityAbout {
   readonly per?: readonly PlaceKind[];
   /** Which copy the plain id is. */
   readonly plain?: 'smallest' | 'largest' | 'target' | 'sum';
+  /** The plain id is known only where every copy is: none may be passed over. */
+  readonly whole?: true;
   /** It may change sign, or is a temperature: its spread adds instead of multiplying. */
   readonly signed?: boolean;
   /** Where the program sets the number and no way gives it: how it is got. */

@@ -86,6 +86,15 @@ describe('decisions on the examples', () => {
     ['sampling-rod', 'turbulence', 'leave-out', 'laminar wake below Re 190'],
     ['lamp-step', 'unsteadiness', 'leave-out', 'steady laminar eddy'],
     ['bead-dryer', 'porous-inertia', 'include', 'the square term of Ergun is the larger one'],
+    ['wet-panel', 'species', 'include', 'the evaporation is the question'],
+    ['wet-panel', 'stefan-flow', 'borderline', 'B 0.087 between 0.02 and 0.1'],
+    ['wet-panel', 'turbulence', 'leave-out', 'Re 37 000 on a plate'],
+    ['wet-panel', 'soret', 'leave-out', '12 K between molecules of like weight'],
+    ['lined-tube', 'species', 'include', 'what dissolves is the question'],
+    ['lined-tube', 'stefan-flow', 'leave-out', 'B 0.003'],
+    ['lined-tube', 'entrance-effects', 'include', 'Gz 23 500: the layer of the acid stays thin'],
+    ['lined-tube', 'dispersion', 'leave-out', 'the tube is resolved across its section'],
+    ['lined-tube', 'reaction', 'leave-out', 'none is named'],
   ] as const)('%s: %s %s (%s)', async (name, effect, verdict, _why) => {
     const on = await planned(name, [], '../../examples');
     expect(on.plan.effects.find((e) => e.id === effect)?.verdict).toBe(verdict);

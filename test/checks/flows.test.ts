@@ -44,6 +44,11 @@ const bound: Readonly<Record<string, Readonly<Record<string, Bind>>>> = {
     'C01-Mo': (of) => pipe({ viscosity: n(of, 'mu'), density: n(of, 'rho'), vapourDensity: n(of, 'rho') - n(of, 'drho'), surfaceTension: n(of, 's') }, 'morton'),
     'C01-Ec': (of) => pipe({ speed: n(of, 'V'), specificHeatCapacity: n(of, 'cp'), temperatureDifference: n(of, 'dT') }, 'eckert'),
     'C01-Na': (of) => got(workingsOf(flow('pipe'), { viscosity: n(of, 'mu'), speed: n(of, 'V'), thermalConductivity: n(of, 'k'), referenceTemperature: 300, pressure: 1e5 }, { viscosity: viscosityFalling(n(of, 'mu'), n(of, 'b')) }), 'nahme'),
+    'C01-Sc': (of) => pipe({ kinematicViscosity: n(of, 'nu'), diffusivity: n(of, 'D') }, 'schmidt'),
+    // A vessel: its volume over the flow is the time in it.
+    'C01-Da1': (of) => pipe({ rateConstant: n(of, 'k'), flowLength: n(of, 'V') / n(of, 'Q'), speed: 1, reactionWhere: 'fluid' }, 'damkohler'),
+    // The book counts on the radius, three times volume over surface.
+    'C01-Thiele': (of) => 3 * pipe({ catalystLength: n(of, 'R') / 3, rateConstant: n(of, 'k'), catalystDiffusivity: n(of, 'D'), reactionOrder: 1, reactionWhere: 'catalyst' }, 'thiele'),
     'C01-St-shed': (of) => pipe({ strouhal: n(of, 'St'), speed: n(of, 'V'), length: n(of, 'D') }, 'sheddingFrequency'),
   },
   C02_internal_flow: {
@@ -107,8 +112,8 @@ const bound: Readonly<Record<string, Readonly<Record<string, Bind>>>> = {
 
 /** Numbers of these topics that are not worked out here, with the reason. */
 const elsewhere: Readonly<Record<string, string>> = {
-  'C01-Sc': 'species groups are not among the flow groups', 'C01-Kn': 'mean free path from a molecule diameter is not built; from viscosity it is',
-  'C01-Da1': 'reactions are not built', 'C01-Thiele': 'reactions are not built', 'C01-Stk': 'particles are not built', 'C01-Ste': 'no latent heat of fusion among the properties',
+  'C01-Kn': 'mean free path from a molecule diameter is not built; from viscosity it is',
+  'C01-Stk': 'particles are not built', 'C01-Ste': 'no latent heat of fusion among the properties',
   'C01-De-dean': 'coil is not built', 'C01-Bm': 'rheology is not built', 'C01-CFL-dt': 'a step limit of the time room', 'C01-Fo-dt': 'a step limit of the time room',
   'C02-wh-oil-hf': 'a head balance by hand: the project asks for pressures, not heads',
   'D03-e-commercial-steel': 'a property of a surface, not of a flow', 'D03-e-drawn-tubing': 'a property of a surface, not of a flow', 'D03-e-riveted-steel': 'a property of a surface, not of a flow', 'D03-e-concrete': 'a property of a surface, not of a flow',

@@ -15,7 +15,7 @@ const read = (text: string): Record<string, unknown> => JSON.parse(text.replaceA
 const half = (printed: string): number => 0.51 * 10 ** -(printed.split('.')[1]?.length ?? 0);
 
 /** Plain arithmetic that the laws share. */
-const helpers = ['between'];
+const helpers = ['between', 'moleculeOf'];
 
 describe('examples in the docstrings', () => {
   it('are there for every correlation', () => {

@@ -154,3 +154,38 @@ describe('others', () => {
     expect(twice(references.map((ref) => ref.id))).toBe(false);
   });
 });
+
+describe('reactors', () => {
+  it('the share left by laminar layers, weighted by flow, is what the closed form leaves', () => {
+    for (const damkohler of [0.1, 1.052, 4]) {
+      // Layers at r stay L/(2 U (1 - r^2)) and carry 2 U (1 - r^2) 2 r dr.
+      const left = integrate((r) => 4 * r * (1 - r * r) * Math.exp(-damkohler / (2 * (1 - r * r))), 0, 1 - 1e-12, 400);
+      expect(value('segregated-laminar-reactor', { damkohler }, 'conversion')).toBeCloseTo(1 - left, 6);
+    }
+  });
+  it('plug flow solves dc/dx = -Da c, a mixed vessel its balance', () => {
+    const [da, h] = [1.7, 1e-4];
+    const left = (x: number): number => 1 - value('plug-flow-reactor', { damkohler: da * x }, 'conversion');
+    expect((left(0.5 + h) - left(0.5 - h)) / (2 * h)).toBeCloseTo(-da * left(0.5), 7);
+    const x = value('plug-flow-reactor', { damkohler: da }, 'conversionMixed');
+    expect(x).toBeCloseTo(da * (1 - x), 12);
+  });
+  it('spreading goes from the mixed vessel to plug flow', () => {
+    const of = (bodenstein: number): number => value('dispersed-reactor', { damkohler: 1.5, bodenstein }, 'conversion');
+    expect(of(1e-6)).toBeCloseTo(1.5 / 2.5, 5);
+    expect(of(1e7)).toBeCloseTo(1 - Math.exp(-1.5), 6);
+    // c/c_PFR = 1 + Da^2/Bo for little spreading.
+    expect((1 - of(1000)) / Math.exp(-1.5)).toBeCloseTo(1 + 1.5 ** 2 / 1000, 4);
+  });
+  it('the flux of a Stefan tube is the same at every height', () => {
+    const [wall, far] = [0.4, 0.1];
+    const given = { massFractionWall: wall, massFractionFar: far };
+    const share = rows('stefan-tube', given, 'share') as [number, number][];
+    const factor = value('stefan-tube', given, 'fluxFactor') * (wall - far);
+    for (const k of [5, 10, 15]) {
+      const [below, here, above] = [share[k - 1], share[k], share[k + 1]] as [[number, number], [number, number], [number, number]];
+      // n (1 - Y) = -rho D dY/dy, in rho D/L.
+      expect(-(above[1] - below[1]) / 0.1 / (1 - here[1])).toBeCloseTo(factor, 4);
+    }
+  });
+});

@@ -64,7 +64,7 @@ describe('evaluation', () => {
     expect(unknownInputs(findReference('graetz-pipe'), ['graets', 'peclet'])).toMatchObject([{ code: 'unknown-input', nearest: 'graetz' }]);
   });
   describe.each(references.map((ref) => [ref.id, ref] as const))('%s', (id, ref) => {
-    const own: Readonly<Record<string, Record<string, number>>> = { 'cylinder-free-stream': { reynolds: 100 }, 'shell-cylinder': { outerRadius: 3 }, 'shell-sphere': { outerRadius: 3 }, 'mixed-convection-pipe': { grashofFluxOverReynolds: 50 } };
+    const own: Readonly<Record<string, Record<string, number>>> = { 'cylinder-free-stream': { reynolds: 100 }, 'shell-cylinder': { outerRadius: 3 }, 'shell-sphere': { outerRadius: 3 }, 'mixed-convection-pipe': { grashofFluxOverReynolds: 50 }, 'stefan-tube': { massFractionWall: 0.4 } };
     const middle = Object.fromEntries(ref.needs.map((need) => [need.id, need.anchors?.[1] ?? need.default ?? (need.range ? Math.sqrt(Math.max(need.range[0], 1e-3) * need.range[1]) : 1.5)]));
     const found = evaluateReference(ref, { ...middle, ...own[id] });
     it('answers within its range, with finite numbers and rising coordinates', () => {

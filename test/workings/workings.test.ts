@@ -90,6 +90,17 @@ describe('places', () => {
     expect(w.get('shear@walls.left/target')).toBe(21);
     expect(w.get('shear@walls.right/worst')).toBe(70);
   });
+  it('keeps the plain id of a whole unknown while one copy is', () => {
+    const load = (whole: boolean): Definition[] => [
+      quantity('own', { symbol: '', name: '', unit: '1', per: ['species'], plain: 'target' }),
+      quantity('all', { symbol: '', name: '', unit: '1', per: ['species'], plain: 'sum', ...(whole ? { whole: true as const } : {}) }, [way({ needs: ['own'], value: ({ own }) => own, formula: 'a', source: '' })]),
+    ];
+    const places = { of: { species: ['species.a', 'species.b'] }, target: { species: 'species.a' } };
+    const one = { 'own@species.a': { value: 2 } };
+    expect(new Workings(joinDefinitions(load(true), places), one).get('all')).toBeUndefined();
+    expect(new Workings(joinDefinitions(load(true), places), { ...one, 'own@species.b': { value: 3 } }).get('all')).toBe(5);
+    expect(new Workings(joinDefinitions(load(false), places), one).get('all')).toBe(2);
+  });
   it('makes the plain id the one at the target for results, the smallest for sizes', () => {
     expect(w.get('shear')).toBe(35);
     expect(w.get('cell')).toBe(1 / 70);

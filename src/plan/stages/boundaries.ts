@@ -52,6 +52,11 @@ function balanceLines(on: Ground): Line[] {
       'Heat: {heatRate} passes the walls by the laws, so that the stream leaves at {outletTemperature} as mean by flow; a run that closes another balance has another heat.',
       'Heat: {heatRate} passes the walls by the laws.',
     ),
+    on.word('has.speciesWall') === 'yes' && firstSaid(on,
+      'Species: {massTransferRate} passes the wall into the fluid by the laws, so that the stream leaves with a mass share of {outletMassFraction}.',
+      'Species: {massTransferRate} passes the wall into the fluid by the laws.',
+    ),
+    on.word('has.fluidReaction') === 'yes' && said(on, 'Reaction: {conversion} of the reactant is gone at the outlet.'),
     on.word('flowClass') === 'internal' && said(on, 'Pressure: {pressureDrop} between inlet and outlet, without the weight of the fluid.'),
   );
 }
@@ -61,6 +66,8 @@ function balances(on: Ground): Table[] {
     through(on) && on.has('massClosure') && ['mass', { id: 'massFlow' }, { id: 'massClosure' }],
     on.word('energySolved') === 'yes' && on.has('heatClosure') && ['heat through the walls', { id: 'heatRate' }, { id: 'heatClosure' }],
     on.word('energySolved') === 'yes' && on.has('outletTemperature') && through(on) && ['temperature at the outlet', { id: 'outletTemperature' }, 'follows from the heat'],
+    on.has('massTransferRate') && on.word('has.speciesWall') === 'yes' && ['species through the walls', { id: 'massTransferRate' }, '0.5 % of the throughput'],
+    on.has('outletMassFraction') && through(on) && ['mass share of the species at the outlet', { id: 'outletMassFraction' }, 'follows from wall and reaction'],
     on.word('flowClass') === 'internal' && on.has('pressureDrop') && ['pressure drop', { id: 'pressureDrop' }, 'follows from the shear of the walls'],
   ];
   const kept = rows.filter((r): r is Cell[] => r !== false);

@@ -22,7 +22,10 @@ const links: readonly Link[] = [
   { from: 'speed', to: 'temperature, by friction', numbers: ['brinkman', 'nahme'], effect: 'viscous-heating', back: 'two-way if viscosity follows' },
   { from: 'walls', to: 'temperature, by radiation', numbers: ['radiationShare'], effect: 'radiation', back: 'two-way' },
   { from: 'solid', to: 'temperature', numbers: ['biotWall', 'biot'], effect: 'conjugate', back: 'two-way' },
-  { from: 'speed', to: 'species', numbers: ['pecletMass'], effect: 'species', back: 'one-way unless the species is heavy' },
+  { from: 'speed', to: 'species', numbers: ['pecletMass'], effect: 'species', back: 'below' },
+  { from: 'species', to: 'speed, by weight and volume', numbers: ['solutalDensityBound'], effect: 'species', back: 'two-way from 0.01, one-way below 0.001' },
+  { from: 'reaction', to: 'species', numbers: ['damkohler'], effect: 'reaction', back: 'two-way' },
+  { from: 'reaction', to: 'temperature', numbers: ['reactionSensitivity'], effect: 'heat-of-reaction', back: 'two-way' },
   { from: 'turbulence', to: 'speed', numbers: ['frictionReynolds'], effect: 'turbulence', back: 'two-way, always' },
   { from: 'weight', to: 'turbulence', numbers: ['gradientRichardson'], effect: 'turbulence-buoyancy', back: 'two-way' },
 ];
@@ -85,6 +88,8 @@ function stageLines(on: Ground): Line[] {
   const stages = [
     'the flow alone',
     on.word('energySolved') === 'yes' && 'energy on the running flow',
+    on.word('has.species') === 'yes' && 'species as passengers of the running flow',
+    on.kept('reaction') && 'the reaction, its constant in steps of ten from 1e-3 of the value',
     (on.kept('variable-viscosity') || on.kept('variable-density') || on.kept('variable-conductivity')) && 'properties that follow the temperature',
     on.kept('buoyancy-driven') && (on.number('rayleigh') ?? 0) > 1e4 ? 'weight in steps from Ra = 1e4 to {rayleigh}, by ten to 1e6, then by three' : on.kept('buoyancy') && (on.has('richardson') ? `weight${(on.number('richardson') ?? 0) > 1 ? ' in steps from Ri = 0.1 to {richardson}, by three to 1, then by two' : ' at once, at Ri = {richardson}'}` : 'weight'),
     on.kept('radiation') && 'radiation, emissivities halved first where its share is above 0.3',

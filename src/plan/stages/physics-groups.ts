@@ -3,7 +3,7 @@ import { plain } from '../say.ts';
 import type { Cell } from '../types.ts';
 
 /** Groups of the flow in the order a reader looks for them; those that decide nothing are told as such. */
-const groups = ['reynolds', 'reynoldsBulk', 'prandtl', 'peclet', 'graetz', 'grashof', 'rayleigh', 'rayleighHeight', 'richardson', 'mach', 'knudsen', 'eckert', 'brinkman', 'biotWall', 'strouhal', 'schmidt', 'lewis', 'womersley', 'froude', 'weber', 'capillary', 'cavitationNumber', 'frictionReynolds', 'stanton'];
+const groups = ['reynolds', 'reynoldsBulk', 'prandtl', 'peclet', 'graetz', 'grashof', 'rayleigh', 'rayleighHeight', 'richardson', 'mach', 'knudsen', 'eckert', 'brinkman', 'biotWall', 'strouhal', 'schmidt', 'lewis', 'pecletMass', 'graetzMass', 'fourierMass', 'sherwood', 'grashofMass', 'damkohler', 'damkohlerDiffusive', 'thiele', 'womersley', 'froude', 'weber', 'capillary', 'cavitationNumber', 'frictionReynolds', 'stanton'];
 
 /**
  * Rows of the table of groups: each number that decides with its limits and the decision, then the groups that only describe.

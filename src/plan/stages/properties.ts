@@ -5,6 +5,7 @@ import { lines, type Ground, type StageResult } from '../ground.ts';
 import { inWords, listed, nameOf, percent } from '../say.ts';
 import { targetSpreads } from '../target-spread.ts';
 import type { Cell, Line, Table } from '../types.ts';
+import { carriedTables } from './properties-species.ts';
 
 /** A property that follows the temperature, and the effect that decides whether it may be held constant. */
 const laws = [
@@ -19,7 +20,7 @@ const others = { gas: ['molarMass', 'gasConstant', 'isentropicExponent', 'speedO
 
 /** Every property at its state, with source, uncertainty and range, and whether it may be held constant. */
 export function properties(on: Ground): StageResult {
-  return { lines: [...stateLines(on), ...variation(on), ...exponents(on), ...effectOnTarget(on), ...phaseLines(on)], tables: [stateTable(on), ...otherTable(on), ...wallTable(on)] };
+  return { lines: [...stateLines(on), ...variation(on), ...exponents(on), ...effectOnTarget(on), ...phaseLines(on)], tables: [stateTable(on), ...otherTable(on), ...wallTable(on), ...carriedTables(on)] };
 }
 
 const heated = (on: Ground): boolean => on.word('energySolved') === 'yes';
