@@ -33,3 +33,6 @@ export function keeps(on: Ground, effect: string): boolean {
 
 /** The option taken for a choice, `none` where there is none. */
 export const chosen = (on: Ground, id: string): string => on.word(`choice.${id}`) ?? on.choice(id)?.chosen ?? 'none';
+
+/** The group that says how weight stands against the stream: by temperature, or where one temperature holds by composition. */
+export const weightGroup = (on: Ground): 'richardson' | 'richardsonMass' => ((on.number('richardson') ?? 0) === 0 && on.has('richardsonMass') ? 'richardsonMass' : 'richardson');

@@ -42,6 +42,10 @@ const groups: Definition[] = [
   quantity('pecletMassGap', { symbol: 'Pe_H', name: 'Peclet number of mass transfer on the gap', unit: '1', ...per }, [
     way({ needs: ['speed', 'gap', 'diffusivity'], value: ({ speed, gap, diffusivity }) => (speed * gap) / diffusivity, formula: 'Pe_H = U gap/D_m', source: 'definition' }),
   ]),
+  quantity('speciesDiffusionTime', { symbol: 't_D', name: 'time in which a species diffuses across the flow', unit: 's', ...per }, [
+    way({ needs: ['gap', 'diffusivity'], when: { flowClass: ['internal', 'enclosure'] }, value: ({ gap, diffusivity }) => (gap / 2) ** 2 / diffusivity, formula: 't_D = (gap/2)^2/D_m', source: 'definition' }),
+    way({ needs: ['concentrationLayerThickness', 'diffusivity'], when: { flowClass: ['body', 'jet'] }, value: ({ concentrationLayerThickness, diffusivity }) => concentrationLayerThickness ** 2 / diffusivity, formula: 't_D = delta_c^2/D_m', source: 'definition' }),
+  ]),
   quantity('fourierMass', { symbol: 'Fo_m', name: 'time in the passage over the time in which a species diffuses across it', unit: '1', ...per }, [
     way({ needs: ['diffusivity', 'flowLength', 'speed', 'gap'], when: { flowClass: 'internal' }, value: ({ diffusivity, flowLength, speed, gap }) => (diffusivity * flowLength) / (speed * (gap / 2) ** 2), formula: 'Fo_m = D_m L_x/(U (gap/2)^2)', source: definition }),
   ]),

@@ -1,5 +1,6 @@
 import { lines, table, type Ground, type StageResult } from '../ground.ts';
 import type { Cell, Check, Line, Table } from '../types.ts';
+import { weightGroup } from '../when.ts';
 import { numberTable } from './number-table.ts';
 
 interface Link {
@@ -91,7 +92,7 @@ function stageLines(on: Ground): Line[] {
     on.word('has.species') === 'yes' && 'species as passengers of the running flow',
     on.kept('reaction') && 'the reaction, its constant in steps of ten from 1e-3 of the value',
     (on.kept('variable-viscosity') || on.kept('variable-density') || on.kept('variable-conductivity')) && 'properties that follow the temperature',
-    on.kept('buoyancy-driven') && (on.number('rayleigh') ?? 0) > 1e4 ? 'weight in steps from Ra = 1e4 to {rayleigh}, by ten to 1e6, then by three' : on.kept('buoyancy') && (on.has('richardson') ? `weight${(on.number('richardson') ?? 0) > 1 ? ' in steps from Ri = 0.1 to {richardson}, by three to 1, then by two' : ' at once, at Ri = {richardson}'}` : 'weight'),
+    on.kept('buoyancy-driven') && (on.number('rayleigh') ?? 0) > 1e4 ? 'weight in steps from Ra = 1e4 to {rayleigh}, by ten to 1e6, then by three' : on.kept('buoyancy') && (on.has(weightGroup(on)) ? `weight${(on.number(weightGroup(on)) ?? 0) > 1 ? ` in steps from Ri = 0.1 to {${weightGroup(on)}}, by three to 1, then by two` : ` at once, at Ri = {${weightGroup(on)}}`}` : 'weight'),
     on.kept('radiation') && 'radiation, emissivities halved first where its share is above 0.3',
     on.kept('conjugate') && 'the walls',
   ].filter((s): s is string => typeof s === 'string');
@@ -104,7 +105,7 @@ function solidLines(on: Ground): Line[] {
   return lines(`Fluid and wall: the ratio of conductances is {biotWall}, so the ${bi <= 1 ? 'fluid takes the temperature and the wall the flux' : 'wall takes the temperature and the fluid the flux'}${Math.abs(Math.log10(Math.max(bi, 1e-9))) < 0.5 ? '; near 1 use a mixed condition on both sides' : ''}. Heat must match across the joint to {balanceTolerance}.`);
 }
 
-const times = ['flowThroughTime', 'crossDiffusionTime', 'freeFallTime', 'kolmogorovTime', 'soundTime', 'imposedTime', 'timeStep'] as const;
+const times = ['flowThroughTime', 'crossDiffusionTime', 'speciesDiffusionTime', 'reactionTime', 'freeFallTime', 'kolmogorovTime', 'soundTime', 'imposedTime', 'timeStep'] as const;
 function timeTable(on: Ground): Table[] {
   return numberTable(on, 'Times, slowest first', times.filter((id) => on.has(id)).sort((a, b) => (on.number(b) ?? 0) - (on.number(a) ?? 0)));
 }

@@ -69,7 +69,8 @@ function startLines(on: Ground): Line[] {
   const steps = [
     'constant properties and first-order convection until residuals have fallen by 1.5 decades',
     'second order for momentum',
-    on.word('energySolved') === 'yes' && `energy${on.word('has.species') === 'yes' ? ' and species' : ''}`,
+    on.word('energySolved') === 'yes' && (on.word('has.species') === 'yes' ? 'energy and species' : 'energy'),
+    on.word('energySolved') !== 'yes' && on.word('has.species') === 'yes' && 'the species',
     (treated === 'rans' || treated === 'hybrid') && 'second order for turbulence and scalars',
     (on.kept('buoyancy') || on.kept('variable-viscosity') || on.kept('variable-density')) && 'coupled effects as under coupling',
     'final relaxation and the full stopping rule',

@@ -1,7 +1,7 @@
 import { lines, table, type Ground, type StageResult } from '../ground.ts';
 import { listed, nameOf } from '../say.ts';
 import type { Cell, Check, Line, Table } from '../types.ts';
-import { chosen, firstSaid, keeps, known, said } from '../when.ts';
+import { chosen, firstSaid, keeps, known, said, weightGroup } from '../when.ts';
 import { boundariesOf } from './boundaries-table.ts';
 import { derived, healthMaps } from './watch-maps.ts';
 
@@ -51,10 +51,11 @@ function monitorLines(on: Ground): Line[] {
 
 function expectedLines(on: Ground): (string | false)[] {
   return [
-    said(on, `Expected${on.word('attached') === 'no' ? ' where it is attached' : ''}: a layer of {boundaryLayerThickness} at the wall${heat(on) && on.has('thermalLayerThickness') ? ', {thermalLayerThickness} for the temperature' : ''}.`),
+    said(on, `Expected${on.word('attached') === 'no' ? ' where it is attached' : ''}: a layer of {boundaryLayerThickness} at the wall${heat(on) && on.has('thermalLayerThickness') ? ', {thermalLayerThickness} for the temperature' : ''}${on.word('has.speciesWall') === 'yes' && on.has('concentrationLayerThickness') ? ', {concentrationLayerThickness} for the species' : ''}.`),
     internal(on) && on.word('separated') !== 'yes' && firstSaid(on, 'Expected: the profile settles over {entranceLength}, then the pressure falls straight, {pressureDrop} over all; largest speed {peakSpeed}.'),
     on.word('separated') === 'yes' && on.word('imposedFlow') === 'yes' && firstSaid(on, 'Expected: the separated eddy closes {reattachmentLength} behind its edge.', 'Expected: a wake of {wakeLength}.'),
     said(on, on.word('separated') === 'yes' && on.has('sheddingFrequency') && chosen(on, 'run-character') === 'transient' ? 'Expected: lift swings with {sheddingFrequency}, drag with twice that.' : ''),
+    on.word('has.species') === 'yes' && firstSaid(on, 'Expected: the species leaves with a mass share of {outletMassFraction} on the mean; no share outside those of inlet and wall.'),
     heat(on) && firstSaid(on, 'Expected: all temperatures between {lowestTemperature} and {highestTemperature}; a cell outside is an error.'),
   ];
 }
@@ -69,7 +70,7 @@ function cutsTable(on: Ground): Table {
     heat(on) && ['surface of the target wall, heat flux', 'is the flux smooth, without marks of the mesh', on.has('wallHeatFlux') ? { id: 'wallHeatFlux' } : on.has('heatRate') ? { id: 'heatRate' } : 'not known'],
     on.word('separated') === 'yes' && on.has('reattachmentLength') && [on.word('flowClass') === 'body' ? 'line through the wake, speed along it' : 'wall shear along the wall behind the edge', 'where does the eddy close: the zero, not the speed in the first cell', { id: 'reattachmentLength' }],
     on.word('flowClass') === 'continuum' && ['pressure along the bed', 'is the fall straight and as steep as the drag law has it', on.has('pressureDrop') ? { id: 'pressureDrop' } : 'not known'],
-    (keeps(on, 'buoyancy') || keeps(on, 'buoyancy-driven')) && ['sections across the flow with vectors in the plane', 'does gravity turn the flow as it should', on.has('richardson') ? { id: 'richardson' } : on.has('rayleigh') ? { id: 'rayleigh' } : 'not known'],
+    (keeps(on, 'buoyancy') || keeps(on, 'buoyancy-driven')) && ['sections across the flow with vectors in the plane', 'does gravity turn the flow as it should', on.has(weightGroup(on)) ? { id: weightGroup(on) } : on.has('rayleigh') ? { id: 'rayleigh' } : 'not known'],
     chosen(on, 'dimension-and-cuts').includes('mirror') && ['pair of points either side of the mirror, in the run of the whole', 'is the cut allowed', 'equal means'],
     boundariesOf(on).some((b) => b.is === 'outlet' || b.is === 'open') && ['outlet and open sides, normal speed', 'does fluid come back', on.has('returningFlow') ? { id: 'returningFlow' } : 'none near the target'],
   ];
