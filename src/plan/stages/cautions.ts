@@ -2,6 +2,7 @@ import { lines, type Ground, type StageResult } from '../ground.ts';
 import { overBudget } from '../budget.ts';
 import { hazardsOf } from '../hazards.ts';
 import { listed, nameOf } from '../say.ts';
+import { keeps, said } from '../when.ts';
 import { outsideOf } from './cautions-range.ts';
 import { trapsOf } from './cautions-traps.ts';
 import type { Check, Line, Table } from '../types.ts';
@@ -21,6 +22,7 @@ export function cautions(on: Ground): StageResult {
       ...lines(
         first.length > 0 && `First of all: ${first.join('; ')}.`,
         unjudged.length > 0 && `Not in these numbers: ${listed(unjudged)}. The case names what they depend on, and no rule judges them yet: the spreads do not hold their effect.`,
+        ...notCounted(on),
         hazards.length > 0 && 'What follows on dangers supports and never replaces qualified judgement, tests and the codes of the place; relief, structure and safety of life are decided by licensed practitioners.',
         ...hazards.map((h) => h.text),
         ...open,
@@ -35,6 +37,14 @@ export function cautions(on: Ground): StageResult {
       ...traps.map((t): Check => ({ id: `trap-${t.id}`, stage: 'cautions', text: t.test })),
     ],
   };
+}
+
+/** Effects that the model carries and the estimates do not hold. */
+function notCounted(on: Ground): (string | false)[] {
+  return [
+    keeps(on, 'heat-of-reaction') && said(on, 'The heat of the reaction is in none of the temperatures here: up to {adiabaticReactionRise} where all of it stays in the fluid.'),
+    on.word('has.speciesWall') === 'yes' && on.word('imposedFlow') === 'yes' && (keeps(on, 'buoyancy') || keeps(on, 'buoyancy-driven')) && said(on, 'The Sherwood number {sherwood} is that of the stream alone: what weight does to it is not counted.'),
+  ];
 }
 
 /** What the whole plan is worth, in the spread of its first target. */
