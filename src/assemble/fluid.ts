@@ -1,6 +1,6 @@
 import type { Case, Entry } from '../case/index.ts';
 import { Problem, type ProblemData } from '../problems/index.ts';
-import { loadMaterial, type Collection, type Material, type State } from '../properties/index.ts';
+import { loadMaterial, mixtureOf, type Collection, type Component, type Material, type State } from '../properties/index.ts';
 import { fluidLaws, type MaterialLaws } from './material-laws.ts';
 
 const assumedPressure = 101325;
@@ -52,9 +52,11 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   if (pressure === undefined) assumed['fluid.pressure'] = assumedPressure;
   if (temperature === undefined) assumed['fluid.temperature'] = assumedTemperature;
   const name = entry.value;
-  const material = placed(entry, on.file, () => loadMaterial(name, materials));
-  const share = on.list('fluid.composition')[0];
-  const composition = share === undefined ? undefined : on.number(`fluid.composition.${share}`);
+  const known = placed(entry, on.file, () => loadMaterial(name, materials));
+  const parts = componentsOf(on);
+  const byComponents = known.takes.includes('components') && parts.length > 0;
+  const material = byComponents ? placed(on.get('fluid.composition') ?? entry, on.file, () => mixtureOf(known, parts, materials)) : known;
+  const composition = byComponents ? undefined : parts[0]?.share;
   const state: State = {
     temperature: meltOf(on, material) ?? temperature ?? assumedTemperature,
     pressure: pressure ?? assumedPressure,
@@ -64,6 +66,14 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   };
   const laws = placed(on.get('fluid.pressure') ?? entry, on.file, () => fluidLaws(material, state));
   return { material, laws, medium: laws.phase === 'liquid' ? 'liquid' : laws.phase === 'solid' ? 'solid' : 'gas', state, assumed };
+}
+
+/** Shares of the components that the case gives, in its order. */
+function componentsOf(on: Case): Component[] {
+  return on.list('fluid.composition').flatMap((name) => {
+    const found = on.get(`fluid.composition.${name}`);
+    return typeof found?.value === 'number' ? [{ name, share: found.value, ...(found.basis === undefined ? {} : { basis: found.basis }) }] : [];
+  });
 }
 
 /** What flows where a solid melts is the melt: its state lies between the melting point and the hottest wall. */

@@ -119,7 +119,7 @@ function* targets(on: Ground): Generator<Contradiction> {
 function* features(on: Ground): Generator<Contradiction> {
   const { case: given, fluid } = on.assembled;
   if (given.has('fluid.humidity') && fluid !== undefined && !fluid.takes.includes('humidity')) yield contradiction(on, 'humidity-not-taken', 'fluid.humidity', { says: `a humidity of ${given.get('fluid.humidity')?.written ?? ''} is given for ${fluid.name}, whose record takes none`, effect: 'it is ignored: density, viscosity and dew point are those of the dry fluid', cure: 'name humid air, or leave the humidity out' });
-  if (given.has('fluid.composition') && fluid !== undefined && !fluid.takes.includes('composition')) yield contradiction(on, 'composition-not-taken', 'fluid.composition', { says: `a composition is given for ${fluid.name}, whose record is of one substance`, effect: 'it is ignored', cure: 'name a mixture that the program knows, or give its properties' });
+  if (given.has('fluid.composition') && fluid !== undefined && !fluid.takes.includes('composition') && !fluid.takes.includes('components')) yield contradiction(on, 'composition-not-taken', 'fluid.composition', { says: `a composition is given for ${fluid.name}, whose record is of one substance`, effect: 'it is ignored', cure: 'name a mixture that the program knows, or give its properties' });
   const gravity = given.number('gravity');
   if (gravity === 0 && given.number('inclination') !== undefined && given.number('inclination') !== 0) yield contradiction(on, 'inclined-in-free-fall', 'inclination', { says: 'an inclination is given and gravity is zero', effect: 'the inclination has nothing to lean on', cure: 'leave one of them out' });
   const density = given.number('fluid.density');

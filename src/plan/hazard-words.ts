@@ -29,7 +29,7 @@ export type Mark = keyof typeof marks;
 export type Where = 'fluid' | 'solute' | 'text';
 
 /**
- * Finds the first word of a mark in a case: in the fluid it flows with, in species and second fluids, in title, purpose and targets.
+ * Finds the first word of a mark in a case: in the fluid it flows with or the marks of its record, in species and second fluids, in title, purpose and targets.
  *
  * @param assembled  the case
  * @param mark       which list
@@ -37,6 +37,8 @@ export type Where = 'fluid' | 'solute' | 'text';
  * @returns          the word as found, lower case; undefined where none stands there
  */
 export function wordOf(assembled: Assembled, mark: Mark, where: readonly Where[]): string | undefined {
+  const { fluid } = assembled;
+  if (fluid !== undefined && where.includes('fluid') && (fluid.record.marks as readonly string[] | undefined)?.includes(mark)) return fluid.name.toLowerCase();
   const text = where.flatMap((w) => textOf(assembled, w)).join(' | ').toLowerCase();
   return marks[mark].find((word) => new RegExp(`(?<![a-z0-9])${word}(?![a-z0-9])`).test(text));
 }

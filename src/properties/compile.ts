@@ -4,10 +4,10 @@ import { Problem, type ProblemData } from '../problems/index.ts';
 import { readBands, readEntry } from './compile-entry.ts';
 import type { Side } from './models/point.ts';
 import { collectionOf, plainName } from './names.ts';
-import { propertyUnits, type Band, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
+import { dangerMarks, propertyUnits, type Band, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
 import { yamlReader, type YamlReader } from './yaml-reader.ts';
 
-const headKeys = ['name', 'formula', 'aliases', 'phaseNames', 'kind', 'phases', 'takes', 'molarMass', 'critical', 'triplePoint', 'about', 'thermodynamics'];
+const headKeys = ['name', 'formula', 'aliases', 'phaseNames', 'kind', 'phases', 'marks', 'takes', 'typical', 'molarMass', 'critical', 'triplePoint', 'about', 'thermodynamics'];
 const derived: readonly string[] = ['kinematicViscosity', 'thermalDiffusivity', 'prandtl', 'molarMass'];
 const recorded = Object.keys(propertyUnits).filter((id) => !derived.includes(id));
 
@@ -51,6 +51,8 @@ export function compileMaterial(text: string, file: string): MaterialRecord {
   }
   const phases = texts('phases');
   for (const phase of phases) if (!['liquid', 'vapour', 'solid'].includes(phase)) reader.complain(['phases'], { code: 'wrong-phase', message: `"${phase}" is not a phase`, expected: 'liquid, vapour or solid' });
+  const marks = texts('marks');
+  for (const mark of marks) if (!(dangerMarks as readonly string[]).includes(mark)) reader.complain(['marks'], { code: 'wrong-mark', message: `"${mark}" is not a mark of danger`, expected: `one of ${dangerMarks.join(', ')}` });
   const record = {
     id: String(name).toLowerCase().replaceAll(' ', '-'),
     name: String(name),
@@ -59,7 +61,9 @@ export function compileMaterial(text: string, file: string): MaterialRecord {
     phaseNames: (isMap(raw['phaseNames']) ? raw['phaseNames'] : {}) as { [name: string]: Side },
     kind: kind as 'fluid' | 'solid',
     phases: (phases.length > 0 ? phases : kind === 'solid' ? ['solid'] : ['liquid', 'vapour']) as (Side | 'solid')[],
+    ...(marks.length > 0 ? { marks: marks as NonNullable<MaterialRecord['marks']> } : {}),
     takes: texts('takes') as MaterialRecord['takes'][number][],
+    ...(raw['typical'] === undefined ? {} : { typical: reader.quantity(['typical'], raw['typical'], '1') }),
     ...(raw['molarMass'] === undefined ? {} : { molarMass: reader.quantity(['molarMass'], raw['molarMass'], 'kg/mol') }),
     ...group('critical', { temperature: 'K', pressure: 'Pa', density: 'kg/m^3' }),
     ...group('triplePoint', { temperature: 'K', pressure: 'Pa' }),

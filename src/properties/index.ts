@@ -3,6 +3,7 @@ export { compileMaterial, compileMaterials } from './compile.ts';
 export { stateOf } from './complete-state.ts';
 export { type Law, laws, type Laws } from './laws.ts';
 export type { Material } from './material.ts';
+export { type Component, mixtureOf } from './mixture.ts';
 export { propertyNames } from './names-of-properties.ts';
 export { parseRange, parseState, type StateRange } from './parse-state.ts';
 export { phaseAt, type PhaseAt, type Saturation, saturationOf } from './phase.ts';

@@ -23,7 +23,7 @@ export interface Material {
   readonly triple?: { readonly temperature: number; readonly pressure: number };
   /** At atmospheric pressure [K]. */
   readonly meltingTemperature?: number;
-  readonly takes: readonly ('humidity' | 'composition' | 'salinity')[];
+  readonly takes: readonly ('humidity' | 'composition' | 'components')[];
   /** Ids of the properties that it has in some phase. */
   readonly properties: readonly PropertyId[];
   /** The phase that the name it was asked by stands for (steam). */
@@ -88,7 +88,8 @@ function engineOf(record: MaterialRecord, collection: Collection): MaterialEngin
         const entry = record.thermodynamics;
         const model = entry && equationModels[entry.model];
         if (entry === undefined || model === undefined) throw new Error(`${record.id} has no equation of state`);
-        const partners = (model.partners ?? []).map((id) => engineOf(partner(collection, id), collection));
+        const named = typeof model.partners === 'function' ? model.partners(entry.constants as never) : (model.partners ?? []);
+        const partners = named.map((id) => engineOf(partner(collection, id), collection));
         equation = model.make(entry.constants as never, partners, () => composition);
       }
       return equation;

@@ -1,6 +1,7 @@
 import { nearestName, Problem } from '../problems/index.ts';
 import { dimensionOf, readQuantity, sameDimension, type Quantity } from '../units/index.ts';
 import type { Phase } from './record.ts';
+import type { Component } from './mixture.ts';
 import type { StateText } from './state.ts';
 
 /** A state text with its ranges: what `--over` takes. */
@@ -66,9 +67,17 @@ function isTemperature(text: string): boolean {
   }
 }
 
+/** A component of a mixture with its share: `oxygen 21 % mol` or `21 % mol oxygen`. */
+function componentIn(text: string): { readonly name: string; readonly share: string } | undefined {
+  const after = /^([A-Za-z][A-Za-z0-9 ()-]*?)\s+([\d.]+(?:e-?\d+)?\s*(?:%|ppm).*)$/.exec(text);
+  if (after !== null) return { name: after[1] as string, share: after[2] as string };
+  const before = /^([\d.]+(?:e-?\d+)?\s*(?:%|ppm)(?:\s*(?:by\s+)?(?:mol|mole|mass|vol|volume)(?=\s))?)\s+(?:of\s+)?([A-Za-z][A-Za-z0-9 ()-]*)$/.exec(text);
+  return before === null || /^(?:mol|mole|mass|vol|volume)$/.test(before[2] as string) ? undefined : { name: before[2] as string, share: before[1] as string };
+}
+
 /**
  * A state from text: temperature and pressure in any order, or one of them with `saturated liquid` or `saturated vapour`;
- * `humidity 60 %`, `composition 30 % mass`; a phase (`liquid`, `vapour`). One of the numbers may be a range `20 degC .. 90 degC`.
+ * `humidity 60 %`, `composition 30 % mass` (or `salinity 35 g/kg`), components of a mixture of gases (`oxygen 21 % mol`); a phase (`liquid`, `vapour`). One of the numbers may be a range `20 degC .. 90 degC`.
  *
  * @param text  parts separated by commas
  * @returns     the state as said, in SI, with the range that one part may have; `stateOf` completes it
@@ -77,6 +86,7 @@ function isTemperature(text: string): boolean {
  */
 export function parseRange(text: string): StateRange {
   const out: { -readonly [key in keyof StateRange]?: StateRange[key] } & { assumed: string[] } = { assumed: [] };
+  const components: Component[] = [];
   const put = (part: Part, key: 'temperature' | 'pressure' | 'humidity' | 'composition', found: Quantity): void => {
     if (out[key] !== undefined || out.over?.of === key) throw fault(part, 'said-twice', `the state names its ${key} twice`, `one ${key}`);
     if (found.spread !== undefined) throw fault(part, 'unreadable-state', `"${part.text}": a state has no spread`, shown);
@@ -88,7 +98,8 @@ export function parseRange(text: string): StateRange {
   if (text.length > 300) throw new Problem({ code: 'unreadable-state', message: 'the state is longer than 300 characters', expected: shown });
   for (const part of partsOf(text)) {
     const low = part.text.toLowerCase();
-    const named = /^(relative humidity|humidity|composition)\s+(.*)$/.exec(low);
+    const named = /^(relative humidity|humidity|composition|salinity)\s+(.*)$/.exec(low);
+    const component = named === null ? componentIn(part.text) : undefined;
     if (low === '') throw fault(part, 'unreadable-state', 'the state has an empty part', shown);
     if (saturated[low] !== undefined || phases[low] !== undefined) {
       if (out.saturated !== undefined || out.phase !== undefined) throw fault(part, 'said-twice', 'the state names its phase twice', 'one phase');
@@ -97,10 +108,14 @@ export function parseRange(text: string): StateRange {
       if (side !== undefined) out.saturated = side;
       if (phase !== undefined) out.phase = phase;
     } else if (named !== null) {
-      const key = named[1] === 'composition' ? 'composition' : 'humidity';
+      const key = named[1] === 'composition' || named[1] === 'salinity' ? 'composition' : 'humidity';
       const found = read(part, part.text.slice(part.text.length - (named[2] ?? '').length), { unit: '1', kind: 'fraction', name: key === 'humidity' ? 'relative humidity' : 'share' });
       if (key === 'composition' && found.basis !== undefined && found.basis !== 'mass') throw fault(part, 'wrong-basis', `"${part.text}": the composition is a share by mass here`, 'composition 30 % mass');
       put(part, key, found);
+    } else if (component !== undefined) {
+      const found = read(part, component.share, { unit: '1', kind: 'fraction', name: `share of ${component.name}` });
+      if (found.range !== undefined || found.spread !== undefined) throw fault(part, 'unreadable-state', `"${part.text}": a component has one share`, 'oxygen 21 % mol');
+      components.push({ name: component.name, share: found.value, ...(found.basis === undefined ? {} : { basis: found.basis }) });
     } else if (isTemperature(part.text)) put(part, 'temperature', read(part, part.text, { unit: 'K', kind: 'temperature' }));
     else if (/^[-+.\d]/.test(part.text)) put(part, 'pressure', read(part, part.text, { unit: 'Pa', kind: 'pressure' }));
     else {
@@ -108,7 +123,7 @@ export function parseRange(text: string): StateRange {
       throw fault(part, 'unreadable-state', `"${part.text}" is no part of a state`, shown, nearestName(low, words));
     }
   }
-  return { ...out, over: out.over };
+  return { ...out, ...(components.length === 0 ? {} : { components }), over: out.over };
 }
 
 /**

@@ -1,6 +1,7 @@
 import { Problem } from '../problems/index.ts';
 import { fromEquation, inside, insideAny, type Material } from './material.ts';
 import type { Side } from './models/point.ts';
+import { isEmptyMixture } from './mixture.ts';
 import { takenPhase } from './phase.ts';
 import type { Band, Box, Entry, Phase, PropertyId } from './record.ts';
 import type { Sample } from './sample.ts';
@@ -44,14 +45,25 @@ const ofSubstance: readonly string[] = ['vapourPressure', 'saturationTemperature
 export function takeState(material: Material, state: State): TakenState {
   const x = shareOf(material, state);
   const taken = takenPhase(material, state);
-  return { sample: { T: state.temperature, p: state.pressure, side: taken.side === 'solid' ? 'liquid' : taken.side, x }, phase: taken.phase, solid: taken.side === 'solid', flags: taken.flags };
+  const sample: Sample = { T: state.temperature, p: state.pressure, side: taken.side === 'solid' ? 'liquid' : taken.side, x };
+  const wet = dewFlag(material, sample);
+  return { sample, phase: taken.phase, solid: taken.side === 'solid', flags: wet === undefined ? taken.flags : [...taken.flags, wet] };
+}
+
+/** A gas by components is carried as a gas below its dew point, and says so. */
+function dewFlag(material: Material, sample: Sample): string | undefined {
+  const [entry] = material.record.properties['saturationTemperature'] ?? [];
+  if (entry === undefined || !material.takes.includes('components')) return undefined;
+  const dew = material.engine.evaluate(entry, sample);
+  return sample.T < dew ? `${material.name} is below its dew point of ${Number(dew.toPrecision(5))} K: water condenses from it` : undefined;
 }
 
 function shareOf(material: Material, state: State): number {
-  const needs = material.takes.find((what) => what !== 'salinity');
+  if (isEmptyMixture(material)) throw new Problem({ code: 'missing-composition', message: `${material.name} needs its components`, expected: 'their shares, for example nitrogen 79 % mol, oxygen 21 % mol' });
+  const needs = material.takes.find((what) => what !== 'components');
   if (needs === undefined) return 0;
   const given = needs === 'humidity' ? state.humidity : state.composition;
-  if (given === undefined) throw new Problem({ code: `missing-${needs}`, message: `${material.name} needs its ${needs}`, expected: needs === 'humidity' ? 'humidity 60 %' : 'composition 30 % mass' });
+  if (given === undefined) throw new Problem({ code: `missing-${needs}`, message: `${material.name} needs its ${needs}`, expected: needs === 'humidity' ? 'humidity 60 %' : `composition ${material.record.typical === undefined ? 30 : Number((material.record.typical * 100).toPrecision(4))} % mass${material.about === undefined ? '' : ` (${material.about})`}` });
   if (!(given >= 0 && given <= 1)) throw new Problem({ code: `wrong-${needs}`, message: `${needs} is ${Number((given * 100).toPrecision(4))} %`, expected: 'a share from 0 % to 100 %' });
   return given;
 }

@@ -75,6 +75,9 @@ export interface ThermodynamicsEntry extends Omit<Entry, 'uncertainty'> {
   readonly uncertainty: { readonly [property: string]: readonly Band[] };
 }
 
+/** How a fluid can hurt, whatever the case: `inert` displaces air, `oxygen` feeds a fire. */
+export const dangerMarks = ['flammable', 'toxic', 'inert', 'oxygen', 'hydrogen', 'carbonDioxide', 'cryogen', 'oil', 'dust', 'liquidMetal', 'moltenSalt', 'medical', 'hygiene'] as const;
+
 /** A material as the build stores it: numbers in SI. */
 export interface MaterialRecord {
   readonly id: string;
@@ -86,7 +89,10 @@ export interface MaterialRecord {
   readonly kind: 'fluid' | 'solid';
   /** Phases that the record covers. */
   readonly phases: readonly (Side | 'solid')[];
-  readonly takes: readonly ('humidity' | 'composition' | 'salinity')[];
+  readonly takes: readonly ('humidity' | 'composition' | 'components')[];
+  readonly marks?: readonly (typeof dangerMarks)[number][];
+  /** The share most often met, for the message where none is given. */
+  readonly typical?: number;
   readonly molarMass?: number;
   readonly critical?: { readonly temperature: number; readonly pressure: number; readonly density: number };
   readonly triplePoint?: { readonly temperature: number; readonly pressure: number };

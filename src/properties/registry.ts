@@ -1,9 +1,13 @@
 import { carbonDioxideConductivity, carbonDioxideViscosity, type CarbonDioxideConductivityConstants, type CarbonDioxideViscosityConstants } from './models/co2-transport.ts';
 import { helmholtz, type HelmholtzConstants } from './models/helmholtz.ts';
-import { humidAir, type HumidAir } from './models/humid-air.ts';
+import * as aqueous from './models/aqueous.ts';
+import { food } from './models/food.ts';
+import { gasMixture, type GasMixture } from './models/gas-mixture.ts';
+import { humidAir } from './models/humid-air.ts';
 import { if97, type WaterConstants } from './models/if97.ts';
 import * as laws from './models/laws.ts';
 import { lineOf } from './models/point.ts';
+import { seaWater, type SeaWaterConstants } from './models/sea-water.ts';
 import { lemmonJacobsenConductivity, lemmonJacobsenViscosity, type GasConductivityConstants, type GasViscosityConstants } from './models/gas-transport.ts';
 import { waterConductivity, waterCriticalFactor, waterViscosity, type WaterConductivityConstants, type WaterViscosityConstants } from './models/water-transport.ts';
 import type { EquationModel, PropertyModel, Sample } from './sample.ts';
@@ -49,6 +53,16 @@ export function boilingTemperature(pressure: (T: number) => number, p: number, f
   return 1 / u;
 }
 
+const ofShare = (constants: readonly string[], law: (c: never) => (T: number, share: number) => number): PropertyModel => ({
+  constants,
+  make(c) {
+    const f = law(c);
+    return (s) => f(s.T, s.x);
+  },
+});
+
+const foodParts = ['water?', 'protein?', 'fat?', 'carbohydrate?', 'fibre?', 'ash?'];
+
 /** Correlations by the name that records use. */
 export const propertyModels: { readonly [name: string]: PropertyModel } = {
   constant: { constants: ['value'], make: (c: { value: number }) => () => c.value },
@@ -69,7 +83,36 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
       return (s) => value(Number.isNaN(s.T) ? c.origin : s.T, s.x);
     },
   },
+  'aqueous-density': ofShare(['terms'], aqueous.solutionDensity),
+  'aqueous-viscosity': ofShare(['terms'], aqueous.solutionViscosity),
+  'aqueous-heat-capacity': ofShare(['terms'], aqueous.solutionHeatCapacity),
+  'aqueous-conductivity': {
+    constants: ['contribution', 'molarMass'],
+    make: (c: { contribution: number; molarMass: number }, engine) => {
+      const conductivity = aqueous.solutionConductivity(c, (T, x) => engine.value('density', { T, p: 101325, side: 'liquid', x }));
+      return (s) => conductivity(s.T, s.x);
+    },
+  },
+  'food-density': ofShare(foodParts, (c) => food(c).density),
+  'food-conductivity': ofShare(foodParts, (c) => food(c).conductivity),
+  'food-heat-capacity': ofShare(foodParts, (c) => food(c).heat),
+  'glycerol-viscosity': ofShare([], () => aqueous.glycerolViscosity),
+  'lowered-vapour-pressure': {
+    constants: ['factor', 'temperature', 'pressure', 'terms'],
+    make(c: { factor: number } & Parameters<typeof laws.saturationPowers>[0]) {
+      const pressure = aqueous.loweredVapourPressure(c, laws.saturationPowers(c));
+      return (s) => pressure(s.T, s.x);
+    },
+  },
   'wiedemann-franz': { constants: ['lorenz'], make: (c: { lorenz: number }, engine) => (s) => engine.value('thermalConductivity', s) / (c.lorenz * s.T) },
+  power: ofTemperature(['value', 'exponent', 'gives?', 'argument?'], laws.power),
+  'kinematic-vogel': {
+    constants: ['A', 'B', 'C', 'gives?'],
+    make(c: Parameters<typeof laws.vogel>[0], engine) {
+      const nu = laws.vogel(c);
+      return (s) => nu(s.T) * engine.value('density', s);
+    },
+  },
   walther: {
     constants: ['T1', 'nu1', 'T2', 'nu2'],
     make(c: Parameters<typeof laws.walther>[0], engine) {
@@ -143,9 +186,9 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
       };
     },
   },
-  'mixture-viscosity': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as HumidAir).viscosity(s.T, s.p) },
-  'mixture-conductivity': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as HumidAir).conductivity(s.T, s.p) },
-  'dew-point': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as HumidAir).dewPoint(s.T, s.p) },
+  'mixture-viscosity': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as GasMixture).viscosity(s.T, s.p) },
+  'mixture-conductivity': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as GasMixture).conductivity(s.T, s.p) },
+  'dew-point': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as GasMixture).dewPoint(s.T, s.p) },
   'saturation-pressure': { constants: [], make: (_c, engine) => (s) => engine.saturation(s.T) },
   'saturation-temperature': {
     constants: [],
@@ -173,5 +216,7 @@ export const equationModels: { readonly [name: string]: EquationModel } = {
     make: (c: WaterConstants) => if97(c),
   },
   'humid-air': { constants: ['cross'], partners: ['air', 'water'], make: (c: Parameters<typeof humidAir>[0], partners, x) => humidAir(c, partners, x) },
+  'sea-water': { constants: ['water', 'saline', 'density', 'heatCapacity'], partners: ['water'], make: (c: SeaWaterConstants, partners, x) => seaWater(c, partners, x) },
+  'gas-mixture': { constants: ['shares'], partners: (c: { shares: object }) => Object.keys(c.shares), make: (c: Parameters<typeof gasMixture>[0], partners) => gasMixture(c, partners) },
   helmholtz: { constants: ['temperature', 'density', 'gasConstant', 'densest', 'ideal', 'residual', 'saturation?'], make: (c: HelmholtzConstants) => helmholtz(c) },
 };

@@ -35,9 +35,9 @@ export interface PropertyModel {
   make(constants: never, engine: Engine): (sample: Sample) => number;
 }
 
-/** One named equation of state. `partners` are other materials it is made of. */
+/** One named equation of state. `partners` are other materials it is made of, by id. */
 export interface EquationModel {
   readonly constants: readonly string[];
-  readonly partners?: readonly string[];
+  readonly partners?: readonly string[] | ((constants: never) => readonly string[]);
   make(constants: never, partners: readonly Engine[], x: () => number): EquationOfState;
 }

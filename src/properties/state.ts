@@ -1,4 +1,5 @@
 import type { Side } from './models/point.ts';
+import type { Component } from './mixture.ts';
 import type { Phase } from './record.ts';
 
 /** A state as it is asked for. */
@@ -21,4 +22,6 @@ export interface StateText extends Omit<State, 'temperature' | 'pressure' | 'pha
   readonly pressure?: number;
   readonly phase?: Phase;
   readonly saturated?: Side;
+  /** Components of a mixture of gases, for `mixtureOf`. */
+  readonly components?: readonly Component[];
 }

@@ -38,7 +38,9 @@ describe('names', () => {
 
   it('names the nearest, or the candidates', () => {
     expect(problemsOf(() => loadMaterial('watr'))[0]).toMatchObject({ code: 'unknown-material', nearest: 'water' });
-    expect(problemsOf(() => loadMaterial('oil'))[0]).toMatchObject({ code: 'ambiguous-material', expected: 'one of engine oil, heat-transfer oil, light oil' });
+    const oils = problemsOf(() => loadMaterial('oil'))[0];
+    expect(oils?.code).toBe('ambiguous-material');
+    for (const name of ['engine oil', 'heat-transfer oil', 'light oil', 'lubricating oil ISO VG 46']) expect(oils?.expected).toContain(name);
     expect(problemsOf(() => loadMaterial('unobtainium'))[0]?.expected).toContain('air, alumina');
     for (const name of ['__proto__', 'constructor', 'toString', '']) expect(problemsOf(() => loadMaterial(name))[0]?.code).toBe('unknown-material');
   });

@@ -1,6 +1,7 @@
 import { Problem } from '../../problems/index.ts';
 import type { Engine, Sample } from '../sample.ts';
-import type { EquationOfState, Point } from './point.ts';
+import { mixedTransport, type GasMixture } from './gas-mixture.ts';
+import type { Point } from './point.ts';
 
 const R = 8.31446261815324;
 
@@ -31,12 +32,8 @@ export interface MoistAir {
 }
 
 /** Equation of state of humid air, with what belongs to the mixture alone. */
-export interface HumidAir extends EquationOfState {
+export interface HumidAir extends GasMixture {
   moist(T: number, p: number, humidity: number): MoistAir;
-  viscosity(T: number, p: number): number;
-  conductivity(T: number, p: number): number;
-  /** Temperature [K] at which the same water content saturates. */
-  dewPoint(T: number, p: number): number;
 }
 
 /**
@@ -122,11 +119,7 @@ export function humidAir(c: { cross: readonly (readonly number[])[] }, partners:
     const x = moist(T, p, humidity()).water;
     return { x, a: { T, p, side: 'vapour', x: 0 }, w: { T, p: Math.max(x * p, 1), side: 'vapour', x: 0 } };
   };
-  /** Mixing rule shared by viscosity and conductivity: each part weakened by collisions with the other. */
-  const mix = (x: number, ya: number, yw: number, mua: number, muw: number): number => {
-    const phi = (mi: number, mj: number, Mi: number, Mj: number): number => (1 + Math.sqrt(mi / mj) * (Mj / Mi) ** 0.25) ** 2 / Math.sqrt(8 * (1 + Mi / Mj));
-    return ((1 - x) * ya) / (1 - x + x * phi(mua, muw, Ma, Mw)) + (x * yw) / (x + (1 - x) * phi(muw, mua, Mw, Ma));
-  };
+  const mix = (x: number, ya: number, yw: number, mua: number, muw: number): number => mixedTransport([{ share: 1 - x, molarMass: Ma, viscosity: mua, value: ya }, { share: x, molarMass: Mw, viscosity: muw, value: yw }]);
   return {
     get gasConstant() {
       return R / last.molarMass;

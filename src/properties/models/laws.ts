@@ -24,6 +24,9 @@ export const powers = (c: Scaled & { terms: readonly (readonly number[])[] }) =>
   return toSI(c, y);
 };
 
+/** y = value x^exponent. */
+export const power = (c: Scaled & { value: number; exponent: number }) => (T: number): number => toSI(c, c.value * inUnit(c, T) ** c.exponent);
+
 /** ln y = sum n x^e + k ln x over rows [n, e]. */
 export const logPowers = (c: Scaled & { terms: readonly (readonly number[])[]; log?: number }) => (T: number): number => {
   const x = inUnit(c, T);

@@ -1,0 +1,81 @@
+"""Writes a material record as the YAML that materials/ holds: short maps in one line, lists of rows in one line."""
+import os
+
+FOLDER = os.path.join(os.path.dirname(os.path.abspath(__file__)), '..', '..', 'materials')
+BARE = set('abcdefghijklmnopqrstuvwxyzABCDEFGHIJKLMNOPQRSTUVWXYZ0123456789 ._-/()^*%+')
+
+
+def scalar(x):
+    if isinstance(x, bool):
+        return 'true' if x else 'false'
+    if isinstance(x, float):
+        return repr(int(x)) if x == int(x) and abs(x) < 1e15 else repr(x)
+    if isinstance(x, int):
+        return str(x)
+    plain = all(c in BARE for c in x) and x[:1] not in '-%*' and not x.endswith(' ')
+    return x if plain else "'" + x.replace("'", "''") + "'"
+
+
+def flow(x):
+    if isinstance(x, dict):
+        return '{ ' + ', '.join(f'{k}: {flow(v)}' for k, v in x.items()) + ' }' if x else '{}'
+    if isinstance(x, (list, tuple)):
+        return '[' + ', '.join(flow(v) for v in x) + ']'
+    return scalar(x)
+
+
+def text_of(value):
+    """A sentence for the end of a line: quoted where YAML would read it as something else."""
+    return "'" + value.replace("'", "''") + "'" if ': ' in value or ' #' in value or value[:1] in "'\"[{&*!|>%@`#-" else value
+
+
+def entry(e, indent):
+    pad = ' ' * indent
+    lines = []
+    for key in ('model', 'phase', 'surface', 'range', 'uncertainty', 'source', 'notes', 'checks', 'constants'):
+        if key not in e:
+            continue
+        v = e[key]
+        if key in ('source', 'notes'):
+            lines.append(f'{pad}{key}: {text_of(v)}')
+        elif key == 'checks' or (key in ('uncertainty', 'range') and isinstance(v, list)):
+            lines.append(f'{pad}{key}:')
+            lines += [f'{pad}  - {flow(one)}' for one in v]
+        elif key == 'uncertainty' and isinstance(v, dict):
+            lines.append(f'{pad}{key}:')
+            for name, bands in v.items():
+                lines.append(f'{pad}  {name}:')
+                lines += [f'{pad}    - {flow(one)}' for one in bands]
+        else:
+            lines.append(f'{pad}{key}: {flow(v)}')
+    return lines
+
+
+HEAD = ('name', 'formula', 'aliases', 'kind', 'phases', 'takes', 'typical', 'molarMass', 'about', 'marks')
+
+
+def write(record, made_by):
+    """Writes one record; `made_by` names the script and its data in the first line."""
+    lines = [f'# Made by scripts/materials/{made_by}']
+    for key in HEAD:
+        if key in record:
+            lines.append(f'{key}: {text_of(record[key]) if key == "about" else flow(record[key])}')
+    for key, e in record.items():
+        if key in HEAD:
+            continue
+        lines += ['', f'{key}:']
+        if isinstance(e, list):
+            for one in e:
+                body = entry(one, 4)
+                lines.append('  - ' + body[0].strip())
+                lines += body[1:]
+        else:
+            lines += entry(e, 2)
+    name = record['name'].replace(' ', '-').replace('/', '-').replace('(', '').replace(')', '') + '.yaml'
+    with open(os.path.join(FOLDER, name), 'w') as out:
+        out.write('\n'.join(lines) + '\n')
+    return name
+
+
+def K(low, high):
+    return [f'{low:g} K' if low % 1 else f'{int(low)} K', f'{high:g} K' if high % 1 else f'{int(high)} K']
