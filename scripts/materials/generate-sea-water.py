@@ -55,6 +55,8 @@ write({
         'notes': 'above 40 degC or 4.2 % the speed of sound is an estimate from the compressibility of water',
         'checks': [
             {'property': 'density', 'at': {'T': '25 degC', 'p': '101325 Pa', 'composition': 0.04}, 'expect': '1026.982 kg/m^3', 'within': '0.001 %', 'source': 'IOC, SCOR and IAPSO, Manuals and Guides 56 (2010), evaluated'},
+            {'property': 'density', 'at': {'T': '278.1488 K', 'p': '100.101325 MPa', 'composition': 0.03516504}, 'expect': '1069.48914 kg/m^3', 'within': '0.002 %', 'source': 'Fofonoff and Millard, Unesco Tech. Pap. Mar. Sci. 44 (1983), EOS-80'},
+            {'property': 'density', 'at': {'T': '298.144 K', 'p': '100.101325 MPa', 'composition': 0.03516504}, 'expect': '1062.53817 kg/m^3', 'within': '0.002 %', 'source': 'Fofonoff and Millard, Unesco Tech. Pap. Mar. Sci. 44 (1983), EOS-80'},
         ],
         'constants': {'water': water_rows, 'saline': saline_rows, 'density': transport('density', 'kg/m^3', {}), 'heatCapacity': transport('specific_heat', 'J/(kg K)', {})},
     },

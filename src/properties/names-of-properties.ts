@@ -23,4 +23,6 @@ export const propertyNames: { readonly [id in PropertyId]: string } = {
   molarMass: 'molar mass',
   electricalConductivity: 'electrical conductivity',
   emissivity: 'emissivity',
+  voidFraction: 'void fraction',
+  permeability: 'permeability',
 };

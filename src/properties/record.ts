@@ -23,6 +23,8 @@ export const propertyUnits = {
   molarMass: 'kg/mol',
   electricalConductivity: 'S/m',
   emissivity: '1',
+  voidFraction: '1',
+  permeability: 'm^2',
 } as const;
 
 export type PropertyId = keyof typeof propertyUnits;

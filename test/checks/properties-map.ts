@@ -41,7 +41,7 @@ const plainViscosity = waterViscosity(constants('viscosity') as WaterViscosityCo
 const plainConductivity = waterConductivity(constants('thermalConductivity') as WaterConductivityConstants, plainViscosity);
 const names: { readonly [short: string]: PropertyId } = { rho: 'density', k: 'thermalConductivity', mu: 'viscosity', cp: 'specificHeatCapacity', w: 'speedOfSound', Pr: 'prandtl', alpha: 'thermalDiffusivity', beta: 'thermalExpansion', nu: 'kinematicViscosity', Rho: 'density', Cp: 'specificHeatCapacity', Cond: 'thermalConductivity', Mu: 'viscosity', ps: 'vapourPressure' };
 const property = (short: string | undefined): PropertyId => names[short ?? ''] ?? 'density';
-const materials: { readonly [word: string]: string } = { CarbonDioxide: 'carbon dioxide', carbondioxide: 'carbon dioxide', engineoil: 'engine oil', ethyleneglycol: 'ethylene glycol', aluminiumpure: 'aluminium', copperpure: 'copper', ironpure: 'iron', nickelpure: 'nickel', stainlesssteelAISI304: 'stainless steel', stainlesssteelAISI316: 'stainless steel 316', 'aluminiumalloy2024-T6': 'aluminium alloy 2024', cartridgebrass: 'cartridge brass', 'InconelX-750': 'nickel alloy X-750', brickcommon: 'common brick', glassPyrex: 'borosilicate glass', sand: 'dry sand', iceat273K: 'ice', bismuth: 'lead-bismuth eutectic', na: 'sodium', solarsalt: 'solar salt', flibe: 'FLiBe', Ethylene: 'ethylene glycol-water', Propylene: 'propylene glycol-water' };
+const materials: { readonly [word: string]: string } = { CarbonDioxide: 'carbon dioxide', carbondioxide: 'carbon dioxide', engineoil: 'engine oil', ethyleneglycol: 'ethylene glycol', aluminiumpure: 'aluminium', copperpure: 'copper', ironpure: 'iron', nickelpure: 'nickel', stainlesssteelAISI304: 'stainless steel', stainlesssteelAISI316: 'stainless steel 316', 'aluminiumalloy2024-T6': 'aluminium alloy 2024', cartridgebrass: 'cartridge brass', 'InconelX-750': 'nickel alloy X-750', brickcommon: 'common brick', glassPyrex: 'borosilicate glass', sand: 'dry sand', iceat273K: 'ice', bismuth: 'lead-bismuth eutectic', lead: 'solid lead', paraffin: 'paraffin wax', NaK22: 'sodium-potassium 22-78', na: 'sodium', solarsalt: 'solar salt', flibe: 'FLiBe', Ethylene: 'ethylene glycol-water', Propylene: 'propylene glycol-water' };
 const material = (word: string | undefined): string => materials[word ?? ''] ?? (word ?? '').toLowerCase();
 const T = (entry: CheckEntry): number => given(entry, 'T');
 
@@ -93,8 +93,12 @@ export const bindings: readonly (readonly [RegExp, Binding])[] = [
   [/^A06-inc-(\w+)-(Nitrogen|Oxygen|CarbonDioxide)$/, (entry, [, what, gas]) => of(material(gas), property(what), { temperature: T(entry) })],
   [/^A06-eos-(\w+)-(Nitrogen|Oxygen|CarbonDioxide|Argon)-/, (entry, [, what, gas]) => of(material(gas), property(what), { temperature: T(entry), pressure: given(entry, 'p') })],
   [/^A06-incA5-(\w+)-(engineoil|ethyleneglycol|mercury)-/, (entry, [, what, liquid]) => of(material(liquid), property(what), { temperature: T(entry) })],
-  [/^A07-(\w+)-(?!lead|soil|paraffin)(.+)$/, (entry, [, what, solid]) => of(material(solid), property(what), { temperature: T(entry) })],
-  [/^A08-(lead|bismuth|na|solarsalt|flibe)-(\w+)-/, (entry, [, metal, what]) => of(material(metal), property(what), { temperature: T(entry), pressure: 1e6 })],
+  [/^A07-(\w+)-(.+)$/, (entry, [, what, solid]) => of(material(solid), property(what), { temperature: T(entry) })],
+  [/^A05-teos-(rho|cp|c|beta)-/, (entry, [, what]) => of('sea water', what === 'c' ? 'speedOfSound' : property(what), { temperature: T(entry), pressure: 101325 + given(entry, 'pd'), composition: given(entry, 'SA') / 1000 })],
+  [/^A05-shq-(?:tab-)?(mu|k|cp)/, (entry, [, what]) => of('sea water', property(what), { temperature: T(entry), composition: given(entry, 'S') })],
+  [/^A08-incA7-(\w+)-(bismuth|NaK22)/, (entry, [, what, metal]) => of(metal === 'bismuth' ? 'bismuth' : material(metal), property(what), { temperature: T(entry) })],
+  [/^A08-(lead|bismuth|na|solarsalt|flibe)-(\w+)-/, (entry, [, metal, what]) => of(metal === 'lead' ? 'lead' : material(metal), property(what), { temperature: T(entry), pressure: 1e6 })],
+  [/^A09-(?:glyc|cheng)-/, (entry) => of('glycerol-water', 'viscosity', { temperature: T(entry), composition: given(entry, 'C') })],
   [/^A09-mel-(\w+)-(Ethylene|Propylene)-/, (entry, [, what, glycol]) => of(material(glycol), property(what), { temperature: T(entry), composition: given(entry, 'C') })],
   [/^A10-co2-ps/, (entry) => onLine('carbon dioxide', 'vapourPressure', T(entry))],
   [/^A10-dense-(\w+)-(Nitrogen|CarbonDioxide)-/, (entry, [, what, gas]) => of(material(gas), property(what), { temperature: T(entry), pressure: given(entry, 'p') })],
@@ -109,10 +113,9 @@ export const bindings: readonly (readonly [RegExp, Binding])[] = [
 
 /** Entries that nothing computes, and why. Counted in the test, so that none is lost unseen. */
 export const notComputed: readonly (readonly [RegExp, string])[] = [
+  [/^A05-eos80/, 'the equation of state of 1980: TEOS-10, which took its place and is recorded, differs by up to 0.017 kg/m^3; the record of sea water holds two of its values as checks within 0.002 %'],
+  [/^A05-teos-c-35.16504-(0|20)-0$/, 'values of the polynomial of 75 terms, 1449.006 and 1521.392 m/s; the Gibbs function that is recorded gives 1449.025 and 1521.479 m/s, 6e-5 more'],
   [/^A01-if97-r\d-s-/, 'entropy is not computed: nothing in a plan needs it'],
   [/^A03-ussa/, 'the standard atmosphere is no property of a material'],
   [/-(Hydrogen|Helium|Methane|n-Propane|glycerin)(-|$)|methane|toluene|benzene|propane|acetone|ethanol|methanol|R134a|r134a|ammonia|hydrogen|nh3/, 'no record of this fluid'],
-  [/^A07-rho-(lead|soil|paraffin)$/, 'no record of this solid (lead is recorded as a liquid)'],
-  [/^A08-incA7/, 'no record of bismuth and NaK'],
-  [/^A09-(glyc|cheng)/, 'no record of glycerol and water'],
 ];

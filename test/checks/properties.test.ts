@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { entriesOf, wanted, type CheckEntry } from './properties-entries.ts';
 import { bindings, notComputed } from './properties-map.ts';
 
-const topics = ['A01_water_thermodynamics', 'A02_water_transport', 'A03_dry_air', 'A04_humid_air', 'A06_gases_liquids', 'A07_solids', 'A08_liquid_metals_salts', 'A09_aqueous_and_viscous', 'A10_refrigerants_process_gases', 'A12_saturation_latent'];
+const topics = ['A01_water_thermodynamics', 'A02_water_transport', 'A03_dry_air', 'A04_humid_air', 'A05_seawater', 'A06_gases_liquids', 'A07_solids', 'A08_liquid_metals_salts', 'A09_aqueous_and_viscous', 'A10_refrigerants_process_gases', 'A12_saturation_latent'];
 
 /** Whether nothing computes an entry; the boiling points by given constants are computed for every fluid. */
 const isLeft = ({ id }: CheckEntry): boolean => !id.startsWith('A12-nbp-') && notComputed.some(([pattern]) => pattern.test(id));
@@ -24,8 +24,8 @@ it('the entries that are not computed are counted', () => {
   const left = all.filter(isLeft);
   expect({ all: all.length, notComputed: left.length }).toMatchInlineSnapshot(`
     {
-      "all": 474,
-      "notComputed": 133,
+      "all": 504,
+      "notComputed": 117,
     }
   `);
 });

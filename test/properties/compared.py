@@ -7,11 +7,15 @@ Each row names its reference. A reference counts as independent where its work i
   melinder   Melinder 2010 (solutions), as CoolProp fits it
   vdi        Preisegger et al. 2010 (VDI heat atlas), as CoolProp fits it
   ashrae     ASHRAE handbook 2001 (glycols), as CoolProp fits it
+  janaf      NIST-JANAF Thermochemical Tables, 4th ed. (1998)
+  crc        CRC Handbook of Chemistry and Physics, densities of inorganic solids, heat capacities at 298.15 K
   laliberte  Laliberte 2009, evaluated by thermo
 """
 import csv
+import json
 import os
 
+import chemicals
 import gsw
 from CoolProp.CoolProp import PropsSI
 from thermo.electrochem import Laliberte_density, Laliberte_heat_capacity, Laliberte_viscosity
@@ -89,6 +93,27 @@ for material, cas, T, shares, properties in (
     ('magnesium chloride brine', '7786-30-3', (288, 312), (0.03, 0.08, 0.13, 0.16, 0.2), THREE[:2]),
 ):
     laliberte(material, cas, T, shares, properties)
+
+# Tin there is grey tin, another phase. Pure metals: heat capacities of the JANAF tables (1998), densities of the CRC Handbook, both as chemicals carries them.
+DATA = os.path.dirname(chemicals.__file__)
+with open(os.path.join(DATA, 'Heat Capacity', 'JANAF_1998_solid_Cp.json')) as file:
+    JANAF = json.load(file)
+with open(os.path.join(DATA, 'Density', 'CRC Solid Inorganic Constant Densities.tsv')) as file:
+    CRC = {row['CAS']: row for row in csv.DictReader(file, delimiter='\t')}
+with open(os.path.join(DATA, 'Heat Capacity', 'CRC Standard Thermodynamic Properties of Chemical Substances.tsv')) as file:
+    STANDARD = {row['CAS']: row for row in csv.DictReader(file, delimiter='\t')}
+for material, cas, mass, low, high in (
+    ('aluminium', '7429-90-5', 26.9815, 200, 800), ('beryllium', '7440-41-7', 9.0122, 200, 1000), ('chromium', '7440-47-3', 51.996, 200, 1000), ('cobalt', '7440-48-4', 58.933, 200, 1000), ('copper', '7440-50-8', 63.546, 100, 1000), ('iron', '7439-89-6', 55.845, 200, 1000),
+    ('magnesium', '7439-95-4', 24.305, 200, 800), ('molybdenum', '7439-98-7', 95.95, 200, 1200), ('nickel', '7440-02-0', 58.693, 200, 1000), ('niobium', '7440-03-1', 92.906, 200, 1200), ('silicon', '7440-21-3', 28.0855, 200, 1200), ('tantalum', '7440-25-7', 180.948, 200, 1000),
+    ('titanium', '7440-32-6', 47.867, 200, 1000), ('tungsten', '7440-33-7', 183.84, 200, 1200), ('vanadium', '7440-62-2', 50.9415, 200, 1000), ('zinc', '7440-66-6', 65.38, 200, 600), ('zirconium', '7440-67-7', 91.224, 200, 1000), ('solid lead', '7439-92-1', 207.2, 200, 600), ('graphite', '7440-44-0', 12.011, 300, 1600), ('silver', '7440-22-4', 107.868, 200, 1200), ('gold', '7440-57-5', 196.967, 200, 1200), ('platinum', '7440-06-4', 195.084, 200, 1200), ('palladium', '7440-05-3', 106.42, 200, 1200), ('cadmium', '7440-43-9', 112.414, 200, 400), ('tin', '7440-31-5', 118.71, 200, 500),
+):
+    for T, cp in zip(*JANAF.get(cas, ([], []))):
+        if low <= T <= high:
+            add(material, 'specificHeatCapacity', T, 101325, None, cp / mass * 1000, 'janaf')
+    if cas not in JANAF and material != 'tin' and STANDARD[cas]['Cps']:
+        add(material, 'specificHeatCapacity', 298.15, 101325, None, float(STANDARD[cas]['Cps']) / mass * 1000, 'crc')
+    if cas in CRC and material not in ('graphite', 'tin'):
+        add(material, 'density', 300, 101325, None, mass / 1000 / float(CRC[cas]['Vm']), 'crc')
 
 with open(os.path.join(HERE, 'compared.csv'), 'w', newline='') as out:
     writer = csv.writer(out, lineterminator='\n')

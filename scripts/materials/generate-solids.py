@@ -1,0 +1,292 @@
+"""Records of solids: metals and alloys, refractories, ceramics, glass, plastics, rubbers, woods, soils, building materials, insulations,
+snow, phase-change materials, catalyst supports, food, tissue, rocks, and beds.
+
+Run with:  python3 scripts/materials/generate-solids.py   (needs ht 1.2.0)
+Tables of ht (MIT licence): refractories of the VDI Heat Atlas, building materials of ISO 10456, building materials of the ASHRAE
+Handbook. Metals stand in metals.csv beside this file, as printed by Bergman et al.; other values state their source.
+"""
+import csv
+import os
+from importlib import import_module
+
+from ht.insulation import ASHRAE, building_materials, refractories, refractory_VDI_k
+
+from record import K, write
+
+BY = 'generate-solids.py'
+BERGMAN = 'Bergman, Lavine, Incropera and DeWitt, Fundamentals of Heat and Mass Transfer, 7th ed. (2011)'
+VDI = 'VDI Heat Atlas, 2nd ed. (2010), refractories, as in ht 1.2.0 (MIT licence)'
+ISO = 'ISO 10456:2007, design values, as in ht 1.2.0 (MIT licence)'
+HANDBOOK = 'ASHRAE Handbook, Fundamentals (2013), chapter 26, as in ht 1.2.0 (MIT licence)'
+ROOM = (263.15, 333.15)
+
+
+def constant(value, T, uncertainty, source, **more):
+    return {'model': 'constant', 'range': {'T': K(*T)}, 'uncertainty': uncertainty, 'source': source, **more, 'constants': {'value': value}}
+
+
+def table(rows, uncertainty, source, unit, **more):
+    return {'model': 'table', 'range': {'T': K(rows[0][0], rows[-1][0])}, 'uncertainty': uncertainty, 'source': source, **more, 'constants': {'gives': unit, 'rows': rows}}
+
+
+def melting(value, source, uncertainty='0.5 %'):
+    return {'model': 'constant', 'range': {'p': ['0 Pa', '10 MPa']}, 'uncertainty': uncertainty, 'source': source, 'constants': {'value': f'{value} K'}}
+
+
+def expansion(linear, T, source='linear expansion of handbooks times three, from memory', uncertainty='12 %'):
+    """From the linear coefficient [1e-6 1/K]."""
+    return constant(f'{3 * linear:.4g}e-6 1/K', T, uncertainty, source)
+
+
+def emissivity(surfaces, source):
+    """Rows of surface, temperatures, value, relative half-width in percent."""
+    return [{'model': 'constant', 'surface': s, 'range': {'T': K(*T)}, 'uncertainty': f'{u} %', 'source': source, 'constants': {'value': e}} for s, T, e, u in surfaces]
+
+
+def solid(name, aliases, rho, k, cp, T, source, spread, about=None, checks=None, more=None, kind='solid'):
+    """One value each of density, conductivity, heat capacity; spread in percent of each."""
+    record = {'name': name, 'aliases': aliases, 'kind': kind, 'phases': ['solid'], **({'about': about} if about else {}),
+              'density': constant(f'{rho:g} kg/m^3', T, f'{spread[0]} %', source), 'thermalConductivity': constant(f'{k:g} W/(m K)', T, f'{spread[1]} %', source)}
+    if cp:
+        record['specificHeatCapacity'] = constant(f'{cp:g} J/(kg K)', T, f'{spread[2]} %', source)
+    for key, list_ in (checks or {}).items():
+        record[key]['checks'] = list_
+    record.update(more or {})
+    write(record, BY)
+
+
+def check(unit, value, within, source):
+    return [{'at': {'T': '300 K'}, 'expect': f'{value:g} {unit}', 'within': f'{within} %', 'source': source}]
+
+
+# Metals and alloys: rows of metals.csv, values by temperature as printed.
+# Alloys of metals.csv that the book does not list.
+SHEETS = {'galvanised steel', 'titanium alloy Ti-6Al-4V', 'nickel alloy 625', 'nickel alloy 718', 'aluminium alloy 6061', 'aluminium alloy 5083', 'aluminium alloy 7075', 'cast alloy AlSi10Mg', 'copper-nickel 90-10', 'duplex steel 2205', 'invar', 'magnesium alloy AZ91'}
+
+
+# Heat capacity peaks where iron, nickel and cobalt lose their magnetism: the table does not follow them.
+PEAKS = {'nickel': (550, 700), 'iron': (850, 1000)}
+
+
+def metals():
+    with open(os.path.join(os.path.dirname(os.path.abspath(__file__)), 'metals.csv')) as file:
+        for row in csv.DictReader(file):
+            pairs = lambda text: [[float(T), float(v)] for T, v in (pair.split(':') for pair in text.split())]
+            k, cp = pairs(row['k']), pairs(row['cp'])
+            T = (min(k[0][0], cp[0][0]), max(k[-1][0], cp[-1][0]))
+            source = f'{BERGMAN}, table A.1, from memory' if row['name'] not in SHEETS else 'data sheets of the alloy and MIL-HDBK-5J (2003), from memory'
+            alloy = row['kind'] == 'alloy'
+            one = lambda rows, uncertainty, unit: table(rows, uncertainty, source, unit) if len(rows) > 1 else {**constant(f'{rows[0][1]:g} {unit}', (rows[0][0] - 100, rows[0][0] + 100), uncertainty, source)}
+            record = {'name': row['name'], **({'formula': row['formula']} if row['formula'] else {}), 'aliases': [a for a in row['aliases'].split('|') if a], 'kind': 'solid', 'phases': ['solid'], **({'about': row['about']} if row['about'] else {}),
+                      'density': constant(f'{row["rho"]} kg/m^3', T, '2 %', source),
+                      'thermalConductivity': one(k, '8 %' if alloy else '5 %', 'W/(m K)'), 'specificHeatCapacity': one(cp, '5 %' if alloy else '4 %', 'J/(kg K)'),
+                      'thermalExpansion': expansion(float(row['linear']), (273.15, 473.15)), 'meltingTemperature': melting(row['mp'], source)}
+            if row['name'] in PEAKS:
+                record['specificHeatCapacity']['uncertainty'] = [{'T': K(*PEAKS[row['name']]), 'value': '15 %'}, {'value': '4 %'}]
+            surfaces = [(s, (float(a), float(b)), float(e), int(u)) for s, a, b, e, u in (one.split(':') for one in row['emissivity'].split('|') if one)]
+            if surfaces:
+                record['emissivity'] = emissivity(surfaces, f'{BERGMAN}, table A.11, and handbook tables of emissivity, from memory')
+            write(record, BY + ' from metals.csv')
+
+
+metals()
+
+# Refractories.
+for theirs, name, aliases, mp in (
+    ('Silica', 'silica brick', ['silica refractory'], 1970), ('Fireclay', 'fireclay brick', ['fireclay', 'chamotte', 'chamotte brick', 'fire brick', 'firebrick'], 1970), ('High-duty fireclay', 'high-duty fireclay brick', [], 2000),
+    ('Sillimanite', 'sillimanite brick', [], 2090), ('Mullite', 'mullite brick', ['mullite'], 2120), ('Corundum 90%', 'corundum brick 90', ['high-alumina brick'], 2270), ('Corundum 99%', 'corundum brick 99', ['alumina brick'], 2300),
+    ('Bauxite', 'bauxite brick', [], 2090), ('Magnesia', 'magnesia brick', ['magnesite brick'], 3000), ('Magnesite Chrome', 'magnesia-chrome brick', ['magnesite-chrome brick'], 2600), ('Dolomite P10', 'dolomite brick', [], 2600),
+    ('Zirconia', 'zirconia brick', [], 2900), ('Zircon', 'zircon brick', [], 2800), ('AZS 33', 'fused-cast AZS 33', ['AZS 33', 'alumina-zirconia-silica'], 2100), ('SIC 90%', 'silicon carbide brick', ['SiC brick', 'SiC refractory'], 2500), ('L1260', 'insulating fire brick 1260', ['insulating brick', 'insulating firebrick', 'IFB 23'], 1700),
+    ('L1540', 'insulating fire brick 1540', ['IFB 28'], 1950), ('Carbon, anthracite', 'carbon brick', [], 3800), ('Carbon, graphite', 'graphite brick', [], 3800), ('Fused silica', 'fused silica brick', [], 1970),
+):
+    rho, ks, cps = refractories[theirs]
+    T = (673.15, 873.15, 1073.15, 1273.15, 1473.15)
+    assert refractory_VDI_k(theirs, T[2]) == ks[2]
+    write({'name': name, 'aliases': aliases, 'kind': 'solid', 'phases': ['solid'], 'about': 'porosity moves the conductivity; below 400 degC carried from there',
+           'density': constant(f'{rho:g} kg/m^3', (293.15, 1473.15), '5 %', VDI), 'thermalConductivity': table([[t, v] for t, v in zip(T, ks)], '20 %', VDI, 'W/(m K)'), 'specificHeatCapacity': table([[t, v] for t, v in zip(T, cps)], '8 %', VDI, 'J/(kg K)'),
+           'emissivity': emissivity([('rough', (1000, 1500), 0.75, 20)], 'fireclay and other refractories, 0.6 to 0.9, handbook tables of emissivity, from memory'),
+           'meltingTemperature': melting(mp, 'usual refractoriness of the class, from memory', '5 %')}, BY)
+
+# Building materials, plastics, rubbers, woods, stone: ISO 10456, with the ASHRAE handbook as a second table where it has the material.
+A3 = f'{BERGMAN}, table A.3, from memory'
+BUILDING = [
+    ('Asphalt', 'asphalt', ['asphalt concrete'], (5, 25, 20), {}), ('Bitumen, pure', 'bitumen', [], (5, 15, 40), {}), ('Concrete, reinforced with 1% steel', 'reinforced concrete', ['ferroconcrete'], (5, 20, 20), {}),
+    ('Glass, quartz', 'quartz glass', ['fused silica', 'fused quartz', 'silica glass'], (1, 6, 6), {'thermalConductivity': check('W/(m K)', 1.38, 5, f'{BERGMAN}, table A.2'), 'density': check('kg/m^3', 2220, 1, f'{BERGMAN}, table A.2'), 'specificHeatCapacity': check('J/(kg K)', 745, 5, f'{BERGMAN}, table A.2')}),
+    ('Metals, iron, cast', 'cast iron', ['grey cast iron', 'gray cast iron', 'grey iron'], (4, 20, 12), {}), ('Plastics, polycarbonates', 'polycarbonate', ['PC'], (2, 10, 8), {}), ('Plastics, polytetrafluoroethylene (PTFE)', 'polytetrafluoroethylene', ['PTFE', 'teflon'], (3, 15, 10), {'density': check('kg/m^3', 2200, 2, A3), 'thermalConductivity': check('W/(m K)', 0.25, 15, 'polymer handbooks, 0.25 W/(m K); Bergman et al., table A.3, prints 0.35')}),
+    ('Plastics, Polyvinylchloride (PVC)', 'polyvinyl chloride', ['PVC', 'rigid PVC'], (3, 15, 15), {}), ('Plastics, polymethylmethacrylate (PMMA)', 'polymethyl methacrylate', ['PMMA', 'acrylic glass', 'acrylic', 'plexiglass'], (2, 10, 6), {}), ('Plastics, polyacetate', 'polyoxymethylene', ['POM', 'acetal', 'polyacetal'], (2, 12, 10), {}),
+    ('Plastics, polyamide (nylon)', 'polyamide', ['nylon', 'PA 6', 'PA 66', 'PA66'], (2, 15, 10), {}), ('Plastics, polyethylene / polythene, high density', 'polyethylene high density', ['HDPE', 'PE-HD', 'polyethylene', 'PE 100'], (4, 12, 15), {}), ('Plastics, polyethylene / polythene, low density', 'polyethylene low density', ['LDPE', 'PE-LD'], (2, 12, 12), {}),
+    ('Plastics, polystyrene', 'polystyrene', ['PS'], (2, 12, 8), {}), ('Plastics, polypropylene', 'polypropylene', ['PP', 'PP-H'], (2, 12, 10), {}), ('Plastics, epoxy resin', 'epoxy resin', ['epoxy'], (5, 20, 20), {}), ('Plastics, polyurethane (PU)', 'polyurethane', ['PU', 'solid polyurethane'], (5, 20, 15), {}), ('Plastics, phenolic resin', 'phenolic resin', ['bakelite'], (5, 30, 15), {}), ('Plastics, polyester resin', 'polyester resin', [], (5, 20, 15), {}),
+    ('Rubber, natural', 'natural rubber', ['rubber', 'soft rubber'], (20, 15, 80), {'density': check('kg/m^3', 1100, 20, A3), 'thermalConductivity': check('W/(m K)', 0.13, 5, A3), 'specificHeatCapacity': check('J/(kg K)', 2010, 85, f'{A3}; ISO 10456 prints 1100')}),
+    ('Rubber, neoprene (polychloroprene)', 'chloroprene rubber', ['neoprene', 'CR rubber'], (5, 15, 15), {}), ('Rubber, ethylene propylene diene monomer (EPDM)', 'EPDM rubber', ['EPDM'], (10, 20, 50), {}), ('Rubber, butyl (isobutene), solid melt', 'butyl rubber', ['IIR'], (5, 30, 30), {}), ('Rubber, hard rubber (ebonite), solid', 'hard rubber', ['ebonite'], (5, 10, 25), {}), ('Sealant, silicone, pure', 'silicone rubber', ['VMQ', 'silicone'], (8, 40, 30), {}), ('Sealant, elastomeric foam, flexible', 'elastomeric foam', ['flexible elastomeric foam', 'FEF', 'rubber foam'], (25, 30, 15), {}),
+    ('Gypsum, plasterboard', 'plasterboard', ['gypsum board', 'drywall'], (30, 40, 20), {}), ('Plasters and renders, cement sand', 'cement plaster', ['cement render', 'mortar'], (20, 25, 20), {}), ('Stone, granite', 'granite', [], (4, 20, 30), {'thermalConductivity': check('W/(m K)', 2.79, 5, A3), 'density': check('kg/m^3', 2630, 3, A3), 'specificHeatCapacity': check('J/(kg K)', 775, 30, A3)}),
+    ('Stone, basalt', 'basalt', [], (5, 50, 20), {}), ('Stone, marble', 'marble', [], (5, 25, 20), {'thermalConductivity': check('W/(m K)', 2.80, 26, A3)}), ('Stone, slate', 'slate', [], (15, 30, 25), {}), ('Stone, limestone, hard', 'limestone', [], (10, 30, 25), {'thermalConductivity': check('W/(m K)', 2.15, 30, A3), 'density': check('kg/m^3', 2320, 6, A3)}), ('Stone, sandstone (silica)', 'sandstone', [], (20, 40, 35), {'thermalConductivity': check('W/(m K)', 2.90, 40, A3)}), ('Stone, natural pumice', 'pumice', [], (30, 30, 15), {}),
+    ('Tiles, ceramic or porcelain', 'porcelain', ['ceramic tile', 'stoneware'], (5, 25, 20), {}), ('Tiles, clay', 'clay tile', ['roof tile', 'terracotta'], (10, 25, 15), {}),
+    ('Wood, plywood 500 kg/m^3', 'plywood', [], (12, 15, 25), {'thermalConductivity': check('W/(m K)', 0.12, 12, A3)}), ('Wood, particleboard, 600 kg/m^3', 'particleboard', ['chipboard'], (15, 30, 30), {}), ('Wood, oriented strand board', 'oriented strand board', ['OSB'], (10, 15, 15), {}), ('Wood, fibreboard, 800 kg/m^3', 'medium-density fibreboard', ['MDF', 'fibreboard'], (12, 20, 30), {}),
+    ('Solids, clay or silt', 'clay', ['silt', 'clay soil'], (15, 40, 50), {'thermalConductivity': check('W/(m K)', 1.3, 20, A3)}), ('Floor covering, tiles, cork', None, [], (), {}), ('Floor covering, Linoleum', 'linoleum', [], (8, 15, 15), {}), ('Floor covering, carpet / textile flooring', 'carpet', [], (30, 30, 15), {}),
+]
+LINEAR = {'polycarbonate': 68, 'polytetrafluoroethylene': 130, 'polyvinyl chloride': 70, 'polymethyl methacrylate': 72, 'polyoxymethylene': 110, 'polyamide': 85, 'polyethylene high density': 130, 'polyethylene low density': 200, 'polystyrene': 75, 'polypropylene': 130, 'epoxy resin': 60, 'quartz glass': 0.55, 'cast iron': 10.5, 'granite': 8, 'marble': 7, 'limestone': 6, 'sandstone': 11, 'porcelain': 6, 'reinforced concrete': 11, 'silicone rubber': 270, 'natural rubber': 220}
+MELTS = {'polycarbonate': 493, 'polytetrafluoroethylene': 600, 'polyvinyl chloride': 353, 'polymethyl methacrylate': 378, 'polyoxymethylene': 438, 'polyamide': 493, 'polyethylene high density': 403, 'polyethylene low density': 383, 'polystyrene': 373, 'polypropylene': 436, 'cast iron': 1420, 'quartz glass': 1883}
+for theirs, name, aliases, spread, checks in BUILDING:
+    if name is None:
+        continue
+    rho, k, cp = building_materials[theirs]
+    if not checks:
+        checks = {}
+    more = {}
+    if name in LINEAR:
+        more['thermalExpansion'] = expansion(LINEAR[name], ROOM, 'linear expansion of handbooks times three, from memory', '25 %')
+    if name in MELTS:
+        more['meltingTemperature'] = melting(MELTS[name], 'melting or softening (amorphous polymers: glass transition), handbooks, from memory', '2 %')
+    if name in ('cast iron', 'porcelain', 'asphalt', 'plasterboard', 'granite', 'marble', 'quartz glass', 'plywood'):
+        surfaces = {'cast iron': [('machined', (295, 500), 0.44, 30), ('oxidised', (400, 900), 0.65, 20), ('rough, strongly oxidised', (300, 600), 0.95, 4)], 'porcelain': [('glazed', (295, 400), 0.92, 5)], 'asphalt': [('pavement', (280, 340), 0.90, 6)], 'plasterboard': [('paper or paint', (280, 340), 0.91, 5)], 'granite': [('rough', (280, 350), 0.90, 8)], 'marble': [('polished', (280, 350), 0.93, 4)], 'quartz glass': [('smooth', (280, 400), 0.93, 4)], 'plywood': [('planed', (280, 350), 0.88, 8)]}[name]
+        more['emissivity'] = emissivity(surfaces, f'{BERGMAN}, table A.11, and handbook tables of emissivity, from memory')
+    solid(name, aliases, rho, k, cp, (250.0, 500.0) if name in ('cast iron', 'quartz glass') else ROOM, ISO, spread, checks=checks, more=more)
+
+for theirs, name, aliases, checks in (
+    ('Oak', 'oak', ['oak wood', 'white oak'], {'thermalConductivity': check('W/(m K)', 0.16, 12, 'Wood Handbook, USDA FPL-GTR-190 (2010), across the grain at 12 % moisture, from memory'), 'density': check('kg/m^3', 680, 10, 'Wood Handbook, USDA FPL-GTR-190 (2010), from memory')}),
+    ('Maple', 'maple', ['maple wood'], {}), ('Ash', 'ash wood', [], {}), ('Birch', 'birch', ['birch wood'], {}), ('Southern pine', 'southern pine', ['yellow pine', 'pine', 'pine wood'], {'thermalConductivity': check('W/(m K)', 0.15, 12, f'{A3}, yellow pine'), 'density': check('kg/m^3', 640, 10, f'{A3}, yellow pine')}),
+    ('Douglas fir/larch', 'Douglas fir', ['larch', 'fir'], {}), ('Spruce', 'spruce', ['spruce wood', 'softwood', 'timber'], {'thermalConductivity': check('W/(m K)', 0.11, 25, 'Wood Handbook, USDA FPL-GTR-190 (2010), from memory')}), ('Western red cedar', 'red cedar', ['cedar'], {}), ('California redwood', 'redwood', [], {}),
+):
+    rho, cp, k = ASHRAE[theirs][:3]
+    solid(name, aliases, rho, k, cp, ROOM, HANDBOOK, (10, 20, 15), 'across the grain at about 12 % moisture; along the grain the conductivity is about twice as large', checks=checks, more={'emissivity': emissivity([('planed', (280, 350), 0.90, 6)], f'{BERGMAN}, table A.11, wood 0.82 to 0.92')})
+
+# Insulations: by temperature where it matters.
+CURVES = 'common practice, usual curves of data sheets'
+for name, aliases, rho, rows, cp, T, source, spread, about in (
+    ('expanded polystyrene', ['EPS', 'styrofoam', 'polystyrene foam'], 20, [[253, 0.0315], [283, 0.0355], [313, 0.0395], [343, 0.0435]], 1470, None, f'{HANDBOOK} at 297 K; slope of EN ISO 10456, 0.0036 1/K', (30, 12, 10), None),
+    ('extruded polystyrene', ['XPS'], 35, [[253, 0.0275], [283, 0.0305], [313, 0.0335], [343, 0.0365]], 1470, None, f'{CURVES}, aged; ASHRAE prints 0.026 W/(m K) fresh', (20, 15, 10), None),
+    ('polyurethane foam', ['PUR foam', 'rigid polyurethane foam', 'PIR', 'polyisocyanurate foam'], 40, [[123, 0.019], [203, 0.024], [253, 0.0255], [283, 0.026], [323, 0.030], [373, 0.036]], 1470, None, f'{CURVES}, aged; ASHRAE prints 0.0235 to 0.026 W/(m K) at 297 K', (25, 18, 10), 'closed cells, aged; it gains by condensing blowing agents when cold'),
+    ('phenolic foam', [], 40, [[283, 0.020], [313, 0.022], [373, 0.027]], 1500, None, CURVES, (25, 18, 12), None),
+    ('cellular glass', ['foam glass'], 120, [[113, 0.024], [173, 0.030], [233, 0.036], [283, 0.042], [373, 0.055], [473, 0.072], [573, 0.094]], 840, None, f'{CURVES}; ASTM C552 type I', (12, 10, 12), None),
+    ('glass wool', ['fibreglass', 'fiberglass', 'glass fibre wool', 'glass fiber'], 24, [[253, 0.031], [283, 0.035], [323, 0.042], [373, 0.053], [473, 0.085]], 840, None, f'{CURVES}; ASHRAE prints 0.036 to 0.043 W/(m K) at 297 K', (40, 15, 8), 'mats of 20 to 30 kg/m^3'),
+    ('calcium silicate', ['calcium silicate insulation'], 230, [[311, 0.059], [366, 0.065], [422, 0.072], [477, 0.079], [533, 0.087], [589, 0.095], [644, 0.10], [922, 0.14]], 840, None, 'ASTM C533, type I, largest values, from memory', (15, 15, 15), 'dry'),
+    ('ceramic fibre', ['ceramic fiber', 'alumina-silica fibre', 'refractory ceramic fibre', 'ceramic wool'], 128, [[473, 0.06], [673, 0.10], [873, 0.15], [1073, 0.21], [1273, 0.29], [1473, 0.38]], 1130, None, f'{CURVES}, blanket of 128 kg/m^3', (20, 20, 10), 'a blanket of 128 kg/m^3'),
+    ('microporous silica', ['microporous insulation'], 240, [[373, 0.021], [473, 0.022], [673, 0.025], [873, 0.029], [1073, 0.036]], 920, None, CURVES, (20, 15, 12), None),
+    ('aerogel blanket', ['silica aerogel', 'aerogel'], 180, [[273, 0.0195], [311, 0.021], [373, 0.023], [473, 0.028], [573, 0.036], [673, 0.048], [873, 0.089]], 1000, None, 'ASTM C1728, from memory', (20, 15, 12), None),
+    ('expanded perlite', ['perlite', 'loose perlite'], 100, [[123, 0.026], [203, 0.036], [283, 0.045], [373, 0.060], [573, 0.10], [873, 0.19]], 1090, None, f'{CURVES}; ASHRAE prints 0.0485 W/(m K) at 297 K for 100 kg/m^3', (40, 20, 15), 'loose, at atmospheric pressure; evacuated it conducts about 0.001 to 0.002 W/(m K)'),
+    ('vermiculite', ['exfoliated vermiculite'], 110, [[283, 0.066], [373, 0.085], [573, 0.14], [873, 0.23]], 1340, None, f'{CURVES}; ASHRAE prints 0.063 to 0.068 W/(m K) at 297 K', (30, 20, 15), None),
+    ('cellulose insulation', ['cellulose fibre', 'blown cellulose'], 45, [[263, 0.038], [297, 0.042], [333, 0.047]], 1380, None, HANDBOOK, (30, 12, 20), None),
+    ('cork', ['corkboard', 'cork board'], 120, [[263, 0.037], [300, 0.039], [343, 0.043]], 1800, None, f'{A3}', (15, 15, 15), None),
+    ('vacuum insulation panel', ['VIP'], 190, [[263, 0.0065], [297, 0.007], [333, 0.0078]], 800, None, 'common practice, fumed silica core, aged value with the edges', (15, 30, 10), 'through its thickness; a pierced one conducts 0.02 W/(m K)'),
+    ('sheep wool', ['wool insulation'], 20, [[263, 0.036], [297, 0.039], [333, 0.044]], 1700, None, CURVES, (40, 15, 10), None),
+    ('straw', ['straw bale'], 110, [[263, 0.055], [297, 0.060], [323, 0.066]], 2000, None, CURVES, (25, 25, 15), None),
+):
+    T = (rows[0][0], rows[-1][0])
+    write({'name': name, 'aliases': aliases, 'kind': 'solid', 'phases': ['solid'], **({'about': about} if about else {}), 'density': constant(f'{rho} kg/m^3', T, f'{spread[0]} %', source), 'thermalConductivity': table(rows, f'{spread[1]} %', source, 'W/(m K)'), 'specificHeatCapacity': constant(f'{cp} J/(kg K)', T, f'{spread[2]} %', source)}, BY)
+
+# Ceramics, glass and carbon by temperature.
+A2 = f'{BERGMAN}, table A.2, from memory'
+for name, formula, aliases, rho, k, cp, linear, mp, spread in (
+    ('silicon carbide', 'SiC', ['sintered silicon carbide'], 3160, [[300, 490], [1000, 87], [1200, 58], [1500, 30]], [[300, 675], [400, 880], [600, 1050], [800, 1135], [1000, 1195], [1200, 1243]], 4.0, 3100, '60 %'),
+    ('silicon nitride', 'Si3N4', [], 2400, [[300, 16.0], [400, 13.9], [600, 11.3], [800, 9.88], [1000, 8.76], [1200, 8.00]], [[300, 691], [400, 778], [600, 937], [800, 1063], [1000, 1155], [1200, 1226]], 3.0, 2173, '30 %'),
+    ('zirconium dioxide', 'ZrO2', ['zirconia', 'stabilised zirconia', 'YSZ'], 6000, [[300, 2.2], [600, 2.1], [900, 2.1], [1200, 2.1]], [[300, 450], [600, 560], [900, 600], [1200, 630]], 10.5, 2950, '20 %'),
+    ('aluminium nitride', 'AlN', ['aluminum nitride'], 3260, [[300, 170], [400, 130], [600, 90], [800, 67]], [[300, 740], [400, 880], [600, 1030], [800, 1110]], 4.5, 2700, '20 %'),
+    ('beryllium oxide', 'BeO', ['beryllia'], 3000, [[300, 272], [400, 196], [600, 111], [800, 70], [1000, 47], [1200, 33]], [[300, 1030], [400, 1350], [600, 1690], [800, 1865], [1000, 1975], [1200, 2055]], 8.0, 2725, '10 %'),
+    ('titanium dioxide', 'TiO2', ['titania', 'rutile'], 4157, [[300, 8.4], [400, 7.01], [600, 5.02], [800, 3.94], [1000, 3.46], [1200, 3.28]], [[300, 710], [400, 805], [600, 880], [800, 910], [1000, 930], [1200, 945]], 8.5, 2133, '15 %'),
+    ('glass ceramic', None, ['pyroceram', 'glass-ceramic'], 2600, [[300, 3.98], [400, 3.64], [600, 3.28], [800, 3.08], [1000, 2.96]], [[300, 808], [400, 908], [600, 1038], [800, 1122], [1000, 1197]], 5.7, 1623, '6 %'),
+    ('graphite', None, ['isotropic graphite', 'electrographite'], 1800, [[300, 105], [500, 88], [800, 66], [1200, 48], [1600, 38]], [[300, 715], [500, 1210], [800, 1640], [1200, 1900], [1600, 2030]], 4.5, 3900, '30 %'),
+    ('magnesium oxide', 'MgO', ['magnesia', 'periclase'], 3500, [[300, 48], [400, 36], [600, 22], [800, 15.5], [1000, 11.5], [1300, 8.5]], [[300, 935], [400, 1030], [600, 1150], [800, 1200], [1000, 1230], [1300, 1280]], 12.5, 3098, '15 %'),
+):
+    T = (300, k[-1][0])
+    source = A2 if formula not in ('ZrO2', 'AlN', 'MgO') and name != 'graphite' else 'usual values of dense technical grades, from memory'
+    write({'name': name, **({'formula': formula} if formula else {}), 'aliases': aliases, 'kind': 'solid', 'phases': ['solid'], 'density': constant(f'{rho} kg/m^3', T, '5 %', source), 'thermalConductivity': table(k, spread, source, 'W/(m K)'), 'specificHeatCapacity': table(cp, '6 %', source, 'J/(kg K)'), 'thermalExpansion': expansion(linear, (300, 600), 'linear expansion of handbooks times three, from memory', '25 %'), 'meltingTemperature': melting(mp, source, '3 %')}, BY)
+
+# Plastics and composites that ISO 10456 does not list.
+POLYMER = 'polymer handbooks, usual grades, from memory'
+for name, aliases, rho, k, cp, spread, linear, mp in (
+    ('polyether ether ketone', ['PEEK'], 1310, 0.27, 1340, (2, 15, 8), 50, 616), ('polyethylene terephthalate', ['PET', 'polyester'], 1380, 0.24, 1150, (3, 20, 12), 70, 528), ('acrylonitrile butadiene styrene', ['ABS'], 1050, 0.18, 1400, (3, 15, 12), 90, 378), ('polyvinylidene fluoride', ['PVDF'], 1780, 0.19, 1120, (2, 12, 12), 130, 444), ('polyimide', ['PI'], 1420, 0.25, 1100, (3, 40, 10), 50, 660), ('nitrile rubber', ['NBR', 'buna-n'], 1200, 0.24, 1700, (12, 20, 25), 180, None),
+    ('fluororubber', ['FKM', 'viton'], 1850, 0.22, 1300, (8, 20, 25), 160, None), ('glass-fibre plastic', ['GRP', 'GFRP', 'fibreglass laminate'], 1850, 0.35, 1050, (10, 25, 15), 25, None), ('carbon-fibre plastic', ['CFRP', 'carbon fibre laminate'], 1550, 0.7, 1000, (5, 40, 15), None, None), ('circuit board FR-4', ['FR-4', 'FR4', 'printed circuit board', 'PCB laminate'], 1850, 0.29, 1100, (6, 20, 15), 50, None),
+):
+    solid(name, aliases, rho, k, cp, (273.15, 373.15), POLYMER, spread, {'carbon-fibre plastic': 'across the fibres; along them about 5 W/(m K)', 'circuit board FR-4': 'the bare laminate, across; copper layers multiply the conductivity along the board'}.get(name), more={**({'thermalExpansion': expansion(linear, (273.15, 373.15), 'linear expansion of handbooks times three, from memory', '30 %')} if linear else {}), **({'meltingTemperature': melting(mp, 'melting or softening, handbooks, from memory', '2 %')} if mp else {})})
+
+# Soils, rocks and things dug or fallen.
+GROUND = 'Farouki, Thermal Properties of Soils, CRREL Monograph 81-1 (1981), usual values, from memory'
+solid('soil', ['earth', 'ground soil'], 2050, 0.52, 1840, (273.15, 323.15), A3, (12, 60, 30), 'moist loam at 300 K; its water moves the conductivity from 0.3 (dry) to 2 W/(m K) (wet)')
+solid('wet soil', ['saturated soil', 'moist ground'], 2000, 1.7, 1500, (273.15, 323.15), GROUND, (10, 35, 20), 'mineral soil, saturated', more={'permeability': constant('1e-12 m^2', (273.15, 323.15), '900 %', 'loam, Bear, Dynamics of Fluids in Porous Media (1972), from memory')})
+solid('dry soil', [], 1500, 0.3, 850, (273.15, 323.15), GROUND, (10, 35, 15), 'mineral soil without water')
+solid('frozen soil', ['permafrost'], 1950, 2.3, 1150, (233.15, 273.15), GROUND, (10, 35, 20), 'mineral soil, saturated and frozen')
+solid('peat', [], 900, 0.45, 3300, (273.15, 323.15), GROUND, (25, 30, 25), 'wet; dry peat conducts 0.06 W/(m K)')
+solid('coal', ['hard coal', 'anthracite'], 1350, 0.26, 1260, (273.15, 373.15), A3, (8, 30, 10))
+solid('quartzite', [], 2640, 5.38, 1105, (273.15, 373.15), A3, (4, 25, 25))
+solid('rock salt', ['halite', 'solid sodium chloride'], 2165, 6.1, 860, (273.15, 373.15), 'Clauser and Huenges, in Rock Physics and Phase Relations, AGU (1995), 6.1 W/(m K), from memory', (2, 12, 5), more={'meltingTemperature': melting(1074, 'handbooks, from memory')})
+solid('leather', [], 998, 0.159, 1500, (273.15, 323.15), A3, (15, 15, 20))
+solid('paper', ['cardboard solid'], 930, 0.18, 1340, (273.15, 373.15), A3, (20, 30, 12))
+solid('cotton', [], 80, 0.06, 1300, (273.15, 323.15), A3, (40, 25, 10))
+for name, aliases, theirs in (('fresh snow', ['snow', 'new snow'], 'Water, snow, freshly fallen (<30 mm)'), ('settled snow', ['soft snow'], 'Water, snow, soft (30 mm to 70 mm)'), ('packed snow', ['compacted snow'], 'Water, snow, compacted (<200 mm)')):
+    rho, k, cp = building_materials[theirs]
+    yen = 2.22362 * (rho / 1000) ** 1.885
+    solid(name, aliases, rho, k, 2090, (233.15, 273.15), f'{ISO}; heat capacity of ice', (40, 70, 4), checks={'thermalConductivity': [{'at': {'T': '268.15 K'}, 'expect': f'{yen:.3g} W/(m K)', 'within': '75 %', 'source': 'Yen, CRREL Report 81-10 (1981), k = 2.22362 rho^1.885, rho in g/cm^3'}]}, more={'emissivity': emissivity([('fresh', (233, 273), 0.9, 9)], f'{BERGMAN}, table A.11, snow 0.82 to 0.90; others measure 0.97 to 0.99'), 'meltingTemperature': melting(273.15, 'melting of ice', '0.01 %')})
+
+# Beds, packings and porous bodies: void fraction and permeability belong to them.
+BED = 'common practice; permeability by Ergun and Carman-Kozeny'
+
+
+def bed(name, aliases, rho, k, cp, void, permeability, spread, source, about, T=(273.15, 373.15)):
+    solid(name, aliases, rho, k, cp, T, source, spread[:3], about, more={'voidFraction': constant(f'{void}', T, f'{spread[3]} %', source), **({'permeability': constant(f'{permeability:.2g} m^2', T, f'{spread[4]} %', source)} if permeability else {})})
+
+
+kozeny = lambda d, e: d ** 2 * e ** 3 / (180 * (1 - e) ** 2)
+bed('wet sand', ['saturated sand'], 1980, 2.4, 1480, 0.40, kozeny(3e-4, 0.40), (6, 25, 10, 10, 300), 'quartz sand in water, geometric mean of 7.7 and 0.6 W/(m K); permeability of 0.3 mm grains', 'quartz sand of about 0.3 mm filled with water')
+bed('fine sand', ['fine dry sand'], 1550, 0.30, 800, 0.42, kozeny(1.5e-4, 0.42), (8, 30, 6, 10, 300), f'{BED}; grains of 0.15 mm', 'dry quartz sand of about 0.15 mm')
+bed('gravel', ['pebbles', 'gravel bed'], 1600, 0.36, 840, 0.38, kozeny(8e-3, 0.38), (10, 40, 8, 12, 300), f'{BED}; grains of 8 mm', 'dry gravel of about 8 mm')
+bed('rock bed', ['rock store', 'crushed rock'], 1600, 0.45, 850, 0.42, kozeny(0.03, 0.42), (10, 40, 8, 12, 300), f'{BED}; rocks of 30 mm', 'dry crushed rock of about 30 mm, as in a heat store')
+bed('packed glass spheres', ['glass beads', 'glass spheres'], 1500, 0.20, 750, 0.39, kozeny(3e-3, 0.39), (5, 25, 5, 6, 150), f'{BED}; spheres of 3 mm in air', 'soda-lime spheres of 3 mm, poured, in air')
+bed('Raschig rings', ['ceramic Raschig rings', 'ceramic rings'], 690, 0.25, 840, 0.74, None, (15, 50, 8, 5, 300), 'Perry, Chemical Engineers\' Handbook, packings, 25 mm ceramic, from memory', 'ceramic Raschig rings of 25 mm, dumped; 190 m^2/m^3')
+bed('Pall rings', ['steel Pall rings', 'metal Pall rings'], 480, 0.3, 480, 0.94, None, (15, 60, 8, 2, 300), 'Perry, Chemical Engineers\' Handbook, packings, 25 mm steel, from memory', 'steel Pall rings of 25 mm, dumped; 207 m^2/m^3')
+bed('metal foam', ['aluminium foam', 'aluminum foam', 'open-cell aluminium foam'], 220, 5.5, 900, 0.92, 1.0e-7, (20, 35, 4, 2, 100), 'Calmidi and Mahajan, J. Heat Transfer 122 (2000) 557, aluminium, 10 to 20 pores per inch, from memory', 'open aluminium foam of 92 % voids, 20 pores per inch, in air')
+bed('felt of fibres', ['fibre felt', 'needle felt', 'filter felt'], 120, 0.05, 1300, 0.91, 1.0e-10, (30, 30, 12, 4, 300), 'Davies, Air Filtration (1973), fibres of 20 um, from memory', 'needled polymer felt, fibres of about 20 um, in air')
+for name, aliases, rho, k, cp, void, about in (
+    ('alumina catalyst support', ['catalyst pellet', 'alumina pellets', 'porous alumina', 'catalyst'], 1250, 0.3, 950, 0.60, 'gamma-alumina pellets with pores filled with gas; the density is that of the pellet, a bed holds about 60 % of it'),
+    ('silica gel', ['silica support', 'silica gel beads'], 1150, 0.16, 920, 0.48, 'beads of regular silica gel, dry; the density is that of the bead'),
+    ('zeolite pellets', ['zeolite', 'zeolite 13X', 'molecular sieve'], 1150, 0.15, 950, 0.55, 'pellets of zeolite with binder, dry; the density is that of the pellet'),
+    ('activated carbon', ['activated charcoal', 'carbon granules'], 780, 0.17, 950, 0.65, 'granules, dry; the density is that of the granule'),
+    ('nickel catalyst', ['supported nickel', 'reforming catalyst', 'nickel on alumina'], 1900, 0.4, 900, 0.45, 'nickel on alpha-alumina rings; the density is that of the pellet'),
+    ('iron catalyst', ['ammonia catalyst', 'fused iron catalyst', 'magnetite catalyst'], 4800, 0.8, 800, 0.35, 'fused iron, reduced state porous; the density is that of the unreduced granule'),
+):
+    bed(name, aliases, rho, k, cp, void, None, (15, 40, 12, 15, 300), 'Satterfield, Heterogeneous Catalysis in Practice (1980), and data sheets, from memory', about, (273.15, 873.15))
+
+# Phase-change materials: both phases.
+def change(name, aliases, mp, heat, rho, k, cp, mu, T, source, spread, about=None, marks=()):
+    """Solid and liquid values; heat of fusion [kJ/kg]."""
+    both = lambda pair, unit, uncertainty: [{'model': 'constant', 'phase': phase, 'range': {'T': K(*box), 'p': ['0 Pa', '1 MPa']}, 'uncertainty': uncertainty, 'source': source, 'constants': {'value': f'{value:g} {unit}'}} for phase, value, box in (('solid', pair[0], (T[0], mp)), ('liquid', pair[1], (mp, T[1])))]
+    write({'name': name, 'aliases': aliases, 'kind': 'fluid', 'phases': ['liquid', 'solid'], **({'marks': list(marks)} if marks else {}), **({'about': about} if about else {}),
+           'density': both(rho, 'kg/m^3', spread[0]), 'viscosity': [{'model': 'vogel', 'phase': 'liquid', 'range': {'T': K(mp, T[1]), 'p': ['0 Pa', '1 MPa']}, 'uncertainty': '35 %', 'source': source, 'constants': {'A': mu[0], 'B': mu[1], 'C': 0, 'gives': 'mPa s'}}],
+           'thermalConductivity': both(k, 'W/(m K)', spread[1]), 'specificHeatCapacity': both(cp, 'J/(kg K)', spread[2]),
+           'thermalExpansion': [{'model': 'constant', 'phase': 'liquid', 'range': {'T': K(mp, T[1])}, 'uncertainty': '30 %', 'source': source, 'constants': {'value': f'{(9e-4 if rho[1] < 1000 else 5e-4):g} 1/K'}}],
+           'fusionHeat': {'model': 'constant', 'range': {'p': ['0 Pa', '1 MPa']}, 'uncertainty': spread[3], 'source': source, 'constants': {'value': f'{heat} kJ/kg'}}, 'meltingTemperature': {'model': 'constant', 'range': {'p': ['0 Pa', '1 MPa']}, 'uncertainty': '0.5 %', 'source': source, 'constants': {'value': f'{mp} K'}}}, BY)
+
+
+MEHLING = 'Mehling and Cabeza, Heat and Cold Storage with PCM (2008), and Zalba et al., Appl. Therm. Eng. 23 (2003) 251, from memory'
+USUAL = ('3 %', '15 %', '10 %', '8 %')
+
+
+def andrade(T1, mu1, T2, mu2):
+    import math
+    b = math.log(mu1 / mu2) / (1 / T1 - 1 / T2)
+    return round(math.log(mu1) - b / T1, 6), round(b, 3)
+
+
+change('octadecane', ['n-octadecane', 'C18H38'], 301.3, 243, (865, 775), (0.36, 0.148), (1930, 2200), andrade(303, 3.9, 343, 1.95), (273.15, 373.15), MEHLING, USUAL, marks=('oil',))
+change('hexadecane', ['n-hexadecane', 'C16H34', 'cetane'], 291.3, 236, (835, 773), (0.33, 0.145), (1800, 2220), andrade(293, 3.45, 333, 1.6), (263.15, 373.15), MEHLING, USUAL, marks=('oil',))
+change('paraffin wax', ['paraffin', 'wax', 'candle wax'], 331, 190, (900, 770), (0.24, 0.16), (2890, 2300), andrade(338, 5.0, 373, 2.6), (283.15, 393.15), f'{A3} for the solid; {MEHLING}', ('4 %', '20 %', '25 %', '12 %'), 'a wax that melts at 58 degC; waxes soften over some 10 K', ('oil', 'flammable'))
+change('lauric acid', ['dodecanoic acid'], 317.2, 178, (1007, 862), (0.16, 0.147), (1760, 2270), andrade(323, 7.3, 353, 3.6), (273.15, 373.15), MEHLING, USUAL)
+change('calcium chloride hexahydrate', ['CaCl2.6H2O'], 302.8, 188, (1710, 1560), (1.09, 0.54), (1400, 2200), andrade(303, 14, 333, 6), (273.15, 343.15), MEHLING, USUAL, 'it undercools by 20 K without nucleators')
+change('sodium acetate trihydrate', ['sodium acetate'], 331.2, 260, (1450, 1280), (0.7, 0.45), (2790, 3000), andrade(333, 12, 363, 4.5), (283.15, 363.15), MEHLING, USUAL, 'it undercools by 80 K without nucleators')
+change('erythritol', [], 391, 339, (1480, 1300), (0.73, 0.33), (1350, 2740), andrade(393, 30, 423, 12), (293.15, 433.15), MEHLING, USUAL)
+change('sodium nitrate', ['NaNO3'], 580, 174, (2260, 1900), (0.6, 0.51), (1650, 1660), andrade(583, 3.0, 673, 1.9), (500, 720), MEHLING, ('3 %', '20 %', '8 %', '6 %'), marks=('moltenSalt',))
+
+# Unfrozen food, by composition.
+CHOI = 'Choi and Okos, in Food Engineering and Process Applications (1986), polynomials of the ASHRAE Handbook, Refrigeration (2006), chapter 9; composition of the USDA tables, from memory'
+for name, aliases, parts, T in (
+    ('apple', ['apples'], {'water': 0.839, 'protein': 0.002, 'fat': 0.004, 'carbohydrate': 0.125, 'fibre': 0.027, 'ash': 0.003}, (273.15, 343.15)), ('potato', ['potatoes'], {'water': 0.790, 'protein': 0.021, 'fat': 0.001, 'carbohydrate': 0.163, 'fibre': 0.016, 'ash': 0.009}, (273.15, 363.15)), ('carrot', ['carrots'], {'water': 0.878, 'protein': 0.010, 'fat': 0.002, 'carbohydrate': 0.071, 'fibre': 0.030, 'ash': 0.009}, (273.15, 363.15)),
+    ('beef', ['lean beef', 'meat'], {'water': 0.716, 'protein': 0.218, 'fat': 0.055, 'ash': 0.011}, (273.15, 343.15)), ('chicken', ['chicken breast', 'poultry'], {'water': 0.748, 'protein': 0.231, 'fat': 0.012, 'ash': 0.009}, (273.15, 343.15)), ('pork', ['lean pork'], {'water': 0.726, 'protein': 0.205, 'fat': 0.057, 'ash': 0.012}, (273.15, 343.15)), ('fish', ['cod', 'white fish'], {'water': 0.812, 'protein': 0.178, 'fat': 0.007, 'ash': 0.003}, (273.15, 343.15)),
+    ('cheese', ['cheddar', 'hard cheese'], {'water': 0.367, 'protein': 0.249, 'fat': 0.331, 'carbohydrate': 0.013, 'ash': 0.040}, (273.15, 313.15)), ('butter', [], {'water': 0.159, 'protein': 0.009, 'fat': 0.811, 'carbohydrate': 0.001, 'ash': 0.020}, (273.15, 303.15)), ('egg', ['whole egg', 'liquid egg'], {'water': 0.753, 'protein': 0.125, 'fat': 0.100, 'carbohydrate': 0.012, 'ash': 0.010}, (273.15, 333.15)), ('tomato', ['tomatoes'], {'water': 0.938, 'protein': 0.009, 'fat': 0.003, 'carbohydrate': 0.035, 'fibre': 0.011, 'ash': 0.004}, (273.15, 363.15)),
+):
+    parts['ash'] = round(1 - sum(v for key, v in parts.items() if key != 'ash'), 4)
+    write({'name': name, 'aliases': aliases, 'kind': 'solid', 'phases': ['solid'], 'about': 'raw, unfrozen, without air in pores', **{key: {'model': model, 'range': {'T': K(*T)}, 'uncertainty': u, 'source': CHOI, 'constants': parts} for key, model, u in (('density', 'food-density', '15 %' if name == 'apple' else '5 %'), ('thermalConductivity', 'food-conductivity', '20 %' if name == 'apple' else '12 %'), ('specificHeatCapacity', 'food-heat-capacity', '6 %'))}}, BY)
+solid('bread', ['white bread'], 220, 0.07, 2800, (273.15, 373.15), 'Rask, J. Food Eng. 9 (1989) 167, crumb, from memory', (25, 40, 15), 'crumb of white bread')
+
+# Tissue near body temperature.
+DUCK = 'Duck, Physical Properties of Tissue (1990), and McIntosh and Anderson, Biophys. Rev. Lett. 5 (2010) 129, from memory'
+for name, aliases, rho, k, cp in (('muscle', ['muscle tissue', 'skeletal muscle'], 1090, 0.49, 3421), ('fat tissue', ['adipose tissue', 'body fat'], 911, 0.21, 2348), ('skin', ['human skin'], 1109, 0.37, 3391), ('cortical bone', ['bone'], 1908, 0.32, 1313), ('liver tissue', ['liver'], 1079, 0.52, 3540), ('brain tissue', ['brain', 'grey matter'], 1045, 0.55, 3696), ('kidney tissue', ['kidney'], 1066, 0.53, 3763), ('lung tissue', ['lung', 'inflated lung'], 394, 0.39, 3886), ('tooth enamel', ['enamel'], 2958, 0.92, 750)):
+    solid(name, aliases, rho, k, cp, (303.15, 320.15), DUCK, (5 if name != 'lung tissue' else 40, 15 if name != 'lung tissue' else 30, 10), 'without its blood flow, which carries heat as well', more={'emissivity': emissivity([('dry', (303, 313), 0.97, 2)], 'Steketee, Phys. Med. Biol. 18 (1973) 686, 0.98 +/- 0.01; others 0.95')} if name == 'skin' else None)
