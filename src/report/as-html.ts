@@ -51,7 +51,7 @@ function toned(cell: string): string {
 }
 
 /** The one place where text enters the page. */
-function escaped(text: string): string {
+export function escaped(text: string): string {
   return text.replaceAll('&', '&amp;').replaceAll('<', '&lt;').replaceAll('>', '&gt;').replaceAll('"', '&quot;').replaceAll("'", '&#39;');
 }
 

@@ -3,6 +3,8 @@ export { gridsDocument, gridsText } from './grids.ts';
 export { choiceRuleText, effectRuleText, rulesListText } from './rules.ts';
 export { referenceCsv, referenceDocument, referenceList, referenceText } from './reference.ts';
 export { materialCsv, materialDocument, materialTableDocument, materialTableText, materialText } from './material.ts';
+export { fitsDocument, fitsText } from './material-fit.ts';
+export { plotSvg, plotText } from './material-plot.ts';
 export { wrapped } from './wrap.ts';
 export { planBlocks } from './plan-blocks.ts';
 export { asText } from './as-text.ts';

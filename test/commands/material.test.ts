@@ -35,13 +35,43 @@ describe('runbrief material', () => {
   it.each([
     [['material', 'steam', '--at', '60 degC, 2 bar'], 1, 'a temperature above 393.36 K (120.21 degC)'],
     [['material', 'watr', '--at', '60 degC, 2 bar'], 1, 'nearest   water'],
-    [['material', 'oil', '--at', '60 degC, 2 bar'], 1, 'engine oil, heat-transfer oil, light oil'],
+    [['material', 'oil', '--at', '60 degC, 2 bar'], 1, 'does not say which material is meant'],
+    [['material', 'sea water', '--at', '20 degC, 1 bar'], 1, 'composition 3.5 % mass'],
+    [['material', 'water', '--over', '20 degC .. 150 degC, 2 bar', '--fit', 'polynomial'], 1, 'turns from liquid to vapour'],
+    [['material', 'water', '--over', '20 degC .. 50 degC, 2 bar', '--fit', 'spline'], 2, 'polynomial'],
+    [['material', 'water', '--over', '20 degC .. 50 degC, 2 bar', '--fit', 'polynomial', '--of', 'viscosty'], 1, 'nearest   viscosity'],
     [['material', 'water'], 2, 'a state is needed'],
     [['material', 'water', '--over', '60 degC, 2 bar'], 1, 'the state has no range'],
   ])('%j', async (argv, code, says) => {
     const ended = await runbrief(argv);
     expect([ended.code, ended.stdout]).toEqual([code, '']);
     expect(ended.stderr).toContain(says);
+  });
+
+  it('gives functions ready to type in, within 80 columns', async () => {
+    const { code, stdout } = await runbrief(['material', 'water', '--over', '20 degC .. 90 degC, 2 bar', '--fit', 'polynomial', '--within', '0.1 %']);
+    expect(code).toBe(0);
+    expect(stdout).toMatch(/density, y in kg\/m\^3, x = temperature in K\n +y = a0 \+ a1 x \+ a2 x\^2\n +a0 +=/);
+    expect(stdout).toContain('safe from 293.15 K to 363.15 K');
+    for (const line of stdout.split('\n')) expect(line.length).toBeLessThanOrEqual(80);
+  });
+
+  it('a fit that is not within what was asked ends with 4', async () => {
+    const { code, stdout } = await runbrief(['material', 'engine oil', '--over', '20 degC .. 90 degC, 2 bar', '--fit', 'power', '--of', 'viscosity']);
+    expect(code).toBe(4);
+    expect(stdout).toContain('NOT within what was asked');
+  });
+
+  it('draws curves in plain characters', async () => {
+    const { stdout } = await runbrief(['material', 'air', '--over', '250 K .. 700 K, 1 atm', '--plot', '--of', 'viscosity']);
+    expect(stdout).toContain('dynamic viscosity [Pa s]');
+    expect(stdout.split('*').length).toBe(61);
+  });
+
+  it('takes gases by components', async () => {
+    const { code, stdout } = await runbrief(['material', 'gas mixture', '--at', '20 degC, 1 atm, CO2 13.3 % mol, oxygen 3.9 % mol, nitrogen 82.8 % mol']);
+    expect(code).toBe(0);
+    expect(stdout).toMatch(/dynamic viscosity +17\.2 uPa s/);
   });
 
   it('lists the materials', async () => expect((await runbrief(['material'])).stdout).toContain('lead-bismuth eutectic'));
