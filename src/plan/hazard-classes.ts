@@ -20,6 +20,15 @@ function pressure(on: HazardView): string | undefined {
   return undefined;
 }
 
+/** A liquid gives off enough vapour to light from 5 K below its flash point on. */
+function aboveFlash(on: HazardView): boolean {
+  const { fluid } = on.assembled;
+  if (fluid?.record.marks?.includes('flammable') !== true) return false;
+  const highest = on.number('highestTemperature') ?? on.number('temperature');
+  // What is marked and has no flash point is a liquefied gas.
+  return fluid.flashPoint === undefined || (highest !== undefined && highest > fluid.flashPoint - 5);
+}
+
 function hotOil(on: HazardView): string | undefined {
   const oil = on.mark('oil', 'fluid');
   return oil !== undefined && on.atLeast('highestTemperature', 'oilFlashLimit') ? `${oil} at {highestTemperature}; oils give off vapour that lights from {oilFlashLimit} on` : undefined;
@@ -27,7 +36,7 @@ function hotOil(on: HazardView): string | undefined {
 
 function cold(on: HazardView): string | undefined {
   if (on.below('lowestTemperature', 'coldLimit')) return 'down to {lowestTemperature}, below {coldLimit}';
-  return undefined;
+  return liquid(on) ? named(on.mark('cryogen', 'fluid')) : undefined;
 }
 
 function structure(on: HazardView): string | undefined {
@@ -54,7 +63,7 @@ function turning(on: HazardView): string | undefined {
 
 /** Classes of danger, the worst first. Each sentence defers to those who decide: local codes and licensed practice. */
 export const hazardClasses: readonly HazardClass[] = [
-  { id: 'flammable', title: 'Fire and explosion', why: (on) => named(on.mark('flammable', 'solute') ?? (gas(on) || (on.number('highestTemperature') !== undefined && on.atLeast('highestTemperature', 'touchLimit')) ? on.mark('flammable', 'fluid') : undefined) ?? on.mark('dust', 'solute', 'text')) ?? hotOil(on) ?? (on.word('has.burning') === 'yes' ? 'the case burns' : undefined), means: 'Flammable limits widen with temperature, pressure and oxygen, and a mean concentration hides rich pockets; classed areas and ignition sources are for a competent person to settle.' },
+  { id: 'flammable', title: 'Fire and explosion', why: (on) => named(on.mark('flammable', 'solute') ?? (gas(on) || (on.number('highestTemperature') !== undefined && on.atLeast('highestTemperature', 'touchLimit')) || aboveFlash(on) ? on.mark('flammable', 'fluid') : undefined) ?? on.mark('dust', 'solute', 'text')) ?? hotOil(on) ?? (on.word('has.burning') === 'yes' ? 'the case burns' : undefined), means: 'Flammable limits widen with temperature, pressure and oxygen, and a mean concentration hides rich pockets; classed areas and ignition sources are for a competent person to settle.' },
   { id: 'hydrogen', title: 'Hydrogen', why: (on) => named(on.mark('hydrogen', 'fluid', 'solute')), means: 'It leaks through the smallest gap, lights at the least spark, burns unseen, gathers under ceilings and makes metals brittle.' },
   { id: 'toxic', title: 'Poison', why: (on) => named(on.mark('toxic', 'fluid', 'solute')), means: 'Limits of exposure are law: take them from the list in force. A computed dilution is no proof that the air can be breathed.' },
   { id: 'carbon-dioxide', title: 'Carbon dioxide', why: (on) => named(on.mark('carbonDioxide', 'fluid', 'solute')), means: 'It poisons long before it displaces enough air for an oxygen alarm: have carbon dioxide itself measured.' },

@@ -3,13 +3,14 @@ import type { Assembled } from '../assemble/index.ts';
 /** Words that mark a substance, a use or a place as one that can hurt. Whole words, any case. */
 const marks = {
   hydrogen: ['hydrogen', 'h2', 'syngas'],
-  flammable: ['methane', 'natural gas', 'propane', 'butane', 'ethane', 'ethylene', 'acetylene', 'ethanol', 'methanol', 'acetone', 'toluene', 'benzene', 'hexane', 'petrol', 'gasoline', 'diesel', 'kerosene', 'fuel', 'ammonia', 'carbon monoxide', 'lpg', 'lng'],
+  flammable: ['methane', 'natural gas', 'propane', 'butane', 'isobutane', 'ethane', 'ethylene', 'propylene', 'acetylene', 'ethanol', 'methanol', 'propanol', '1-propanol', '2-propanol', 'isopropanol', 'butanol', 'acetone', 'toluene', 'benzene', 'xylene', 'o-xylene', 'm-xylene', 'p-xylene', 'ethylbenzene', 'styrene', 'pentane', 'hexane', 'heptane', 'octane', 'cyclohexane', 'dimethyl ether', 'hydrogen sulphide', 'hydrogen sulfide', 'h2s', 'petrol', 'gasoline', 'diesel', 'kerosene', 'fuel', 'ammonia', 'carbon monoxide', 'lpg', 'lng'],
   oil: ['light oil', 'engine oil', 'heat-transfer oil', 'thermal oil', 'mineral oil', 'lubricating oil'],
+  cryogen: ['liquid nitrogen', 'liquid oxygen', 'liquid argon', 'liquid hydrogen', 'liquid helium', 'ln2', 'lox', 'lh2', 'lng'],
   dust: ['coal dust', 'flour', 'wood dust', 'sugar dust', 'starch', 'aluminium powder', 'metal powder'],
-  toxic: ['carbon monoxide', 'co', 'ammonia', 'nh3', 'chlorine', 'hydrogen sulphide', 'hydrogen sulfide', 'h2s', 'sulphur dioxide', 'so2', 'nitrogen dioxide', 'no2', 'phosgene', 'hydrogen fluoride', 'hydrogen chloride', 'formaldehyde', 'benzene', 'mercury', 'lead', 'lead-bismuth eutectic', 'flibe', 'beryllium', 'methanol'],
+  toxic: ['carbon monoxide', 'co', 'ammonia', 'nh3', 'chlorine', 'hydrogen sulphide', 'hydrogen sulfide', 'h2s', 'sulphur dioxide', 'so2', 'nitrogen dioxide', 'no2', 'phosgene', 'hydrogen fluoride', 'hydrogen chloride', 'nitric oxide', 'formaldehyde', 'benzene', 'toluene', 'styrene', 'chloroform', 'carbon tetrachloride', 'mercury', 'lead', 'lead-bismuth eutectic', 'flibe', 'beryllium', 'methanol'],
   carbonDioxide: ['carbon dioxide', 'co2'],
   inert: ['nitrogen', 'n2', 'argon', 'helium', 'carbon dioxide', 'co2', 'sulphur hexafluoride', 'sf6', 'xenon', 'krypton', 'neon'],
-  oxygen: ['oxygen', 'o2'],
+  oxygen: ['oxygen', 'o2', 'nitrous oxide', 'n2o', 'chlorine'],
   liquidMetal: ['sodium', 'potassium', 'nak', 'lithium', 'lead', 'lead-bismuth eutectic', 'lead-lithium', 'gallium', 'mercury', 'tin'],
   moltenSalt: ['solar salt', 'flibe', 'molten salt', 'nitrate salt', 'chloride salt', 'fluoride salt'],
   medical: ['patient', 'blood', 'drug', 'implant', 'stent', 'lung', 'airway', 'medical', 'dialysis', 'inhaler', 'artery'],
@@ -38,7 +39,7 @@ export type Where = 'fluid' | 'solute' | 'text';
  */
 export function wordOf(assembled: Assembled, mark: Mark, where: readonly Where[]): string | undefined {
   const { fluid } = assembled;
-  if (fluid !== undefined && where.includes('fluid') && (fluid.record.marks as readonly string[] | undefined)?.includes(mark)) return fluid.name.toLowerCase();
+  if (fluid !== undefined && where.includes('fluid') && (fluid.record.marks as readonly string[] | undefined)?.includes(mark) === true) return fluid.name;
   const text = where.flatMap((w) => textOf(assembled, w)).join(' | ').toLowerCase();
   return marks[mark].find((word) => new RegExp(`(?<![a-z0-9])${word}(?![a-z0-9])`).test(text));
 }

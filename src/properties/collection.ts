@@ -61,6 +61,7 @@ export function loadMaterial(name: string, collection: Collection = shippedMater
   const before = known.get(key);
   if (before !== undefined) return before;
   const found = Object.hasOwn(collection.names, key) ? collection.names[key] : undefined;
+  if (found?.among !== undefined) throw ambiguous(name, found.among);
   const record = found && collection.record(found.id);
   if (found === undefined || record === undefined) throw unknown(name, key, collection);
   const material = materialOf(record, collection, found.asked);
@@ -78,14 +79,16 @@ export function materialNames(collection: Collection = shippedMaterials()): stri
   return [...new Set(Object.values(collection.names).map(({ name }) => name))].sort((a, b) => (a.toLowerCase() < b.toLowerCase() ? -1 : 1));
 }
 
+function ambiguous(name: string, candidates: Iterable<string>): Problem {
+  return new Problem({ code: 'ambiguous-material', message: `"${name.slice(0, 60)}" does not say which material is meant`, expected: `one of ${[...candidates].sort().join(', ')}` });
+}
+
 function unknown(name: string, key: string, collection: Collection): Problem {
   const shown = name.slice(0, 60);
   const entries = Object.entries(collection.names);
   const candidates = new Set<string>();
   if (key.length >= 3) for (const [other, named] of entries) if (other.split(' ').includes(key)) candidates.add(named.name);
-  if (candidates.size > 1) {
-    return new Problem({ code: 'ambiguous-material', message: `"${shown}" does not say which material is meant`, expected: `one of ${[...candidates].sort().join(', ')}` });
-  }
+  if (candidates.size > 1) return ambiguous(name, candidates);
   const nearest = nearestName(key, Object.keys(collection.names)) ?? [...candidates].map(plainName)[0];
   const named = nearest === undefined ? undefined : collection.names[nearest];
   return new Problem({

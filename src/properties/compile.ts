@@ -7,7 +7,7 @@ import { collectionOf, plainName } from './names.ts';
 import { dangerMarks, propertyUnits, type Band, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
 import { yamlReader, type YamlReader } from './yaml-reader.ts';
 
-const headKeys = ['name', 'formula', 'aliases', 'phaseNames', 'kind', 'phases', 'marks', 'takes', 'typical', 'molarMass', 'critical', 'triplePoint', 'about', 'thermodynamics'];
+const headKeys = ['name', 'formula', 'aliases', 'phaseNames', 'kind', 'phases', 'marks', 'takes', 'typical', 'molarMass', 'flashPoint', 'critical', 'triplePoint', 'about', 'thermodynamics'];
 const derived: readonly string[] = ['kinematicViscosity', 'thermalDiffusivity', 'prandtl', 'molarMass'];
 const recorded = Object.keys(propertyUnits).filter((id) => !derived.includes(id));
 
@@ -65,6 +65,7 @@ export function compileMaterial(text: string, file: string): MaterialRecord {
     takes: texts('takes') as MaterialRecord['takes'][number][],
     ...(raw['typical'] === undefined ? {} : { typical: reader.quantity(['typical'], raw['typical'], '1') }),
     ...(raw['molarMass'] === undefined ? {} : { molarMass: reader.quantity(['molarMass'], raw['molarMass'], 'kg/mol') }),
+    ...(raw['flashPoint'] === undefined ? {} : { flashPoint: reader.quantity(['flashPoint'], raw['flashPoint'], 'K') }),
     ...group('critical', { temperature: 'K', pressure: 'Pa', density: 'kg/m^3' }),
     ...group('triplePoint', { temperature: 'K', pressure: 'Pa' }),
     ...(typeof raw['about'] === 'string' ? { about: raw['about'] } : {}),

@@ -15,6 +15,8 @@ export interface Material {
   readonly phases: readonly (Side | 'solid')[];
   /** [kg/mol] */
   readonly molarMass?: number;
+  /** Closed cup, at the atmosphere [K]. */
+  readonly flashPoint?: number;
   /** Specific gas constant [J/(kg K)]. */
   readonly gasConstant?: number;
   /** [K], [Pa], [kg/m^3] */
@@ -110,6 +112,8 @@ function engineOf(record: MaterialRecord, collection: Collection): MaterialEngin
       composition = s.x;
       return engine.equation;
     },
+    partner: (id) => engineOf(partner(collection, id), collection),
+    constants: (property) => record.properties[property]?.[0]?.constants,
     saturation: (T) => lineOf(engine.equation).bubble(T),
     value(property, s) {
       if (record.thermodynamics !== undefined && property in fromEquation) return fromEquation[property as keyof typeof fromEquation](engine.point(s), engine.equation.gasConstant);
@@ -178,6 +182,7 @@ export function materialOf(record: MaterialRecord, collection: Collection, asked
     phases: record.phases,
     ...(record.molarMass === undefined ? {} : { molarMass: record.molarMass }),
     ...(record.molarMass === undefined || record.kind === 'solid' ? {} : { gasConstant: gasConstantMolar / record.molarMass }),
+    ...(record.flashPoint === undefined ? {} : { flashPoint: record.flashPoint }),
     ...(record.critical === undefined ? {} : { critical: record.critical }),
     ...(record.triplePoint === undefined ? {} : { triple: record.triplePoint }),
     ...(melting === undefined ? {} : { meltingTemperature: engine.evaluate(melting, { T: Number.NaN, p: 101325, side: 'liquid', x: 0 }) }),

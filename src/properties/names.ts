@@ -17,9 +17,21 @@ export const plainName = (name: string): string => name.trim().toLowerCase().rep
 function namesOf(record: MaterialRecord): { [plain: string]: NamedMaterial } {
   const { id, name } = record;
   const names: { [plain: string]: NamedMaterial } = {};
-  for (const one of [id, name, ...record.aliases, ...(record.formula === undefined ? [] : [record.formula])]) names[plainName(one)] = { id, name };
+  for (const one of [id, name, ...record.aliases]) names[plainName(one)] = { id, name };
   for (const [one, asked] of Object.entries(record.phaseNames)) names[plainName(one)] = { id, name, asked };
   return names;
+}
+
+/** Formulas: of one record, or of several that share it and are told apart by name. A name goes before a formula. */
+function formulasOf(records: readonly MaterialRecord[]): { [plain: string]: NamedMaterial } {
+  const found: { [plain: string]: NamedMaterial } = {};
+  for (const { id, name, formula } of records) {
+    if (formula === undefined) continue;
+    const plain = plainName(formula);
+    const before = found[plain];
+    found[plain] = before === undefined ? { id, name } : { ...before, among: [...(before.among ?? [before.name]), name] };
+  }
+  return found;
 }
 
 /**
@@ -32,5 +44,5 @@ function namesOf(record: MaterialRecord): { [plain: string]: NamedMaterial } {
 export function collectionOf(records: readonly MaterialRecord[], under?: Collection): Collection {
   const byId = new Map(records.map((record) => [record.id, record]));
   const below = Object.entries(under?.names ?? {}).filter(([, { id }]) => !byId.has(id));
-  return { names: { ...Object.fromEntries(below), ...Object.assign({}, ...records.map(namesOf)) as Collection['names'] }, record: (id) => byId.get(id) ?? under?.record(id) };
+  return { names: { ...formulasOf(records), ...Object.fromEntries(below), ...Object.assign({}, ...records.map(namesOf)) as Collection['names'] }, record: (id) => byId.get(id) ?? under?.record(id) };
 }

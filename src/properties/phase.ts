@@ -117,12 +117,20 @@ export function phaseAt(material: Material, T: number, p: number, x = 0): PhaseA
 
 function meltingAt(material: Material, T: number, p: number, x: number): number | undefined {
   const entry = material.record.properties['meltingTemperature']?.[0];
-  // No record has a melting line that rises by more than this above its value at the atmosphere.
-  if (entry === undefined || T > (material.meltingTemperature ?? 0) * 1.002) return undefined;
+  if (entry === undefined) return undefined;
   const range = entry.ranges[0]?.pressure;
-  const at = range === undefined ? p : Math.min(range[1], Math.max(range[0], p));
-  return material.engine.evaluate(entry, { T: Number.NaN, p: at, side: 'liquid', x });
+  const melting = (at: number): number => material.engine.evaluate(entry, { T: Number.NaN, p: range === undefined ? at : Math.min(range[1], Math.max(range[0], at)), side: 'liquid', x });
+  let highest = highestMelting.get(material);
+  if (highest === undefined) {
+    // A melting line is monotone: its highest temperature stands at one of its ends. What is dissolved lowers it.
+    highest = 1.002 * Math.max(material.meltingTemperature ?? 0, ...(material.takes.length > 0 ? [] : (range ?? []).map(melting)));
+    highestMelting.set(material, highest);
+  }
+  return T > highest ? undefined : melting(p);
 }
+
+/** Above this temperature [K] nothing of a material is solid in its range, so that its line need not be asked. */
+const highestMelting = new WeakMap<Material, number>();
 
 const side = (phase: Phase): Side | 'solid' => (phase === 'solid' ? 'solid' : phase === 'liquid' ? 'liquid' : 'vapour');
 

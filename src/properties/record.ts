@@ -96,6 +96,8 @@ export interface MaterialRecord {
   /** The share most often met, for the message where none is given. */
   readonly typical?: number;
   readonly molarMass?: number;
+  /** Closed cup, at the atmosphere [K]. */
+  readonly flashPoint?: number;
   readonly critical?: { readonly temperature: number; readonly pressure: number; readonly density: number };
   readonly triplePoint?: { readonly temperature: number; readonly pressure: number };
   /** What the record stands for where the name alone leaves it open, such as a class of oils. */
@@ -111,6 +113,8 @@ export interface NamedMaterial {
   readonly name: string;
   /** The phase the name asks for, such as that of steam. */
   readonly asked?: Side;
+  /** Several materials share this formula: their names. */
+  readonly among?: readonly string[];
 }
 
 /** Records, each read when it is asked for. */

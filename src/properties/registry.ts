@@ -10,6 +10,7 @@ import { lineOf } from './models/point.ts';
 import { seaWater, type SeaWaterConstants } from './models/sea-water.ts';
 import { lemmonJacobsenConductivity, lemmonJacobsenViscosity, type GasConductivityConstants, type GasViscosityConstants } from './models/gas-transport.ts';
 import { waterConductivity, waterCriticalFactor, waterViscosity, type WaterConductivityConstants, type WaterViscosityConstants } from './models/water-transport.ts';
+import { fluidModels } from './registry-of-fluids.ts';
 import type { EquationModel, PropertyModel, Sample } from './sample.ts';
 
 type OfTemperature = (c: never) => (T: number) => number;
@@ -65,6 +66,7 @@ const foodParts = ['water?', 'protein?', 'fat?', 'carbohydrate?', 'fibre?', 'ash
 
 /** Correlations by the name that records use. */
 export const propertyModels: { readonly [name: string]: PropertyModel } = {
+  ...fluidModels,
   constant: { constants: ['value'], make: (c: { value: number }) => () => c.value },
   polynomial: ofTemperature(['terms', 'gives?', 'argument?', 'origin?', 'scale?'], laws.polynomial),
   powers: ofTemperature(['terms', 'gives?', 'argument?'], laws.powers),

@@ -27,6 +27,10 @@ export interface Engine {
   /** Saturation pressure [Pa] at T. */
   saturation(T: number): number;
   readonly molarMass: number;
+  /** Another material of the collection that a correlation refers to, by id. */
+  partner(id: string): Engine;
+  /** Constants of the first entry of a property; undefined where there is none. */
+  constants(property: PropertyId): unknown;
 }
 
 /** One named correlation: the constants it takes, and how it is built from them. A `?` at the end marks one that may be missing. */

@@ -1,4 +1,4 @@
-import type { Residual } from './helmholtz-terms.ts';
+import type { Residual } from './helmholtz-rare-terms.ts';
 
 /**
  * Saturation pressure from equal pressure and equal Gibbs energy of both phases.

@@ -1,3 +1,5 @@
+import { associatingPart, decayingPart, type Adder, type Residual } from './helmholtz-rare-terms.ts';
+
 /** Residual terms of a Helmholtz equation of state, as the papers print them. */
 export interface ResidualTerms {
   /** Rows [n, d, t, c]: n delta^d tau^t exp(-delta^c); c = 0 means without the exponential. */
@@ -6,18 +8,10 @@ export interface ResidualTerms {
   readonly gaussian?: readonly (readonly number[])[];
   /** Rows [n, a, b, B, C, D, A, beta]: n Delta^b delta psi, the terms that shape the critical region. */
   readonly critical?: readonly (readonly number[])[];
-}
-
-/** Values of the residual part and its derivatives, overwritten by the next evaluation. */
-export interface Residual {
-  a: number;
-  /** Derivative by delta. */
-  d: number;
-  dd: number;
-  /** Derivative by tau. */
-  t: number;
-  tt: number;
-  dt: number;
+  /** Rows [n, d, t, g, l, gt, lt], any real powers. */
+  readonly decaying?: readonly (readonly number[])[];
+  /** Rows [n, d, t, eta, beta, gamma, epsilon, b], the terms of associating fluids. */
+  readonly associating?: readonly (readonly number[])[];
 }
 
 const column = (rows: readonly (readonly number[])[], index: number): Float64Array => Float64Array.from(rows, (row) => row[index] ?? 0);
@@ -35,12 +29,14 @@ export function residualPart(terms: ResidualTerms): { first: (tau: number, delta
   const [n, d, t, c] = [0, 1, 2, 3].map((i) => column(terms.power, i)) as [Float64Array, Float64Array, Float64Array, Float64Array];
   const count = n.length;
   const warmed = new Float64Array(count);
-  const powers = new Float64Array(Math.max(...d, ...c) + 1);
-  const decays = new Float64Array(Math.max(...c) + 1);
+  const powers = new Float64Array(Math.max(0, ...d, ...c) + 1);
+  const decays = new Float64Array(Math.max(0, ...c) + 1);
   const out: Residual = { a: 0, d: 0, dd: 0, t: 0, tt: 0, dt: 0 };
   let tauKept = Number.NaN;
   const gaussian = gaussianPart(terms.gaussian ?? []);
   const critical = criticalPart(terms.critical ?? []);
+  const decaying = terms.decaying && decayingPart(terms.decaying);
+  const associating = terms.associating && associatingPart(terms.associating);
 
   const run = (tau: number, delta: number, full: boolean): Residual => {
     if (tau !== tauKept) {
@@ -75,12 +71,12 @@ export function residualPart(terms: ResidualTerms): { first: (tau: number, delta
     out.dt = adt / (tau * delta);
     if (gaussian !== undefined) gaussian(tau, delta, out);
     if (critical !== undefined) critical(tau, delta, out);
+    if (decaying !== undefined) decaying(tau, delta, out);
+    if (associating !== undefined) associating(tau, delta, out);
     return out;
   };
   return { first: (tau, delta) => run(tau, delta, false), all: (tau, delta) => run(tau, delta, true) };
 }
-
-type Adder = (tau: number, delta: number, out: Residual) => void;
 
 function gaussianPart(rows: readonly (readonly number[])[]): Adder | undefined {
   if (rows.length === 0) return undefined;

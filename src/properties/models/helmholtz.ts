@@ -1,4 +1,4 @@
-import type { EquationOfState, Point, SaturationLine, Side } from './point.ts';
+import type { EquationOfState, Point, ReducedResidual, SaturationLine, Side } from './point.ts';
 import { residualPart, type ResidualTerms } from './helmholtz-terms.ts';
 import { saturationByMaxwell } from './helmholtz-saturation.ts';
 import { ancillary, type Ancillary } from './ancillary.ts';
@@ -139,7 +139,8 @@ export function helmholtz(constants: HelmholtzConstants): EquationOfState {
   };
 
   const line = start && lineOf(constants, start, residual);
-  return { gasConstant: R, of, at: (T, p, side) => of(T, densityAt(T, p, side)), ...(line === undefined ? {} : { line }) };
+  const residualAt = (T: number, rho: number): ReducedResidual => ({ ...residual.all(Tr / T, rho / rhor), tau: Tr / T, delta: rho / rhor });
+  return { gasConstant: R, of, residual: residualAt, at: (T, p, side) => of(T, densityAt(T, p, side)), ...(line === undefined ? {} : { line }) };
 }
 
 function lineOf(constants: HelmholtzConstants, start: SaturationStart, residual: ReturnType<typeof residualPart>): SaturationLine {

@@ -42,12 +42,26 @@ export function lineOf(equation: EquationOfState): SaturationLine {
   return equation.line;
 }
 
+/** Residual Helmholtz energy over R T, its derivatives by the reciprocal reduced temperature tau and the reduced density delta. */
+export interface ReducedResidual {
+  readonly tau: number;
+  readonly delta: number;
+  readonly a: number;
+  readonly d: number;
+  readonly dd: number;
+  readonly t: number;
+  readonly tt: number;
+  readonly dt: number;
+}
+
 /** What every equation of state offers. */
 export interface EquationOfState {
   /** Properties at T [K] and p [Pa]; `side` is used only below the critical temperature. The caller has checked the phase. */
   at(T: number, p: number, side: Side): Point;
   /** Properties at T [K] and density [kg/m^3]: for transport correlations and verification tables. */
   of(T: number, rho: number): Point;
+  /** Reduced residual energy and its derivatives at T [K] and density [kg/m^3], where the equation is one of energy. */
+  residual?(T: number, rho: number): ReducedResidual;
   readonly line?: SaturationLine;
   /** The share at another state of the same matter, where it is counted against saturation: relative humidity falls as moist air warms. */
   carried?(share: number, from: { readonly T: number; readonly p: number }, to: { readonly T: number; readonly p: number }): number;

@@ -1,0 +1,255 @@
+"""Correlations of Perry's Handbook and the VDI Heat Atlas, as the package chemicals carries them, for saturated liquids and dilute gases."""
+import csv
+import functools
+import math
+import os
+
+import chemicals
+
+from emit import number
+
+CARRIED = 'constants as carried by chemicals 1.5.2 (MIT licence)'
+PERRY = "Perry's Chemical Engineers' Handbook, 8th ed. (2007)"
+VDI = 'VDI Heat Atlas, 2nd ed. (2010), D3.1'
+R = 8.31446261815324
+ROOT = os.path.dirname(chemicals.__file__)
+
+TABLES = {
+    ('viscosity', 'vapour', 'perry'): ('Viscosity/Table 2-312 Vapor Viscosity of Inorganic and Organic Substances.tsv', 'table 2-312'),
+    ('viscosity', 'liquid', 'perry'): ('Viscosity/Table 2-313 Viscosity of Inorganic and Organic Liquids.tsv', 'table 2-313'),
+    ('viscosity', 'vapour', 'vdi'): ('Viscosity/VDI PPDS Dynamic viscosity of gases polynomials.tsv', 'table 8'),
+    ('viscosity', 'liquid', 'vdi'): ('Viscosity/VDI PPDS Dynamic viscosity of saturated liquids polynomials.tsv', 'table 7'),
+    ('thermalConductivity', 'vapour', 'perry'): ('Thermal Conductivity/Table 2-314 Vapor Thermal Conductivity of Inorganic and Organic Substances.tsv', 'table 2-314'),
+    ('thermalConductivity', 'liquid', 'perry'): ('Thermal Conductivity/Table 2-315 Thermal Conductivity of Inorganic and Organic Liquids.tsv', 'table 2-315'),
+    ('thermalConductivity', 'vapour', 'vdi'): ('Thermal Conductivity/VDI PPDS Thermal conductivity of gases.tsv', 'table 10'),
+    ('thermalConductivity', 'liquid', 'vdi'): ('Thermal Conductivity/VDI PPDS Thermal conductivity of saturated liquids.tsv', 'table 9'),
+    ('density', 'liquid', 'perry'): ('Density/Perry Parameters 105.tsv', 'table 2-32'),
+    ('density', 'liquid', 'vdi'): ('Density/VDI PPDS Density of Saturated Liquids.tsv', 'table 2'),
+    ('surfaceTension', 'liquid', 'vdi'): ('Interface/VDI PPDS surface tensions.tsv', 'table 11'),
+    ('surfaceTension', 'liquid', 'jasper'): ('Interface/Jasper-Lange.tsv', ''),
+    ('latentHeat', 'liquid', 'perry'): ('Phase Change/Table 2-150 Heats of Vaporization of Inorganic and Organic Liquids.tsv', 'table 2-150'),
+    ('latentHeat', 'liquid', 'vdi'): ('Phase Change/VDI PPDS Enthalpies of vaporization.tsv', 'table 4'),
+    ('vapourPressure', 'liquid', 'perry'): ('Vapor Pressure/Table 2-8 Vapor Pressure of Inorganic and Organic Liquids.tsv', 'table 2-8'),
+    ('vapourPressure', 'liquid', 'vdi'): ('Vapor Pressure/VDI PPDS Boiling temperatures at different pressures.tsv', 'table 3'),
+    ('specificHeatCapacity', 'liquid', 'perry'): ('Heat Capacity/Perry_Table_2-153_DIPPR_100.tsv', 'table 2-153'),
+    ('specificHeatCapacity', 'liquid', 'zabransky'): ('Heat Capacity/Zabransky.tsv', ''),
+    ('specificHeatCapacity', 'vapour', 'poling'): ('Heat Capacity/PolingDatabank.tsv', ''),
+}
+# What such correlations are good for at best, 95 %.
+FLOORS = {('viscosity', 'vapour'): 5, ('viscosity', 'liquid'): 8, ('thermalConductivity', 'vapour'): 8, ('thermalConductivity', 'liquid'): 6, ('density', 'liquid'): 1, ('surfaceTension', 'liquid'): 5, ('latentHeat', 'liquid'): 4, ('vapourPressure', 'liquid'): 3, ('specificHeatCapacity', 'liquid'): 3}
+
+
+@functools.cache
+def table(file):
+    with open(os.path.join(ROOT, file), encoding='utf-8') as source:
+        lines = list(csv.reader(source, delimiter='\t'))
+    return lines[0], {line[0]: line for line in reversed(lines[1:]) if line}, lines[1:]
+
+
+def row(key, side, work, cas):
+    """Numbers of one substance by column name; None where the work has none."""
+    place = TABLES.get((key, side, work))
+    if place is None:
+        return None
+    head, by_cas, _ = table(place[0])
+    line = by_cas.get(cas)
+    if line is None:
+        return None
+    out = {}
+    for name, text in zip(head, line):
+        try:
+            out[name] = float(text)
+        except ValueError:
+            pass
+    return out
+
+
+def eq101(c, T):
+    return math.exp(c['C1'] + c['C2'] / T + c['C3'] * math.log(T) + (c['C4'] * T ** c['C5'] if c['C4'] else 0))
+
+
+def law(key, side, work, cas, M):
+    """Model, constants, value as a function of T in SI, temperature limits where stated."""
+    c = row(key, side, work, cas)
+    if c is None:
+        return None
+    low, high = c.get('Tmin'), c.get('Tmax')
+    if key in ('viscosity', 'thermalConductivity'):
+        if work == 'vdi' and key == 'viscosity' and side == 'liquid':
+            keys = {k: c[k] for k in 'ABCDE'}
+            low, high = c['D'] + 1, c['C']
+
+            def value(T):
+                x = (c['C'] - T) / (T - c['D'])
+                return c['E'] * math.exp(math.copysign(abs(x) ** (1 / 3), x) * (c['A'] + c['B'] * x))
+            return 'liquid-viscosity', {**keys, 'gives': 'Pa s'}, value, low, high
+        if work == 'vdi':
+            terms = [c[k] for k in 'ABCDE']
+            while terms and terms[-1] == 0:
+                terms.pop()
+            return 'polynomial', {'gives': 'Pa s' if key == 'viscosity' else 'W/(m K)', 'terms': terms}, lambda T: sum(a * T ** i for i, a in enumerate(terms)), None, None
+        if side == 'vapour':
+            keys = {'A': c['C1'], 'B': c['C2'], 'C': c['C3'], 'D': c['C4']}
+            return 'gas-powers', {**keys, 'gives': 'Pa s' if key == 'viscosity' else 'W/(m K)'}, lambda T: c['C1'] * T ** c['C2'] / (1 + c['C3'] / T + c['C4'] / T ** 2), low, high
+        if key == 'viscosity':
+            terms = [[c['C1'], 0], [c['C2'], -1], *([[c['C4'], c['C5']]] if c['C4'] else [])]
+            return 'log-powers', {'gives': 'Pa s', 'terms': terms, **({'log': c['C3']} if c['C3'] else {})}, lambda T: eq101(c, T), low, high
+        terms = [c[f'C{i}'] for i in range(1, 6)]
+        while terms[-1] == 0:
+            terms.pop()
+        return 'polynomial', {'gives': 'W/(m K)', 'terms': terms}, lambda T: sum(a * T ** i for i, a in enumerate(terms)), low, high
+    if key == 'density':
+        if work == 'perry':
+            A, B, C, D = c['C1'] * M, c['C2'], c['C3'], c['C4']
+            return 'rackett', {'A': A, 'B': B, 'C': f'{number(C)} K', 'D': D}, lambda T: A / B ** (1 + max(0, 1 - T / C) ** D), low, high
+        terms = [[c[k], e] for k, e in zip('ABCD', (0.35, 2 / 3, 1, 4 / 3))]
+        return 'critical-powers', {'critical': f"{number(c['Tc'])} K", 'base': c['rhoc'], 'gives': 'kg/m^3', 'terms': terms}, lambda T: c['rhoc'] + sum(n * max(0, 1 - T / c['Tc']) ** e for n, e in terms), None, None
+    if key == 'surfaceTension':
+        if work == 'jasper':
+            return 'polynomial', {'gives': 'mN/m', 'argument': 'degC', 'terms': [c['a'], -c['b']]}, lambda T: 1e-3 * (c['a'] - c['b'] * (T - 273.15)), low, high
+        terms = [c[k] for k in 'BCDE']
+        return 'reduced-power', {'critical': f"{number(c['Tc'])} K", 'A': c['A'], 'terms': terms, 'gives': 'N/m'}, lambda T: c['A'] * max(0, 1 - T / c['Tc']) ** sum(t * (T / c['Tc']) ** i for i, t in enumerate(terms)), c['Tm'], c['Tc']
+    if key == 'latentHeat':
+        if work == 'perry':
+            terms = [c['C2'], c['C3'], c['C4'], 0]
+            A = c['C1'] / M
+            return 'reduced-power', {'critical': f"{number(c['Tc'])} K", 'A': A, 'terms': terms, 'gives': 'J/kg'}, lambda T: A * max(0, 1 - T / c['Tc']) ** sum(t * (T / c['Tc']) ** i for i, t in enumerate(terms)), low, high
+        terms = [[R * c['Tc'] * c[k] / M, e] for k, e in zip('ABCDE', (1 / 3, 2 / 3, 1, 2, 6))]
+        return 'critical-powers', {'critical': f"{number(c['Tc'])} K", 'gives': 'J/kg', 'terms': terms}, lambda T: sum(n * max(0, 1 - T / c['Tc']) ** e for n, e in terms), None, None
+    if key == 'vapourPressure':
+        if work == 'perry':
+            terms = [[c['C1'], 0], [c['C2'], -1], *([[c['C4'], c['C5']]] if c['C4'] else [])]
+            return 'log-powers', {'gives': 'Pa', 'terms': terms, 'log': c['C3']}, lambda T: eq101(c, T), low, high
+        terms = [[c[k], e] for k, e in zip('ABCD', (1, 1.5, 2.5, 5))]
+        return 'saturation-powers', {'temperature': f"{number(c['Tc'])} K", 'pressure': f"{number(c['Pc'])} Pa", 'terms': terms}, lambda T: c['Pc'] * math.exp(c['Tc'] / T * sum(n * max(0, 1 - T / c['Tc']) ** e for n, e in terms)), c['Tm'], c['Tc']
+    if key == 'specificHeatCapacity' and work == 'perry':
+        terms = [c[k] / (1000 * M) for k in 'ABCDE']
+        while terms[-1] == 0:
+            terms.pop()
+        return 'polynomial', {'gives': 'J/(kg K)', 'terms': terms}, lambda T: sum(a * T ** i for i, a in enumerate(terms)), low, high
+    if key == 'specificHeatCapacity' and work == 'zabransky':
+        head, _, lines = table(TABLES[(key, side, work)][0])
+        best = None
+        for line in lines:
+            if line[0] != cas or not any(float(x or 0) for x in line[6:10]):
+                continue
+            given = dict(zip(head, line))
+            low, high = float(given['Tmin']), float(given['Tmax'])
+            if best is None or high - low > best[1] - best[0]:
+                best = (low, high, [float(given[f'A{i}-spline']) * R / M for i in range(1, 5)])
+        if best is None:
+            return None
+        low, high, terms = best
+        return 'polynomial', {'gives': 'J/(kg K)', 'scale': '100 K', 'terms': terms}, lambda T: sum(a * (T / 100) ** i for i, a in enumerate(terms)), low, high
+    raise ValueError((key, work))
+
+
+def source(key, side, work):
+    works = {'perry': PERRY, 'vdi': VDI, 'jasper': 'Jasper, J. Phys. Chem. Ref. Data 1 (1972) 841', 'zabransky': 'Zabransky, Kolska, Ruzicka and Domalski, J. Phys. Chem. Ref. Data 39 (2010) 013103'}
+    place = TABLES[(key, side, work)][1]
+    return f"{works[work]}{', ' + place if place and work == 'perry' else ''}; {CARRIED}"
+
+
+def spread(one, other, low, high):
+    """Largest relative difference of two laws over a range, in per cent; None where they share none."""
+    low, high = max(low, other[3] or low), min(high, other[4] or high)
+    if not high > low:
+        return None
+    worst = 0
+    for i in range(25):
+        T = low + (high - low) * i / 24
+        a, b = one[2](T), other[2](T)
+        if not (a > 0 and b > 0):
+            return None
+        worst = max(worst, abs(a / b - 1))
+    return 100 * worst
+
+
+def entry(key, side, cas, M, low, high, pressure, works, phase=True):
+    """The first work's correlation between two temperatures; uncertainty from the second work, not below the floor."""
+    laws = [(work, law(key, side, work, cas, M)) for work in works]
+    laws = [(work, one) for work, one in laws if one is not None]
+    if not laws:
+        return None
+    work, first = laws[0]
+    low, high = max(low, first[3] or low), min(high, first[4] or high)
+    if not high > low + 5:
+        return None
+    floor = FLOORS[(key, side)]
+    second = laws[1] if len(laws) > 1 else None
+    apart = spread(first, second[1], low, high) if second else None
+    # Where the works part at the ends of the range, the range is cut until they agree within four floors.
+    while apart is not None and apart > 4 * floor and high - low > 40:
+        apart_low, apart_high = spread(first, second[1], low + 5, high), spread(first, second[1], low, high - 5)
+        if apart_low is None or apart_high is None:
+            break
+        if apart_low < apart_high:
+            low, apart = low + 5, apart_low
+        else:
+            high, apart = high - 5, apart_high
+    value = floor * 1.6 if apart is None else max(floor, math.ceil(1.1 * apart))
+    said = f'; uncertainty at least the difference from the {"VDI Heat Atlas" if second[0] == "vdi" else "second work"} over the range' if apart is not None else '; not held against a second work: the uncertainty is from memory of such correlations'
+    out = {'model': first[0], **({'phase': side} if phase else {}), 'range': {'T': [f'{number(round(low, 2))} K', f'{number(round(high, 2))} K'], **({'p': ['0 Pa', f'{number(pressure)} Pa']} if pressure else {})}, 'uncertainty': f'{number(float(value))} %', 'source': source(key, side, work) + said, 'constants': first[1]}
+    return out
+
+
+def transport(key, cas, f):
+    """Entries of the saturated liquid and the dilute gas of a fluid with an equation of state."""
+    liquid_high = 0.9 * f['Tc']
+    import CoolProp.CoolProp as CP
+    top = max(2e6, 1.05 * CP.PropsSI('P', 'T', liquid_high, 'Q', 0, f['name']))
+    pairs = [entry(key, 'liquid', cas, f['M'], f['low'], liquid_high, float(f'{top:.2g}'), ('perry', 'vdi')), entry(key, 'vapour', cas, f['M'], f['low'], min(1000, max(f['high'], 1.5 * f['Tc'])), float(f"{max(0.04 * f['pc'], 2e5):.2g}"), ('perry', 'vdi'))]
+    return [one for one in pairs if one is not None]
+
+
+def tension(cas, low, high):
+    return entry('surfaceTension', 'liquid', cas, 1, low, high * 0.98, None, ('vdi', 'jasper'), phase=False)
+
+
+def flash(cas):
+    """Flash point, closed cup, of what is a liquid at ambient pressure; liquefied gases always give off enough vapour."""
+    value = chemicals.T_flash(cas)
+    return {'flashPoint': f'{number(round(value, 2))} K'} if value is not None and chemicals.Tb(cas) > 273 else {}
+
+
+def liquid_record(fluid):
+    """A liquid without an equation of state: correlations near saturation."""
+    cas = fluid['cas']
+    M = chemicals.MW(cas) / 1000
+    Tc, pc = chemicals.Tc(cas), chemicals.Pc(cas)
+    melts = chemicals.Tm(cas)
+    record = {'name': fluid['name'], 'formula': fluid['formula'], 'aliases': [*fluid.get('aliases', []), *[a.replace('R-', 'R') for a in fluid.get('aliases', []) if a.startswith('R-')], cas], 'kind': 'fluid', 'phases': ['liquid']}
+    if fluid.get('marks'):
+        record['marks'] = fluid['marks']
+    record['molarMass'] = f'{number(M * 1000)} g/mol'
+    if 'flammable' in fluid.get('marks', []):
+        record.update(flash(cas))
+    if 'notes' in fluid:
+        record['about'] = fluid['notes']
+    order = {'density': ('perry', 'vdi'), 'viscosity': ('perry', 'vdi'), 'thermalConductivity': ('perry', 'vdi'), 'specificHeatCapacity': ('perry', 'zabransky'), 'vapourPressure': ('vdi', 'perry'), 'latentHeat': ('perry', 'vdi'), 'surfaceTension': ('vdi', 'jasper')}
+    high = 0.75 * Tc
+    for key, works in order.items():
+        pressure = None if key in ('vapourPressure', 'latentHeat', 'surfaceTension') else 2e6
+        # A liquid that is handled supercooled keeps its correlations to where they hold.
+        found = entry(key, 'liquid', cas, M, melts, 0.98 * Tc if key == 'vapourPressure' else high, pressure, works, phase=False)
+        if found is not None:
+            record[key] = found
+    record['meltingTemperature'] = {'model': 'constant', 'range': {'p': ['0 Pa', '2 MPa']}, 'uncertainty': '0.5 %', 'source': f'CRC Handbook of Chemistry and Physics, 95th ed.; {CARRIED}', 'constants': {'value': f'{number(melts)} K'}}
+    return record
+
+
+def gas_record(fluid):
+    """A gas without an equation of state, at low pressure: a perfect gas."""
+    cas = fluid['cas']
+    M = chemicals.MW(cas) / 1000
+    c = row('specificHeatCapacity', 'vapour', 'poling', cas)
+    low, high = 200, min(1000, c['Tmax'])
+    box = {'T': [f'{low} K', f'{number(high)} K'], 'p': ['0 Pa', '500 kPa']}
+    record = {'name': fluid['name'], 'formula': fluid['formula'], 'aliases': [*fluid.get('aliases', []), cas], 'kind': 'fluid', 'phases': ['vapour'], 'marks': fluid['marks'], 'molarMass': f'{number(M * 1000)} g/mol'}
+    plain = 'perfect gas; the second virial coefficient changes it by less than the uncertainty'
+    record['density'] = {'model': 'perfect-gas-density', 'range': box, 'uncertainty': '0.8 %', 'source': plain, 'constants': {'molarMass': f'{number(M * 1000)} g/mol'}}
+    record['specificHeatCapacity'] = {'model': 'polynomial', 'range': box, 'uncertainty': '2 %', 'source': f"Poling, Prausnitz and O'Connell, The Properties of Gases and Liquids, 5th ed. (2001), appendix A; {CARRIED}", 'constants': {'gives': 'J/(kg K)', 'terms': [c[k] * R / M for k in ('a0', 'a1', 'a2', 'a3', 'a4')]}}
+    record['speedOfSound'] = {'model': 'perfect-gas-sound', 'range': box, 'uncertainty': '1.5 %', 'source': plain, 'constants': {'molarMass': f'{number(M * 1000)} g/mol'}}
+    for key in ('viscosity', 'thermalConductivity'):
+        record[key] = entry(key, 'vapour', cas, M, low, high, 5e5, ('perry', 'vdi'), phase=False)
+    return record
