@@ -49,7 +49,7 @@ def citation(keys):
         place = f.get('journal') or f.get('booktitle') or f.get('publisher') or f.get('institution') or f.get('school') or f.get('title', '')
         volume = f.get('volume')
         page = re.split(r'[-,]', f.get('pages', ''))[0]
-        out.append(f"{who}, {place if place.endswith('.') else place + ','} {volume + ' ' if volume else ''}({year}){' ' + page if page else ''}".strip())
+        out.append(f"{who}, {place} {volume + ' ' if volume else ''}({year}){' ' + page if page else ''}".strip())
     return '; '.join(out)
 
 

@@ -33,10 +33,53 @@ TABLES = {
     ('vapourPressure', 'liquid', 'vdi'): ('Vapor Pressure/VDI PPDS Boiling temperatures at different pressures.tsv', 'table 3'),
     ('specificHeatCapacity', 'liquid', 'perry'): ('Heat Capacity/Perry_Table_2-153_DIPPR_100.tsv', 'table 2-153'),
     ('specificHeatCapacity', 'liquid', 'zabransky'): ('Heat Capacity/Zabransky.tsv', ''),
+    ('vapourPressure', 'liquid', 'landolt'): ('Vapor Pressure/Landolt_antoine_V20.tsv', ''),
     ('specificHeatCapacity', 'vapour', 'poling'): ('Heat Capacity/PolingDatabank.tsv', ''),
 }
+WORKS = {'perry': "Perry's Handbook", 'vdi': 'the VDI Heat Atlas', 'jasper': 'Jasper (1972)', 'zabransky': 'Zabransky and others (2010)', 'bergman': 'Bergman and others (2011)', 'cheng': 'Cheng (2008)', 'landolt': 'Landolt-Boernstein IV/20'}
 # What such correlations are good for at best, 95 %.
 FLOORS = {('viscosity', 'vapour'): 5, ('viscosity', 'liquid'): 8, ('thermalConductivity', 'vapour'): 8, ('thermalConductivity', 'liquid'): 6, ('density', 'liquid'): 1, ('surfaceTension', 'liquid'): 5, ('latentHeat', 'liquid'): 4, ('vapourPressure', 'liquid'): 3, ('specificHeatCapacity', 'liquid'): 3}
+
+
+# Bergman, Lavine, Incropera and DeWitt, Fundamentals of Heat and Mass Transfer, 7th ed. (2011), table A.5: ethylene glycol and glycerin.
+BERGMAN = {
+    '107-21-1': {
+        'density': [[273, 1130.8], [280, 1125.8], [290, 1118.8], [300, 1114.4], [310, 1103.7], [320, 1096.2], [330, 1089.5], [340, 1083.8], [350, 1079.0], [360, 1074.0], [370, 1066.7], [373, 1058.5]],
+        'viscosity': [[273, 0.0651], [280, 0.042], [290, 0.0247], [300, 0.0157], [310, 0.0107], [320, 0.00757], [330, 0.00561], [340, 0.00431], [350, 0.00342], [360, 0.00278], [370, 0.00228], [373, 0.00215]],
+        'thermalConductivity': [[273, 0.242], [280, 0.244], [290, 0.248], [300, 0.252], [310, 0.255], [320, 0.258], [330, 0.26], [340, 0.261], [350, 0.261], [360, 0.261], [370, 0.262], [373, 0.263]],
+        'specificHeatCapacity': [[273, 2294.0], [280, 2323.0], [290, 2368.0], [300, 2415.0], [310, 2460.0], [320, 2505.0], [330, 2549.0], [340, 2592.0], [350, 2637.0], [360, 2682.0], [370, 2728.0], [373, 2742.0]],
+    },
+    '56-81-5': {
+        'density': [[273, 1276.0], [280, 1271.9], [290, 1265.8], [300, 1259.9], [310, 1253.9], [320, 1247.2]],
+        'specificHeatCapacity': [[273, 2261], [280, 2298], [290, 2367], [300, 2427], [310, 2490], [320, 2564]],
+        'viscosity': [[273, 10.6], [280, 5.34], [290, 1.85], [300, 0.799], [310, 0.352], [320, 0.21]],
+        'thermalConductivity': [[273, 0.282], [280, 0.284], [290, 0.286], [300, 0.286], [310, 0.286], [320, 0.287]],
+    },
+}
+UNITS = {'density': 'kg/m^3', 'specificHeatCapacity': 'J/(kg K)', 'viscosity': 'Pa s', 'thermalConductivity': 'W/(m K)'}
+
+
+def bergman(key, cas):
+    rows = BERGMAN.get(cas, {}).get(key)
+    if rows is None:
+        return None
+
+    def value(T):
+        (a, x), (b, y) = next(pair for pair in zip(rows, rows[1:]) if T <= pair[1][0])
+        share = (T - a) / (b - a)
+        return x * (y / x) ** share if key == 'viscosity' else x + (y - x) * share
+    return 'table', {'gives': UNITS[key], **({'interpolate': 'logarithm'} if key == 'viscosity' else {}), 'rows': rows}, value, rows[0][0], rows[-1][0]
+
+
+def cheng(key, cas):
+    """Glycerol after Cheng, Ind. Eng. Chem. Res. 47 (2008) 3285; 0 to 100 degC."""
+    if cas != '56-81-5' or key not in ('density', 'viscosity'):
+        return None
+
+    def value(T):
+        t = T - 273.15
+        return 1277 - 0.654 * t if key == 'density' else 12.1 * math.exp((-1233 + t) * t / (9900 + 70 * t))
+    return 'compared only', {}, value, 273.15, 373.15
 
 
 @functools.cache
@@ -70,6 +113,8 @@ def eq101(c, T):
 
 def law(key, side, work, cas, M):
     """Model, constants, value as a function of T in SI, temperature limits where stated."""
+    if work in ('bergman', 'cheng'):
+        return {'bergman': bergman, 'cheng': cheng}[work](key, cas)
     c = row(key, side, work, cas)
     if c is None:
         return None
@@ -117,6 +162,8 @@ def law(key, side, work, cas, M):
         terms = [[R * c['Tc'] * c[k] / M, e] for k, e in zip('ABCDE', (1 / 3, 2 / 3, 1, 2, 6))]
         return 'critical-powers', {'critical': f"{number(c['Tc'])} K", 'gives': 'J/kg', 'terms': terms}, lambda T: sum(n * max(0, 1 - T / c['Tc']) ** e for n, e in terms), None, None
     if key == 'vapourPressure':
+        if work == 'landolt':
+            return 'log-antoine', {}, lambda T: math.exp(c['A'] - c['B'] / (T + c['C'])), low, high
         if work == 'perry':
             terms = [[c['C1'], 0], [c['C2'], -1], *([[c['C4'], c['C5']]] if c['C4'] else [])]
             return 'log-powers', {'gives': 'Pa', 'terms': terms, 'log': c['C3']}, lambda T: eq101(c, T), low, high
@@ -146,6 +193,8 @@ def law(key, side, work, cas, M):
 
 def source(key, side, work):
     works = {'perry': PERRY, 'vdi': VDI, 'jasper': 'Jasper, J. Phys. Chem. Ref. Data 1 (1972) 841', 'zabransky': 'Zabransky, Kolska, Ruzicka and Domalski, J. Phys. Chem. Ref. Data 39 (2010) 013103'}
+    if work == 'bergman':
+        return 'Bergman, Lavine, Incropera and DeWitt, Fundamentals of Heat and Mass Transfer, 7th ed. (2011), table A.5'
     place = TABLES[(key, side, work)][1]
     return f"{works[work]}{', ' + place if place and work == 'perry' else ''}; {CARRIED}"
 
@@ -188,7 +237,7 @@ def entry(key, side, cas, M, low, high, pressure, works, phase=True):
         else:
             high, apart = high - 5, apart_high
     value = floor * 1.6 if apart is None else max(floor, math.ceil(1.1 * apart))
-    said = f'; uncertainty at least the difference from the {"VDI Heat Atlas" if second[0] == "vdi" else "second work"} over the range' if apart is not None else '; not held against a second work: the uncertainty is from memory of such correlations'
+    said = f'; uncertainty at least the difference from {WORKS[second[0]]} over the range' if apart is not None else '; not held against a second work: the uncertainty is from memory of such correlations'
     out = {'model': first[0], **({'phase': side} if phase else {}), 'range': {'T': [f'{number(round(low, 2))} K', f'{number(round(high, 2))} K'], **({'p': ['0 Pa', f'{number(pressure)} Pa']} if pressure else {})}, 'uncertainty': f'{number(float(value))} %', 'source': source(key, side, work) + said, 'constants': first[1]}
     return out
 
@@ -217,7 +266,7 @@ def liquid_record(fluid):
     cas = fluid['cas']
     M = chemicals.MW(cas) / 1000
     Tc, pc = chemicals.Tc(cas), chemicals.Pc(cas)
-    melts = chemicals.Tm(cas)
+    melts = float(fluid['minTemperature'].split()[0]) if 'minTemperature' in fluid else chemicals.Tm(cas)
     record = {'name': fluid['name'], 'formula': fluid['formula'], 'aliases': [*fluid.get('aliases', []), *[a.replace('R-', 'R') for a in fluid.get('aliases', []) if a.startswith('R-')], cas], 'kind': 'fluid', 'phases': ['liquid']}
     if fluid.get('marks'):
         record['marks'] = fluid['marks']
@@ -229,11 +278,13 @@ def liquid_record(fluid):
     order = {'density': ('perry', 'vdi'), 'viscosity': ('perry', 'vdi'), 'thermalConductivity': ('perry', 'vdi'), 'specificHeatCapacity': ('perry', 'zabransky'), 'vapourPressure': ('vdi', 'perry'), 'latentHeat': ('perry', 'vdi'), 'surfaceTension': ('vdi', 'jasper')}
     high = 0.75 * Tc
     for key, works in order.items():
-        pressure = None if key in ('vapourPressure', 'latentHeat', 'surfaceTension') else 2e6
-        # A liquid that is handled supercooled keeps its correlations to where they hold.
-        found = entry(key, 'liquid', cas, M, melts, 0.98 * Tc if key == 'vapourPressure' else high, pressure, works, phase=False)
+        pressure = None if key in ('vapourPressure', 'latentHeat', 'surfaceTension') else 5e6 if cas in BERGMAN else 2e6
+        limits = fluid.get('limits', {}).get(key, [melts, 0.98 * Tc if key == 'vapourPressure' else high])
+        found = entry(key, 'liquid', cas, M, *limits, pressure, fluid.get('works', {}).get(key, works), phase=False)
         if found is not None:
             record[key] = found
+    if 'minTemperature' in fluid:
+        return record
     record['meltingTemperature'] = {'model': 'constant', 'range': {'p': ['0 Pa', '2 MPa']}, 'uncertainty': '0.5 %', 'source': f'CRC Handbook of Chemistry and Physics, 95th ed.; {CARRIED}', 'constants': {'value': f'{number(melts)} K'}}
     return record
 

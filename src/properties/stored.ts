@@ -1,12 +1,15 @@
 import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
-import type { Collection, MaterialRecord } from './record.ts';
+import type { Collection, MaterialRecord, NamedMaterial } from './record.ts';
 
 /** A file of the compiled collection. */
 export interface StoredFile {
   readonly file: string;
   readonly text: string;
 }
+
+/** One line of the index: what names stand for, and the names. Few lines and short ones, as every start reads them all. */
+type StoredNames = readonly [named: NamedMaterial, ...names: string[]];
 
 const index = 'index.json';
 
@@ -17,8 +20,15 @@ const index = 'index.json';
  * @returns           file names and contents, in alphabetical order
  */
 export function storedMaterials(collection: Collection): StoredFile[] {
+  const lines = new Map<string, [NamedMaterial, ...string[]]>();
+  for (const [name, named] of Object.entries(collection.names)) {
+    const key = JSON.stringify(named);
+    const line = lines.get(key);
+    if (line === undefined) lines.set(key, [named, name]);
+    else line.push(name);
+  }
   const ids = [...new Set(Object.values(collection.names).map(({ id }) => id))].sort();
-  return [{ file: index, text: JSON.stringify(collection.names) }, ...ids.map((id) => ({ file: `${id}.json`, text: JSON.stringify(collection.record(id)) }))];
+  return [{ file: index, text: JSON.stringify([...lines.values()]) }, ...ids.map((id) => ({ file: `${id}.json`, text: JSON.stringify(collection.record(id)) }))];
 }
 
 /**
@@ -29,15 +39,16 @@ export function storedMaterials(collection: Collection): StoredFile[] {
  */
 export function openStored(dir: string): Collection | undefined {
   if (!existsSync(join(dir, index))) return undefined;
-  const names = JSON.parse(readFileSync(join(dir, index), 'utf8')) as Collection['names'];
-  const ids = new Set(Object.values(names).map(({ id }) => id));
+  const lines = JSON.parse(readFileSync(join(dir, index), 'utf8')) as StoredNames[];
+  const names: { [plainName: string]: NamedMaterial } = {};
+  for (const [named, ...all] of lines) for (const name of all) names[name] = named;
   const read = new Map<string, MaterialRecord>();
   return {
     names,
     record(id) {
-      if (!ids.has(id)) return undefined;
       const before = read.get(id);
       if (before !== undefined) return before;
+      if (!lines.some(([named]) => named.id === id)) return undefined;
       const record = JSON.parse(readFileSync(join(dir, `${id}.json`), 'utf8')) as MaterialRecord;
       read.set(id, record);
       return record;

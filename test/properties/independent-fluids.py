@@ -91,7 +91,7 @@ def second_work(record, key, side):
     return [w for w in ('perry', 'vdi') if not (w == 'perry' and 'Perry' in used.split(';')[0]) and not (w == 'vdi' and 'VDI' in used.split(';')[0])]
 
 
-NAMES = {'perry': 'Perry', 'vdi': 'VDI', 'jasper': 'Jasper', 'zabransky': 'Zabransky'}
+NAMES = {'perry': 'Perry', 'vdi': 'VDI', 'jasper': 'Jasper', 'zabransky': 'Zabransky', 'cheng': 'Cheng', 'bergman': 'Bergman', 'landolt': 'Landolt-Boernstein'}
 
 
 def from_handbooks(name, cas, record, saturation, low, high, critical):
@@ -145,7 +145,7 @@ for fluid in fluids:
                 continue
             low, high = [si(x) for x in entry['range']['T']]
             used = entry['source'].split(';')[0]
-            works = [w for w, word in (('perry', 'Perry'), ('vdi', 'VDI'), ('jasper', 'Jasper'), ('zabransky', 'Zabransky')) if word not in used]
+            works = [w for w, word in NAMES.items() if word not in used]
             for work in works:
                 try:
                     found = law(key, 'liquid', work, cas, M)
