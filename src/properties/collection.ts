@@ -91,10 +91,11 @@ function unknown(name: string, key: string, collection: Collection): Problem {
   if (candidates.size > 1) return ambiguous(name, candidates);
   const nearest = nearestName(key, Object.keys(collection.names)) ?? [...candidates].map(plainName)[0];
   const named = nearest === undefined ? undefined : collection.names[nearest];
+  const names = named === undefined ? materialNames(collection) : [];
   return new Problem({
     code: 'unknown-material',
     message: `"${shown}" is not a material of the collection`,
-    expected: named === undefined ? `one of ${materialNames(collection).join(', ')}; or the properties themselves` : 'a material by name, alias or formula; or the properties themselves',
+    expected: named === undefined && names.length <= 24 ? `one of ${names.join(', ')}; or the properties themselves` : named === undefined ? `one of the ${names.length} materials that \`runbrief material\` lists, by name, alias or formula; or the properties themselves` : 'a material by name, alias or formula; or the properties themselves',
     ...(named === undefined ? {} : { nearest: named.asked === undefined ? named.name : (nearest as string) }),
   });
 }

@@ -41,7 +41,7 @@ describe('names', () => {
     const oils = problemsOf(() => loadMaterial('oil'))[0];
     expect(oils?.code).toBe('ambiguous-material');
     for (const name of ['engine oil', 'heat-transfer oil', 'light oil', 'lubricating oil ISO VG 46']) expect(oils?.expected).toContain(name);
-    expect(problemsOf(() => loadMaterial('unobtainium'))[0]?.expected).toContain('air, alumina');
+    expect(problemsOf(() => loadMaterial('unobtainium'))[0]?.expected).toMatch(/^one of the \d{3} materials that `runbrief material` lists/); // all the names would fill pages
     for (const name of ['__proto__', 'constructor', 'toString', '']) expect(problemsOf(() => loadMaterial(name))[0]?.code).toBe('unknown-material');
   });
 });
