@@ -53,11 +53,10 @@ export function settleCase(on: Case, options: Omit<PlanOptions, 'version' | 'fli
   const { workings, askable, chosen } = assembled;
   const targets: Target[] = assembled.targets.map((t) => ({ id: t.id, quantity: t.quantity, within: t.within, computed: t.computed }));
   const again: Settle = (at) => void settle(at, rules, targets, { askable, chosen });
-  // The numbers that decide need no price and no target.
-  settle(workings, rules, [], { askable, chosen, lean: true });
+  // The numbers that decide rest on no verdict and no choice: they can be had before anything is settled.
   const deciding = decidingIds(rules, workings);
   const spread = spreads(workings, deciding);
-  const range = rangesOf(workings, assembled.ranges, deciding, (at) => void settle(at, rules, [], { askable, chosen, lean: true }));
+  const range = rangesOf(workings, assembled.ranges, deciding, () => undefined);
   const decideOptions: DecideOptions = {
     askable,
     chosen,
