@@ -1,3 +1,4 @@
+import { inWords } from './say.ts';
 import type { HazardClass, HazardView } from './hazard-view.ts';
 
 const gas = (on: HazardView): boolean => on.word('medium') === 'gas';
@@ -52,7 +53,8 @@ function wind(on: HazardView): string | undefined {
   const load = on.word('targetMomentum') === 'yes' || on.assembled.targets.some((t) => /^(?:sheddingFrequency|strouhal)/.test(t.quantity));
   const built = on.mark('built', 'text');
   if (!load || (built === undefined && (on.mark('wind', 'text') === undefined || on.mark('windTunnel', 'text') !== undefined))) return undefined;
-  return `wind at {speed} on ${built === undefined ? 'a body' : `a ${built}`}${on.has('sheddingFrequency') ? '; its wake beats at {sheddingFrequency}, which may meet a natural frequency of the structure' : ''}`;
+  const most = on.assembled.ranges.find((r) => r.path === 'inlet.speed')?.to;
+  return `wind at {speed}${most === undefined ? '' : `, up to ${inWords(on, 'inlet.speed', most)},`} on ${built === undefined ? 'a body' : `a ${built}`}${on.has('sheddingFrequency') ? '; its wake beats at {sheddingFrequency}, which may meet a natural frequency of the structure' : ''}`;
 }
 
 function turning(on: HazardView): string | undefined {

@@ -81,7 +81,7 @@ export function planQuantity(workings: Workings, id: string, spread: Spread | un
     unit: step.unit,
     kind: step.kind,
     ...(step.at === undefined ? {} : { at: step.at }),
-    ...(spread === undefined || typeof step.value === 'string' || spread.high - spread.low <= 1e-9 * Math.abs(step.value) ? {} : { low: spread.low, high: spread.high, coverage: 0.95 }),
+    ...(spread === undefined || typeof step.value === 'string' || spread.high - spread.low <= 1e-6 * Math.abs(step.value) ? {} : { low: spread.low, high: spread.high, coverage: 0.95 }),
     ...(range === undefined ? {} : { range }),
     formula: step.formula,
     needs: step.needs,

@@ -33,7 +33,7 @@ export function screen(plan: Plan, writing: Writing, options: ScreenOptions): st
   const parts: Part[] = [
     { label: 'At odds', items: plan.contradictions.map((c) => wrap(`${oneLine(c.says)}: ${oneLine(c.effect)}. Cure: ${oneLine(c.cure)}`, 3)), least: 2, apart: true, warns: true },
     { label: 'Mind first', items: [...cautionLines(plan, writing).map((text) => wrap(text, 2)), ...strained(plan)], least: 3, apart: true, warns: true },
-    { label: 'Target', items: plan.targets.flatMap((t) => [targetText(t, plan, writing), ...branches(t, plan, writing)]), least: 2, apart: true },
+    { label: 'Target', items: plan.targets.flatMap((t) => [targetText(t, writing), ...branches(t, plan, writing)]), least: 2, apart: true },
     ...effectParts(plan, writing),
     { label: 'Choices', ...choiceItems(plan), least: 2 },
     ...setUpParts(plan, writing, room),
@@ -49,21 +49,23 @@ const wrap = (text: string, most: number): string => {
   return (lines.length <= most ? lines : [...lines.slice(0, most - 1), cut(lines.slice(most - 1).join(' '), room)]).join('\n');
 };
 
-function targetText(t: PlanTarget, plan: Plan, writing: Writing): string {
+function targetText(t: PlanTarget, writing: Writing): string {
   const name = `${oneLine(t.quantity)}${t.place === undefined ? '' : ` at ${oneLine(t.place)}`}`;
   if (!t.computed) return joined([name, 'no hand estimate', t.within === undefined ? '' : `asked within ${oneLine(t.within)}`], room, '; ');
-  const range = plan.quantities[t.quantity]?.range;
   return joined([
     `${name} ${writing.number(t.quantity)}`,
     t.within === undefined ? '' : `asked within ${oneLine(t.within)}`,
-    range === undefined ? '' : `${writing.like(t.quantity, range.from)} to ${writing.like(t.quantity, range.to)} over the range`,
   ], room, '; ');
 }
 
-/** Both ends of a target where laminar or turbulent is open. */
+/** What a target is over the operating range, and at both ends where laminar or turbulent is open. */
 function branches(t: PlanTarget, plan: Plan, writing: Writing): string[] {
+  const range = plan.quantities[t.quantity]?.range;
   const [laminar, turbulent] = [`${t.id}.ifLaminar`, `${t.id}.ifTurbulent`];
-  return plan.quantities[turbulent] === undefined ? [] : [cut(`open: ${writing.number(laminar)} if laminar, ${writing.number(turbulent)} if turbulent`, room)];
+  return [
+    ...(range === undefined ? [] : [cut(`over the operating range ${writing.like(t.quantity, range.from)} to ${writing.like(t.quantity, range.to)}`, room)]),
+    ...(plan.quantities[turbulent] === undefined ? [] : [cut(`open: ${writing.number(laminar)} if laminar, ${writing.number(turbulent)} if turbulent`, room)]),
+  ];
 }
 
 function effectParts(plan: Plan, writing: Writing): Part[] {

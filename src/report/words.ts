@@ -28,6 +28,8 @@ export function decidingText(e: PlanEffect, writing: Writing, shorter: Shorter =
   const known = writing.number(d.quantity);
   const number = known === 'not known' ? few(d.value) : shorter.spread === false ? known.replace(/ \+\/- .*$/, '') : known;
   const limit = (value: number): string => writing.like(d.quantity, value);
+  // Moved by its spread alone, it lies outside the limits: the spread is what is to be seen.
+  if (e.movedBy === 'spread' && shorter.spread !== false) return `${symbol} ${number}, reaching ${limit(e.base === 'include' ? d.includeAt : d.leaveOutAt)}`;
   if (e.verdict === 'borderline' && d.leaveOutAt !== d.includeAt) return `${symbol} ${number}, limits ${limit(d.leaveOutAt)} and ${limit(d.includeAt)}`;
   const nearer = limit(e.verdict === 'leave-out' ? d.leaveOutAt : d.includeAt);
   const margin = factorText(e);
