@@ -1,5 +1,6 @@
 import { choiceContradictions } from './contradictions-choices.ts';
 import { inputContradictions } from './contradictions-inputs.ts';
+import { speciesContradictions } from './contradictions-species.ts';
 import type { Ground } from './ground.ts';
 import type { Contradiction } from './types.ts';
 
@@ -10,7 +11,7 @@ import type { Contradiction } from './types.ts';
  * @returns   each once, in the order of the lines of the case; those without a line last
  */
 export function contradictionsOf(on: Ground): Contradiction[] {
-  const found = [...inputContradictions(on), ...choiceContradictions(on)];
+  const found = [...inputContradictions(on), ...speciesContradictions(on), ...choiceContradictions(on)];
   const line = (c: Contradiction): number => c.line ?? Number.POSITIVE_INFINITY;
   return found.map((c, k) => ({ c, k })).sort((a, b) => (line(a.c) === line(b.c) ? a.k - b.k : line(a.c) - line(b.c))).map(({ c }) => c);
 }

@@ -29,7 +29,7 @@ export function fullerDiffusivity({ temperature, pressure, molarMass, otherMass,
  * @param association     2.6 for water, 1.9 methanol, 1.5 ethanol, 1 for liquids that do not associate
  * @param boilingVolume   molar volume of the species at its boiling point [m^3/mol]
  * @returns               [m^2/s]
- * @example               wilkeChangDiffusivity({ temperature: 288, viscosity: 0.000705, solventMass: 0.07811, association: 1, boilingVolume: 0.00014 }) // 1.3774e-9
+ * @example               wilkeChangDiffusivity({ temperature: 288, viscosity: 0.000705, solventMass: 0.07811, association: 1, boilingVolume: 0.00014 }) // 1.3776e-9
  * @scatter               20 %
  * @source                Wilke and Chang, AIChE J. 1 (1955) 264
  */
