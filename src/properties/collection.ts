@@ -60,7 +60,7 @@ export function loadMaterial(name: string, collection: Collection = shippedMater
   const key = plainName(name);
   const before = known.get(key);
   if (before !== undefined) return before;
-  const found = Object.hasOwn(collection.names, key) ? collection.names[key] : undefined;
+  const found = collection.find(key);
   if (found?.among !== undefined) throw ambiguous(name, found.among);
   const record = found && collection.record(found.id);
   if (found === undefined || record === undefined) throw unknown(name, key, collection);

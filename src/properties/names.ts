@@ -44,5 +44,6 @@ function formulasOf(records: readonly MaterialRecord[]): { [plain: string]: Name
 export function collectionOf(records: readonly MaterialRecord[], under?: Collection): Collection {
   const byId = new Map(records.map((record) => [record.id, record]));
   const below = Object.entries(under?.names ?? {}).filter(([, { id }]) => !byId.has(id));
-  return { names: { ...formulasOf(records), ...Object.fromEntries(below), ...Object.assign({}, ...records.map(namesOf)) as Collection['names'] }, record: (id) => byId.get(id) ?? under?.record(id) };
+  const names = { ...formulasOf(records), ...Object.fromEntries(below), ...Object.assign({}, ...records.map(namesOf)) as Collection['names'] };
+  return { names, find: (name) => (Object.hasOwn(names, name) ? names[name] : undefined), record: (id) => byId.get(id) ?? under?.record(id) };
 }

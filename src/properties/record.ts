@@ -121,5 +121,7 @@ export interface NamedMaterial {
 export interface Collection {
   /** Names, aliases and formulas in lower case with single spaces. */
   readonly names: { readonly [plainName: string]: NamedMaterial };
+  /** What one plain name stands for; the same as in `names`, without all the others. */
+  find(plainName: string): NamedMaterial | undefined;
   record(id: string): MaterialRecord | undefined;
 }

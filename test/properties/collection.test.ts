@@ -83,7 +83,7 @@ describe('records of the user', () => {
 
 it('what is stored gives the same numbers', () => {
   for (const { file, text } of storedMaterials(compileMaterials('materials'))) writeFileSync(join(folder, file), text);
-  const stored = openStored(folder) ?? { names: {}, record: () => undefined };
+  const stored = openStored(folder) ?? { names: {}, find: () => undefined, record: () => undefined };
   for (const record of materialRecords()) expect(stored.record(record.id)).toEqual(record);
   expect(stored.record('../secret')).toBeUndefined();
   expect(propertyAt(loadMaterial('steam', stored), 'density', { temperature: 500, pressure: 1e5 })?.value).toBe(propertyAt(loadMaterial('steam'), 'density', { temperature: 500, pressure: 1e5 })?.value);
