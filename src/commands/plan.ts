@@ -2,10 +2,10 @@ import about from '../../package.json' with { type: 'json' };
 import { vocabulary, type Assembled } from '../assemble/index.ts';
 import { readCaseFile } from '../case/index.ts';
 import { ladderDetails } from '../ladder/index.ts';
-import { plan, settleCase } from '../plan/index.ts';
+import { fluidRange, plan, propertyFits, settleCase } from '../plan/index.ts';
 import { tableOver } from '../properties/index.ts';
 import { evaluateReference } from '../references/index.ts';
-import { asText, materialCsv, planBlocks, planDocument, planFiles, screen, writingOf, type PlanTables } from '../report/index.ts';
+import { asText, fitsText, materialCsv, planBlocks, planDocument, planFiles, screen, writingOf, type PlanTables } from '../report/index.ts';
 import { Args, Base, Flags } from './base.ts';
 import { ownData, ownDataFlags } from './own-data.ts';
 import { writeInto } from './written.ts';
@@ -15,7 +15,7 @@ export default class Plan extends Base {
   static override examples = [
     { command: 'runbrief plan line.case.yaml', description: 'the plan on one screen' },
     { command: 'runbrief plan line.case.yaml --full', description: 'every section, decision and number as text' },
-    { command: 'runbrief plan line.case.yaml --into line', description: 'plan.md, plan.html, plan.json, checklist.md, near-wall.csv, properties.csv and the tables of the ladder' },
+    { command: 'runbrief plan line.case.yaml --into line', description: 'plan.md, plan.html, plan.json, checklist.md, near-wall.csv, properties.csv, property-fits.txt and the tables of the ladder' },
     { command: 'runbrief plan line.case.yaml --json', description: 'the plan for other programs, numbers in SI' },
   ];
   static override args = { file: Args.string({ required: true, description: 'the case file; `runbrief template pipe` writes one to fill in' }) };
@@ -48,9 +48,12 @@ export default class Plan extends Base {
 
 /** What the files hold beside the plan: the tables of the ladder, the properties over the temperatures of the case. */
 function tablesOf(assembled: Assembled): PlanTables {
-  const { fluid, workings } = assembled;
   const ladder = ladderDetails(assembled).map(({ rung, reference, inputs }) => ({ rung: rung.id, tables: evaluateReference(reference, inputs).tables }));
-  const [from, to, pressure, humidity] = ['lowestTemperature', 'highestTemperature', 'pressure', 'fluid.humidity'].map((id) => workings.get(id));
-  if (fluid === undefined || from === undefined || to === undefined || pressure === undefined || !(to > from)) return { ladder };
-  return { ladder, properties: materialCsv(tableOver(fluid, { pressure, ...(humidity === undefined ? {} : { humidity }), over: { of: 'temperature', from, to }, assumed: [] })) };
+  const at = fluidRange(assembled);
+  const typed = propertyFits(assembled);
+  return {
+    ladder,
+    ...(at === undefined ? {} : { properties: materialCsv(tableOver(at.fluid, at.range)) }),
+    ...(typed === undefined ? {} : { fits: fitsText(`${typed.fluid} from ${Number(typed.from.toFixed(2))} K to ${Number(typed.to.toFixed(2))} K: the temperatures of the case and a little beyond`, typed.fits) }),
+  };
 }

@@ -1,4 +1,5 @@
 export { plan, settleCase, type PlanOptions, type Settled } from './plan.ts';
 export { compileFiles, shippedRules } from './rules.ts';
 export * from './types.ts';
+export { fluidRange, propertyFits } from './property-fits.ts';
 export { targetSpreads } from './target-spread.ts';

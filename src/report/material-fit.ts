@@ -18,7 +18,7 @@ export function fitsText(title: string, fits: readonly Fit[]): string {
 
 function fitLines(fit: Fit): string[] {
   const unit = units[fit.variable];
-  const number = (x: number): string => String(x);
+  const number = (x: number): string => (x !== 0 && Math.abs(x) < 1e-4 ? x.toExponential() : String(x));
   const limits = `${Number(fit.safe.from.toPrecision(7))} ${unit} to ${Number(fit.safe.to.toPrecision(7))} ${unit}`;
   return [
     wrapped(`${propertyNames[fit.property]}, y in ${fit.unit}, x = ${fit.variable} in ${unit}`, '    ', '  '),

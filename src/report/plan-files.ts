@@ -22,6 +22,8 @@ export interface PlanTables {
   readonly ladder: readonly { readonly rung: string; readonly tables: readonly EvaluatedTable[] }[];
   /** Properties of the fluid over the temperatures of the case, as CSV. */
   readonly properties?: string;
+  /** Its properties as functions to type in. */
+  readonly fits?: string;
 }
 
 /**
@@ -42,6 +44,7 @@ export function planFiles(plan: Plan, on: Case | undefined, tables: PlanTables):
     { name: 'checklist.md', text: asMarkdown(checklistBlocks(plan, writing)) },
     ...(nearWall === undefined ? [] : [{ name: 'near-wall.csv', text: nearWall }]),
     ...(tables.properties === undefined ? [] : [{ name: 'properties.csv', text: ended(tables.properties) }]),
+    ...(tables.fits === undefined ? [] : [{ name: 'property-fits.txt', text: ended(tables.fits) }]),
     ...tables.ladder.flatMap(({ rung, tables: of }) => of.map((table, i) => ({ name: `ladder/${rung}${i === 0 ? '' : `-${table.id}`}.csv`, text: ended(referenceCsv(table)) }))),
   ];
 }

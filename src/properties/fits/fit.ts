@@ -65,7 +65,7 @@ export function fitOf(of: Sampled, kind: FitKind, within: number): Fit {
   return {
     property: of.property, kind, variable: of.variable, unit: propertyUnits[of.property], formula: chosen.formula, coefficients: chosen.coefficients, ...(chosen.rows === undefined ? {} : { rows: chosen.rows }),
     largestError: off, at, outcome: off <= within ? 'met' : 'missed', uncertainty: of.uncertainty,
-    positive: values.every((one) => one > 0), course, wiggles: course !== 'turns' && course !== 'constant' && courseOf(values) !== course,
+    positive: values.every((one) => one > 0), course, wiggles: course !== 'turns' && course !== 'constant' && courseOf(values) === 'turns',
     safe: safeRange(chosen, x, course), flags: of.flags,
   };
 }
