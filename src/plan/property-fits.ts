@@ -1,6 +1,6 @@
 import type { Assembled } from '../assemble/index.ts';
 import { Problem } from '../problems/index.ts';
-import { fitOf, sampledOver, type Fit, type Material, type PropertyId, type StateRange } from '../properties/index.ts';
+import { fitOf, sampledOver, type Fit, type Material, type StateRange } from '../properties/index.ts';
 import { lawProperties } from '../quantities/index.ts';
 
 /** The fluid of a case with the temperatures it takes, at its pressure and composition. */
@@ -35,7 +35,7 @@ export function propertyFits(assembled: Assembled): { readonly fluid: string; re
   const at = fluidRange(assembled);
   if (at === undefined) return undefined;
   const { fluid, range } = at;
-  const ids = lawProperties.map((p) => p.id).filter((id): id is Exclude<typeof id, 'thermalExpansion'> => id !== 'thermalExpansion' && (fluid.properties as readonly PropertyId[]).includes(id));
+  const ids = lawProperties.map((p) => p.id).filter((id): id is Exclude<typeof id, 'thermalExpansion'> => id !== 'thermalExpansion' && fluid.properties.includes(id));
   const margin = beyond * (range.over.to - range.over.from);
   for (const wide of [margin, 0]) {
     const [from, to] = [range.over.from - wide, range.over.to + wide];
