@@ -41,7 +41,17 @@ export function wordOf(assembled: Assembled, mark: Mark, where: readonly Where[]
   const { fluid } = assembled;
   if (fluid !== undefined && where.includes('fluid') && (fluid.record.marks as readonly string[] | undefined)?.includes(mark) === true) return fluid.name;
   const text = where.flatMap((w) => textOf(assembled, w)).join(' | ').toLowerCase();
-  return marks[mark].find((word) => new RegExp(`(?<![a-z0-9])${word}(?![a-z0-9])`).test(text));
+  return text === '' ? undefined : marks[mark].find((word) => stands(text, word));
+}
+
+const partOfWord = /[a-z0-9]/;
+
+/** Whether a word stands in a text on its own, not within a longer one. */
+function stands(text: string, word: string): boolean {
+  for (let at = text.indexOf(word); at >= 0; at = text.indexOf(word, at + 1)) {
+    if (!partOfWord.test(text[at - 1] ?? '') && !partOfWord.test(text[at + word.length] ?? '')) return true;
+  }
+  return false;
 }
 
 function textOf({ case: given, fluid }: Assembled, where: Where): string[] {
