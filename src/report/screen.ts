@@ -33,7 +33,7 @@ export function screen(plan: Plan, writing: Writing, options: ScreenOptions): st
   const parts: Part[] = [
     { label: 'At odds', items: plan.contradictions.map((c) => wrap(`${oneLine(c.says)}: ${oneLine(c.effect)}. Cure: ${oneLine(c.cure)}`, 3)), least: 2, apart: true, warns: true },
     { label: 'Mind first', items: [...cautionLines(plan, writing).map((text) => wrap(text, 2)), ...strained(plan)], least: 3, apart: true, warns: true },
-    { label: 'Target', items: plan.targets.flatMap((t) => [targetText(t, writing), ...branches(t, plan, writing)]), least: 2, apart: true },
+    { label: 'Target', items: plan.targets.map((t) => [targetText(t, writing), ...branches(t, plan, writing)].join('\n')), least: 3, apart: true },
     ...effectParts(plan, writing),
     { label: 'Choices', ...choiceItems(plan), least: 2 },
     ...setUpParts(plan, writing, room),

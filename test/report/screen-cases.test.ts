@@ -1,3 +1,4 @@
+import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { vocabulary } from '../../src/assemble/index.ts';
 import { readCase } from '../../src/case/index.ts';
@@ -20,6 +21,11 @@ describe('the screen of whole cases', () => {
     expect(lines.find((line) => line.startsWith('over the operating range') && line.endsWith('Hz'))).toBeDefined();
     expect(lines.join(' ')).toContain('up to 20 m/s, on a mast');
     expect(lines.join(' ')).not.toContain('0.000001 %');
+  });
+  it('every target stands there with its number, whatever else has to go', async () => {
+    const lines = await screenOf(readFileSync('examples/supply-duct.case.yaml', 'utf8'));
+    expect(lines).toContainEqual(expect.stringMatching(/^Target +outletTemperature at outlet 36\.\d+ degC/));
+    expect(lines).toContainEqual(expect.stringMatching(/^pressureDrop 1\d\.\d Pa/));
   });
   it('a verdict that its spread alone moves shows the spread and the limit it reaches', async () => {
     const lines = await screenOf('format: 1\ntitle: Panel in a still room\ntargets: [{ quantity: heatRate, within: 10 % }]\nflow: plate\nsizes: { length: 600 mm, width: 1 m }\ninclination: upward\nfluid: { material: air, pressure: 1 atm, temperature: 20 degC }\nwall: { temperature: 55 degC, emissivity: 0.9 }\nsurroundings: { temperature: 20 degC }\n');
