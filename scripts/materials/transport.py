@@ -59,6 +59,7 @@ def dense(v, f):
     raise ValueError(one['type'])
 
 
+HANDBOOK = ('polynomial', 'log-powers', 'gas-powers', 'liquid-viscosity')
 REFERENCES = {'Propane': ('propane', 'n-Propane'), 'R134a': ('r-134a', 'R134a')}
 
 
@@ -175,7 +176,12 @@ def entries(fluid, data, f):
             ranges = {'T': [K(f['low']), K(f['high'])], 'p': ['0 Pa', '70 MPa']}
         if found['model'] in ('methane-conductivity', 'helium-conductivity', 'heavy-water-conductivity') or (key == 'thermalConductivity' and fluid['name'] == 'ammonia'):
             close = '25 %'
-        one = {'model': found['model'], 'range': ranges, 'uncertainty': bands(f, key, gas, liquid, close), 'source': found['source'], 'constants': found['constants']}
+        if key == 'thermalConductivity' and isinstance(out.get('viscosity'), list) and out['viscosity'][0]['model'] in HANDBOOK:
+            # The enhancement asks for a viscosity that the handbook's correlations do not have near the critical point.
+            wide = {'T': [K(0.9 * f['Tc']), K(1.35 * f['Tc'])], 'p': [f"{number(0.5 * f['pc'])} Pa", f"{number(8 * f['pc'])} Pa"], 'value': '30 %'}
+        else:
+            wide = None
+        one = {'model': found['model'], 'range': ranges, 'uncertainty': [*([wide] if wide else []), *bands(f, key, gas, liquid, close)], 'source': found['source'], 'constants': found['constants']}
         out[key] = one if 'gas' not in found else [{**one, 'phase': 'liquid'}, {**one, 'phase': 'vapour', 'constants': found['gas']}]
     return out
 

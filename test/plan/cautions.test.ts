@@ -44,6 +44,13 @@ const rows: readonly { what: string; text: string; hazards: readonly string[] }[
   { what: 'carbon dioxide', text: line({ fluid: '{ material: carbon dioxide, pressure: 1 atm }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: ['carbon-dioxide', 'asphyxiation'] },
   { what: 'sodium', text: line({ fluid: '{ material: sodium, pressure: 1.2 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 300 degC }' }), hazards: ['hot', 'liquid-metal'] },
   { what: 'steam', text: line({ fluid: '{ material: steam, pressure: 1.2 bar abs }', inlet: '{ speed: 5 m/s, temperature: 130 degC }' }), hazards: ['steam', 'hot'] },
+  // Marks of the record, whatever name the material is asked by; flash points of NFPA 325: acetone -20 degC, n-dodecane 74 degC.
+  { what: 'acetone at room temperature, above its flash point', text: line({ fluid: '{ material: propanone, pressure: 1.2 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 20 degC }' }), hazards: ['flammable'] },
+  { what: 'dodecane far below its flash point', text: line({ fluid: '{ material: n-dodecane, pressure: 1.2 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 20 degC }' }), hazards: [] },
+  { what: 'liquid propane', text: line({ fluid: '{ material: R-290, pressure: 12 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 20 degC }' }), hazards: ['flammable', 'pressure', 'steam'] },
+  { what: 'chloroform', text: line({ fluid: '{ material: trichloromethane, pressure: 1.2 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 20 degC }' }), hazards: ['toxic'] },
+  { what: 'liquid oxygen', text: line({ fluid: '{ material: LOX, pressure: 1.5 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: -185 degC }' }), hazards: ['oxygen', 'cold'] },
+  { what: 'nitrous oxide feeds a fire', text: line({ fluid: '{ material: N2O, pressure: 1 atm }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: ['asphyxiation', 'oxygen'] },
   { what: 'engine oil that is only warm', text: line({ fluid: '{ material: engine oil, pressure: 1.2 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 80 degC }' }), hazards: ['hot'] },
   { what: 'a word that only looks like one of the list', text: line({ title: 'Cooling of the drug-free co-current lining of a cartridge' }), hazards: ['medical'] },
   { what: 'a fire named where no heat is set free', text: line({ title: 'Feed line of a fire hydrant' }), hazards: [] },

@@ -34,6 +34,7 @@ density:
 describe('names', () => {
   it.each([
     ['water', 'water'], ['H2O', 'water'], ['Steam', 'water'], ['dry-air', 'air'], ['N2', 'nitrogen'], ['CO2', 'carbon dioxide'], ['aluminum', 'aluminium'], ['diesel-like oil', 'light oil'], ['moist air', 'humid air'],
+    ['C3H6O', 'acetone'], ['propanone', 'acetone'], ['67-64-1', 'acetone'], ['R134a', 'R-134a'], ['r-717', 'ammonia'], ['R744', 'carbon dioxide'], ['R-290', 'propane'], ['R600a', 'isobutane'], ['isopropanol', '2-propanol'], ['LH2', 'parahydrogen'], ['LOX', 'oxygen'], ['D2O', 'heavy water'], ['NO', 'nitric oxide'], ['He', 'helium'], ['H2S', 'hydrogen sulphide'],
   ])('%s is %s', (name, expected) => expect(loadMaterial(name).name).toBe(expected));
 
   it('names the nearest, or the candidates', () => {
@@ -41,6 +42,8 @@ describe('names', () => {
     const oils = problemsOf(() => loadMaterial('oil'))[0];
     expect(oils?.code).toBe('ambiguous-material');
     for (const name of ['engine oil', 'heat-transfer oil', 'light oil', 'lubricating oil ISO VG 46']) expect(oils?.expected).toContain(name);
+    expect(problemsOf(() => loadMaterial('aceton'))[0]).toMatchObject({ code: 'unknown-material', nearest: 'acetone' });
+    expect(problemsOf(() => loadMaterial('C8H10'))[0]).toMatchObject({ code: 'ambiguous-material', expected: 'one of ethylbenzene, m-xylene, o-xylene, p-xylene' });
     expect(problemsOf(() => loadMaterial('unobtainium'))[0]?.expected).toMatch(/^one of the \d{3} materials that `runbrief material` lists/); // all the names would fill pages
     for (const name of ['__proto__', 'constructor', 'toString', '']) expect(problemsOf(() => loadMaterial(name))[0]?.code).toBe('unknown-material');
   });
@@ -64,6 +67,7 @@ describe('records of the user', () => {
     [brine.replace('  uncertainty: 1 %\n', ''), 'missing-uncertainty', 6, 3],
     [brine.replace('kind: fluid', 'kind: fluid\nkind: solid'), 'unreadable-yaml', 4, 1],
     [brine.replace('value: 1.2', 'valu: 1.2'), 'unknown-key', 7, 22],
+    [brine.replace('kind: fluid', 'kind: fluid\nmarks: [flamable]'), 'wrong-mark', 4, 8],
     [brine.replace('[0 degC, 50 degC]', '[50 degC, 0 degC]'), 'wrong-range', 8, 15],
     ['name: &a x\nkind: *a\n', 'unreadable-yaml', undefined, undefined],
     ['just text', 'wrong-record', undefined, undefined],

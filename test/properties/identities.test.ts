@@ -5,6 +5,7 @@ import { laws, loadMaterial, materialRecords, phaseAt, propertyAt, saturationOf,
 const states = [
   ['water', 300, 1e5], ['water', 450, 5e6], ['water', 630, 25e6], ['water', 660, 23e6], ['water', 500, 1e5], ['water', 1500, 1e6], ['water', 300, 2e8],
   ['air', 300, 101325], ['air', 150, 5e6], ['nitrogen', 90, 1e6], ['carbon dioxide', 310, 9e6], ['carbon dioxide', 260, 5e6], ['oxygen', 200, 1e6], ['argon', 300, 1e7],
+  ['methanol', 300, 1e5], ['methanol', 400, 1e5], ['ammonia', 300, 2e6], ['ammonia', 420, 1.5e7], ['helium', 4, 1e5], ['helium', 8, 2e6], ['parahydrogen', 21, 5e5], ['R-410A', 280, 2e6], ['n-heptane', 400, 1e5], ['R-1234yf', 300, 1e5], ['heavy water', 300, 1e5], ['propane', 380, 6e6],
 ] as const;
 
 const of = (name: string, id: PropertyId, temperature: number, pressure: number): number => propertyAt(loadMaterial(name), id, { temperature, pressure })?.value ?? Number.NaN;
@@ -46,7 +47,7 @@ describe('saturation', () => {
     return line;
   };
 
-  it.each(['water', 'nitrogen', 'oxygen', 'argon', 'carbon dioxide', 'sodium', 'mercury'])('%s: boiling temperature and vapour pressure are each other\'s inverse', (name) => {
+  it.each(['water', 'nitrogen', 'oxygen', 'argon', 'carbon dioxide', 'sodium', 'mercury', 'acetone', 'ammonia', 'methanol', 'R-134a', 'R-410A', 'helium', 'glycerol'])('%s: boiling temperature and vapour pressure are each other\'s inverse', (name) => {
     const line = lineOf(name);
     for (const share of [0.05, 0.3, 0.6, 0.9, 0.97]) {
       const T = line.from + share * (line.to - line.from);

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { loadMaterial, parseRange, parseState, phaseAt, propertyAt, stateOf, tableOver, takeState } from '../../src/properties/index.ts';
+import { loadMaterial, parseRange, parseState, phaseAt, propertyAt, saturationOf, stateOf, tableOver, takeState } from '../../src/properties/index.ts';
 import { Problem } from '../../src/problems/index.ts';
 
 const codeOf = (task: () => unknown): string => {
@@ -81,6 +81,14 @@ describe('phases', () => {
     ['water', '400 degC, saturated liquid', 'no-saturation'],
     ['water', '2 bar, saturated vapour, 60 degC', 'incomplete-state'],
     ['water', '60 degC', 'incomplete-state'],
+    ['LN2', '25 degC, 1 bar', 'no-such-phase'],
+    ['liquid propane', '25 degC, 1 bar', 'no-such-phase'],
+    ['propane vapour', '25 degC, 20 bar', 'no-such-phase'],
+    ['benzene', '0 degC, 1 bar', 'not-covered'], // melts at 5.5 degC
+    ['methane', '100 K, 800 bar', 'not-covered'], // melts at 110 K under this pressure
+    ['1-propanol', '120 degC, 1 bar', 'not-covered'], // boils at 97 degC
+    ['acetone', '329.22 K, saturated liquid, 1 bar', 'incomplete-state'],
+    ['nitric oxide', '300 K, saturated liquid', 'no-saturation'],
   ])('%s at %s is refused', (name, text, code) =>
     expect(
       codeOf(() => {
@@ -88,6 +96,25 @@ describe('phases', () => {
         propertyAt(loadMaterial(name), 'density', { temperature: taken.sample.T, pressure: taken.sample.p, humidity: taken.sample.x, composition: taken.sample.x });
       }),
     ).toBe(code));
+
+  // Normal boiling points of the CRC Handbook of Chemistry and Physics, 95th ed. [degC]
+  it.each([
+    ['acetone', 56.08], ['benzene', 80.09], ['methanol', 64.54], ['ethanol', 78.24], ['n-hexane', 68.72], ['ammonia', -33.33], ['propane', -42.11], ['n-butane', -0.5], ['methane', -161.48], ['R-134a', -26.09], ['R-22', -40.81], ['chlorine', -34.04], ['sulphur dioxide', -10.05], ['heavy water', 101.42], ['hydrogen', -252.76], ['helium', -268.93], ['krypton', -153.41], ['toluene', 110.63], ['cyclohexane', 80.71], ['chloroform', 61.17], ['acetic acid', 117.9], ['styrene', 145], ['1-propanol', 97.2], ['2-propanol', 82.3], ['carbon tetrachloride', 76.8], ['n-butanol', 117.66],
+  ])('%s boils at %d degC', (name, boils) => {
+    expect(Math.abs((saturationOf(loadMaterial(name))?.boiling(101325) ?? 0) - 273.15 - boils)).toBeLessThan(0.5);
+  });
+
+  // Melting points of the CRC Handbook of Chemistry and Physics, 95th ed. [degC]
+  it.each([['acetone', -94.7], ['benzene', 5.49], ['ammonia', -77.65], ['cyclohexane', 6.59], ['heavy water', 3.82], ['n-dodecane', -9.57], ['p-xylene', 13.25], ['ethanol', -114.14]])('%s melts at %d degC', (name, melts) => {
+    expect(Math.abs((loadMaterial(name).meltingTemperature ?? 0) - 273.15 - melts)).toBeLessThan(0.8);
+  });
+
+  it('a melting line rises with pressure', () => {
+    // Cyclohexane melts near 305 K under 50 MPa: Penoncello, Jacobsen and Goodwin, Int. J. Thermophys. 16 (1995) 519.
+    expect(phaseAt(loadMaterial('cyclohexane'), 300, 1e5).phase).toBe('liquid');
+    expect(phaseAt(loadMaterial('cyclohexane'), 300, 9e7).phase).toBe('solid');
+    expect(phaseAt(loadMaterial('methane'), 100, 1e6).phase).toBe('liquid');
+  });
 
   it('takes the side that is asked for on the saturation line', () => {
     expect(at('water', '60 degC, saturated liquid').phase).toBe('liquid');
