@@ -255,6 +255,15 @@ def tension(cas, low, high):
     return entry('surfaceTension', 'liquid', cas, 1, low, high * 0.98, None, ('vdi', 'jasper'), phase=False)
 
 
+def crc_check(cas, M):
+    """The heat capacity of the liquid at 25 degC from a third work."""
+    data = chemicals.heat_capacity.CRC_standard_data
+    value = float(data.at[cas, 'Cpl']) if cas in data.index else math.nan
+    if not value > 0:
+        return {}
+    return {'checks': [{'at': {'T': '298.15 K', 'p': '101325 Pa'}, 'expect': f"{number(float(f'{value / M:.5g}'))} J/(kg K)", 'within': '3 %', 'source': f'CRC Handbook of Chemistry and Physics, 95th ed., standard thermodynamic properties; {CARRIED}'}]}
+
+
 def flash(cas):
     """Flash point, closed cup, of what is a liquid at ambient pressure; liquefied gases always give off enough vapour."""
     value = chemicals.T_flash(cas)
@@ -282,6 +291,8 @@ def liquid_record(fluid):
         limits = fluid.get('limits', {}).get(key, [melts, 0.98 * Tc if key == 'vapourPressure' else high])
         found = entry(key, 'liquid', cas, M, *limits, pressure, fluid.get('works', {}).get(key, works), phase=False)
         if found is not None:
+            if key == 'specificHeatCapacity':
+                found.update(crc_check(cas, M))
             record[key] = found
     if 'minTemperature' in fluid:
         return record

@@ -1,5 +1,7 @@
-import { propertyNames } from '../../src/properties/index.ts';
+import { loadMaterial, propertyNames, type PropertyId } from '../../src/properties/index.ts';
 import { differs, type Held } from './independent-fluids.ts';
+
+const compared: readonly PropertyId[] = ['density', 'viscosity', 'thermalConductivity', 'specificHeatCapacity', 'speedOfSound', 'vapourPressure', 'latentHeat', 'surfaceTension'];
 
 const percent = (share: number): string => (share < 5e-6 ? '0' : `${Number((100 * share).toPrecision(2))} %`);
 
@@ -32,6 +34,8 @@ export function comparedPage(all: readonly Held[]): string {
         lines.push(`| ${propertyNames[property]} | ${held.length} | ${reference} | ${percent(worst.off)}${worst.off < 5e-6 ? '' : ` at ${Number(worst.T.toPrecision(4))} K`} | ${percent(worst.declared)} |`);
       }
     }
+    const missing = compared.filter((property) => loadMaterial(material).properties.includes(property) && !mine.some((one) => one.property === property));
+    if (missing.length > 0) lines.push('', `Not compared, as no second work was at hand: ${missing.map((property) => propertyNames[property]).join(', ')}.`);
     const apart = mine.flatMap((one) => {
       const reason = differs(one);
       return reason === undefined || one.off <= one.allowed ? [] : [{ one, reason }];

@@ -25,7 +25,7 @@ KEYS = dict(zip(HEAD, ['D', 'C', 'A', 'isobaric_expansion_coefficient', 'V', 'L'
 rows = []
 
 
-def digits(value, n=8):
+def digits(value, n=7):
     return '' if value is None or not math.isfinite(value) else f'{value:.{n}g}'
 
 
@@ -132,7 +132,7 @@ for fluid in fluids:
     if 'from' in fluid:
         from_coolprop(name, fluid['from'], record)
         cas = CP.get_fluid_param_string(fluid['from'], 'CAS')
-        if name in ('parahydrogen', 'R-410A', 'R-407C', 'R-404A', 'heavy water'):
+        if name in ('parahydrogen', 'deuterium', 'R-410A', 'R-407C', 'R-404A', 'R-507A', 'heavy water'):
             continue
         (T, p), *_ = boxes(record['thermodynamics'])
         from_handbooks(name, cas, record, lambda t: CP.PropsSI('P', 'T', t, 'Q', 0, fluid['from']), T[0], T[1], si(record['critical']['temperature']))

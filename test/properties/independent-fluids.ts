@@ -57,6 +57,13 @@ const literatureDiffers: readonly (readonly [string, string, string, string])[] 
   ['R-32', 'viscosity', 'VDI', 'the liquid is 20 % to 30 % above Perry and ours'],
   ['R-22', 'viscosity', 'CoolProp', 'it takes the residual-entropy model, which lies 20 % below the tables for the liquid; ours is the method of corresponding states, within 10 % of VDI at room temperature'],
   ['R-22', 'viscosity', 'VDI', 'below 200 K'],
+  ['R-143a', 'viscosity', 'VDI', 'below 200 K'],
+  ['R-143a', 'thermalConductivity', 'VDI', 'the polynomial of the gas bends down above 450 K, while the heat capacity rises'],
+  ['R-143a', 'surfaceTension', 'VDI', 'the critical compilation of Mulero and others lies 17 % lower near 294 K'],
+  ['1-butene', 'vapourPressure', 'Perry', 'below 10 kPa; VDI is within 3.6 %'],
+  ['cyclopentane', 'density', 'Perry', 'above 400 K both handbooks lie higher than the later equation of state'],
+  ['cyclopentane', 'density', 'VDI', 'above 400 K both handbooks lie higher than the later equation of state'],
+  ['diethyl ether', 'specificHeatCapacity', 'Perry', 'the polynomial rises faster above 340 K; at room temperature both agree within 1.5 %'],
   ['dimethyl ether', 'viscosity', 'VDI', 'that correlation fails above 290 K; Perry is within 15 %'],
 ];
 
