@@ -1,7 +1,7 @@
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { nearestName, Problem } from '../problems/index.ts';
-import { compileMaterials } from './compile.ts';
+import { compileMaterials, openSource } from './compile.ts';
 import { materialOf, type Material } from './material.ts';
 import { collectionOf, plainName } from './names.ts';
 import { openStored } from './stored.ts';
@@ -18,7 +18,7 @@ let shipped: Collection | undefined;
 export function shippedMaterials(): Collection {
   if (shipped !== undefined) return shipped;
   const here = fileURLToPath(new URL('.', import.meta.url));
-  shipped = openStored(join(here, 'materials')) ?? compileMaterials(join(here, '../../materials'));
+  shipped = openStored(join(here, 'materials')) ?? openSource(join(here, '../../materials'));
   return shipped;
 }
 

@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { Problem, type ProblemData } from '../problems/index.ts';
 import { readBands, readEntry } from './compile-entry.ts';
 import type { Side } from './models/point.ts';
-import { collectionOf, plainName } from './names.ts';
+import { collectionOf, findIn, namesOf, plainName, type Named } from './names.ts';
 import { dangerMarks, propertyUnits, type Band, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
 import { yamlReader, type YamlReader } from './yaml-reader.ts';
 
@@ -54,11 +54,7 @@ export function compileMaterial(text: string, file: string): MaterialRecord {
   const marks = texts('marks');
   for (const mark of marks) if (!(dangerMarks as readonly string[]).includes(mark)) reader.complain(['marks'], { code: 'wrong-mark', message: `"${mark}" is not a mark of danger`, expected: `one of ${dangerMarks.join(', ')}` });
   const record = {
-    id: String(name).toLowerCase().replaceAll(' ', '-'),
-    name: String(name),
-    ...(typeof raw['formula'] === 'string' ? { formula: raw['formula'] } : {}),
-    aliases: texts('aliases'),
-    phaseNames: (isMap(raw['phaseNames']) ? raw['phaseNames'] : {}) as { [name: string]: Side },
+    ...namedOf(raw),
     kind: kind as 'fluid' | 'solid',
     phases: (phases.length > 0 ? phases : kind === 'solid' ? ['solid'] : ['liquid', 'vapour']) as (Side | 'solid')[],
     ...(marks.length > 0 ? { marks: marks as NonNullable<MaterialRecord['marks']> } : {}),
@@ -74,6 +70,17 @@ export function compileMaterial(text: string, file: string): MaterialRecord {
   };
   reader.finish();
   return record;
+}
+
+/** The part of a record that bears names. */
+function namedOf(raw: Raw): Named {
+  return {
+    id: String(raw['name']).toLowerCase().replaceAll(' ', '-'),
+    name: String(raw['name']),
+    ...(typeof raw['formula'] === 'string' ? { formula: raw['formula'] } : {}),
+    aliases: Array.isArray(raw['aliases']) ? (raw['aliases'] as unknown[]).map(String) : [],
+    phaseNames: (isMap(raw['phaseNames']) ? raw['phaseNames'] : {}) as { [name: string]: Side },
+  };
 }
 
 function thermodynamics(reader: YamlReader, given: unknown): object {
@@ -102,13 +109,7 @@ export function compileMaterials(dir: string): Collection {
   const problems: ProblemData[] = [];
   const materials: MaterialRecord[] = [];
   const owner = new Map<string, string>();
-  let files: string[];
-  try {
-    files = readdirSync(dir).filter((file) => /\.ya?ml$/.test(file)).sort();
-  } catch {
-    throw new Problem({ code: 'missing-folder', message: `the folder of materials ${dir} cannot be read` });
-  }
-  for (const file of files) {
+  for (const file of filesOf(dir)) {
     try {
       const record = compileMaterial(readFileSync(join(dir, file), 'utf8'), file);
       for (const name of [record.name, ...record.aliases, ...Object.keys(record.phaseNames)]) {
@@ -124,4 +125,44 @@ export function compileMaterials(dir: string): Collection {
   }
   if (problems.length > 0) throw new Problem(problems);
   return collectionOf(materials);
+}
+
+function filesOf(dir: string): string[] {
+  try {
+    return readdirSync(dir).filter((file) => /\.ya?ml$/.test(file)).sort();
+  } catch {
+    throw new Problem({ code: 'missing-folder', message: `the folder of materials ${dir} cannot be read` });
+  }
+}
+
+/**
+ * Opens the records of a source tree: only their heads are read for the names, each record is read and checked when it is asked for.
+ * The head of a file ends at its first empty line.
+ *
+ * @param dir  folder with one `.yaml` file per material, all of which `compileMaterials` has accepted
+ * @returns    the collection
+ * @throws     {Problem} missing-folder; the faults of a record when it is asked for
+ */
+export function openSource(dir: string): Collection {
+  const file = new Map<string, string>();
+  const heads = filesOf(dir).map((one) => {
+    const [head = ''] = readFileSync(join(dir, one), 'utf8').split('\n\n', 1);
+    const raw = yamlReader(head, one).value;
+    const named = namedOf(isMap(raw) ? raw : {});
+    file.set(named.id, one);
+    return named;
+  });
+  const read = new Map<string, MaterialRecord>();
+  const names = namesOf(heads);
+  return {
+    names,
+    find: (name) => findIn(names, name),
+    record(id) {
+      const name = file.get(id);
+      if (name === undefined) return undefined;
+      const record = read.get(id) ?? compileMaterial(readFileSync(join(dir, name), 'utf8'), name);
+      read.set(id, record);
+      return record;
+    },
+  };
 }

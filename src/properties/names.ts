@@ -8,13 +8,16 @@ import type { Collection, MaterialRecord, NamedMaterial } from './record.ts';
  */
 export const plainName = (name: string): string => name.trim().toLowerCase().replaceAll(/[\s_-]+/g, ' ');
 
+/** What of a record bears names. */
+export type Named = Pick<MaterialRecord, 'id' | 'name' | 'formula' | 'aliases' | 'phaseNames'>;
+
 /**
  * Names of one record.
  *
  * @param record  the record
  * @returns       plain name to what it stands for
  */
-function namesOf(record: MaterialRecord): { [plain: string]: NamedMaterial } {
+function namesOfOne(record: Named): { [plain: string]: NamedMaterial } {
   const { id, name } = record;
   const names: { [plain: string]: NamedMaterial } = {};
   for (const one of [id, name, ...record.aliases]) names[plainName(one)] = { id, name };
@@ -23,7 +26,7 @@ function namesOf(record: MaterialRecord): { [plain: string]: NamedMaterial } {
 }
 
 /** Formulas: of one record, or of several that share it and are told apart by name. A name goes before a formula. */
-function formulasOf(records: readonly MaterialRecord[]): { [plain: string]: NamedMaterial } {
+function formulasOf(records: readonly Named[]): { [plain: string]: NamedMaterial } {
   const found: { [plain: string]: NamedMaterial } = {};
   for (const { id, name, formula } of records) {
     if (formula === undefined) continue;
@@ -35,6 +38,17 @@ function formulasOf(records: readonly MaterialRecord[]): { [plain: string]: Name
 }
 
 /**
+ * Names, aliases and formulas of records.
+ *
+ * @param records  what bears names; of two that claim one name the later holds it
+ * @returns        plain name to what it stands for
+ */
+export const namesOf = (records: readonly Named[]): Collection['names'] => Object.assign(formulasOf(records), ...records.map(namesOfOne)) as Collection['names'];
+
+/** What a plain name stands for; words of the language such as `constructor` stand for nothing. */
+export const findIn = (names: Collection['names'], name: string): NamedMaterial | undefined => (Object.hasOwn(names, name) ? names[name] : undefined);
+
+/**
  * A collection of records in memory, on top of another one.
  *
  * @param records  the records
@@ -44,6 +58,6 @@ function formulasOf(records: readonly MaterialRecord[]): { [plain: string]: Name
 export function collectionOf(records: readonly MaterialRecord[], under?: Collection): Collection {
   const byId = new Map(records.map((record) => [record.id, record]));
   const below = Object.entries(under?.names ?? {}).filter(([, { id }]) => !byId.has(id));
-  const names = { ...formulasOf(records), ...Object.fromEntries(below), ...Object.assign({}, ...records.map(namesOf)) as Collection['names'] };
-  return { names, find: (name) => (Object.hasOwn(names, name) ? names[name] : undefined), record: (id) => byId.get(id) ?? under?.record(id) };
+  const names = { ...Object.fromEntries(below), ...namesOf(records) };
+  return { names, find: (name) => findIn(names, name), record: (id) => byId.get(id) ?? under?.record(id) };
 }

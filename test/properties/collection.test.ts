@@ -3,6 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, describe, expect, it } from 'vitest';
 import { compileMaterial, compileMaterials, loadMaterial, materialRecords, propertyAt, storedMaterials, withMaterialsFrom } from '../../src/properties/index.ts';
+import { openSource } from '../../src/properties/compile.ts';
 import { openStored } from '../../src/properties/stored.ts';
 import { Problem } from '../../src/problems/index.ts';
 
@@ -83,6 +84,10 @@ describe('records of the user', () => {
     writeFileSync(join(twice, 'b.yaml'), brine.replace('test brine', 'other'));
     expect(problemsOf(() => compileMaterials(twice))[0]).toMatchObject({ code: 'two-names', file: 'b.yaml' });
   });
+});
+
+it('the heads of the source files bear all names', () => {
+  expect(openSource('materials').names).toEqual(compileMaterials('materials').names);
 });
 
 it('what is stored gives the same numbers', () => {
