@@ -214,6 +214,22 @@ def spread(one, other, low, high):
     return 100 * worst
 
 
+def agreeing(first, second, low, high, floor):
+    """The longest stretch, of twelve equal ones, over which two works agree within the floor and a half, and how closely [per cent]."""
+    edges = [low + (high - low) * i / 12 for i in range(13)]
+    apart = [spread(first, second, a, b) for a, b in zip(edges, edges[1:])]
+    best = (0, 0)
+    for i in range(12):
+        j = i
+        while j < 12 and apart[j] is not None and apart[j] <= 1.5 * floor:
+            j += 1
+        best = max(best, (i, j), key=lambda pair: pair[1] - pair[0])
+    i, j = best
+    if j - i < 3:
+        return None
+    return edges[i], edges[j], max(floor, math.ceil(1.1 * max(apart[i:j])))
+
+
 def entry(key, side, cas, M, low, high, pressure, works, phase=True):
     """The first work's correlation between two temperatures; uncertainty from the second work, not below the floor."""
     laws = [(work, law(key, side, work, cas, M)) for work in works]
@@ -238,7 +254,12 @@ def entry(key, side, cas, M, low, high, pressure, works, phase=True):
             high, apart = high - 5, apart_high
     value = floor * 1.6 if apart is None else max(floor, math.ceil(1.1 * apart))
     said = f'; uncertainty at least the difference from {WORKS[second[0]]} over the range' if apart is not None else '; not held against a second work: the uncertainty is from memory of such correlations'
-    out = {'model': first[0], **({'phase': side} if phase else {}), 'range': {'T': [f'{number(round(low, 2))} K', f'{number(round(high, 2))} K'], **({'p': ['0 Pa', f'{number(pressure)} Pa']} if pressure else {})}, 'uncertainty': f'{number(float(value))} %', 'source': source(key, side, work) + said, 'constants': first[1]}
+    uncertainty = f'{number(float(value))} %'
+    inner = agreeing(first, second[1], low, high, floor) if second and value > 1.5 * floor else None
+    if inner is not None and inner[2] < value:
+        a, b, close = inner
+        uncertainty = [{'T': [f'{number(round(a, 2))} K', f'{number(round(b, 2))} K'], 'value': f'{number(float(close))} %'}, {'value': uncertainty}]
+    out = {'model': first[0], **({'phase': side} if phase else {}), 'range': {'T': [f'{number(round(low, 2))} K', f'{number(round(high, 2))} K'], **({'p': ['0 Pa', f'{number(pressure)} Pa']} if pressure else {})}, 'uncertainty': uncertainty, 'source': source(key, side, work) + said, 'constants': first[1]}
     return out
 
 
