@@ -13,8 +13,8 @@ import yaml
 
 sys.path.insert(0, os.path.dirname(os.path.abspath(__file__)))
 from emit import record_text  # noqa: E402
-from handbook import gas_record, liquid_record  # noqa: E402
 from helmholtz import helmholtz_record  # noqa: E402
+from liquids import gas_record, liquid_record  # noqa: E402
 
 here = os.path.dirname(os.path.abspath(__file__))
 target = os.path.join(here, '..', '..', 'materials')

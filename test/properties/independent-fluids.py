@@ -18,7 +18,7 @@ import yaml
 here = os.path.dirname(os.path.abspath(__file__))
 root = os.path.join(here, '..', '..')
 sys.path.insert(0, os.path.join(root, 'scripts', 'materials'))
-from handbook import law, row  # noqa: E402
+from handbook import law  # noqa: E402
 
 HEAD = ['density', 'specificHeatCapacity', 'speedOfSound', 'thermalExpansion', 'viscosity', 'thermalConductivity', 'vapourPressure', 'latentHeat', 'surfaceTension']
 KEYS = dict(zip(HEAD, ['D', 'C', 'A', 'isobaric_expansion_coefficient', 'V', 'L', 'P', 'H', 'I']))
