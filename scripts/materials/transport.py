@@ -129,7 +129,7 @@ def conductivity(fluid, data, f):
     if k.get('type') == 'simplified_Olchowy_Sengers':
         constants['critical'] = [k.get('zeta0', 1.94e-10) * 1e9, k.get('GAMMA', 0.0496), 1e9 / k.get('qD', 2e9), k.get('T_ref', 1.5 * f['Tr']), f['pr'], f['rhor'], k.get('R0', 1.03), k.get('gamma', 1.239)]
     elif k.get('hardcoded') == 'Ammonia':
-        constants['ammonia'] = 1984
+        constants['criticalOf'] = 'ammonia'
     elif k.get('hardcoded') not in (None, 'None'):
         return None
     return {'model': 'conductivity-of-density', 'source': f"{citation(c['BibTeX'])}; {CARRIED}", 'constants': constants}

@@ -40,7 +40,7 @@ export const fluidModels: { readonly [name: string]: PropertyModel } = {
     },
   },
   'conductivity-of-density': {
-    constants: ['dilute', 'dense', 'critical?', 'ammonia?'],
+    constants: ['dilute', 'dense', 'critical?', 'criticalOf?'],
     make(c: ConductivityOfDensityConstants, engine) {
       let sample: Sample;
       const conductivity = conductivityOfDensity(c, { viscosity: () => engine.value('viscosity', sample), equation: engine.equation });

@@ -16,8 +16,8 @@ export interface ConductivityOfDensityConstants {
   readonly dense: { readonly temperature: number; readonly density: number; readonly terms: Rows };
   /** As for `criticalEnhancement`. */
   readonly critical?: readonly number[];
-  /** The enhancement of ammonia: marked by the year of its source. */
-  readonly ammonia?: number;
+  /** The fluid whose own form of the enhancement is taken. */
+  readonly criticalOf?: string;
 }
 
 /**
@@ -50,7 +50,7 @@ export function conductivityOfDensity(c: ConductivityOfDensityConstants, given: 
   return (at) => {
     const dense = sumOfProducts(c.dense.terms, at.density / c.dense.density, c.dense.temperature / at.temperature);
     const critical = c.critical === undefined ? 0 : criticalEnhancement({ constants: c.critical, at, viscosity: given.viscosity, equation: given.equation });
-    return thin(at.temperature) + dense + critical + (c.ammonia === undefined ? 0 : ammoniaEnhancement(at.temperature, at.density));
+    return thin(at.temperature) + dense + critical + (c.criticalOf === 'ammonia' ? ammoniaEnhancement(at.temperature, at.density) : 0);
   };
 }
 

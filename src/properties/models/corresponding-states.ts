@@ -23,7 +23,7 @@ export interface CorrespondingViscosityConstants extends Shape {
 
 export interface CorrespondingConductivityConstants extends Shape {
   readonly reference: string;
-  /** Rows [a, t] in T [K] of the Eucken factor, in 1e3 (kg/mol is in the unit of the paper). */
+  /** Rows [a, t] in T [K]: 1e3 times their sum multiplies the dilute viscosity [Pa s] and c_p0 - 5/2 R [J/(kg K)]. */
   readonly inner: Rows;
   /** As for `criticalEnhancement`. */
   readonly enhancement: readonly number[];
