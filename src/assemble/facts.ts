@@ -1,6 +1,8 @@
 import type { Case, wallEntries } from '../case/index.ts';
 import type { Flow } from '../flows/index.ts';
 import { features } from '../quantities/index.ts';
+import { Problem } from '../problems/index.ts';
+import { loadSurface } from '../properties/index.ts';
 import { asksForSpecies, carriedWords, hasLightGas, reacts } from './carried.ts';
 import { wallPlaces } from './leaves.ts';
 import { outerFace } from './wall-definitions.ts';
@@ -29,7 +31,7 @@ const featureKeys: Readonly<Record<(typeof features)[number], (on: Case, walls: 
   swirl: () => false,
   humidity: (c) => c.has('fluid.humidity'),
   burning: (c) => c.has('burning'),
-  roughness: (_, w) => any(w, 'sandGrain'),
+  roughness: (_, w) => any(w, 'sandGrain') || [...w.values()].some((keys) => hasGrain(keys.get('surface')?.value)),
   layers: (c) => c.list('wall.layers').length > 0 || c.list('walls').some((w) => c.list(`walls.${w}.layers`).length > 0),
   gravity: (c) => c.has('gravity'),
   sources: (c) => c.has('sources') || c.has('drive.heatRelease'),
@@ -42,6 +44,17 @@ const featureKeys: Readonly<Record<(typeof features)[number], (on: Case, walls: 
   filmReaction: (c) => reacts(c, 'interface'),
   reactionHeat: (c) => c.list('reactions').some((name) => c.has(`reactions.${name}.enthalpy`)),
   partHeated: (_, w) => { const heated = [...w.values()].filter((keys) => heating.some((key) => keys.has(key))).length; return heated > 0 && heated < w.size; },
+};
+
+/** Whether the tables know a sand grain of a surface; an unknown name is told where the walls are read. */
+const hasGrain = (name: unknown): boolean => {
+  if (typeof name !== 'string') return false;
+  try {
+    return loadSurface(name).sandGrain !== undefined;
+  } catch (error) {
+    if (!(error instanceof Problem)) throw error;
+    return false;
+  }
 };
 
 /** Keys by which heat passes a wall. */

@@ -20,6 +20,7 @@ const wallKeys: Fields = {
   }),
   emissivity: share('emissivity for heat radiation', '0.9', { gives: ['emissivity@'] }),
   sandGrain: length('height of the equivalent sand grain', '1.5 um', { atLeast: 0, gives: ['sandGrain@'] }),
+  surface: text('kind of surface, from the tables: it gives sand grain and emissivity that are not given', 'drawn tubing'),
   Ra: length('mean roughness by a stylus, in place of the sand grain', '0.8 um', { atLeast: 0 }),
   speed: speed('speed of a wall that slides along itself', '0.1 m/s', { gives: ['wallSpeed@'] }),
   rotation: turning('speed of a wall that turns', '60 rpm', { gives: ['wallRotation@'] }),

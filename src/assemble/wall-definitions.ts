@@ -1,4 +1,4 @@
-import { loadMaterial, type Collection } from '../properties/index.ts';
+import { loadMaterial, loadSurface, type Collection, type SurfaceValue } from '../properties/index.ts';
 import type { Case, Entry, wallEntries } from '../case/index.ts';
 import type { Flow } from '../flows/index.ts';
 import { Problem } from '../problems/index.ts';
@@ -41,11 +41,24 @@ export function wallDefinitions(on: Case, flow: Flow, walls: ReturnType<typeof w
       if (id === undefined || !exists(id) || typeof entry.value !== 'number') continue;
       definitions.push(ways(`${id}@${place}`, [{ needs: [entry.path], value: (of) => of[entry.path] as number, formula: `as given: ${entry.path}`, source: 'the case' }]));
     }
+    definitions.push(...surfaceDefinitions(on, keys, place, exists));
     if (layers.length > 0) {
       definitions.push(...layerDefinitions(place, layers));
     }
   });
   return { definitions, laws, materials: names };
+}
+
+/** What the tables of surfaces say of a wall, where the case does not give it; the ends of a table are the scatter. */
+function surfaceDefinitions(on: Case, keys: ReadonlyMap<string, Entry>, place: string, exists: (id: string) => boolean): Definition[] {
+  const named = keys.get('surface');
+  if (typeof named?.value !== 'string') return [];
+  const surface = placed(named, on.file, () => loadSurface(named.value as string));
+  const way = (id: 'sandGrain' | 'emissivity', known: SurfaceValue | undefined): Definition[] => {
+    if (known === undefined || keys.has(id) || (id === 'sandGrain' && keys.has('Ra')) || !exists(id)) return [];
+    return [ways(`${id}@${place}`, [{ needs: [], as: 'assumed', value: () => known.value, scatter: Math.max(known.high / known.value, known.value / known.low) - 1, formula: `table: ${surface.name}`, source: known.source }])];
+  };
+  return [...way('sandGrain', surface.sandGrain), ...way('emissivity', surface.emissivity)];
 }
 
 /** Whether a temperature of the wall is that of its outer face: with layers, unless the case says otherwise. */

@@ -1,6 +1,6 @@
 import { nearestName, Problem } from '../problems/index.ts';
-import { fitKinds, fitOf, type Material as Substance, loadMaterial, materialNames, mixtureOf, parseRange, parseState, propertyNames, type PropertyId, propertySheet, sampledOver, shippedMaterials, stateOf, type StateText, tableOver, withMaterialsFrom } from '../properties/index.ts';
-import { materialCsv, materialDocument, materialTableDocument, materialTableText, materialText, fitsDocument, fitsText, plotSvg, plotText, wrapped } from '../report/index.ts';
+import { allSurfaces, fitKinds, fitOf, type Material as Substance, loadMaterial, materialNames, loadSurface, mixtureOf, parseRange, parseState, propertyNames, type PropertyId, propertySheet, sampledOver, shippedMaterials, stateOf, type StateText, type Surface, tableOver, withMaterialsFrom } from '../properties/index.ts';
+import { materialCsv, materialDocument, materialTableDocument, materialTableText, materialText, fitsDocument, fitsText, plotSvg, plotText, surfacesText, surfaceText, wrapped } from '../report/index.ts';
 import { readQuantity } from '../units/index.ts';
 import { Args, Base, Flags } from './base.ts';
 import { writeInto } from './written.ts';
@@ -17,6 +17,7 @@ export default class Material extends Base {
     { command: 'runbrief material water --over "20 degC .. 90 degC, 2 bar" --table', description: 'a table as CSV' },
     { command: 'runbrief material water --over "20 degC .. 90 degC, 2 bar" --fit polynomial --within "0.1 %"', description: 'functions ready to type in: coefficients, largest error, safe limits' },
     { command: 'runbrief material air --over "250 K .. 700 K, 1 atm" --plot --into curves', description: 'curves on the screen, and as SVG in a folder' },
+    { command: 'runbrief material --surface "drawn tubing"', description: 'roughness and emissivity of a surface' },
     { command: 'runbrief material', description: 'the names of all materials' },
   ];
 
@@ -33,12 +34,18 @@ export default class Material extends Base {
     into: Flags.string({ helpValue: 'DIR', description: 'a folder for the curves as SVG', dependsOn: ['plot'] }),
     force: Flags.boolean({ description: 'overwrite what exists', dependsOn: ['into'] }),
     points: Flags.integer({ default: 15, min: 2, max: 2000, helpValue: 'N', description: 'rows of a range' }),
+    surface: Flags.string({ helpValue: 'NAME', description: 'a surface by name, its sand grain and emissivity with their scatter; "all" lists the tables', exclusive: ['at', 'over'] }),
     materials: Flags.string({ helpValue: 'DIR', description: 'a folder with records of your own' }),
   };
 
   async run(): Promise<object> {
     const { args, flags } = await this.parse(Material);
     const collection = flags.materials === undefined ? shippedMaterials() : withMaterialsFrom(flags.materials);
+    if (flags.surface !== undefined) {
+      const surfaces = flags.surface === 'all' ? allSurfaces() : [loadSurface(flags.surface)];
+      this.say(flags.surface === 'all' ? surfacesText(surfaces) : surfaceText(surfaces[0] as Surface));
+      return { surfaces };
+    }
     if (args.name === undefined) {
       const names = materialNames(collection);
       this.say(wrapped(names.join(', '), ''));

@@ -14,4 +14,5 @@ export { type Box, type Collection, type MaterialRecord, type Phase, type Proper
 export { propertySheet, type PropertySheet } from './sheet.ts';
 export type { State, StateText } from './state.ts';
 export { type StoredFile, storedMaterials } from './stored.ts';
+export { allSurfaces, loadSurface, readSurfaces, type Surface, type SurfaceValue } from './surfaces.ts';
 export { type PropertyTable, tableOver, type TableRow } from './table-over.ts';

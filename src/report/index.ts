@@ -5,6 +5,7 @@ export { referenceCsv, referenceDocument, referenceList, referenceText } from '.
 export { materialCsv, materialDocument, materialTableDocument, materialTableText, materialText } from './material.ts';
 export { fitsDocument, fitsText } from './material-fit.ts';
 export { plotSvg, plotText } from './material-plot.ts';
+export { surfacesText, surfaceText } from './surface.ts';
 export { wrapped } from './wrap.ts';
 export { planBlocks } from './plan-blocks.ts';
 export { asText } from './as-text.ts';

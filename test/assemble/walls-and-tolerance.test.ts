@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { vocabulary } from '../../src/assemble/index.ts';
 import { readCase } from '../../src/case/index.ts';
+import type { Problem } from '../../src/problems/index.ts';
 import { settleCase } from '../../src/plan/index.ts';
 
 const duct = (more: string) => settleCase(readCase(`format: 1\ntitle: t\n${more}flow: duct\nsizes: { width: 20 mm, height: 10 mm, length: 1 m }\nfluid: { material: water, pressure: 2 bar abs }\ninlet: { speed: 1 m/s, temperature: 20 degC }\n`, 't.case.yaml', vocabulary)).assembled.workings;
@@ -17,6 +18,26 @@ describe('walls named as a group', () => {
     const w = duct('walls: [{ name: left, heatFlux: 3 kW/m^2 }, { name: sides, heatFlux: 1 kW/m^2 }]\n');
     expect(w.get('wallHeatFlux@walls.left')).toBe(3000);
     expect(w.get('wallHeatFlux@walls.right')).toBe(1000);
+  });
+});
+
+describe('a surface by name', () => {
+  it('gives sand grain and emissivity from the tables, and what the case gives wins', () => {
+    const w = duct('wall: { temperature: 60 degC, surface: commercial steel }\n');
+    expect(w.get('sandGrain@walls.left')).toBeCloseTo(46e-6, 9); // Moody 1944: 0.00015 ft
+    expect(w.word('has.roughness')).toBe('yes');
+    expect(duct('wall: { temperature: 60 degC, surface: commercial steel, sandGrain: 10 um }\n').get('sandGrain@walls.left')).toBe(1e-5);
+    expect(duct('wall: { temperature: 60 degC, surface: black paint }\n').word('has.roughness')).toBe('no');
+  });
+  it('one that no table knows is a problem at its place', () => {
+    expect(() => duct('wall: { temperature: 60 degC, surface: comercial steel }\n')).toThrow(expect.objectContaining({ list: [expect.objectContaining({ code: 'unknown-surface', nearest: 'commercial steel', file: 't.case.yaml', line: 3 })] }) as Problem);
+  });
+});
+
+describe('mixtures of gases in a case', () => {
+  it('takes the components of the composition', () => {
+    const w = settleCase(readCase('format: 1\ntitle: t\nflow: pipe\nsizes: { diameter: 0.3 m, length: 5 m }\nfluid: { material: flue gas, pressure: 1 bar abs, composition: { carbon dioxide: 13.3 % mol, oxygen: 3.9 % mol, nitrogen: 82.8 % mol } }\ninlet: { speed: 5 m/s, temperature: 20 degC }\n', 't.case.yaml', vocabulary)).assembled.workings;
+    expect(w.get('viscosity')).toBeCloseTo(1.714e-5, 6); // Bird, Stewart and Lightfoot, example 1.4-2, predicted at 20 degC
   });
 });
 
