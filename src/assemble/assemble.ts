@@ -5,7 +5,7 @@ import { meshDefinitions } from '../mesh/index.ts';
 import { numericsDefinitions } from '../numerics/index.ts';
 import { Problem } from '../problems/index.ts';
 import { propertyAt, type Collection, type Material } from '../properties/index.ts';
-import { carriedDefinitions, commonDefinitions, givenPropertyWays, isProperty, massAnalogy, materialWays } from '../quantities/index.ts';
+import { carriedDefinitions, commonDefinitions, givenPropertyWays, isProperty, massAnalogy, materialWays, rheologyWays } from '../quantities/index.ts';
 import { timeDefinitions } from '../time/index.ts';
 import { joinDefinitions, ways, Workings, type Definition, type Given } from '../workings/index.ts';
 import { carries, moleculeDefinitions, reactionDefinitions, targetSpecies } from './carried.ts';
@@ -81,7 +81,7 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
   const fluid = fluidOf(on, options.materials);
   const facts = factsOf(on, flow, walls, kindsOf(on, (id) => units.get(id)), fluid.medium);
   const wall = wallDefinitions(on, flow, walls, options.materials, exists);
-  const leaves = leavesOf(vocabulary, on.flow, flow.walls, (path) => on.list(path));
+  const leaves = leavesOf(vocabulary, on.flow, flow.walls, (path) => on.list(path)).map((leaf) => (leaf.unit.includes('^n') ? { ...leaf, unit: leaf.unit.replace('^n', `^${on.number('rheology.index') ?? 1}`) } : leaf));
   const { given, ranges } = givenOf(on);
   const assumed: Record<string, Given> = Object.fromEntries(Object.entries(fluid.assumed).map(([path, value]) => [path, { value, kind: 'assumed' as const }]));
   const flowed = actualFlow(on, fluid.material);
@@ -93,6 +93,7 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
     ways('inletTemperature', ['inlet.temperature', 'fluid.temperature', 'inlet.totalTemperature', 'initial.temperature'].map((path) => ({ needs: [path], value: (of: Readonly<Record<string, number>>) => of[path] as number, formula: `T_in as given: ${path}`, source: 'the case' }))),
     ...wall.definitions,
     ...(carried ? reactionDefinitions(on) : []),
+    ...(on.has('rheology') ? rheologyWays() : []),
     ...(fluid.laws === undefined ? [] : materialWays(fluid.laws.about)),
     ...targetDefinitions(on, estimated(on, base, flow.walls)),
     ...validationDefinitions(estimated(on, base, flow.walls)),
@@ -135,7 +136,7 @@ export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
 
 /** Words that hold for good in this case: what the flow fixes, what the fluid is, which features are named. */
 function fixedWords(words: Readonly<Record<string, string>>, flow: Flow): Record<string, string> {
-  const fluid = ['medium', 'transparency', 'fluidGiven'];
+  const fluid = ['medium', 'transparency', 'fluidGiven', 'rheologyLaw'];
   return Object.fromEntries(Object.entries(words).filter(([id]) => id in flow.words || fluid.includes(id) || id.startsWith('has.')));
 }
 

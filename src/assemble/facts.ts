@@ -91,6 +91,7 @@ export function factsOf(on: Case, flow: Flow, walls: WallKeys, target: { readonl
   words['targetMean'] = yes(target.mean);
   words['energySolved'] = yes(target.thermal || heated(on));
   words['character'] = on.word('time.character') ?? 'unknown';
+  words['rheologyLaw'] = on.word('rheology.law') ?? 'newtonian';
   words['fluidGiven'] = on.has('fluid.material') ? 'material' : 'constants';
   if (medium !== undefined) {
     words['medium'] = medium;

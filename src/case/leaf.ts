@@ -64,8 +64,8 @@ function quantityOf(text: string, field: QuantityField, beside: Beside): Value {
   return {
     kind: 'quantity',
     value,
-    unit: read.unit,
-    writtenUnit: unit,
+    unit: withExponent(read.unit, field, beside),
+    writtenUnit: withExponent(unit, field, beside),
     ...(spread === undefined ? {} : { spread }),
     ...(range === undefined ? {} : { range }),
     ...(basis === undefined ? {} : { basis }),
@@ -88,13 +88,25 @@ function firstThatFits(text: string, units: readonly string[], field: QuantityFi
   throw first;
 }
 
-function wanted(unit: string, field: QuantityField, beside: Beside): Wanted {
+/** The exponent n of a field, where a key beside it gives one. */
+function exponentOf(field: QuantityField, beside: Beside): number | undefined {
   const n = field.exponentFrom === undefined ? undefined : Number(beside.text(field.exponentFrom)?.split(/ |\.\.|\+/)[0]);
+  return n === undefined || !Number.isFinite(n) ? undefined : n;
+}
+
+/** A unit with its n as a number, so that it can be read without the key beside it. */
+function withExponent(unit: string, field: QuantityField, beside: Beside): string {
+  const n = exponentOf(field, beside);
+  return n === undefined ? unit : unit.replaceAll(/\^n\b/g, `^${n}`);
+}
+
+function wanted(unit: string, field: QuantityField, beside: Beside): Wanted {
+  const n = exponentOf(field, beside);
   return {
     unit: unit === '1' ? '' : unit,
     ...(field.is === undefined ? {} : { kind: field.is }),
     ...(field.name === undefined ? {} : { name: field.name }),
-    ...(n === undefined || !Number.isFinite(n) ? {} : { exponentN: n }),
+    ...(n === undefined ? {} : { exponentN: n }),
   };
 }
 

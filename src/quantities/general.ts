@@ -24,6 +24,7 @@ import { viscousHeating } from './viscous-heating.ts';
 import { radiation } from './radiation.ts';
 import { layers } from './layers.ts';
 import { namedFields } from './named-fields.ts';
+import { rheologyDefinitions } from './rheology.ts';
 import { nearWall } from './near-wall.ts';
 import { hazards } from './hazards.ts';
 import { phase } from './phase.ts';
@@ -71,6 +72,7 @@ export const commonDefinitions: Definition[] = [
   ...radiation,
   ...nearWall,
   ...namedFields,
+  ...rheologyDefinitions,
 ];
 
 /** What a case has in addition that carries a species or lets one react. */

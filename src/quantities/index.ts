@@ -7,5 +7,6 @@ export { layerDefinitions, type Layer } from './layers.ts';
 export { termIds } from './terms.ts';
 export { isTemperature } from './temperature-ids.ts';
 export { features } from './words.ts';
+export { rheologyWays } from './rheology.ts';
 export { givenPropertyWays, isProperty, lawProperties, materialWays, propertyStates, singleProperties, type PropertyAbout } from './property-states.ts';
 export { mostQuantities, piGroups, type Dimensioned, type PiGroup, type PiGroups } from './pi-groups.ts';

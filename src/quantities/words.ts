@@ -1,3 +1,4 @@
+import { rheologyLaws } from './rheology.ts';
 import { quantity, wordWay, type Definition, type QuantityAbout } from '../workings/index.ts';
 
 /** What a case can name at all; absent unless its key stands in the case. */
@@ -47,6 +48,7 @@ export const words: Definition[] = [
   word('enthalpyPer', 'what an enthalpy of reaction counts on', ['mole', 'mass'], { per: ['reaction'], plain: 'target' }),
   word('character', 'nature of the problem in time', ['unknown', 'steady', 'periodic', 'transient']),
   word('fluidGiven', 'how the fluid is given', ['material', 'constants']),
+  word('rheologyLaw', 'law of the viscosity over the shear', rheologyLaws),
   word('ductSection', 'section of the passage', ['round', 'rectangular', 'flat', 'other']),
   word('infiniteDepth', 'the third direction has no end', yesNo),
   word('curvedPassage', 'the passage is curved', yesNo, {}, [wordWay({ needs: [], word: () => 'no', formula: 'straight unless the flow says otherwise', source: 'definition' })]),

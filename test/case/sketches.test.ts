@@ -36,7 +36,7 @@ describe('problems of many kinds fit the format', () => {
     { number: 8, path: 'parallel', value: 21, unit: '1' },
     { number: 11, path: 'initial.right.pressure', value: 1e4, unit: 'Pa' },
     { number: 13, path: 'drive.rotation', value: 6 * Math.PI, unit: 'rad/s' },
-    { number: 13, path: 'rheology.consistency', value: 0.8, unit: 'Pa s^n' },
+    { number: 13, path: 'rheology.consistency', value: 0.8, unit: 'Pa s^0.55' },
     { number: 14, path: 'reactions.0.enthalpy', value: -1.3e6, unit: 'J/mol' },
     { number: 14, path: 'species.feed.inlet', value: 0.009, unit: '1' },
     { number: 16, path: 'particles.1.diameter', value: 200e-6, unit: 'm' },

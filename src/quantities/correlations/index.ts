@@ -14,6 +14,7 @@ export * from './plate-heat.ts';
 export * from './plate.ts';
 export * from './property-ratio.ts';
 export * from './reactor.ts';
+export * from './rheology.ts';
 export * from './step.ts';
 export { between, type Table } from './table.ts';
 export * from './wall-laws.ts';
