@@ -22,3 +22,20 @@ describe('states of independent references', () => {
     expect(misses).toEqual([]);
   });
 });
+
+it('the page says what was compared, and the largest difference', async () => {
+  const lines = groups.map(([material = '', property = '', reference = '']) => {
+    const mine = rows.filter((row) => row.material === material && row.property === property && row.reference === reference);
+    let [worst, declared] = [0, 0];
+    for (const { value, temperature, pressure, ...row } of mine) {
+      const found = propertyAt(loadMaterial(material), property as PropertyId, { temperature, pressure, ...('composition' in row ? { composition: row.composition } : {}) });
+      worst = Math.max(worst, Math.abs((found?.value ?? Number.NaN) / value - 1));
+      declared = Math.max(declared, found?.uncertainty ?? 0);
+    }
+    const span = (list: number[]): string => (Math.min(...list) === Math.max(...list) ? String(Math.min(...list)) : `${Math.min(...list)} to ${Math.max(...list)}`);
+    const percent = (x: number): string => `${Number((x * 100).toPrecision(2))} %`;
+    return `| ${[material, property, reference, mine.length, span(mine.map((row) => row.temperature)), percent(worst), percent(declared)].join(' | ')} |`;
+  });
+  const head = ['# Materials against independent references', '', 'Made by compared.test.ts from compared.csv; compared.py names the references. Differences are those of the record, the declared uncertainty is the largest of the states.', '', '| material | property | reference | states | T [K] | largest difference | declared |', '|---|---|---|---|---|---|---|'];
+  await expect(`${[...head, ...lines].join('\n')}\n`).toMatchFileSnapshot('./compared.md');
+});
