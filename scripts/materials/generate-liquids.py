@@ -241,3 +241,26 @@ T = (303.15, 315.15)
 write({'name': 'blood plasma', 'aliases': ['plasma', 'human plasma'], 'kind': 'fluid', 'phases': ['liquid'], 'marks': ['medical'], 'about': 'human plasma near body temperature',
        'density': constant('1025 kg/m^3', T, '1 %', 'Kenner, Basic Res. Cardiol. 84 (1989) 111, from memory', p='1 MPa'), 'viscosity': constant('1.24 mPa s', T, '12 %', 'Kesmarky, Kenyeres, Rabai and Toth, Clin. Hemorheol. Microcirc. 39 (2008) 243, 1.10 to 1.35 mPa s at 37 degC, from memory', p='1 MPa'),
        'thermalConductivity': constant('0.58 W/(m K)', T, '6 %', 'Duck, Physical Properties of Tissue (1990), from memory', p='1 MPa'), 'specificHeatCapacity': constant('3930 J/(kg K)', T, '4 %', 'Duck, Physical Properties of Tissue (1990), from memory', p='1 MPa')}, BY)
+
+# Liquefied natural gas: density and heat capacity of the mixture by GERG-2008, transport from that of boiling methane.
+import CoolProp
+from CoolProp.CoolProp import PropsSI
+
+lng = CoolProp.AbstractState('HEOS', 'Methane&Ethane&Propane&Nitrogen')
+lng.set_mole_fractions([0.92, 0.06, 0.015, 0.005])
+lng.specify_phase(CoolProp.iphase_liquid)
+temperatures = [105, 110, 115, 120, 125, 130]
+rows = {'density': [], 'cp': [], 'mu': [], 'k': []}
+for t in temperatures:
+    lng.update(CoolProp.PT_INPUTS, 1e6, t)
+    rows['density'].append([t, r(lng.rhomass())])
+    rows['cp'].append([t, r(lng.cpmass(), 4)])
+    rows['mu'].append([t, r(1.10 * 1e6 * PropsSI('V', 'T', t, 'Q', 0, 'Methane'), 4)])
+    rows['k'].append([t, r(0.97 * PropsSI('L', 'T', t, 'Q', 0, 'Methane'), 4)])
+T = (105, 130)
+GERG = 'Kunz and Wagner, J. Chem. Eng. Data 57 (2012) 3032 (GERG-2008), evaluated by CoolProp 8.0.0 at 10 bar'
+METHANE = 'boiling methane, Quinones-Cisneros et al. 2011 and Friend et al. 1989 as in CoolProp 8.0.0'
+write({'name': 'LNG', 'aliases': ['liquefied natural gas', 'liquid natural gas'], 'kind': 'fluid', 'phases': ['liquid'], 'marks': ['flammable', 'cryogen', 'inert'], 'about': '92 % methane, 6 % ethane, 1.5 % propane and 0.5 % nitrogen by mole; it boils near 113 K at 1 atm, so that pressure is needed above',
+       'density': table(rows['density'], T, '2 %', GERG, 'kg/m^3'), 'specificHeatCapacity': table(rows['cp'], T, '3 %', GERG, 'J/(kg K)'),
+       'viscosity': table(rows['mu'], T, '12 %', f'1.10 times {METHANE}; the heavier parts thicken it by 5 % to 15 %', 'uPa s', interpolate='logarithm'), 'thermalConductivity': table(rows['k'], T, '8 %', f'0.97 times {METHANE}', 'W/(m K)'),
+       'vapourPressure': {'model': 'vogel', 'range': {'T': ['100 K', '140 K']}, 'uncertainty': '25 %', 'source': 'boiling methane with 0.5 % nitrogen, Raoult; nitrogen moves it by 10 % to 30 %', 'constants': {'A': r(math.log(1.12) + math.log(101325) + 988.5 / 111.67, 8), 'B': -988.5, 'C': 0, 'gives': 'Pa'}}}, BY)

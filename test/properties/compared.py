@@ -1,12 +1,13 @@
 """Writes compared.csv: states of liquids and solids from independent references, held to the declared uncertainties.
 
-Run with:  python3 test/properties/compared.py   (needs gsw 3.6.23, CoolProp 8.0.0, chemicals 1.5.2, thermo 0.6.1)
+Run with:  python3 test/properties/compared.py   (needs gsw 3.6.23, CoolProp 8.0.0, chemicals 1.5.2, thermo 0.6.1, cantera 3.2.0)
 Each row names its reference. A reference counts as independent where its work is another one than that of the record:
   gsw        TEOS-10 polynomial of 75 terms (Roquet et al. 2015) and Gibbs function of the Gibbs-SeaWater toolbox
   iapws-95   pure water of CoolProp, the limit without salt
   melinder   Melinder 2010 (solutions), as CoolProp fits it
   vdi        Preisegger et al. 2010 (VDI heat atlas), as CoolProp fits it
   ashrae     ASHRAE handbook 2001 (glycols), as CoolProp fits it
+  gri        mixture-averaged transport and heat capacities of GRI-Mech 3.0, evaluated by Cantera 3.2.0
   janaf      NIST-JANAF Thermochemical Tables, 4th ed. (1998)
   crc        CRC Handbook of Chemistry and Physics, densities of inorganic solids, heat capacities at 298.15 K
   laliberte  Laliberte 2009, evaluated by thermo
@@ -15,6 +16,7 @@ import csv
 import json
 import os
 
+import cantera
 import chemicals
 import gsw
 from CoolProp.CoolProp import PropsSI
@@ -115,6 +117,15 @@ for material, cas, mass, low, high in (
         add(material, 'specificHeatCapacity', 298.15, 101325, None, float(STANDARD[cas]['Cps']) / mass * 1000, 'crc')
     if cas in CRC and material not in ('graphite', 'tin'):
         add(material, 'density', 300, 101325, None, mass / 1000 / float(CRC[cas]['Vm']), 'crc')
+
+# Gases by components: another mixing rule on other pure gases.
+gas = cantera.Solution('gri30.yaml')
+gas.transport_model = 'mixture-averaged'
+for material, shares in (('flue gas', {'N2': 0.716, 'CO2': 0.087, 'H2O': 0.172, 'O2': 0.017, 'AR': 0.008}), ('coal flue gas', {'N2': 0.745, 'CO2': 0.140, 'H2O': 0.065, 'O2': 0.041, 'AR': 0.009})):
+    for T in between(350, 1450, 12):
+        gas.TPX = T, 101325, shares
+        for prop, value in (('density', gas.density_mass), ('specificHeatCapacity', gas.cp_mass), ('viscosity', gas.viscosity), ('thermalConductivity', gas.thermal_conductivity)):
+            add(material, prop, T, 101325, None, value, 'gri')
 
 with open(os.path.join(HERE, 'compared.csv'), 'w', newline='') as out:
     writer = csv.writer(out, lineterminator='\n')

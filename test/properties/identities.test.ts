@@ -71,8 +71,10 @@ describe('laws', () => {
     for (const record of materialRecords()) {
       const material = loadMaterial(record.name);
       const melting = material.meltingTemperature;
-      const temperature = material.kind === 'solid' || melting === undefined ? 310 : Math.max(310, melting + 20);
-      const state = { temperature, pressure: 101325, humidity: 0.4, composition: record.typical ?? 0.4 };
+      // A liquid alone is asked below its boiling line.
+      const boils = material.phases.includes('vapour') ? undefined : record.properties['vapourPressure']?.[0]?.ranges[0]?.temperature?.[1];
+      const temperature = Math.min(material.kind === 'solid' || melting === undefined ? 310 : Math.max(310, melting + 20), (boils ?? Infinity) - 20);
+      const state = { temperature, pressure: boils === undefined ? 101325 : 2e6, humidity: 0.4, composition: record.typical ?? 0.4 };
       if (record.name === 'ice' || record.name === 'gas mixture') continue; // one melts below 310 K, one has no components of its own
       const found = laws(material, state);
       for (const id of material.properties) {
