@@ -30,7 +30,7 @@ export type Mark = keyof typeof marks;
 export type Where = 'fluid' | 'solute' | 'text';
 
 /**
- * Finds the first word of a mark in a case: in the fluid it flows with or the marks of its record, in species and second fluids, in title, purpose and targets.
+ * Finds the first word of a mark in a case: in the fluid it flows with (its record's own marks first), in species and second fluids, in title, purpose and targets.
  *
  * @param assembled  the case
  * @param mark       which list
