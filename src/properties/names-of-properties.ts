@@ -25,4 +25,8 @@ export const propertyNames: { readonly [id in PropertyId]: string } = {
   emissivity: 'emissivity',
   voidFraction: 'void fraction',
   permeability: 'permeability',
+  henryOxygen: 'Henry constant p/x of oxygen',
+  henryCarbonDioxide: 'Henry constant p/x of CO2',
+  diffusivityOxygen: 'diffusivity of dissolved oxygen',
+  diffusivityCarbonDioxide: 'diffusivity of dissolved CO2',
 };

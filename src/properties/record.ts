@@ -25,6 +25,10 @@ export const propertyUnits = {
   emissivity: '1',
   voidFraction: '1',
   permeability: 'm^2',
+  henryOxygen: 'Pa',
+  henryCarbonDioxide: 'Pa',
+  diffusivityOxygen: 'm^2/s',
+  diffusivityCarbonDioxide: 'm^2/s',
 } as const;
 
 export type PropertyId = keyof typeof propertyUnits;

@@ -5,6 +5,7 @@ import { food } from './models/food.ts';
 import { gasMixture, type GasMixture } from './models/gas-mixture.ts';
 import { humidAir } from './models/humid-air.ts';
 import { if97, type WaterConstants } from './models/if97.ts';
+import { henry, type HenryConstants } from './models/dissolved-gas.ts';
 import * as laws from './models/laws.ts';
 import { lineOf } from './models/point.ts';
 import { seaWater, type SeaWaterConstants } from './models/sea-water.ts';
@@ -107,6 +108,13 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
     },
   },
   'wiedemann-franz': { constants: ['lorenz'], make: (c: { lorenz: number }, engine) => (s) => engine.value('thermalConductivity', s) / (c.lorenz * s.T) },
+  henry: {
+    constants: ['A', 'B', 'C', 'critical'],
+    make(c: HenryConstants, engine) {
+      const constant = henry(c, (T) => engine.value('vapourPressure', { T, p: 101325, side: 'liquid', x: Number.NaN }));
+      return (s) => constant(s.T);
+    },
+  },
   power: ofTemperature(['value', 'exponent', 'gives?', 'argument?'], laws.power),
   'kinematic-vogel': {
     constants: ['A', 'B', 'C', 'gives?'],
