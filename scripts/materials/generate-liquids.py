@@ -53,9 +53,11 @@ def petroleum(name, aliases, about, rho15, kind, viscosities, T, spread, source,
     write(record, BY)
 
 
+# Single grades of SAE J300 by their viscosity at 100 degC.
+SAE = ((32, 10), (68, 20), (100, 30), (150, 40), (220, 50))
 # ISO 3448: the grade is the viscosity at 40 degC within 10 %; at 100 degC that of a viscosity index of about 97.
 for grade, at100, rho15 in ((10, 2.6, 850), (15, 3.3, 855), (22, 4.2, 862), (32, 5.3, 868), (46, 6.7, 874), (68, 8.7, 879), (100, 11.2, 883), (150, 14.6, 887), (220, 18.9, 892), (320, 24.2, 896), (460, 30.6, 900), (680, 39.0, 907)):
-    petroleum(f'lubricating oil ISO VG {grade}', [f'ISO VG {grade}', f'VG {grade}', f'VG{grade}', f'oil VG {grade}', *([f'hydraulic oil {grade}', f'HLP {grade}'] if grade <= 68 else []), *([f'gear oil {grade}'] if grade >= 100 else [])],
+    petroleum(f'lubricating oil ISO VG {grade}', [f'ISO VG {grade}', f'VG {grade}', f'VG{grade}', f'oil VG {grade}', *([f'hydraulic oil {grade}', f'HLP {grade}'] if grade <= 68 else []), *([f'gear oil {grade}'] if grade >= 100 else []), *[f'{lead}{sae}{tail}' for vg, sae in SAE if vg == grade for lead, tail in (('SAE ', ''), ('SAE', ''), ('SAE ', ' oil'))]],
               'a grade of mineral oil with a viscosity index of about 97; multigrade and synthetic oils thin less when warm', rho15, 'lubricant', ((40, grade), (100, at100)), (263.15, 403.15),
               [{'T': ['308.15 K', '318.15 K'], 'value': '12 %'}, {'T': ['288.15 K', '403.15 K'], 'value': '20 %'}, {'value': '40 %'}], ('common practice for solvent-refined mineral oils', 'ISO 3448 grade at 40 degC, viscosity index of 97 by ISO 2909'), ['oil'])
 
