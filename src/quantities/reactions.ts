@@ -88,15 +88,29 @@ const groups: Definition[] = [
   ]),
 ];
 
+/**
+ * Relative spread of a conversion whose law is uncertain in the rate, not in what is left: width d ln X/d ln N.
+ *
+ * @param width  relative 95 % half-width of the rate
+ * @param units  Damkohler number N that the rate is counted in
+ * @param of     conversion at N
+ * @returns      relative half-width of the conversion; N e^-N/(1 - e^-N) of the width in plug flow
+ */
+function spreadByRate({ width, units, of }: { width: number; units: number; of: (units: number) => number }): number {
+  const step = 1e-4;
+  const change = of(units * (1 + step)) - of(units * (1 - step));
+  return of(units) > 0 ? (width * change) / (2 * step * of(units)) : width;
+}
+
 /** How far a reaction gets, and how much heat it sets free. */
 const outcomes: Definition[] = [
   quantity('conversion', { symbol: 'X', name: 'conversion at the outlet', unit: '1', ...per }, [
     way({ needs: ['damkohler', 'reactantFourier'], when: { ...inFluid, ...first, flowClass: 'internal', regime: 'laminar', ductSection: 'round' }, range: { damkohler: [0, 5] }, scatter: 0.02, value: ({ damkohler, reactantFourier }) => laminarConversion({ damkohler, fourier: reactantFourier }), formula: 'X = X_s + (1 - e^-Da - X_s) Fo_m/(Fo_m + 0.095 Da^0.9), X_s = 1 - (1 - y) e^-y - y^2 E_1(y), y = Da/2', source: 'Cleland and Wilhelm, AIChE J. 2 (1956) 489, segregated; diffusion across fitted to the equation solved by finite volumes' }),
     way({ needs: ['damkohler', 'reactionOrder'], when: { ...inFluid, flowClass: 'internal', regime: ['laminar', 'transitional'] }, scatter: 0.15, value: ({ damkohler, reactionOrder }) => plugFlowConversion({ damkohler, order: reactionOrder }), formula: 'X = 1 - e^-Da, order n X = 1 - [1 + (n - 1) Da]^(1/(1 - n))', source: `${levenspiel}, plug flow`, note: 'the profile of laminar flow lowers it by up to 13 %' }),
-    way({ needs: ['damkohler', 'reactionOrder'], when: { ...inFluid, flowClass: 'internal', regime: 'turbulent' }, scatter: 0.02, value: ({ damkohler, reactionOrder }) => plugFlowConversion({ damkohler, order: reactionOrder }), formula: 'X = 1 - e^-Da, order n X = 1 - [1 + (n - 1) Da]^(1/(1 - n))', source: `${levenspiel}, plug flow` }),
-    way({ needs: ['damkohler', 'wallReactionFactor'], when: { reactionWhere: 'wall', flowClass: 'internal' }, scatter: 0.1, value: ({ damkohler, wallReactionFactor }) => -Math.expm1(-damkohler * wallReactionFactor), formula: 'X = 1 - e^(-Da F_w)', source: 'first order; resistances in series' }),
-    way({ needs: ['damkohler', 'bodenstein'], when: { ...first, flowClass: 'continuum' }, scatter: 0.05, value: ({ damkohler, bodenstein }) => dispersedConversion({ damkohler, bodenstein }), formula: 'X by Da and Bo_d between closed ends', source: 'Danckwerts, Chem. Eng. Sci. 2 (1953) 1' }),
-    way({ needs: ['damkohler', 'reactionOrder'], when: { flowClass: 'continuum' }, scatter: 0.1, value: ({ damkohler, reactionOrder }) => plugFlowConversion({ damkohler, order: reactionOrder }), formula: 'X of plug flow', source: levenspiel }),
+    way({ needs: ['damkohler', 'reactionOrder'], when: { ...inFluid, flowClass: 'internal', regime: 'turbulent' }, scatter: ({ damkohler, reactionOrder: order }) => spreadByRate({ width: 0.02, units: damkohler, of: (n) => plugFlowConversion({ damkohler: n, order }) }), value: ({ damkohler, reactionOrder }) => plugFlowConversion({ damkohler, order: reactionOrder }), formula: 'X = 1 - e^-Da, order n X = 1 - [1 + (n - 1) Da]^(1/(1 - n))', source: `${levenspiel}, plug flow` }),
+    way({ needs: ['damkohler', 'wallReactionFactor'], when: { reactionWhere: 'wall', flowClass: 'internal' }, scatter: (of) => spreadByRate({ width: 0.1, units: of.damkohler * of.wallReactionFactor, of: (n) => -Math.expm1(-n) }), value: ({ damkohler, wallReactionFactor }) => -Math.expm1(-damkohler * wallReactionFactor), formula: 'X = 1 - e^(-Da F_w)', source: 'first order; resistances in series' }),
+    way({ needs: ['damkohler', 'bodenstein'], when: { ...first, flowClass: 'continuum' }, scatter: ({ damkohler, bodenstein }) => spreadByRate({ width: 0.05, units: damkohler, of: (n) => dispersedConversion({ damkohler: n, bodenstein }) }), value: ({ damkohler, bodenstein }) => dispersedConversion({ damkohler, bodenstein }), formula: 'X by Da and Bo_d between closed ends', source: 'Danckwerts, Chem. Eng. Sci. 2 (1953) 1' }),
+    way({ needs: ['damkohler', 'reactionOrder'], when: { flowClass: 'continuum' }, scatter: ({ damkohler, reactionOrder: order }) => spreadByRate({ width: 0.1, units: damkohler, of: (n) => plugFlowConversion({ damkohler: n, order }) }), value: ({ damkohler, reactionOrder }) => plugFlowConversion({ damkohler, order: reactionOrder }), formula: 'X of plug flow', source: levenspiel }),
   ]),
   quantity('conversionPlug', { symbol: 'X_p', name: 'share converted in plug flow, the most that a passage can give', unit: '1', ...per }, [
     way({ needs: ['damkohler', 'reactionOrder'], when: inFluid, value: ({ damkohler, reactionOrder }) => plugFlowConversion({ damkohler, order: reactionOrder }), formula: 'X = 1 - e^-Da, order n X = 1 - [1 + (n - 1) Da]^(1/(1 - n))', source: levenspiel }),
