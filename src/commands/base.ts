@@ -42,6 +42,9 @@ export interface Example {
 export abstract class Base extends Command {
   static override enableJsonFlag = true;
   static override examples: Example[] = [];
+  /** The framework leaves both out where a command has none. */
+  static override args: typeof Command.args = {};
+  static override flags: typeof Command.flags = {};
   /** Whether the command holds something against a limit, so that exit code 4 exists. */
   static judges = false;
 
