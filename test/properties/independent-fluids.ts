@@ -22,7 +22,7 @@ export interface Held {
 }
 
 /** Where works differ by more than both uncertainties, and which we follow. Material, property, reference, and why. */
-const literatureDiffers: readonly (readonly [string, string, string, string])[] = [
+export const literatureDiffers: readonly (readonly [string, string, string, string])[] = [
   ['helium', 'specificHeatCapacity', 'Perry', 'the polynomial does not follow the rise towards the lambda point'],
   ['helium', 'viscosity', 'VDI', 'the polynomial of the gas has an offset that shows below 10 K'],
   ['helium', 'thermalConductivity', 'VDI', 'the polynomial of the gas has an offset that shows below 10 K'],
