@@ -31,7 +31,7 @@ const featureKeys: Readonly<Record<(typeof features)[number], (on: Case, walls: 
   swirl: () => false,
   humidity: (c) => c.has('fluid.humidity'),
   burning: (c) => c.has('burning'),
-  roughness: (_, w) => any(w, 'sandGrain') || [...w.values()].some((keys) => hasGrain(keys.get('surface')?.value)),
+  roughness: (_, w) => any(w, 'sandGrain') || any(w, 'Ra') || [...w.values()].some((keys) => hasGrain(keys.get('surface')?.value)),
   layers: (c) => c.list('wall.layers').length > 0 || c.list('walls').some((w) => c.list(`walls.${w}.layers`).length > 0),
   gravity: (c) => c.has('gravity'),
   sources: (c) => c.has('sources') || c.has('drive.heatRelease'),

@@ -38,6 +38,7 @@ export function wallDefinitions(on: Case, flow: Flow, walls: ReturnType<typeof w
     const layers = layersOf(on, keys, materials, (law, value) => { laws[law] = value; }, (material) => (names[place] ??= []).push(material));
     for (const [key, entry] of keys) {
       const id = key === 'temperature' ? (outerFace(keys, layers.length > 0) ? 'outerTemperature' : 'wettedTemperature') : gives[key];
+      if (key === 'Ra' && !keys.has('sandGrain') && exists('sandGrain')) definitions.push(grainOfStylus(place, entry.path));
       if (id === undefined || !exists(id) || typeof entry.value !== 'number') continue;
       definitions.push(ways(`${id}@${place}`, [{ needs: [entry.path], value: (of) => of[entry.path] as number, formula: `as given: ${entry.path}`, source: 'the case' }]));
     }
@@ -60,6 +61,9 @@ function surfaceDefinitions(on: Case, keys: ReadonlyMap<string, Entry>, place: s
   };
   return [...way('sandGrain', surface.sandGrain), ...way('emissivity', surface.emissivity)];
 }
+
+/** The sand grain of a wall whose roughness is known by a stylus. The middle of the band on a logarithmic scale. */
+const grainOfStylus = (place: string, path: string): Definition => ways(`sandGrain@${place}`, [{ needs: [path], as: 'assumed', scatter: 0.41, value: (of) => 4.24 * (of[path] as number), formula: 'k_s = 4.24 Ra', source: 'common practice, k_s from 3 to 6 Ra; 5.863 Ra in Adams, Grant and Watson, Int. J. Mech. Eng. Mechatron. 1 (2012) 66, from memory' }]);
 
 /** Whether a temperature of the wall is that of its outer face: with layers, unless the case says otherwise. */
 export const outerFace = (keys: ReadonlyMap<string, Entry>, layered: boolean): boolean => layered && keys.get('at')?.value !== 'wetted-face';

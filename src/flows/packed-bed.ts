@@ -14,6 +14,7 @@ const scales: Definition[] = [
   quantity('packedBedRatio', { symbol: 'D/d_p', name: 'bed over particle diameter', unit: '1' }, [way({ needs: ['sizes.bedDiameter', 'sizes.particleDiameter'], value: (of) => of['sizes.bedDiameter'] / of['sizes.particleDiameter'], formula: 'D/d_p', source: geometry })]),
   quantity('packedBedVoidFraction', { symbol: 'e', name: 'void fraction of the bed', unit: '1' }, [
     way({ needs: ['packing.voidFraction'], value: (of) => of['packing.voidFraction'], formula: 'e as given', source: 'the case' }),
+    way({ needs: ['porous.voidFraction'], value: (of) => of['porous.voidFraction'], formula: 'e as given', source: 'the case' }),
     way({ needs: ['packedBedRatio'], as: 'assumed', range: { packedBedRatio: [2, 1e6] }, scatter: 0.08, value: ({ packedBedRatio }) => 0.4 + 0.05 / packedBedRatio + 0.412 / packedBedRatio ** 2, formula: 'e = 0.4 + 0.05 d_p/D + 0.412 (d_p/D)^2', source: 'Dixon, Can. J. Chem. Eng. 66 (1988) 705, spheres' }),
   ]),
   ways('length', [way({ needs: ['sizes.particleDiameter'], value: (of) => of['sizes.particleDiameter'], formula: 'L = d_p', source: 'definition' })]),

@@ -41,6 +41,18 @@ describe('mixtures of gases in a case', () => {
   });
 });
 
+describe('roughness by a stylus', () => {
+  it('of 1.6 um is a sand grain between 3 and 6 times as high, and no number is missing', () => {
+    const w = duct('wall: { temperature: 60 degC, Ra: 1.6 um }\n');
+    expect(w.get('sandGrain@walls.top')).toBeCloseTo(1.6e-6 * Math.sqrt(3 * 6), 8);
+    expect(w.get('roughnessReynolds')).toBeGreaterThan(0);
+  });
+  it('gives way to a sand grain of the wall itself', () => {
+    const w = duct('walls: [{ name: top, sandGrain: 10 um }]\nwall: { temperature: 60 degC, Ra: 1.6 um }\n');
+    expect(w.get('sandGrain@walls.top')).toBe(1e-5);
+  });
+});
+
 describe('the temperature that matters', () => {
   it.each([
     ['the first accuracy in kelvins', 'targets: [{ quantity: pressureDrop, within: 5 % }, { quantity: outletTemperature, within: 0.4 K }, { quantity: wallTemperature, within: 3 K }]\n', 0.4],

@@ -99,3 +99,31 @@ describe('cautions', () => {
     expect(linesOf(p, 'cautions')[1]).toMatch(/^First of all: Burns; /);
   });
 });
+
+const bed = (more: string, material = 'material: air, '): string => `
+format: 1
+title: Air through beads
+targets: [{ quantity: pressureDrop, within: 20 % }]
+flow: packed-bed
+sizes: { particleDiameter: 10 mm, bedDiameter: 300 mm, length: 1 m }
+fluid: { ${material}pressure: 1 bar abs }
+inlet: { speed: 1 m/s, temperature: 20 degC }
+${more}
+`;
+const idleOf = async (text: string): Promise<string[]> => linesOf(await planOf(text), 'cautions').filter((l) => l.startsWith('Given and without effect'));
+
+describe('a number that nothing follows from', () => {
+  it('is named among the cautions, so that it is not lost without a word', async () => {
+    expect(await idleOf(bed('motion: { period: 1 s, amplitude: 2 mm }'))).toEqual([expect.stringContaining('motion.amplitude')]);
+  });
+  it('is not the void fraction of a bed, under either key', async () => {
+    for (const key of ['porous', 'packing']) {
+      const plan = await planOf(bed(`${key}: { voidFraction: 0.45 }`));
+      expect(plan.quantities['packedBedVoidFraction']?.value).toBe(0.45);
+    }
+    expect(await idleOf(bed('porous: { voidFraction: 0.45 }'))).toEqual([]);
+  });
+  it('is not a composition that the material takes', async () => {
+    expect(await idleOf(bed('', 'material: flue gas, composition: { nitrogen: 75 % mol, carbon dioxide: 15 % mol, water: 10 % mol }, '))).toEqual([]);
+  });
+});

@@ -22,6 +22,7 @@ export function cautions(on: Ground): StageResult {
       ...lines(
         first.length > 0 && `First of all: ${first.join('; ')}.`,
         unjudged.length > 0 && `Not in these numbers: ${listed(unjudged)}. The case names what they depend on, and no rule judges them yet: the spreads do not hold their effect.`,
+        ...idle(on),
         ...notCounted(on),
         hazards.length > 0 && 'What follows on dangers supports and never replaces qualified judgement, tests and the codes of the place; relief, structure and safety of life are decided by licensed practitioners.',
         ...hazards.map((h) => h.text),
@@ -37,6 +38,12 @@ export function cautions(on: Ground): StageResult {
       ...traps.map((t): Check => ({ id: `trap-${t.id}`, stage: 'cautions', text: t.test })),
     ],
   };
+}
+
+/** Numbers of the case that nothing follows from: most often one under a key that this flow does not read. */
+function idle(on: Ground): string[] {
+  const { unused } = on.assembled;
+  return unused.length === 0 ? [] : [`Given and without effect: ${listed(unused)}. No number of the plan follows from ${unused.length === 1 ? 'it' : 'them'}: does this flow read another key?`];
 }
 
 /** Effects that the model carries and the estimates do not hold. */
