@@ -6,7 +6,7 @@ import type { ListTree, MapTree, Pair, ScalarTree, Tree } from './tree.ts';
 import { type Field, type Fields, type LeafField, type ListField, own, type Vocabulary } from './vocabulary.ts';
 import { elsewhere } from './elsewhere.ts';
 import { givenBy } from './field-at.ts';
-import { nameProblem, wallProblem } from './names.ts';
+import { exampleFor, nameProblem, wallProblem } from './names.ts';
 
 /** What a walk through the file brought. */
 export interface Found {
@@ -116,7 +116,7 @@ export class Walk {
 
   #shape(tree: Tree, field: Field, path: string, wanted: string): void {
     const got = tree.kind === 'map' ? 'keys and values' : tree.kind === 'list' ? 'a list' : `"${shown(tree.text)}"`;
-    this.#complain(tree, path, { code: 'wrong-shape', message: `${got} in place of ${wanted}`, expected: `${path.split('.').at(-1)}: ${field.example}` });
+    this.#complain(tree, path, { code: 'wrong-shape', message: `${got} in place of ${wanted}`, expected: `${path.split('.').at(-1)}: ${exampleFor(field, this.#vocabulary, this.#flow)}` });
   }
 
   #map(tree: Tree, fields: Fields, field: Field, path: string): void {
@@ -159,7 +159,7 @@ export class Walk {
     if (pair === undefined) {
       if (field.names === undefined || field.names === 'optional') return String(index);
       if (this.#partial && field.names === 'required') return String(index);
-      return this.#complain(item, `${path}.${index}`, { code: 'missing-key', message: 'name is missing', expected: `${path}: ${field.example}` });
+      return this.#complain(item, `${path}.${index}`, { code: 'missing-key', message: 'name is missing', expected: `${path}: ${exampleFor(field, this.#vocabulary, this.#flow)}` });
     }
     if (pair.value.kind !== 'scalar') return this.#complain(pair.value, `${path}.${index}`, { code: 'wrong-shape', message: 'a name is a single word', expected: `${path}: ${field.example}` });
     const name = pair.value.text;

@@ -94,6 +94,19 @@ describe('refusals', () => {
     expect(found[0]?.message).toBe('"length" is not a key of the sizes of sphere');
   });
 
+  it.each([
+    ['channel', 'sizes: { gap: 10 mm }', 'walls: [{ name: bottom, temperature: 40 degC }, { name: top, temperature: 20 degC }]'],
+    ['side-heated-cavity', 'sizes: { width: 10 mm, height: 20 mm }', 'walls: [{ name: left, temperature: 40 degC }, { name: right, temperature: 20 degC }]'],
+    ['pipe', 'sizes: { diameter: 10 mm }', 'walls: [{ name: wall, temperature: 40 degC }]'],
+  ])('the walls shown for a %s are its own', (flow, sizes, expected) => {
+    const text = `format: 1\ntitle: t\ntargets: [{ quantity: nusselt, within: 5 % }]\nflow: ${flow}\n${sizes}\nfluid: { material: water }\ninlet: { speed: 1 m/s }\n`;
+    for (const walls of ['walls: { hot: { temperature: 60 degC } }', 'walls: [{ temperature: 60 degC }]']) {
+      const found = problems(`${text}${walls}\n`);
+      expect(found.map((one) => one.expected)).toEqual([expected]);
+      expect(problems(`${text}${expected}\n`)).toEqual([]);
+    }
+  });
+
   it('names where a misplaced key belongs', () => {
     expect(problems(`${good}emissivity: 0.9\n`)[0]?.expected).toContain('emissivity stands in wall, walls');
   });
