@@ -20,7 +20,10 @@ export const count = (doc: string, example: string, more: More<QuantityField> = 
 /** A share between 0 and 1, or in % or ppm. */
 export const share = (doc: string, example: string, more: More<QuantityField> = {}): QuantityField => quantity(doc, '1', example, { is: 'fraction', ...more });
 
-export const temperature = (doc: string, example: string, more: More<QuantityField> = {}): QuantityField => quantity(doc, 'K', example, { is: 'temperature', above: 0, ...more });
+/** Above it matter is plasma, and no law of the collection comes near [K]. */
+const hottest = 2e4;
+
+export const temperature = (doc: string, example: string, more: More<QuantityField> = {}): QuantityField => quantity(doc, 'K', example, { is: 'temperature', above: 0, atMost: hottest, ...more });
 
 /** An absolute pressure; gauge becomes absolute. */
 export const pressure = (doc: string, example: string, more: More<QuantityField> = {}): QuantityField => quantity(doc, 'Pa', example, { is: 'pressure', above: 0, ...more });

@@ -31,12 +31,14 @@ function editDistance(a: string, b: string): number {
 export function nearestName(name: string, valid: readonly string[]): string | undefined {
   const low = name.slice(0, 200).toLowerCase();
   let best: string | undefined;
-  let least = 3;
+  let least = Number.POSITIVE_INFINITY;
   for (const candidate of valid) {
     if (Math.abs(candidate.length - low.length) > 2) continue;
     const distance = editDistance(low, candidate.toLowerCase());
-    if (distance < least && distance < Math.max(low.length, candidate.length)) {
-      least = distance;
+    // Of names equally far the one with the same beginning and length: a letter mistyped is likelier than one lost.
+    const rank = distance + (candidate[0]?.toLowerCase() === low[0] ? 0 : 0.2) + (candidate.length === low.length ? 0 : 0.1);
+    if (distance < 3 && rank < least && distance < Math.max(low.length, candidate.length)) {
+      least = rank;
       best = candidate;
     }
   }

@@ -47,6 +47,7 @@ describe('refusals', () => {
     { why: 'smaller than anything', add: 'ground: { roughnessLength: 1e-300 m }', code: 'out-of-bounds', at: '1e-300 m', nearest: undefined },
     { why: 'half a passage', add: 'parallel: 2.5', code: 'not-whole', at: '2.5', nearest: undefined },
     { why: 'below absolute zero', add: 'surroundings: { temperature: -300 degC }', code: 'below-absolute-zero', at: '-300', nearest: undefined },
+    { why: 'hotter than any fluid', add: 'surroundings: { temperature: 1e9 K }', code: 'out-of-bounds', at: '1e9 K', nearest: undefined },
     { why: 'wrong word', add: 'time: { character: steedy }', code: 'wrong-word', at: 'steedy', nearest: 'steady' },
     { why: 'word for a number', add: 'inclination: horizontl', code: 'wrong-word', at: 'horizontl', nearest: 'horizontal' },
     { why: 'yes for true', add: 'wall: { adiabatic: yes }', code: 'wrong-word', at: 'yes', nearest: 'true' },

@@ -95,6 +95,7 @@ describe('units that are refused', () => {
 
   it.each([
     ['wat/m2', 'watt', 0],
+    ['gpn', 'gpm', 0],
     ['kg/metr', 'meter', 3],
     ['PA', 'Pa', 0],
     ['kw', 'kW', 0],
