@@ -15,7 +15,7 @@ import { givenOf, type Range } from './given.ts';
 import { leafDefinitions, leavesOf, wallPlaces, type Leaf } from './leaves.ts';
 import { targetDefinitions } from './target-definitions.ts';
 import { toleranceWays } from './tolerance-ways.ts';
-import { bindTargets, estimated, kindsOf, type BoundTarget } from './targets.ts';
+import { bindTargets, estimated, kindsOf, spelt, type BoundTarget } from './targets.ts';
 import { validationDefinitions } from './validation-definitions.ts';
 import { vocabulary } from './vocabulary.ts';
 import { wallDefinitions } from './wall-definitions.ts';
@@ -66,18 +66,19 @@ const ownOf = (flow: Flow, carried: boolean): Definition[] => [...flow.definitio
 /**
  * Joins a case with its flow, fluid, walls and all definitions into one graph.
  *
- * @param on       the case
+ * @param read     the case
  * @param options  rule words, materials
  * @returns        the graph and what belongs to it
  * @throws         {Problem} flow-not-built, unknown-material, impossible-state and the like, at the place of the value
  */
-export function assemble(on: Case, options: AssembleOptions = {}): Assembled {
-  const flow = flowOf(on);
-  const walls = wallEntries(on, flow.walls, vocabulary);
-  const carried = carries(on);
+export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
+  const flow = flowOf(read);
+  const carried = carries(read);
   const base: Definition[] = [...general(carried), ...(options.words ?? []), ...ownOf(flow, carried), ...rungDefinitions(flow)];
   const units = new Map(base.flatMap((d) => ('more' in d ? [] : [[d.id, d.unit] as const])));
   const exists = (id: string): boolean => units.has(id);
+  const on = spelt(read, new Map(base.flatMap((d) => ('more' in d || d.unit === 'word' ? [] : [[d.id, d.name] as const]))));
+  const walls = wallEntries(on, flow.walls, vocabulary);
   const fluid = fluidOf(on, options.materials);
   const facts = factsOf(on, flow, walls, kindsOf(on, (id) => units.get(id)), fluid.medium);
   const wall = wallDefinitions(on, flow, walls, options.materials, exists);

@@ -19,6 +19,24 @@ export interface BoundTarget {
   readonly nearest?: readonly string[];
 }
 
+/**
+ * The case with the words of its targets replaced by the id they spell: `pressure drop`, `Strouhal number`, or the full name.
+ *
+ * @param on     the case
+ * @param names  ids of quantities with their names
+ * @returns      the same case where nothing is replaced
+ */
+export function spelt(on: Case, names: ReadonlyMap<string, string>): Case {
+  const plain = (text: string): string => text.toLowerCase().replace(/[ ,-]/g, '').replace(/number$/, '');
+  const idOf = (quantity: string): string => {
+    const wanted = plain(quantity);
+    for (const [id, name] of names) if (id.toLowerCase() === wanted || plain(name) === wanted) return id;
+    return quantity;
+  };
+  const targets = on.targets.map((t): Target => (names.has(t.quantity.split('@')[0] as string) ? t : { ...t, quantity: idOf(t.quantity) }));
+  return targets.some((t, k) => t.quantity !== on.targets[k]?.quantity) ? { ...on, targets } : on;
+}
+
 /** What kind of answer the targets ask for. */
 export interface TargetKinds {
   /** Heat or mass transfer. */
@@ -57,7 +75,7 @@ export function kindsOf(on: Case, unit: (id: string) => string | undefined): Tar
 
 /** Binds targets to quantities: a peak to the peak, a place to its wall, else the plain id. */
 export function bindTargets(on: Case, workings: Workings, walls: readonly string[]): BoundTarget[] {
-  const ids = [...workings.index.keys()].filter((id) => !/[.@]/.test(id));
+  const ids = [...workings.index].filter(([id, i]) => !/[.@]/.test(id) && workings.slots[i]?.isWord === false).map(([id]) => id);
   return on.targets.map((t) => {
     const id = triesOf(on, t, walls).find((one) => workings.has(one));
     return {
@@ -107,8 +125,9 @@ function nearIds(text: string, ids: readonly string[]): readonly string[] {
   return near === undefined ? alike(text, ids) : [near];
 }
 
-/** Ids that share a word with what was written. */
+/** Ids that share words with what was written, those with most of them first, then the shortest. */
 function alike(text: string, ids: readonly string[]): string[] {
-  const parts = text.toLowerCase().split(/[^a-z]+/).filter((w) => w.length > 4);
-  return ids.filter((id) => parts.some((w) => id.toLowerCase().includes(w))).slice(0, 3);
+  const parts = text.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase().split(/[^a-z]+/).filter((w) => w.length > 3);
+  const shared = (id: string): number => parts.filter((w) => id.toLowerCase().includes(w)).length;
+  return ids.filter((id) => shared(id) > 0).sort((a, b) => shared(b) - shared(a) || a.length - b.length).slice(0, 3);
 }

@@ -116,8 +116,8 @@ function digest(text: string): string {
   return createHash('sha256').update(text).digest('hex');
 }
 
-function planTarget({ id, quantity, place, mean, within, computed }: Assembled['targets'][number]): PlanTarget {
-  return { id, quantity, ...(place === undefined ? {} : { place }), ...(mean === undefined ? {} : { mean }), ...(within === undefined ? {} : { within: within.written }), computed };
+function planTarget({ id, quantity, place, mean, within, computed, nearest = [] }: Assembled['targets'][number]): PlanTarget {
+  return { id, quantity, ...(place === undefined ? {} : { place }), ...(mean === undefined ? {} : { mean }), ...(within === undefined ? {} : { within: within.written }), computed, ...(nearest.length === 0 ? {} : { near: nearest }) };
 }
 
 /** Numbers the rules decide on, at their places. */

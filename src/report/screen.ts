@@ -51,7 +51,7 @@ const wrap = (text: string, most: number): string => {
 
 function targetText(t: PlanTarget, writing: Writing): string {
   const name = `${oneLine(t.quantity)}${t.place === undefined ? '' : ` at ${oneLine(t.place)}`}`;
-  if (!t.computed) return joined([name, 'no hand estimate', t.within === undefined ? '' : `asked within ${oneLine(t.within)}`], room, '; ');
+  if (!t.computed) return joined([name, 'no hand estimate', ...(t.near?.[0] === undefined ? [] : [`is ${t.near[0]} meant?`]), t.within === undefined ? '' : `asked within ${oneLine(t.within)}`], room, '; ');
   return joined([
     `${name} ${writing.number(t.quantity)}`,
     t.within === undefined ? '' : `asked within ${oneLine(t.within)}`,

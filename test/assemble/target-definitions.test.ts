@@ -1,4 +1,7 @@
 import { describe, expect, it } from 'vitest';
+import { vocabulary } from '../../src/assemble/index.ts';
+import { readCase } from '../../src/case/index.ts';
+import { settleCase } from '../../src/plan/index.ts';
 import { limitIn } from '../../src/assemble/target-definitions.ts';
 
 describe('the limit that a purpose names', () => {
@@ -20,4 +23,18 @@ describe('the limit that a purpose names', () => {
   ])('none in: %s', (purpose, unit) => {
     expect(limitIn(purpose, unit)).toBeUndefined();
   });
+});
+
+const boundTo = (target: string) => settleCase(readCase(`format: 1\ntitle: t\ntargets: [{ quantity: ${target} }]\nflow: cylinder\nsizes: { diameter: 20 mm }\nfluid: { material: air, pressure: 1 atm }\ninlet: { speed: 5 m/s, temperature: 20 degC }\nwall: { temperature: 60 degC }\n`, 't.case.yaml', vocabulary)).assembled.targets[0];
+
+describe('a target in words', () => {
+  it.each([['drag force', 'dragForce'], ['drag', 'dragForce'], ['Nusselt number', 'nusselt'], ['Strouhal number', 'strouhal'], ['wall heat flux', 'wallHeatFlux'], ['heat-transfer coefficient', 'heatTransferCoefficient'], ['dragForce', 'dragForce']])('%s is the quantity %s', (words, id) => {
+    expect(boundTo(words)).toMatchObject({ quantity: id, computed: true });
+  });
+  it.each([['heatFlux', 'wallHeatFlux'], ['drag on the rod', 'dragForce']])('%s names none, and %s is near', (words, id) => {
+    const found = boundTo(words);
+    expect(found).toMatchObject({ quantity: words, computed: false });
+    expect(found?.nearest).toContain(id);
+  });
+  it('that names nothing stays as it is written', () => expect(boundTo('colour of the rod')).toMatchObject({ quantity: 'colour of the rod', computed: false, nearest: [] }));
 });

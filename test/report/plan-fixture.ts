@@ -26,7 +26,7 @@ export function planFixture(change: Partial<Plan> = {}): Plan {
     program: 'runbrief 0.1.0',
     format: 1,
     case: { file: 'rinse-line.case.yaml', title: 'Rinse water cooled in a jacketed line', sha256: '0'.repeat(64) },
-    targets: [{ id: 'targets.0', quantity: 'outletTemperature', place: 'outlet', mean: 'mass-flow', within: '1 K', computed: true }, { id: 'targets.1', quantity: 'lift of the line', computed: false }],
+    targets: [{ id: 'targets.0', quantity: 'outletTemperature', place: 'outlet', mean: 'mass-flow', within: '1 K', computed: true }, { id: 'targets.1', quantity: 'lift of the line', computed: false, near: ['liftForce', 'liftCoefficient'] }],
     quantities: {
       'inlet.speed': quantity('', 'mean speed', 0.4, 'm/s', { kind: 'given', formula: 'given', source: 'the case', ...spread(0.4, 0.05) }),
       'sizes.diameter': given('diameter', 0.025, 'm'),

@@ -46,7 +46,7 @@ function aboutTarget(on: Ground, t: Target): Line[] {
 }
 
 function lackOf(on: Ground, t: Target): string {
-  if (t.nearest !== undefined) return t.nearest.length === 0 ? 'no quantity has that name' : `no quantity has that name; near to it are ${listed(t.nearest)}`;
+  if (t.nearest !== undefined) return t.nearest.length === 0 ? 'no quantity has that name' : `no quantity has that name; near to it ${t.nearest.length === 1 ? 'is' : 'are'} ${listed(t.nearest)}`;
   return `its inputs are not complete in a ${on.assembled.flow.title.toLowerCase()} as the case stands`;
 }
 
