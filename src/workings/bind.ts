@@ -1,6 +1,6 @@
 import type { Node } from './build.ts';
 import type { Law, Laws, When } from './define.ts';
-import type { Bound, Given, Slot, Source } from './slot.ts';
+import { unfilled, type Bound, type Given, type Slot, type Source } from './slot.ts';
 
 /** A graph made ready: ids as indices, sources of spread with the slots they act on. */
 export interface Bindings {
@@ -79,8 +79,7 @@ export function bind(nodes: ReadonlyMap<string, Node>, given: Readonly<Record<st
       for (const l of way.laws ?? []) acts[lawSource.get(l) as number]?.push(i);
       slot.ways.push({
         way, ids: needs, needs: needs.map(at), when: conditions(when), closes: closes === undefined ? -1 : at(closes),
-        of: Object.create(null) as Record<string, number>, // looked up by name: no shape of its own for every way
-        laws: shifted, source: own,
+        of: unfilled, laws: shifted, source: own,
       });
     }
   });

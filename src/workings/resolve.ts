@@ -4,7 +4,7 @@ import type { Node } from './build.ts';
 import type { Laws } from './define.ts';
 import { fixedPoint } from './fixed-point.ts';
 import { Reach, type Known } from './reach.ts';
-import type { Bound, Given, Slot, Source } from './slot.ts';
+import { unfilled, type Bound, type Given, type Slot, type Source } from './slot.ts';
 
 /** How a loop was closed. */
 export interface Closed {
@@ -241,6 +241,7 @@ export class Workings {
   }
 
   #fill(b: Bound): void {
+    if (b.of === unfilled) b.of = Object.create(null) as Record<string, number>; // looked up by name: no shape of its own for every way
     for (let k = 0; k < b.needs.length; k++) b.of[b.way.needs[k] as string] = this.#value[b.needs[k] as number] as number;
   }
 

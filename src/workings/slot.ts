@@ -9,14 +9,17 @@ export interface Given {
   readonly relative?: boolean;
 }
 
-/** A way bound to slots: indices in place of names, and its argument, filled again each time. */
+/** The argument of a way that was not asked for yet. */
+export const unfilled = Object.freeze(Object.create(null)) as Record<string, number>;
+
+/** A way bound to slots: indices in place of names, and its argument, made when it is first asked for and filled again each time. */
 export interface Bound {
   readonly way: Way;
   readonly needs: readonly number[];
   readonly ids: readonly string[];
   readonly when: readonly { readonly slot: number; readonly words: readonly string[] }[];
   readonly closes: number;
-  readonly of: Record<string, number>;
+  of: Record<string, number>;
   readonly laws: Laws;
   /** Index of its own scatter in the list of sources of spread, or -1. */
   readonly source: number;
