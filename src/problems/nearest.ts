@@ -22,7 +22,7 @@ function editDistance(a: string, b: string): number {
 }
 
 /**
- * The valid name a misspelt one most likely meant, at most two edits away and not a different word altogether.
+ * The valid name a misspelt one most likely meant, at most two edits away, one in words of up to four letters.
  *
  * @param name   what was written
  * @param valid  the names that exist
@@ -31,13 +31,14 @@ function editDistance(a: string, b: string): number {
 export function nearestName(name: string, valid: readonly string[]): string | undefined {
   const low = name.slice(0, 200).toLowerCase();
   let best: string | undefined;
+  const most = low.length > 4 ? 2 : 1;
   let least = Number.POSITIVE_INFINITY;
   for (const candidate of valid) {
     if (Math.abs(candidate.length - low.length) > 2) continue;
     const distance = editDistance(low, candidate.toLowerCase());
     // Of names equally far the one with the same beginning and length: a letter mistyped is likelier than one lost.
     const rank = distance + (candidate[0]?.toLowerCase() === low[0] ? 0 : 0.2) + (candidate.length === low.length ? 0 : 0.1);
-    if (distance < 3 && rank < least && distance < Math.max(low.length, candidate.length)) {
+    if (distance <= most && rank < least && distance < Math.max(low.length, candidate.length)) {
       least = rank;
       best = candidate;
     }
