@@ -48,7 +48,7 @@ const laminarSource = 'Shah and London, Laminar Flow Forced Convection in Ducts 
 /** Mean over developed Nusselt number of the one wall that is heated: the thin layer that forms on it, met with the developed value. */
 function oneSidedEntrance(wallKind: string[], thin: number, developed: number, printed: string): ReturnType<typeof way> {
   return way({
-    needs: ['graetz'], when: { channelHeating: 'one', regime: 'laminar', energySolved: 'yes', wallKind }, scatter: 0.05, range: { graetz: [0, 1e5] },
+    needs: ['graetz'], when: { channelHeating: 'one', energySolved: 'yes', wallKind }, scatter: 0.05, range: { graetz: [0, 1e5] },
     value: ({ graetz }) => Math.cbrt(1 + (thin / developed) ** 3 * graetz),
     formula: `F = (1 + (${thin}/${printed})^3 Gz)^(1/3)`,
     source: `${laminarSource}, thin layer; by cubes with the developed value, within 5 % of a solution by finite volumes`,
@@ -78,7 +78,7 @@ const laws: Definition[] = [
     way({ needs: [], when: { channelHeating: 'one', wallKind: ['temperature', 'coefficient'] }, value: () => laminarNusselt.oneSided.temperature, formula: 'Nu = 4.861, one wall at a temperature, the other adiabatic', source: laminarSource }),
     way({ needs: [], when: { channelHeating: 'one', wallKind: 'flux' }, value: () => laminarNusselt.oneSided.flux, formula: 'Nu = 70/13, flux through one wall, the other adiabatic', source: laminarSource }),
   ]),
-  ways('entranceFactorNusseltLaw', [oneSidedEntrance(['temperature', 'coefficient'], 1.849, laminarNusselt.oneSided.temperature, '4.861'), oneSidedEntrance(['flux'], 2.236, laminarNusselt.oneSided.flux, '70/13')]),
+  ways('entranceFactorNusseltLaminar', [oneSidedEntrance(['temperature', 'coefficient'], 1.849, laminarNusselt.oneSided.temperature, '4.861'), oneSidedEntrance(['flux'], 2.236, laminarNusselt.oneSided.flux, '70/13')]),
   ways('entranceLengthThermal', [
     way({ needs: ['reynoldsBulk', 'prandtlBulk', 'hydraulicDiameter'], when: { regime: ['laminar', 'transitional'], channelHeating: 'one' }, scatter: 0.5, value: (of) => 0.04 * of.reynoldsBulk * of.prandtlBulk * of.hydraulicDiameter, formula: 'L_t = 0.04 Re Pr D_h', source: 'common practice: four times the length of both walls, the layer crosses the whole gap' }),
   ]),

@@ -6,6 +6,7 @@ const results: Readonly<Record<string, string>> = {
   nusseltLaminar: 'sherwoodLaminar',
   nusseltTurbulent: 'sherwoodTurbulent',
   nusseltBetween: 'sherwoodBetween',
+  entranceFactorNusseltLaminar: 'entranceFactorSherwoodLaminar',
   entranceFactorNusseltLaw: 'entranceFactorSherwoodLaw',
 };
 const needs: Readonly<Record<string, string>> = { ...results, prandtl: 'schmidt', prandtlBulk: 'schmidtBulk', prandtlFilm: 'schmidtFilm', prandtlWall: 'schmidtWall', graetz: 'graetzMass' };

@@ -61,6 +61,7 @@ const transfer: Definition[] = [
   ]),
   quantity('sherwoodBetween', { symbol: 'Sh_tr', name: 'Sherwood number between the regimes', unit: '1', ...per }),
   quantity('sherwoodPlain', { symbol: 'Sh_0', name: 'Sherwood number, developed', unit: '1', ...per }),
+  quantity('entranceFactorSherwoodLaminar', { symbol: 'F_e,lam', name: 'mean over developed Sherwood number of laminar flow', unit: '1', ...per }),
   quantity('entranceFactorSherwoodLaw', { symbol: 'F_e,Sh*', name: 'mean over developed Sherwood number, by its law', unit: '1', ...per }),
   quantity('entranceFactorSherwood', { symbol: 'F_e,Sh', name: 'mean over developed Sherwood number', unit: '1', ...per }, [
     way({ needs: ['entranceFactorSherwoodLaw'], value: ({ entranceFactorSherwoodLaw }) => entranceFactorSherwoodLaw, formula: 'F_e,Sh by its law', source: 'law of the effect' }),

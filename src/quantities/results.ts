@@ -20,8 +20,8 @@ export const results: Definition[] = [
     way({ needs: ['nusseltPlain', ...factorsOfNusselt], value: (of) => of.nusseltPlain * product(of, factorsOfNusselt), formula: 'Nu = Nu_0 times the factors of entrance, viscosity, buoyancy, axial conduction, roughness, viscous heating, rarefaction', source: 'factors of the effects that act' }),
   ]),
   quantity('nusseltOutlet', { symbol: 'Nu_out', name: 'Nusselt number at the outlet', unit: '1' }, [
-    way({ needs: ['nusselt', 'entranceFactorNusselt'], when: { flowClass: 'internal', regime: 'laminar' }, scatter: 0.06, value: ({ nusselt, entranceFactorNusselt }) => Math.max(nusselt / entranceFactorNusselt, (2 / 3) * nusselt), formula: 'Nu_out = max(Nu/F_e, 2 Nu/3)', source: 'local over mean of the thermal entrance, Leveque, Ann. Mines 13 (1928) 201; developed beyond it' }),
-    way({ needs: ['nusselt', 'entranceFactorNusselt'], when: { flowClass: 'internal', regime: ['transitional', 'turbulent'] }, value: ({ nusselt, entranceFactorNusselt }) => nusselt / entranceFactorNusselt, formula: 'Nu_out = Nu/F_e', source: 'developed at the outlet' }),
+    way({ needs: ['nusselt', 'entranceFactorNusselt'], when: { flowClass: 'internal', regime: ['laminar', 'transitional'] }, scatter: 0.06, value: ({ nusselt, entranceFactorNusselt }) => Math.max(nusselt / entranceFactorNusselt, (2 / 3) * nusselt), formula: 'Nu_out = max(Nu/F_e, 2 Nu/3)', source: 'local over mean of the thermal entrance, Leveque, Ann. Mines 13 (1928) 201; developed beyond it' }),
+    way({ needs: ['nusselt', 'entranceFactorNusselt'], when: { flowClass: 'internal', regime: 'turbulent' }, value: ({ nusselt, entranceFactorNusselt }) => nusselt / entranceFactorNusselt, formula: 'Nu_out = Nu/F_e', source: 'developed at the outlet' }),
   ]),
   quantity('heatTransferCoefficientPlain', { symbol: 'h_0', name: 'heat-transfer coefficient from the plain Nusselt number', unit: 'W/(m^2 K)' }, coefficient('nusseltPlain', 'Nu_0', 'h_0')),
   quantity('heatTransferCoefficient', { symbol: 'h', name: 'heat-transfer coefficient, mean', unit: 'W/(m^2 K)' }, coefficient('nusselt', 'Nu', 'h')),
