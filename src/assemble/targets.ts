@@ -125,9 +125,9 @@ function nearIds(text: string, ids: readonly string[]): readonly string[] {
   return near === undefined ? alike(text, ids) : [near];
 }
 
-/** Ids that share words with what was written, those with most of them first, then the shortest. */
+/** Ids that share a word with what was written, two where it has several; those with most of them first, then the shortest. */
 function alike(text: string, ids: readonly string[]): string[] {
   const parts = text.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase().split(/[^a-z]+/).filter((w) => w.length > 3);
   const shared = (id: string): number => parts.filter((w) => id.toLowerCase().includes(w)).length;
-  return ids.filter((id) => shared(id) > 0).sort((a, b) => shared(b) - shared(a) || a.length - b.length).slice(0, 3);
+  return ids.filter((id) => shared(id) >= Math.max(1, Math.min(2, parts.length))).sort((a, b) => shared(b) - shared(a) || a.length - b.length).slice(0, 3);
 }

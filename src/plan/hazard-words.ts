@@ -45,11 +45,13 @@ export function wordOf(assembled: Assembled, mark: Mark, where: readonly Where[]
 }
 
 const partOfWord = /[a-z0-9]/;
+/** A glycol is not the gas in its name. */
+const otherSubstance = /^[ -]glycol/;
 
-/** Whether a word stands in a text on its own, not within a longer one. */
+/** Whether a word stands in a text on its own, neither within a longer one nor as the first part of another name. */
 function stands(text: string, word: string): boolean {
   for (let at = text.indexOf(word); at >= 0; at = text.indexOf(word, at + 1)) {
-    if (!partOfWord.test(text[at - 1] ?? '') && !partOfWord.test(text[at + word.length] ?? '')) return true;
+    if (!partOfWord.test(text[at - 1] ?? '') && !partOfWord.test(text[at + word.length] ?? '') && !otherSubstance.test(text.slice(at + word.length, at + word.length + 7))) return true;
   }
   return false;
 }

@@ -31,10 +31,11 @@ describe('a target in words', () => {
   it.each([['drag force', 'dragForce'], ['drag', 'dragForce'], ['Nusselt number', 'nusselt'], ['Strouhal number', 'strouhal'], ['wall heat flux', 'wallHeatFlux'], ['heat-transfer coefficient', 'heatTransferCoefficient'], ['dragForce', 'dragForce']])('%s is the quantity %s', (words, id) => {
     expect(boundTo(words)).toMatchObject({ quantity: id, computed: true });
   });
-  it.each([['heatFlux', 'wallHeatFlux'], ['drag on the rod', 'dragForce']])('%s names none, and %s is near', (words, id) => {
+  it.each([['heatFlux', 'wallHeatFlux'], ['drag on the rod', 'dragForce'], ['heat flux of the wall', 'wallHeatFlux']])('%s names none, and %s is near', (words, id) => {
     const found = boundTo(words);
     expect(found).toMatchObject({ quantity: words, computed: false });
     expect(found?.nearest).toContain(id);
   });
+  it('is not near to a quantity for one word of several', () => expect(boundTo('pressure loss of the grille')?.nearest).not.toContain('pressure'));
   it('that names nothing stays as it is written', () => expect(boundTo('colour of the rod')).toMatchObject({ quantity: 'colour of the rod', computed: false, nearest: [] }));
 });

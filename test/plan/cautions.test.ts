@@ -32,6 +32,8 @@ const rows: readonly { what: string; text: string; hazards: readonly string[] }[
   { what: 'water at 47 degC', text: line({ inlet: '{ speed: 0.5 m/s, temperature: 47 degC }' }), hazards: [] },
   { what: 'water at 49 degC', text: line({ inlet: '{ speed: 0.5 m/s, temperature: 49 degC }' }), hazards: ['hot'] },
   { what: 'a wall at 49 degC', text: line({ wall: '{ temperature: 49 degC }' }), hazards: ['hot'] },
+  { what: 'a glycol is not the gas it is named for', text: line({ fluid: '{ material: propylene glycol-water, composition: { propylene glycol: 40 % mass }, pressure: 1.2 bar abs }' }), hazards: [] },
+  { what: 'propylene itself', text: line({ fluid: '{ material: propylene, pressure: 1.2 bar abs }' }), hazards: ['flammable'] },
   { what: 'air 0.4 bar above ambient', text: line({ fluid: '{ material: air, pressure: 1.41 bar abs }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: [] },
   { what: 'air 0.6 bar above ambient', text: line({ fluid: '{ material: air, pressure: 1.62 bar abs }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: ['pressure'] },
   { what: 'cold water 8 bar above ambient', text: line({ fluid: '{ material: water, pressure: 9 bar abs }' }), hazards: [] },

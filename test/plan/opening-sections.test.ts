@@ -1,6 +1,8 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
-import type { Plan } from '../../src/plan/index.ts';
+import { vocabulary } from '../../src/assemble/index.ts';
+import { readCase } from '../../src/case/index.ts';
+import { plan as makePlan, type Plan } from '../../src/plan/index.ts';
 import { linesOf, planOf, unknownIds } from './harness.ts';
 
 const sections = ['question', 'physics', 'properties', 'documentation', 'cautions'] as const;
@@ -46,6 +48,17 @@ fluid: { density: 995.65 kg/m^3, viscosity: 7.972e-4 Pa s, thermalConductivity: 
 inlet: { speed: 0.05 m/s, temperature: 20 degC }
 wall: { temperature: 40 degC }
 `;
+/** Just past the laminar limit of its section, so that decisions are borderline by their spread. */
+const duct = `
+format: 1
+title: Duct
+targets: [{ quantity: wallTemperature, mean: peak, within: 3 K }]
+flow: duct
+sizes: { width: 20 mm, height: 6 mm, length: 300 mm }
+fluid: { material: propylene glycol-water, composition: { propylene glycol: 40 % mass }, pressure: 2 bar abs }
+inlet: { volumeFlow: 4 L/min, temperature: 40 degC }
+wall: { heatFlux: 40 kW/m^2 +/- 5 % }
+`;
 const plans = new Map<string, Promise<Plan>>();
 const plan = (text: string): Promise<Plan> => { const had = plans.get(text) ?? planOf(text); plans.set(text, had); return had; };
 const value = (p: Plan, id: string): number => p.quantities[id]?.value as number;
@@ -55,6 +68,12 @@ describe('question, physics, properties, documentation', () => {
     const p = await plan(text);
     expect(sections.flatMap((s) => unknownIds(p, s))).toEqual([]);
     for (const s of sections) expect(p.sections[s].lines.length).toBeGreaterThan(0);
+  });
+
+  it('list no decision that changes to what it is', async () => {
+    const table = (await makePlan(readCase(duct, 'duct.case.yaml', vocabulary), { version: 'test', flips: true })).sections.question.tables.find((t) => t.title.startsWith('Where decisions change'));
+    expect(table?.rows.length).toBeGreaterThan(0);
+    expect(table?.rows.filter((row) => /^(\S+) becomes \1$/.test(row.at(-1) as string))).toEqual([]);
   });
 
   it('have no sentence without a number that reads the same in two cases', async () => {

@@ -49,7 +49,7 @@ function* evaluation(on: Ground): Generator<Trap> {
   const heat = asked(on, ['nusselt', 'heatTransferCoefficient']);
   if (heat !== undefined) yield { id: 'reference', title: 'Another reference temperature or area', text: `the estimate of the ${nameOf(on, heat.quantity)}, {${heat.quantity}}, is formed on the length {length} with the state at {bulkTemperature}.`, test: 'recompute it from the heat rate with the named area and temperature difference', chance: often, large: false };
   if (over(on, 'wallUnitsShift', 'wallUnitsLimit') && on.word('wallBounded') === 'yes') {
-    yield { id: 'wall-units', title: 'y+ with the wrong state', text: 'the viscosity is {kinematicViscosityWall} at the wall and {kinematicViscosityBulk} in the bulk: a first cell laid out with the bulk value is off by {wallUnitsShift}.', test: 'form y+ with density and viscosity of the wall cell', chance: met, large: false };
+    yield { id: 'wall-units', title: 'y+ with the wrong state', text: 'the viscosity is {kinematicViscosityWall} at the wall and {kinematicViscosityBulk} in the bulk: a first cell laid out with the bulk value is off by {wallUnitsShift} of its height.', test: 'form y+ with density and viscosity of the wall cell', chance: met, large: false };
   }
   const pressure = on.assembled.case.get('fluid.pressure');
   if (on.word('medium') === 'gas' && pressure !== undefined && !/abs|atm|gauge/.test(pressure.written)) {

@@ -29,9 +29,9 @@ export function rangeTables(on: Ground): Table[] {
   return [{ title: 'Over the operating range', columns: ['number', 'least', 'nominal', 'most'], rows }, ...flipTable(on)];
 }
 
-/** Values of an input at which a decision changes, the nearest first. */
+/** Values of an input at which a decision changes, the nearest first. What is borderline by its spread alone stays so where the plain number comes to lie between the limits. */
 function flipTable(on: Ground): Table[] {
-  const found = on.decisions.effects.flatMap((e) => (e.flipsAt ?? []).map((f) => ({ ...f, effect: e.id, verdictNow: e.verdict, far: away(on.number(f.path), f.value) })));
+  const found = on.decisions.effects.flatMap((e) => (e.flipsAt ?? []).map((f) => ({ ...f, effect: e.id, verdictNow: e.verdict, far: away(on.number(f.path), f.value) }))).filter((f) => f.verdict !== f.verdictNow);
   if (found.length === 0) return [];
   const rows = found.sort((a, b) => a.far - b.far).slice(0, 12).map((f) => [f.path, { id: f.path }, inWords(on, f.path, f.value), f.effect, `${f.verdictNow} becomes ${f.verdict}`]);
   return [{ title: 'Where decisions change, one input at a time', columns: ['input', 'now', 'changes at', 'decision', 'how'], rows }];
