@@ -47,7 +47,7 @@ function estimate(id: string, q: Planned['quantities'][string] | undefined): str
   return `${id} ${value}${low === undefined || high === undefined ? '' : ` (${low} to ${high})`}`;
 }
 
-/** Words in lines behind a head. */
+/** Items in lines behind a head; one longer than a line goes on below, further in. */
 function rows(head: string, items: readonly string[]): string[] {
   const out: string[] = [];
   let line = head.padEnd(lead);
@@ -57,7 +57,13 @@ function rows(head: string, items: readonly string[]): string[] {
       out.push(line);
       line = ' '.repeat(lead);
     }
-    line += line.length === lead ? text : ` ${text}`;
+    for (const [n, word] of text.split(' ').entries()) {
+      const joint = line.trim() === '' || line.length === lead ? '' : ' ';
+      if (n > 0 && line.length + 1 + word.length > width) {
+        out.push(line);
+        line = `${' '.repeat(lead + 2)}${word}`;
+      } else line += `${joint}${word}`;
+    }
   });
   return [...out, line];
 }
