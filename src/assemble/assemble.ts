@@ -10,7 +10,7 @@ import { timeDefinitions } from '../time/index.ts';
 import { joinDefinitions, ways, Workings, type Definition, type Given } from '../workings/index.ts';
 import { carries, moleculeDefinitions, reactionDefinitions, targetSpecies } from './carried.ts';
 import { factsOf } from './facts.ts';
-import { fluidOf } from './fluid.ts';
+import { absorbingShare, fluidOf } from './fluid.ts';
 import { givenOf, type Range } from './given.ts';
 import { leafDefinitions, leavesOf, wallPlaces, type Leaf } from './leaves.ts';
 import { targetDefinitions } from './target-definitions.ts';
@@ -80,6 +80,7 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
   const on = spelt(read, new Map(base.flatMap((d) => ('more' in d || d.unit === 'word' ? [] : [[d.id, d.name] as const]))));
   const walls = wallEntries(on, flow.walls, vocabulary);
   const fluid = fluidOf(on, options.materials);
+  const absorbing = absorbingShare(fluid);
   const facts = factsOf(on, flow, walls, kindsOf(on, (id) => units.get(id)), fluid.medium);
   const wall = wallDefinitions(on, flow, walls, options.materials, exists);
   const leaves = leavesOf(vocabulary, on.flow, flow.walls, (path) => on.list(path)).map((leaf) => (leaf.unit.includes('^n') ? { ...leaf, unit: leaf.unit.replace('^n', `^${on.number('rheology.index') ?? 1}`) } : leaf));
@@ -96,6 +97,7 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
     ...(carried ? reactionDefinitions(on) : []),
     ...(on.has('rheology') ? rheologyWays() : []),
     ...(fluid.laws === undefined ? [] : materialWays(fluid.laws.about)),
+    ...(absorbing === undefined ? [] : [ways('absorbingShare', [{ needs: [], value: () => absorbing, formula: 'x_a = x_w + x_c', source: 'composition of the mixture' }])]),
     ...targetDefinitions(on, estimated(on, base, flow.walls)),
     ...validationDefinitions(estimated(on, base, flow.walls)),
     ...toleranceWays(on, (id) => units.get(id)),

@@ -68,6 +68,14 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   return { material, laws, medium: laws.phase === 'liquid' ? 'liquid' : laws.phase === 'solid' ? 'solid' : 'gas', state, assumed };
 }
 
+/** Share by mole of what absorbs heat radiation in a mixture of gases; undefined for any other fluid. */
+export function absorbingShare({ material }: Fluid): number | undefined {
+  const thermodynamics = material?.record.thermodynamics;
+  if (thermodynamics?.model !== 'gas-mixture') return undefined;
+  const shares = thermodynamics.constants['shares'] as Readonly<Record<string, number>>;
+  return (shares['water'] ?? 0) + (shares['carbon-dioxide'] ?? 0);
+}
+
 /** Shares of the components that the case gives, in its order. */
 function componentsOf(on: Case): Component[] {
   return on.list('fluid.composition').flatMap((name) => {

@@ -90,16 +90,19 @@ function gas(): Definition[] {
   /** Magnus form, pressure of saturated vapour over water [Pa] at T [K]. */
   const saturated = (t: number): number => 610.94 * Math.exp((17.625 * (t - 273.15)) / (t - 273.15 + 243.04));
   return [
+    quantity('absorbingShare', { symbol: 'x_a', name: 'share of water vapour and carbon dioxide in the gas, by mole', unit: '1' }),
     quantity('absorber', { symbol: '', name: 'what absorbs heat radiation in the gas', unit: 'word', words: ['none', 'water-vapour', 'carbon-dioxide', 'given', 'combustion'] }, [
       wordWay({ needs: [], when: { transparency: 'opaque' }, word: () => 'none', formula: 'an opaque fluid', source: definition }),
       wordWay({ needs: ['fluid.absorptionCoefficient'], word: (of) => (of['fluid.absorptionCoefficient'] > 0 ? 'given' : 'none'), formula: 'absorption coefficient as given', source: 'the case' }),
       wordWay({ needs: [], when: { 'has.burning': 'yes' }, word: () => 'combustion', formula: 'burnt gas', source: definition }),
       wordWay({ needs: [], when: { 'has.humidity': 'yes' }, word: () => 'water-vapour', formula: 'humid gas', source: definition }),
+      wordWay({ needs: ['absorbingShare'], word: ({ absorbingShare }) => (absorbingShare > 0 ? 'combustion' : 'none'), formula: 'water vapour and carbon dioxide in the mixture', source: definition }),
       wordWay({ needs: ['molarMass'], word: ({ molarMass }) => (Math.abs(molarMass - 0.04401) < 5e-5 ? 'carbon-dioxide' : Math.abs(molarMass - 0.018015) < 5e-5 ? 'water-vapour' : 'none'), formula: 'a pure gas told by its molar mass', source: 'air, nitrogen, oxygen and noble gases do not absorb', dimensional: 'molar masses have a unit' }),
       wordWay({ needs: [], word: () => 'none', formula: 'no absorber named', source: definition }),
     ]),
     quantity('absorbingPressure', { symbol: 'p_a', name: 'partial pressure of the absorbing gas', unit: 'Pa' }, [
       way({ needs: ['fluid.humidity', 'referenceTemperature'], when: { absorber: 'water-vapour', 'has.humidity': 'yes' }, range: { referenceTemperature: [233.15, 373.15] }, value: (of) => of['fluid.humidity'] * saturated(of.referenceTemperature), formula: 'p_a = phi p_sat(T)', source: 'Alduchov and Eskridge, J. Appl. Meteor. 35 (1996) 601', dimensional: 'constants in degrees Celsius' }),
+      way({ needs: ['absorbingShare', 'pressure'], when: { absorber: 'combustion' }, value: ({ absorbingShare, pressure }) => absorbingShare * pressure, formula: 'p_a = (x_w + x_c) p', source: 'Dalton' }),
       way({ needs: ['pressure'], when: { absorber: ['carbon-dioxide', 'water-vapour'], 'has.humidity': 'no' }, value: ({ pressure }) => pressure, formula: 'p_a = p', source: 'a pure gas' }),
     ]),
     quantity('meanBeamLength', { symbol: 'L_m', name: 'mean beam length of the gas', unit: 'm' }, [

@@ -129,3 +129,25 @@ describe('a number that nothing follows from', () => {
     expect(await idleOf(bed('', 'material: flue gas, composition: { nitrogen: 75 % mol, carbon dioxide: 15 % mol, water: 10 % mol }, '))).toEqual([]);
   });
 });
+
+describe('flue gas in a duct', () => {
+  const flue = (composition: string): string => `
+format: 1
+title: Hot gas in a duct
+targets: [{ quantity: heatRate, within: 10 % }]
+flow: pipe
+sizes: { diameter: 500 mm, length: 4 m }
+fluid: { material: flue gas, composition: ${composition}, pressure: 1 bar abs }
+inlet: { speed: 6 m/s, temperature: 700 degC }
+wall: { temperature: 300 degC }
+`;
+  it('radiates by its water vapour and carbon dioxide: p_a = 0.22 bar over L_m = 0.45 m', async () => {
+    const plan = await planOf(flue('{ nitrogen: 73 % mol, carbon dioxide: 12 % mol, water: 10 % mol, oxygen: 5 % mol }'));
+    expect(plan.quantities['absorbingPressure']?.value).toBeCloseTo(22000, 6);
+    expect(plan.effects.find((e) => e.id === 'participating-radiation')).toMatchObject({ applies: true, verdict: 'include' });
+  });
+  it('does not where neither is in it', async () => {
+    const plan = await planOf(flue('{ nitrogen: 80 % mol, oxygen: 20 % mol }'));
+    expect(plan.effects.find((e) => e.id === 'participating-radiation')?.applies).toBe(false);
+  });
+});
