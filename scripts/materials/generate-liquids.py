@@ -128,8 +128,6 @@ fitted('DEB', 'diethylbenzene thermal oil', ['alkylated aromatic thermal oil', '
 fitted('PHE', 'paraffinic thermal oil', ['mineral thermal oil', 'paraffinic mineral heat-transfer oil'], 'a class of mineral thermal oils for use to 315 degC without pressure', (293.15, 588.15), ['oil', 'flammable'], f'{SHEET} (PHE)', {**USUAL, 'viscosity': '20 %', 'vapourPressure': '50 %'})
 fitted('S800', 'silicone thermal oil', ['polydimethylsiloxane thermal oil'], 'a class of stabilised polydimethylsiloxane for use to 400 degC under pressure', (233.15, 653.15), ['flammable', 'oil'], f'{SHEET} (S800)', {**USUAL, 'vapourPressure': '20 %'})
 fitted('XLT', 'low-temperature silicone oil', ['cold silicone oil', 'polydimethylsiloxane for low temperatures'], 'a class of thin polydimethylsiloxane for cooling to -100 degC', (173.15, 523.15), ['flammable', 'oil'], f'{SHEET} (XLT)', {**USUAL, 'vapourPressure': '20 %'})
-fitted('HFE', 'hydrofluoroether', ['methoxy-nonafluorobutane', 'C4F9OCH3'], 'methoxy-nonafluorobutane, an electronics coolant; its vapour displaces air', (193.15, 333.15), ['inert'], 'Melinder, Properties of Secondary Working Fluids for Indirect Systems, IIR (2010)', USUAL)
-fitted('TCO', 'limonene', ['d-limonene', 'citrus terpene'], 'an oil of citrus peel used as a coolant', (193.15, 373.15), ['flammable', 'oil'], 'Melinder, Properties of Secondary Working Fluids for Indirect Systems, IIR (2010)', USUAL)
 
 # Vegetable oil and biodiesel.
 T = (273.15, 453.15)
@@ -211,10 +209,10 @@ CHOI = 'Choi and Okos, in Food Engineering and Process Applications (1986), poly
 FOODS = 'usual composition, USDA food composition tables, from memory'
 
 
-def food(name, aliases, parts, T, viscosity, solids=None, about=None, marks=('hygiene',), spread=('1.5 %', '8 %', '4 %'), typical=None):
+def food(name, aliases, parts, T, viscosity, solids=None, about=None, marks=('hygiene',), spread=('1.5 %', '8 %', '4 %'), typical=None, density=None):
     ranges = {'T': K(*T), 'p': ['0 Pa', '5 MPa'], **({'composition': solids} if solids else {})}
     write({'name': name, 'aliases': aliases, 'kind': 'fluid', 'phases': ['liquid'], **({'takes': ['composition']} if solids else {}), **({'typical': typical} if typical else {}), 'marks': list(marks), **({'about': about} if about else {}),
-           'density': {'model': 'food-density', 'range': ranges, 'uncertainty': spread[0], 'source': f'{CHOI}; {FOODS}', 'constants': parts},
+           'density': density or {'model': 'food-density', 'range': ranges, 'uncertainty': spread[0], 'source': f'{CHOI}; {FOODS}', 'constants': parts},
            **({'viscosity': {**viscosity, 'range': {**ranges, **viscosity.get('range', {})}}} if viscosity else {}),
            'thermalConductivity': {'model': 'food-conductivity', 'range': ranges, 'uncertainty': spread[1], 'source': f'{CHOI}; {FOODS}', 'constants': parts},
            'specificHeatCapacity': {'model': 'food-heat-capacity', 'range': ranges, 'uncertainty': spread[2], 'source': f'{CHOI}; {FOODS}', 'constants': parts}}, BY)
@@ -238,7 +236,7 @@ write({'name': 'sucrose solution', 'aliases': ['sugar solution', 'sugar water', 
        'viscosity': {'model': 'aqueous-viscosity', 'range': {'T': ['288.15 K', '328.15 K'], **share}, 'uncertainty': '6 %', 'source': f'{LALIBERTE}, sucrose', 'checks': [{'at': {'T': '20 degC', 'composition': 0.4}, 'expect': '6.167 mPa s', 'within': '6 %', 'source': 'NBS Circular 440 (1942), from memory'}, {'at': {'T': '20 degC', 'composition': 0.2}, 'expect': '1.945 mPa s', 'within': '6 %', 'source': 'NBS Circular 440 (1942), from memory'}], 'constants': {'terms': sucrose}},
        'thermalConductivity': {'model': 'food-conductivity', 'range': {'T': ['273.15 K', '363.15 K'], **share}, 'uncertainty': '8 %', 'source': CHOI, 'constants': {'carbohydrate': 1}},
        'specificHeatCapacity': {'model': 'food-heat-capacity', 'range': {'T': ['273.15 K', '363.15 K'], **share}, 'uncertainty': '5 %', 'source': CHOI, 'constants': {'carbohydrate': 1}}}, BY)
-food('beer', [], {'water': 0.915, 'protein': 0.005, 'carbohydrate': 0.078, 'ash': 0.002}, (273.15, 343.15), seen([[0, 2.9], [20, 1.55], [40, 1.0], [60, 0.7]], '12 %', 'brewing handbooks, from memory'), about='lager of 5 % alcohol by volume, degassed; the alcohol is counted as carbohydrate')
+food('beer', [], {'water': 0.915, 'protein': 0.005, 'carbohydrate': 0.078, 'ash': 0.002}, (273.15, 343.15), seen([[0, 2.9], [20, 1.55], [40, 1.0], [60, 0.7]], '12 %', 'brewing handbooks, from memory'), about='lager of 5 % alcohol by volume, degassed; the alcohol is counted as carbohydrate', density={'model': 'constant', 'range': {'T': K(273.15, 313.15), 'p': ['0 Pa', '5 MPa']}, 'uncertainty': '1 %', 'source': 'lager at 20 degC, brewing handbooks, from memory', 'constants': {'value': '1008 kg/m^3'}})
 T = (303.15, 315.15)
 write({'name': 'blood plasma', 'aliases': ['plasma', 'human plasma'], 'kind': 'fluid', 'phases': ['liquid'], 'marks': ['medical'], 'about': 'human plasma near body temperature',
        'density': constant('1025 kg/m^3', T, '1 %', 'Kenner, Basic Res. Cardiol. 84 (1989) 111, from memory', p='1 MPa'), 'viscosity': constant('1.24 mPa s', T, '12 %', 'Kesmarky, Kenyeres, Rabai and Toth, Clin. Hemorheol. Microcirc. 39 (2008) 243, 1.10 to 1.35 mPa s at 37 degC, from memory', p='1 MPa'),

@@ -100,10 +100,10 @@ RIEDEL = 'Riedel, Chem. Ing. Tech. 23 (1951) 59; contributions of the ions as in
 ION = {'H': -9.07, 'Na': 0.0, 'K': -7.56, 'NH4': -11.63, 'Ca': -0.58, 'Mg': -9.30, 'Cl': -5.47, 'OH': 20.93, 'SO4': 1.16, 'NO3': -6.98, 'PO4': -20.93, 'CO3': -7.56}
 
 
-def electrolyte(cas, name, formula, aliases, ions, about, uncertainty, freezing=None, typical=None, limits=None, extra=None):
+def electrolyte(cas, name, formula, aliases, ions, about, uncertainty, freezing=None, typical=None, limits=None, extra=None, conducts=None, expansion=None, marks=None):
     row = ROWS[cas]
     number = lambda key: float(row[key])
-    record = {'name': name, 'aliases': aliases, 'kind': 'fluid', 'phases': ['liquid'], 'takes': ['composition'], **({'typical': typical} if typical else {}), 'about': about}
+    record = {'name': name, 'aliases': aliases, 'kind': 'fluid', 'phases': ['liquid'], 'takes': ['composition'], **({'marks': marks} if marks else {}), **({'typical': typical} if typical else {}), 'about': about}
     where = lambda suffix: {'T': [f'{273.15 + number("Min T" + suffix):g} K', f'{273.15 + min(number("Max T" + suffix), 100):g} K'], 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', f'{int(1000 * number("Max w" + suffix)) / 10:g} %']}
     record['density'] = {'model': 'aqueous-density', 'range': where(''), 'uncertainty': uncertainty['density'], 'source': f'{LALIBERTE}, {name}, {row["No of points in corr"]} points', 'constants': {'terms': [number(f'c{i}') for i in range(5)]}}
     record['viscosity'] = {'model': 'aqueous-viscosity', 'range': where('.1'), 'uncertainty': uncertainty['viscosity'], 'source': f'{LALIBERTE}, {name}', 'constants': {'terms': [number(f'v{i}') for i in range(1, 7)]}}
@@ -111,7 +111,7 @@ def electrolyte(cas, name, formula, aliases, ions, about, uncertainty, freezing=
         record['specificHeatCapacity'] = {'model': 'aqueous-heat-capacity', 'range': where('.2'), 'uncertainty': uncertainty['specificHeatCapacity'], 'source': f'{LALIBERTE}, {name}', 'constants': {'terms': [number(f'a{i}') for i in range(1, 7)]}}
     if ions:
         sigma = sum(n * ION[ion] for ion, n in ions.items())
-        record['thermalConductivity'] = {'model': 'aqueous-conductivity', 'range': {'T': ['273.15 K', '373.15 K'], 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', f'{int(100 * number("Max w"))} %']}, 'uncertainty': uncertainty['thermalConductivity'], 'source': RIEDEL, 'constants': {'contribution': round(sigma * 1e-3, 8), 'molarMass': f'{row["MW"]} g/mol'}}
+        record['thermalConductivity'] = {'model': 'aqueous-conductivity', 'range': {'T': ['273.15 K', '373.15 K'], 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', f'{int(100 * (conducts or number("Max w")))} %']}, 'uncertainty': uncertainty['thermalConductivity'], 'source': RIEDEL, 'constants': {'contribution': round(sigma * 1e-3, 8), 'molarMass': f'{row["MW"]} g/mol'}}
     if freezing:
         e = TABLE[freezing]
         record['meltingTemperature'] = {'model': 'mixture-polynomial', 'range': {'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', f'{100 * e["xmax"]:g} %']}, 'uncertainty': '0.5 %', 'source': f'{MELINDER}, first crystals', 'constants': {'origin': e['Tbase'], 'share': e['xbase'], 'gives': 'K', 'rows': trimmed(e['T_freeze']['coeffs'])}}
@@ -121,6 +121,8 @@ def electrolyte(cas, name, formula, aliases, ions, about, uncertainty, freezing=
         for key in ('density', 'viscosity', 'specificHeatCapacity'):
             record[key] = [record[key], cold[key]]
         record['thermalConductivity'] = [cold['thermalConductivity'], record['thermalConductivity']]
+    if expansion:
+        record['thermalExpansion'] = expansion
     for key, checks in (extra or {}).items():
         record[key]['checks'] = checks
     write(record, LALIBERTE_BY)
@@ -130,16 +132,22 @@ def electrolyte(cas, name, formula, aliases, ions, about, uncertainty, freezing=
 TABLE_COLD = {'MNA': 252.15, 'MCA': 223.15}
 FINE = {'density': '0.3 %', 'viscosity': '4 %', 'specificHeatCapacity': '2 %', 'thermalConductivity': '5 %'}
 COARSE = {'density': '1 %', 'viscosity': '10 %', 'specificHeatCapacity': '5 %', 'thermalConductivity': '8 %'}
+# The rule of Riedel holds for salts; for strong lyes it rises where conductivity stays, for phosphoric acid it falls through zero.
+# Expansion of caustic soda from the densities at 0 and 40 degC and three shares, a parabola in the share.
+LYE = {'model': 'mixture-polynomial', 'range': {'T': ['273.15 K', '323.15 K'], 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', '50 %']}, 'uncertainty': '20 %',
+       'source': "densities of Perry's Chemical Engineers' Handbook, 8th ed. (2007), at 0 and 40 degC (20 %: 1229.6 and 1207.9 kg/m^3, 50 %: 1540.0 and 1510.9 kg/m^3), from memory",
+       'constants': {'origin': 293.15, 'share': 0, 'gives': '1/K', 'rows': [[2.07e-4, 1.619e-3, -2.147e-3]]}}
+ACID = ['corrosive']
 if __name__ == '__main__':
     electrolyte('7647-14-5', 'sodium chloride brine', 'NaCl', ['NaCl brine', 'salt water', 'brine', 'aqueous sodium chloride'], {'Na': 1, 'Cl': 1}, 'the composition is the share of sodium chloride by mass', FINE, 'MNA')
     electrolyte('10043-52-4', 'calcium chloride brine', 'CaCl2', ['CaCl2 brine', 'aqueous calcium chloride'], {'Ca': 1, 'Cl': 2}, 'the composition is the share of calcium chloride by mass', COARSE, 'MCA')
     electrolyte('7447-40-7', 'potassium chloride brine', 'KCl', ['KCl brine', 'aqueous potassium chloride'], {'K': 1, 'Cl': 1}, 'the composition is the share of potassium chloride by mass', FINE)
-    electrolyte('7664-93-9', 'sulphuric acid', 'H2SO4', ['sulfuric acid', 'H2SO4', 'battery acid', 'aqueous sulphuric acid'], {'H': 2, 'SO4': 1}, 'in water; the composition is the share of sulphuric acid by mass', COARSE)
-    electrolyte('1310-73-2', 'caustic soda', 'NaOH', ['sodium hydroxide', 'NaOH', 'lye', 'aqueous sodium hydroxide'], {'Na': 1, 'OH': 1}, 'in water; the composition is the share of sodium hydroxide by mass', COARSE)
-    electrolyte('1310-58-3', 'caustic potash', 'KOH', ['potassium hydroxide', 'KOH'], {'K': 1, 'OH': 1}, 'in water; the composition is the share of potassium hydroxide by mass', COARSE)
-    electrolyte('7647-01-0', 'hydrochloric acid', 'HCl', ['muriatic acid', 'aqueous hydrogen chloride'], {'H': 1, 'Cl': 1}, 'in water; the composition is the share of hydrogen chloride by mass', COARSE)
-    electrolyte('7697-37-2', 'nitric acid', 'HNO3', ['HNO3', 'aqueous nitric acid'], {'H': 1, 'NO3': 1}, 'in water; the composition is the share of nitric acid by mass', COARSE)
-    electrolyte('7664-38-2', 'phosphoric acid', 'H3PO4', ['H3PO4', 'aqueous phosphoric acid'], {'H': 3, 'PO4': 1}, 'in water; the composition is the share of phosphoric acid by mass', COARSE)
+    electrolyte('7664-93-9', 'sulphuric acid', 'H2SO4', ['sulfuric acid', 'H2SO4', 'battery acid', 'aqueous sulphuric acid'], {'H': 2, 'SO4': 1}, 'in water; the composition is the share of sulphuric acid by mass', COARSE, marks=ACID)
+    electrolyte('1310-73-2', 'caustic soda', 'NaOH', ['sodium hydroxide', 'NaOH', 'lye', 'aqueous sodium hydroxide'], {'Na': 1, 'OH': 1}, 'in water; the composition is the share of sodium hydroxide by mass', COARSE, conducts=0.1, expansion=LYE, marks=ACID)
+    electrolyte('1310-58-3', 'caustic potash', 'KOH', ['potassium hydroxide', 'KOH'], {'K': 1, 'OH': 1}, 'in water; the composition is the share of potassium hydroxide by mass', COARSE, conducts=0.15, marks=ACID)
+    electrolyte('7647-01-0', 'hydrochloric acid', 'HCl', ['muriatic acid', 'aqueous hydrogen chloride'], {'H': 1, 'Cl': 1}, 'in water; the composition is the share of hydrogen chloride by mass', COARSE, marks=ACID)
+    electrolyte('7697-37-2', 'nitric acid', 'HNO3', ['HNO3', 'aqueous nitric acid'], {'H': 1, 'NO3': 1}, 'in water; the composition is the share of nitric acid by mass', COARSE, marks=ACID)
+    electrolyte('7664-38-2', 'phosphoric acid', 'H3PO4', ['H3PO4', 'aqueous phosphoric acid'], {'H': 3, 'PO4': 1}, 'in water; the composition is the share of phosphoric acid by mass', COARSE, conducts=0.15, marks=ACID)
     electrolyte('7783-20-2', 'ammonium sulphate solution', '(NH4)2SO4', ['ammonium sulfate solution'], {'NH4': 2, 'SO4': 1}, 'the composition is the share of ammonium sulphate by mass', COARSE)
     electrolyte('7757-82-6', 'sodium sulphate solution', 'Na2SO4', ['sodium sulfate solution', 'glauber salt solution'], {'Na': 2, 'SO4': 1}, 'the composition is the share of sodium sulphate by mass', COARSE)
     electrolyte('497-19-8', 'sodium carbonate solution', 'Na2CO3', ['soda solution'], {'Na': 2, 'CO3': 1}, 'the composition is the share of sodium carbonate by mass', COARSE)

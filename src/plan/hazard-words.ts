@@ -8,6 +8,7 @@ const marks = {
   cryogen: ['liquid nitrogen', 'liquid oxygen', 'liquid argon', 'liquid hydrogen', 'liquid helium', 'ln2', 'lox', 'lh2', 'lng'],
   dust: ['coal dust', 'flour', 'wood dust', 'sugar dust', 'starch', 'aluminium powder', 'metal powder'],
   toxic: ['carbon monoxide', 'co', 'ammonia', 'nh3', 'chlorine', 'hydrogen sulphide', 'hydrogen sulfide', 'h2s', 'sulphur dioxide', 'so2', 'nitrogen dioxide', 'no2', 'phosgene', 'hydrogen fluoride', 'hydrogen chloride', 'nitric oxide', 'formaldehyde', 'benzene', 'toluene', 'styrene', 'chloroform', 'carbon tetrachloride', 'mercury', 'lead', 'lead-bismuth eutectic', 'flibe', 'beryllium', 'methanol'],
+  corrosive: ['caustic soda', 'caustic potash', 'lye', 'sodium hydroxide', 'potassium hydroxide', 'naoh', 'koh', 'sulphuric acid', 'sulfuric acid', 'hydrochloric acid', 'nitric acid', 'phosphoric acid', 'acetic acid', 'hydrogen fluoride', 'hydrogen chloride', 'hcl'],
   carbonDioxide: ['carbon dioxide', 'co2'],
   inert: ['nitrogen', 'n2', 'argon', 'helium', 'carbon dioxide', 'co2', 'sulphur hexafluoride', 'sf6', 'xenon', 'krypton', 'neon'],
   oxygen: ['oxygen', 'o2', 'nitrous oxide', 'n2o', 'chlorine'],

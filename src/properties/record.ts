@@ -82,7 +82,7 @@ export interface ThermodynamicsEntry extends Omit<Entry, 'uncertainty'> {
 }
 
 /** How a fluid can hurt, whatever the case: `inert` displaces air, `oxygen` feeds a fire. */
-export const dangerMarks = ['flammable', 'toxic', 'inert', 'oxygen', 'hydrogen', 'carbonDioxide', 'cryogen', 'oil', 'dust', 'liquidMetal', 'moltenSalt', 'medical', 'hygiene'] as const;
+export const dangerMarks = ['flammable', 'toxic', 'corrosive', 'inert', 'oxygen', 'hydrogen', 'carbonDioxide', 'cryogen', 'oil', 'dust', 'liquidMetal', 'moltenSalt', 'medical', 'hygiene'] as const;
 
 /** A material as the build stores it: numbers in SI. */
 export interface MaterialRecord {

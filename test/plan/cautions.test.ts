@@ -40,6 +40,7 @@ const rows: readonly { what: string; text: string; hazards: readonly string[] }[
   { what: 'cold water 11 bar above ambient', text: line({ fluid: '{ material: water, pressure: 12.1 bar abs }' }), hazards: ['pressure'] },
   { what: 'water at 130 degC under pressure flashes where it leaks', text: line({ fluid: '{ material: water, pressure: 5 bar abs }', inlet: '{ speed: 0.5 m/s, temperature: 130 degC }' }), hazards: ['pressure', 'steam', 'hot'] },
   { what: 'flue gas: its dew point makes it no steam', text: line({ fluid: '{ material: flue gas, pressure: 1 atm }', inlet: '{ speed: 5 m/s, temperature: 350 degC }' }), hazards: ['hot'] },
+  { what: 'cold lye', text: line({ fluid: '{ material: caustic soda, pressure: 1.2 bar abs, composition: { sodium hydroxide: 20 % mass } }' }), hazards: ['corrosive'] },
   { what: 'air at 0.4 bar', text: line({ fluid: '{ material: air, pressure: 0.4 bar abs }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: ['vacuum'] },
   { what: 'air at -60 degC', text: line({ fluid: '{ material: air, pressure: 1 atm }', inlet: '{ speed: 5 m/s, temperature: -60 degC }' }), hazards: ['cold'] },
   { what: 'nitrogen at room temperature', text: line({ fluid: '{ material: nitrogen, pressure: 1 atm }', inlet: '{ speed: 5 m/s, temperature: 20 degC }' }), hazards: ['asphyxiation'] },

@@ -62,3 +62,15 @@ describe('mixtures of gases by composition', () => {
     ['unreadable-state', () => parseState('20 degC, 1 bar, oxygen 20 .. 30 % mol')],
   ] as const)('%s', (code, task) => expect(codeOf(task)).toBe(code));
 });
+
+describe('strong solutions', () => {
+  const lye = (share: number): number => propertyAt(loadMaterial('caustic soda'), 'thermalExpansion', { temperature: 293.15, pressure: 101325, composition: share })?.value ?? Number.NaN;
+  // From the handbook's densities at 0 and 40 degC, printed in the record.
+  it('caustic soda expands by the fall of its density', () => {
+    expect(lye(0.2) / ((1229.6 - 1207.9) / (40 * 1218.8))).toBeCloseTo(1, 1);
+    expect(lye(0.5) / ((1540.0 - 1510.9) / (40 * 1525.5))).toBeCloseTo(1, 1);
+  });
+  it('a conductivity that its rule carries through zero is no value', () => {
+    expect(propertyAt(loadMaterial('phosphoric acid'), 'thermalConductivity', { temperature: 298.15, pressure: 101325, composition: 0.8 })).toBeUndefined();
+  });
+});
