@@ -87,9 +87,10 @@ function unknown(name: string, key: string, collection: Collection): Problem {
   const shown = name.slice(0, 60);
   const entries = Object.entries(collection.names);
   const candidates = new Set<string>();
-  if (key.length >= 3) for (const [other, named] of entries) if (other.split(' ').includes(key)) candidates.add(named.name);
+  if (key.length >= 3) for (const [other, named] of entries) if (` ${other} `.includes(` ${key} `)) candidates.add(named.name);
   if (candidates.size > 1) return ambiguous(name, candidates);
-  const nearest = nearestName(key, Object.keys(collection.names)) ?? [...candidates].map(plainName)[0];
+  const bare = key.replace(/[ ,]*\d[\d.,]*( %| percent)?( \w+)?$/, ''); // a name with its share or grade behind it
+  const nearest = nearestName(key, Object.keys(collection.names)) ?? [...candidates].map(plainName)[0] ?? (collection.find(bare) === undefined ? undefined : bare);
   const named = nearest === undefined ? undefined : collection.names[nearest];
   const names = named === undefined ? materialNames(collection) : [];
   return new Problem({

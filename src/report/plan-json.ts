@@ -14,7 +14,8 @@ export function planDocument(plan: Plan, writing: Writing): Plan {
     tables: tables.map((table) => ({ ...table, rows: table.rows.map((row) => row.map((cell) => (typeof cell === 'string' ? writing.fill(cell) : cell))) })),
   }])) as unknown as Plan['sections'];
   const checklist = plan.checklist.map((check) => ({ ...check, text: writing.fill(check.text), ...(check.limit === undefined ? {} : { limit: writing.fill(check.limit) }), ...(check.where === undefined ? {} : { where: writing.fill(check.where) }) }));
-  return withoutAbsent({ ...plan, sections, checklist }) as Plan;
+  const targets = plan.targets.map((target) => ({ ...target, near: undefined })); // what may be meant is for the screen
+  return withoutAbsent({ ...plan, targets, sections, checklist }) as Plan;
 }
 
 /** A copy without keys that hold nothing. */

@@ -43,6 +43,8 @@ describe('names', () => {
     const oils = problemsOf(() => loadMaterial('oil'))[0];
     expect(oils?.code).toBe('ambiguous-material');
     for (const name of ['engine oil', 'heat-transfer oil', 'light oil', 'lubricating oil ISO VG 46']) expect(oils?.expected).toContain(name);
+    expect(problemsOf(() => loadMaterial('propylene glycol 40 %'))[0]).toMatchObject({ code: 'unknown-material', nearest: 'propylene glycol' });
+    expect(problemsOf(() => loadMaterial('silicone oil'))[0]).toMatchObject({ code: 'ambiguous-material', expected: expect.stringContaining('silicone oil 100') as string });
     expect(problemsOf(() => loadMaterial('aceton'))[0]).toMatchObject({ code: 'unknown-material', nearest: 'acetone' });
     expect(problemsOf(() => loadMaterial('C8H10'))[0]).toMatchObject({ code: 'ambiguous-material', expected: 'one of ethylbenzene, m-xylene, o-xylene, p-xylene' });
     expect(problemsOf(() => loadMaterial('unobtainium'))[0]?.expected).toMatch(/^one of the \d{3} materials that `runbrief material` lists/); // all the names would fill pages
