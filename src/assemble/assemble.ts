@@ -7,8 +7,9 @@ import { Problem } from '../problems/index.ts';
 import { propertyAt, type Collection, type Material } from '../properties/index.ts';
 import { carriedDefinitions, commonDefinitions, givenPropertyWays, isProperty, massAnalogy, materialWays, rheologyWays } from '../quantities/index.ts';
 import { timeDefinitions } from '../time/index.ts';
-import { joinDefinitions, ways, Workings, type Definition, type Given } from '../workings/index.ts';
+import { joinDefinitions, ways, Workings, type Definition, type Given, type Quantity } from '../workings/index.ts';
 import { carries, moleculeDefinitions, reactionDefinitions, targetSpecies } from './carried.ts';
+import { chosenOf } from './chosen.ts';
 import { factsOf } from './facts.ts';
 import { absorbingShare, fluidOf } from './fluid.ts';
 import { givenOf, type Range } from './given.ts';
@@ -75,19 +76,22 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
   const flow = flowOf(read);
   const carried = carries(read);
   const base: Definition[] = [...general(carried), ...(options.words ?? []), ...ownOf(flow, carried), ...rungDefinitions(flow)];
-  const units = new Map(base.flatMap((d) => ('more' in d ? [] : [[d.id, d.unit] as const])));
-  const exists = (id: string): boolean => units.has(id);
-  const on = spelt(read, new Map(base.flatMap((d) => ('more' in d || d.unit === 'word' ? [] : [[d.id, d.name] as const]))));
+  const known = new Map<string, Quantity>();
+  for (const d of base) if (!('more' in d)) known.set(d.id, d);
+  const exists = (id: string): boolean => known.has(id);
+  const unitOf = (id: string): string | undefined => known.get(id)?.unit;
+  const on = spelt(read, known);
   const walls = wallEntries(on, flow.walls, vocabulary);
   const fluid = fluidOf(on, options.materials);
   const absorbing = absorbingShare(fluid);
-  const facts = factsOf(on, flow, walls, kindsOf(on, (id) => units.get(id)), fluid.medium);
+  const facts = factsOf(on, flow, walls, kindsOf(on, unitOf), fluid.medium);
   const wall = wallDefinitions(on, flow, walls, options.materials, exists);
   const leaves = leavesOf(vocabulary, on.flow, flow.walls, (path) => on.list(path)).map((leaf) => (leaf.unit.includes('^n') ? { ...leaf, unit: leaf.unit.replace('^n', `^${on.number('rheology.index') ?? 1}`) } : leaf));
   const { given, ranges } = givenOf(on);
   const assumed: Record<string, Given> = Object.fromEntries(Object.entries(fluid.assumed).map(([path, value]) => [path, { value, kind: 'assumed' as const }]));
   const flowed = actualFlow(on, fluid.material);
   const ownLeaves = extraLeaves(on, leaves, exists);
+  const asked = estimated(on, known, flow.walls);
   const definitions: Definition[] = [
     ...base,
     ...(carried ? moleculeDefinitions(on, fluid.material?.name ?? on.word('fluid.material')) : []),
@@ -98,9 +102,9 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
     ...(on.has('rheology') ? rheologyWays() : []),
     ...(fluid.laws === undefined ? [] : materialWays(fluid.laws.about)),
     ...(absorbing === undefined ? [] : [ways('absorbingShare', [{ needs: [], value: () => absorbing, formula: 'x_a = x_w + x_c', source: 'composition of the mixture' }])]),
-    ...targetDefinitions(on, estimated(on, base, flow.walls)),
-    ...validationDefinitions(estimated(on, base, flow.walls)),
-    ...toleranceWays(on, (id) => units.get(id)),
+    ...targetDefinitions(on, asked),
+    ...validationDefinitions(asked),
+    ...toleranceWays(on, unitOf),
     ...[...on.entries.keys()].flatMap((path) => (path.startsWith('fluid.') && isProperty(path.slice(6)) ? givenPropertyWays(path.slice(6), path) : [])),
   ];
   const places = {
@@ -178,25 +182,3 @@ function isUnused(workings: Workings, path: string): boolean {
   const i = workings.index.get(path);
   return i === undefined || workings.followers(i).length <= 1;
 }
-
-const schemes: Readonly<Record<string, string>> = { '1 upwind-biased': 'upwind-1', '2 upwind-biased': 'upwind-2', '3 upwind-biased': 'upwind-3', '2 central': 'central-2', '4 central': 'central-4' };
-const choiceKeys: Readonly<Record<string, string>> = { turbulence: 'turbulence-treatment', closure: 'closure', wallTreatment: 'near-wall-treatment', densityVariesWith: 'density-law', run: 'run-character', timeScheme: 'time-scheme', precision: 'precision' };
-
-/** Choices the case states, in the option words of the plan. */
-function chosenOf(on: Case): Record<string, string> {
-  const out: Record<string, string> = {};
-  for (const [key, id] of Object.entries(choiceKeys)) {
-    const word = on.word(`choices.${key}`);
-    if (word !== undefined) out[id] = word;
-  }
-  const cuts = on.get('choices.cuts')?.value;
-  if (Array.isArray(cuts) && cuts.length > 0) out['dimension-and-cuts'] = cuts.join('+');
-  const character = on.word('choices.convection.character');
-  const order = on.number('choices.convection.order');
-  if (character === 'blended') out['convection-scheme'] = 'blended';
-  else if (character !== undefined || order !== undefined) out['convection-scheme'] = schemes[`${order ?? 2} ${character ?? 'upwind-biased'}`] ?? 'limited';
-  const prandtl = on.word('choices.turbulentPrandtl') ?? (on.number('choices.turbulentPrandtl') === undefined ? undefined : 'constant');
-  if (prandtl !== undefined) out['turbulent-prandtl'] = prandtl;
-  return out;
-}
-

@@ -1,7 +1,7 @@
 import type { Case, Target, Tolerance } from '../case/index.ts';
 import { speciesNamed, targetSpecies } from './carried.ts';
 import { nearestName } from '../problems/index.ts';
-import type { Definition, Workings } from '../workings/index.ts';
+import type { Quantity, Workings } from '../workings/index.ts';
 import type { TargetNode } from './target-definitions.ts';
 
 /** A target of the case bound to a quantity, or words that name none. */
@@ -23,17 +23,18 @@ export interface BoundTarget {
  * The case with the words of its targets replaced by the id they spell: `pressure drop`, `Strouhal number`, or the full name.
  *
  * @param on     the case
- * @param names  ids of quantities with their names
+ * @param known  quantities by id
  * @returns      the same case where nothing is replaced
  */
-export function spelt(on: Case, names: ReadonlyMap<string, string>): Case {
+export function spelt(on: Case, known: ReadonlyMap<string, Quantity>): Case {
   const plain = (text: string): string => text.toLowerCase().replace(/[ ,-]/g, '').replace(/number$/, '');
   const idOf = (quantity: string): string => {
     const wanted = plain(quantity);
-    for (const [id, name] of names) if (id.toLowerCase() === wanted || plain(name) === wanted) return id;
+    for (const [id, { name, unit }] of known) if (unit !== 'word' && (id.toLowerCase() === wanted || plain(name) === wanted)) return id;
     return quantity;
   };
-  const targets = on.targets.map((t): Target => (names.has(t.quantity.split('@')[0] as string) ? t : { ...t, quantity: idOf(t.quantity) }));
+  const isNumber = (q: Quantity | undefined): boolean => q !== undefined && q.unit !== 'word';
+  const targets = on.targets.map((t): Target => (isNumber(known.get(t.quantity.split('@')[0] as string)) ? t : { ...t, quantity: idOf(t.quantity) }));
   return targets.some((t, k) => t.quantity !== on.targets[k]?.quantity) ? { ...on, targets } : on;
 }
 
@@ -102,12 +103,11 @@ function triesOf(on: Case, t: Target, walls: readonly string[]): string[] {
 /**
  * Targets that some definition estimates, before there is a graph.
  *
- * @param on           the case
- * @param definitions  all but those of the case itself
- * @param walls        names of the walls of the flow
+ * @param on     the case
+ * @param known  quantities by id, all but those of the case itself
+ * @param walls  names of the walls of the flow
  */
-export function estimated(on: Case, definitions: readonly Definition[], walls: readonly string[]): TargetNode[] {
-  const known = new Map(definitions.flatMap((d) => ('more' in d ? [] : [[d.id, d] as const])));
+export function estimated(on: Case, known: ReadonlyMap<string, Quantity>, walls: readonly string[]): TargetNode[] {
   return on.targets.flatMap((target) => {
     for (const id of triesOf(on, target, walls)) {
       const [plain, place] = id.split('@') as [string, string?];
