@@ -48,8 +48,10 @@ export function meshFamily(table: Table, dimension: 2 | 3): MeshFamily {
   if (table.rowCount > mostMeshes) throw new Problem({ code: 'too-many-meshes', message: `the file has ${table.rowCount} rows, one a mesh`, ...table.place(mostMeshes, 0), expected: `at most ${mostMeshes}; a time signal is for series` });
   const by = fineBy(first, table.file);
   const zones = others.filter((column) => column.name.toLowerCase().startsWith(zonePrefix));
-  const targets = others.filter((column) => !zones.includes(column));
-  const problems: ProblemData[] = [first, ...zones].flatMap((column) => notPositive(column, table));
+  // A second column that tells the meshes apart is no target.
+  const seconds = others.filter((column) => column.name.toLowerCase() in units);
+  const targets = others.filter((column) => !zones.includes(column) && !seconds.includes(column));
+  const problems: ProblemData[] = [first, ...zones, ...seconds].flatMap((column) => notPositive(column, table));
   const order = first.values.map((_, i) => i).sort((a, b) => (by === 'cells' ? -1 : 1) * (at(first.values, a) - at(first.values, b)));
   order.slice(1).forEach((row, k) => {
     const finer = order[k] as number;
@@ -66,7 +68,7 @@ export function meshFamily(table: Table, dimension: 2 | 3): MeshFamily {
   const finest = marks[0] as number;
   const sizes = marks.map((mark) => (by === 'cells' ? (finest / mark) ** (1 / dimension) : mark / finest));
   const ratios = sizes.slice(1).map((size, k) => size / at(sizes, k));
-  const cautions = [...smallRatios(ratios), ...unlikeZones(zones.map((zone) => ({ name: zone.name.slice(zonePrefix.length), counts: sorted(zone) })), ratios, dimension)];
+  const cautions = [...smallRatios(ratios), ...seconds.flatMap((column) => otherwise(column.name, sorted(column), ratios, dimension)), ...unlikeZones(zones.map((zone) => ({ name: zone.name.slice(zonePrefix.length), counts: sorted(zone) })), ratios, dimension)];
   return { by, dimension, marks, sizes, ratios, cautions, targets: targets.map((target) => ({ ...target, values: sorted(target) })) };
 }
 
@@ -92,6 +94,14 @@ function smallRatios(ratios: readonly number[]): string[] {
   if (small.length === 0) return [];
   const shown = small.map((ratio) => ratio.toFixed(2)).join(', ');
   return [`a ratio of sizes of ${shown} is below 1.3: between such near meshes only a small part of the error is seen, and noise is taken for order`];
+}
+
+/** A second account of how fine the meshes are that does not agree with the first. */
+function otherwise(name: string, marks: readonly number[], ratios: readonly number[], dimension: number): string[] {
+  const power = name.toLowerCase() === 'cells' ? -1 / dimension : 1;
+  const own = marks.slice(1).map((mark, k) => (mark / at(marks, k)) ** power);
+  const unlike = own.findIndex((ratio, k) => Math.abs(ratio / at(ratios, k) - 1) > zoneTolerance);
+  return unlike < 0 ? [] : [`the column "${name}" gives a ratio of sizes of ${at(own, unlike).toFixed(2)} where the first column gives ${at(ratios, unlike).toFixed(2)}, which counts: see --dimension`];
 }
 
 function unlikeZones(zones: readonly { name: string; counts: readonly number[] }[], ratios: readonly number[], dimension: number): string[] {

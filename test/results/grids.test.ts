@@ -113,6 +113,12 @@ describe('cautions and refusals', () => {
     expect(grids(sized([1.01, 1.04, 1.16], [1, 1.29, 1.7]), 'a.csv').cautions).toEqual([]);
     expect(grids(sized([1.01, 1.04, 1.16], [1, 1.28, 1.7]), 'a.csv').cautions[0]).toContain('1.28 is below 1.3');
   });
+  it('a second column of fineness is no target, and is held to the first', () => {
+    const both = (dimension: 2 | 3): ReturnType<typeof grids> => grids('cells,size [m],drag [N]\n10000,0.01,10.5\n40000,0.005,10.2\n160000,0.0025,10.1\n', 'a.csv', { dimension });
+    expect(both(2).targets.map((t) => t.name)).toEqual(['drag']);
+    expect(JSON.stringify(both(2))).not.toContain('gives a ratio');
+    expect(JSON.stringify(both(3))).toContain('gives a ratio of sizes of 2.00 where the first column gives 1.59');
+  });
   it('zones that are not refined alike', () => {
     const csv = (layer: number): string => `cells,cells in layer,f\n64000,16000,1.01\n8000,${layer},1.04\n1000,250,1.16\n`;
     expect(grids(csv(2000), 'a.csv').cautions).toEqual([]);
