@@ -104,7 +104,7 @@ function judgeTarget(target: Target, family: MeshFamily, formalOrder: number, op
     safetyFactor: numbers.safetyFactor,
     ...(index === undefined || fine === 0 ? {} : { index: index / Math.abs(fine) }),
     ...(fine === 0 ? {} : { approximateError: Math.abs((fine - (target.values[1] as number)) / fine) }),
-    ...(extrapolated === undefined || extrapolated === 0 ? {} : { extrapolatedError: Math.abs((extrapolated - fine) / extrapolated) }),
+    ...(extrapolated === undefined || Math.abs(extrapolated) <= 1e-9 * Math.abs(fine) ? {} : { extrapolatedError: Math.abs((extrapolated - fine) / extrapolated) }),
     ...(numbers.asymptoticRatio === undefined ? {} : { asymptoticRatio: numbers.asymptoticRatio }),
     ...(outcome === undefined ? {} : { outcome }),
     says: gridSays(about),
