@@ -4,7 +4,8 @@ import type { Node } from './build.ts';
 import type { Laws } from './define.ts';
 import { fixedPoint } from './fixed-point.ts';
 import { Reach, type Known } from './reach.ts';
-import { unfilled, type Bound, type Given, type Slot, type Source } from './slot.ts';
+import { ownScatter, unfilled, type Bound, type Given, type Slot, type Source } from './slot.ts';
+import { farOutside, needsOutside, type OutOfRange } from './way-range.ts';
 
 /** How a loop was closed. */
 export interface Closed {
@@ -237,7 +238,7 @@ export class Workings {
     const b = this.used[i];
     if (b === undefined || b.source < 0) return 0;
     this.#fill(b);
-    return (typeof b.way.scatter === 'function' ? b.way.scatter(b.of) : (b.way.scatter ?? 0)) * (this.#outside(b) > 0 ? 2 : 1);
+    return (ownScatter(b) ?? 0) * (farOutside(b, this.#value) > 0 ? 2 : 1);
   }
 
   #fill(b: Bound): void {
@@ -294,7 +295,7 @@ export class Workings {
       const ready = this.#ready(b);
       if (ready === 'loop') looped = true;
       if (ready !== true) continue;
-      const far = this.#outside(b);
+      const far = farOutside(b, this.#value);
       if (far === 0 && this.#take(i, slot, b, 1)) return true;
       if (far > 0 && far < least) { least = far; nearest = b; }
     }
@@ -341,22 +342,6 @@ export class Workings {
   /** Being asked, or left open because something above it is. */
   #busy(i: number): boolean { return this.#stamp[i] === this.#round + 1 || this.#stamp[i] === 0; }
 
-  /** How far outside its range a way is, as a logarithm summed over its needs; 0 inside. */
-  #outside(b: Bound): number {
-    const range = b.way.range;
-    let far = 0;
-    if (range !== undefined) b.way.needs.forEach((name, k) => {
-      const r = range[name];
-      const v = this.#value[b.needs[k] as number] as number;
-      if (r === undefined) return;
-      const [lo, hi] = r;
-      if (v > hi) far += distance(v, hi);
-      else if (v < lo) far += distance(v, lo);
-      else if (Number.isNaN(v)) far += Number.POSITIVE_INFINITY;
-    });
-    return far;
-  }
-
   #take(i: number, slot: Slot, b: Bound, widen: number): boolean {
     this.#fill(b);
     if (slot.isWord) {
@@ -372,8 +357,7 @@ export class Workings {
       }
       const shift = b.source < 0 ? 0 : (this.#shift[b.source] as number);
       if (shift !== 0) {
-        const w = typeof b.way.scatter === 'function' ? b.way.scatter(b.of) : (b.way.scatter ?? 0);
-        v *= (1 + w * widen) ** shift;
+        v *= (1 + (ownScatter(b) ?? 0) * widen) ** shift;
       }
       if (!Number.isFinite(v)) {
         if (!this.failures.has(i)) this.failures.set(i, failure(slot, b, v));
@@ -442,19 +426,10 @@ export class Workings {
   }
 
   /** The needs of the way a quantity was got by that lie outside the way's range. */
-  outside(i: number): { need: string; value: number; range: readonly [number, number] }[] {
+  outside(i: number): readonly OutOfRange[] {
     const b = this.used[i];
-    if (b?.way.range === undefined) return [];
-    return b.way.needs.flatMap((name, k) => {
-      const range = b.way.range?.[name];
-      const value = this.#value[b.needs[k] as number] as number;
-      return range !== undefined && (value < range[0] || value > range[1]) ? [{ need: b.ids[k] as string, value, range }] : [];
-    });
+    return b === undefined ? [] : needsOutside(b, this.#value);
   }
-}
-
-function distance(v: number, end: number): number {
-  return v > 0 && end > 0 ? Math.abs(Math.log(v / end)) : Math.abs(v - end) / Math.max(Math.abs(end), Math.abs(v));
 }
 
 function failure(slot: Slot, b: Bound, v: number): ProblemData {

@@ -25,6 +25,9 @@ export interface Bound {
   readonly source: number;
 }
 
+/** The scatter of a way at its argument as last filled; undefined where it has none. */
+export const ownScatter = ({ way, of }: Bound): number | undefined => (typeof way.scatter === 'function' ? way.scatter(of) : way.scatter);
+
 /** What a spread comes from: an input, the scatter of a way, the uncertainty of a property. */
 export interface Source {
   readonly key: string;

@@ -1,5 +1,7 @@
 import type { Kind } from './define.ts';
 import type { Workings } from './resolve.ts';
+import { ownScatter } from './slot.ts';
+import type { OutOfRange } from './way-range.ts';
 
 /** One step of the way back from a number to the inputs. */
 export interface Step {
@@ -18,7 +20,7 @@ export interface Step {
   readonly ranges?: readonly { readonly need: string; readonly range: readonly [number, number] }[];
   /** 95 % half-width of the logarithm that the formula itself brings. */
   readonly scatter?: number;
-  readonly outside: readonly { readonly need: string; readonly value: number; readonly range: readonly [number, number] }[];
+  readonly outside: readonly OutOfRange[];
   readonly loop?: { readonly passes: number; readonly change: number };
   readonly note?: string;
   /** The place whose value a plain id is. */
@@ -33,7 +35,7 @@ export function stepOf(workings: Workings, id: string): Step | undefined {
   const bound = workings.used[i];
   const given = workings.given[i];
   const ranges = bound?.way.needs.flatMap((name, k) => { const range = bound.way.range?.[name]; return range === undefined ? [] : [{ need: bound.ids[k] as string, range }]; }) ?? [];
-  const scatter = typeof bound?.way.scatter === 'function' ? bound.way.scatter(bound.of) : bound?.way.scatter;
+  const scatter = bound === undefined ? undefined : ownScatter(bound);
   const loop = bound !== undefined && bound.closes >= 0 ? workings.closed.get(i) : undefined;
   return {
     id,
