@@ -1,20 +1,11 @@
 import { describe, expect, it } from 'vitest';
-import { Problem } from '../../src/problems/index.ts';
 import { fitOf, fitKinds, loadMaterial, parseRange, propertyAt, sampledOver, type Sampled } from '../../src/properties/index.ts';
 import { polynomialThrough } from '../../src/properties/fits/polynomial.ts';
+import { codeOf } from './harness.ts';
 
 const x = Array.from({ length: 161 }, (_, i) => 250 + (450 * i) / 160);
 const made = (y: (T: number) => number, more: Partial<Sampled> = {}): Sampled => ({ property: 'viscosity', variable: 'temperature', x, y: x.map(y), uncertainty: 0.01, phase: 'gas', flags: [], ...more });
 const number = (fit: ReturnType<typeof fitOf>, name: string): number => fit.coefficients.find((one) => one.name === name)?.value ?? Number.NaN;
-const codeOf = (task: () => unknown): string => {
-  try {
-    task();
-  } catch (error) {
-    if (error instanceof Problem) return error.list[0]?.code ?? '';
-    throw error;
-  }
-  return 'none';
-};
 
 describe('fits recover what was put in', () => {
   it('a cubic', () => {

@@ -1,17 +1,8 @@
 import { describe, expect, it } from 'vitest';
-import { Problem } from '../../src/problems/index.ts';
 import { loadMaterial, mixtureOf, parseState, propertyAt, stateOf, takeState } from '../../src/properties/index.ts';
 import { mixedTransport } from '../../src/properties/models/gas-mixture.ts';
+import { codeOf } from './harness.ts';
 
-const codeOf = (task: () => unknown): string => {
-  try {
-    task();
-  } catch (error) {
-    if (error instanceof Problem) return error.list[0]?.code ?? '';
-    throw error;
-  }
-  return 'none';
-};
 const any = loadMaterial('gas mixture');
 
 describe('mixtures of gases by composition', () => {

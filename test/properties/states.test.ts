@@ -1,16 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { loadMaterial, parseRange, parseState, phaseAt, propertyAt, saturationOf, stateOf, tableOver, takeState } from '../../src/properties/index.ts';
-import { Problem } from '../../src/problems/index.ts';
+import type { Problem } from '../../src/problems/index.ts';
+import { codeOf } from './harness.ts';
 
-const codeOf = (task: () => unknown): string => {
-  try {
-    task();
-  } catch (error) {
-    if (error instanceof Problem) return error.list[0]?.code ?? '';
-    throw error;
-  }
-  return 'none';
-};
 const at = (name: string, text: string) => {
   const material = loadMaterial(name);
   return takeState(material, stateOf(material, parseState(text)));
