@@ -4,7 +4,7 @@ import { flows, rungDefinitions, type Flow } from '../flows/index.ts';
 import { meshDefinitions } from '../mesh/index.ts';
 import { numericsDefinitions } from '../numerics/index.ts';
 import { Problem } from '../problems/index.ts';
-import { propertyAt, type Collection, type Material } from '../properties/index.ts';
+import { propertyAt, type Collection, type Material, type State } from '../properties/index.ts';
 import { carriedDefinitions, commonDefinitions, givenPropertyWays, isProperty, massAnalogy, materialWays, rheologyWays } from '../quantities/index.ts';
 import { timeDefinitions } from '../time/index.ts';
 import { joinDefinitions, ways, Workings, type Definition, type Given, type Quantity } from '../workings/index.ts';
@@ -42,6 +42,8 @@ export interface Assembled {
   readonly targets: readonly BoundTarget[];
   readonly ranges: readonly Range[];
   readonly fluid?: Material;
+  /** The state that settles the phase of the fluid, with its humidity or composition. */
+  readonly fluidState: State;
   readonly wallMaterials: Readonly<Record<string, readonly string[]>>;
   readonly phaseFlags: readonly string[];
   readonly assumptions: readonly Assumption[];
@@ -122,6 +124,7 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
     targets: bindTargets(on, workings, flow.walls),
     ranges,
     ...(fluid.material === undefined ? {} : { fluid: fluid.material }),
+    fluidState: fluid.state,
     wallMaterials: wall.materials,
     phaseFlags: fluid.laws?.flags ?? [],
     assumptions: [

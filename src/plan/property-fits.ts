@@ -11,10 +11,8 @@ export interface FluidRange {
 
 /** Where the properties of the fluid are needed; undefined without a record, or at one temperature. */
 export function fluidRange(assembled: Assembled): FluidRange | undefined {
-  const { fluid, workings, case: on } = assembled;
-  const [from, to, pressure, humidity] = ['lowestTemperature', 'highestTemperature', 'pressure', 'fluid.humidity'].map((id) => workings.get(id));
-  const share = on.list('fluid.composition')[0];
-  const composition = share === undefined ? undefined : on.number(`fluid.composition.${share}`);
+  const { fluid, fluidState: { humidity, composition }, workings } = assembled;
+  const [from, to, pressure] = ['lowestTemperature', 'highestTemperature', 'pressure'].map((id) => workings.get(id));
   if (fluid === undefined || from === undefined || to === undefined || pressure === undefined || !(to > from)) return undefined;
   return { fluid, range: { pressure, ...(humidity === undefined ? {} : { humidity }), ...(composition === undefined ? {} : { composition }), over: { of: 'temperature', from, to }, assumed: [] } };
 }

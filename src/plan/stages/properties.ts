@@ -79,14 +79,11 @@ function phaseLines(on: Ground): Line[] {
 
 /** The record at the reference state; undefined where it has none there. */
 function recordOf(on: Ground, id: string): PropertyValue | undefined {
-  const { fluid, case: given } = on.assembled;
+  const { fluid, fluidState, case: given } = on.assembled;
   const [temperature, pressure] = [on.number('referenceTemperature'), on.number('pressure')];
   if (fluid === undefined || temperature === undefined || pressure === undefined || given.has(`fluid.${id}`)) return undefined;
-  const humidity = given.number('fluid.humidity');
-  const share = given.list('fluid.composition')[0];
-  const composition = share === undefined ? undefined : given.number(`fluid.composition.${share}`);
   try {
-    return propertyAt(fluid, id as PropertyId, { temperature, pressure, ...(humidity === undefined ? {} : { humidity }), ...(composition === undefined ? {} : { composition }), ...(fluid.asked === undefined ? {} : { phase: fluid.asked }) });
+    return propertyAt(fluid, id as PropertyId, { ...fluidState, temperature, pressure });
   } catch (error) {
     // A state on a phase line has no record; the flags of the phase say so.
     if (error instanceof Problem) return undefined;
