@@ -31,7 +31,8 @@ export default class Plan extends Base {
     const options = ownData(flags);
     const on = readCaseFile(args.file, vocabulary);
     const far = flags.full || flags.into !== undefined || this.jsonEnabled();
-    const made = await plan(on, { ...options, version: about.version, ...(far ? { flips: true } : { quick: true, sections: ['cautions'] }) });
+    const settled = settleCase(on, options);
+    const made = await plan(on, { ...options, settled, version: about.version, ...(far ? { flips: true } : { quick: true, sections: ['cautions'] }) });
     const writing = writingOf(made.quantities, on);
     if (flags.full) this.say(asText(planBlocks(made, writing, false)));
     else {
@@ -39,7 +40,7 @@ export default class Plan extends Base {
       this.say(screen(made, writing, { file: args.file, ...(chalk === undefined ? {} : { paint: { strong: chalk.bold, warn: chalk.yellow.bold } }), ...(on.purpose === undefined ? {} : { purpose: on.purpose }) }));
     }
     if (flags.into !== undefined) {
-      const files = planFiles(made, on, tablesOf(settleCase(on, options).assembled));
+      const files = planFiles(made, on, tablesOf(settled.assembled));
       for (const path of writeInto(flags.into, files, flags.force)) this.remark(`written: ${path}`);
     }
     return this.jsonEnabled() ? planDocument(made, writing) : made;

@@ -1,6 +1,6 @@
 import { vocabulary, type Assembled } from '../assemble/index.ts';
 import { readCaseFile } from '../case/index.ts';
-import { settleCase, targetSpreads } from '../plan/index.ts';
+import { setExponents, settleCase, targetSpreads } from '../plan/index.ts';
 import { nearestName, Problem, type ProblemData } from '../problems/index.ts';
 import { traceDocument, traceText } from '../report/index.ts';
 import { missing, spreads, trace } from '../workings/index.ts';
@@ -24,7 +24,10 @@ export default class Trace extends Base {
     const { args, flags } = await this.parse(Trace);
     const on = readCaseFile(args.file, vocabulary);
     const { assembled } = settleCase(on, ownData(flags));
-    if (args.id.startsWith('targets.')) targetSpreads(assembled); // what belongs to a target may rest on its spread
+    if (args.id.startsWith('targets.')) {
+      targetSpreads(assembled); // what belongs to a target may rest on its spread
+      setExponents(assembled);
+    }
     const steps = trace(assembled.workings, args.id);
     if (steps.length === 0) throw new Problem(why(assembled, args.id));
     const traced = { id: args.id, steps, spreads: spreads(assembled.workings, steps.map((step) => step.id)) };

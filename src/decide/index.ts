@@ -10,5 +10,5 @@ export { choiceIds, effectIds, inOrder } from './ids.ts';
 export { knownFacts, type KnownFacts } from './known.ts';
 export { readRuleFolder, withPack } from './load.ts';
 export type { Price, Target } from './price.ts';
-export { settle, type SettleOptions, type State } from './settle.ts';
+export { isKept, settle, type SettleOptions, type State } from './settle.ts';
 export { definitionsOfVerdicts } from './words.ts';

@@ -200,7 +200,7 @@ function settleChoices(point: Point, plain: FactSource, session: Session, rules:
   const words = new Map(point.words);
   for (const listed of session.effects) {
     const e = effects.get(listed.id) as EffectState;
-    words.set(listed.kept, kept(e) ? 'yes' : 'no');
+    words.set(listed.kept, isKept(e) ? 'yes' : 'no');
     if (!e.judged) words.set(listed.verdict, 'leave-out'); // none of its numbers can be had
   }
   for (const [id, word] of stated) words.set(`choice.${id}`, word);
@@ -223,8 +223,8 @@ function settleChoices(point: Point, plain: FactSource, session: Session, rules:
 /** A choice that no rule decides. */
 const unread = (said: string | undefined): ChoiceState => ({ rule: undefined, applies: 'unknown', whyNot: [], chosen: said ?? 'none', given: said !== undefined, assumed: [], lacking: [] });
 
-/** Whether the model carries the effect in its first run. */
-const kept = (e: EffectState): boolean => e.verdict === 'include' || (e.verdict === 'undecided' && e.judged) || (e.verdict === 'borderline' && e.firstRun !== 'leave-out');
+/** Whether the model carries an effect in its first run: include, undecided, borderline unless it is first left out. */
+export const isKept = (e: Pick<EffectState, 'verdict' | 'judged' | 'firstRun'>): boolean => e.verdict === 'include' || (e.verdict === 'undecided' && e.judged) || (e.verdict === 'borderline' && e.firstRun !== 'leave-out');
 
 /** Pins words in one go, since each change of the pins costs a look at all edges; what is not in the graph, or is pinned so already, is passed over. Whether anything changed. */
 function pinWords(workings: Workings, words: readonly (readonly [string, string])[]): boolean {

@@ -3,7 +3,7 @@ import { createRequire } from 'node:module';
 import { basename } from 'node:path';
 import { assemble, type Assembled } from '../assemble/index.ts';
 import type { Case } from '../case/index.ts';
-import { decide, definitionsOfVerdicts, settle, type CompiledRules, type DecideOptions, type Decisions, type FlipInput, type State, type Target } from '../decide/index.ts';
+import { decide, definitionsOfVerdicts, isKept, settle, type CompiledRules, type DecideOptions, type Decisions, type FlipInput, type State, type Target } from '../decide/index.ts';
 import { ladderOf } from '../ladder/index.ts';
 import type { Collection } from '../properties/index.ts';
 import { flagsIn, spreads, type Settle, type Spread, type Workings } from '../workings/index.ts';
@@ -12,6 +12,7 @@ import { contradictionsOf } from './contradictions.ts';
 import { idsIn, type Ground, type StageResult } from './ground.ts';
 import { closure, planQuantity, rangesOf } from './numbers.ts';
 import { shippedRules } from './rules.ts';
+import { setExponents } from './target-exponents.ts';
 import { targetSpreads } from './target-spread.ts';
 import { stages } from './stages/index.ts';
 import { sectionNames, type Check, type Plan, type PlanChoice, type PlanEffect, type PlanQuantity, type PlanTarget, type Section, type SectionName } from './types.ts';
@@ -20,6 +21,8 @@ export interface PlanOptions {
   readonly version: string;
   readonly rules?: CompiledRules;
   readonly materials?: Collection;
+  /** The case as `settleCase` left it, where it is settled already. */
+  readonly settled?: Settled;
   /** Seek the values at which each input flips a verdict: costs a scan per input. */
   readonly flips?: boolean;
   /** The synchronous reading of the rules alone, without the rules engine beside it: for a screen that is wanted at once. */
@@ -47,7 +50,7 @@ export interface Settled {
  * @returns        the graph at its nominal point
  * @throws         {Problem} what `assemble` finds
  */
-export function settleCase(on: Case, options: Omit<PlanOptions, 'version' | 'flips'> = {}): Settled {
+export function settleCase(on: Case, options: Pick<PlanOptions, 'rules' | 'materials'> = {}): Settled {
   const rules = options.rules ?? shippedRules();
   const assembled = assemble(on, { words: definitionsOfVerdicts(rules), ...(options.materials === undefined ? {} : { materials: options.materials }) });
   const { workings, askable, chosen } = assembled;
@@ -81,13 +84,14 @@ export function settleCase(on: Case, options: Omit<PlanOptions, 'version' | 'fli
  * @throws         {Problem} what cannot be planned, at the place of the value
  */
 export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
-  const { assembled, rules, targets, state, decideOptions, settle: again } = settleCase(on, options);
+  const { assembled, rules, targets, state, decideOptions, settle: again } = options.settled ?? settleCase(on, options);
   const { workings, ranges } = assembled;
   const decisions = await decide(workings, rules, targets, { ...decideOptions, settled: state, quick: options.quick, ...(options.flips === true ? { inputs: flipInputs(assembled) } : {}) });
+  const wanted = options.sections ?? sectionNames;
   targetSpreads(assembled);
+  if (wanted.includes('properties')) setExponents(assembled); // no other section reads them
   const ladder = ladderOf(assembled);
   const ground = groundOf(assembled, decisions, ladder);
-  const wanted = options.sections ?? sectionNames;
   const built = Object.fromEntries(sectionNames.map((name) => [name, wanted.includes(name) ? stages[name](ground) : { lines: [], tables: [] }])) as Record<SectionName, StageResult>;
   const contradictions = contradictionsOf(ground);
   const ids = closure(workings, namedIds(built, decisions, assembled, ladder));
@@ -147,7 +151,7 @@ function groundOf(assembled: Assembled, decisions: Decisions, ladder: Plan['ladd
     has: (id) => workings.get(id) !== undefined,
     number: (id) => workings.get(id),
     word: (id) => workings.word(id),
-    kept: (id) => { const e = effect(id); return e.verdict === 'include' || (e.verdict === 'undecided' && e.judged) || (e.verdict === 'borderline' && e.firstRun !== 'leave-out'); },
+    kept: (id) => isKept(effect(id)),
   };
 }
 

@@ -1,6 +1,5 @@
 import type { Assembled } from '../assemble/index.ts';
-import { lawProperties } from '../quantities/index.ts';
-import { followsLaws, spreads, type Spread, type Workings } from '../workings/index.ts';
+import { spreads, type Spread, type Workings } from '../workings/index.ts';
 
 /** Spread of the hand estimate of one target, with what it comes from. */
 export interface TargetSpread {
@@ -32,9 +31,7 @@ export function targetSpreads(assembled: Assembled): readonly TargetSpread[] {
     const from = spread.shares.map(({ key, label, share }) => ({ key, label, kind: kindOf.get(key) ?? ('scatter' as const), share }));
     return [{ id, quantity, spread, from }];
   });
-  const followed = targets.filter((t) => t.computed).map((t) => ({ ...t, by: follows(workings, t.quantity) }));
   for (const one of out) setWidths(workings, one);
-  for (const { id, quantity, by } of followed) for (const [property, n] of by) workings.set(`${id}.per.${property}`, inKelvin(workings, quantity) ? 0.01 * n : n);
   setEnds(workings, targets.filter((t) => t.computed));
   kept.set(assembled, out);
   return out;
@@ -59,27 +56,4 @@ function setWidths(workings: Workings, { id, spread, from }: TargetSpread): void
   const given = from.filter((f) => f.kind !== 'scatter').reduce((sum, f) => sum + f.share, 0);
   workings.set(`${id}.halfWidth`, half);
   workings.set(`${id}.inputWidth`, half * Math.sqrt(given));
-}
-
-const inKelvin = (workings: Workings, id: string): boolean => workings.slots[workings.index.get(id) ?? -1]?.node.about.unit === 'K';
-
-/** How a quantity follows the properties of the fluid: by its laws, or by the numbers that the case gives for them. Properties it does not follow are left out. */
-function follows(workings: Workings, quantity: string): Map<string, number> {
-  const found = followsLaws(workings, quantity);
-  const out = new Map<string, number>();
-  const step = 0.01;
-  for (const { id } of lawProperties) {
-    const path = `fluid.${id}`;
-    const given = workings.get(path);
-    const at = workings.get(quantity);
-    const law = found.get(id);
-    if (law !== undefined) out.set(id, law);
-    else if (given !== undefined && at !== undefined) {
-      const [up, down] = [1 + step, 1 - step].map((f) => workings.aside([[path, given * f]], () => workings.get(quantity))) as [number | undefined, number | undefined];
-      const over = Math.log((1 + step) / (1 - step));
-      const n = up === undefined || down === undefined ? 0 : inKelvin(workings, quantity) || !(at > 0) ? (up - down) / over : Math.log(up / down) / over;
-      if (n !== 0) out.set(id, n);
-    }
-  }
-  return out;
 }
