@@ -1,9 +1,11 @@
-import { readFileSync } from 'node:fs';
+import { readdirSync, readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { loadMaterial, propertyAt, type PropertyId } from '../../src/properties/index.ts';
 
-// Made by compared.py beside this file, which names the references and what makes each independent of the record.
-const rows = readFileSync(new URL('./compared.csv', import.meta.url), 'utf8').trim().split('\n').slice(1).map((line) => {
+// Each table in compared/ is made by the script of its name, which names the references and what makes each independent of the record.
+const folder = new URL('./compared/', import.meta.url);
+const tables = readdirSync(folder).filter((name) => name.endsWith('.csv')).toSorted();
+const rows = tables.flatMap((name) => readFileSync(new URL(name, folder), 'utf8').trim().split('\n').slice(1)).map((line) => {
   const [material = '', property = '', T, p, share, value, reference = ''] = line.split(',');
   return { material, property: property as PropertyId, temperature: Number(T), pressure: Number(p), ...(share === '' ? {} : { composition: Number(share) }), value: Number(value), reference };
 });
@@ -36,6 +38,6 @@ it('the page says what was compared, and the largest difference', async () => {
     const percent = (x: number): string => `${Number((x * 100).toPrecision(2))} %`;
     return `| ${[material, property, reference, mine.length, span(mine.map((row) => row.temperature)), percent(worst), percent(declared)].join(' | ')} |`;
   });
-  const head = ['# Materials against independent references', '', 'Made by compared.test.ts from compared.csv; compared.py names the references. Differences are those of the record, the declared uncertainty is the largest of the states.', '', '| material | property | reference | states | T [K] | largest difference | declared |', '|---|---|---|---|---|---|---|'];
+  const head = ['# Materials against independent references', '', 'Made by compared.test.ts from the tables in compared/; the script of each names its references. Differences are those of the record, the declared uncertainty is the largest of the states.', '', '| material | property | reference | states | T [K] | largest difference | declared |', '|---|---|---|---|---|---|---|'];
   await expect(`${[...head, ...lines].join('\n')}\n`).toMatchFileSnapshot('./compared.md');
 });

@@ -1,6 +1,6 @@
-"""Writes compared.csv: states of liquids and solids from independent references, held to the declared uncertainties.
+"""Writes solutions.csv: states of liquids and solids from independent references, held to the declared uncertainties.
 
-Run with:  python3 test/properties/compared.py   (needs gsw 3.6.23, CoolProp 8.0.0, chemicals 1.5.2, thermo 0.6.1, cantera 3.2.0)
+Run with:  python3 test/properties/compared/solutions.py   (needs gsw 3.6.23, CoolProp 8.0.0, chemicals 1.5.2, thermo 0.6.1, cantera 3.2.0)
 Each row names its reference. A reference counts as independent where its work is another one than that of the record:
   gsw        TEOS-10 polynomial of 75 terms (Roquet et al. 2015) and Gibbs function of the Gibbs-SeaWater toolbox
   iapws-95   pure water of CoolProp, the limit without salt
@@ -127,7 +127,7 @@ for material, shares in (('flue gas', {'N2': 0.716, 'CO2': 0.087, 'H2O': 0.172, 
         for prop, value in (('density', gas.density_mass), ('specificHeatCapacity', gas.cp_mass), ('viscosity', gas.viscosity), ('thermalConductivity', gas.thermal_conductivity)):
             add(material, prop, T, 101325, None, value, 'gri')
 
-with open(os.path.join(HERE, 'compared.csv'), 'w', newline='') as out:
+with open(os.path.join(HERE, 'solutions.csv'), 'w', newline='') as out:
     writer = csv.writer(out, lineterminator='\n')
     writer.writerow(['material', 'property', 'T [K]', 'p [Pa]', 'share', 'value [SI]', 'reference'])
     writer.writerows(ROWS)
