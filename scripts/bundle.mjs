@@ -13,7 +13,8 @@ const lazyFramework = {
     filter: { id: /@oclif[\\/]core[\\/]lib[\\/].*\.js$/ },
     handler(code) {
       const found = [...code.matchAll(/^const (\w+_\d+) = ((?:__import(?:Default|Star)\()?require\("[^"]+"\)\)?);$/gm)];
-      return found.reduce((text, [line, name, value]) => text.replace(line, '').replaceAll(new RegExp(`\\b${name}\\b`, 'g'), `(${value})`), code);
+      // It also listens on the stream of stdout, and thereby loads all of the runtime's streams. Our output writes without them.
+      return found.reduce((text, [line, name, value]) => text.replace(line, '').replaceAll(new RegExp(`\\b${name}\\b`, 'g'), `(${value})`), code.replace(/^process\.stdout\.on\('error', .*?^\}\);$/ms, ''));
     },
   },
 };

@@ -1,5 +1,5 @@
 import about from '../package.json' with { type: 'json' };
-import { COMMANDS, dispatch, fail } from './commands/index.ts';
+import { COMMANDS, dispatch, fail, stdout, write } from './commands/index.ts';
 
 /**
  * The program: runs one command line.
@@ -10,7 +10,7 @@ import { COMMANDS, dispatch, fail } from './commands/index.ts';
 export async function main(argv: readonly string[]): Promise<number> {
   try {
     if (argv[0] !== '--version') return await dispatch(argv, COMMANDS);
-    process.stdout.write(`runbrief ${about.version}\n`);
+    write(stdout, `runbrief ${about.version}\n`);
     return 0;
   } catch (error) {
     const end = argv.indexOf('--');
@@ -18,17 +18,9 @@ export async function main(argv: readonly string[]): Promise<number> {
   }
 }
 
-/** For bin/: a reader that goes away early, such as `head`, is no failure, a full disk is; a stray error is a defect, told without a stack. */
+/** For bin/: a stray error is a defect, told without a stack. */
 export async function start(): Promise<void> {
-  for (const stream of [process.stdout, process.stderr]) {
-    stream.on('error', (error: NodeJS.ErrnoException) => {
-      if (error.code === 'EPIPE') return;
-      process.stderr.write(`the result could not be written: ${error.message}\n`);
-      process.exit(1);
-    });
-  }
   process.on('uncaughtException', (error) => process.exit(fail(error, false)));
-  process.exitCode = await main(process.argv.slice(2));
-  // What the runtime still compiles in the background is of no use any more; without this it is waited for.
-  if (process.stdout.writableLength === 0 && process.stderr.writableLength === 0) process.exit();
+  // All is written by now. What the runtime still compiles in the background is of no use any more; without this it is waited for.
+  process.exit(await main(process.argv.slice(2)));
 }

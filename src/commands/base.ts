@@ -2,6 +2,7 @@ import { Command } from '@oclif/core/command';
 import type { Config, Input, ParserOutput } from '@oclif/core/interfaces';
 import type { ChalkInstance } from 'chalk';
 import { Problem } from '../problems/index.ts';
+import { isTerminal, stderr, stdout, write } from './output.ts';
 import { usageProblems } from './usage.ts';
 
 export * as Args from '@oclif/core/args';
@@ -69,12 +70,12 @@ export abstract class Base extends Command {
 
   /** Prints a line of the result on stdout; nothing with `--json`. */
   protected say(text: string): void {
-    if (!this.jsonEnabled()) process.stdout.write(`${text}\n`);
+    if (!this.jsonEnabled()) write(stdout, `${text}\n`);
   }
 
   /** Prints a remark on stderr, such as which files were written; with `--json` too, since stdout stays one document. */
   protected remark(text: string): void {
-    process.stderr.write(`${text}\n`);
+    write(stderr, `${text}\n`);
   }
 
   /** A limit was missed or cannot be told: exit code 4. */
@@ -90,11 +91,11 @@ export abstract class Base extends Command {
 
   /** Whether no colour can show, so that the library of colours need not be loaded. */
   protected get colourless(): boolean {
-    return this.jsonEnabled() || (process.env['NO_COLOR'] ?? '') !== '' || (!process.stdout.isTTY && process.env['FORCE_COLOR'] === undefined);
+    return this.jsonEnabled() || (process.env['NO_COLOR'] ?? '') !== '' || (!isTerminal() && process.env['FORCE_COLOR'] === undefined);
   }
 
   override logJson(document: unknown): void {
-    process.stdout.write(`${JSON.stringify(document, finite, 2)}\n`);
+    write(stdout, `${JSON.stringify(document, finite, 2)}\n`);
   }
 
   protected override async parse<F extends Named, B extends Named, A extends Named>(options?: Input<F, B, A>, argv?: string[]): Promise<ParserOutput<F, B, A>> {

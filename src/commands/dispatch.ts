@@ -1,5 +1,6 @@
 import { nearestName, Problem } from '../problems/index.ts';
 import { commandHelp, overview } from './help.ts';
+import { stdout, write } from './output.ts';
 import type { Entry } from './registry.ts';
 
 /**
@@ -23,7 +24,7 @@ export async function dispatch(argv: readonly string[], commands: Readonly<Recor
 }
 
 function print(text: string): 0 {
-  process.stdout.write(`${text}\n`);
+  write(stdout, `${text}\n`);
   return 0;
 }
 

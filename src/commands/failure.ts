@@ -1,5 +1,6 @@
 import { readFileSync, statSync } from 'node:fs';
 import { harmless, Problem, printProblem, type ProblemData } from '../problems/index.ts';
+import { stderr, stdout, write } from './output.ts';
 import { usageCodes } from './usage.ts';
 
 const largestShown = 1 << 20;
@@ -13,10 +14,10 @@ const largestShown = 1 << 20;
  */
 export function fail(error: unknown, json: boolean): 1 | 2 | 3 {
   const problems = error instanceof Problem ? error.list : undefined;
-  if (json) process.stdout.write(`${JSON.stringify({ problems: problems ?? [defect(error)] }, undefined, 2)}\n`);
-  else process.stderr.write(`${(problems ?? [defect(error)]).map((p) => printProblem(p, sourceOf(p.file))).join('\n')}\n`);
+  if (json) write(stdout, `${JSON.stringify({ problems: problems ?? [defect(error)] }, undefined, 2)}\n`);
+  else write(stderr, `${(problems ?? [defect(error)]).map((p) => printProblem(p, sourceOf(p.file))).join('\n')}\n`);
   if (problems !== undefined) return problems.every((p) => usageCodes.has(p.code)) ? 2 : 1;
-  if ((process.env['RUNBRIEF_DEBUG'] ?? '') !== '' && error instanceof Error) process.stderr.write(`${error.stack ?? error.message}\n`);
+  if ((process.env['RUNBRIEF_DEBUG'] ?? '') !== '' && error instanceof Error) write(stderr, `${error.stack ?? error.message}\n`);
   return 3;
 }
 
