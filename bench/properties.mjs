@@ -35,11 +35,15 @@ try {
       }
     };
     run(30_000);
-    const start = process.cpuUsage();
-    const n = name === 'humid air' ? 20_000 : 200_000;
-    run(n);
-    const { user, system } = process.cpuUsage(start);
-    const rate = n / ((user + system) / 1000);
+    const n = name === 'humid air' ? 4_000 : 40_000;
+    let rate = 0;
+    // The best of several windows: what else the machine does slows a processor that is shared, even by its own time.
+    for (let window = 0; window < 14; window++) {
+      const start = process.cpuUsage();
+      run(n);
+      const { user, system } = process.cpuUsage(start);
+      rate = Math.max(rate, n / ((user + system) / 1000));
+    }
     console.log(`${name}: ${Math.round(rate)} 000 sets/s${Number.isFinite(sum) ? '' : ' (not finite)'}`);
   }
 } finally {

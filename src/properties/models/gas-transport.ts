@@ -1,4 +1,5 @@
 import type { EquationOfState, Point } from './point.ts';
+import { column, type Rows } from './rows.ts';
 
 export interface GasViscosityConstants {
   /** [kg/mol] */
@@ -30,16 +31,24 @@ export interface GasConductivityConstants {
 
 const boltzmann = 1.380658e-23;
 
-/** Sum of N tau^t delta^d exp(-delta^l). */
-function residual(rows: readonly (readonly number[])[], tau: number, delta: number): number {
-  const log = Math.log(tau);
-  let sum = 0;
-  for (const [n, t, d, l] of rows as readonly [number, number, number, number][]) {
-    let v = n * Math.exp(t * log);
-    for (let i = 0; i < d; i++) v *= delta;
-    sum += l === 0 ? v : v * Math.exp(-(delta ** l));
-  }
-  return sum;
+/** Sum of N tau^t delta^d exp(-delta^l); d and l are whole numbers. */
+function residual(rows: Rows): (tau: number, delta: number) => number {
+  const [n, t, d, l] = [column(rows, 0), column(rows, 1), column(rows, 2), column(rows, 3)];
+  return (tau, delta) => {
+    const log = Math.log(tau);
+    let sum = 0;
+    for (let i = 0; i < n.length; i++) {
+      const decay = l[i] === 0 ? 0 : whole(delta, l[i] as number);
+      sum += (n[i] as number) * whole(delta, d[i] as number) * Math.exp((t[i] as number) * log - decay);
+    }
+    return sum;
+  };
+}
+
+function whole(x: number, exponent: number): number {
+  let v = 1;
+  for (let i = 0; i < exponent; i++) v *= x;
+  return v;
 }
 
 /**
@@ -62,8 +71,10 @@ function dilute(c: Pick<GasViscosityConstants, 'molarMass' | 'epsilon' | 'sigma'
  * @returns  viscosity [Pa s] as a function of T [K] and rho [kg/m^3]
  * @source   Lemmon and Jacobsen, Int. J. Thermophys. 25 (2004) 21, eqs. (1) to (4), tables I to III
  */
-export const lemmonJacobsenViscosity = (c: GasViscosityConstants) => (T: number, rho: number): number =>
-  dilute(c, T) + 1e-6 * residual(c.terms, c.temperature / T, rho / c.density);
+export function lemmonJacobsenViscosity(c: GasViscosityConstants): (T: number, rho: number) => number {
+  const dense = residual(c.terms);
+  return (T, rho) => dilute(c, T) + 1e-6 * dense(c.temperature / T, rho / c.density);
+}
 
 /**
  * Thermal conductivity of air, nitrogen, oxygen or argon with the critical enhancement.
@@ -73,13 +84,16 @@ export const lemmonJacobsenViscosity = (c: GasViscosityConstants) => (T: number,
  * @returns     conductivity [W/(m K)] at a point of the equation of state
  * @source      Lemmon and Jacobsen, Int. J. Thermophys. 25 (2004) 21, eqs. (5) to (11), tables II and IV
  */
-export const lemmonJacobsenConductivity = (c: GasConductivityConstants, given: { viscosity: () => number; equation: EquationOfState }) => (at: Point): number => {
-  const tau = c.temperature / at.temperature;
-  const delta = at.density / c.density;
+export function lemmonJacobsenConductivity(c: GasConductivityConstants, given: { viscosity: () => number; equation: EquationOfState }): (at: Point) => number {
+  const dense = residual(c.terms);
   const [n1, n2, t2, n3, t3] = c.dilute as [number, number, number, number, number];
-  const plain = n1 * 1e6 * dilute(c, at.temperature) + n2 * tau ** t2 + n3 * tau ** t3;
-  return 1e-3 * (plain + residual(c.terms, tau, delta)) + criticalEnhancement({ constants: c.critical, at, viscosity: given.viscosity, equation: given.equation });
-};
+  return (at) => {
+    const tau = c.temperature / at.temperature;
+    const log = Math.log(tau);
+    const plain = n1 * 1e6 * dilute(c, at.temperature) + n2 * Math.exp(t2 * log) + n3 * Math.exp(t3 * log);
+    return 1e-3 * (plain + dense(tau, at.density / c.density)) + criticalEnhancement({ constants: c.critical, at, viscosity: given.viscosity, equation: given.equation });
+  };
+}
 
 /**
  * Growth of the conductivity near the critical point, simplified crossover.

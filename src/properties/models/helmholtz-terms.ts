@@ -1,4 +1,5 @@
 import { associatingPart, decayingPart, type Adder, type Residual } from './helmholtz-rare-terms.ts';
+import { column } from './rows.ts';
 
 /** Residual terms of a Helmholtz equation of state, as the papers print them. */
 export interface ResidualTerms {
@@ -13,8 +14,6 @@ export interface ResidualTerms {
   /** Rows [n, d, t, eta, beta, gamma, epsilon, b], the terms of associating fluids. */
   readonly associating?: readonly (readonly number[])[];
 }
-
-const column = (rows: readonly (readonly number[])[], index: number): Float64Array => Float64Array.from(rows, (row) => row[index] ?? 0);
 
 /**
  * Builds the evaluation of the residual part alpha_r(tau, delta).
@@ -80,17 +79,21 @@ export function residualPart(terms: ResidualTerms): { first: (tau: number, delta
 
 function gaussianPart(rows: readonly (readonly number[])[]): Adder | undefined {
   if (rows.length === 0) return undefined;
+  const [n, d, t, alpha, beta, gamma, epsilon] = [0, 1, 2, 3, 4, 5, 6].map((i) => column(rows, i)) as [Float64Array, Float64Array, Float64Array, Float64Array, Float64Array, Float64Array, Float64Array];
   return (tau, delta, out) => {
-    for (const row of rows) {
-      const [n, d, t, alpha, beta, gamma, epsilon] = row as [number, number, number, number, number, number, number];
-      const v = n * delta ** d * tau ** t * Math.exp(-alpha * (delta - epsilon) ** 2 - beta * (tau - gamma) ** 2);
-      const sd = d / delta - 2 * alpha * (delta - epsilon);
-      const st = t / tau - 2 * beta * (tau - gamma);
+    const [logDelta, logTau] = [Math.log(delta), Math.log(tau)];
+    for (let i = 0; i < n.length; i++) {
+      const [di, ti, ai, bi] = [d[i] as number, t[i] as number, alpha[i] as number, beta[i] as number];
+      const x = delta - (epsilon[i] as number);
+      const y = tau - (gamma[i] as number);
+      const v = (n[i] as number) * Math.exp(di * logDelta + ti * logTau - ai * x * x - bi * y * y);
+      const sd = di / delta - 2 * ai * x;
+      const st = ti / tau - 2 * bi * y;
       out.a += v;
       out.d += v * sd;
-      out.dd += v * (sd * sd - d / (delta * delta) - 2 * alpha);
+      out.dd += v * (sd * sd - di / (delta * delta) - 2 * ai);
       out.t += v * st;
-      out.tt += v * (st * st - t / (tau * tau) - 2 * beta);
+      out.tt += v * (st * st - ti / (tau * tau) - 2 * bi);
       out.dt += v * sd * st;
     }
   };

@@ -1,5 +1,6 @@
 import type { EquationOfState, Point, ReducedResidual, SaturationLine, Side } from './point.ts';
 import { residualPart, type ResidualTerms } from './helmholtz-terms.ts';
+import { column } from './rows.ts';
 import { saturationByMaxwell } from './helmholtz-saturation.ts';
 import { ancillary, type Ancillary } from './ancillary.ts';
 
@@ -43,25 +44,33 @@ export interface HelmholtzConstants {
 /** tau alpha0_tau and tau^2 alpha0_tautau. */
 function idealPart(terms: IdealTerms): (tau: number) => { first: number; second: number } {
   const out = { first: 0, second: 0 };
+  const [powers, exponents] = [column(terms.power, 0), column(terms.power, 1)];
+  const [modes, modesAt] = [column(terms.vibration, 0), column(terms.vibration, 1)];
+  const [mixed, mixedAt, mixedWith] = [column(terms.mixed, 0), column(terms.mixed, 1), column(terms.mixed, 2)];
   return (tau) => {
+    const log = Math.log(tau);
     let first = terms.log;
     let second = -terms.log;
-    for (const [n, t] of (terms.power ?? []) as readonly [number, number][]) {
-      const v = n * t * tau ** t;
+    for (let i = 0; i < powers.length; i++) {
+      const t = exponents[i] as number;
+      const v = (powers[i] as number) * t * Math.exp(t * log);
       first += v;
       second += v * (t - 1);
     }
-    for (const [n, theta] of (terms.vibration ?? []) as readonly [number, number][]) {
-      const u = theta * tau;
+    for (let i = 0; i < modes.length; i++) {
+      const n = modes[i] as number;
+      const u = (modesAt[i] as number) * tau;
       const e = Math.expm1(u);
       first += (n * u) / e;
       second -= (n * u * u * (e + 1)) / (e * e);
     }
-    for (const [n, theta, c] of (terms.mixed ?? []) as readonly [number, number, number][]) {
-      const u = theta * tau;
+    for (let i = 0; i < mixed.length; i++) {
+      const n = mixed[i] as number;
+      const u = (mixedAt[i] as number) * tau;
       const e = Math.exp(-u);
-      first += (n * u) / (c * e + 1);
-      second += (n * c * u * u * e) / ((c * e + 1) * (c * e + 1));
+      const v = (mixedWith[i] as number) * e + 1;
+      first += (n * u) / v;
+      second += (n * (mixedWith[i] as number) * u * u * e) / (v * v);
     }
     out.first = first;
     out.second = second;

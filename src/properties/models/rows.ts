@@ -14,3 +14,6 @@ export function sumOfProducts(rows: Rows, x: number, y: number): number {
   for (const [n, d, t] of rows as readonly [number, number, number][]) sum += n * (d === 0 ? 1 : x ** d) * (t === 0 ? 1 : y ** t);
   return sum;
 }
+
+/** One column of rows, for sums that are asked for often. */
+export const column = (rows: Rows | undefined, index: number): Float64Array => Float64Array.from(rows ?? [], (row) => row[index] ?? 0);
