@@ -1,4 +1,4 @@
-import { fstatSync, writeSync } from 'node:fs';
+import fs from 'node:fs';
 import { Problem } from '../problems/index.ts';
 
 /** File descriptors of the two outputs. */
@@ -18,7 +18,7 @@ export function write(to: number, text: string): void {
   const bytes = Buffer.from(text);
   for (let done = 0; done < bytes.length; ) {
     try {
-      done += writeSync(to, bytes, done);
+      done += fs.writeSync(to, bytes, done);
     } catch (error) {
       const { code, message } = error as NodeJS.ErrnoException;
       if (code === 'EPIPE' || (code !== 'EAGAIN' && to === stderr)) return;
@@ -30,7 +30,7 @@ export function write(to: number, text: string): void {
 
 /** Whether a person may be reading stdout: only then the part of the runtime that knows terminals is loaded. */
 export function isTerminal(): boolean {
-  const about = fstatSync(stdout);
+  const about = fs.fstatSync(stdout);
   const memory = process.platform === 'linux' && about.rdev >> 8 === 1; // /dev/null and its like
   return about.isCharacterDevice() && !memory && process.stdout.isTTY;
 }
