@@ -17,10 +17,11 @@ interface Line {
  *
  * @param vocabulary  the keys there are
  * @param flow        the flow
+ * @param answers     targets that are estimated for it
  * @returns           the text of the file
  * @throws            {Problem} unknown-flow
  */
-export function caseTemplate(vocabulary: Vocabulary, flow: string): string {
+export function caseTemplate(vocabulary: Vocabulary, flow: string, answers: readonly string[] = []): string {
   const words = own(vocabulary.flows, flow);
   if (words === undefined) {
     const valid = Object.keys(vocabulary.flows);
@@ -33,9 +34,22 @@ export function caseTemplate(vocabulary: Vocabulary, flow: string): string {
     `## ${words.title}: a case for runbrief.`,
     `## Fill in what stands as ${blank}. Take the "# " off a line that matters; leave out what does not.`,
     '## A quantity is a number with a unit, also with a spread (0.40 m/s +/- 5 %) or as a range (0.2 .. 0.6 m/s).',
+    ...broken(answers).map((text, at) => `## ${at === 0 ? 'Targets estimated here: ' : '  '}${text}`),
     '',
   ];
   return `${[...intro, ...form.lines(vocabulary.keys, '', 0).map((line) => line.text)].join('\n')}\n`;
+}
+
+/** Ids in lines of a width that stands in an editor. */
+function broken(ids: readonly string[]): string[] {
+  const out: string[] = [];
+  for (const [at, id] of ids.entries()) {
+    const text = at === ids.length - 1 ? id : `${id},`;
+    const last = out.at(-1);
+    if (last === undefined || last.length + text.length > 84) out.push(text);
+    else out[out.length - 1] = `${last} ${text}`;
+  }
+  return out;
 }
 
 class Form {

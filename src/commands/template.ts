@@ -1,6 +1,7 @@
 import { writeFileSync } from 'node:fs';
 import { vocabulary } from '../assemble/index.ts';
 import { caseTemplate } from '../case/index.ts';
+import { flows } from '../flows/index.ts';
 import { Problem } from '../problems/index.ts';
 import { Args, Base, Flags } from './base.ts';
 
@@ -18,7 +19,7 @@ export default class Template extends Base {
 
   async run(): Promise<object> {
     const { args, flags } = await this.parse(Template);
-    const text = caseTemplate(vocabulary, args.flow);
+    const text = caseTemplate(vocabulary, args.flow, flows[args.flow]?.answers);
     if (flags.into === undefined) this.say(text.trimEnd());
     else write(flags.into, text, flags.force);
     if (flags.into !== undefined) this.remark(`written: ${flags.into}`);

@@ -1,7 +1,7 @@
 import { vocabulary, type Assembled } from '../assemble/index.ts';
 import { readCaseFile } from '../case/index.ts';
 import { setExponents, settleCase, targetSpreads } from '../plan/index.ts';
-import { nearestName, Problem, type ProblemData } from '../problems/index.ts';
+import { inputsInWords, nearestName, Problem, type ProblemData } from '../problems/index.ts';
 import { traceDocument, traceText } from '../report/index.ts';
 import { missing, spreads, trace } from '../workings/index.ts';
 import { Args, Base } from './base.ts';
@@ -48,5 +48,5 @@ function why(assembled: Assembled, id: string): ProblemData {
   if (failure !== undefined) return { ...failure, message: `${id} cannot be computed: ${failure.message}` };
   const paths = missing(workings, id, (path) => assembled.askable(path));
   if (paths === undefined || paths.length === 0) return { code: 'not-computable', message: `${id} is known but has no formula for this case`, expected: 'another flow or regime: no missing input would give it' };
-  return { code: 'missing-input', message: `${id} cannot be computed yet: the case does not give ${paths.map((path) => path.replaceAll('|', ' or ')).join(', ')}`, expected: 'these in the case file' };
+  return { code: 'missing-input', message: `${id} cannot be computed yet: the case does not give ${inputsInWords(paths)}`, expected: 'these in the case file' };
 }

@@ -75,6 +75,7 @@ export const backwardStep: Flow = {
   ],
   walls: ['top', 'bottom'],
   targetWall: 'bottom',
+  answers: ['pressureDrop', 'outletTemperature', 'heatRate', 'heatTransferCoefficient', 'nusselt', 'wallTemperature', 'frictionFactorDarcy', 'wallShear', 'entranceLength', 'reattachmentLength'],
   stations: ['worst', 'target'],
   regions: ['upstream', 'separation', 'recovery'],
   words: { flow: 'backward-step', flowClass: 'internal', imposedFlow: 'yes', wallBounded: 'yes', attached: 'no', separated: 'yes', ductSection: 'flat' },

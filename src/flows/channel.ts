@@ -111,6 +111,7 @@ export const channel: Flow = {
   ],
   walls: ['bottom', 'top'],
   targetWall: 'bottom',
+  answers: ['pressureDrop', 'outletTemperature', 'heatRate', 'heatTransferCoefficient', 'nusselt', 'wallTemperature', 'frictionFactorDarcy', 'wallShear', 'entranceLength'],
   stations: ['worst', 'target'],
   regions: ['entry', 'run'],
   words: { flow: 'channel', flowClass: 'internal', imposedFlow: 'yes', wallBounded: 'yes', attached: 'yes', separated: 'no', ductSection: 'flat' },

@@ -71,6 +71,7 @@ export const cylinder: Flow = {
     { key: 'channelHeight', name: 'height of the channel around the cylinder', unit: 'm', optional: true },
   ],
   walls: [],
+  answers: ['heatRate', 'heatTransferCoefficient', 'nusselt', 'wallTemperature', 'dragCoefficient', 'dragForce', 'sheddingFrequency'],
   stations: ['worst', 'target'],
   regions: ['near', 'wake', 'far'],
   words: { flow: 'cylinder', flowClass: 'body', wallBounded: 'yes', attached: 'no', separated: 'yes', ductSection: 'other' },

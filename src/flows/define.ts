@@ -74,6 +74,8 @@ export interface Flow {
   /** Names of the walls, empty for a lone wall. */
   readonly walls: readonly string[];
   readonly targetWall?: string;
+  /** What targets usually ask for and is estimated here; the examples are tested to give each. */
+  readonly answers: readonly string[];
   readonly stations: readonly string[];
   readonly regions: readonly string[];
   /** Words this flow fixes, by the id of the word. */

@@ -89,6 +89,7 @@ export const duct: Flow = {
   ],
   walls: ['left', 'right', 'top', 'bottom'],
   targetWall: 'bottom',
+  answers: ['pressureDrop', 'outletTemperature', 'heatRate', 'heatTransferCoefficient', 'nusselt', 'wallTemperature', 'frictionFactorDarcy', 'wallShear', 'entranceLength'],
   stations: ['worst', 'target'],
   regions: ['entry', 'run'],
   words: { flow: 'duct', flowClass: 'internal', imposedFlow: 'yes', wallBounded: 'yes', attached: 'yes', separated: 'no', ductSection: 'rectangular', infiniteDepth: 'no' },

@@ -98,6 +98,7 @@ export const general: Flow = {
     { key: 'volume', name: 'volume of the fluid', unit: 'm^3', optional: true },
   ],
   walls: [],
+  answers: ['heatTransferCoefficient', 'nusselt', 'dragCoefficient', 'sheddingFrequency', 'peakSpeed'],
   stations: ['worst', 'target'],
   regions: ['near'],
   words: { flow: 'general', ductSection: 'other' },

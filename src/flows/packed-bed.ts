@@ -109,6 +109,7 @@ export const packedBed: Flow = {
     { key: 'length', name: 'length of the bed', unit: 'm' },
   ],
   walls: [],
+  answers: ['pressureDrop', 'outletTemperature', 'heatRate', 'heatTransferCoefficient', 'nusselt', 'wallTemperature'],
   stations: ['worst', 'target'],
   regions: ['bed', 'free'],
   words: { flow: 'packed-bed', flowClass: 'continuum', imposedFlow: 'yes', wallBounded: 'no', attached: 'yes', separated: 'no', ductSection: 'round', infiniteDepth: 'no' },

@@ -73,6 +73,7 @@ export const pipe: Flow = {
     { key: 'length', name: 'length that counts', unit: 'm' },
   ],
   walls: [],
+  answers: ['pressureDrop', 'outletTemperature', 'heatRate', 'heatTransferCoefficient', 'nusselt', 'wallTemperature', 'frictionFactorDarcy', 'wallShear', 'entranceLength'],
   stations: ['worst', 'target'],
   regions: ['entry', 'run'],
   words: { flow: 'pipe', flowClass: 'internal', imposedFlow: 'yes', wallBounded: 'yes', attached: 'yes', separated: 'no', ductSection: 'round', infiniteDepth: 'no' },

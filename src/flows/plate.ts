@@ -84,6 +84,7 @@ export const plate: Flow = {
     { key: 'unheatedStart', name: 'length before the heating begins', unit: 'm', optional: true },
   ],
   walls: [],
+  answers: ['heatRate', 'heatTransferCoefficient', 'nusselt', 'wallTemperature', 'wallShear', 'skinFrictionCoefficient', 'boundaryLayerThickness', 'thermalLayerThickness'],
   stations: ['worst', 'target'],
   regions: ['surface', 'outside'],
   words: { flow: 'plate', flowClass: 'body', wallBounded: 'yes', attached: 'yes', separated: 'no', ductSection: 'flat' },

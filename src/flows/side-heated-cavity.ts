@@ -66,6 +66,7 @@ export const sideHeatedCavity: Flow = {
   ],
   walls: ['left', 'right', 'top', 'bottom'],
   targetWall: 'left',
+  answers: ['heatRate', 'heatTransferCoefficient', 'nusselt', 'wallTemperature', 'peakSpeed', 'boundaryLayerThickness'],
   stations: ['worst', 'target'],
   regions: ['box'],
   words: { flow: 'side-heated-cavity', flowClass: 'enclosure', imposedFlow: 'no', wallBounded: 'yes', attached: 'yes', separated: 'no', ductSection: 'rectangular', axis: 'upright', ascent: 'up' },

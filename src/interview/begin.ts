@@ -28,7 +28,7 @@ export function startQuestion(state: State, view: View): Question | undefined {
   const next = [...sizes, ...words.needs].find(open);
   if (next !== undefined) return ask(next, scale);
   if (view.can('purpose')) return ask('purpose', 'a limit that it names is held against the estimate');
-  if (view.on.targets.length === 0 && view.can('targets.0.quantity')) return ask('targets.0.quantity', 'what a decision costs is told as a share of it');
+  if (view.on.targets.length === 0 && view.can('targets.0.quantity')) return ask('targets.0.quantity', `what a decision costs is told as a share of it; estimated here: ${view.settled.assembled.flow.answers.join(', ')}`);
   const loose = view.on.targets.map((target) => `${target.path}.within`).find((path) => view.can(path));
   if (loose !== undefined) return ask(loose, 'it sets what may be left out, how fine the mesh is, how long the run');
   const limited = view.on.targets.some((target) => view.settled.assembled.workings.get(`${target.path}.limit`) !== undefined);

@@ -1,3 +1,4 @@
+import { inputsInWords } from '../problems/index.ts';
 import { printNumber } from '../units/index.ts';
 
 /** What the summary reads of a plan. */
@@ -35,7 +36,7 @@ export function summaryOf(made: Planned): readonly string[] {
 
 /** Margin, or what is missing. */
 function behind({ verdict, deciding, missing }: Planned['effects'][number]): string {
-  if (verdict === 'undecided') return missing === undefined || missing.length === 0 ? '' : ` (needs ${missing.map((path) => path.replaceAll('|', ' or ')).join(' and ')})`;
+  if (verdict === 'undecided') return missing === undefined || missing.length === 0 ? '' : ` (needs ${inputsInWords(missing)})`;
   if (deciding?.margin === undefined) return '';
   return deciding.marginKind === 'difference' ? ` (by ${printNumber({ value: deciding.margin, unit: '1', digits: 2 })})` : ` (x ${printNumber({ value: deciding.margin, unit: '1', digits: 2 })})`;
 }

@@ -1,3 +1,4 @@
+import { inputsInWords } from '../problems/index.ts';
 import { inWords } from './say.ts';
 import type { HazardClass, HazardView } from './hazard-view.ts';
 
@@ -11,7 +12,7 @@ const named = (word: string | undefined): string | undefined => (word === undefi
 function judged(on: HazardView, id: string, what: string): string | undefined {
   if (!on.open(id)) return undefined;
   const e = on.effect(id);
-  if (e.verdict === 'undecided') return `${what} is possible: ${e.missing !== undefined && e.missing.length > 0 ? `it cannot be told before ${e.missing.map((m) => m.split('|').join(' or ')).join(', ')} is known` : 'the plan does not judge it yet'}`;
+  if (e.verdict === 'undecided') return `${what} is possible: ${e.missing !== undefined && e.missing.length > 0 ? `it cannot be told before ${inputsInWords(e.missing)} is known` : 'the plan does not judge it yet'}`;
   return `${what} is ${e.verdict === 'include' ? 'expected' : 'close'}${e.deciding === undefined ? '' : `, {${e.deciding.quantity}} against its limits`}`;
 }
 

@@ -1,4 +1,5 @@
 import { sectionNames, type Cell, type Check, type Plan, type PlanEffect, type SectionName } from '../plan/index.ts';
+import { inputsInWords } from '../problems/index.ts';
 import { heading, list, paragraph, tableOf, type Block } from './blocks.ts';
 import { cautionLines, decidingText, factorText, priceText, titled } from './words.ts';
 import { oneLine, type Writing } from './writing.ts';
@@ -108,7 +109,7 @@ function effectNotes(e: PlanEffect, writing: Writing): string[] {
     ...(e.check === undefined ? [] : [`Check: ${writing.fill(e.check)}.`]),
     ...(e.firstRun === undefined ? [] : [e.firstRun === 'keep' ? 'The first run keeps it.' : 'The first run leaves it out.']),
     ...((e.then ?? []).length === 0 ? [] : [`The model then needs: ${(e.then ?? []).map((t) => writing.fill(t)).join('; ')}.`]),
-    ...((e.missing ?? []).length === 0 ? [] : [`Settled by giving ${(e.missing ?? []).map((m) => oneLine(m).replaceAll('|', ' or ')).join(', ')}.`]),
+    ...((e.missing ?? []).length === 0 ? [] : [`Settled by giving ${oneLine(inputsInWords(e.missing ?? []))}.`]),
     ...((e.sources ?? []).length === 0 ? [] : [`Source: ${(e.sources ?? []).map(oneLine).join('; ')}.`]),
   ];
 }

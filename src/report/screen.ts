@@ -1,4 +1,5 @@
 import type { Plan, PlanChoice, PlanEffect, PlanTarget } from '../plan/index.ts';
+import { inputsInWords } from '../problems/index.ts';
 import { broken } from './columns.ts';
 import { cut, fitted, fitting, gutter, joined, noPaint, type Paint, type Part } from './fit.ts';
 import { setUpParts } from './screen-set-up.ts';
@@ -78,7 +79,7 @@ function effectParts(plan: Plan, writing: Writing): Part[] {
   return [
     { label: 'Include', items: sortedBy(of('include'), closeness).map((e) => row(e, decided(e))), least: 6, apart: true },
     { label: 'Check', items: of('borderline').map((e) => row(e, decided(e), e.firstRun === 'leave-out' ? 'first run without it' : 'first run with it', e.check === undefined ? '' : writing.fill(e.check))), least: 3 },
-    { label: 'Open', items: of('undecided').map((e) => row(e, (e.missing ?? []).length === 0 ? writing.fill(e.because) : `needs ${(e.missing ?? []).map((m) => oneLine(m).replaceAll('|', ' or ')).join(', ')}`)), least: 2, warns: true },
+    { label: 'Open', items: of('undecided').map((e) => row(e, (e.missing ?? []).length === 0 ? writing.fill(e.because) : `needs ${oneLine(inputsInWords(e.missing ?? []))}`)), least: 2, warns: true },
     { label: 'Leave out', ...leftOut(plan, sortedBy(of('leave-out'), closeness)), least: 2 },
   ];
 }

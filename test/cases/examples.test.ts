@@ -2,6 +2,7 @@ import { readdirSync, readFileSync } from 'node:fs';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { vocabulary } from '../../src/assemble/index.ts';
 import { readCase } from '../../src/case/index.ts';
+import { flows } from '../../src/flows/index.ts';
 import { plan } from '../../src/plan/index.ts';
 import { planned, type Planned } from './expert.ts';
 
@@ -27,6 +28,12 @@ function read(on: Planned, expression: string): number {
   if (sign === undefined) return of(left);
   return sign === '-' ? of(left) - of(right) : of(left) / of(right);
 }
+
+it.each(Object.values(flows))('each answer that $id offers is estimated in an example of it', async ({ id, answers }) => {
+  const mine = names.filter((name) => readFileSync(new URL(`../../examples/${name}.case.yaml`, import.meta.url), 'utf8').includes(`\nflow: ${id}\n`));
+  const made = await Promise.all(mine.map((name) => planned(name, [], '../../examples')));
+  expect(answers.filter((answer) => made.every((one) => !Number.isFinite(one.n(answer))))).toEqual([]);
+});
 
 it('the opening caution of a plan names the spread of its target, whatever sections are asked for', async () => {
   const name = new URL('../../examples/rinse-line.case.yaml', import.meta.url);

@@ -286,7 +286,7 @@ it('the summary keeps to 80 columns where much is missing', () => {
   const missing = ['packing.voidFraction|porous.voidFraction|sizes.bedDiameter', 'inlet.speed', 'sizes.bedDiameter', 'sizes.length'];
   const lines = summaryOf({ effects: ['compressibility', 'closed-gas-pressure', 'tall-column'].map((id) => ({ id, applies: true, judged: true, verdict: 'undecided', missing: id === 'closed-gas-pressure' ? missing : ['sizes.length'] })), targets: [], quantities: {} });
   expect(Math.max(...lines.map((l) => l.length))).toBeLessThanOrEqual(80);
-  expect(lines.join(' ').replace(/ +/g, ' ')).toContain('closed gas pressure (needs packing.voidFraction or porous.voidFraction or sizes.bedDiameter and inlet.speed and sizes.bedDiameter and sizes.length), tall column (needs sizes.length)');
+  expect(lines.join(' ').replace(/ +/g, ' ')).toContain('closed gas pressure (needs (packing.voidFraction or porous.voidFraction or sizes.bedDiameter) and inlet.speed and sizes.bedDiameter and sizes.length), tall column (needs sizes.length)');
 });
 
 it('the summary holds verdicts with margins, what is undecided with its inputs, and the target with its spread', async () => {

@@ -1,3 +1,4 @@
+import { inputsInWords } from '../../problems/index.ts';
 import { lines, type Ground } from '../ground.ts';
 import { hazardsOf } from '../hazards.ts';
 import { listed } from '../say.ts';
@@ -21,7 +22,7 @@ export function skillLine(on: Ground): Line[] {
 
 /** Points of review with what is open at each in this case. */
 export function reviewTables(on: Ground): Table[] {
-  const open = missingInputs(on).map((m) => m.path.split('|').join(' or '));
+  const open = missingInputs(on).map((m) => inputsInWords([m.path]));
   const border = on.decisions.effects.filter((e) => e.verdict === 'borderline').map((e) => e.id);
   const rungs = on.ladder.map((r) => r.id);
   const filled = (stage: string): string => `from this plan, ${stage}`;
