@@ -12,10 +12,10 @@ const channelFriction = (reynolds: number): number => colebrook({ reynolds: (2 *
 
 const regime: Definition[] = [
   quantity('backwardStepReynolds', { symbol: 'Re_D', name: 'Reynolds number on twice the inlet height', unit: '1' }, [way({ needs: ['reynoldsBulk', 'sizes.inletHeight', 'sizes.stepHeight'], value: (of) => (2 * of.reynoldsBulk * of['sizes.inletHeight']) / of['sizes.stepHeight'], formula: 'Re_D = 2 U H_1/nu', source: definition })]),
-  ways('regimeGroup', [way({ needs: re, value: ({ backwardStepReynolds }) => backwardStepReynolds, formula: 'Re on 2 H_1', source: definition })]),
+  ways('regimeGroup', [way({ needs: re, value: ({ backwardStepReynolds }) => backwardStepReynolds, symbol: 'Re', formula: 'Re on 2 H_1', source: definition })]),
   ways('regimeLow', [way({ needs: [], scatter: 0.1, value: () => 1200, formula: 'Re_lo = 1200', source: armaly })]),
   ways('regimeHigh', [way({ needs: [], scatter: 0.1, value: () => 6600, formula: 'Re_hi = 6600', source: armaly })]),
-  ways('unsteadyGroup', [way({ needs: re, value: ({ backwardStepReynolds }) => backwardStepReynolds, formula: 'Re on 2 H_1', source: definition })]),
+  ways('unsteadyGroup', [way({ needs: re, value: ({ backwardStepReynolds }) => backwardStepReynolds, symbol: 'Re', formula: 'Re on 2 H_1', source: definition })]),
   ways('unsteadyFrom', [way({ needs: [], scatter: 0.2, value: () => 1200, formula: 'Re_on = 1200', source: `${armaly}: steady until transition, three-dimensional from 400` })]),
 ];
 

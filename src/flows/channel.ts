@@ -37,10 +37,10 @@ const scales: Definition[] = [
 ];
 
 const regime: Definition[] = [
-  ways('regimeGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => reynolds / 2, formula: 'Re_b = U H/nu', source: 'definition' })]),
+  ways('regimeGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => reynolds / 2, symbol: 'Re_b', formula: 'Re_b = U H/nu', source: 'definition' })]),
   ways('regimeLow', [way({ needs: [], scatter: 0.1, value: () => 1300, formula: 'Re_lo = 1300', source: 'Patel and Head, J. Fluid Mech. 38 (1969) 181; Carlson, Widnall and Peeters, J. Fluid Mech. 121 (1982) 487' })]),
   ways('regimeHigh', [way({ needs: [], scatter: 0.1, value: () => 3000, formula: 'Re_hi = 3000', source: 'Patel and Head, J. Fluid Mech. 38 (1969) 181' })]),
-  ways('unsteadyGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => (0.75 * reynolds) / 2, formula: 'Re on 1.5 U and H/2', source: 'definition' })]),
+  ways('unsteadyGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => (0.75 * reynolds) / 2, symbol: 'Re_c', formula: 'Re on 1.5 U and H/2', source: 'definition' })]),
   ways('unsteadyFrom', [way({ needs: [], value: () => 5772.22, formula: 'Re_c = 5772.22', source: 'Orszag, J. Fluid Mech. 50 (1971) 689' })]),
 ];
 

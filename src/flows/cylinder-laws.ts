@@ -16,14 +16,14 @@ const limits = (id: string, symbol: string, moving: number, resting: number, sou
 ]);
 const regime: Definition[] = [
   ways('regimeGroup', [
-    way({ needs: ['reynolds'], when: stream, value: ({ reynolds }) => reynolds, formula: 'Re on D', source: definition }),
-    way({ needs: ['rayleighHeight'], when: upright, value: ({ rayleighHeight }) => rayleighHeight, formula: 'Ra on the height', source: definition }),
-    way({ needs: ['rayleigh'], when: lying, value: ({ rayleigh }) => rayleigh, formula: 'Ra on D', source: definition }),
+    way({ needs: ['reynolds'], when: stream, value: ({ reynolds }) => reynolds, symbol: 'Re', formula: 'Re on D', source: definition }),
+    way({ needs: ['rayleighHeight'], when: upright, value: ({ rayleighHeight }) => rayleighHeight, symbol: 'Ra', formula: 'Ra on the height', source: definition }),
+    way({ needs: ['rayleigh'], when: lying, value: ({ rayleigh }) => rayleigh, symbol: 'Ra', formula: 'Ra on D', source: definition }),
   ]),
   limits('regimeLow', 'x_lo', 190, 1e9, 'Williamson, Annu. Rev. Fluid Mech. 28 (1996) 477: the wake turns three-dimensional'),
   limits('regimeHigh', 'x_hi', 300, 1e10, 'Williamson, Annu. Rev. Fluid Mech. 28 (1996) 477: turbulent wake; the layer on the cylinder stays laminar to 2e5'),
   ways('unsteadyGroup', [
-    way({ needs: ['reynolds', 'cylinderPeakRatio'], when: stream, value: ({ reynolds, cylinderPeakRatio }) => reynolds * cylinderPeakRatio, formula: 'Re on D and the peak speed of the stream', source: definition }),
+    way({ needs: ['reynolds', 'cylinderPeakRatio'], when: stream, value: ({ reynolds, cylinderPeakRatio }) => reynolds * cylinderPeakRatio, symbol: 'Re', formula: 'Re on D and the peak speed of the stream', source: definition }),
     way({ needs: ['regimeGroup'], when: still, value: ({ regimeGroup }) => regimeGroup, formula: 'group of the regime', source: definition }),
   ]),
   ways('unsteadyFrom', [

@@ -41,7 +41,7 @@ function plate(): ReturnType<typeof way> {
 
 const limitSource = 'Hartnett, Koh and McComas, J. Heat Transfer 84 (1962) 82 for the square; the flat end meets parallel plates; straight in between';
 const regime: Definition[] = [
-  ways('regimeGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => reynolds, formula: 'Re on D_h', source: 'definition' })]),
+  ways('regimeGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => reynolds, symbol: 'Re', formula: 'Re on D_h', source: 'definition' })]),
   ways('regimeLow', [way({ needs: ['ductAspectRatio'], scatter: 0.1, value: ({ ductAspectRatio }) => 2600 - 600 * ductAspectRatio, formula: 'Re_lo = 2600 - 600 a', source: limitSource })]),
   ways('regimeHigh', [way({ needs: ['ductAspectRatio'], scatter: 0.1, value: ({ ductAspectRatio }) => 6000 - 2000 * ductAspectRatio, formula: 'Re_hi = 6000 - 2000 a', source: limitSource })]),
 ];

@@ -47,15 +47,15 @@ const bands = [
 ];
 const regime: Definition[] = [
   ways('regimeGroup', [
-    way({ needs: ['rayleigh'], when: still, value: ({ rayleigh }) => rayleigh, formula: 'Ra on L', source: analogy }),
-    way({ needs: ['reynolds'], when: { imposedFlow: 'yes' }, value: ({ reynolds }) => reynolds, formula: 'Re on L', source: analogy }),
+    way({ needs: ['rayleigh'], when: still, value: ({ rayleigh }) => rayleigh, symbol: 'Ra', formula: 'Ra on L', source: analogy }),
+    way({ needs: ['reynolds'], when: { imposedFlow: 'yes' }, value: ({ reynolds }) => reynolds, symbol: 'Re', formula: 'Re on L', source: analogy }),
   ]),
   ways('regimeLow', bands.map(([low]) => low)),
   ways('regimeHigh', bands.map(([, high]) => high)),
   ways('unsteadyGroup', [
-    way({ needs: ['rayleigh'], when: still, value: ({ rayleigh }) => rayleigh, formula: 'Ra on L', source: analogy }),
-    way({ needs: ['reynolds'], when: { ...outside, imposedFlow: 'yes' }, value: ({ reynolds }) => reynolds, formula: 'Re on L', source: analogy }),
-    way({ needs: ['reynolds'], when: { ...free, imposedFlow: 'yes' }, value: ({ reynolds }) => reynolds, formula: 'Re on L', source: analogy }),
+    way({ needs: ['rayleigh'], when: still, value: ({ rayleigh }) => rayleigh, symbol: 'Ra', formula: 'Ra on L', source: analogy }),
+    way({ needs: ['reynolds'], when: { ...outside, imposedFlow: 'yes' }, value: ({ reynolds }) => reynolds, symbol: 'Re', formula: 'Re on L', source: analogy }),
+    way({ needs: ['reynolds'], when: { ...free, imposedFlow: 'yes' }, value: ({ reynolds }) => reynolds, symbol: 'Re', formula: 'Re on L', source: analogy }),
   ]),
   ways('unsteadyFrom', [
     way({ needs: [], when: still, scatter: 1, value: () => 1e9, formula: '1e9', source: 'upright layer in still fluid; judged by analogy' }),

@@ -31,10 +31,10 @@ const scales: Definition[] = [
 
 const regime: Definition[] = [
   quantity('packedBedReynoldsPore', { symbol: 'Re_p/(1-e)', name: 'Reynolds number of the pores', unit: '1' }, [way({ needs: ['reynoldsBulk', 'packedBedVoidFraction'], value: ({ reynoldsBulk, packedBedVoidFraction }) => reynoldsBulk / (1 - packedBedVoidFraction), formula: 'Re_p/(1 - e)', source: ergun })]),
-  ways('regimeGroup', [way({ needs: ['reynolds', 'packedBedVoidFraction'], value: ({ reynolds, packedBedVoidFraction }) => reynolds / (1 - packedBedVoidFraction), formula: 'Re_p/(1 - e)', source: 'definition', note: 'speaks of the flow in the pores; the drag law of a bed taken as a continuum holds all of it' })]),
+  ways('regimeGroup', [way({ needs: ['reynolds', 'packedBedVoidFraction'], value: ({ reynolds, packedBedVoidFraction }) => reynolds / (1 - packedBedVoidFraction), symbol: 'Re_p/(1 - e)', formula: 'Re_p/(1 - e)', source: 'definition', note: 'speaks of the flow in the pores; the drag law of a bed taken as a continuum holds all of it' })]),
   ways('regimeLow', [way({ needs: [], scatter: 0.5, value: () => 300, formula: '300', source: 'Dybbs and Edwards, in Fundamentals of Transport Phenomena in Porous Media (1984)' })]),
   ways('regimeHigh', [way({ needs: [], scatter: 0.5, value: () => 1000, formula: '1000', source: 'common practice' })]),
-  ways('unsteadyGroup', [way({ needs: ['regimeGroup'], value: ({ regimeGroup }) => regimeGroup, formula: 'Re_p/(1 - e)', source: 'definition' })]),
+  ways('unsteadyGroup', [way({ needs: ['regimeGroup'], value: ({ regimeGroup }) => regimeGroup, symbol: 'Re_p/(1 - e)', formula: 'Re_p/(1 - e)', source: 'definition' })]),
   ways('unsteadyFrom', [way({ needs: [], scatter: 0.5, value: () => 300, formula: '300', source: 'Dybbs and Edwards, in Fundamentals of Transport Phenomena in Porous Media (1984)' })]),
 ];
 

@@ -24,7 +24,7 @@ const scales: Definition[] = [
 ];
 
 const regime: Definition[] = [
-  ways('regimeGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => reynolds, formula: 'Re on D', source: 'definition' })]),
+  ways('regimeGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => reynolds, symbol: 'Re', formula: 'Re on D', source: 'definition' })]),
   ways('regimeLow', [
     way({ needs: ['rheology.index'], when: { rheologyLaw: 'power-law' }, scatter: 0.1, value: (of) => 2100 + 875 * (1 - of['rheology.index']), formula: 'Re_lo = 2100 + 875 (1 - n)', source: 'Darby, Chemical Engineering Fluid Mechanics, 2nd ed. (2001); 2100 of Metzner and Reed (1955) at n = 1' }),
     way({ needs: [], value: () => 2300, formula: 'Re_lo = 2300', source: 'Schiller 1922; turbulence can be kept up from 2040 on, Avila et al., Science 333 (2011) 192' }),

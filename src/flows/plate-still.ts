@@ -15,8 +15,9 @@ const limit = (n: number, when: When, symbol: string, source: string): ReturnTyp
 const bejan = 'Bejan and Lage, J. Heat Transfer 112 (1990) 787';
 const regime: Definition[] = [
   ways('regimeGroup', [
-    way({ needs: ['plateRayleigh', 'prandtl'], when: standing, value: ({ plateRayleigh, prandtl }) => (prandtl < 0.5 || prandtl > 2 ? plateRayleigh / prandtl : plateRayleigh), formula: 'Ra on the height; Gr where Pr is below 0.5 or above 2', source: bejan }),
-    way({ needs: ['rayleigh'], when: level, value: ({ rayleigh }) => rayleigh, formula: 'Ra on area over perimeter', source: 'definition' }),
+    way({ needs: ['plateRayleigh', 'prandtl'], when: standing, range: { prandtl: [0.5, 2] }, value: ({ plateRayleigh }) => plateRayleigh, symbol: 'Ra', formula: 'Ra on the height, where Pr lies within 0.5 and 2', source: bejan }),
+    way({ needs: ['plateRayleigh', 'prandtl'], when: standing, value: ({ plateRayleigh, prandtl }) => plateRayleigh / prandtl, symbol: 'Gr', formula: 'Gr on the height', source: bejan }),
+    way({ needs: ['rayleigh'], when: level, value: ({ rayleigh }) => rayleigh, symbol: 'Ra', formula: 'Ra on area over perimeter', source: 'definition' }),
   ]),
   ways('regimeLow', [limit(1e9, standing, 'Ra_lo', bejan), limit(8e6, unstable, 'Ra_lo', 'Lloyd and Moran, J. Heat Transfer 96 (1974) 443'), limit(1e10, stable, 'Ra_lo', practice)]),
   ways('regimeHigh', [limit(1e10, standing, 'Ra_hi', bejan), limit(1e8, unstable, 'Ra_hi', practice), limit(1e11, stable, 'Ra_hi', practice)]),

@@ -36,7 +36,7 @@ const regime: Definition[] = [
   quantity('plateTransitionReynolds', { symbol: 'Re_tr', name: 'Reynolds number at which the layer turns turbulent', unit: '1' }),
   transitions('plateTransitionReynolds', 5e5, 'Re_tr', 'Schlichting, Boundary-Layer Theory, ch. 21: 3e5 to 3e6 by the turbulence of the stream; 5e5 belongs to about 1.2 %'),
   transitions('regimeLow', 3e5, 'Re_lo', 'Schlichting, Boundary-Layer Theory, ch. 21; safely laminar below 1e5'),
-  ways('regimeGroup', [way({ needs: ['reynolds'], when: stream, value: ({ reynolds }) => reynolds, formula: 'Re on L', source: definition })]),
+  ways('regimeGroup', [way({ needs: ['reynolds'], when: stream, value: ({ reynolds }) => reynolds, symbol: 'Re', formula: 'Re on L', source: definition })]),
   ways('regimeHigh', [way({ needs: ['regimeLow'], when: stream, scatter: 0.5, value: ({ regimeLow }) => Math.max(3e6, regimeLow), formula: 'Re_hi = 3e6', source: 'Schlichting, Boundary-Layer Theory, ch. 21' })]),
   ways('laminarShare', [way({ needs: ['plateTransitionReynolds', 'reynolds'], when: stream, value: ({ plateTransitionReynolds, reynolds }) => Math.min(1, plateTransitionReynolds / reynolds), formula: 's = Re_tr/Re_L, at most 1', source: definition })]),
 ];

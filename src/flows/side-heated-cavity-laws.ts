@@ -20,8 +20,8 @@ const layersFrom = (of: number): number => 500 * of ** 4;
 
 const regime: Definition[] = [
   ways('regimeGroup', [
-    way({ needs: slotNeeds, range: slot, value: ({ grashof }) => grashof, formula: 'Gr on W, tall slot', source: definition }),
-    way({ needs: ['rayleighHeight'], value: ({ rayleighHeight }) => rayleighHeight, formula: 'Ra on the height', source: definition }),
+    way({ needs: slotNeeds, range: slot, value: ({ grashof }) => grashof, symbol: 'Gr', formula: 'Gr on W, tall slot', source: definition }),
+    way({ needs: ['rayleighHeight'], value: ({ rayleighHeight }) => rayleighHeight, symbol: 'Ra', formula: 'Ra on the height', source: definition }),
   ]),
   ways('regimeLow', [
     way({ needs: slotNeeds, range: slot, scatter: 0.2, value: () => 8000, formula: 'Gr_lo = 8000: cells one above another; below it the flow is parallel', source: cells }),
@@ -32,9 +32,9 @@ const regime: Definition[] = [
     way({ needs: [aspect], scatter: 0.5, value: (of) => Math.max(1e10, layersFrom(of[aspect])), formula: 'Ra_hi = 1e10, not below 500 (H/W)^4', source: `${practice}; ${batchelor}` }),
   ]),
   ways('unsteadyGroup', [
-    way({ needs: ['grashof', aspect], range: { [aspect]: [12, 1e3] }, value: ({ grashof }) => grashof, formula: 'Gr on W, tall slot', source: definition }),
-    way({ needs: ['rayleighHeight', 'prandtl'], range: { prandtl: [1e-4, 0.1] }, value: ({ rayleighHeight, prandtl }) => rayleighHeight / prandtl, formula: 'Gr on the height, Pr below 0.1', source: definition }),
-    way({ needs: ['rayleighHeight'], value: ({ rayleighHeight }) => rayleighHeight, formula: 'Ra on the height', source: definition }),
+    way({ needs: ['grashof', aspect], range: { [aspect]: [12, 1e3] }, value: ({ grashof }) => grashof, symbol: 'Gr', formula: 'Gr on W, tall slot', source: definition }),
+    way({ needs: ['rayleighHeight', 'prandtl'], range: { prandtl: [1e-4, 0.1] }, value: ({ rayleighHeight, prandtl }) => rayleighHeight / prandtl, symbol: 'Gr', formula: 'Gr on the height, Pr below 0.1', source: definition }),
+    way({ needs: ['rayleighHeight'], value: ({ rayleighHeight }) => rayleighHeight, symbol: 'Ra', formula: 'Ra on the height', source: definition }),
   ]),
   ways('unsteadyFrom', [
     way({ needs: [aspect], range: { [aspect]: [12, 1e3] }, scatter: 0.2, value: () => 8000, formula: 'Gr_on = 8000: cells one above another', source: cells }),

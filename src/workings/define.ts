@@ -23,6 +23,8 @@ interface About {
   /** An assumed default or a decided value is listed as such in the plan. */
   readonly as?: 'assumed' | 'decided';
   readonly note?: string;
+  /** Symbol of the quantity where it is got this way, such as Re for a group that is Re here and Ra there. */
+  readonly symbol?: string;
 }
 
 /** One formula for a quantity. */

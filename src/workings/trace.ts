@@ -39,7 +39,7 @@ export function stepOf(workings: Workings, id: string): Step | undefined {
   const loop = bound !== undefined && bound.closes >= 0 ? workings.closed.get(i) : undefined;
   return {
     id,
-    symbol: node.about.symbol,
+    symbol: bound?.way.symbol ?? node.about.symbol,
     name: node.about.name,
     unit: node.about.unit,
     value: isWord ? (workings.wordAt(i) as string) : workings.value(i),
