@@ -131,4 +131,5 @@ export const notComputed: readonly (readonly [RegExp, string])[] = [
   [/^A01-if97-r\d-s-/, 'entropy is not computed: nothing in a plan needs it'],
   [/^A03-ussa/, 'the standard atmosphere is no property of a material'],
   [/^A06-vdi-mul-methane-111/, 'the literature differs: this table value lies 9 % below both handbooks (Perry 116.7, VDI equation 117.8 uPa s) and below the reference correlation (116.9)'],
+  [/^A07-k-iceat273K$/, 'the literature differs: the textbook prints 1.88 W/(m K); Andersson and Inaba (2005) give 2.16, Fukusako (1990) 2.22, Yen (1981) 2.07, ISO 10456 2.2'],
 ];
