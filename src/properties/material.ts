@@ -25,6 +25,8 @@ export interface Material {
   readonly triple?: { readonly temperature: number; readonly pressure: number };
   /** At atmospheric pressure [K]. */
   readonly meltingTemperature?: number;
+  /** Of an amorphous solid, at atmospheric pressure [K]. */
+  readonly glassTransitionTemperature?: number;
   readonly takes: readonly ('humidity' | 'composition' | 'components')[];
   /** Ids of the properties that it has in some phase. */
   readonly properties: readonly PropertyId[];
@@ -172,7 +174,10 @@ export function materialOf(record: MaterialRecord, collection: Collection, asked
   if (has.has('density') && has.has('specificHeatCapacity') && has.has('thermalConductivity')) has.add('thermalDiffusivity');
   if (has.has('kinematicViscosity') && has.has('thermalDiffusivity')) has.add('prandtl');
   if (record.molarMass !== undefined) has.add('molarMass');
-  const melting = record.properties['meltingTemperature']?.[0];
+  const turns = (id: 'meltingTemperature' | 'glassTransitionTemperature'): { [at in typeof id]?: number } => {
+    const entry = record.properties[id]?.[0];
+    return entry === undefined ? {} : { [id]: engine.evaluate(entry, { T: Number.NaN, p: 101325, side: 'liquid', x: 0 }) };
+  };
   return {
     id: record.id,
     name: record.name,
@@ -185,7 +190,8 @@ export function materialOf(record: MaterialRecord, collection: Collection, asked
     ...(record.flashPoint === undefined ? {} : { flashPoint: record.flashPoint }),
     ...(record.critical === undefined ? {} : { critical: record.critical }),
     ...(record.triplePoint === undefined ? {} : { triple: record.triplePoint }),
-    ...(melting === undefined ? {} : { meltingTemperature: engine.evaluate(melting, { T: Number.NaN, p: 101325, side: 'liquid', x: 0 }) }),
+    ...turns('meltingTemperature'),
+    ...turns('glassTransitionTemperature'),
     takes: record.takes,
     properties: (Object.keys(propertyUnits) as PropertyId[]).filter((id) => has.has(id)),
     ...(asked === undefined ? {} : { asked }),

@@ -19,6 +19,7 @@ export const propertyNames: { readonly [id in PropertyId]: string } = {
   latentHeat: 'latent heat of vaporisation',
   surfaceTension: 'surface tension',
   meltingTemperature: 'melting temperature',
+  glassTransitionTemperature: 'glass transition temperature',
   fusionHeat: 'latent heat of fusion',
   molarMass: 'molar mass',
   electricalConductivity: 'electrical conductivity',

@@ -93,8 +93,9 @@ export function phaseAt(material: Material, T: number, p: number, x = 0): PhaseA
   if (!(p > 0 && Number.isFinite(p))) throw new Problem({ code: 'impossible-state', message: `an absolute pressure of ${p} Pa does not exist`, expected: 'an absolute pressure above 0 Pa' });
   const flags: string[] = [];
   if (material.kind === 'solid') {
-    const melting = material.meltingTemperature;
+    const { meltingTemperature: melting, glassTransitionTemperature: softening } = material;
     if (melting !== undefined && T > melting) flags.push(`above the melting temperature of ${K(melting)}`);
+    if (softening !== undefined && T > softening) flags.push(`above the glass transition temperature of ${K(softening)}, where it softens`);
     return { phase: 'solid', flags };
   }
   const frozen = meltingAt(material, T, p, x);

@@ -19,6 +19,7 @@ export const propertyUnits = {
   latentHeat: 'J/kg',
   surfaceTension: 'N/m',
   meltingTemperature: 'K',
+  glassTransitionTemperature: 'K',
   fusionHeat: 'J/kg',
   molarMass: 'kg/mol',
   electricalConductivity: 'S/m',
