@@ -52,6 +52,13 @@ describe('phases', () => {
     [263.15, 1e5, 'solid'],
   ])('water at %d K and %d Pa is %s', (T, p, phase) => expect(phaseAt(loadMaterial('water'), T, p).phase).toBe(phase));
 
+  it('warns of an amorphous solid above its glass transition, of which it names no melting point', () => {
+    const found = phaseAt(loadMaterial('polystyrene'), 380, 1e5); // glass transition 373 K, Brandrup, Polymer Handbook, 4th ed. (1999)
+    expect(found.flags.join()).toContain('above the glass transition temperature of 373 K (99.85 degC), where it softens');
+    expect(phaseAt(loadMaterial('polystyrene'), 370, 1e5).flags).toEqual([]);
+    expect(loadMaterial('polystyrene').meltingTemperature).toBeUndefined();
+  });
+
   it('gives saturation and warns near the critical point', () => {
     const found = phaseAt(loadMaterial('water'), 640, 21e6);
     expect(found.saturation?.pressure).toBeCloseTo(20.265e6, -4);
