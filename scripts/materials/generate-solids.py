@@ -134,18 +134,18 @@ BETWEEN = 'between ISO 10456:2007'
 INSTEAD = {
     'bitumen': (None, None, 1740, 'heat capacity of petroleum asphalts, 1.67 kJ/(kg K) at 0 degC to 1.9 at 80 degC, handbooks, from memory; ISO 10456 prints 1.0'),
     'plasterboard': (750, 0.21, None, f'{BETWEEN} (900 kg/m^3, 0.25 W/(m K)) and the ASHRAE Handbook (640 kg/m^3, 0.16 W/(m K)), as in ht 1.2.0'),
-    'plywood': (None, 0.12, 1500, f'{BETWEEN} (0.13 W/(m K), 1600 J/(kg K)), the ASHRAE Handbook (0.09 to 0.10, 1880), both as in ht 1.2.0, and {A3} (0.12, 1215)'),
-    'particleboard': (None, 0.12, 1500, f'{BETWEEN} (0.14 W/(m K), 1700 J/(kg K)) and the ASHRAE Handbook (0.102, 1300), as in ht 1.2.0'),
+    'plywood': (None, 0.12, 1500, f'conductivity and heat capacity {BETWEEN} (0.13 W/(m K), 1600 J/(kg K)), the ASHRAE Handbook (0.09 to 0.10, 1880), both as in ht 1.2.0, and {A3} (0.12, 1215)'),
+    'particleboard': (None, 0.12, 1500, f'conductivity and heat capacity {BETWEEN} (0.14 W/(m K), 1700 J/(kg K)) and the ASHRAE Handbook (0.102, 1300), as in ht 1.2.0'),
     'medium-density fibreboard': (None, 0.14, 1500, f'EN 13986 (0.14 W/(m K) at 800 kg/m^3, from memory), {BETWEEN} (0.18, 1700 J/(kg K)) and the ASHRAE Handbook (hardboard, 0.105, 1300), as in ht 1.2.0'),
     'clay': (None, None, 1400, f'heat capacity with 20 % water; ISO 10456 prints 2085, {A3}, 880'),
     'natural rubber': (None, None, 1900, 'heat capacity of Wood and Bekkedahl, J. Appl. Phys. 17 (1946) 362, 1.9 kJ/(kg K), from memory; ISO 10456 prints 1.1'),
     'EPDM rubber': (None, None, 1800, 'heat capacity of filled vulcanizates, 1.7 to 2.0 kJ/(kg K), polymer handbooks, from memory; ISO 10456 prints 1.0'),
     'butyl rubber': (1100, 0.18, 1700, f'{BETWEEN} (filled: 1200 kg/m^3, 0.24 W/(m K), 1400 J/(kg K)) and the gum of polymer handbooks (920, 0.13, 1950)'),
-    'silicone rubber': (None, 0.25, 1300, f'{BETWEEN} (0.35 W/(m K), 1000 J/(kg K)) and the gum of polymer handbooks (0.18, 1460)'),
+    'silicone rubber': (None, 0.25, 1300, f'conductivity and heat capacity {BETWEEN} (0.35 W/(m K), 1000 J/(kg K)) and the gum of polymer handbooks (0.18, 1460)'),
     'elastomeric foam': (None, 0.037, None, 'conductivity of EN 14304, usual declared values, from memory; ISO 10456 prints 0.05 for a sealing strip'),
     'polyethylene high density': (955, None, None, 'density of polymer handbooks, 941 to 965 kg/m^3, from memory; ISO 10456 prints 980'),
-    'polystyrene': (None, None, 1250, f'{BETWEEN} (1300 J/(kg K)) and polymer handbooks (1220 at 298 K)'), 'polymethyl methacrylate': (None, None, 1420, f'{BETWEEN} (1500 J/(kg K)) and polymer handbooks (1370 at 298 K)'),
-    'polypropylene': (None, None, 1700, f'{BETWEEN} (1800 J/(kg K)) and polymer handbooks (1650 at 298 K)'), 'polyamide': (None, None, 1520, f'{BETWEEN} (1600 J/(kg K)) and polymer handbooks (1480 at 298 K)'),
+    'polystyrene': (None, None, 1250, f'heat capacity {BETWEEN} (1300 J/(kg K)) and polymer handbooks (1220 at 298 K)'), 'polymethyl methacrylate': (None, None, 1420, f'heat capacity {BETWEEN} (1500 J/(kg K)) and polymer handbooks (1370 at 298 K)'),
+    'polypropylene': (None, None, 1700, f'heat capacity {BETWEEN} (1800 J/(kg K)) and polymer handbooks (1650 at 298 K)'), 'polyamide': (None, None, 1520, f'heat capacity {BETWEEN} (1600 J/(kg K)) and polymer handbooks (1480 at 298 K)'),
 }
 # Amorphous plastics have no melting point: they soften at the glass transition.
 GLASS = {'polycarbonate': 420, 'polyvinyl chloride': 355, 'polymethyl methacrylate': 378, 'polystyrene': 373, 'acrylonitrile butadiene styrene': 378, 'polyimide': 660}
