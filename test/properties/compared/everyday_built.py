@@ -84,7 +84,7 @@ def built():
         add('circuit board FR-4', K, T, 10 ** sum(a * math.log10(T) ** i for i, a in enumerate((-4.1236, 13.788, -26.068, 26.272, -14.663, 4.4954, -0.6905, 0.0397))), 'nist cryogenic')
         add('circuit board FR-4', CP, T, 10 ** sum(a * math.log10(T) ** i for i, a in enumerate((-2.4083, 7.6006, -8.2982, 7.3301, -4.2386, 1.4294, -0.24396, 0.015236))), 'nist cryogenic')
     # Amorphous polymers below their glass transition: conductivity of handbooks at 293 K with the power 0.22 of the temperature, Bicerano 1996.
-    for name, k in (('polystyrene', 0.142), ('polymethyl methacrylate', 0.193), ('polycarbonate', 0.193), ('polyvinyl chloride', 0.16), ('acrylonitrile butadiene styrene', 0.17), ('epoxy resin', 0.19), ('polyester resin', 0.17), ('phenolic resin', 0.233), ('polyethylene terephthalate', 0.218)):
+    for name, k in (('polystyrene', 0.142), ('polymethyl methacrylate', 0.193), ('polycarbonate', 0.193), ('polyvinyl chloride', 0.16), ('epoxy resin', 0.19), ('polyester resin', 0.17), ('phenolic resin', 0.233)):
         for T in between(273.15, 333.15, 5):
             add(name, K, T, k * (T / 293.15) ** 0.22, 'polymer handbooks with the change of bicerano (from memory)')
     for name, key in (('polyamide', Nylon), ('polytetrafluoroethylene', Teflon), ('circuit board FR-4', G10norm)):

@@ -2,7 +2,7 @@
 
 Values of POINTS are from memory of the work named; their references say so.
 """
-from everyday_states import BETA, CP, GLASS, K, MELT, RHO
+from everyday_states import BETA, CP, K, RHO
 
 # Record, entry of ISO 10456, properties. ISO prints 1000 J/(kg K) for all stone, a rounded design value: left out where the minerals tell the heat capacity.
 BUILDING_ISO = [
@@ -11,7 +11,7 @@ BUILDING_ISO = [
     ('plywood', 'Wood, plywood 500 kg/m^3', 'rkc'), ('particleboard', 'Wood, particleboard, 600 kg/m^3', 'rkc'), ('medium-density fibreboard', 'Wood, fibreboard, 800 kg/m^3', 'rkc'), ('plasterboard', 'Gypsum, plasterboard', 'rk'), ('elastomeric foam', 'Sealant, elastomeric foam, flexible', 'k'),
     ('butyl rubber', 'Rubber, butyl (isobutene), solid melt', 'rkc'), ('silicone rubber', 'Sealant, silicone, pure', 'kc'), ('clay', 'Solids, clay or silt', 'c'), ('polystyrene', 'Plastics, polystyrene', 'c'), ('polymethyl methacrylate', 'Plastics, polymethylmethacrylate (PMMA)', 'c'), ('polypropylene', 'Plastics, polypropylene', 'c'), ('polyamide', 'Plastics, polyamide (nylon)', 'c'), ('polyethylene high density', 'Plastics, polyethylene / polythene, high density', 'r'),
     
-    ('fresh snow', 'Water, snow, freshly fallen (<30 mm)', 'k'), ('settled snow', 'Water, snow, soft (30 mm to 70 mm)', 'k'), ('packed snow', 'Water, snow, compacted (<200 mm)', 'k'), ('silica gel', 'Sealant, silica gel (dessicant)', 'k'), ('felt of fibres', 'Floor covering, underlay, wool', 'kc'),
+    ('fresh snow', 'Water, snow, freshly fallen (<30 mm)', 'k'), ('settled snow', 'Water, snow, soft (30 mm to 70 mm)', 'k'), ('packed snow', 'Water, snow, compacted (<200 mm)', 'k'), ('silica gel', 'Sealant, silica gel (dessicant)', 'k'), ('felt of fibres', 'Floor covering, underlay, wool', 'k'),
 ]
 
 # Record, entries of the ASHRAE handbook, properties. The plaster board of that table carries the heat capacity of wood boards (1880): left out.
@@ -44,12 +44,10 @@ COMPOSITIONS = [
 TISSUES = [('muscle', 0.741, 0.20, 0.04), ('fat tissue', 0.20, 0.05, 0.74), ('skin', 0.65, 0.25, 0.08), ('liver tissue', 0.72, 0.20, 0.06), ('brain tissue', 0.79, 0.10, 0.09), ('kidney tissue', 0.77, 0.17, 0.05), ('lung tissue', 0.80, 0.17, 0.02)]
 
 MEMORY = [
-    # Mark, Physical Properties of Polymers Handbook, 2nd ed. (2007); Brandrup, Polymer Handbook, 4th ed. (1999).
+    # Mark, Physical Properties of Polymers Handbook, 2nd ed. (2007); Brandrup, Polymer Handbook, 4th ed. (1999): for records that stand on another work.
     ('polymer handbooks', 293.15, [
-        ('polystyrene', {BETA: 2.2e-4, GLASS: 373}), ('polymethyl methacrylate', {BETA: 2.3e-4, GLASS: 378}), ('polycarbonate', {BETA: 2.1e-4, GLASS: 423}), ('polyvinyl chloride', {BETA: 2.1e-4, GLASS: 354}), ('polytetrafluoroethylene', {K: 0.25, CP: 1020, MELT: 600}),
-        ('polyamide', {K: 0.243, MELT: 496}), ('polypropylene', {K: 0.21, MELT: 438}), ('polyethylene high density', {K: 0.44, MELT: 407}), ('polyethylene low density', {K: 0.33, CP: 2100, MELT: 385}), ('polyoxymethylene', {K: 0.29, MELT: 448}), ('polyethylene terephthalate', {MELT: 538}), ('polyvinylidene fluoride', {K: 0.18, MELT: 447}),
-        ('polyether ether ketone', {RHO: 1300, K: 0.25, MELT: 612}), ('polyimide', {GLASS: 658}), ('acrylonitrile butadiene styrene', {RHO: 1050, GLASS: 378}), ('epoxy resin', {RHO: 1170}), ('polyester resin', {RHO: 1350}), ('polyurethane', {K: 0.21}),
-        ('natural rubber', {K: 0.134, BETA: 6.6e-4}), ('chloroprene rubber', {K: 0.19}), ('butyl rubber', {K: 0.13, CP: 1950}), ('silicone rubber', {K: 0.18, CP: 1460}),
+        ('polytetrafluoroethylene', {K: 0.25, CP: 1020}), ('polyamide', {K: 0.243}), ('polypropylene', {K: 0.21}), ('polyethylene high density', {K: 0.44}), ('polyethylene low density', {K: 0.33, CP: 2100}), ('polyoxymethylene', {K: 0.29}),
+        ('epoxy resin', {RHO: 1170}), ('polyester resin', {RHO: 1350}), ('polyurethane', {K: 0.21}), ('natural rubber', {K: 0.134}), ('chloroprene rubber', {K: 0.19}), ('butyl rubber', {K: 0.13, CP: 1950}), ('silicone rubber', {K: 0.18, CP: 1460}),
     ]),
     ('bergman table A.3', 300, [
         ('natural rubber', {RHO: 1100, CP: 2010}), ('hard rubber', {RHO: 1190, K: 0.16}), ('asphalt', {RHO: 2115}), ('soil', {K: 0.52}), ('plywood', {RHO: 545, K: 0.12, CP: 1215}), ('particleboard', {RHO: 590, CP: 1300}), ('plasterboard', {RHO: 800, K: 0.17}), ('clay', {RHO: 1460, K: 1.3, CP: 880}), ('cement plaster', {RHO: 1860, K: 0.72, CP: 780}), ('oak', {K: 0.16}),

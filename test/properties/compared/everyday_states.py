@@ -1,6 +1,6 @@
 """The rows that everyday-solids.py writes, and what its parts share: names of properties, steps, the change of heat capacities with temperature."""
 ROWS = []
-RHO, K, CP, BETA, MELT, GLASS = 'density', 'thermalConductivity', 'specificHeatCapacity', 'thermalExpansion', 'meltingTemperature', 'glassTransitionTemperature'
+RHO, K, CP, BETA = 'density', 'thermalConductivity', 'specificHeatCapacity', 'thermalExpansion'
 
 
 def add(material, prop, T, value, reference):
