@@ -1,46 +1,19 @@
-"""Records of solids: metals and alloys, refractories, ceramics, glass, plastics, rubbers, woods, soils, building materials, insulations,
+"""Records of solids: glass, plastics, rubbers, woods, soils, building materials, insulations,
 snow, phase-change materials, catalyst supports, food, tissue, rocks, and beds.
 
 Run with:  python3 scripts/materials/generate-solids.py   (needs ht 1.2.0)
-Tables of ht (MIT licence): refractories of the VDI Heat Atlas, building materials of ISO 10456, building materials of the ASHRAE
-Handbook. Metals stand in metals.csv beside this file, as printed by Bergman et al.; other values state their source.
+Tables of ht (MIT licence): building materials of ISO 10456, building materials of the ASHRAE Handbook; other values state their
+source. Metals, bricks and ceramics: generate-metals.py.
 """
-import csv
-import os
-from importlib import import_module
-
-from ht.insulation import ASHRAE, building_materials, refractories, refractory_VDI_k
+from ht.insulation import ASHRAE, building_materials
 
 from record import K, write
+from solid_entries import BERGMAN, constant, emissivity, expansion, melting, table
 
 BY = 'generate-solids.py'
-BERGMAN = 'Bergman, Lavine, Incropera and DeWitt, Fundamentals of Heat and Mass Transfer, 7th ed. (2011)'
-VDI = 'VDI Heat Atlas, 2nd ed. (2010), refractories, as in ht 1.2.0 (MIT licence)'
 ISO = 'ISO 10456:2007, design values, as in ht 1.2.0 (MIT licence)'
 HANDBOOK = 'ASHRAE Handbook, Fundamentals (2013), chapter 26, as in ht 1.2.0 (MIT licence)'
 ROOM = (263.15, 333.15)
-
-
-def constant(value, T, uncertainty, source, **more):
-    return {'model': 'constant', 'range': {'T': K(*T)}, 'uncertainty': uncertainty, 'source': source, **more, 'constants': {'value': value}}
-
-
-def table(rows, uncertainty, source, unit, **more):
-    return {'model': 'table', 'range': {'T': K(rows[0][0], rows[-1][0])}, 'uncertainty': uncertainty, 'source': source, **more, 'constants': {'gives': unit, 'rows': rows}}
-
-
-def melting(value, source, uncertainty='0.5 %'):
-    return {'model': 'constant', 'range': {'p': ['0 Pa', '10 MPa']}, 'uncertainty': uncertainty, 'source': source, 'constants': {'value': f'{value} K'}}
-
-
-def expansion(linear, T, source='linear expansion of handbooks times three, from memory', uncertainty='12 %'):
-    """From the linear coefficient [1e-6 1/K]."""
-    return constant(f'{3 * linear:.4g}e-6 1/K', T, uncertainty, source)
-
-
-def emissivity(surfaces, source):
-    """Rows of surface, temperatures, value, relative half-width in percent."""
-    return [{'model': 'constant', 'surface': s, 'range': {'T': K(*T)}, 'uncertainty': f'{u} %', 'source': source, 'constants': {'value': e}} for s, T, e, u in surfaces]
 
 
 def solid(name, aliases, rho, k, cp, T, source, spread, about=None, checks=None, more=None, kind='solid'):
@@ -58,58 +31,6 @@ def solid(name, aliases, rho, k, cp, T, source, spread, about=None, checks=None,
 def check(unit, value, within, source):
     return [{'at': {'T': '300 K'}, 'expect': f'{value:g} {unit}', 'within': f'{within} %', 'source': source}]
 
-
-# Metals and alloys: rows of metals.csv, values by temperature as printed.
-# Alloys of metals.csv that the book does not list.
-SHEETS = {'galvanised steel', 'titanium alloy Ti-6Al-4V', 'nickel alloy 625', 'nickel alloy 718', 'aluminium alloy 6061', 'aluminium alloy 5083', 'aluminium alloy 7075', 'cast alloy AlSi10Mg', 'copper-nickel 90-10', 'duplex steel 2205', 'invar', 'magnesium alloy AZ91'}
-
-
-# Heat capacity peaks where iron, nickel and cobalt lose their magnetism: the table does not follow them.
-PEAKS = {'nickel': (550, 700), 'iron': (850, 1000)}
-
-
-# Where the table of the textbook is overtaken.
-MELTS_NOW = {'chromium': 'CRC Handbook of Chemistry and Physics, 97th ed. (2016), as in chemicals 1.5.2; the textbook has 2118 K'}
-
-
-def metals():
-    with open(os.path.join(os.path.dirname(os.path.abspath(__file__)), 'metals.csv')) as file:
-        for row in csv.DictReader(file):
-            pairs = lambda text: [[float(T), float(v)] for T, v in (pair.split(':') for pair in text.split())]
-            k, cp = pairs(row['k']), pairs(row['cp'])
-            T = (min(k[0][0], cp[0][0]), max(k[-1][0], cp[-1][0]))
-            source = f'{BERGMAN}, table A.1, from memory' if row['name'] not in SHEETS else 'data sheets of the alloy and MIL-HDBK-5J (2003), from memory'
-            alloy = row['kind'] == 'alloy'
-            one = lambda rows, uncertainty, unit: table(rows, uncertainty, source, unit) if len(rows) > 1 else {**constant(f'{rows[0][1]:g} {unit}', (rows[0][0] - 100, rows[0][0] + 100), uncertainty, source)}
-            record = {'name': row['name'], **({'formula': row['formula']} if row['formula'] else {}), 'aliases': [a for a in row['aliases'].split('|') if a], 'kind': 'solid', 'phases': ['solid'], **({'about': row['about']} if row['about'] else {}),
-                      'density': constant(f'{row["rho"]} kg/m^3', T, '2 %', source),
-                      'thermalConductivity': one(k, '8 %' if alloy else '5 %', 'W/(m K)'), 'specificHeatCapacity': one(cp, '5 %' if alloy else '4 %', 'J/(kg K)'),
-                      'thermalExpansion': expansion(float(row['linear']), (273.15, 473.15)), 'meltingTemperature': melting(row['mp'], MELTS_NOW.get(row['name'], source))}
-            if row['name'] in PEAKS:
-                record['specificHeatCapacity']['uncertainty'] = [{'T': K(*PEAKS[row['name']]), 'value': '15 %'}, {'value': '4 %'}]
-            surfaces = [(s, (float(a), float(b)), float(e), int(u)) for s, a, b, e, u in (one.split(':') for one in row['emissivity'].split('|') if one)]
-            if surfaces:
-                record['emissivity'] = emissivity(surfaces, f'{BERGMAN}, table A.11, and handbook tables of emissivity, from memory')
-            write(record, BY + ' from metals.csv')
-
-
-metals()
-
-# Refractories.
-for theirs, name, aliases, mp in (
-    ('Silica', 'silica brick', ['silica refractory'], 1970), ('Fireclay', 'fireclay brick', ['fireclay', 'chamotte', 'chamotte brick', 'fire brick', 'firebrick'], 1970), ('High-duty fireclay', 'high-duty fireclay brick', [], 2000),
-    ('Sillimanite', 'sillimanite brick', [], 2090), ('Mullite', 'mullite brick', ['mullite'], 2120), ('Corundum 90%', 'corundum brick 90', ['high-alumina brick'], 2270), ('Corundum 99%', 'corundum brick 99', ['alumina brick'], 2300),
-    ('Bauxite', 'bauxite brick', [], 2090), ('Magnesia', 'magnesia brick', ['magnesite brick'], 3000), ('Magnesite Chrome', 'magnesia-chrome brick', ['magnesite-chrome brick'], 2600), ('Dolomite P10', 'dolomite brick', [], 2600),
-    ('Zirconia', 'zirconia brick', [], 2900), ('Zircon', 'zircon brick', [], 2800), ('AZS 33', 'fused-cast AZS 33', ['AZS 33', 'alumina-zirconia-silica'], 2100), ('SIC 90%', 'silicon carbide brick', ['SiC brick', 'SiC refractory'], 2500), ('L1260', 'insulating fire brick 1260', ['insulating brick', 'insulating firebrick', 'IFB 23'], 1700),
-    ('L1540', 'insulating fire brick 1540', ['IFB 28'], 1950), ('Carbon, anthracite', 'carbon brick', [], 3800), ('Carbon, graphite', 'graphite brick', [], 3800), ('Fused silica', 'fused silica brick', [], 1970),
-):
-    rho, ks, cps = refractories[theirs]
-    T = (673.15, 873.15, 1073.15, 1273.15, 1473.15)
-    assert refractory_VDI_k(theirs, T[2]) == ks[2]
-    write({'name': name, 'aliases': aliases, 'kind': 'solid', 'phases': ['solid'], 'about': 'porosity moves the conductivity; below 400 degC carried from there',
-           'density': constant(f'{rho:g} kg/m^3', (293.15, 1473.15), '5 %', VDI), 'thermalConductivity': table([[t, v] for t, v in zip(T, ks)], '20 %', VDI, 'W/(m K)'), 'specificHeatCapacity': table([[t, v] for t, v in zip(T, cps)], '8 %', VDI, 'J/(kg K)'),
-           'emissivity': emissivity([('rough', (1000, 1500), 0.75, 20)], 'fireclay and other refractories, 0.6 to 0.9, handbook tables of emissivity, from memory'),
-           'meltingTemperature': melting(mp, 'usual refractoriness of the class, from memory', '5 %')}, BY)
 
 # Building materials, plastics, rubbers, woods, stone: ISO 10456, with the ASHRAE handbook as a second table where it has the material.
 A3 = f'{BERGMAN}, table A.3, from memory'
@@ -157,7 +78,7 @@ def transition(name):
 
 
 for theirs, name, aliases, spread, checks in BUILDING:
-    if name is None:
+    if name is None or name in ('quartz glass', 'cast iron'):  # in generate-metals.py, with more temperatures
         continue
     own = INSTEAD.get(name, (None, None, None, None))
     rho, k, cp = (mine or theirs_ for mine, theirs_ in zip(own, building_materials[theirs]))
@@ -219,23 +140,6 @@ for name, aliases, rho, rows, cp, T, source, spread, about in (
     T = (rows[0][0], rows[-1][0])
     within = [{'T': K(*COMPARED[name]), 'value': f'{spread[1]} %'}, {'value': f'{2 * spread[1]} %'}] if name in COMPARED else f'{spread[1]} %'
     write({'name': name, 'aliases': aliases, 'kind': 'solid', 'phases': ['solid'], **({'about': about} if about else {}), 'density': constant(f'{rho} kg/m^3', T, f'{spread[0]} %', source), 'thermalConductivity': table(rows, within, source, 'W/(m K)'), 'specificHeatCapacity': constant(f'{cp} J/(kg K)', T, f'{spread[2]} %', source)}, BY)
-
-# Ceramics, glass and carbon by temperature.
-A2 = f'{BERGMAN}, table A.2, from memory'
-for name, formula, aliases, rho, k, cp, linear, mp, spread in (
-    ('silicon carbide', 'SiC', ['sintered silicon carbide'], 3160, [[300, 490], [1000, 87], [1200, 58], [1500, 30]], [[300, 675], [400, 880], [600, 1050], [800, 1135], [1000, 1195], [1200, 1243]], 4.0, 3100, '60 %'),
-    ('silicon nitride', 'Si3N4', [], 2400, [[300, 16.0], [400, 13.9], [600, 11.3], [800, 9.88], [1000, 8.76], [1200, 8.00]], [[300, 691], [400, 778], [600, 937], [800, 1063], [1000, 1155], [1200, 1226]], 3.0, 2173, '30 %'),
-    ('zirconium dioxide', 'ZrO2', ['zirconia', 'stabilised zirconia', 'YSZ'], 6000, [[300, 2.2], [600, 2.1], [900, 2.1], [1200, 2.1]], [[300, 450], [600, 560], [900, 600], [1200, 630]], 10.5, 2950, '20 %'),
-    ('aluminium nitride', 'AlN', ['aluminum nitride'], 3260, [[300, 170], [400, 130], [600, 90], [800, 67]], [[300, 740], [400, 880], [600, 1030], [800, 1110]], 4.5, 2700, '20 %'),
-    ('beryllium oxide', 'BeO', ['beryllia'], 3000, [[300, 272], [400, 196], [600, 111], [800, 70], [1000, 47], [1200, 33]], [[300, 1030], [400, 1350], [600, 1690], [800, 1865], [1000, 1975], [1200, 2055]], 8.0, 2725, '10 %'),
-    ('titanium dioxide', 'TiO2', ['titania', 'rutile'], 4157, [[300, 8.4], [400, 7.01], [600, 5.02], [800, 3.94], [1000, 3.46], [1200, 3.28]], [[300, 710], [400, 805], [600, 880], [800, 910], [1000, 930], [1200, 945]], 8.5, 2133, '15 %'),
-    ('glass ceramic', None, ['glass-ceramic'], 2600, [[300, 3.98], [400, 3.64], [600, 3.28], [800, 3.08], [1000, 2.96]], [[300, 808], [400, 908], [600, 1038], [800, 1122], [1000, 1197]], 5.7, 1623, '6 %'),
-    ('graphite', None, ['isotropic graphite', 'electrographite'], 1800, [[300, 105], [500, 88], [800, 66], [1200, 48], [1600, 38]], [[300, 715], [500, 1210], [800, 1640], [1200, 1900], [1600, 2030]], 4.5, 3900, '30 %'),
-    ('magnesium oxide', 'MgO', ['magnesia', 'periclase'], 3500, [[300, 48], [400, 36], [600, 22], [800, 15.5], [1000, 11.5], [1300, 8.5]], [[300, 935], [400, 1030], [600, 1150], [800, 1200], [1000, 1230], [1300, 1280]], 12.5, 3098, '15 %'),
-):
-    T = (300, k[-1][0])
-    source = A2 if formula not in ('ZrO2', 'AlN', 'MgO') and name != 'graphite' else 'usual values of dense technical grades, from memory'
-    write({'name': name, **({'formula': formula} if formula else {}), 'aliases': aliases, 'kind': 'solid', 'phases': ['solid'], 'density': constant(f'{rho} kg/m^3', T, '5 %', source), 'thermalConductivity': table(k, spread, source, 'W/(m K)'), 'specificHeatCapacity': table(cp, '6 %', source, 'J/(kg K)'), 'thermalExpansion': expansion(linear, (300, 600), 'linear expansion of handbooks times three, from memory', '25 %'), 'meltingTemperature': melting(mp, source, '3 %')}, BY)
 
 # Plastics and composites that ISO 10456 does not list.
 POLYMER = 'polymer handbooks, usual grades, from memory'
