@@ -120,7 +120,7 @@ for theirs, name, aliases, mp in (
     ('Silica', 'silica brick', ['silica refractory'], 1970), ('Fireclay', 'fireclay brick', ['fireclay', 'chamotte', 'chamotte brick', 'fire brick', 'firebrick'], 1970), ('High-duty fireclay', 'high-duty fireclay brick', [], 2000),
     ('Sillimanite', 'sillimanite brick', [], 2090), ('Mullite', 'mullite brick', ['mullite'], 2120), ('Corundum 90%', 'corundum brick 90', ['high-alumina brick'], 2270), ('Corundum 99%', 'corundum brick 99', ['alumina brick'], 2300),
     ('Bauxite', 'bauxite brick', [], 2090), ('Magnesia', 'magnesia brick', ['magnesite brick'], 3000), ('Magnesite Chrome', 'magnesia-chrome brick', ['magnesite-chrome brick'], 2600), ('Dolomite P10', 'dolomite brick', [], 2600),
-    ('Zirconia', 'zirconia brick', [], 2900), ('Zircon', 'zircon brick', [], 2800), ('AZS 33', 'fused-cast AZS 33', ['AZS 33', 'alumina-zirconia-silica'], 2100), ('SIC 90%', 'silicon carbide brick', ['SiC brick', 'SiC refractory'], 2500), ('L1260', 'insulating fire brick 1260', ['insulating brick', 'insulating firebrick', 'IFB 23'], 1700),
+    ('Zirconia', 'zirconia brick', [], 2900), ('Zircon', 'zircon brick', [], 1960), ('AZS 33', 'fused-cast AZS 33', ['AZS 33', 'alumina-zirconia-silica'], 2100), ('SIC 90%', 'silicon carbide brick', ['SiC brick', 'SiC refractory'], 2500), ('L1260', 'insulating fire brick 1260', ['insulating brick', 'insulating firebrick', 'IFB 23'], 1700),
     ('L1540', 'insulating fire brick 1540', ['IFB 28'], 1950), ('Carbon, anthracite', 'carbon brick', [], 3800), ('Carbon, graphite', 'graphite brick', [], 3800), ('Fused silica', 'fused silica brick', [], 1970),
 ):
     rho, ks, cps = refractories[theirs]
@@ -147,8 +147,9 @@ for name, formula, aliases, about, rho, k, cp, linear, mp, spread, source in (
     ('graphite', None, ['isotropic graphite', 'electrographite'], None, 1800, [[300, 105], [500, 88], [800, 66], [1200, 48], [1600, 38]], [[300, 715], [500, 1210], [800, 1640], [1200, 1900], [1600, 2030]], 4.5, 3900, '30 %', GRADES),
     ('magnesium oxide', 'MgO', ['magnesia', 'periclase'], None, 3500, [[300, 48], [400, 36], [600, 22], [800, 15.5], [1000, 11.5], [1300, 8.5]], [[300, 935], [400, 1030], [600, 1150], [800, 1200], [1000, 1230], [1300, 1280]], 12.5, 3098, '15 %', GRADES),
 ):
-    T = (300, k[-1][0])
-    write(doubted({'name': name, **({'formula': formula} if formula else {}), 'aliases': aliases, 'kind': 'solid', 'phases': ['solid'], **({'about': about} if about else {}), 'density': constant(f'{rho} kg/m^3', T, '5 %', A2 if source is MUNRO else source), 'thermalConductivity': table(k, spread, source, 'W/(m K)'), 'specificHeatCapacity': table(cp, '6 %', A2 if source is MUNRO else source, 'J/(kg K)'), 'thermalExpansion': expansion(linear, (300, 600), 'linear expansion of handbooks times three, from memory', '25 %'), 'meltingTemperature': melting(mp, CRC if mp in (2851, 2983, 3103) else source, '3 %')}), BY)
+    k, cp = ([[293.0, float(f'{at(rows, 293):.4g}')], *rows] for rows in (k, cp))
+    T = (293, k[-1][0])
+    write(doubted({'name': name, **({'formula': formula} if formula else {}), 'aliases': aliases, 'kind': 'solid', 'phases': ['solid'], **({'about': about} if about else {}), 'density': constant(f'{rho} kg/m^3', T, '5 %', A2 if source is MUNRO else source), 'thermalConductivity': table(k, spread, source, 'W/(m K)'), 'specificHeatCapacity': table(cp, '6 %', A2 if source is MUNRO else source, 'J/(kg K)'), 'thermalExpansion': expansion(linear, (293, 600), 'linear expansion of handbooks times three, from memory', '25 %'), 'meltingTemperature': melting(mp, CRC if mp in (2851, 2983, 3103) else source, '3 %')}), BY)
 
 check = lambda unit, value, within, source: [{'at': {'T': '300 K'}, 'expect': f'{value:g} {unit}', 'within': f'{within} %', 'source': source}]
 ISO = 'ISO 10456:2007, as in ht 1.2.0 (MIT licence)'

@@ -28,82 +28,20 @@ table or formula written down here without the publication at hand.
                      as that of the records, so it checks digits and what lies between the rows, not the assessment
 """
 import csv
-import glob
 import gzip
 import importlib.util
 import json
 import os
 from math import exp
 
-import cantera
 import chemicals
 import mendeleev
 import yaml
 from ht.insulation import building_materials
 
-HERE = os.path.dirname(os.path.abspath(__file__))
-ROOT = os.path.join(HERE, '..', '..', '..')
-ROWS = []
+from solid_states import CP, EXP, HERE, K, MELT, NASA, PERRY, RECORDS, RHO, add, cryopy, fitted, nasa, over, perry, points, slope, write
+
 MEMORY = ' (from memory)'
-
-
-def load(path):
-    with open(path) as file:
-        return yaml.safe_load(file)
-
-
-RECORDS = {record['name']: record for record in map(load, sorted(glob.glob(os.path.join(ROOT, 'materials', '*.yaml')))) if record.get('kind') == 'solid'}
-
-
-def spans(material, prop):
-    """Temperature range(s) that the record declares [K]."""
-    entry = RECORDS.get(material, {}).get(prop)
-    if entry is None:
-        return []
-    boxes = entry['range'] if isinstance(entry['range'], list) else [entry['range']]
-    return [[float(end.split()[0]) for end in box['T']] if 'T' in box else [0, 1e9] for box in boxes]
-
-
-def add(material, prop, T, value, reference):
-    if value is not None and any(low <= T <= high for low, high in spans(material, prop)):
-        ROWS.append([material, prop, f'{T:.6g}', '101325', '', f'{value:.6g}', reference])
-
-
-def over(material, prop, low, high, law, reference, n=31):
-    """n states of a law over what its range [K] and the record share."""
-    for a, b in spans(material, prop):
-        a, b = max(a, low), min(b, high)
-        if a < b:
-            count = max(2, min(n, 1 + int((b - a) / 5)))  # states closer than 5 K say nothing new
-            for i in range(count):
-                T = a + (b - a) * i / (count - 1)
-                add(material, prop, T, law(T), reference)
-
-
-def points(material, prop, pairs, reference):
-    for T, value in pairs:
-        add(material, prop, T, value, reference)
-
-
-K, CP, RHO, EXP, MELT = 'thermalConductivity', 'specificHeatCapacity', 'density', 'thermalExpansion', 'meltingTemperature'
-
-# Heat capacities of condensed species.
-NASA = {one['name']: one for one in load(os.path.join(os.path.dirname(cantera.__file__), 'data', 'nasa_condensed.yaml'))['species']}
-
-
-def nasa(name):
-    """cp [J/(kg K)] of a condensed species as a function of T [K], and its range."""
-    one = NASA[name]
-    ranges, rows = one['thermo']['temperature-ranges'], one['thermo']['data']
-    mass = sum(n * cantera.Element(element).weight for element, n in one['composition'].items()) / 1000
-    first = 0 if one['thermo']['model'] == 'NASA7' else -2
-
-    def cp(T):
-        i = max(0, min(len(rows) - 1, sum(T > end for end in ranges[1:-1])))
-        count = 5 if first == 0 else 7
-        return 8.314462618 / mass * sum(rows[i][j] * T ** (j + first) for j in range(count))
-    return cp, ranges[0], ranges[-1]
-
 
 SPECIES = {
     'aluminium': 'AL(cr)', 'beryllium': 'Be(a)', 'chromium': 'Cr(cr)', 'copper': 'Cu(cr)', 'iron': 'Fe(a)', 'magnesium': 'Mg(cr)', 'molybdenum': 'Mo(cr)', 'niobium': 'Nb(cr)', 'nickel': 'Ni(cr)',
@@ -116,28 +54,18 @@ for material, species in SPECIES.items():
 
 # Bricks: mass fractions of oxides of the class (usual compositions).
 BRICKS = {
-    'corundum brick 99': {'AL2O3(a)': 1}, 'corundum brick 90': {'AL2O3(a)': 0.9, 'quartz': 0.1}, 'mullite brick': {'AL2O3(a)': 0.72, 'quartz': 0.28}, 'sillimanite brick': {'AL2O3(a)': 0.62, 'quartz': 0.38}, 'fireclay brick': {'AL2O3(a)': 0.38, 'quartz': 0.62},
-    'high-duty fireclay brick': {'AL2O3(a)': 0.44, 'quartz': 0.56}, 'bauxite brick': {'AL2O3(a)': 0.85, 'quartz': 0.15}, 'magnesia brick': {'MgO(s)': 0.96, 'quartz': 0.04}, 'magnesia-chrome brick': {'MgO(s)': 0.65, 'Cr2O3(s)': 0.2, 'AL2O3(a)': 0.15}, 'dolomite brick': {'MgO(s)': 0.4, 'CaO(s)': 0.6},
-    'zircon brick': {'zirconia': 0.66, 'quartz': 0.34}, 'zirconia brick': {'zirconia': 0.95, 'CaO(s)': 0.05}, 'fused-cast AZS 33': {'AL2O3(a)': 0.5, 'zirconia': 0.33, 'quartz': 0.17}, 'silicon carbide brick': {'SiC(b)': 0.9, 'quartz': 0.1}, 'graphite brick': {'C(gr)': 1}, 'carbon brick': {'C(gr)': 1},
-    'insulating fire brick 1260': {'AL2O3(a)': 0.38, 'quartz': 0.62}, 'insulating fire brick 1540': {'AL2O3(a)': 0.65, 'quartz': 0.35},
+    'corundum brick 99': {'AL2O3(a)': 1}, 'corundum brick 90': {'AL2O3(a)': 0.9, 'silica': 0.1}, 'mullite brick': {'AL2O3(a)': 0.72, 'silica': 0.28}, 'sillimanite brick': {'AL2O3(a)': 0.62, 'silica': 0.38}, 'fireclay brick': {'AL2O3(a)': 0.38, 'silica': 0.62},
+    'high-duty fireclay brick': {'AL2O3(a)': 0.44, 'silica': 0.56}, 'bauxite brick': {'AL2O3(a)': 0.85, 'silica': 0.15}, 'magnesia brick': {'MgO(s)': 0.96, 'silica': 0.04}, 'magnesia-chrome brick': {'MgO(s)': 0.65, 'Cr2O3(s)': 0.2, 'AL2O3(a)': 0.15}, 'dolomite brick': {'MgO(s)': 0.4, 'CaO(s)': 0.6},
+    'zircon brick': {'zirconia': 0.66, 'silica': 0.34}, 'zirconia brick': {'zirconia': 0.95, 'CaO(s)': 0.05}, 'fused-cast AZS 33': {'AL2O3(a)': 0.5, 'zirconia': 0.33, 'silica': 0.17}, 'silicon carbide brick': {'SiC(b)': 0.9, 'silica': 0.1}, 'graphite brick': {'C(gr)': 1}, 'carbon brick': {'C(gr)': 1},
+    'insulating fire brick 1260': {'AL2O3(a)': 0.38, 'silica': 0.62}, 'insulating fire brick 1540': {'AL2O3(a)': 0.65, 'silica': 0.35},
 }
-with open(os.path.join(os.path.dirname(chemicals.__file__), 'Heat Capacity', 'Perrys Table 2-151.json')) as file:
-    PERRY = [one for phases in json.load(file).values() for one in phases.values()]
-
-
-def perry(formula, subphase=None):
-    """cp [J/(mol K)] as a function of T [K]; the handbook prints cal/(mol K)."""
-    (one,) = [x for x in PERRY if x['Formula'] == formula and x['Subphase'] == subphase and x['Phase'] in ('c', 'gls')]
-    return (lambda T: 4.184 * (one['Const'] + one['Lin'] * T + one['Quadinv'] / T ** 2 + one['Quad'] * T ** 2)), one['Tmin'], one['Tmax']
-
-
 # Below its transition at 847 K quartz peaks, which the glass and the cristobalite of a brick do not: cristobalite of Perry stands for silica.
 CRISTOBALITE = perry('SiO2', 'cristobalite, β')
-PARTS = {name: nasa(name)[0] for brick in BRICKS.values() for name in brick if name in NASA} | {'quartz': lambda T: CRISTOBALITE[0](T) / 0.060084, 'zirconia': nasa('ZrO2(a)')[0]}
+PARTS = {name: nasa(name)[0] for brick in BRICKS.values() for name in brick if name in NASA} | {'silica': lambda T: CRISTOBALITE[0](T) / 0.060084, 'zirconia': nasa('ZrO2(a)')[0]}
 for brick, shares in BRICKS.items():
     # Zirconia turns tetragonal at 1478 K; the stabilised one does not, and the curve of the monoclinic form is carried to the end of the record.
     over(brick, CP, 673.15, 1473.15, lambda T: sum(w * PARTS[name](T) for name, w in shares.items()), 'nasa mix')
-over('silica brick', CP, 673.15, 1473.15, PARTS['quartz'], 'perry')
+over('silica brick', CP, 673.15, 1473.15, PARTS['silica'], 'perry')
 GLASS = [x for x in PERRY if x['Formula'] == 'SiO2' and x['Const'] == 12.8][0]
 for material in ('quartz glass', 'fused silica brick'):
     over(material, CP, 273, 1973, lambda T: 4.184 / 0.060084 * (GLASS['Const'] + GLASS['Lin'] * T + GLASS['Quadinv'] / T ** 2), 'perry')
@@ -188,7 +116,7 @@ for material, species in SPECIES.items():
 # Compounds at room temperature: densities and melting points of the CRC Handbook.
 with open(os.path.join(os.path.dirname(chemicals.__file__), 'Misc', 'Physical Constants of Inorganic Compounds.csv')) as file:
     COMPOUNDS = {row['CAS']: row for row in csv.DictReader(file, delimiter='\t')}
-for material, cas in (('alumina', '1344-28-1'), ('silicon carbide', '409-21-2'), ('silicon nitride', '12033-89-5'), ('zirconium dioxide', '1314-23-4'), ('aluminium nitride', '24304-00-5'), ('beryllium oxide', '1304-56-9'), ('titanium dioxide', '13463-67-7'), ('magnesium oxide', '1309-48-4'), ('rock salt', '7647-14-5'), ('graphite', '7782-42-5')):
+for material, cas in (('alumina', '1344-28-1'), ('silicon carbide', '409-21-2'), ('silicon nitride', '12033-89-5'), ('zirconium dioxide', '1314-23-4'), ('aluminium nitride', '24304-00-5'), ('beryllium oxide', '1304-56-9'), ('titanium dioxide', '1317-80-2'), ('magnesium oxide', '1309-48-4'), ('rock salt', '7647-14-5'), ('graphite', '7782-42-5')):
     row = COMPOUNDS.get(cas)
     # Ceramics are porous, so only the melting point and dense crystals compare; aluminium nitride melts under pressure and decomposes before.
     if row and row['Tm'] and material not in ('graphite', 'aluminium nitride'):
@@ -196,23 +124,15 @@ for material, cas in (('alumina', '1344-28-1'), ('silicon carbide', '409-21-2'),
     if row and row['rho'] and material in ('alumina', 'silicon carbide', 'aluminium nitride', 'titanium dioxide', 'rock salt'):
         add(material, RHO, 300, float(row['rho']), 'crc')
 
+# The refractoriness of a pure brick is near the melting point of its oxide.
+for brick, cas in (('corundum brick 99', '1344-28-1'), ('magnesia brick', '1309-48-4'), ('zirconia brick', '1314-23-4'), ('silica brick', '14464-46-1'), ('fused silica brick', '60676-86-0'), ('mullite brick', '1302-93-8')):
+    add(brick, MELT, 298.15, float(COMPOUNDS[cas]['Tm']), 'crc')
+add('quartz glass', RHO, 293.15, float(COMPOUNDS['60676-86-0']['rho']), 'crc')
+
 # Alloys at low temperatures: NIST.
 spec = importlib.util.find_spec('spacemat')
 with open(os.path.join(list(spec.submodule_search_locations)[0], 'data', 'nist_fits.json')) as file:
     FITS = json.load(file)['fits']
-
-
-def fitted(fit):
-    """Value of a fit of NIST as a function of T [K]."""
-    from math import log10
-    terms = [fit['coeffs'][letter] for letter in 'abcdefghi' if letter in fit['coeffs']]
-    if fit['form'] == 'log10poly':
-        return lambda T: 10 ** sum(a * log10(T) ** i for i, a in enumerate(terms))
-    return lambda T: sum(a * T ** i for i, a in enumerate(terms))
-
-
-def slope(law, T):
-    return (law(T + 0.5) - law(T - 0.5))
 
 
 for material, theirs in (('stainless steel', 'Stainless Steel 304L'), ('stainless steel 316', 'Stainless Steel 316'), ('aluminium alloy 6061', 'Aluminum 6061-T6'), ('nickel alloy 718', 'Inconel 718'), ('titanium alloy Ti-6Al-4V', 'Ti-6Al-4V'), ('invar', 'Invar 36')):
@@ -222,15 +142,6 @@ for material, theirs in (('stainless steel', 'Stainless Steel 304L'), ('stainles
             over(material, prop, *fits[key]['data_range'], fitted(fits[key]), 'nist-cryo')
     expansion = fitted(fits['thermal_contraction_pct'])
     over(material, EXP, 100, 299, lambda T: 3e-5 * slope(expansion, T), 'nist-cryo')
-
-
-def cryopy(name):
-    """The module of an alloy; the package does not list those of its sandbox."""
-    folder = list(importlib.util.find_spec('cryopy').submodule_search_locations)[0]
-    found = importlib.util.spec_from_file_location(name, os.path.join(folder, 'material', 'sandbox', f'{name}.py'))
-    module = importlib.util.module_from_spec(found)
-    found.loader.exec_module(module)
-    return module
 
 
 for material, name, prop, function, low, high in (
@@ -324,8 +235,4 @@ for material, prop, low, high, law, source in (
 ):
     over(material, prop, low, high, law, source + MEMORY)
 
-with open(os.path.join(HERE, 'metals-and-ceramics.csv'), 'w', newline='') as out:
-    writer = csv.writer(out, lineterminator='\n')
-    writer.writerow(['material', 'property', 'T [K]', 'p [Pa]', 'share', 'value [SI]', 'reference'])
-    writer.writerows(ROWS)
-print(len(ROWS), len({row[0] for row in ROWS}))
+write('metals-and-ceramics.csv')
