@@ -116,6 +116,9 @@ def at_temperature(means, temperatures, T0=293.15):
     return [a + b * (2 * T - T0) + c * T0 / T ** 2 for T in temperatures]
 
 
+# Bricks whose conductivity another table has as well.
+TWO_TABLES = {'fireclay brick', 'silica brick', 'silicon carbide brick', 'insulating fire brick 1260', 'zircon brick'}
+ALONE = f'{VDI}; no second table was found'
 for theirs, name, aliases, mp in (
     ('Silica', 'silica brick', ['silica refractory'], 1970), ('Fireclay', 'fireclay brick', ['fireclay', 'chamotte', 'chamotte brick', 'fire brick', 'firebrick'], 1970), ('High-duty fireclay', 'high-duty fireclay brick', [], 2000),
     ('Sillimanite', 'sillimanite brick', [], 2090), ('Mullite', 'mullite brick', ['mullite'], 2120), ('Corundum 90%', 'corundum brick 90', ['high-alumina brick'], 2270), ('Corundum 99%', 'corundum brick 99', ['alumina brick'], 2300),
@@ -127,7 +130,7 @@ for theirs, name, aliases, mp in (
     T = (673.15, 873.15, 1073.15, 1273.15, 1473.15)
     assert refractory_VDI_k(theirs, T[2]) == ks[2]
     write(doubted({'name': name, 'aliases': aliases, 'kind': 'solid', 'phases': ['solid'], 'about': 'porosity moves the conductivity; below 400 degC carried from there',
-           'density': constant(f'{rho:g} kg/m^3', (293.15, 1473.15), '5 %', VDI), 'thermalConductivity': table([[t, v] for t, v in zip(T, ks)], '20 %', VDI, 'W/(m K)'),
+           'density': constant(f'{rho:g} kg/m^3', (293.15, 1473.15), '5 %', f'{VDI}; {COMPARED}' if name == 'fireclay brick' else ALONE), 'thermalConductivity': table([[t, v] for t, v in zip(T, ks)], '20 %' if name in TWO_TABLES else '25 %', f'{VDI}; {COMPARED}' if name in TWO_TABLES else ALONE, 'W/(m K)'),
            'specificHeatCapacity': table([[t, round(v)] for t, v in zip(T, at_temperature(cps, T))], '12 %' if name == 'insulating fire brick 1260' else '10 %', MEANS, 'J/(kg K)'),
            'emissivity': emissivity([('rough', (1000, 1500), 0.75, 20)], 'fireclay and other refractories, 0.6 to 0.9, handbook tables of emissivity, from memory'),
            'meltingTemperature': melting(mp, 'usual refractoriness of the class, from memory', '5 %')}), BY)

@@ -127,6 +127,7 @@ for material, cas in (('alumina', '1344-28-1'), ('silicon carbide', '409-21-2'),
 # The refractoriness of a pure brick is near the melting point of its oxide.
 for brick, cas in (('corundum brick 99', '1344-28-1'), ('magnesia brick', '1309-48-4'), ('zirconia brick', '1314-23-4'), ('silica brick', '14464-46-1'), ('fused silica brick', '60676-86-0'), ('mullite brick', '1302-93-8')):
     add(brick, MELT, 298.15, float(COMPOUNDS[cas]['Tm']), 'crc')
+add('galvanised steel', MELT, 298.15, mendeleev.element('Zn').melting_point, 'crc')  # that of its coat
 add('quartz glass', RHO, 293.15, float(COMPOUNDS['60676-86-0']['rho']), 'crc')
 
 # Alloys at low temperatures: NIST.
@@ -180,7 +181,8 @@ for material, theirs in (('cartridge brass', 'Metals, brass'), ('gear bronze', '
         (theirs,) = [key for key in building_materials if key.startswith('Glass, soda lime')]
     rho, k, cp = building_materials[theirs]
     for prop, value in ((RHO, rho), (K, k), (CP, cp)):
-        add(material, prop, 300, value, 'iso-10456')
+        if (material, prop) != ('copper', K):  # sheets and pipes hold phosphorus, and conduct less than the pure copper of the record
+            add(material, prop, 300, value, 'iso-10456')
 
 # Structural Eurocodes: t in degC.
 C = 273.15
