@@ -200,18 +200,28 @@ for name, aliases, rho, k, cp, void, about in (
     bed(name, aliases, rho, k, cp, void, None, (15, 40, 20 if name in ('silica gel', 'zeolite pellets') else 15, 15, 300), 'Satterfield, Heterogeneous Catalysis in Practice (1980), and data sheets, from memory; heat capacity of the dry oxide or carbon, of handbooks, from memory', about, (cp[0][0], cp[-1][0]))
 
 # Phase-change materials: both phases.
-def change(name, aliases, mp, heat, rho, k, cp, mu, T, source, spread, about=None, marks=(), liquid=None):
-    """Solid and liquid values; heat of fusion [kJ/kg]; `liquid`: density of the liquid as a line, [kg/m^3] and [kg/(m^3 K)]."""
-    both = lambda pair, unit, uncertainty: [{'model': 'constant', 'phase': phase, 'range': {'T': K(*box), 'p': ['0 Pa', '1 MPa']}, 'uncertainty': uncertainty, 'source': source, 'constants': {'value': f'{value:g} {unit}'}} for phase, value, box in (('solid', pair[0], (T[0], mp)), ('liquid', pair[1], (mp, T[1])))]
+def change(name, aliases, mp, heat, rho, k, cp, mu, T, source, spread, about=None, marks=(), lines=None, expands=None):
+    """Solid and liquid values; heat of fusion [kJ/kg]; `lines`: what of the liquid is a line in T, [SI], with its uncertainty and source."""
+    lines, liquid = lines or {}, {'T': K(mp, T[1]), 'p': ['0 Pa', '1 MPa']}
+
+    def both(key, pair, unit, uncertainty):
+        entries = [{'model': 'constant', 'phase': phase, 'range': {'T': K(*box), 'p': ['0 Pa', '1 MPa']}, 'uncertainty': uncertainty, 'source': source, 'constants': {'value': f'{value:g} {unit}'}} for phase, value, box in (('solid', pair[0], (T[0], mp)), ('liquid', pair[1], (mp, T[1])))]
+        if key in lines:
+            terms, uncertainty, where = lines[key]
+            entries[1] = {'model': 'polynomial', 'phase': 'liquid', 'range': liquid, 'uncertainty': uncertainty, 'source': where, 'constants': {'gives': unit, 'terms': list(terms)}}
+        return entries
+
     write({'name': name, 'aliases': aliases, 'kind': 'fluid', 'phases': ['liquid', 'solid'], **({'marks': list(marks)} if marks else {}), **({'about': about} if about else {}),
-           'density': both(rho, 'kg/m^3', spread[0]) if liquid is None else [both(rho, 'kg/m^3', spread[0])[0], {'model': 'polynomial', 'phase': 'liquid', 'range': {'T': K(mp, T[1]), 'p': ['0 Pa', '1 MPa']}, 'uncertainty': '1.5 %', 'source': CRC_LINE, 'constants': {'gives': 'kg/m^3', 'terms': list(liquid)}}], 'viscosity': [{'model': 'vogel', 'phase': 'liquid', 'range': {'T': K(mp, T[1]), 'p': ['0 Pa', '1 MPa']}, 'uncertainty': '35 %', 'source': source, 'constants': {'A': mu[0], 'B': mu[1], 'C': 0, 'gives': 'mPa s'}}],
-           'thermalConductivity': both(k, 'W/(m K)', spread[1]), 'specificHeatCapacity': both(cp, 'J/(kg K)', spread[2]),
-           'thermalExpansion': [{'model': 'constant', 'phase': 'liquid', 'range': {'T': K(mp, T[1])}, 'uncertainty': '30 %', 'source': source, 'constants': {'value': f'{(9e-4 if rho[1] < 1000 else 5e-4):g} 1/K'}}],
+           'density': both('density', rho, 'kg/m^3', spread[0]), 'viscosity': [{'model': 'vogel', 'phase': 'liquid', 'range': liquid, 'uncertainty': '35 %', 'source': source, 'constants': {'A': mu[0], 'B': mu[1], 'C': 0, 'gives': 'mPa s'}}],
+           'thermalConductivity': both('thermalConductivity', k, 'W/(m K)', spread[1]), 'specificHeatCapacity': both('specificHeatCapacity', cp, 'J/(kg K)', spread[2]),
+           'thermalExpansion': [{'model': 'constant', 'phase': 'liquid', 'range': {'T': K(mp, T[1])}, 'uncertainty': '30 %', 'source': source, 'constants': {'value': f'{(9e-4 if rho[1] < 1000 else 5e-4):g} 1/K'}} if expands is None else {'model': 'constant', 'phase': 'liquid', 'range': {'T': K(mp, T[1])}, 'uncertainty': expands[1], 'source': expands[2], 'constants': {'value': f'{expands[0]:g} 1/K'}}],
            'fusionHeat': {'model': 'constant', 'range': {'p': ['0 Pa', '1 MPa']}, 'uncertainty': spread[3], 'source': source, 'constants': {'value': f'{heat} kJ/kg'}}, 'meltingTemperature': {'model': 'constant', 'range': {'p': ['0 Pa', '1 MPa']}, 'uncertainty': '0.5 %', 'source': source, 'constants': {'value': f'{mp} K'}}}, BY)
 
 
 CRC_LINE = 'CRC Handbook of Chemistry and Physics, 97th ed. (2016), near the melting point, from memory; slope to 350 K by the estimate of Hankinson and Thomson, as in thermo 0.6.1'
 MEHLING = 'Mehling and Cabeza, Heat and Cold Storage with PCM (2008), and Zalba et al., Appl. Therm. Eng. 23 (2003) 251, from memory'
+PERRY = "line through Perry's Chemical Engineers' Handbook, 8th ed. (2007), table %s; constants as carried by chemicals 1.5.2 (MIT licence)"
+JANZ = 'CRC Handbook of Chemistry and Physics, densities of molten salts, 1900 - 0.715 (T - 579.65) to 643 K; constants as carried by chemicals 1.5.2 (MIT licence)'
 USUAL = ('3 %', '15 %', '10 %', '8 %')
 
 
@@ -221,14 +231,14 @@ def andrade(T1, mu1, T2, mu2):
     return round(math.log(mu1) - b / T1, 6), round(b, 3)
 
 
-change('octadecane', ['n-octadecane', 'C18H38'], 301.3, 243, (865, 775), (0.36, 0.148), (1930, 2200), andrade(303, 3.9, 343, 1.95), (273.15, 373.15), MEHLING, USUAL, marks=('oil',), liquid=(985.2, -0.692))
-change('hexadecane', ['n-hexadecane', 'C16H34', 'cetane'], 291.3, 236, (835, 773), (0.33, 0.145), (1800, 2220), andrade(293, 3.45, 333, 1.6), (263.15, 373.15), MEHLING, USUAL, marks=('oil',), liquid=(979.0, -0.70))
+change('octadecane', ['n-octadecane', 'C18H38'], 301.3, 243, (865, 775), (0.36, 0.148), (1930, 2200), andrade(303, 3.9, 343, 1.95), (273.15, 373.15), MEHLING, USUAL, marks=('oil',), lines={'density': ((985.2, -0.692), '1.5 %', CRC_LINE), 'thermalConductivity': ((0.2137, -2.252e-4), '6 %', PERRY % '2-315'), 'specificHeatCapacity': ((1312.6, 3.0133), '3 %', PERRY % '2-153')})
+change('hexadecane', ['n-hexadecane', 'C16H34', 'cetane'], 291.3, 236, (835, 773), (0.33, 0.145), (1800, 2220), andrade(293, 3.45, 333, 1.6), (263.15, 373.15), MEHLING, USUAL, marks=('oil',), lines={'density': ((979.0, -0.70), '1.5 %', CRC_LINE), 'thermalConductivity': ((0.20749, -2.1917e-4), '6 %', PERRY % '2-315'), 'specificHeatCapacity': ((1306.1, 3.0361), '3 %', PERRY % '2-153')})
 change('paraffin wax', ['paraffin', 'wax', 'candle wax'], 331, 190, (900, 770), (0.24, 0.16), (2890, 2300), andrade(338, 5.0, 373, 2.6), (283.15, 393.15), f'{A3} for the solid; {MEHLING}', ('4 %', '20 %', '25 %', '12 %'), 'a wax that melts at 58 degC; waxes soften over some 10 K', ('oil', 'flammable'))
 change('lauric acid', ['dodecanoic acid'], 317.2, 178, (1007, 862), (0.16, 0.147), (1880, 2270), andrade(323, 7.3, 353, 3.6), (273.15, 373.15), f'{MEHLING}; heat capacity of the solid between the 1760 J/(kg K) there and 2020 of the CRC Handbook', USUAL)
 change('calcium chloride hexahydrate', ['CaCl2.6H2O'], 302.8, 188, (1710, 1560), (1.09, 0.54), (1400, 2200), andrade(303, 14, 333, 6), (273.15, 343.15), MEHLING, USUAL, 'it undercools by 20 K without nucleators')
 change('sodium acetate trihydrate', ['sodium acetate'], 331.2, 260, (1450, 1280), (0.7, 0.45), (2790, 3000), andrade(333, 12, 363, 4.5), (283.15, 363.15), MEHLING, USUAL, 'it undercools by 80 K without nucleators')
 change('erythritol', [], 391, 339, (1480, 1300), (0.73, 0.33), (1350, 2740), andrade(393, 30, 423, 12), (293.15, 433.15), MEHLING, USUAL)
-change('sodium nitrate', ['NaNO3'], 580, 174, (2120, 1880), (0.6, 0.51), (1650, 1660), andrade(583, 3.0, 673, 1.9), (500, 720), f'{MEHLING}; solid density from 2260 kg/m^3 at room temperature and 10.7 % change of volume on melting', ('5 %', '20 %', '8 %', '6 %'), marks=('moltenSalt',))
+change('sodium nitrate', ['NaNO3'], 580, 174, (2120, 1900), (0.6, 0.51), (1650, 1660), andrade(583, 3.0, 673, 1.9), (500, 720), f'{MEHLING}; solid density from 2260 kg/m^3 at room temperature and 10.7 % change of volume on melting', ('5 %', '20 %', '8 %', '6 %'), marks=('moltenSalt',), lines={'density': ((2314.4, -0.715), '1.5 %', JANZ), 'specificHeatCapacity': ((1660,), '10 %', f'{MEHLING}; Kubaschewski and Alcock (1979) give 1831')}, expands=(3.85e-4, '15 %', f'slope of {JANZ}'))
 
 # Unfrozen food, by composition.
 MEAT = ('beef', 'chicken', 'pork', 'fish')

@@ -12,7 +12,7 @@ import os
 import chemicals
 import CoolProp
 
-from record import K, write
+from record import K, disputed, write
 
 HERE = 'generate-solutions.py from the coefficients of CoolProp 8.0.0 (incompressible fluids, MIT licence)'
 LALIBERTE_BY = 'generate-solutions.py from the constants in chemicals 1.5.2 (MIT licence)'
@@ -30,7 +30,7 @@ def incompressible():
 
 TABLE = incompressible()
 NAMES = (('density', 'density', 'kg/m^3'), ('viscosity', 'viscosity', 'Pa s'), ('conductivity', 'thermalConductivity', 'W/(m K)'), ('specific_heat', 'specificHeatCapacity', 'J/(kg K)'))
-MELINDER = 'Melinder, Properties of Secondary Working Fluids for Indirect Systems, IIR (2010)'
+MELINDER = 'Melinder, Properties of Secondary Working Fluids for Indirect Systems, IIR (2010); coefficients as fitted by CoolProp 8.0.0 (MIT licence)'
 
 
 def trimmed(rows):
@@ -60,6 +60,16 @@ def solution(key, head, T, x, uncertainty, source, without=(), checks={}):
     return record
 
 
+# Where another work lies farther off than is usual: test/properties/compared/aqueous.py.
+DISPUTED = {
+    'potassium formate brine': {'viscosity': ('15 %', 'at 288 K and 47 % 2.82 mPa s, Laliberte (2009) 2.47')},
+    'lithium chloride brine': {'viscosity': ('15 %', 'at 274 K and 23.5 % 4.11 mPa s, Conde (2004) 4.83')},
+    'ethanol-water': {'thermalConductivity': ('7 %', 'at 276 K and 59 % 0.280 W/(m K), the rule of Filippov (1955) 0.262')},
+    'glycerol-water': {'thermalConductivity': ('8 %', 'at 312 K and 45 % 0.450 W/(m K), the rule of Filippov (1955) 0.418')},
+    'methanol-water': {'viscosity': ('12 %', 'at 266 K and 21 % 4.42 mPa s, VDI Heat Atlas 4.98'), 'thermalConductivity': ('10 %', 'at 233 K and 44 % 0.346 W/(m K), VDI Heat Atlas 0.380'), 'specificHeatCapacity': ('12 %', 'at 233 K and 44 % 3077 J/(kg K), VDI Heat Atlas 3471')},
+    'caustic soda': {'density': ('1.6 %', 'at 373 K and 49 % 1481 kg/m^3, Olsson et al. (1997) 1459'), 'specificHeatCapacity': ('5.5 %', 'at 277 K and 10 % 3720 J/(kg K), Olsson et al. (1997) 3927'), 'viscosity': ('11 %', 'at 286 K and 12 % 2.65 mPa s, Alexandrov (2004) 2.39')},
+    'calcium chloride brine': {'viscosity': ('16 %', 'at 373 K and 10 % 0.404 mPa s, Conde (2004) 0.348')},
+}
 COMMON = {'density': '0.5 %', 'viscosity': '6 %', 'thermalConductivity': '4 %', 'specificHeatCapacity': '3 %'}
 handbook = lambda T, x, mu: {'at': {'T': T, 'composition': x}, 'expect': f'{mu} mPa s', 'within': '5 %', 'source': 'handbook tables of aqueous ethanol, from memory'}
 for key, name, aliases, solute, T, xmax, other, checks in (
@@ -74,7 +84,8 @@ for key, name, aliases, solute, T, xmax, other, checks in (
     ('MKA', 'potassium acetate brine', [], 'potassium acetate', (233.15, 313.15), 0.45, {}, {}),
 ):
     xmax = min(xmax, TABLE[key]['xmax'])
-    write(solution(key, {'name': name, 'aliases': aliases, 'about': f'the composition is the share of {solute} by mass'}, T, (0, xmax), {**COMMON, **other}, MELINDER, checks=checks), HERE)
+    record = solution(key, {'name': name, 'aliases': aliases, 'about': f'the composition is the share of {solute} by mass'}, T, (0, xmax), {**COMMON, **other}, MELINDER, checks=checks)
+    write(disputed(record, DISPUTED.get(name, {})), HERE)
 
 # Glycerol: the viscosity law holds from water to glycerol; the other properties to 60 %.
 glycerol = solution('MGL', {'name': 'glycerol-water', 'aliases': ['aqueous glycerol', 'glycerine-water', 'glycerin-water'], 'about': 'the composition is the share of glycerol by mass'}, (263.15, 313.15), (0, 0.6), COMMON, MELINDER, without=('viscosity',))
@@ -85,7 +96,7 @@ glycerol['viscosity'] = {
         {'at': {'T': '20 degC', 'composition': 0.6}, 'expect': '10.8 mPa s', 'within': '6 %', 'source': 'Segur and Oberstar, Ind. Eng. Chem. 43 (1951) 2117'},
         {'at': {'T': '40 degC', 'composition': 1}, 'expect': '284 mPa s', 'within': '6 %', 'source': 'Segur and Oberstar, Ind. Eng. Chem. 43 (1951) 2117'},
     ]}
-write(glycerol, HERE)
+write(disputed(glycerol, DISPUTED['glycerol-water']), HERE)
 
 # Electrolytes: constants as printed by Laliberte; ranges as printed.
 with open(os.path.join(os.path.dirname(chemicals.__file__), 'Electrolytes', 'Laliberte2009.tsv')) as file:
@@ -125,7 +136,7 @@ def electrolyte(cas, name, formula, aliases, ions, about, uncertainty, freezing=
         record['thermalExpansion'] = expansion
     for key, checks in (extra or {}).items():
         record[key]['checks'] = checks
-    write(record, LALIBERTE_BY)
+    write(disputed(record, DISPUTED.get(name, {})), LALIBERTE_BY)
 
 
 # Lowest temperatures at which the brines are used [K].

@@ -79,3 +79,12 @@ def write(record, made_by):
 
 def K(low, high):
     return [f'{low:g} K' if low % 1 else f'{int(low)} K', f'{high:g} K' if high % 1 else f'{int(high)} K']
+
+
+def disputed(record, others):
+    """Uncertainty of a property, and what other works give, where they lie farther apart than a work of its kind is good for."""
+    for key, (uncertainty, what) in others.items():
+        for entry in record[key] if isinstance(record[key], list) else [record[key]]:
+            entry['uncertainty'] = uncertainty
+            entry['source'] += f'; {what}'
+    return record

@@ -121,10 +121,14 @@ for material, cas, mass, low, high in (
 # Gases by components: another mixing rule on other pure gases.
 gas = cantera.Solution('gri30.yaml')
 gas.transport_model = 'mixture-averaged'
-for material, shares in (('flue gas', {'N2': 0.716, 'CO2': 0.087, 'H2O': 0.172, 'O2': 0.017, 'AR': 0.008}), ('coal flue gas', {'N2': 0.745, 'CO2': 0.140, 'H2O': 0.065, 'O2': 0.041, 'AR': 0.009})):
-    for T in between(350, 1450, 12):
+for material, low, high, shares in (
+    ('flue gas', 350, 1490, {'N2': 0.716, 'CO2': 0.087, 'H2O': 0.172, 'O2': 0.017, 'AR': 0.008}), ('coal flue gas', 330, 1490, {'N2': 0.745, 'CO2': 0.140, 'H2O': 0.065, 'O2': 0.041, 'AR': 0.009}),
+    ('natural gas', 300, 599, {'CH4': 0.93, 'C2H6': 0.04, 'C3H8': 0.01, 'N2': 0.01, 'CO2': 0.01}), ('biogas', 303, 599, {'CH4': 0.6, 'CO2': 0.36, 'H2O': 0.03, 'N2': 0.01}),
+    ('exhaled air', 308, 323, {'N2': 0.746, 'O2': 0.155, 'CO2': 0.04, 'H2O': 0.05, 'AR': 0.009}),
+):
+    for T in between(low, high, 32):
         gas.TPX = T, 101325, shares
-        for prop, value in (('density', gas.density_mass), ('specificHeatCapacity', gas.cp_mass), ('viscosity', gas.viscosity), ('thermalConductivity', gas.thermal_conductivity)):
+        for prop, value in (('density', gas.density_mass), ('specificHeatCapacity', gas.cp_mass), ('viscosity', gas.viscosity), ('thermalConductivity', gas.thermal_conductivity), ('speedOfSound', gas.sound_speed), ('thermalExpansion', gas.thermal_expansion_coeff)):
             add(material, prop, T, 101325, None, value, 'gri')
 
 with open(os.path.join(HERE, 'solutions.csv'), 'w', newline='') as out:
