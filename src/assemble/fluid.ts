@@ -1,6 +1,6 @@
 import type { Case, Entry } from '../case/index.ts';
 import { Problem, type ProblemData } from '../problems/index.ts';
-import { loadMaterial, mixtureOf, type Collection, type Component, type Material, type State } from '../properties/index.ts';
+import { componentsMean, loadMaterial, mixtureOf, shippedMaterials, solutionShare, type Collection, type Component, type Material, type State } from '../properties/index.ts';
 import { fluidLaws, type MaterialLaws } from './material-laws.ts';
 
 const assumedPressure = 101325;
@@ -26,6 +26,8 @@ export function placed<T>(entry: Entry | undefined, file: string, make: () => T)
   }
 }
 
+const placedAt = (entry: Entry | undefined, file: string, one: ProblemData): Problem => new Problem({ file, ...entry?.position, ...one });
+
 /**
  * Loads the fluid of a case.
  *
@@ -42,7 +44,10 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   const around = humidity === undefined ? undefined : on.number('surroundings.temperature');
   const temperature = on.number('inlet.temperature') ?? on.number('fluid.temperature') ?? on.number('inlet.totalTemperature') ?? on.number('initial.temperature') ?? around ?? middle(on);
   const entry = on.get('fluid.material');
+  const parts = componentsOf(on);
+  const firstPart = on.get(`fluid.composition.${parts[0]?.name ?? ''}`);
   if (typeof entry?.value !== 'string') {
+    if (parts.length > 0) throw placedAt(firstPart, on.file, { code: 'composition-without-material', message: 'a composition is given without a material', ...(componentsMean('', parts, materials ?? shippedMaterials()) ?? { expected: 'fluid: { material: gas mixture, composition: ... } for gases, or a solution such as propylene glycol-water', nearest: 'material: gas mixture' }) });
     const density = on.number('fluid.density');
     const said = on.word('fluid.medium') as Fluid['medium'];
     // A fluid of constants need not say its state of matter: the density tells.
@@ -53,10 +58,9 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   if (temperature === undefined) assumed['fluid.temperature'] = assumedTemperature;
   const name = entry.value;
   const known = placed(entry, on.file, () => loadMaterial(name, materials));
-  const parts = componentsOf(on);
   const byComponents = known.takes.includes('components') && parts.length > 0;
-  const material = byComponents ? placed(on.get('fluid.composition') ?? entry, on.file, () => mixtureOf(known, parts, materials)) : known;
-  const composition = byComponents ? undefined : parts[0]?.share;
+  const material = byComponents ? placed(firstPart ?? entry, on.file, () => mixtureOf(known, parts, materials)) : known;
+  const composition = parts.length > 0 && material.takes.includes('composition') ? placed(firstPart, on.file, () => solutionShare(material, parts, materials)) : undefined;
   const state: State = {
     temperature: meltOf(on, material) ?? temperature ?? assumedTemperature,
     pressure: pressure ?? assumedPressure,

@@ -1,5 +1,5 @@
 import { nearestName, Problem } from '../problems/index.ts';
-import { allSurfaces, fitKinds, fitOf, type Material as Substance, loadMaterial, materialNames, loadSurface, mixtureOf, parseRange, parseState, propertyNames, type PropertyId, propertySheet, sampledOver, shippedMaterials, stateOf, type StateText, type Surface, tableOver, withMaterialsFrom } from '../properties/index.ts';
+import { allSurfaces, fitKinds, fitOf, type Material as Substance, loadMaterial, materialNames, loadSurface, parseRange, parseState, propertyNames, type PropertyId, propertySheet, sampledOver, shippedMaterials, stateOf, type StateText, type Surface, tableOver, withComponents, withMaterialsFrom } from '../properties/index.ts';
 import { materialCsv, materialDocument, materialTableDocument, materialTableText, materialText, fitsDocument, fitsText, plotSvg, plotText, surfacesText, surfaceText, wrapped } from '../report/index.ts';
 import { readQuantity } from '../units/index.ts';
 import { Args, Base, Flags } from './base.ts';
@@ -52,10 +52,9 @@ export default class Material extends Base {
       return { materials: names };
     }
     const named = loadMaterial(args.name, collection);
-    const mixed = ({ components }: StateText): typeof named => (components === undefined ? named : mixtureOf(named, components, collection));
+    const mixed = <T extends StateText>(said: T): { material: Substance; said: T } => withComponents(named, said, collection);
     if (flags.over !== undefined) {
-      const range = parseRange(flags.over);
-      const material = mixed(range);
+      const { material, said: range } = mixed(parseRange(flags.over));
       if (flags.fit !== undefined || flags.plot) {
         for (const assumed of range.assumed) this.remark(`assumed: ${assumed}`);
         const sampled = sampledOver(material, range, propertiesOf(flags.of, material));
@@ -79,9 +78,8 @@ export default class Material extends Base {
       return materialTableDocument(material.name, table);
     }
     if (flags.at === undefined) throw new Problem({ code: 'missing-argument', message: 'a state is needed', expected: '--at "60 degC, 2 bar", --at "60 degC, saturated liquid" or --over "20 degC .. 90 degC, 2 bar"' });
-    const said = parseState(flags.at);
-    const material = mixed(said);
-    const sheet = propertySheet(material, stateOf(material, said));
+    const { material, said } = mixed(parseState(flags.at));
+    const sheet = propertySheet(material, stateOf(material, said, collection));
     this.say([materialText(sheet), ...said.assumed.map((one) => `  assumed: ${one}`)].join('\n'));
     return materialDocument(sheet);
   }

@@ -51,12 +51,13 @@ export function readBands(reader: YamlReader, path: Path, given: unknown, inUnit
       reader.complain(at, { code: 'wrong-uncertainty', message: 'a band is a mapping', expected: '{ T: [low, high], value: 2 % }' });
       return { value: Number.NaN };
     }
-    reader.keys(at, raw, ['T', 'p', 'composition', 'phase', 'value', 'absolute']);
+    reader.keys(at, raw, ['T', 'p', 'composition', 'phase', 'departure', 'value', 'absolute']);
     const phase = raw['phase'];
     if (phase !== undefined && phase !== 'liquid' && phase !== 'vapour') reader.complain([...at, 'phase'], { code: 'wrong-phase', message: `"${shown(phase)}" is not a phase`, expected: 'liquid or vapour' });
     return {
       ...readBox(reader, at, raw),
       ...(phase === 'liquid' || phase === 'vapour' ? { phase } : {}),
+      ...(raw['departure'] === undefined ? {} : { departure: reader.quantity([...at, 'departure'], raw['departure'], '1') }),
       value: reader.quantity([...at, 'value'], raw['value'], '1'),
       ...(raw['absolute'] === undefined ? {} : { absolute: reader.quantity([...at, 'absolute'], raw['absolute'], inUnit) }),
     };

@@ -15,4 +15,5 @@ export { propertySheet, type PropertySheet } from './sheet.ts';
 export type { State, StateText } from './state.ts';
 export { type StoredFile, storedMaterials } from './stored.ts';
 export { allSurfaces, loadSurface, readSurfaces, type Surface, type SurfaceValue } from './surfaces.ts';
+export { componentsMean, solutionShare, withComponents } from './solution.ts';
 export { type PropertyTable, tableOver, type TableRow } from './table-over.ts';

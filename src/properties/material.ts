@@ -1,4 +1,6 @@
 import { Problem } from '../problems/index.ts';
+import { withBoilingPoint } from './boiling-point.ts';
+import type { GasMixture } from './models/gas-mixture.ts';
 import { lineOf, type Point, type Side } from './models/point.ts';
 import { equationModels, propertyModels } from './registry.ts';
 import { propertyUnits, type Box, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
@@ -19,8 +21,8 @@ export interface Material {
   readonly flashPoint?: number;
   /** Specific gas constant [J/(kg K)]. */
   readonly gasConstant?: number;
-  /** [K], [Pa], [kg/m^3] */
-  readonly critical?: { readonly temperature: number; readonly pressure: number; readonly density: number };
+  /** [K], [Pa], [kg/m^3]; of a mixture of gases the pseudo-critical point. */
+  readonly critical?: { readonly temperature: number; readonly pressure: number; readonly density: number } | undefined;
   /** [K], [Pa] */
   readonly triple?: { readonly temperature: number; readonly pressure: number };
   /** At atmospheric pressure [K]. */
@@ -87,6 +89,7 @@ function engineOf(record: MaterialRecord, collection: Collection): MaterialEngin
 
   const engine: MaterialEngine = {
     molarMass: record.molarMass ?? Number.NaN,
+    ...(record.critical === undefined ? {} : { critical: record.critical }),
     get equation() {
       if (equation === null) {
         const entry = record.thermodynamics;
@@ -150,6 +153,13 @@ function engineOf(record: MaterialRecord, collection: Collection): MaterialEngin
   return engine;
 }
 
+/** Read when it is asked for: it takes the records of the components. */
+function pseudoCritical(record: MaterialRecord, engine: MaterialEngine): Material['critical'] {
+  if (record.thermodynamics?.model !== 'gas-mixture' || Object.keys(record.thermodynamics.constants['shares'] as object).length === 0) return undefined;
+  const { temperature, pressure, volume, molarMass } = (engine.equation as GasMixture).critical;
+  return { temperature, pressure, density: molarMass / volume };
+}
+
 function partner(collection: Collection, id: string): MaterialRecord {
   const found = collection.record(id);
   if (found === undefined) throw new Problem({ code: 'missing-partner', message: `the record of ${id} is needed and missing` });
@@ -159,12 +169,13 @@ function partner(collection: Collection, id: string): MaterialRecord {
 /**
  * A material from its record.
  *
- * @param record      the record
+ * @param given       the record
  * @param collection  the collection it stands in
  * @param asked       the phase that the name stands for
  * @returns           the material
  */
-export function materialOf(record: MaterialRecord, collection: Collection, asked?: Side): Material {
+export function materialOf(given: MaterialRecord, collection: Collection, asked?: Side): Material {
+  const record = withBoilingPoint(given, (entry, sample) => engineOf(given, collection).evaluate(entry, sample));
   const engine = engineOf(record, collection);
   const has = new Set<string>(Object.keys(record.properties));
   if (record.thermodynamics !== undefined) for (const id of Object.keys(record.thermodynamics.uncertainty)) has.add(id);
@@ -188,7 +199,9 @@ export function materialOf(record: MaterialRecord, collection: Collection, asked
     ...(record.molarMass === undefined ? {} : { molarMass: record.molarMass }),
     ...(record.molarMass === undefined || record.kind === 'solid' ? {} : { gasConstant: gasConstantMolar / record.molarMass }),
     ...(record.flashPoint === undefined ? {} : { flashPoint: record.flashPoint }),
-    ...(record.critical === undefined ? {} : { critical: record.critical }),
+    get critical() {
+      return record.critical ?? pseudoCritical(record, engine);
+    },
     ...(record.triplePoint === undefined ? {} : { triple: record.triplePoint }),
     ...turns('meltingTemperature'),
     ...turns('glassTransitionTemperature'),

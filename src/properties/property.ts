@@ -1,6 +1,7 @@
 import { Problem } from '../problems/index.ts';
 import { fromEquation, inside, insideAny, type Material } from './material.ts';
 import type { Side } from './models/point.ts';
+import { mixtureFlags } from './gas-flags.ts';
 import { isEmptyMixture } from './mixture.ts';
 import { takenPhase } from './phase.ts';
 import type { Band, Box, Entry, Phase, PropertyId } from './record.ts';
@@ -42,22 +43,13 @@ const ofSubstance: readonly string[] = ['vapourPressure', 'saturationTemperature
  * @param material  the material
  * @param state     temperature, pressure, humidity or composition, phase asked for
  * @returns         the state ready for `propertyIn`
- * @throws          {Problem} impossible-state, no-such-phase, between-phases, not-covered, missing-composition, wrong-composition
+ * @throws          {Problem} impossible-state, no-such-phase, between-phases, not-covered, condenses, missing-composition, wrong-composition
  */
 export function takeState(material: Material, state: State): TakenState {
   const x = shareOf(material, state);
   const taken = takenPhase(material, state);
   const sample: Sample = { T: state.temperature, p: state.pressure, side: taken.side === 'solid' ? 'liquid' : taken.side, x };
-  const wet = dewFlag(material, sample);
-  return { sample, phase: taken.phase, solid: taken.side === 'solid', flags: wet === undefined ? taken.flags : [...taken.flags, wet] };
-}
-
-/** A gas by components is carried as a gas below its dew point, and says so. */
-function dewFlag(material: Material, sample: Sample): string | undefined {
-  const [entry] = material.record.properties['saturationTemperature'] ?? [];
-  if (entry === undefined || !material.takes.includes('components')) return undefined;
-  const dew = material.engine.evaluate(entry, sample);
-  return sample.T < dew ? `${material.name} is below its dew point of ${Number(dew.toPrecision(5))} K: water condenses from it` : undefined;
+  return { sample, phase: taken.phase, solid: taken.side === 'solid', flags: [...taken.flags, ...mixtureFlags(material, sample)] };
 }
 
 function shareOf(material: Material, state: State): number {
@@ -140,7 +132,7 @@ function finished(material: Material, property: string, value: number, entry: Om
   const box = entry.ranges.find((one) => inside(one, taken.sample));
   const within = box !== undefined || entry.ranges.length === 0;
   const shown = box ?? entry.ranges[0] ?? {};
-  const uncertainty = bandOf(bands, taken.sample, value) * (within ? 1 : 2);
+  const uncertainty = bandOf(bands, taken.sample, value, () => material.engine.point(taken.sample).departure ?? 0) * (within ? 1 : 2);
   return {
     value,
     uncertainty,
@@ -164,8 +156,8 @@ export function boxText(box: Box): string {
   return parts.length === 0 ? 'any state' : parts.join(', ');
 }
 
-function bandOf(bands: readonly Band[], sample: Sample, value: number): number {
-  const band = bands.find((one) => (one.phase === undefined || one.phase === sample.side) && inside(one, sample)) ?? bands.at(-1);
+function bandOf(bands: readonly Band[], sample: Sample, value: number, departure: () => number): number {
+  const band = bands.find((one) => (one.phase === undefined || one.phase === sample.side) && inside(one, sample) && (one.departure === undefined || departure() <= one.departure)) ?? bands.at(-1);
   if (band === undefined) return Number.NaN;
   return Math.max(band.value, band.absolute === undefined || value === 0 ? 0 : Math.abs(band.absolute / value));
 }

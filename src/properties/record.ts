@@ -48,6 +48,8 @@ export interface Box {
 /** Relative uncertainty, 95 %, in one part of the range; `absolute` is its floor in the unit of the property. */
 export interface Band extends Box {
   readonly phase?: Side;
+  /** Departure from the ideal gas, of a mixture of gases: up to this one. */
+  readonly departure?: number;
   readonly value: number;
   readonly absolute?: number;
 }
@@ -107,6 +109,8 @@ export interface MaterialRecord {
   readonly triplePoint?: { readonly temperature: number; readonly pressure: number };
   /** What the record stands for where the name alone leaves it open, such as a class of oils. */
   readonly about?: string;
+  /** What holds of it at every state, such as components that react with each other. */
+  readonly flags?: readonly string[];
   readonly thermodynamics?: ThermodynamicsEntry;
   readonly properties: { readonly [property: string]: readonly Entry[] };
 }

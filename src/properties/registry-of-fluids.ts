@@ -1,5 +1,6 @@
 import { conductivityOfDensity, type ConductivityOfDensityConstants } from './models/conductivity-of-density.ts';
 import { correspondingConductivity, correspondingViscosity, type CorrespondingConductivityConstants, type CorrespondingViscosityConstants } from './models/corresponding-states.ts';
+import { denseConductivity, denseViscosity, type CriticalPoint } from './models/dense-gas.ts';
 import { entropyScaledViscosity, type EntropyScalingConstants } from './models/entropy-scaling.ts';
 import { heavyWaterConductivity, heavyWaterViscosity, type HeavyWaterConstants } from './models/heavy-water-transport.ts';
 import { heliumConductivity, heliumViscosity, type HeliumConductivityConstants, type HeliumViscosityConstants } from './models/helium-transport.ts';
@@ -27,6 +28,20 @@ const ofTemperature = (constants: readonly string[], law: (c: never) => (T: numb
     return (s) => f(s.T);
   },
 });
+
+/** What the density of a gas adds to the law of the thin one, which another entry of the record holds. */
+const pressed = (property: 'viscosity' | 'thermalConductivity', added: (c: CriticalPoint, density: number) => number): PropertyModel => ({
+  constants: [],
+  make(_c, engine) {
+    const { critical, molarMass } = engine;
+    if (critical === undefined) throw new Error('a dense gas needs a critical point');
+    const at = { ...critical, volume: molarMass / critical.density, molarMass };
+    return (s) => engine.value(property, { T: s.T, p: thin, side: 'vapour', x: s.x }) + added(at, engine.point(s).density / critical.density);
+  },
+});
+
+/** So low that every law of a thin gas holds [Pa]. */
+const thin = 1000;
 
 const shape = ['molarMass', 'critical', 'referenceCritical', 'referenceMolarMass', 'density', 'factor', 'dilute'];
 
@@ -75,6 +90,8 @@ export const fluidModels: { readonly [name: string]: PropertyModel } = {
     };
     return entropyScaledViscosity(c, entropy, equation.gasConstant);
   }),
+  'dense-gas-viscosity': pressed('viscosity', denseViscosity),
+  'dense-gas-conductivity': pressed('thermalConductivity', denseConductivity),
   'helium-viscosity': ofDensity(['dilute', 'dense', 'warm', 'warmTerms'], (c: HeliumViscosityConstants) => heliumViscosity(c)),
   'helium-conductivity': {
     constants: ['dilute', 'diluteTerms', 'linear', 'cubic', 'logarithmic', 'density'],

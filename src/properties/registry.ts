@@ -2,7 +2,7 @@ import { carbonDioxideConductivity, carbonDioxideViscosity, type CarbonDioxideCo
 import { helmholtz, type HelmholtzConstants } from './models/helmholtz.ts';
 import * as aqueous from './models/aqueous.ts';
 import { food } from './models/food.ts';
-import { gasMixture, type GasMixture } from './models/gas-mixture.ts';
+import { gasMixture, type MoistGas } from './models/gas-mixture.ts';
 import { humidAir } from './models/humid-air.ts';
 import { if97, type WaterConstants } from './models/if97.ts';
 import { henry, type HenryConstants } from './models/dissolved-gas.ts';
@@ -107,6 +107,23 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
       return (s) => pressure(s.T, s.x);
     },
   },
+  'ideal-vapour-pressure': {
+    constants: ['molarMass', 'particles'],
+    make(c: Parameters<typeof aqueous.idealVapourPressure>[0], engine) {
+      const water = engine.partner('water');
+      const pressure = aqueous.idealVapourPressure(c, (T) => water.saturation(T));
+      return (s) => pressure(s.T, s.x);
+    },
+  },
+  'boiling-point': {
+    constants: ['from', 'to'],
+    make(c: { from: number; to: number }, engine) {
+      return (s) => {
+        const pressure = (T: number): number => engine.value('vapourPressure', { T, p: s.p, side: 'liquid', x: s.x });
+        return s.p < pressure(c.from) || s.p > pressure(c.to) ? Number.NaN : boilingTemperature(pressure, s.p, c.from, c.to);
+      };
+    },
+  },
   'wiedemann-franz': { constants: ['lorenz'], make: (c: { lorenz: number }, engine) => (s) => engine.value('thermalConductivity', s) / (c.lorenz * s.T) },
   henry: {
     constants: ['A', 'B', 'C', 'critical'],
@@ -196,9 +213,9 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
       };
     },
   },
-  'mixture-viscosity': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as GasMixture).viscosity(s.T, s.p) },
-  'mixture-conductivity': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as GasMixture).conductivity(s.T, s.p) },
-  'dew-point': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as GasMixture).dewPoint(s.T, s.p) },
+  'mixture-viscosity': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as MoistGas).viscosity(s.T, s.p) },
+  'mixture-conductivity': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as MoistGas).conductivity(s.T, s.p) },
+  'dew-point': { constants: [], make: (_c, engine) => (s) => (engine.at(s) as MoistGas).dewPoint(s.T, s.p) },
   'saturation-pressure': { constants: [], make: (_c, engine) => (s) => engine.saturation(s.T) },
   'saturation-temperature': {
     constants: [],

@@ -27,6 +27,8 @@ export interface Engine {
   /** Saturation pressure [Pa] at T. */
   saturation(T: number): number;
   readonly molarMass: number;
+  /** [K], [Pa], [kg/m^3] */
+  readonly critical?: { readonly temperature: number; readonly pressure: number; readonly density: number };
   /** Another material of the collection that a correlation refers to, by id. */
   partner(id: string): Engine;
   /** Constants of the first entry of a property; undefined where there is none. */

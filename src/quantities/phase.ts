@@ -3,8 +3,10 @@ import { quantity, way, wordWay, type Definition } from '../workings/index.ts';
 /** How near the fluid comes to another phase: cavitation, boiling, condensation, freezing. */
 export const phase: Definition[] = [
   ...([['volatile', 'vapourPressure', 'a vapour pressure'], ['boils', 'saturationTemperature', 'a saturation line'], ['melts', 'meltingTemperature', 'a melting point']] as const).map(([id, need, what]) =>
-    quantity(id, { symbol: '', name: `the fluid has ${what}`, unit: 'word', words: ['yes', 'no'] }, [
+    quantity(id, { symbol: '', name: `the fluid has ${what}`, unit: 'word', words: ['yes', 'no', 'unknown'] }, [
       wordWay({ needs: [need], word: () => 'yes', formula: `${what} is known`, source: 'material record' }),
+      // Water boils off and freezes out of a solution whether or not its record says where.
+      ...(id === 'volatile' ? [] : [wordWay({ needs: [], when: { medium: 'liquid', 'has.solution': 'yes' }, word: () => 'unknown', formula: `${what} of the solution is not known`, source: 'material record' })]),
       wordWay({ needs: [], word: () => 'no', formula: `${what} is not known`, source: 'material record' }),
     ])),
   quantity('pressureCoefficientMin', { symbol: '|C_p,min|', name: 'magnitude of the lowest pressure coefficient on the speed scale', unit: '1' }, [

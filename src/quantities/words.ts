@@ -2,7 +2,7 @@ import { rheologyLaws } from './rheology.ts';
 import { quantity, wordWay, type Definition, type QuantityAbout } from '../workings/index.ts';
 
 /** What a case can name at all; absent unless its key stands in the case. */
-export const features = ['species', 'reactions', 'particles', 'otherFluid', 'rheology', 'magneticField', 'frame', 'motion', 'porous', 'period', 'ramp', 'swirl', 'humidity', 'burning', 'roughness', 'layers', 'gravity', 'sources', 'wallMotion', 'partHeated', 'speciesWall', 'severalSpecies', 'fluidReaction', 'surfaceReaction', 'catalystReaction', 'filmReaction', 'reactionHeat'] as const;
+export const features = ['species', 'reactions', 'particles', 'otherFluid', 'rheology', 'magneticField', 'frame', 'motion', 'porous', 'period', 'ramp', 'swirl', 'humidity', 'burning', 'roughness', 'layers', 'gravity', 'sources', 'wallMotion', 'partHeated', 'speciesWall', 'severalSpecies', 'fluidReaction', 'surfaceReaction', 'catalystReaction', 'filmReaction', 'reactionHeat', 'solution'] as const;
 
 /** Configurations that a case can name. */
 const flowNames = [

@@ -41,11 +41,27 @@ describe('runbrief material', () => {
     [['material', 'water', '--over', '20 degC .. 50 degC, 2 bar', '--fit', 'spline'], 2, 'polynomial'],
     [['material', 'water', '--over', '20 degC .. 50 degC, 2 bar', '--fit', 'polynomial', '--of', 'viscosty'], 1, 'nearest   viscosity'],
     [['material', 'water'], 2, 'a state is needed'],
+    [['material', 'water', '--at', '20 degC, 1 bar, humidity 40 %'], 1, 'nearest   humid air'],
+    [['material', 'air', '--over', '20 degC .. 60 degC, 1 bar, humidity 40 %'], 1, 'nearest   humid air'],
+    [['material', 'flue gas', '--at', '150 degC, 1 bar, humidity 40 %'], 1, 'water as one of its components'],
+    [['material', 'propylene glycol', '--at', '20 degC, 1 bar, composition 40 %'], 1, 'nearest   propylene glycol-water'],
+    [['material', 'water', '--at', '20 degC, 1 bar, propylene glycol 40 %'], 1, 'propylene glycol-water with "composition 40 % mass"'],
+    [['material', 'propylene glycol', '--at', '20 degC, 1 bar, water 60 %'], 1, 'propylene glycol-water with "composition 40 % mass"'],
+    [['material', 'water', '--at', '20 degC, 1 bar, glycol 40 %'], 1, 'ethylene glycol-water or propylene glycol-water'],
+    [['material', 'ethylene glycol-water', '--at', '20 degC, 1 bar, propylene glycol 40 %'], 1, 'nearest   propylene glycol-water'],
+    [['material', 'ethylene glycol-water', '--at', '20 degC, 1 bar, ethylene glycol 40 % mol'], 1, 'a share by mass'],
+    [['material', 'water', '--at', '20 degC, 1 bar, oxygen 40 %'], 1, 'no mixture of gases'],
     [['material', 'water', '--over', '60 degC, 2 bar'], 1, 'the state has no range'],
   ])('%j', async (argv, code, says) => {
     const ended = await runbrief(argv);
     expect([ended.code, ended.stdout]).toEqual([code, '']);
     expect(ended.stderr).toContain(says);
+  });
+
+  it('takes the solute by its name as the composition', async () => {
+    const byShare = await runbrief(['material', 'propylene glycol-water', '--at', '20 degC, 1 bar, composition 40 % mass']);
+    for (const said of ['propylene glycol 40 %', 'water 60 %', 'water 60 % mass, propylene glycol 40 % mass']) expect((await runbrief(['material', 'propylene glycol-water', '--at', `20 degC, 1 bar, ${said}`])).stdout).toBe(byShare.stdout);
+    expect(byShare.code).toBe(0);
   });
 
   it('gives functions ready to type in, within 80 columns', async () => {

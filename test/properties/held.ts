@@ -1,10 +1,12 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { Problem } from '../../src/problems/index.ts';
-import { loadMaterial, materialRecords, propertyAt, type PropertyId, type PropertyValue, type State } from '../../src/properties/index.ts';
+import { loadMaterial, materialRecords, mixtureOf, parseState, propertyAt, type Material, type PropertyId, type PropertyValue, type State } from '../../src/properties/index.ts';
 
 /** One value of a record held against another program or work. */
 export interface Held {
   readonly material: string;
+  /** Of a mixture of gases: `component share + component share` by mole. */
+  readonly components?: string;
   readonly property: PropertyId;
   readonly reference: string;
   /** A program that evaluates the same equation, another work, or a value named by the record itself. */
@@ -28,9 +30,9 @@ export const ofHandbooks: { readonly [property: string]: number } = { density: 0
 const text = (name: string): string => readFileSync(new URL(name, import.meta.url), 'utf8').trim();
 
 /** The value of a record at a state; undefined where the record does not cover it. */
-function valueAt(material: string, property: PropertyId, state: State): PropertyValue | undefined {
+function valueAt(material: Material, property: PropertyId, state: State): PropertyValue | undefined {
   try {
-    const found = propertyAt(loadMaterial(material), property, state);
+    const found = propertyAt(material, property, state);
     return found?.withinRange === true ? found : undefined;
   } catch (error) {
     if (error instanceof Problem) return undefined;
@@ -38,8 +40,18 @@ function valueAt(material: string, property: PropertyId, state: State): Property
   }
 }
 
+const mixtures = new Map<string, Material>();
+function materialOf(name: string, components: string | undefined): Material {
+  if (components === undefined) return loadMaterial(name);
+  const key = `${name} of ${components}`;
+  const material = mixtures.get(key) ?? mixtureOf(loadMaterial(name), parseState(components.replaceAll(' + ', ', ')).components ?? []);
+  mixtures.set(key, material);
+  return material;
+}
+
 interface Reference {
   readonly material: string;
+  readonly components?: string;
   readonly property: PropertyId;
   readonly reference: string;
   readonly by: Held['by'];
@@ -48,11 +60,11 @@ interface Reference {
   readonly allow: (declared: number) => number;
 }
 
-function held({ material, property, reference, by, state, expected, allow }: Reference): Held | undefined {
-  const found = valueAt(material, property, state);
+function held({ material, components, property, reference, by, state, expected, allow }: Reference): Held | undefined {
+  const found = valueAt(materialOf(material, components), property, state);
   if (found === undefined) return undefined;
   const share = state.composition ?? state.humidity;
-  return { material, property, reference, by, T: state.temperature, p: state.pressure, ...(share === undefined ? {} : { share }), phase: found.phase, value: found.value, expected, off: Math.abs(found.value / expected - 1), declared: found.uncertainty, allowed: allow(found.uncertainty) };
+  return { material, ...(components === undefined ? {} : { components }), property, reference, by, T: state.temperature, p: state.pressure, ...(share === undefined ? {} : { share }), phase: found.phase, value: found.value, expected, off: Math.abs(found.value / expected - 1), declared: found.uncertainty, allowed: allow(found.uncertainty) };
 }
 
 /** Pure fluids: independent-fluids.csv, made by the script of the same name; states outside the declared ranges are left out. */
@@ -74,6 +86,7 @@ export function ofFluids(): Held[] {
 /** A row of the tables in compared/, each made by the script of its name. */
 interface TableRow {
   readonly material: string;
+  readonly components?: string;
   readonly property: PropertyId;
   readonly reference: string;
   readonly state: State;
@@ -85,8 +98,9 @@ export function tableRows(): TableRow[] {
   const folder = new URL('./compared/', import.meta.url);
   const tables = readdirSync(folder).filter((name) => name.endsWith('.csv')).toSorted();
   return tables.flatMap((name) => readFileSync(new URL(name, folder), 'utf8').trim().split('\n').slice(1)).map((line) => {
-    const [material = '', property = '', T, p, share, value, ...reference] = line.split(',');
-    return { material, property: property as PropertyId, reference: reference.join(',').replace(/^"|"$/g, ''), state: { temperature: Number(T), pressure: Number(p), ...(share === '' ? {} : { composition: Number(share) }) }, expected: Number(value) };
+    const [named = '', property = '', T, p, share, value, ...reference] = line.split(',');
+    const [, material = '', components] = /^(.*?)(?: of (.*%))?$/.exec(named) ?? [];
+    return { material, ...(components === undefined ? {} : { components }), property: property as PropertyId, reference: reference.join(',').replace(/^"|"$/g, ''), state: { temperature: Number(T), pressure: Number(p), ...(share === '' ? {} : { composition: Number(share) }) }, expected: Number(value) };
   });
 }
 

@@ -1,9 +1,10 @@
 import { describe, expect, it } from 'vitest';
-import { loadMaterial, mixtureOf, parseState, propertyAt, stateOf, takeState } from '../../src/properties/index.ts';
-import { mixedTransport } from '../../src/properties/models/gas-mixture.ts';
+import { loadMaterial, mixtureOf, parseState, propertyAt, stateOf, takeState, type Material } from '../../src/properties/index.ts';
+import { mixedTransport, type GasMixture } from '../../src/properties/models/gas-mixture.ts';
 import { codeOf } from './harness.ts';
 
 const any = loadMaterial('gas mixture');
+const made = (parts: string): Material => mixtureOf(any, parseState(parts).components ?? []);
 
 describe('mixtures of gases by composition', () => {
   it('reads components in both orders, and salinity as the share of salt', () => {
@@ -36,11 +37,59 @@ describe('mixtures of gases by composition', () => {
   });
 
   it('the water of a flue gas condenses where its partial pressure says', () => {
-    // 17.2 % of 101 325 Pa is 17 428 Pa, the saturation pressure at 330.262 K (IAPWS R6-95, another library)
+    // 17.2 % of 101 325 Pa is 17 428 Pa, the saturation pressure at 330.262 K (IAPWS R6-95, another library); the other gases draw 0.4 % more of it out of the liquid.
     const flue = loadMaterial('flue gas');
-    expect(propertyAt(flue, 'saturationTemperature', { temperature: 450, pressure: 101325 })?.value).toBeCloseTo(330.262, 2);
+    expect(propertyAt(flue, 'saturationTemperature', { temperature: 450, pressure: 101325 })?.value).toBeCloseTo(330.2, 1);
     expect(takeState(flue, { temperature: 310, pressure: 101325 }).flags.join()).toContain('below its dew point');
     expect(takeState(flue, { temperature: 350, pressure: 101325 }).flags).toEqual([]);
+  });
+
+  // Dew points of the multi-fluid equation of CoolProp 8.0.0 (GERG-2008 of Kunz and Wagner 2012).
+  it.each([
+    ['nitrogen 80 % mol, propane 20 % mol', 1e6, 244.7], ['nitrogen 80 % mol, propane 20 % mol', 4e6, 278.46],
+    ['methane 60 % mol, ethane 25 % mol, propane 15 % mol', 1e6, 243.35], ['methane 60 % mol, ethane 25 % mol, propane 15 % mol', 4e6, 278.18],
+    ['methane 90 % mol, n-butane 10 % mol', 1e6, 268.6], ['methane 90 % mol, n-butane 10 % mol', 5e6, 302.24],
+    ['methane 50 % mol, hydrogen sulphide 50 % mol', 2e6, 268.97], ['nitrogen 10 % mol, carbon dioxide 90 % mol', 2e6, 249.37], ['nitrogen 10 % mol, carbon dioxide 90 % mol', 5e6, 280.32],
+  ] as const)('%s at %d Pa is a gas from %d K on', (parts, p, dew) => {
+    const material = made(parts);
+    const equation = material.engine.equation as GasMixture;
+    expect(equation.condensing(dew + 4, p)).toBeUndefined();
+    expect(equation.condensing(dew - 4, p)).toBeDefined();
+  });
+
+  it('a trace that condenses is a flag, more is refused', () => {
+    expect(takeState(made('methane 90 % mol, n-butane 10 % mol'), { temperature: 290, pressure: 4e6 }).flags.join()).toContain('below the dew point');
+    expect(codeOf(() => takeState(made('nitrogen 10 % mol, carbon dioxide 90 % mol'), { temperature: 250, pressure: 5e6 }))).toBe('condenses');
+    // Propane of 8.4 bar at 20 degC (its own record).
+    expect(codeOf(() => takeState(made('propane 100 % mol'), { temperature: 293.15, pressure: 8e5 }))).toBe('none');
+    for (const pressure of [9e5, 20e5, 90e5]) expect(codeOf(() => takeState(made('propane 100 % mol'), { temperature: 293.15, pressure }))).toBe('condenses');
+  });
+
+  it('components that react are flagged, inert ones are not', () => {
+    const flagsOf = (parts: string): string => takeState(made(parts), { temperature: 400, pressure: 1e5 }).flags.join();
+    expect(flagsOf('methane 10 % mol, oxygen 19 % mol, nitrogen 71 % mol')).toContain('can burn with each other');
+    expect(flagsOf('ammonia 5 % mol, hydrogen chloride 5 % mol, nitrogen 90 % mol')).toContain('ammonium chloride');
+    expect(flagsOf('carbon monoxide 0.1 % mol, oxygen 10 % mol, nitrogen 89.9 % mol')).toBe('');
+    expect(flagsOf('methane 60 % mol, carbon dioxide 40 % mol')).toBe('');
+  });
+
+  it('a mixture near its pseudo-critical point is flagged', () => {
+    // By Kay's rule 0.9 * 304.13 K + 0.1 * 126.19 K = 286.3 K and about 70 bar.
+    expect(takeState(made('carbon dioxide 90 % mol, nitrogen 10 % mol'), { temperature: 300, pressure: 7e6 }).flags.join()).toContain('near the critical point');
+    expect(takeState(made('carbon dioxide 90 % mol, nitrogen 10 % mol'), { temperature: 400, pressure: 7e6 }).flags).toEqual([]);
+  });
+
+  it('transport is told to be carried beyond the records of the components', () => {
+    const within = (parts: string, temperature: number): boolean | undefined => propertyAt(made(parts), 'thermalConductivity', { temperature, pressure: 1e5 })?.withinRange;
+    expect(within('propane 30 % mol, nitrogen 70 % mol', 700)).toBe(true);
+    expect(within('propane 30 % mol, nitrogen 70 % mol', 1000)).toBe(false); // multicomponent theory reads 20 % less there
+    expect(within('oxygen 21 % mol, nitrogen 79 % mol', 1400)).toBe(true);
+  });
+
+  it('a mixture within a mixture is its components', () => {
+    const both = made('biogas 50 % mol, nitrogen 50 % mol');
+    expect(both.molarMass).toBeCloseTo(((loadMaterial('biogas').molarMass ?? 0) + 0.02801348) / 2, 5);
+    expect(made('air 50 % mol, carbon dioxide 50 % mol').molarMass).toBeCloseTo((0.02896546 + 0.0440098) / 2, 5);
   });
 
   it.each([
@@ -48,6 +97,7 @@ describe('mixtures of gases by composition', () => {
     ['wrong-composition', () => mixtureOf(any, [{ name: 'oxygen', share: 0.5 }])],
     ['wrong-composition', () => mixtureOf(any, [{ name: 'oxygen', share: 0.5, basis: 'mass' }, { name: 'nitrogen', share: 0.5, basis: 'mol' }])],
     ['wrong-composition', () => mixtureOf(any, [{ name: 'copper', share: 0.5 }, { name: 'nitrogen', share: 0.5 }])],
+    ['wrong-composition', () => mixtureOf(any, [{ name: 'nitric oxide', share: 0.5 }, { name: 'nitrogen', share: 0.5 }])],
     ['unknown-material', () => mixtureOf(any, [{ name: 'unobtainium', share: 1 }])],
     ['no-mixture', () => mixtureOf(loadMaterial('water'), [{ name: 'oxygen', share: 1 }])],
     ['unreadable-state', () => parseState('20 degC, 1 bar, oxygen 20 .. 30 % mol')],

@@ -103,6 +103,27 @@ describe('phases', () => {
     expect(Math.abs((saturationOf(loadMaterial(name))?.boiling(101325) ?? 0) - 273.15 - boils)).toBeLessThan(0.5);
   });
 
+  // Boiling points of solutions at 1 atm [degC]: ASHRAE Handbook Fundamentals, tables of aqueous ethylene and propylene glycol; handbook tables of brines, glycerol and sugar; all from memory.
+  it.each([
+    ['ethylene glycol-water', 0.1, 101.1], ['ethylene glycol-water', 0.3, 104.4], ['ethylene glycol-water', 0.4, 105.6], ['ethylene glycol-water', 0.5, 107.2], ['ethylene glycol-water', 0.6, 110],
+    ['propylene glycol-water', 0.2, 100.6], ['propylene glycol-water', 0.3, 102.2], ['propylene glycol-water', 0.4, 103.9], ['propylene glycol-water', 0.5, 105.6], ['propylene glycol-water', 0.6, 107.2],
+    ['glycerol-water', 0.5, 106], ['glycerol-water', 0.6, 109], ['sodium chloride brine', 0.1, 101.9], ['sodium chloride brine', 0.2, 104.7], ['sucrose solution', 0.4, 101.4], ['sea water', 0.035, 100.55],
+  ])('%s of %d boils at %d degC', (name, composition, boils) => {
+    const material = loadMaterial(name);
+    const found = propertyAt(material, 'saturationTemperature', { temperature: 293.15, pressure: 101325, composition });
+    const pressure = propertyAt(material, 'vapourPressure', { temperature: 293.15, pressure: 101325, composition });
+    expect(Math.abs((found?.value ?? 0) - 273.15 - boils)).toBeLessThan((found?.uncertainty ?? 0) * 373);
+    expect(Math.abs((found?.value ?? 0) - 273.15 - boils)).toBeLessThan(1.9);
+    expect(saturationOf(material, composition)?.bubble(found?.value ?? 0)).toBeCloseTo(101325, 0);
+    expect(pressure?.value).toBeLessThan(2339.3); // water at 20 degC, IAPWS R7-97
+  });
+
+  it('the liquids of handbooks boil where their vapour pressure says', () => {
+    // Acetic acid 117.9 degC, 1-propanol 97.2 degC (CRC Handbook of Chemistry and Physics, 95th ed.)
+    for (const [name, boils] of [['acetic acid', 117.9], ['1-propanol', 97.2]] as const) expect((propertyAt(loadMaterial(name), 'saturationTemperature', { temperature: 300, pressure: 101325 })?.value ?? 0) - 273.15, name).toBeCloseTo(boils, 0);
+    expect(propertyAt(loadMaterial('calcium chloride brine'), 'saturationTemperature', { temperature: 300, pressure: 101325, composition: 0.2 })).toBeUndefined();
+  });
+
   // Melting points of the CRC Handbook of Chemistry and Physics, 95th ed. [degC]
   it.each([['acetone', -94.7], ['benzene', 5.49], ['ammonia', -77.65], ['cyclohexane', 6.59], ['heavy water', 3.82], ['n-dodecane', -9.57], ['p-xylene', 13.25], ['ethanol', -114.14]])('%s melts at %d degC', (name, melts) => {
     expect(Math.abs((loadMaterial(name).meltingTemperature ?? 0) - 273.15 - melts)).toBeLessThan(0.8);

@@ -109,3 +109,16 @@ export const glycerolViscosity: OfShare = (T, share) => {
 
 /** Salt lowers the vapour pressure: p/p_w = 1/(1 + f w/(1 - w)). Source: Sharqawy, Lienhard and Zubair, Desalin. Water Treat. 16 (2010) 354, eq. (26). */
 export const loweredVapourPressure = (c: { factor: number }, ofWater: (T: number) => number): OfShare => (T, w) => ofWater(T) / (1 + (c.factor * w) / (1 - w));
+
+/**
+ * Vapour pressure of water above an ideal solution of what does not boil off, p = x_w p_w.
+ *
+ * @param c        molar mass of the solute [kg/mol], particles that one of its molecules falls into
+ * @param ofWater  vapour pressure of water [Pa] of T [K]
+ * @returns        [Pa] of T [K] and mass share w
+ * @source         Raoult, C. R. Acad. Sci. 104 (1887) 1430
+ */
+export const idealVapourPressure = (c: { molarMass: number; particles: number }, ofWater: (T: number) => number): OfShare => (T, w) => {
+  const water = (1 - w) / 0.018015268;
+  return (ofWater(T) * water) / (water + (c.particles * w) / c.molarMass);
+};

@@ -1,6 +1,6 @@
 import { Problem } from '../../problems/index.ts';
 import type { Engine, Sample } from '../sample.ts';
-import { mixedTransport, type GasMixture } from './gas-mixture.ts';
+import { mixedTransport, type MoistGas } from './gas-mixture.ts';
 import type { Point } from './point.ts';
 
 const R = 8.31446261815324;
@@ -32,7 +32,7 @@ export interface MoistAir {
 }
 
 /** Equation of state of humid air, with what belongs to the mixture alone. */
-export interface HumidAir extends GasMixture {
+export interface HumidAir extends MoistGas {
   moist(T: number, p: number, humidity: number): MoistAir;
 }
 

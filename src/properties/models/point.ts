@@ -18,6 +18,8 @@ export interface Point {
   compressibility: number;
   /** [J/kg]; only differences mean something. */
   enthalpy: number;
+  /** How far a mixture of gases is from an ideal gas: repulsion and attraction in its compressibility factor, added. */
+  departure?: number;
 }
 
 /** The two sides of a saturation line that an equation of state can be asked for. */
