@@ -41,14 +41,9 @@ export function fluidLaws(material: Material, state: State): MaterialLaws {
       about[id] = { formula: `constant of ${material.name}`, source: 'material record' };
     }
   }
-  const density = laws['density'];
-  if (laws['molarMass'] === undefined && density !== undefined && (taken.phase === 'gas' || taken.phase === 'vapour')) {
-    laws['molarMass'] = Object.assign((T: number, p: number) => (density(T, p) * 8.31446261815324 * T) / p, { uncertainty: density.uncertainty });
-    about['molarMass'] = { formula: 'M = rho R_u T/p, from the density of the mixture', source: about['density']?.source ?? 'material record' };
-  }
   const vapour = saturatedVapour(material, state);
   if (vapour !== undefined && 'saturationTemperature' in laws) {
-    laws['vapourDensity'] = Object.assign(vapour, { uncertainty: () => 0.01 });
+    laws['vapourDensity'] = Object.assign((T: number, p: number) => vapour(T, p)?.value ?? Number.NaN, { uncertainty: (T: number, p: number) => vapour(T, p)?.uncertainty ?? 0 });
     about['vapourDensity'] = { formula: `rho_v(p) of ${material.name}, saturated`, source: about['saturationTemperature']?.source ?? 'material record' };
   }
   return { laws, about, phase: taken.phase, flags: taken.flags };
@@ -68,16 +63,16 @@ function remembered(law: (T: number, p: number) => number): (T: number, p: numbe
   };
 }
 
-/** Density of saturated vapour as a function of pressure, where the record covers the vapour. */
-function saturatedVapour(material: Material, state: State): ((T: number, p: number) => number) | undefined {
+/** Density of saturated vapour by pressure, where the record covers the vapour. */
+function saturatedVapour(material: Material, state: State): ((T: number, p: number) => ReturnType<typeof propertyIn>) | undefined {
   if (!material.phases.includes('vapour') || !material.properties.includes('saturationTemperature')) return undefined;
   return (_, p) => {
     const boiling = lawsOf(material, state).law('saturationTemperature')?.(state.temperature, p);
-    if (boiling === undefined) return Number.NaN;
+    if (boiling === undefined) return undefined;
     try {
-      return propertyIn(material, 'density', takeState(material, { ...state, temperature: boiling, pressure: p, phase: 'vapour' }))?.value ?? Number.NaN;
+      return propertyIn(material, 'density', takeState(material, { ...state, temperature: boiling, pressure: p, phase: 'vapour' }));
     } catch (problem) {
-      if (problem instanceof Problem) return Number.NaN; // below the triple point no liquid boils
+      if (problem instanceof Problem) return undefined; // below the triple point no liquid boils
       throw problem;
     }
   };

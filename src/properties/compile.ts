@@ -92,7 +92,7 @@ function thermodynamics(reader: YamlReader, given: unknown): object {
     reader.complain(['thermodynamics', 'uncertainty'], { code: 'wrong-uncertainty', message: 'an equation of state states an uncertainty per property' });
     return {};
   }
-  reader.keys(['thermodynamics', 'uncertainty'], bands, [...recorded]);
+  reader.keys(['thermodynamics', 'uncertainty'], bands, [...recorded, 'molarMass']);
   const uncertainty: Record<string, Band[]> = {};
   for (const [id, one] of Object.entries(bands)) uncertainty[id] = readBands(reader, ['thermodynamics', 'uncertainty', id], one, propertyUnits[id as PropertyId] ?? '1');
   return { thermodynamics: { ...entry, uncertainty } };

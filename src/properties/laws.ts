@@ -81,7 +81,7 @@ export function laws(material: Material, state: State, factors: { readonly [prop
   };
   const call = (property: PropertyId): (() => number) | undefined => {
     if (!material.properties.includes(property)) return undefined;
-    if (property === 'molarMass') return () => material.molarMass ?? Number.NaN;
+    if (property === 'molarMass' && material.molarMass !== undefined) return () => material.molarMass as number;
     if (property === 'kinematicViscosity' || property === 'thermalDiffusivity' || property === 'prandtl') {
       const [mu, k, rho, cp] = (['viscosity', 'thermalConductivity', 'density', 'specificHeatCapacity'] as const).map(scaled) as [() => number, () => number, () => number, () => number];
       if (property === 'kinematicViscosity') return () => mu() / rho();

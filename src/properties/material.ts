@@ -49,7 +49,9 @@ export interface MaterialEngine extends Engine {
   entry(property: string, sample: Sample, asked?: Side | 'solid'): Entry | undefined;
 }
 
-/** Properties that an equation of state gives. */
+const gasConstantMolar = 8.31446261815324;
+
+/** Properties that an equation of state gives; the molar mass where it moves with the composition, as of moist air. */
 export const fromEquation = {
   density: (at) => at.density,
   specificHeatCapacity: (at) => at.specificHeatCapacity,
@@ -58,9 +60,8 @@ export const fromEquation = {
   enthalpy: (at) => at.enthalpy,
   compressibilityFactor: (at, R) => at.pressure / (at.density * R * at.temperature),
   isentropicExponent: (at) => (at.density * at.speedOfSound * at.speedOfSound) / at.pressure,
+  molarMass: (_, R) => gasConstantMolar / R,
 } satisfies { [property: string]: (at: Point, gasConstant: number) => number };
-
-const gasConstantMolar = 8.31446261815324;
 
 const within = (range: readonly [number, number] | undefined, x: number): boolean => range === undefined || (x >= range[0] * (1 - 1e-9) && x <= range[1] * (1 + 1e-9));
 

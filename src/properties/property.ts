@@ -99,7 +99,7 @@ export function emissivities(material: Material, T: number): PropertyValue[] {
 export function propertyIn(material: Material, property: PropertyId, taken: TakenState): PropertyValue | undefined {
   const { sample, phase, solid } = taken;
   const { record, engine } = material;
-  if (property === 'molarMass') return material.molarMass === undefined ? undefined : plain(material.molarMass, phase, 'atomic weights, IUPAC');
+  if (property === 'molarMass' && material.molarMass !== undefined) return plain(material.molarMass, phase, 'atomic weights, IUPAC');
   if (property === 'kinematicViscosity') return combine(material, taken, [['viscosity', 1], ['density', -1]]);
   if (property === 'thermalDiffusivity') return combine(material, taken, [['thermalConductivity', 1], ['density', -1], ['specificHeatCapacity', -1]]);
   if (property === 'prandtl') return combine(material, taken, [['viscosity', 1], ['specificHeatCapacity', 1], ['thermalConductivity', -1]]);
