@@ -7,7 +7,7 @@ const Module = require('node:module');
 const path = require('node:path');
 const vm = require('node:vm');
 
-// Most commands end before optimised code would pay for its making: it begins later than usual, and a long scan still gets it.
+// Most commands end before optimised code would pay for its making: it begins later than usual, that of patterns too, and a long scan still gets it.
 // Other switches stay alone: what the collector of garbage is told after the start brings the runtime down. The documented way to
 // the switch, node:v8, loads all of the runtime's streams first, a tenth of a plan; so it comes second.
 function setSwitches(text) {
@@ -21,7 +21,7 @@ function setSwitches(text) {
     process.noDeprecation = noDeprecation;
   }
 }
-setSwitches('--interrupt-budget=2000000');
+setSwitches('--interrupt-budget=2000000 --regexp-tier-up-ticks=40');
 
 const file = path.join(__dirname, '..', 'dist', 'main.cjs');
 
