@@ -97,7 +97,9 @@ function triesOf(on: Case, t: Target, walls: readonly string[]): string[] {
   const named = speciesNamed(on, [t]);
   const species = targetSpecies(on).species === `species.${named}` ? undefined : named;
   const wall = walls.find((w) => t.place !== undefined && t.place.toLowerCase().split(/[\s,]+/).includes(w));
-  return [...(t.mean === 'peak' ? [`${t.quantity}Peak`] : []), ...(wall === undefined ? [] : [`${t.quantity}@walls.${wall}`]), ...(species === undefined ? [] : [`${t.quantity}@species.${species}`]), t.quantity];
+  const outlet = t.place !== undefined && /\boutlet\b/i.test(t.place);
+  const plain = [...(t.mean === 'peak' ? [`${t.quantity}Peak`] : []), ...(outlet ? [`${t.quantity}Outlet`] : [])];
+  return [...(wall === undefined ? [] : plain.map((id) => `${id}@walls.${wall}`)), ...plain, ...(wall === undefined ? [] : [`${t.quantity}@walls.${wall}`]), ...(species === undefined ? [] : [`${t.quantity}@species.${species}`]), t.quantity];
 }
 
 /**

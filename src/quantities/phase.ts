@@ -22,7 +22,7 @@ export const phase: Definition[] = [
     way({ needs: ['cavitationNumber', 'pressureCoefficientMin', 'density', 'speed'], value: ({ cavitationNumber, pressureCoefficientMin, density, speed }) => Math.max(0, pressureCoefficientMin - cavitationNumber) * 0.5 * density * speed ** 2, formula: 'dp_v = (|C_p,min| - sigma_c) rho U^2/2', source: 'definition' }),
   ]),
   quantity('boilingMargin', { symbol: 'T_w - T_sat', name: 'wall above saturation at the lowest pressure', unit: 'K', signed: true, per: ['wall'], plain: 'largest' }, [
-    way({ needs: ['wallTemperature', 'saturationTemperature'], when: { medium: 'liquid' }, value: ({ wallTemperature, saturationTemperature }) => wallTemperature - saturationTemperature, formula: 'T_w - T_sat(p_min)', source: 'definition' }),
+    way({ needs: ['wallTemperatureMax', 'saturationTemperature'], when: { medium: 'liquid' }, value: ({ wallTemperatureMax, saturationTemperature }) => wallTemperatureMax - saturationTemperature, formula: 'T_w,max - T_sat(p_min)', source: 'definition' }),
   ]),
   quantity('boilingOnset', { symbol: 'dT_ONB', name: 'wall superheat at which boiling begins', unit: 'K', signed: true, per: ['wall'], plain: 'target' }, [
     way({ needs: ['surfaceTension', 'saturationTemperature', 'wallHeatFlux', 'vapourDensity', 'latentHeat', 'thermalConductivityWall'], scatter: 0.5, value: ({ surfaceTension, saturationTemperature, wallHeatFlux, vapourDensity, latentHeat, thermalConductivityWall }) => Math.sqrt((8 * surfaceTension * saturationTemperature * Math.max(0, wallHeatFlux)) / (vapourDensity * latentHeat * thermalConductivityWall)), formula: 'dT_ONB = sqrt(8 sigma T_sat q/(rho_v h_fg k_l))', source: 'Davis and Anderson, AIChE J. 12 (1966) 774' }),

@@ -29,12 +29,15 @@ function surfaces(): Definition[] {
     quantity('exchangeEmissivity', { symbol: 'eps_12', name: 'emissivity of the exchange between the hottest and the coldest wall', unit: '1' }, [
       way({ needs: ['emissivity'], as: 'assumed', value: ({ emissivity }) => emissivity / (2 - emissivity), formula: 'eps_12 = 1/(2/eps - 1)', source: 'both walls are taken as alike' }),
     ]),
+    ...(['hottest', 'coldest'] as const).map((which) => quantity(`${which}Wall`, { symbol: which === 'hottest' ? 'T_1' : 'T_2', name: `mean temperature of the ${which} wall`, unit: 'K', signed: true, per: ['wall'], plain: which === 'hottest' ? 'largest' : 'smallest' }, [
+      way({ needs: ['wallTemperature'], value: ({ wallTemperature }) => wallTemperature, formula: 'T_w', source: definition }),
+    ])),
     quantity('wallTemperatureSpan', { symbol: 'dT_w', name: 'hottest against coldest wall', unit: 'K' }, [
-      way({ needs: ['wallTemperatureMax', 'wallTemperatureMin'], value: ({ wallTemperatureMax, wallTemperatureMin }) => wallTemperatureMax - wallTemperatureMin, formula: 'T_w,max - T_w,min', source: definition }),
+      way({ needs: ['hottestWall', 'coldestWall'], value: ({ hottestWall, coldestWall }) => hottestWall - coldestWall, formula: 'T_1 - T_2', source: definition }),
     ]),
     quantity('radiativeFlux', { symbol: 'q_r', name: 'net radiation from the target wall', unit: 'W/m^2', signed: true }, [
       way({ needs: ['wallTemperature', 'surroundingsTemperature', 'emissivity'], when: { ...clear, flowClass: 'body' }, value: (of) => of.emissivity * black(of.wallTemperature, of.surroundingsTemperature), formula: 'q_r = eps sigma (T_w^4 - T_sur^4), large surroundings', source: stefan, dimensional: constant }),
-      way({ needs: ['wallTemperatureMax', 'wallTemperatureMin', 'exchangeEmissivity'], when: { ...clear, flowClass: ['enclosure', 'internal'] }, value: (of) => of.exchangeEmissivity * black(of.wallTemperatureMax, of.wallTemperatureMin), formula: 'q_r = eps_12 sigma (T_1^4 - T_2^4), hottest and coldest wall as large parallel surfaces', source: stefan, dimensional: constant }),
+      way({ needs: ['hottestWall', 'coldestWall', 'exchangeEmissivity'], when: { ...clear, flowClass: ['enclosure', 'internal'] }, value: (of) => of.exchangeEmissivity * black(of.hottestWall, of.coldestWall), formula: 'q_r = eps_12 sigma (T_1^4 - T_2^4), hottest and coldest wall as large parallel surfaces', source: stefan, dimensional: constant }),
     ]),
     quantity('convectiveFluxPlain', { symbol: 'q_c', name: 'convective flux from the target wall with the plain Nusselt number', unit: 'W/m^2', signed: true }, [
       way({ needs: ['heatTransferCoefficientPlain', 'wallTemperature', 'farTemperature'], when: { flowClass: 'body' }, value: (of) => of.heatTransferCoefficientPlain * (of.wallTemperature - of.farTemperature), formula: 'q_c = h_0 (T_w - T_far)', source: definition }),

@@ -5,5 +5,5 @@
  * @returns   true for temperatures, limits and ends of temperature targets
  */
 export function isTemperature(id: string): boolean {
-  return /(?:temperature(?:Peak|Mean|Max|Min)?|saturation|limit|ifLaminar|ifTurbulent)$/i.test(id.split('@')[0] as string);
+  return /(?:temperature(?:Peak|Least|Inlet|Outlet|Mean|Max|Min)?|(?:hottest|coldest)Wall|saturation|limit|ifLaminar|ifTurbulent)$/i.test(id.split('@')[0] as string);
 }

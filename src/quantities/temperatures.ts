@@ -66,10 +66,12 @@ export const temperatures: Definition[] = [
     way({ needs: ['wallTemperature', 'farTemperature'], value: ({ wallTemperature, farTemperature }) => Math.abs(wallTemperature - farTemperature), formula: 'dT = |T_w - T_far|', source: 'definition' }),
   ]),
   quantity('wallTemperatureMax', { symbol: 'T_w,max', name: 'hottest wall', ...kelvin, per: ['wall'], plain: 'largest' }, [
-    way({ needs: ['wallTemperature'], value: ({ wallTemperature }) => wallTemperature, formula: 'T_w', source: 'definition' }),
+    way({ needs: ['wallTemperaturePeak'], value: ({ wallTemperaturePeak }) => wallTemperaturePeak, formula: 'T_w at its hottest place', source: 'definition' }),
+    way({ needs: ['wallTemperature'], value: ({ wallTemperature }) => wallTemperature, formula: 'T_w', source: 'its mean: how it runs along the wall is not known' }),
   ]),
   quantity('wallTemperatureMin', { symbol: 'T_w,min', name: 'coldest wall', ...kelvin, per: ['wall'], plain: 'smallest' }, [
-    way({ needs: ['wallTemperature'], value: ({ wallTemperature }) => wallTemperature, formula: 'T_w', source: 'definition' }),
+    way({ needs: ['wallTemperatureLeast'], value: ({ wallTemperatureLeast }) => wallTemperatureLeast, formula: 'T_w at its coldest place', source: 'definition' }),
+    way({ needs: ['wallTemperature'], value: ({ wallTemperature }) => wallTemperature, formula: 'T_w', source: 'its mean: how it runs along the wall is not known' }),
   ]),
   ...(['highest', 'lowest'] as const).map((which) => {
     const [wall, enclosed, join] = which === 'highest' ? (['wallTemperatureMax', 'hotTemperature', Math.max] as const) : (['wallTemperatureMin', 'coldTemperature', Math.min] as const);

@@ -1,6 +1,17 @@
-import { loop, quantity, way, type Definition } from '../workings/index.ts';
+import { loop, quantity, way, type Definition, type Law, type Way } from '../workings/index.ts';
 
+const definition = 'definition of the heat-transfer coefficient';
 const kelvin = { unit: 'K', signed: true };
+
+/** A wall of one temperature, or one that exchanges heat with its surroundings: where the bulk is at an end of the passage. */
+const along = (end: 'inletTemperature' | 'outletTemperature', symbol: string, bulk: string): Way =>
+  way({ needs: [end, 'drivingTemperature', 'overallCoefficient', 'innerResistance'], when: { wallKind: ['temperature', 'coefficient'], flowClass: 'internal' }, value: (of) => of[end] + of.overallCoefficient * of.innerResistance * (of.drivingTemperature - of[end]), formula: `${symbol} = ${bulk} + U_w R_i (T_d - ${bulk})`, source: 'resistances in series, mean h' });
+
+/** The outermost of mean, inlet and outlet; a wall in an open flow has its mean alone, unless heat is given on it: then its hottest place is not known. */
+const ends = (pick: (...of: number[]) => number, word: string): Way[] => [
+  way({ needs: ['wallTemperature', 'wallTemperatureInlet', 'wallTemperatureOutlet'], when: { flowClass: 'internal' }, value: (of) => pick(of.wallTemperature, of.wallTemperatureInlet, of.wallTemperatureOutlet), formula: `${word} of T_w, T_w,in and T_w,out`, source: 'definition' }),
+  way({ needs: ['wallTemperature'], when: { wallKind: ['temperature', 'coefficient', 'adiabatic'] }, value: ({ wallTemperature }) => wallTemperature, formula: 'T_w', source: 'a wall of one temperature' }),
+];
 
 /** What the walls do: their temperature at the wetted face, what drives them, their conductance to the fluid. */
 export const wallTemperatures: Definition[] = [
@@ -16,15 +27,30 @@ export const wallTemperatures: Definition[] = [
     way({ needs: ['farTemperature'], when: { energySolved: 'no' }, value: ({ farTemperature }) => farTemperature, formula: 'T_w = T_far', source: 'one temperature throughout' }),
     way({ needs: ['bulkTemperature'], when: { wallKind: 'adiabatic' }, value: ({ bulkTemperature }) => bulkTemperature, formula: 'T_w = T_b', source: 'no heat through an adiabatic wall' }),
     loop({ needs: ['farTemperature', 'drivingTemperature'], when: { wallKind: ['temperature', 'coefficient'] }, start: ({ farTemperature, drivingTemperature }) => (farTemperature + drivingTemperature) / 2, closes: 'wallTemperatureNext', formula: 'T_w = T_b + q/h', source: 'resistances in series' }),
-    loop({ needs: ['farTemperature'], when: { wallKind: 'flux' }, start: ({ farTemperature }) => farTemperature, closes: 'wallTemperatureNext', formula: 'T_w = T_b + q/h', source: 'definition of the heat-transfer coefficient' }),
+    loop({ needs: ['farTemperature'], when: { wallKind: 'flux' }, start: ({ farTemperature }) => farTemperature, closes: 'wallTemperatureNext', formula: 'T_w = T_b + q/h', source: definition }),
   ]),
   quantity('wallTemperatureNext', { symbol: 'T_w', name: 'wetted face that the wall fluxes give', ...kelvin, per: ['wall'], plain: 'target' }, [
-    way({ needs: ['bulkTemperature', 'wallHeatFlux', 'innerResistance'], value: ({ bulkTemperature, wallHeatFlux, innerResistance }) => bulkTemperature + wallHeatFlux * innerResistance, formula: 'T_b + q/h', source: 'definition of the heat-transfer coefficient' }),
+    way({ needs: ['bulkTemperature', 'wallHeatFlux', 'innerResistance'], value: ({ bulkTemperature, wallHeatFlux, innerResistance }) => bulkTemperature + wallHeatFlux * innerResistance, formula: 'T_b + q/h', source: definition }),
   ]),
-  quantity('wallTemperaturePeak', { symbol: 'T_w,p', name: 'hottest place of the wetted face of a wall', ...kelvin, per: ['wall'], plain: 'target' }, [
-    way({ needs: ['outletTemperature', 'wallHeatFlux', 'nusseltOutlet', 'thermalConductivityBulk', 'length'], when: { wallKind: 'flux', flowClass: 'internal' }, value: ({ outletTemperature, wallHeatFlux, nusseltOutlet, thermalConductivityBulk, length }) => outletTemperature + (wallHeatFlux * length) / (nusseltOutlet * thermalConductivityBulk), formula: 'T_w,p = T_out + q L/(Nu_out k_b), at the outlet', source: 'definition of the heat-transfer coefficient' }),
-    way({ needs: ['wallTemperature'], when: { wallKind: ['temperature', 'coefficient', 'adiabatic'] }, value: ({ wallTemperature }) => wallTemperature, formula: 'T_w,p = T_w', source: 'a wall of one temperature' }),
+  quantity('outletFilm', { symbol: 'h_out', name: 'heat-transfer coefficient at the outlet', unit: 'W/(m^2 K)' }, [
+    way({ needs: ['nusseltOutlet', 'thermalConductivityBulk', 'length', 'bulkTemperature', 'outletTemperature', 'pressure'], laws: ['thermalConductivity', 'viscosity', 'specificHeatCapacity'], when: { regime: 'turbulent' }, value: (of, laws) => {
+      const change = (law: Law): number => law(of.outletTemperature, of.pressure) / law(of.bulkTemperature, of.pressure);
+      return ((of.nusseltOutlet * of.thermalConductivityBulk) / of.length) * change(laws.thermalConductivity) ** 0.6 * change(laws.specificHeatCapacity) ** 0.4 * change(laws.viscosity) ** -0.4;
+    }, formula: 'h_out = (Nu_out k_b/L) (k_out/k_b)^0.6 (cp_out/cp_b)^0.4 (mu_b/mu_out)^0.4', source: 'Nu as Re^0.8 Pr^0.4, properties at the outlet in place of the mean' }),
+    way({ needs: ['nusseltOutlet', 'thermalConductivityBulk', 'length'], value: ({ nusseltOutlet, thermalConductivityBulk, length }) => (nusseltOutlet * thermalConductivityBulk) / length, formula: 'h_out = Nu_out k_b/L', source: definition }),
   ]),
+  quantity('wallTemperatureOutlet', { symbol: 'T_w,out', name: 'wetted face of a wall at the outlet', ...kelvin, per: ['wall'], plain: 'target' }, [
+    way({ needs: ['wallTemperature'], when: { flowClass: 'internal', energySolved: 'no' }, value: ({ wallTemperature }) => wallTemperature, formula: 'T_w,out = T_w', source: 'one temperature throughout' }),
+    way({ needs: ['outletTemperature', 'wallHeatFlux', 'outletFilm'], when: { wallKind: 'flux', flowClass: 'internal' }, value: ({ outletTemperature, wallHeatFlux, outletFilm }) => outletTemperature + wallHeatFlux / outletFilm, formula: 'T_w,out = T_out + q/h_out', source: definition }),
+    way({ needs: ['outletTemperature'], when: { wallKind: 'adiabatic', flowClass: 'internal' }, value: ({ outletTemperature }) => outletTemperature, formula: 'T_w,out = T_out', source: 'no heat through an adiabatic wall' }),
+    along('outletTemperature', 'T_w,out', 'T_out'),
+  ]),
+  quantity('wallTemperatureInlet', { symbol: 'T_w,in', name: 'wetted face of a wall where the fluid enters', ...kelvin, per: ['wall'], plain: 'target' }, [
+    way({ needs: ['inletTemperature'], when: { wallKind: ['flux', 'adiabatic'], flowClass: 'internal' }, value: ({ inletTemperature }) => inletTemperature, formula: 'T_w,in = T_in', source: 'the layer of heat begins without thickness' }),
+    along('inletTemperature', 'T_w,in', 'T_in'),
+  ]),
+  quantity('wallTemperaturePeak', { symbol: 'T_w,p', name: 'hottest place of the wetted face of a wall', ...kelvin, per: ['wall'], plain: 'largest' }, ends(Math.max, 'largest')),
+  quantity('wallTemperatureLeast', { symbol: 'T_w,l', name: 'coldest place of the wetted face of a wall', ...kelvin, per: ['wall'], plain: 'smallest' }, ends(Math.min, 'smallest')),
   quantity('wallHeat', { symbol: 'Q_w', name: 'heat given at a wall', unit: 'W', signed: true, per: ['wall'], plain: 'target' }),
   quantity('wallArea', { symbol: 'A_w', name: 'wetted area of a wall, one passage', unit: 'm^2', per: ['wall'], plain: 'target' }),
   quantity('wallHeatFlux', { symbol: 'q', name: 'heat flux from the wall into the fluid', unit: 'W/m^2', signed: true, per: ['wall'], plain: 'target' }, [

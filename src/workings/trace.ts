@@ -46,7 +46,7 @@ export function stepOf(workings: Workings, id: string): Step | undefined {
     kind: bound === undefined ? (given?.kind ?? (given !== undefined ? 'given' : node.about.set === undefined ? 'decided' : 'computed')) : (bound.way.as ?? 'computed'),
     formula: bound?.way.formula ?? (given === undefined ? (node.about.set?.formula ?? 'decided') : given.kind === 'assumed' ? 'assumed' : 'given'),
     source: bound?.way.source ?? (given === undefined ? node.about.set?.source : undefined) ?? 'the case',
-    needs: bound?.ids ?? [],
+    needs: bound === undefined ? [] : bound.closes < 0 ? bound.ids : [...bound.ids, (workings.slots[bound.closes] as Workings['slots'][number]).id], // a loop rests on what closes it
     when: (bound?.when ?? []).map((w) => ({ id: (workings.slots[w.slot] as Workings['slots'][number]).id, word: workings.wordAt(w.slot) ?? '' })),
     ...(ranges.length === 0 ? {} : { ranges }),
     ...(scatter === undefined ? {} : { scatter }),
