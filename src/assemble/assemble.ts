@@ -101,13 +101,13 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
     ways('inletTemperature', ['inlet.temperature', 'fluid.temperature', 'inlet.totalTemperature', 'initial.temperature'].map((path) => ({ needs: [path], value: (of: Readonly<Record<string, number>>) => of[path] as number, formula: `T_in as given: ${path}`, source: 'the case' }))),
     ...wall.definitions,
     ...(carried ? reactionDefinitions(on) : []),
-    ...(on.has('rheology') ? rheologyWays() : []),
     ...(fluid.laws === undefined ? [] : materialWays(fluid.laws.about)),
     ...(absorbing === undefined ? [] : [ways('absorbingShare', [{ needs: [], value: () => absorbing, formula: 'x_a = x_w + x_c', source: 'composition of the mixture' }])]),
     ...targetDefinitions(on, asked),
     ...validationDefinitions(asked),
     ...toleranceWays(on, unitOf),
     ...[...on.entries.keys()].flatMap((path) => (path.startsWith('fluid.') && isProperty(path.slice(6)) ? givenPropertyWays(path.slice(6), path) : [])),
+    ...(on.has('rheology') ? rheologyWays() : []), // tried before a viscosity that is given beside the law: one number is no law
   ];
   const places = {
     of: { wall: wallPlaces(flow.walls), station: flow.stations, region: flow.regions, inlet: on.list('inlets').map((n) => `inlets.${n}`), species: on.list('species').map((n) => `species.${n}`), reaction: on.list('reactions').map((n) => `reactions.${n}`), particle: on.list('particles').map((n) => `particles.${n}`) },

@@ -16,6 +16,7 @@ const rows: readonly { code: string; bad: Partial<typeof base>; at: string; good
   { code: 'two-drives', bad: { inlet: 'inlet: { speed: 0.4 m/s, volumeFlow: 12.5 L/min, temperature: 65 degC }' }, at: 'volumeFlow', good: { inlet: 'inlet: { speed: 0.4 m/s, volumeFlow: 11.78 L/min, temperature: 65 degC }' } },
   { code: 'outlet-above-inlet', bad: { outlet: 'outlet: { pressure: 3 bar abs }' }, at: 'outlet:', good: { outlet: 'outlet: { pressure: 1.9 bar abs }' } },
   { code: 'humidity-not-taken', bad: { fluid: 'fluid: { material: water, pressure: 2 bar abs, humidity: 40 % }' }, at: 'humidity', good: {} },
+  { code: 'two-viscosities', bad: { fluid: 'fluid: { medium: liquid, density: 1050 kg/m^3, specificHeatCapacity: 3.9 kJ/(kg K), thermalConductivity: 0.55 W/(m K), viscosity: 20 mPa s, pressure: 3 bar abs }', outlet: 'rheology: { law: power-law, consistency: 6 Pa s^0.4, index: 0.4 }' }, at: 'viscosity', good: { fluid: 'fluid: { medium: liquid, density: 1050 kg/m^3, specificHeatCapacity: 3.9 kJ/(kg K), thermalConductivity: 0.55 W/(m K), pressure: 3 bar abs }', outlet: 'rheology: { law: power-law, consistency: 6 Pa s^0.4, index: 0.4 }' } },
   { code: 'shares-above-one', bad: { outlet: 'species: [{ name: a, inlet: 60 % mass }, { name: b, inlet: 50 % mass }]' }, at: 'species', good: { outlet: 'species: [{ name: a, inlet: 60 % mass }, { name: b, inlet: 40 % mass }]' } },
   { code: 'unknown-reactant', bad: { outlet: 'species: [{ name: feed, inlet: 1 % mass }]\nreactions: [{ of: food, rateConstant: 1 1/s }]' }, at: 'reactions', good: { outlet: 'species: [{ name: feed, inlet: 1 % mass }]\nreactions: [{ of: feed, rateConstant: 1 1/s }]' } },
   { code: 'rate-constant-unit', bad: { outlet: 'species: [{ name: feed, inlet: 1 % mass }]\nreactions: [{ of: feed, order: 2, rateConstant: 1 1/s }]' }, at: 'reactions', good: { outlet: 'species: [{ name: feed, inlet: 1 % mass }]\nreactions: [{ of: feed, where: wall, rateConstant: 1e-3 m/s }]' } },
@@ -51,6 +52,13 @@ describe('contradictions', () => {
     expect(p.contradictions[0]?.effect).toContain('36 %');
     expect(p.contradictions[1]?.says).toMatch(/^-5 degC stands below the melting point -?0 degC/);
     for (const c of p.contradictions) expect([c.effect, c.cure].every((t) => t.length > 10)).toBe(true);
+  });
+
+  it('of two viscosities the law of rheology counts', async () => {
+    const p = await planOf(['format: 1', 'title: Paste', 'targets: [{ quantity: pressureDrop, within: 10 % }]', 'flow: pipe', 'sizes: { diameter: 40 mm, length: 5 m }', 'fluid: { medium: liquid, density: 1050 kg/m^3, viscosity: 20 mPa s, pressure: 3 bar abs }', 'rheology: { law: power-law, consistency: 6 Pa s^0.4, index: 0.4 }', 'inlet: { speed: 0.3 m/s, temperature: 20 degC, profile: developed }'].join('\n'));
+    // Power law in a pipe: dp = (4 L/D) K ((3n + 1)/(4n) 8U/D)^n = 500 x 6 x 82.5^0.4 = 17.5 kPa.
+    expect(p.quantities['pressureDrop']?.value as number / (500 * 6 * 82.5 ** 0.4)).toBeCloseTo(1, 1);
+    expect(p.contradictions.map(({ code }) => code)).toContain('two-viscosities');
   });
 
   it('leave the numbers of the plan as they were', async () => {
