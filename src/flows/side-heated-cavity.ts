@@ -40,6 +40,7 @@ const extents: Definition[] = [
     way({ needs: ['sizes.depth'], value: (of) => of['sizes.depth'], formula: 'B', source: geometry }),
     way({ needs: ['sizes.width'], when: { infiniteDepth: 'yes' }, scatter: 0.5, value: (of) => of['sizes.width'], formula: 'W, ends repeating', source: practice }),
   ]),
+  ways('regionStretch', [way({ needs: ['sideHeatedCavityAspect'], range: { sideHeatedCavityAspect: [10, 1e4] }, value: () => 4, formula: 'a_x = 4 in a tall slot', source: `${practice}: 50 cells along a pair of its cells, 2.5 W long` }), way({ needs: [], value: () => 1, formula: 'a_x = 1', source: practice })]),
   ways('coreLength', [way({ needs: ['sizes.height', 'sizes.width'], value: (of) => Math.min(of['sizes.height'], of['sizes.width']), formula: 'L_c = smaller of H and W', source: practice })]),
   ways('coreCellsCoarse', [way({ needs: [], value: () => 40, formula: 'n_c = 40', source: practice })]),
   ways('coreCellsMedium', [way({ needs: [], value: () => 80, formula: 'n_c = 80', source: practice })]),

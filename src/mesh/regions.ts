@@ -25,7 +25,7 @@ const upTo = (count: number, multiple: number): number => (count <= 0 ? 0 : mult
 /** Cells over a width of which so many wall stacks take their part. */
 function across(width: string, size: string, walls: string, symbol: string): Way[] {
   return [
-    way({ needs: [width, size, walls, 'layerCount', 'layerStackHeight', 'countMultiple'], value: (of) => upTo((of[walls] as number) * (of['layerCount'] as number) + Math.max(0, (of[width] as number) - (of[walls] as number) * (of['layerStackHeight'] as number)) / (of[size] as number), of['countMultiple'] as number), formula: `n = n_w N_l + (${symbol} - n_w S)/h, up to the multiple`, source: 'layers at each wall, equal cells between' }),
+    way({ needs: [width, size, walls, 'layerCount', 'layerStackHeight', 'countMultiple'], value: (of) => upTo(Math.max((of[width] as number) / (of[size] as number), (of[walls] as number) * (of['layerCount'] as number) + Math.max(0, (of[width] as number) - (of[walls] as number) * (of['layerStackHeight'] as number)) / (of[size] as number)), of['countMultiple'] as number), formula: `n = n_w N_l + (${symbol} - n_w S)/h, at least ${symbol}/h, up to the multiple`, source: 'layers at each wall, equal cells between' }),
     way({ needs: [width, size, 'countMultiple'], value: (of) => upTo((of[width] as number) / (of[size] as number), of['countMultiple'] as number), formula: `n = ${symbol}/h, up to the multiple`, source: 'equal cells' }),
   ];
 }

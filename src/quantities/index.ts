@@ -1,7 +1,7 @@
 export { carriedDefinitions, commonDefinitions, generalDefinitions } from './general.ts';
 export { massAnalogy } from './mass-analogy.ts';
 export * from './correlations/index.ts';
-export { layersBelow, layersToCover, layersToMatch, stackHeight } from './layer-stack.ts';
+export { layersBelow, layersToMatch, stackHeight } from './layer-stack.ts';
 export { facingWalls } from './radiation.ts';
 export { layerDefinitions, type Layer } from './layers.ts';
 export { termIds } from './terms.ts';

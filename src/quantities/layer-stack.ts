@@ -12,19 +12,6 @@ export function stackHeight(first: number, growth: number, count: number): numbe
 }
 
 /**
- * Layers that reach a height, a whole number.
- *
- * @param first   height of the layer at the wall [m]
- * @param growth  height of a layer over that below it [1]
- * @param height  what the stack must cover [m]
- * @returns       number of layers [1]
- * @source        N = ln(1 + delta (g - 1)/h1)/ln g, rounded up
- */
-export function layersToCover(first: number, growth: number, height: number): number {
-  return whole(Math.abs(growth - 1) < 1e-9 ? height / first : Math.log(1 + (height * (growth - 1)) / first) / Math.log(growth));
-}
-
-/**
  * Layers after which the cell is as high as the cells of the core, a whole number.
  *
  * @param first   height of the layer at the wall [m]

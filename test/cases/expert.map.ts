@@ -127,6 +127,7 @@ export const mapped: Readonly<Record<string, Mapped>> = {
     groups: { Ra: { changes: melt, read: (on) => on.n('rayleighHeight') }, Ste: 'the Stefan number is not computed', Pr: n('prandtl') },
     facts: { 'cells of the classical grid (42 x 32)': n('cellCount') },
     answers: { 'melt depth by conduction alone at 1200 s, sqrt(2 Ste alpha t)': 'a moving front is not computed' },
+    exceptions: { 'fact: cells of the classical grid (42 x 32)': { ours: 8960, why: 'ours is the medium mesh, 112 x 80 cells from wall to wall; the classical grid is too coarse, as the source itself notes: finer grids show several small cells. Our coarse mesh has 2240' } },
   },
   'lead-lithium-duct': {
     groups: { Ha: magnetic, Re: n('reynolds', 1 / 2), N: magnetic, Rm: magnetic },

@@ -28,6 +28,8 @@ export const expected = JSON.parse(readFileSync(new URL('../checks/values/expert
 export interface Planned {
   readonly plan: Plan;
   readonly n: (id: string) => number;
+  readonly word: (id: string) => string | undefined;
+  readonly regions: readonly string[];
 }
 
 /** Plans a case file of this folder, with pieces of its text replaced. */
@@ -40,9 +42,11 @@ export async function planned(name: string, changes: readonly (readonly [string,
   }
   const on = readCase(Buffer.from(text), `${name}.case.yaml`, vocabulary);
   const made = await plan(on, { version: '0' });
-  const { workings } = settleCase(on).assembled;
+  const { workings, flow } = settleCase(on).assembled;
   return {
     plan: made,
+    word: (id) => workings.word(id),
+    regions: flow.regions.filter((r) => made.quantities[`cellsAcross@${r}`] !== undefined),
     n: (id) => {
       const inPlan = made.quantities[id]?.value;
       const value = typeof inPlan === 'number' ? inPlan : workings.get(id);

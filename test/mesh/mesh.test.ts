@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { flows, type Flow } from '../../src/flows/index.ts';
 import { geometricBetween, geometricRatio, inverseSinhc, tanhStretching, wallModelledCells } from '../../src/mesh/index.ts';
-import { layersBelow, layersToCover, layersToMatch, stackHeight } from '../../src/quantities/index.ts';
+import { layersBelow, layersToMatch, stackHeight } from '../../src/quantities/index.ts';
 import { workingsOf } from '../flows/harness.ts';
 
 const near = (value: number, expected: number, relative: number): void => expect(Math.abs(value / expected - 1)).toBeLessThanOrEqual(relative);
@@ -10,7 +10,7 @@ const pipe = flows['pipe'] as Flow;
 const water = { density: 998.2, viscosity: 1.002e-3, thermalConductivity: 0.598, specificHeatCapacity: 4184, inletTemperature: 293.15, pressure: 3e5, 'sizes.diameter': 0.05, 'sizes.length': 3, 'inlet.speed': 1.5, 'has.period': 'no', 'has.species': 'no', storage: 'cell-centred', energySolved: 'no', targetHeat: 'no', targetMomentum: 'yes', 'choice.turbulence-treatment': 'rans', 'choice.dimension-and-cuts': 'axisymmetric', 'choice.mesh-topology': 'structured' };
 
 describe('layers at a wall', () => {
-  it('reach 10 mm from 10 um at a growth of 1.2 in 30 layers: ln(1 + 200)/ln 1.2 = 29.09', () => expect(layersToCover(1e-5, 1.2, 1e-2)).toBe(30));
+  it('29 whole layers fit below 10 mm from 10 um at a growth of 1.2: ln(1 + 200)/ln 1.2 = 29.09', () => expect(layersBelow(1e-5, 1.2, 1e-2)).toBe(29));
   it('grow from 1 to 10 in 14 layers at 1.2: 1 + ln 10/ln 1.2 = 13.63', () => expect(layersToMatch(1, 1.2, 10)).toBe(14));
   // First node at y+ = 1 and 0.3, cell twice that: whole cells below 5 and 30, counted by adding heights 2, 2.4, 2.88 ...
   it.each([[1, 1.2, 5, 2], [1, 1.2, 30, 7], [1, 1.1, 5, 2], [1, 1.1, 30, 9], [0.3, 1.2, 5, 5], [0.3, 1.2, 30, 13]])('first node y+ %d, growth %d, below %d: %d cells', (node, growth, top, cells) => {
@@ -21,7 +21,7 @@ describe('layers at a wall', () => {
   });
   it('a growth of 1 gives equal layers', () => {
     expect(stackHeight(2, 1, 5)).toBe(10);
-    expect(layersToCover(2, 1, 9)).toBe(5);
+    expect(layersBelow(2, 1, 9)).toBe(4);
   });
 });
 

@@ -8,7 +8,7 @@ import { meshRegions, numberTable } from './number-table.ts';
 export function mesh(on: Ground): StageResult {
   return {
     lines: [...countLines(on), ...topologyLines(on), ...blockLines(on), ...layerLines(on), ...familyLines(on), ...pecletLines(on), ...finishedLines(on)],
-    tables: [...regionTable(on), ...numberTable(on, 'Layers at the wall', ['firstCellHeight', 'firstNodeDistance', 'growthRatio', 'layersForCover', 'layersForMatch', 'layerCount', 'layerStackHeight', 'lastLayerHeight', 'handOver', 'cellsInLayer', 'wallAspectRatio']), ...topologyTable(on), ...kindTable(on), ...blockTable(on), ...familyTable(on), ...qualityTable(on)],
+    tables: [...regionTable(on), ...numberTable(on, 'Layers at the wall', ['firstCellHeight', 'firstNodeDistance', 'growthRatio', 'layersForMatch', 'layersForGap', 'layerCount', 'layerStackHeight', 'lastLayerHeight', 'handOver', 'cellsInLayer', 'wallAspectRatio']), ...topologyTable(on), ...kindTable(on), ...blockTable(on), ...familyTable(on), ...qualityTable(on)],
     checklist: checks(on),
   };
 }
@@ -33,15 +33,21 @@ function regionTable(on: Ground): Table[] {
 
 function layerLines(on: Ground): Line[] {
   if (!on.has('firstCellHeight') || !on.has('layerCount')) return [];
-  const ratio = on.number('handOver') ?? 1;
-  const aspect = on.number('wallAspectRatio') ?? 1;
+  const [ratio, aspect, count] = [on.number('handOver') ?? 1, on.number('wallAspectRatio') ?? 1, on.number('layerCount') ?? 1];
+  const full = on.number('layersForGap') === count && count < (on.number('layersForMatch') ?? count);
+  const reach = on.has('stackCover') ? '; the layer of {stackCover} holds {cellsInLayer} cells' : '';
   return lines(
-    `The cell at the wall is {firstCellHeight} high and the layers grow by {growthRatio}: {layerCount} layers, {layerStackHeight} together${on.has('stackCover') ? `, over a layer of {stackCover} that holds {cellsInLayer} of them` : ''}.`,
-    `The last layer is {lastLayerHeight} high and hands over to cells {handOver} times as high${ratio > 1.5 ? ': more than 1.5, so add layers or refine the core beside them' : ratio < 0.67 ? ': the core is finer than the stack ends, so stop the growth at the core size' : ', a jump that the growth itself would make'}.`,
-    on.has('gap') && (on.number('layerStackHeight') ?? 0) * 2 > (on.number('gap') ?? Number.POSITIVE_INFINITY) && 'The layers of both walls meet before their full height: {layerStackHeight} each in a gap of {gap}. Cut the stack where they meet, and keep the cell at the wall.',
+    count === 1
+      ? `Equal cells do at the wall: the cell there may be as tall as those of the core, {firstCellHeight}, and no layers grow from it${reach}.`
+      : `The cell at the wall is {firstCellHeight} high and the layers grow by {growthRatio} until they reach the core: {layerCount} layers, {layerStackHeight} together${reach}.`,
+    tallCell(on) && 'The cell at the wall, {firstCellHeight}, is taller than the core cells of {coreCellSize}: its node cannot stand where the law of the wall wants it and the core be that fine. Take a coarser core beside the wall, or resolve the wall.',
+    count > 1 && `The last layer is {lastLayerHeight} high and hands over to cells {handOver} times as high${full ? ': the layers of both walls meet in the middle of the gap of {gap} before they have grown to the core' : ratio > 1.5 ? ': more than 1.5, so add layers or refine the core beside them' : ', a jump that the growth itself would make'}.`,
     `The longest cell at a wall is {wallAspectRatio} times as long as high${aspect > 1000 ? ', beyond 1000: shorten the cells along the wall, or have the pressure solved along the short sides and in double precision' : aspect > 100 ? ': fit for flat walls (to 1000), too long for curved ones (to 100) and where the flow turns (to 10)' : ', fit for curved walls too'}.`,
   );
 }
+
+/** A law of the wall, or a given first cell, puts the node beyond what the core cells allow. */
+const tallCell = (on: Ground): boolean => (on.number('firstCellHeight') ?? 0) > 1.001 * (on.number('coreCellSize') ?? Number.POSITIVE_INFINITY);
 
 function familyTable(on: Ground): Table[] {
   if (!on.has('cellCountFine') || !on.has('cellCount')) return [];
@@ -78,6 +84,7 @@ function checks(on: Ground): Check[] {
   return [
     { id: 'mesh-finished', stage: 'mesh', text: 'no negative volumes; areas and volume against the geometry', limit: '0.5 %', where: 'all boundaries' },
     ...(on.has('firstCellHeight') ? [{ id: 'mesh-wall-cell', stage: 'mesh', text: 'height of the cell at the wall, sampled', limit: 'planned height within a fifth', where: on.assembled.flow.walls.length === 0 ? 'the wall' : on.assembled.flow.walls.join(', ') }] : []),
+    ...(tallCell(on) ? [{ id: 'mesh-wall-against-core', stage: 'mesh', text: 'cell at the wall against the core cells beside it: a coarser core there, or a wall that is resolved', limit: 'no taller than the core', where: 'first cells off the wall' }] : []),
     { id: 'mesh-family', stage: 'mesh', text: 'three meshes similar: ratio of counts by region against the planned ratio', limit: '5 %', where: meshRegions(on).join(', ') },
   ];
 }
