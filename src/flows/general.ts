@@ -1,4 +1,4 @@
-import { churchillChuPlate, laminarFriction, petukhovFriction } from '../quantities/index.ts';
+import { churchillChuPlate, laminarFriction, mixedLowPrandtlPlate, petukhovFriction } from '../quantities/index.ts';
 import { quantity, way, ways, wordWay, type Definition } from '../workings/index.ts';
 import { entraining, inlet, open, outlet, slipping, stream, wall } from './boundaries.ts';
 import type { Flow } from './define.ts';
@@ -68,7 +68,9 @@ const laws: Definition[] = [
   ways('frictionLaminar', [way({ needs: ['reynoldsBulk'], when: inside, scatter: 1, value: ({ reynoldsBulk }) => laminarFriction({ reynolds: reynoldsBulk }), formula: 'f = 64/Re', source: analogy })]),
   ways('frictionTurbulent', [way({ needs: ['reynoldsBulk'], when: inside, range: { reynoldsBulk: [3e3, 5e6] }, scatter: 1, value: ({ reynoldsBulk }) => petukhovFriction({ reynolds: reynoldsBulk }), formula: 'f = (0.790 ln Re - 1.64)^-2', source: analogy })]),
   ways('dragCoefficient', [way({ needs: ['reynolds'], when: outside, scatter: 1, value: ({ reynolds }) => generalDrag({ reynolds }), formula: 'C_D = (24/Re)(1 + 0.15 Re^0.687) to 300, 1 from 3000, between straight in log Re', source: 'Schiller and Naumann 1933 for spheres; common practice for other shapes' })]),
-  ways('nusseltPlain', [way({ needs: ['reynolds', 'prandtl'], when: { imposedFlow: 'yes' }, scatter: 1, value: ({ reynolds, prandtl }) => generalBody({ reynolds, prandtl }), formula: 'Nu = 0.664 Re^(1/2) Pr^(1/3) to 5e5, (0.037 Re^0.8 - 871) Pr^(1/3) beyond', source: `flat plate, ${analogy}` }),
+  ways('nusseltPlain', [
+    way({ needs: ['reynolds', 'prandtl'], when: { imposedFlow: 'yes' }, range: { prandtl: [1e-4, 0.2] }, scatter: 1, value: ({ reynolds, prandtl }) => mixedLowPrandtlPlate({ reynolds, prandtl, wall: 'temperature', transition: 5e5 }), formula: 'Nu of Churchill and Ozoe to 5e5, beyond it the growth of 0.979 Pe^(1/2) + 1.093e-3 Re^1.06 Pr^1.207 added', source: `flat plate in a liquid metal, ${analogy}` }),
+    way({ needs: ['reynolds', 'prandtl'], when: { imposedFlow: 'yes' }, scatter: 1, value: ({ reynolds, prandtl }) => generalBody({ reynolds, prandtl }), formula: 'Nu = 0.664 Re^(1/2) Pr^(1/3) to 5e5, (0.037 Re^0.8 - 871) Pr^(1/3) beyond', source: `flat plate, ${analogy}` }),
     way({ needs: ['rayleigh', 'prandtl'], when: still, range: { rayleigh: [0, 1e12] }, scatter: 1, value: ({ rayleigh, prandtl }) => churchillChuPlate({ rayleigh, prandtl, wall: 'temperature' }), formula: 'Nu = (0.825 + 0.387 Ra^(1/6)/(1 + (0.492/Pr)^(9/16))^(8/27))^2', source: `Churchill and Chu, Int. J. Heat Mass Transfer 18 (1975) 1323, upright plate, ${analogy}` }),
   ]),
   ways('boundaryLayerThickness', [
