@@ -4,7 +4,7 @@ import { flows, rungDefinitions, type Flow } from '../flows/index.ts';
 import { meshDefinitions } from '../mesh/index.ts';
 import { numericsDefinitions } from '../numerics/index.ts';
 import { Problem } from '../problems/index.ts';
-import { propertyAt, type Collection, type Material, type State } from '../properties/index.ts';
+import { type Collection, type Material, type State } from '../properties/index.ts';
 import { carriedDefinitions, commonDefinitions, givenPropertyWays, isProperty, massAnalogy, materialWays, rheologyWays } from '../quantities/index.ts';
 import { timeDefinitions } from '../time/index.ts';
 import { joinDefinitions, ways, Workings, type Definition, type Given, type Quantity } from '../workings/index.ts';
@@ -91,7 +91,6 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
   const leaves = leavesOf(vocabulary, on.flow, flow.walls, (path) => on.list(path)).map((leaf) => (leaf.unit.includes('^n') ? { ...leaf, unit: leaf.unit.replace('^n', `^${on.number('rheology.index') ?? 1}`) } : leaf));
   const { given, ranges } = givenOf(on);
   const assumed: Record<string, Given> = Object.fromEntries(Object.entries(fluid.assumed).map(([path, value]) => [path, { value, kind: 'assumed' as const }]));
-  const flowed = actualFlow(on, fluid.material);
   const ownLeaves = extraLeaves(on, leaves, exists);
   const asked = estimated(on, known, flow.walls);
   const definitions: Definition[] = [
@@ -115,7 +114,7 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
   };
   const nodes = joinDefinitions(definitions, places, fixedWords(facts.words, flow));
   const words = Object.fromEntries(Object.entries(facts.words).map(([id, value]) => [id, { value, kind: facts.assumed.some((a) => a.id === id) ? ('assumed' as const) : ('given' as const) }]));
-  const workings = new Workings(nodes, { ...words, ...assumed, ...given, ...flowed.given }, { ...fluid.laws?.laws, ...wall.laws });
+  const workings = new Workings(nodes, { ...words, ...assumed, ...given }, { ...fluid.laws?.laws, ...wall.laws });
   const paths = new Set(leaves.map((l) => l.path));
   return {
     case: on,
@@ -129,7 +128,6 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
     phaseFlags: fluid.laws?.flags ?? [],
     assumptions: [
       ...Object.keys(fluid.assumed).map((id) => ({ id, says: id === 'fluid.pressure' ? 'the pressure is 1 atm: it is not given' : 'the temperature is 20 degC: it is not given' })),
-      ...flowed.assumptions,
       ...facts.assumed,
       ...[...on.entries.values()].flatMap((e) => e.assumed.map((says) => ({ id: e.path, says }))),
       ...on.warnings.map((says) => ({ id: 'case', says })),
@@ -146,7 +144,7 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
 
 /** Words that hold for good in this case: what the flow fixes, what the fluid is, which features are named. */
 function fixedWords(words: Readonly<Record<string, string>>, flow: Flow): Record<string, string> {
-  const fluid = ['medium', 'transparency', 'fluidGiven', 'rheologyLaw'];
+  const fluid = ['medium', 'transparency', 'fluidGiven', 'rheologyLaw', 'volumeFlowState'];
   return Object.fromEntries(Object.entries(words).filter(([id]) => id in flow.words || fluid.includes(id) || id.startsWith('has.')));
 }
 
@@ -168,17 +166,6 @@ function targetWall(on: Case, flow: Flow, walls: ReturnType<typeof wallEntries>)
 function extraLeaves(on: Case, leaves: readonly Leaf[], exists: (id: string) => boolean): Leaf[] {
   const known = new Set(leaves.map((l) => l.path));
   return [...on.entries.values()].filter((e) => e.kind === 'quantity' && !known.has(e.path) && !exists(e.path) && !e.path.startsWith('targets.')).map((e) => ({ path: e.path, unit: e.unit ?? '1', name: e.path, gives: [] }));
-}
-
-/** A volume flow at normal or standard conditions is a mass flow. */
-function actualFlow(on: Case, fluid: Material | undefined): { given: Record<string, Given>; assumptions: Assumption[] } {
-  const entry = on.get('inlet.volumeFlow');
-  if (entry?.reference === undefined || typeof entry.value !== 'number') return { given: {}, assumptions: [] };
-  const at = entry.reference === 'normal' ? { temperature: 273.15, pressure: 101325, says: '0 degC and 1 atm' } : { temperature: 288.15, pressure: 101325, says: '15 degC and 1 atm' };
-  if (fluid === undefined) throw new Problem({ code: 'no-reference-state', message: `a ${entry.reference} volume flow needs a material to know its mass`, file: on.file, ...entry.position, expected: 'fluid: { material: ... } or a mass flow' });
-  const density = propertyAt(fluid, 'density', at)?.value;
-  if (density === undefined) return { given: {}, assumptions: [] };
-  return { given: { 'inlet.massFlow': { value: entry.value * density, kind: 'given' } }, assumptions: [{ id: entry.path, says: `a ${entry.reference} volume flow holds at ${at.says}` }] };
 }
 
 function isUnused(workings: Workings, path: string): boolean {

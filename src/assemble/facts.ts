@@ -92,6 +92,7 @@ export function factsOf(on: Case, flow: Flow, walls: WallKeys, target: { readonl
   words['targetMean'] = yes(target.mean);
   words['energySolved'] = yes(target.thermal || heated(on));
   words['character'] = on.word('time.character') ?? 'unknown';
+  words['volumeFlowState'] = on.get('inlet.volumeFlow')?.reference ?? 'inlet';
   words['rheologyLaw'] = on.word('rheology.law') ?? 'newtonian';
   words['fluidGiven'] = on.has('fluid.material') ? 'material' : 'constants';
   if (medium !== undefined) {

@@ -2,6 +2,7 @@ import type { Case, Entry } from '../case/index.ts';
 import { Problem, type ProblemData } from '../problems/index.ts';
 import { componentsMean, loadMaterial, mixtureOf, shippedMaterials, solutionShare, type Collection, type Component, type Material, type State } from '../properties/index.ts';
 import { fluidLaws, type MaterialLaws } from './material-laws.ts';
+import { referenceDensity } from './reference-density.ts';
 
 const assumedPressure = 101325;
 const assumedTemperature = 293.15;
@@ -52,6 +53,7 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
     const said = on.word('fluid.medium') as Fluid['medium'];
     // A fluid of constants need not say its state of matter: the density tells.
     const medium = said ?? (density === undefined ? undefined : density > 50 ? 'liquid' : 'gas');
+    if (medium === 'liquid' || medium === 'solid') gasFlowOnly(on, medium);
     return { state: { temperature: temperature ?? assumedTemperature, pressure: pressure ?? assumedPressure }, ...(medium === undefined ? {} : { medium }), assumed };
   }
   if (pressure === undefined) assumed['fluid.pressure'] = assumedPressure;
@@ -69,7 +71,16 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
     ...(material.asked === undefined ? {} : { phase: material.asked }),
   };
   const laws = placed(on.get('fluid.pressure') ?? entry, on.file, () => fluidLaws(material, state));
-  return { material, laws, medium: laws.phase === 'liquid' ? 'liquid' : laws.phase === 'solid' ? 'solid' : 'gas', state, assumed };
+  const medium = laws.phase === 'liquid' ? 'liquid' : laws.phase === 'solid' ? 'solid' : 'gas';
+  if (medium !== 'gas') gasFlowOnly(on, medium);
+  const counted = on.get('inlet.volumeFlow')?.reference === undefined ? undefined : referenceDensity(material, state);
+  return { material, laws: counted === undefined ? laws : { ...laws, laws: { ...laws.laws, flowStateDensity: counted.law }, about: { ...laws.about, flowStateDensity: counted.about } }, medium, state, assumed };
+}
+
+/** Normal and standard conditions count gases: said of anything else they are a slip. */
+function gasFlowOnly(on: Case, medium: 'liquid' | 'solid'): void {
+  const entry = on.get('inlet.volumeFlow');
+  if (entry?.reference !== undefined) throw placedAt(entry, on.file, { code: 'no-reference-state', message: `a ${entry.reference} volume flow counts a gas, and the fluid is a ${medium} here`, expected: 'the volume flow at the state of the inlet, or massFlow' });
 }
 
 /** Share by mole of what absorbs heat radiation in a mixture of gases; undefined for any other fluid. */

@@ -9,7 +9,7 @@ function inletKeys(at: '' | '@'): Fields {
   const mean: Partial<QuantityField> = { gives: [`inletTemperature${at}`] };
   return {
     speed: speed('mean speed', '0.4 m/s', { atLeast: 0 }),
-    volumeFlow: quantity('volume flow at the state of the inlet; normal or standard where said so', 'm^3/s', '12 L/min', { is: 'volumeFlow', atLeast: 0 }),
+    volumeFlow: quantity('volume flow at the state of the inlet; of a gas also normal (0 degC, 1 atm) or standard (15 degC, 1 atm) where said so', 'm^3/s', '12 L/min', { is: 'volumeFlow', atLeast: 0 }),
     massFlow: quantity('mass flow', 'kg/s', '0.2 kg/s', { name: 'mass flow', atLeast: 0 }),
     totalPressure: pressure('pressure of the gas brought to rest', '8 bar abs'),
     totalTemperature: temperature('temperature of the gas brought to rest', '20 degC'),

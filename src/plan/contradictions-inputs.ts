@@ -21,15 +21,16 @@ export function* inputContradictions(on: Ground): Generator<Contradiction> {
 function* drives(on: Ground): Generator<Contradiction> {
   const given = (path: string): number | undefined => on.assembled.case.number(path);
   const list = [['inlet.speed', 'speed'], ['inlet.volumeFlow', 'volumeFlow'], ['inlet.massFlow', 'massFlow']] as const;
-  const stated = list.filter(([path]) => given(path) !== undefined && on.assembled.case.get(path)?.reference === undefined);
+  const stated = list.filter(([path]) => given(path) !== undefined);
   const [first] = stated;
   if (first === undefined) return;
   for (const [path, id] of stated.slice(1)) {
-    const value = given(path) as number;
+    const counted = on.assembled.case.get(path)?.reference !== undefined; // then it is another number at the inlet
+    const value = counted ? (on.number(id) ?? Number.NaN) : (given(path) as number);
     const other = without(on, path, id);
     if (other === undefined || !(Math.abs(other / value - 1) > near)) continue;
     yield contradiction(on, 'two-drives', path, {
-      says: `${path} is ${inWords(on, path, value)}, while ${first[0]} of ${inWords(on, first[0])} makes the ${nameOf(on, id)} ${inWords(on, id, other)}`,
+      says: `${path} is ${counted ? `${inWords(on, path)}, at the inlet ${inWords(on, id, value)}` : inWords(on, path, value)}, while ${first[0]} of ${inWords(on, first[0])} makes the ${nameOf(on, id)} ${inWords(on, id, other)}`,
       effect: `they differ by ${percent(Math.abs(other / value - 1))}; speed, Reynolds number and heat balance follow one of them, the other is lost or mixed in`,
       cure: `state one of them alone, or mend the section: ${inWords(on, 'flowArea')}${(on.number('parallelPassages') ?? 1) > 1 ? ` in each of ${inWords(on, 'parallelPassages')} passages` : ''}`,
     });

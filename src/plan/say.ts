@@ -18,7 +18,8 @@ export function inWords(on: Ground, id: string, value: number | undefined = on.n
   const temperature = unit === 'K' && isTemperature(id);
   const written = given.get(id)?.writtenUnit;
   if (temperature && written === undefined) return `${Number(fromSI(value, 'degC').toFixed(1)) + 0} degC`;
-  return printNumber({ value, unit, digits: 4, ...(written === undefined ? {} : { toUnit: written }) });
+  const counted = given.get(id)?.reference;
+  return `${printNumber({ value, unit, digits: 4, ...(written === undefined ? {} : { toUnit: written }) })}${counted === undefined ? '' : ` ${counted}`}`;
 }
 
 /** `a`, `a and b`, `a, b and c`. */

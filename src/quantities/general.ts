@@ -30,6 +30,7 @@ import { hazards } from './hazards.ts';
 import { phase } from './phase.ts';
 import { properties } from './property-states.ts';
 import { results } from './results.ts';
+import { referenceFlow } from './reference-flow.ts';
 import { scales } from './scales.ts';
 import { temperatures } from './temperatures.ts';
 import { terms } from './terms.ts';
@@ -42,6 +43,7 @@ import { words } from './words.ts';
 export const commonDefinitions: Definition[] = [
   ...words,
   ...scales,
+  ...referenceFlow,
   ...temperatures,
   ...wallTemperatures,
   ...layers,

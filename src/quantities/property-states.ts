@@ -93,6 +93,7 @@ export function materialWays(about: Readonly<Record<string, PropertyAbout>>): De
     ...propertyStates.flatMap(({ suffix, temperature }) => lawProperties.flatMap(({ id }) => one(`${id}${suffix}`, id, temperature, 'pressure'))),
     ...singleProperties.flatMap((p) => one(p.id, p.id, 'temperature' in p ? p.temperature : 'referenceTemperature', 'pressure' in p ? p.pressure : 'pressure')),
     ...one('ambientSaturation', 'saturationTemperature', 'referenceTemperature', 'ambientPressure'),
+    ...one('flowStateDensity', 'flowStateDensity', 'flowStateTemperature', 'flowStatePressure'),
   ];
 }
 

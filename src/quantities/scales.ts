@@ -32,14 +32,6 @@ export const scales: Definition[] = [
   quantity('parallelPassages', { symbol: 'n', name: 'number of equal passages', unit: '1' }, [
     way({ needs: [], as: 'assumed', value: () => 1, formula: 'n = 1', source: 'one passage unless the case says otherwise' }),
   ]),
-  quantity('volumeFlow', { symbol: 'Q', name: 'volume flow in all passages', unit: 'm^3/s' }, [
-    way({ needs: ['inlet.volumeFlow'], value: (of) => of['inlet.volumeFlow'], formula: 'Q as given at the inlet', source: 'the case' }),
-    way({ needs: ['speed', 'flowArea', 'parallelPassages'], value: ({ speed, flowArea, parallelPassages }) => speed * flowArea * parallelPassages, formula: 'Q = n U A', source: continuity }),
-  ]),
-  quantity('massFlow', { symbol: 'm', name: 'mass flow in all passages', unit: 'kg/s' }, [
-    way({ needs: ['inlet.massFlow'], value: (of) => of['inlet.massFlow'], formula: 'm as given at the inlet', source: 'the case' }),
-    way({ needs: ['density', 'speed', 'flowArea', 'parallelPassages'], value: ({ density, speed, flowArea, parallelPassages }) => density * speed * flowArea * parallelPassages, formula: 'm = n rho U A', source: continuity }),
-  ]),
   quantity('speedBulk', { symbol: 'U_b', name: 'mean speed at the bulk state', unit: 'm/s' }, [
     way({ needs: ['speed', 'density', 'densityBulk'], value: ({ speed, density, densityBulk }) => (speed * density) / densityBulk, formula: 'U_b = U rho/rho_b', source: continuity }),
   ]),

@@ -39,6 +39,7 @@ export const words: Definition[] = [
   word('inletProfile', 'shape of the inlet profile', ['uniform', 'developed', 'power', 'log', 'table', 'none']),
   word('wallKind', 'thermal kind of a wall', ['temperature', 'flux', 'coefficient', 'adiabatic'], { per: ['wall'], plain: 'target' }),
   word('wallFace', 'face of the wall whose temperature is given', ['outer', 'wetted'], { per: ['wall'], plain: 'target' }),
+  word('volumeFlowState', 'state at which the volume flow of the inlet counts', ['inlet', 'normal', 'standard']),
   word('inletShareBasis', 'what the share of a species at the inlet counts', ['mass', 'mole'], { per: ['species'], plain: 'target' }),
   word('wallShareBasis', 'what the share of a species at the wall counts', ['mass', 'mole'], { per: ['species'], plain: 'target' }),
   word('wallShareGiven', 'a species has a share of its own at the wall', yesNo, { per: ['species'], plain: 'target' }),

@@ -61,14 +61,16 @@ export function writingOf(quantities: Writables, on?: Case, unicode = false): Wr
     const p = printing(id, q);
     return p === undefined ? word(oneLine(String(q.value))) : show(p);
   };
-  const number = (id: string): string => shown(id, printNumber, (text) => text);
+  // The unit of a flow that counts at a state of its own is not complete without that word.
+  const counted = (id: string): string => (on?.get(id)?.reference === undefined ? '' : ` ${on.get(id)?.reference}`);
+  const number = (id: string): string => shown(id, (p) => printNumber(p) + counted(id), (text) => text);
   return {
     number,
-    parts: (id) => shown(id, numberParts, (text) => ({ number: text, unit: '', spread: '' })),
+    parts: (id) => shown(id, (p) => { const parts = numberParts(p); return { ...parts, unit: parts.unit + counted(id) }; }, (text) => ({ number: text, unit: '', spread: '' })),
     symbol: (id) => { const symbol = oneLine(quantities[id]?.symbol ?? ''); return symbol === '' ? id : symbol; },
     like: (id, value, unit) => {
       const q = quantities[id];
-      return printNumber({ value, unicode, unit: unit ?? q?.unit ?? '1', ...(q === undefined ? unitOfPath(on, id, unit, scale) : unitFor(id, q)) });
+      return printNumber({ value, unicode, unit: unit ?? q?.unit ?? '1', ...(q === undefined ? unitOfPath(on, id, unit, scale) : unitFor(id, q)) }) + counted(id);
     },
     fill: (text) => oneLine(text.replaceAll(/\{([^{}]+)\}/g, (_, id: string) => number(id))),
   };

@@ -32,8 +32,8 @@ const endings: readonly (readonly [pattern: RegExp, words: Words])[] = [
   [/(?: +(?:gauge|gage)| *\((?:g|gauge)\)|(?<=bar|Pa|psi) +g)$/, { gauge: true }],
   [/(?: +(?:abs|absolute)| *\((?:a|abs|absolute)\)|(?<=bar|Pa|psi) +a)$/, { absolute: true }],
   [/ +(?:difference|diff)$/, { difference: true }],
-  [/ +(?:normal)$/, { reference: 'normal' }],
-  [/ +(?:standard)$/, { reference: 'standard' }],
+  [/(?: +normal| *\(normal\))$/, { reference: 'normal' }],
+  [/(?: +standard| *\(standard\))$/, { reference: 'standard' }],
   [/ +of +(?:the +)?change$/, { of: 'change' }],
   [/ +of +(?:the +)?(?:value|it)$/, { of: 'value' }],
   [/(?<=%|ppm|ppb|ppt|permil) +(?:by +)?(?:mol|mole)$/, { basis: 'mol' }],
@@ -83,6 +83,14 @@ export function takeWords(piece: string, whole: string, words: Words): { rest: s
   if (addition !== undefined) {
     out = { ...out, ...addition[2] };
     rest = addition[1].padStart(rest.length - rest.trimStart().length + addition[1].length);
+  }
+  // A letter grown onto the cubic metre of a flow; alone Nm3 may be newton times cubic metre, and stays refused.
+  const flow = /^ *(?:N|S)(?=m(?:\^3|3)\/[a-z])/.exec(rest);
+  if (flow !== null) {
+    const reference = flow[0].endsWith('N') ? 'normal' : 'standard';
+    if (out.reference !== undefined && out.reference !== reference) throw twice(whole, `both ${out.reference} and ${reference}`);
+    out = { ...out, reference };
+    rest = rest.slice(flow[0].length).padStart(rest.length);
   }
   if (out.gauge && out.absolute) throw twice(whole, 'both gauge and absolute');
   return { rest, words: out };

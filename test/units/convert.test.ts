@@ -29,12 +29,20 @@ describe('convert', () => {
     ['0.5', '%', 50, undefined],
     ['1 GB', 'MB', 1000, undefined],
     ['1 GiB', 'B', 1073741824, undefined],
+    ['60 m^3/h normal', 'L/min normal', 1000, /normal counts at 0 degC and 101 325 Pa \(DIN 1343\)$/],
+    ['273.15 Nm3/h', 'm^3/h standard', 288.15, /standard counts at 15 degC and 101 325 Pa \(ISO 13443\); the gas is ideal/],
+    ['288.15 m^3/h standard', 'Nm3/h', 273.15, /ideal/],
   ])('%s to %s', (text, to, value, says) => {
     const got = convert(text, to);
     expect(got.value).toBeCloseTo(value, 9);
     expect(got.unit).toBe(to);
     expect(got.assumed.join('; ')).toMatch(says ?? /^$/);
   });
+
+  it.each([
+    ['2000 m^3/h normal', 'm^3/h', '"2000 m^3/h normal" counts at 0 degC and 101 325 Pa (DIN 1343); at another state it depends on temperature and pressure'],
+    ['2000 m^3/h', 'm^3/h standard', '"2000 m^3/h" does not say at which state it is, and standard counts at 15 degC and 101 325 Pa (ISO 13443)'],
+  ])('refuses %s to %s, since a state is missing', (text, to, message) => expect(refusal(() => convert(text, to))).toMatchObject({ code: 'no-reference-state', message }));
 
   it('carries the spread along', () => expect(convert('20 +/- 1 degC', 'degF')).toMatchObject({ value: 68, half: 1.8 }));
 
