@@ -134,7 +134,7 @@ export function assemble(read: Case, options: AssembleOptions = {}): Assembled {
     ],
     // Looked for only where it is read: it walks the whole graph.
     get unused() {
-      return [...on.entries.values()].filter((e) => e.kind === 'quantity' && !e.path.startsWith('targets.') && e.path !== 'format' && !e.path.startsWith('computing.') && !(fluid.material !== undefined && e.path.startsWith('fluid.composition.')) && isUnused(workings, e.path)).map((e) => e.path);
+      return [...on.entries.values()].filter((e) => e.kind === 'quantity' && !e.path.startsWith('targets.') && e.path !== 'format' && !e.path.startsWith('computing.') && !(fluid.material !== undefined && e.path.startsWith('fluid.composition')) && isUnused(workings, e.path)).map((e) => e.path);
     },
     chosen: chosenOf(on),
     leaves,

@@ -30,7 +30,7 @@ const featureKeys: Readonly<Record<(typeof features)[number], (on: Case, walls: 
   ramp: (c) => c.has('time.ramp'),
   swirl: () => false,
   humidity: (c) => c.has('fluid.humidity'),
-  solution: (c) => c.list('fluid.composition').length > 0,
+  solution: (c) => c.has('fluid.composition'),
   burning: (c) => c.has('burning'),
   roughness: (_, w) => any(w, 'sandGrain') || any(w, 'Ra') || [...w.values()].some((keys) => hasGrain(keys.get('surface')?.value)),
   layers: (c) => c.list('wall.layers').length > 0 || c.list('walls').some((w) => c.list(`walls.${w}.layers`).length > 0),

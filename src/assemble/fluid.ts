@@ -23,7 +23,8 @@ export function placed<T>(entry: Entry | undefined, file: string, make: () => T)
     return make();
   } catch (error) {
     if (!(error instanceof Problem) || entry === undefined) throw error;
-    throw new Problem(error.list.map((p): ProblemData => ({ file, ...entry.position, ...p })));
+    // What a state takes as words, a case takes as keys.
+    throw new Problem(error.list.map((p): ProblemData => ({ file, ...entry.position, ...p, ...(p.expected === undefined ? {} : { expected: p.expected.replace(/^(humidity|composition) (?=\d)/, '$1: ') }) })));
   }
 }
 
@@ -46,9 +47,10 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   const temperature = on.number('inlet.temperature') ?? on.number('fluid.temperature') ?? on.number('inlet.totalTemperature') ?? on.number('initial.temperature') ?? around ?? middle(on);
   const entry = on.get('fluid.material');
   const parts = componentsOf(on);
-  const firstPart = on.get(`fluid.composition.${parts[0]?.name ?? ''}`);
+  const alone = on.get('fluid.composition');
+  const firstPart = alone ?? on.get(`fluid.composition.${parts[0]?.name ?? ''}`);
   if (typeof entry?.value !== 'string') {
-    if (parts.length > 0) throw placedAt(firstPart, on.file, { code: 'composition-without-material', message: 'a composition is given without a material', ...(componentsMean('', parts, materials ?? shippedMaterials()) ?? { expected: 'fluid: { material: gas mixture, composition: ... } for gases, or a solution such as propylene glycol-water', nearest: 'material: gas mixture' }) });
+    if (firstPart !== undefined) throw placedAt(firstPart, on.file, { code: 'composition-without-material', message: 'a composition is given without a material', ...(componentsMean('', parts, materials ?? shippedMaterials()) ?? { expected: 'fluid: { material: gas mixture, composition: ... } for gases, or a solution such as propylene glycol-water', nearest: 'material: gas mixture' }) });
     const density = on.number('fluid.density');
     const said = on.word('fluid.medium') as Fluid['medium'];
     // A fluid of constants need not say its state of matter: the density tells.
@@ -60,9 +62,10 @@ export function fluidOf(on: Case, materials: Collection | undefined): Fluid {
   if (temperature === undefined) assumed['fluid.temperature'] = assumedTemperature;
   const name = entry.value;
   const known = placed(entry, on.file, () => loadMaterial(name, materials));
+  if (alone !== undefined && known.takes.includes('components')) throw placedAt(alone, on.file, { code: 'wrong-composition', message: `${known.name} has several components, and one share is given`, expected: 'composition: { oxygen: 21 % mol, nitrogen: 79 % mol }' });
   const byComponents = known.takes.includes('components') && parts.length > 0;
   const material = byComponents ? placed(firstPart ?? entry, on.file, () => mixtureOf(known, parts, materials)) : known;
-  const composition = parts.length > 0 && material.takes.includes('composition') ? placed(firstPart, on.file, () => solutionShare(material, parts, materials)) : undefined;
+  const composition = parts.length > 0 && material.takes.includes('composition') ? placed(firstPart, on.file, () => solutionShare(material, parts, materials)) : alone !== undefined && material.takes.includes('composition') ? placed(alone, on.file, () => solutionShare(material, [{ name: material.name, share: alone.value as number, ...(alone.basis === undefined ? {} : { basis: alone.basis }) }], materials)) : undefined;
   const state: State = {
     temperature: meltOf(on, material) ?? temperature ?? assumedTemperature,
     pressure: pressure ?? assumedPressure,

@@ -32,7 +32,7 @@ const properties: Fields = {
 };
 
 /** Shares of a mixture, by component. */
-export const composition: Field = { kind: 'open-map', doc: 'shares of the components of a mixture', example: '{ oxygen: 21 % mol, nitrogen: 79 % mol }', item: share('share of a component', '21 % mol') };
+export const composition: Field = { kind: 'open-map', doc: 'shares of the components of a mixture; for a solution its one share, such as 30 % mass', example: '{ oxygen: 21 % mol, nitrogen: 79 % mol }', item: share('share of a component', '21 % mol'), alone: share('share of what is dissolved, for a solution', '30 % mass') };
 
 export const fluid = map('what flows: a material by name, or its properties', '{ material: water, pressure: 2 bar abs }', {
   material: text('name of a material that the program knows', 'water'),

@@ -30,6 +30,7 @@ export function fieldAt(vocabulary: Vocabulary, flow: string, path: string): Fie
       i++;
       fields = field.item.keys;
     } else if (field.kind === 'open-map') {
+      if (parts.length === i + 1) return field.alone === undefined ? undefined : { field: field.alone, gives: givenBy(field.alone, parts.slice(0, -1).join('.')) };
       return parts.length === i + 2 && isLeaf(field.item) ? { field: field.item, gives: [] } : undefined;
     } else if (field.kind === 'paths' || i < parts.length - 1) return undefined;
     else return { field, gives: givenBy(field, parts.slice(0, -1).join('.')) };
@@ -55,7 +56,7 @@ export function allPaths(vocabulary: Vocabulary, flow: string): readonly string[
       if (field.kind === 'map') look(field.keys, `${path}.`);
       else if (field.kind === 'list') look(field.item.keys, `${path}.*.`);
       else if (field.kind === 'sizes') look(own(vocabulary.flows, flow)?.sizes ?? {}, `${path}.`);
-      else if (field.kind === 'open-map') found.push(`${path}.*`);
+      else if (field.kind === 'open-map') found.push(...(field.alone === undefined ? [] : [path]), `${path}.*`);
       else if (field.kind !== 'paths') found.push(path);
     }
   };

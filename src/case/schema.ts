@@ -44,8 +44,10 @@ function schemaOf(field: Field): Schema {
       return { type: 'boolean', ...about };
     case 'paths':
       return { type: 'array', items: { type: 'array', items: { type: 'string' }, minItems: 2 }, ...about };
-    case 'open-map':
-      return { type: 'object', additionalProperties: schemaOf(field.item), ...about };
+    case 'open-map': {
+      const names = { type: 'object', additionalProperties: schemaOf(field.item) };
+      return field.alone === undefined ? { ...names, ...about } : { ...about, anyOf: [names, schemaOf(field.alone)] };
+    }
     case 'map':
       return { ...object(field.keys), ...about };
     case 'sizes':

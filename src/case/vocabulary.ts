@@ -80,6 +80,8 @@ export interface PathsField extends About {
 export interface OpenMapField extends About {
   readonly kind: 'open-map';
   readonly item: Field;
+  /** What a single value in place of the map is: the one share of a solution. */
+  readonly alone?: LeafField;
 }
 
 /** Fixed keys. */

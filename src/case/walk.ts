@@ -101,7 +101,7 @@ export class Walk {
         return;
       }
       case 'open-map':
-        return this.#openMap(tree, field.item, field, path);
+        return tree.kind === 'scalar' && field.alone !== undefined ? this.#leaf(tree, field.alone, path, beside) : this.#openMap(tree, field.item, field, path);
       case 'list':
         return this.#list(tree, field, path);
       case 'paths':

@@ -34,6 +34,23 @@ describe('a surface by name', () => {
   });
 });
 
+describe('the share of a solution in a case', () => {
+  const glycol = (fluid: string): number | undefined => settleCase(readCase(`format: 1\ntitle: t\nflow: pipe\nsizes: { diameter: 20 mm, length: 1 m }\nfluid: { ${fluid}, pressure: 2 bar abs }\ninlet: { speed: 1 m/s, temperature: 20 degC }\n`, 't.case.yaml', vocabulary)).assembled.workings.get('density');
+  it('one share, the name of the solute, and solute with water say the same', () => {
+    const alone = glycol('material: propylene glycol-water, composition: 40 %');
+    expect(alone).toBeGreaterThan(1020);
+    expect(glycol('material: propylene glycol-water, composition: 40 % mass')).toBe(alone);
+    expect(glycol('material: propylene glycol-water, composition: { propylene glycol: 40 % mass }')).toBe(alone);
+    expect(glycol('material: propylene glycol-water, composition: { propylene glycol: 40 % mass, water: 60 % mass }')).toBe(alone);
+  });
+  it('what is missing or does not fit is told in the form that works', () => {
+    expect(() => glycol('material: propylene glycol-water')).toThrow(expect.objectContaining({ list: [expect.objectContaining({ expected: expect.stringMatching(/^composition: \d+ % mass/) as string })] }) as Problem);
+    expect(() => glycol('material: propylene glycol-water, composition: 40 % mol')).toThrow('by mass');
+    expect(() => glycol('material: gas mixture, composition: 40 %')).toThrow(expect.objectContaining({ list: [expect.objectContaining({ line: 5, expected: 'composition: { oxygen: 21 % mol, nitrogen: 79 % mol }' })] }) as Problem);
+    expect(() => glycol('density: 1000 kg/m^3, composition: 40 %')).toThrow('without a material');
+  });
+});
+
 describe('mixtures of gases in a case', () => {
   it('takes the components of the composition', () => {
     const w = settleCase(readCase('format: 1\ntitle: t\nflow: pipe\nsizes: { diameter: 0.3 m, length: 5 m }\nfluid: { material: flue gas, pressure: 1 bar abs, composition: { carbon dioxide: 13.3 % mol, oxygen: 3.9 % mol, nitrogen: 82.8 % mol } }\ninlet: { speed: 5 m/s, temperature: 20 degC }\n', 't.case.yaml', vocabulary)).assembled.workings;
