@@ -73,7 +73,7 @@ export default class Ask extends Base {
     if (flow !== undefined && stood !== undefined && flow !== stood) throw new Problem({ code: 'wrong-flag', message: `${file} answers flow: ${flow}, where ${stood} is stated`, expected: 'one flow' });
     if (flow === undefined && stood === undefined) throw new Problem({ code: 'missing-argument', message: `${file} does not name the flow`, expected: `flow: ${Object.keys(vocabulary.flows)[0]} in it, or --flow NAME` });
     const { state, unasked } = replied(talk, start, answers, file);
-    if (unasked.length > 0) this.remark(`not asked, so not in the case: ${unasked.join(', ')}`);
+    if (unasked.length > 0) this.remark(`kept without being asked: ${unasked.join(', ')}`);
     return { state, end: 'settled', save: true };
   }
 

@@ -15,10 +15,11 @@ export const skipWord = 'skip';
  * @param state     the answers so far
  * @param question  what was asked
  * @param text      as the user wrote it
+ * @param beside    values by path that are given together with it, unasked
  * @returns         the next state
  * @throws          {Problem} those of the case reader; empty-answer
  */
-export function answered(state: State, question: Question, text: string): State {
+export function answered(state: State, question: Question, text: string, beside: Values = none): State {
   const said = text.trim();
   const group = question.paths.join('|');
   if (said === '') throw new Problem({ code: 'empty-answer', message: 'nothing is answered', expected: `${question.example}, ${unknownWord} or ${skipWord}` });
@@ -31,12 +32,33 @@ export function answered(state: State, question: Question, text: string): State 
   const elsewhere = stated !== null && fieldAt(vocabulary, flow, stated[1] as string) !== undefined;
   const [path, value] = elsewhere ? checked(on, stated[1] as string, stated[2] as string) : fitting(on, question, said);
   const asked = question.paths.includes(path);
-  const given = new Map([...state.given].filter(([old]) => old !== path));
-  given.set(path, { text: value, why: asked ? question.why : (state.given.get(path)?.why ?? 'given without being asked') });
+  const given = new Map([...kept(state, beside).given].filter(([old]) => old !== path));
+  given.set(path, { text: value, why: asked ? question.why : (state.given.get(path)?.why ?? unasked) });
   const later = question.now === undefined || !asked ? state.later : new Set([...state.later, path]);
   const unknown = new Map([...state.unknown].filter(([paths]) => !paths.split('|').includes(path)));
   return { ...state, given, later, unknown, before: state };
 }
+
+/** Values by path, as the user wrote them. */
+export type Values = ReadonlyMap<string, string>;
+const none: Values = new Map();
+const unasked = 'given without being asked';
+
+/**
+ * The state with values that no question asked for.
+ *
+ * @throws {Problem} those of the case reader, of a value that does not fit its path
+ */
+export function kept(state: State, values: Values): State {
+  if (values.size === 0) return state;
+  const on = caseOf(state);
+  const given = new Map(state.given);
+  for (const [path, text] of values) given.set(...noted(checked(on, path, text)));
+  const unknown = new Map([...state.unknown].filter(([paths]) => !paths.split('|').some((one) => values.has(one))));
+  return { ...state, given, unknown, before: state };
+}
+
+const noted = ([path, text]: readonly [string, string]): [string, { text: string; why: string }] => [path, { text, why: unasked }];
 
 type On = Parameters<typeof readEntry>[1];
 

@@ -1,7 +1,7 @@
 import type { Case } from '../case/index.ts';
 import { Problem } from '../problems/index.ts';
 import { alternatives } from './alternatives.ts';
-import { answered } from './answer.ts';
+import { answered, kept, skipWord, unknownWord, type Values } from './answer.ts';
 import { weightiestAssumption } from './assumed.ts';
 import { flowQuestion, hangs, startQuestion } from './begin.ts';
 import { hanging, type Hanging } from './open.ts';
@@ -40,13 +40,32 @@ export class Interview {
    *
    * @param state  the answers so far
    * @param text   a value, `path: value`, `unknown` or `skip`
+   * @param beside values by path that belong to it: humidity and composition to their material
    * @returns      the next state, or what is wrong with the answer
    */
-  answer(state: State, text: string): Outcome {
+  answer(state: State, text: string, beside?: Values): Outcome {
     const question = this.next(state);
     if ('done' in question) return { state };
+    const { wants, ...without } = state;
+    const rest = wants === undefined ? state : without;
+    if (wants !== undefined && [unknownWord, skipWord].includes(text.trim())) return { state: { ...rest, before: state }, remark: `${wants.says}: without it there is nothing to plan` };
+    const outcome = this.#tried(state, () => answered(rest, question, text, wants?.values ?? beside));
+    const path = 'problem' in outcome ? neededBy(outcome.problem) : undefined;
+    if (path === undefined || !('problem' in outcome) || beside?.has(path) === true) return outcome;
+    // The answer waits for what it needs: the two stand together.
+    const material = /^fluid\.material:\s+(.+)$/su.exec(text.trim())?.[1] ?? (question.paths.includes('fluid.material') ? text.trim() : undefined);
+    if (material === undefined || wants !== undefined) return outcome;
+    return { state: { ...rest, wants: { path, values: new Map([['fluid.material', material]]), says: outcome.problem.message }, before: state } };
+  }
+
+  /** Takes values that no question asked for. */
+  keep(state: State, values: Values): Outcome {
+    return this.#tried(state, () => kept(state, values));
+  }
+
+  #tried(state: State, make: () => State): Outcome {
     try {
-      const next = answered(state, question, text);
+      const next = make();
       const remark = next.given.has('flow') ? loose(this.#view(next), state) : undefined;
       return { state: next, ...(remark === undefined ? {} : { remark }) };
     } catch (error) {
@@ -80,6 +99,7 @@ export class Interview {
     if (state.enough) return { done: 'enough' };
     if (!state.given.has('flow')) return flowQuestion();
     const view = this.#view(state);
+    if (state.wants !== undefined) return questionOf(view.on.flow, { paths: [state.wants.path], why: state.wants.says }, view);
     const start = startQuestion(state, view);
     if (start !== undefined) return start;
     const first = hanging(view)[0];
@@ -98,4 +118,10 @@ function loose(view: View, before: State): string | undefined {
   if (words === undefined) return undefined;
   const near = words.nearest === undefined || words.nearest.length === 0 ? '' : `; near to it: ${words.nearest.join(', ')}`;
   return `"${words.quantity}" names no number of this program: it is kept as words, without estimate${near}`;
+}
+
+/** The path of what a fluid lacks: its humidity or composition. */
+function neededBy({ list }: Problem): string | undefined {
+  const what = /^missing-(humidity|composition)$/.exec(list[0]?.code ?? '')?.[1];
+  return what === undefined ? undefined : `fluid.${what}`;
 }

@@ -1,8 +1,8 @@
 import { vocabulary } from '../assemble/index.ts';
 import { allPaths, readCase } from '../case/index.ts';
 import { nearestName, Problem, type ProblemData } from '../problems/index.ts';
-import { skipWord, unknownWord } from './answer.ts';
-import type { Interview } from './interview.ts';
+import { skipWord, unknownWord, type Values } from './answer.ts';
+import type { Interview, Outcome } from './interview.ts';
 import type { State } from './state.ts';
 
 const flat = /^([A-Za-z][^:#]*?)\s*:\s+(\S.*?)\s*$/;
@@ -47,26 +47,46 @@ function unquoted(value: string): string {
 }
 
 /**
- * An interview held with answers from a file: what is asked is looked up, what is not there counts as unknown.
+ * An interview held with answers from a file: what is asked is looked up, what is not there counts as unknown, and what no
+ * question asks for is kept beside the rest.
  *
  * @param talk     the interview
  * @param state    where it begins
  * @param answers  by path
  * @param file     name of the file of answers, for problems
- * @returns        the last state, and paths that were never asked for
+ * @returns        the last state, and paths that no question asked for
  * @throws         {Problem} an answer that does not fit
  */
-export function replied(talk: Interview, state: State, answers: ReadonlyMap<string, string>, file: string): { state: State; unasked: readonly string[] } {
+export function replied(talk: Interview, state: State, answers: Values, file: string): { state: State; unasked: readonly string[] } {
   let at = state;
   const used = new Set<string>(state.given.keys());
-  for (let question = talk.next(at); !('done' in question); question = talk.next(at)) {
-    const path = question.now === undefined ? question.paths.find((one) => answers.has(one)) : undefined;
-    const text = path === undefined ? undefined : (answers.get(path) as string);
-    const said = text === undefined ? (question.now === undefined ? unknownWord : skipWord) : text === unknownWord || text === skipWord ? text : `${path}: ${text}`;
-    if (path !== undefined) used.add(path);
-    const outcome = talk.answer(at, said);
-    if ('problem' in outcome) throw new Problem(outcome.problem.list.map((one) => ({ ...one, message: one.message.startsWith(path ?? '') ? one.message : `${path ?? ''}: ${one.message}`, file })));
+  const unasked: string[] = [];
+  const take = (outcome: Outcome, path: string): void => {
+    if ('problem' in outcome) throw new Problem(outcome.problem.list.map((one) => ({ ...one, message: one.message.startsWith(path) ? one.message : `${path}: ${one.message}`, file })));
     at = outcome.state;
+  };
+  const left = (wanted: (path: string) => boolean): Values => new Map([...answers].filter(([path, text]) => !used.has(path) && text !== unknownWord && text !== skipWord && wanted(path)));
+  for (;;) {
+    const question = talk.next(at);
+    if (at.wants !== undefined) throw new Problem({ code: 'no-answer', message: at.wants.says, file, expected: `${at.wants.path}: ${'example' in question ? question.example : ''}` });
+    if (!('done' in question)) {
+      const path = question.now === undefined ? question.paths.find((one) => answers.has(one)) : undefined;
+      const text = path === undefined ? undefined : (answers.get(path) as string);
+      const said = text === undefined ? (question.now === undefined ? unknownWord : skipWord) : text === unknownWord || text === skipWord ? text : `${path}: ${text}`;
+      if (path !== undefined) used.add(path);
+      // A material is settled at its state: what the file says of the fluid counts together with it.
+      const beside = path === 'fluid.material' && said !== text ? left((one) => one.startsWith('fluid.')) : undefined;
+      take(talk.answer(at, said, beside), path ?? '');
+      for (const one of beside?.keys() ?? []) used.add(one);
+      continue;
+    }
+    const rest = left(() => true);
+    if (rest.size === 0) break;
+    for (const [path, text] of rest) {
+      take(talk.keep(at, new Map([[path, text]])), path);
+      used.add(path);
+      unasked.push(path);
+    }
   }
-  return { state: at, unasked: [...answers.keys()].filter((path) => !used.has(path)) };
+  return { state: at, unasked };
 }

@@ -20,6 +20,13 @@ export interface Noted {
   readonly why: string;
 }
 
+/** The path that is asked next, and the values that wait for it. */
+export interface Wanted {
+  readonly path: string;
+  readonly values: ReadonlyMap<string, string>;
+  readonly says: string;
+}
+
 /** An interview at one moment. It is never changed: an answer makes the next one, which knows the one before. */
 export interface State {
   /** By path of the case. */
@@ -32,6 +39,8 @@ export interface State {
   readonly together: readonly (readonly string[])[];
   /** Nothing more is asked. */
   readonly enough: boolean;
+  /** What an answer cannot stand without: a humid gas its humidity, a solution its composition. The answer waits for it. */
+  readonly wants?: Wanted;
   readonly before?: State;
 }
 

@@ -263,6 +263,41 @@ choices.yPlus: 1
     expect(writeCase(replied(talk, empty, repliesIn(list, 'known.txt'), 'known.txt').state)).toBe(writeCase(once.state));
   });
 
+  const held = (text: string): State => replied(talk, empty, repliesIn(text, 'k.txt'), 'k.txt').state;
+  const humid = ['fluid.material: humid air', 'fluid.humidity: 60 %', 'fluid.pressure: 1 atm', 'fluid.temperature: 26 degC'];
+  it.each([[0, 1, 2, 3], [1, 0, 2, 3], [3, 2, 1, 0]].map((order) => order.map((k) => humid[k]).join('\n')))('takes humid air with its humidity in any order: %j', (lines) => {
+    const { given } = held(`flow: plate\ntitle: Panel\n${lines}\nsizes.length: 1.5 m\nwall.temperature: 14 degC\n`);
+    for (const [path, text] of humid.map((line) => line.split(': ') as [string, string])) expect(given.get(path)?.text).toBe(text);
+  });
+
+  it('takes humid air and a solution from YAML and from lines, the share of a solution in one form or by name', () => {
+    expect(held('flow: plate\nfluid: { material: humid air, humidity: 60 %, pressure: 1 atm, temperature: 26 degC }\nsizes: { length: 1.5 m }\nwall: { temperature: 14 degC }\n').given.get('fluid.humidity')?.text).toBe('60 %');
+    const alone = held('flow: pipe\nsizes.diameter: 25 mm\nfluid.material: propylene glycol-water\nfluid.composition: 40 % mass\n');
+    expect(writeCase(alone)).toMatch(/^ {2}composition: 40 % mass +#/m);
+    expect(held(writeCase(alone, false)).given.get('fluid.composition')?.text).toBe('40 % mass');
+    expect(held('flow: pipe\nfluid.material: propylene glycol-water\nfluid.composition.propylene glycol: 40 % mass\n').given.get('fluid.composition.propylene glycol')?.text).toBe('40 % mass');
+    expect(() => held('flow: pipe\nfluid.material: propylene glycol-water\n')).toThrow('propylene glycol-water needs its composition');
+  });
+
+  it('keeps what no question asks for', () => {
+    const { given } = held('flow: pipe\nsizes.diameter: 25 mm\nfluid.material: water\nfluid.pressure: 2 bar\ninlet.speed: 1 m/s\nchoices.yPlus: 1\ncomputing.cores: 8\n');
+    expect(['fluid.pressure', 'choices.yPlus', 'computing.cores'].map((path) => given.get(path)?.text)).toEqual(['2 bar', '1', '8']);
+    expect(() => held('flow: pipe\nchoices.yPlus: 1 m\n')).toThrow('choices.yPlus');
+  });
+
+  it('asks for the humidity of humid air, the composition of a solution, and takes the two together', () => {
+    let state = said(said(empty, 'flow: pipe'), 'humid air');
+    expect(talk.next(state)).toMatchObject({ paths: ['fluid.humidity'], why: 'humid air needs its humidity' });
+    expect(talk.answer(state, '60 degC')).toMatchObject({ problem: {} });
+    state = said(state, '60 %');
+    expect([...state.given].map(([path, { text }]) => [path, text])).toEqual([['flow', 'pipe'], ['fluid.material', 'humid air'], ['fluid.humidity', '60 %']]);
+    expect(talk.next(state)).not.toMatchObject({ paths: ['fluid.material'] });
+    const salt = said(said(empty, 'flow: pipe'), 'propylene glycol-water');
+    expect(talk.next(salt)).toMatchObject({ paths: ['fluid.composition'] });
+    expect(said(salt, '40 %').given.get('fluid.composition')?.text).toBe('40 %');
+    expect(talk.next(said(salt, 'unknown'))).toMatchObject({ paths: ['fluid.material'] });
+  });
+
   it('reads YAML alike', () => {
     const yaml = 'flow: pipe\nfluid: { material: water }\nsizes: { diameter: 25 mm, length: 8 m }\ninlet: { massFlow: 0.2 kg/s, temperature: 65 degC }\n';
     expect(repliesIn(yaml, 'a.yaml').get('inlet.massFlow')).toBe('0.2 kg/s');
