@@ -36,6 +36,7 @@ export default class Compare extends Base {
     const filled = fillReference(assembled, args.reference);
     const result = compareReference(filled.reference, evaluateReference(filled.reference, filled.inputs), readTable(readResultText(args.file), args.file), {
       ...(filled.tolerance === undefined ? {} : { limit: filled.tolerance }),
+      ...(filled.compares === undefined ? {} : { compares: filled.compares }),
       ...(flags.numerical === undefined ? {} : { numerical: flags.numerical }),
       ...(flags.input === undefined ? {} : { input: flags.input }),
       ...(flags.statistical === undefined ? {} : { statistical: flags.statistical }),

@@ -13,6 +13,8 @@ export interface FilledReference {
   /** Relative tolerance of the rung; absent where the answer is no rung of this ladder. */
   readonly tolerance?: number;
   readonly ifMissed?: string;
+  /** The number of the answer that the rung compares. */
+  readonly compares?: string;
 }
 
 /**
@@ -44,5 +46,5 @@ export function fillReference(assembled: Assembled, name: string): FilledReferen
     sources[need.id] = id;
   }
   const tolerance = named === undefined ? undefined : workings.get(named.tolerance);
-  return { reference, inputs, from: sources, ...(tolerance === undefined ? {} : { tolerance }), ...(named === undefined ? {} : { ifMissed: named.rung.ifMissed }) };
+  return { reference, inputs, from: sources, ...(tolerance === undefined ? {} : { tolerance }), ...(named === undefined ? {} : { ifMissed: named.rung.ifMissed, compares: named.rung.compares }) };
 }

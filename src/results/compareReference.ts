@@ -2,7 +2,7 @@ import { Problem, type ProblemData } from '../problems/index.ts';
 import type { Evaluation, Reference } from '../references/index.ts';
 import { compareTable } from './compare.ts';
 import { compareValues } from './compareValues.ts';
-import type { Allowances, TableComparison, ValueComparison } from './comparison.ts';
+import type { Allowances, KnownValue, TableComparison, ValueComparison } from './comparison.ts';
 import { rungTolerance } from './deviation.ts';
 import type { Outcome } from './limit.ts';
 import { matchColumns } from './match.ts';
@@ -31,16 +31,16 @@ export interface ReferenceComparison {
  * @param reference   the known answer
  * @param evaluation  the answer for the inputs of the case
  * @param result      the table of results
- * @param options     limit (that of the step unless said) and uncertainties
+ * @param options     limit (that of the step unless said) and uncertainties; the number that a rung compares, which then counts under its plain name too
  * @returns           all comparisons the file allows, and the worst outcome
  * @throws            {Problem} those of the evaluation, missing-column where nothing of the file fits, those of compareTable
  */
-export function compareReference(reference: Reference, evaluation: Evaluation, result: Table, options: Omit<Allowances, 'limit'> & { readonly limit?: number }): ReferenceComparison {
+export function compareReference(reference: Reference, evaluation: Evaluation, result: Table, options: Omit<Allowances, 'limit'> & { readonly limit?: number; readonly compares?: string }): ReferenceComparison {
   if (evaluation.problems.length > 0) throw new Problem(evaluation.problems);
   const limit = options.limit ?? reference.passLimit ?? rungTolerance(reference);
   const allowances = { ...options, limit };
   const measure = reference.kind === 'measured' ? 'rms' : 'largest';
-  const values = result.rowCount === 1 ? compareValues(evaluation.values, result, allowances) : [];
+  const values = result.rowCount === 1 ? compareValues(asked(evaluation.values, options.compares, result), result, allowances) : [];
   const misfits: ProblemData[] = [];
   const fitting = evaluation.tables.filter((table) => fits(table.columns, result, misfits));
   const tables = result.rowCount === 1 ? [] : fitting.map((table) => compareTable(table, result, { ...allowances, measure, uncertainty: reference.uncertainty }));
@@ -48,6 +48,17 @@ export function compareReference(reference: Reference, evaluation: Evaluation, r
   const outcome = (['missed', 'cannot tell', 'met'] as const).find((one) => outcomes.includes(one));
   if (outcome === undefined) throw nothingFits(reference, evaluation, result, misfits);
   return { reference: reference.id, source: reference.source, limit, tables, values, outcome, flags: evaluation.flags, ...(outcome === 'missed' ? { ifMissed: reference.ifMissed } : {}) };
+}
+
+/**
+ * The known numbers as a rung asks for them: where it compares `nusseltUniformFlux` and the file has a plain `nusselt` alone, that
+ * column is the one compared, not the number of the same plain name.
+ */
+function asked(values: readonly KnownValue[], compares: string | undefined, result: Table): readonly KnownValue[] {
+  const one = values.find((value) => value.id === compares);
+  if (one === undefined || matchColumns([one], result).some((pair) => pair.by === 'name')) return values;
+  const plain = values.find((value) => value !== one && one.id.startsWith(value.id) && value.unit === one.unit);
+  return plain === undefined ? values : values.flatMap((value) => (value === plain ? [] : value === one ? [{ ...one, id: plain.id }] : [value]));
 }
 
 /** Whether the file has the coordinate and a column of a table; a unit that does not fit is kept for the complaint. */

@@ -70,6 +70,16 @@ describe('runbrief compare', () => {
     expect(values[1]?.known).toBeCloseTo(4, 9);
     expect(values[1]?.deviation).toBeCloseTo(0.08, 9);
   });
+  it('a plain header is held against the number that the rung compares', async () => {
+    // Between plates with one flux through both walls Nu = 140/17 = 8.2353, with one temperature 7.5407 (Shah and London 1978).
+    writeFileSync(file('plates.case.yaml'), 'format: 1\ntargets: [{ quantity: nusselt, within: 5 % }]\nflow: channel\nsizes: { gap: 3 mm, length: 0.4 m, width: 60 mm }\nfluid: { material: water, pressure: 1.2 bar abs }\ninlet: { speed: 0.05 m/s, temperature: 20 degC }\nwall: { heatFlux: 1 kW/m^2 }\n');
+    writeFileSync(file('plain.csv'), 'nusselt [1]\n8.2\n');
+    writeFileSync(file('both.csv'), 'nusselt [1],nusseltUniformFlux [1]\n7.5,8.2\n');
+    const known = async (rung: string, name: string): Promise<[string, number][]> => (JSON.parse((await runbrief(['compare', file('plates.case.yaml'), rung, file(name), '--json'])).stdout) as { values: { column: string; known: number }[] }).values.map((v) => [v.column, Number(v.known.toFixed(4))]);
+    expect(await known('developed-heat-channel:nusseltUniformFlux', 'plain.csv')).toEqual([['nusselt', 8.2353]]);
+    expect(await known('developed-heat-channel', 'plain.csv')).toEqual([['nusselt', 7.5407]]);
+    expect(await known('developed-heat-channel:nusseltUniformFlux', 'both.csv')).toEqual([['nusselt', 7.5407], ['nusseltUniformFlux', 8.2353]]);
+  });
   it('a wrong name has the nearest one, a file without known columns says which it could have', async () => {
     const wrong = await runbrief(['compare', file('oil.case.yaml'), 'poiseuile-pipe', file('exact.csv')]);
     expect([wrong.code, wrong.stderr.includes('poiseuille-pipe')]).toEqual([1, true]);
