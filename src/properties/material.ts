@@ -180,7 +180,9 @@ export function materialOf(given: MaterialRecord, collection: Collection, asked?
   const engine = engineOf(record, collection);
   const has = new Set<string>(Object.keys(record.properties));
   if (record.thermodynamics !== undefined) for (const id of Object.keys(record.thermodynamics.uncertainty)) has.add(id);
-  if (record.thermodynamics !== undefined && record.molarMass !== undefined) for (const id of ['compressibilityFactor', 'isentropicExponent']) has.add(id);
+  // Moist air has a molar mass too, though it moves with its composition.
+  const molar = record.molarMass !== undefined || record.thermodynamics?.uncertainty['molarMass'] !== undefined;
+  if (record.thermodynamics !== undefined && molar) for (const id of ['compressibilityFactor', 'isentropicExponent']) has.add(id);
   if (has.has('density')) has.add('thermalExpansion');
   if (has.has('density') && has.has('viscosity')) has.add('kinematicViscosity');
   if (has.has('density') && has.has('specificHeatCapacity') && has.has('thermalConductivity')) has.add('thermalDiffusivity');
