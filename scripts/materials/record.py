@@ -1,6 +1,8 @@
 """Writes a material record as the YAML that materials/ holds: short maps in one line, lists of rows in one line."""
 import os
 
+from solution_bounds import bounded
+
 FOLDER = os.path.join(os.path.dirname(os.path.abspath(__file__)), '..', '..', 'materials')
 BARE = set('abcdefghijklmnopqrstuvwxyzABCDEFGHIJKLMNOPQRSTUVWXYZ0123456789 ._-/()^*%+')
 
@@ -56,6 +58,7 @@ HEAD = ('name', 'formula', 'aliases', 'kind', 'phases', 'takes', 'typical', 'mol
 
 def write(record, made_by):
     """Writes one record; `made_by` names the script and its data in the first line."""
+    record = bounded(record)
     lines = [f'# Made by scripts/materials/{made_by}']
     for key in HEAD:
         if key in record:

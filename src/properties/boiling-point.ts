@@ -23,3 +23,21 @@ export function withBoilingPoint(record: MaterialRecord, evaluate: (entry: Entry
   const boiling: Entry = { model: 'boiling-point', constants: { from, to }, ranges: [{ pressure: [low, high], ...(box.composition === undefined ? {} : { composition: box.composition }) }], uncertainty: [{ value: widest / slope }], source: `vapour pressure: ${entry.source}`, checks: [] };
   return { ...record, properties: { ...record.properties, saturationTemperature: [boiling] } };
 }
+
+/** Temperatures [K] at which a liquid solution is asked for. Below its triple point the line of water goes on smoothly, within 5 % of that of supercooled water. */
+const liquidTemperatures = [233.15, 473.15] as const;
+
+/**
+ * A record with the vapour pressure that it stays below, where it names the material whose boiling point it stays above.
+ *
+ * @param record  the record
+ * @returns       the record, with the other side of the same bound
+ */
+export function withVapourBound(record: MaterialRecord): MaterialRecord {
+  const floor = record.properties['boilingFloor']?.[0];
+  if (floor === undefined || floor.model !== 'boils-above') return record;
+  const [{ composition } = {}] = floor.ranges;
+  // Along a saturation line d ln p is about 15 d ln T.
+  const ceiling: Entry = { ...floor, model: 'vapour-below', ranges: [{ temperature: liquidTemperatures, ...(composition === undefined ? {} : { composition }) }], uncertainty: floor.uncertainty.map(({ value }) => ({ value: 15 * value })) };
+  return { ...record, properties: { ...record.properties, vapourPressureCeiling: [ceiling] } };
+}

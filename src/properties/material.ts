@@ -1,5 +1,5 @@
 import { Problem } from '../problems/index.ts';
-import { withBoilingPoint } from './boiling-point.ts';
+import { withBoilingPoint, withVapourBound } from './boiling-point.ts';
 import type { GasMixture } from './models/gas-mixture.ts';
 import { lineOf, type Point, type Side } from './models/point.ts';
 import { equationModels, propertyModels } from './registry.ts';
@@ -176,7 +176,7 @@ function partner(collection: Collection, id: string): MaterialRecord {
  * @returns           the material
  */
 export function materialOf(given: MaterialRecord, collection: Collection, asked?: Side): Material {
-  const record = withBoilingPoint(given, (entry, sample) => engineOf(given, collection).evaluate(entry, sample));
+  const record = withBoilingPoint(withVapourBound(given), (entry, sample) => engineOf(given, collection).evaluate(entry, sample));
   const engine = engineOf(record, collection);
   const has = new Set<string>(Object.keys(record.properties));
   if (record.thermodynamics !== undefined) for (const id of Object.keys(record.thermodynamics.uncertainty)) has.add(id);

@@ -35,7 +35,7 @@ export interface TakenState {
 /** Properties of saturation and of the substance: they hold at any phase, and end where their line ends. */
 /** Properties that may be zero, as at the critical point, or negative. */
 const eitherSign: readonly string[] = ['thermalExpansion', 'enthalpy', 'electricalConductivity', 'emissivity', 'surfaceTension', 'latentHeat'];
-const ofSubstance: readonly string[] = ['vapourPressure', 'saturationTemperature', 'latentHeat', 'surfaceTension', 'meltingTemperature', 'glassTransitionTemperature', 'fusionHeat', 'emissivity'];
+const ofSubstance: readonly string[] = ['vapourPressure', 'vapourPressureCeiling', 'saturationTemperature', 'boilingFloor', 'freezingCeiling', 'latentHeat', 'surfaceTension', 'meltingTemperature', 'glassTransitionTemperature', 'fusionHeat', 'emissivity'];
 
 /**
  * Takes a state of a material: checks it, settles its phase.

@@ -115,6 +115,20 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
       return (s) => pressure(s.T, s.x);
     },
   },
+  'boils-above': {
+    constants: ['of', 'less'],
+    make(c: { of: string; less: number }, engine) {
+      const lightest = engine.partner(c.of);
+      return (s) => lightest.value('saturationTemperature', s) - c.less;
+    },
+  },
+  'vapour-below': {
+    constants: ['of', 'less'],
+    make(c: { of: string; less: number }, engine) {
+      const lightest = engine.partner(c.of);
+      return (s) => lightest.saturation(s.T + c.less);
+    },
+  },
   'boiling-point': {
     constants: ['from', 'to'],
     make(c: { from: number; to: number }, engine) {

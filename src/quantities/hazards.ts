@@ -23,6 +23,10 @@ export const hazards: Definition[] = [
   quantity('flashMargin', { symbol: 'T_max - T_sat,amb', name: 'hottest liquid above its saturation at ambient pressure', unit: 'K', signed: true }, [
     way({ needs: ['highestTemperature', 'ambientSaturation'], when: { medium: 'liquid' }, value: ({ highestTemperature, ambientSaturation }) => highestTemperature - ambientSaturation, formula: 'T_max - T_sat(p_amb)', source: 'definition' }),
   ]),
+  quantity('ambientBoilingFloor', { symbol: 'T_b,amb', name: 'temperature below which the solution does not boil at ambient pressure', unit: 'K', signed: true }),
+  quantity('flashMarginMost', { symbol: 'T_max - T_b,amb', name: 'hottest part of the solution above the temperature below which it does not boil at ambient pressure', unit: 'K', signed: true }, [
+    way({ needs: ['highestTemperature', 'ambientBoilingFloor'], when: { medium: 'liquid', boils: ['bounded', 'unknown'] }, value: ({ highestTemperature, ambientBoilingFloor }) => highestTemperature - ambientBoilingFloor, formula: 'T_max - T_b(p_amb)', source: 'definition' }),
+  ]),
   limit('gaugePressureLimit', 'p_g,lim', 'gauge pressure of gas, vapour or flashing liquid from which on a burst hurts', 'Pa', 5e4, '0.5 bar', practice),
   limit('gaugePressureLimitLiquid', 'p_g,lim', 'gauge pressure of a cold liquid from which on a burst hurts', 'Pa', 1e6, '10 bar', practice),
   limit('pressureEnergyLimit', 'p_g V lim', 'pressure times volume of a gas from which on vessel codes look closer', 'J', 2500, '25 bar L', practice),

@@ -2,9 +2,15 @@ import { quantity, way, wordWay, type Definition } from '../workings/index.ts';
 
 /** How near the fluid comes to another phase: cavitation, boiling, condensation, freezing. */
 export const phase: Definition[] = [
-  ...([['volatile', 'vapourPressure', 'a vapour pressure'], ['boils', 'saturationTemperature', 'a saturation line'], ['melts', 'meltingTemperature', 'a melting point']] as const).map(([id, need, what]) =>
-    quantity(id, { symbol: '', name: `the fluid has ${what}`, unit: 'word', words: ['yes', 'no', 'unknown'] }, [
+  ...([
+    ['volatile', 'vapourPressure', 'cavitationMarginLeast', (margin: number) => margin > 1, 'a vapour pressure'],
+    ['boils', 'saturationTemperature', 'boilingMarginMost', (margin: number) => margin < 0, 'a saturation line'],
+    ['melts', 'meltingTemperature', 'freezingMarginLeast', (margin: number) => margin > 0, 'a melting point'],
+  ] as const).map(([id, need, bound, within, what]) =>
+    quantity(id, { symbol: '', name: `the fluid has ${what}`, unit: 'word', words: ['yes', 'bounded', 'no', 'unknown'] }, [
       wordWay({ needs: [need], word: () => 'yes', formula: `${what} is known`, source: 'material record' }),
+      // What is sure of the solution decides as long as the case stays on the sure side of it.
+      wordWay({ needs: [bound], when: { medium: 'liquid' }, word: (of) => (within(of[bound]) ? 'bounded' : 'unknown'), formula: `${what} is known to lie beyond a bound`, source: 'material record' }),
       // Water boils off and freezes out of a solution whether or not its record says where.
       ...(id === 'volatile' ? [] : [wordWay({ needs: [], when: { medium: 'liquid', 'has.solution': 'yes' }, word: () => 'unknown', formula: `${what} of the solution is not known`, source: 'material record' })]),
       wordWay({ needs: [], word: () => 'no', formula: `${what} is not known`, source: 'material record' }),
@@ -18,11 +24,17 @@ export const phase: Definition[] = [
   quantity('cavitationMargin', { symbol: 'sigma_c/|C_p,min|', name: 'cavitation number over the lowest pressure coefficient', unit: '1' }, [
     way({ needs: ['cavitationNumber', 'pressureCoefficientMin'], value: ({ cavitationNumber, pressureCoefficientMin }) => cavitationNumber / pressureCoefficientMin, formula: 'sigma_c/|C_p,min|', source: 'definition' }),
   ]),
+  quantity('cavitationMarginLeast', { symbol: 'sigma_min/|C_p,min|', name: 'cavitation number with the highest vapour pressure the solution can have, over the lowest pressure coefficient', unit: '1' }, [
+    way({ needs: ['lowestPressure', 'vapourPressureCeiling', 'density', 'speed', 'pressureCoefficientMin'], when: { medium: 'liquid' }, value: ({ lowestPressure, vapourPressureCeiling, density, speed, pressureCoefficientMin }) => (lowestPressure - vapourPressureCeiling) / (0.5 * density * speed ** 2 * pressureCoefficientMin), formula: '(p_min - p_v,max)/(|C_p,min| rho U^2/2)', source: 'the solution has a lower vapour pressure than what evaporates first' }),
+  ]),
   quantity('cavitationDeficit', { symbol: 'dp_v', name: 'how far a single-phase field falls below the vapour pressure', unit: 'Pa' }, [
     way({ needs: ['cavitationNumber', 'pressureCoefficientMin', 'density', 'speed'], value: ({ cavitationNumber, pressureCoefficientMin, density, speed }) => Math.max(0, pressureCoefficientMin - cavitationNumber) * 0.5 * density * speed ** 2, formula: 'dp_v = (|C_p,min| - sigma_c) rho U^2/2', source: 'definition' }),
   ]),
   quantity('boilingMargin', { symbol: 'T_w - T_sat', name: 'wall above saturation at the lowest pressure', unit: 'K', signed: true, per: ['wall'], plain: 'largest' }, [
     way({ needs: ['wallTemperatureMax', 'saturationTemperature'], when: { medium: 'liquid' }, value: ({ wallTemperatureMax, saturationTemperature }) => wallTemperatureMax - saturationTemperature, formula: 'T_w,max - T_sat(p_min)', source: 'definition' }),
+  ]),
+  quantity('boilingMarginMost', { symbol: 'T_w - T_b,min', name: 'wall above the temperature below which the solution does not boil, at the lowest pressure', unit: 'K', signed: true, per: ['wall'], plain: 'largest' }, [
+    way({ needs: ['wallTemperature', 'boilingFloor'], when: { medium: 'liquid' }, value: ({ wallTemperature, boilingFloor }) => wallTemperature - boilingFloor, formula: 'T_w - T_b,min(p_min)', source: 'the solution boils no lower than what evaporates first' }),
   ]),
   quantity('boilingOnset', { symbol: 'dT_ONB', name: 'wall superheat at which boiling begins', unit: 'K', signed: true, per: ['wall'], plain: 'target' }, [
     way({ needs: ['surfaceTension', 'saturationTemperature', 'wallHeatFlux', 'vapourDensity', 'latentHeat', 'thermalConductivityWall'], scatter: 0.5, value: ({ surfaceTension, saturationTemperature, wallHeatFlux, vapourDensity, latentHeat, thermalConductivityWall }) => Math.sqrt((8 * surfaceTension * saturationTemperature * Math.max(0, wallHeatFlux)) / (vapourDensity * latentHeat * thermalConductivityWall)), formula: 'dT_ONB = sqrt(8 sigma T_sat q/(rho_v h_fg k_l))', source: 'Davis and Anderson, AIChE J. 12 (1966) 774' }),
@@ -47,5 +59,8 @@ export const phase: Definition[] = [
   ]),
   quantity('freezingMargin', { symbol: 'T_min - T_m', name: 'lowest temperature above the melting point', unit: 'K', signed: true }, [
     way({ needs: ['lowestTemperature', 'meltingTemperature'], value: ({ lowestTemperature, meltingTemperature }) => lowestTemperature - meltingTemperature, formula: 'T_min - T_m', source: 'definition' }),
+  ]),
+  quantity('freezingMarginLeast', { symbol: 'T_min - T_m,max', name: 'lowest temperature above that which no freezing of the solution passes', unit: 'K', signed: true }, [
+    way({ needs: ['lowestTemperature', 'freezingCeiling'], when: { medium: 'liquid' }, value: ({ lowestTemperature, freezingCeiling }) => lowestTemperature - freezingCeiling, formula: 'T_min - T_m,max', source: 'a weak solution freezes below water' }),
   ]),
 ];

@@ -18,6 +18,9 @@ export const singleProperties = [
   { id: 'surfaceTension', symbol: 'sigma', name: 'surface tension', unit: 'N/m' },
   { id: 'vapourPressure', symbol: 'p_v', name: 'vapour pressure of the warmest stream', unit: 'Pa', temperature: 'streamTemperatureMax' },
   { id: 'saturationTemperature', symbol: 'T_sat', name: 'saturation temperature at the lowest pressure', unit: 'K', pressure: 'lowestPressure' },
+  { id: 'boilingFloor', symbol: 'T_b,min', name: 'temperature below which the solution does not boil at the lowest pressure', unit: 'K', pressure: 'lowestPressure' },
+  { id: 'vapourPressureCeiling', symbol: 'p_v,max', name: 'vapour pressure that the warmest stream of the solution stays below', unit: 'Pa', temperature: 'streamTemperatureMax' },
+  { id: 'freezingCeiling', symbol: 'T_m,max', name: 'temperature above which the solution does not freeze', unit: 'K' },
   { id: 'latentHeat', symbol: 'h_fg', name: 'latent heat of evaporation at the lowest pressure', unit: 'J/kg', pressure: 'lowestPressure' },
   { id: 'vapourDensity', symbol: 'rho_v', name: 'density of saturated vapour at the lowest pressure', unit: 'kg/m^3', pressure: 'lowestPressure' },
   { id: 'meltingTemperature', symbol: 'T_m', name: 'melting temperature', unit: 'K' },
@@ -94,6 +97,7 @@ export function materialWays(about: Readonly<Record<string, PropertyAbout>>): De
     ...singleProperties.flatMap((p) => one(p.id, p.id, 'temperature' in p ? p.temperature : 'referenceTemperature', 'pressure' in p ? p.pressure : 'pressure')),
     ...one('ambientSaturation', 'saturationTemperature', 'referenceTemperature', 'ambientPressure'),
     ...one('flowStateDensity', 'flowStateDensity', 'flowStateTemperature', 'flowStatePressure'),
+    ...one('ambientBoilingFloor', 'boilingFloor', 'referenceTemperature', 'ambientPressure'),
   ];
 }
 

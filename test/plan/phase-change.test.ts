@@ -22,3 +22,58 @@ describe('humid air', () => {
     expect(effect?.deciding?.margin).toBeGreaterThan(40); // 0.02 over 0.0004
   });
 });
+
+describe('a solution whose record does not say where it boils', () => {
+  const across = (fluid: string, cold: string, hot: string, more = ''): string => `format: 1
+title: A liquid across a tube
+targets: [{ quantity: nusselt, within: 15 % }]
+flow: cylinder
+sizes: { diameter: 25 mm, span: 1 m }
+fluid: { ${fluid}${more} }
+inlet: { speed: 0.5 m/s, temperature: ${cold} }
+wall: { temperature: ${hot} }
+`;
+  const brine = 'material: calcium chloride brine, pressure: 1 bar abs, composition: { calcium chloride: 25 % mass }';
+  const acid = (name: string, solute: string, share: number): string => `material: ${name}, pressure: 1 bar abs, composition: { ${solute}: ${share} % mass }`;
+  const verdicts = async (text: string): Promise<Record<string, { verdict: string; margin?: number | undefined; missing?: readonly string[] | undefined }>> => Object.fromEntries((await planOf(text)).effects.filter((e) => ['boiling', 'cavitation', 'freezing'].includes(e.id)).map((e) => [e.id, { verdict: e.verdict, missing: e.missing, deciding: e.deciding?.quantity }]));
+
+  it('does not boil below the boiling point of water: a cold brine has no steam among its dangers', async () => {
+    const p = await planOf(across(brine, '-15 degC', '5 degC'));
+    const boiling = p.effects.find((e) => e.id === 'boiling');
+    // Water boils at 99.61 degC at 1 bar (IAPWS R7-97); the stream takes pascals of it: 5 - 99.6 = -94.6 K.
+    expect(boiling).toMatchObject({ verdict: 'leave-out', deciding: { quantity: 'boilingMarginMost@wall' } });
+    expect(p.quantities['boilingMarginMost@wall']?.value).toBeCloseTo(-94.6, 0);
+    expect(p.sections.cautions.lines.map((l) => l.text).join(' ')).not.toContain('Steam');
+  });
+
+  it('stays open where the wall is hotter than water boils', async () => {
+    expect(await verdicts(across(acid('caustic soda', 'sodium hydroxide', 40), '80 degC', '105 degC'))).toMatchObject({ boiling: { verdict: 'undecided', missing: ['fluid.saturationTemperature'] } });
+  });
+
+  it('cannot cavitate where water would not, and may where it would', async () => {
+    // Water at 5 degC: 872 Pa; (1e5 - 872)/(0.5 x 1240 x 0.25) = 640 over |C_p,min|.
+    expect(await verdicts(across(brine, '-15 degC', '5 degC'))).toMatchObject({ cavitation: { verdict: 'leave-out', deciding: 'cavitationMarginLeast' } });
+    expect(await verdicts(across(brine.replace('1 bar abs', '2 kPa abs'), '30 degC', '35 degC'))).toMatchObject({ cavitation: { verdict: 'undecided' } });
+  });
+
+  it('follows what evaporates first where the solute does', async () => {
+    // Boiling points at 1 bar: methanol 64.2 degC, nitric acid 83 degC, ammonia -33.6 degC.
+    expect(await verdicts(across(acid('methanol-water', 'methanol', 30), '10 degC', '30 degC'))).toMatchObject({ boiling: { verdict: 'leave-out' } });
+    expect(await verdicts(across(acid('methanol-water', 'methanol', 30), '10 degC', '70 degC'))).toMatchObject({ boiling: { verdict: 'undecided' } });
+    expect(await verdicts(across(acid('nitric acid', 'nitric acid', 30).replace('1 bar', '1.5 bar'), '10 degC', '30 degC'))).toMatchObject({ boiling: { verdict: 'leave-out' } });
+    expect(await verdicts(across(acid('ammonia-water', 'ammonia', 20), '10 degC', '20 degC'))).toMatchObject({ boiling: { verdict: 'undecided' } });
+  });
+
+  it('does not freeze where no solution of its share does, and may below', async () => {
+    expect(await verdicts(across(acid('sulphuric acid', 'sulphuric acid', 30), '10 degC', '20 degC'))).toMatchObject({ freezing: { verdict: 'leave-out', deciding: 'freezingMarginLeast' } });
+    expect(await verdicts(across(acid('sulphuric acid', 'sulphuric acid', 30), '-5 degC', '20 degC'))).toMatchObject({ freezing: { verdict: 'undecided' } });
+    // 40 % caustic soda sets at 15 degC, 50 % phosphoric acid far below zero.
+    expect(await verdicts(across(acid('caustic soda', 'sodium hydroxide', 40), '10 degC', '30 degC'))).toMatchObject({ freezing: { verdict: 'undecided' } });
+  });
+
+  it('may flash where it is let out, if what evaporates first would', async () => {
+    const p = await planOf(across(brine.replace('1 bar', '10 bar'), '30 degC', '150 degC'));
+    expect(p.effects.find((e) => e.id === 'boiling')?.verdict).toBe('leave-out');
+    expect(p.sections.cautions.lines.map((l) => l.text).join(' ')).toMatch(/Steam and boiling.*it may flash/);
+  });
+});

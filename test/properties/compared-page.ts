@@ -14,8 +14,8 @@ const ofEquation: readonly PropertyId[] = ['density', 'specificHeatCapacity', 't
 
 function declaredOf(record: MaterialRecord): Declared[] {
   const equation = record.thermodynamics === undefined ? [] : ofEquation.map((property): Declared => ({ property, boxes: record.thermodynamics?.ranges ?? [] }));
-  // The saturation temperature is the vapour pressure read the other way.
-  const own = Object.entries(record.properties).filter(([property]) => property !== 'saturationTemperature' || record.properties['vapourPressure'] === undefined);
+  // A bound has no value to compare; the saturation temperature is the vapour pressure read the other way.
+  const own = Object.entries(record.properties).filter(([property]) => !['boilingFloor', 'freezingCeiling'].includes(property)).filter(([property]) => property !== 'saturationTemperature' || record.properties['vapourPressure'] === undefined);
   return [...equation, ...own.map(([property, entries]): Declared => ({ property: property as PropertyId, boxes: entries.flatMap((entry) => entry.ranges) }))];
 }
 
