@@ -26,7 +26,7 @@ export function setUpParts(plan: Plan, writing: Writing, room: number): Part[] {
     },
     { label: 'Mesh', items: item(say('core cell', 'coreCellSize'), meshes.length === 0 ? say('cells', 'cellCount') : `cells ${meshes.join(' / ')}`, say('cell Peclet', 'cellPeclet')), least: 1 },
     { label: 'Time', items: item(say(marches(plan) ? 'pseudo-step' : 'step', 'timeStep'), binding(plan, writing), say('run', 'runTime'), say('steps', 'stepCount'), say('flow-through', 'flowThroughTime')), least: 1 },
-    { label: 'Cost', items: item(hours(plan, writing), say('done in', 'wallTime'), say('memory', 'memory')), least: 1 },
+    { label: 'Cost', items: [...item(run('medium', '', plan, writing), has('memory') ? `memory ${plain(writing, 'memory')}` : ''), ...item(run('fine', 'Fine', plan, writing), has('coreHoursAll') ? `all runs ${hours('coreHoursAll', writing)}` : '')], least: 2 },
   ];
 }
 
@@ -44,11 +44,18 @@ function flowing(pieces: readonly string[], room: number): string[] {
 
 const plainNumber = (writing: Writing, id: string): string => writing.parts(id).number;
 
-function hours(plan: Plan, writing: Writing): string {
-  if (plan.quantities['coreHours'] === undefined) return '';
-  const { number, spread } = writing.parts('coreHours');
-  return `${number} core hours${spread === '' ? '' : ` ${spread}`}`;
+/** One run: its mesh, core hours, time until it is done. The spread stands once, the others share it. */
+function run(mesh: string, suffix: '' | 'Fine', plan: Plan, writing: Writing): string {
+  if (plan.quantities[`coreHours${suffix}`] === undefined) return '';
+  const { spread } = writing.parts('coreHours');
+  const done = plan.quantities[`wallTime${suffix}`] === undefined ? '' : `, done in ${plain(writing, `wallTime${suffix}`)}`;
+  return `${mesh} mesh ${hours(`coreHours${suffix}`, writing)}${suffix !== '' || spread === '' ? '' : ` ${spread}`}${done}`;
 }
+
+const hours = (id: string, writing: Writing): string => `${writing.parts(id).number} core hours`;
+
+/** A number with its unit, without its spread. */
+const plain = (writing: Writing, id: string): string => [writing.parts(id).number, writing.parts(id).unit].filter((part) => part !== '').join(' ');
 
 /** A run to a steady state has no step in time but one that only drives it there. */
 const marches = (plan: Plan): boolean => plan.choices.some((c) => c.id === 'run-character' && (c.chosen === 'steady' || c.chosen === 'march'));

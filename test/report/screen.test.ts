@@ -23,7 +23,7 @@ describe('the screen', () => {
     for (const piece of [
       /^Rinse water cooled in a jacketed line\n/, /Mind first +Hot water at/, /outletTemperature at outlet 326\.5 \+\/- 0\.8 K; asked within 1 K/, /lift of the line; no hand estimate; is liftForce meant\?/,
       /Include +variable-viscosity +Re 22600 \+\/- 5 %, 1\.3 times past 2300/, /Check +buoyancy +Gr\/Re 55, limits 20 and 100; price \+12 % of T_out/, /Open +roughness +needs wall\.sandGrain or wall\.Ra/,
-      /first cell 42\.0 um/, /growth 1\.2/, /core cell 1\.02 mm; cells 61000 \/ 206000 \/ 694000/, /step 2\.55 ms; bound by convection through a cell/, /poiseuille-pipe +0\.032, passes 0\.03168 \.\. 0\.03232/, /1 assumed, not given: gravity 9\.807 m\/s\^2/,
+      /first cell 42\.0 um/, /growth 1\.2/, /core cell 1\.02 mm; cells 61000 \/ 206000 \/ 694000/, /Cost +medium mesh \S+ core hours \+\/- .*, done in 7\.5 h;/, /fine mesh 1200 core hours; all runs 1700 core hours\n/, /step 2\.55 ms; bound by convection through a cell/, /poiseuille-pipe +0\.032, passes 0\.03168 \.\. 0\.03232/, /1 assumed, not given: gravity 9\.807 m\/s\^2/,
       /outside the range of their formula.*nusseltPlain/s, /--full/, /--into DIR/, /runbrief trace/,
     ]) expect(text).toMatch(piece);
     expect(text).not.toContain('inlet-turbulence'); // does not apply
