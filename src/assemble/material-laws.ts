@@ -1,4 +1,4 @@
-import { laws as lawsOf, propertyIn, takeState, type Material, type PropertyId, type State } from '../properties/index.ts';
+import { laws as lawsOf, propertyIfHad, propertyIn, takeState, type Material, type PropertyId, type State } from '../properties/index.ts';
 import { lawProperties, singleProperties, type PropertyAbout } from '../quantities/index.ts';
 import { Problem } from '../problems/index.ts';
 import type { Law } from '../workings/index.ts';
@@ -24,10 +24,11 @@ export function fluidLaws(material: Material, state: State): MaterialLaws {
   const source = lawsOf(material, state);
   const laws: Record<string, Law> = {};
   const about: Record<string, PropertyAbout> = {};
+  const left: string[] = [];
   const add = (id: string, symbol: string, property: PropertyId, at: (law: (T: number, p: number) => number) => (T: number, p: number) => number = (law) => law): void => {
     const law = source.law(property);
     if (law === undefined) return;
-    const here = propertyIn(material, property, taken);
+    const here = propertyIfHad(material, property, taken, (reason) => left.push(reason));
     if (here === undefined) return;
     // One uncertainty for all states of a material and property, that of the state which settles its phase.
     laws[id] = Object.assign(at(remembered(law)), { uncertainty: () => here.uncertainty });
@@ -46,7 +47,7 @@ export function fluidLaws(material: Material, state: State): MaterialLaws {
     laws['vapourDensity'] = Object.assign((T: number, p: number) => vapour(T, p)?.value ?? Number.NaN, { uncertainty: (T: number, p: number) => vapour(T, p)?.uncertainty ?? 0 });
     about['vapourDensity'] = { formula: `rho_v(p) of ${material.name}, saturated`, source: about['saturationTemperature']?.source ?? 'material record' };
   }
-  return { laws, about, phase: taken.phase, flags: taken.flags };
+  return { laws, about, phase: taken.phase, flags: [...taken.flags, ...left] };
 }
 
 /** The same law, which remembers what it gave at its last pressure: loops and derivatives come back to the same states. */

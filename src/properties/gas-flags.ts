@@ -21,7 +21,7 @@ export function mixtureFlags(material: Material, sample: Sample): string[] {
   const flags = [...(material.record.flags ?? [])];
   const [entry] = material.record.properties['saturationTemperature'] ?? [];
   const dew = entry === undefined ? Number.NaN : material.engine.evaluate(entry, sample);
-  if (sample.T < dew) flags.push(`${material.name} is below its dew point of ${Number(dew.toPrecision(5))} K: water condenses from it`);
+  if (sample.T < dew) flags.push(`${material.name} is below its ${dew < 273.16 ? 'frost' : 'dew'} point of ${Number(dew.toPrecision(5))} K: water ${dew < 273.16 ? 'freezes' : 'condenses'} from it`);
   const equation = material.engine.equation as GasMixture;
   const liquid = equation.condensing(sample.T, sample.p);
   if (liquid === undefined) return flags;

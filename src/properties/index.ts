@@ -9,7 +9,7 @@ export { type Component, mixtureOf } from './mixture.ts';
 export { propertyNames } from './names-of-properties.ts';
 export { parseRange, parseState, type StateRange } from './parse-state.ts';
 export { phaseAt, type PhaseAt, type Saturation, saturationOf } from './phase.ts';
-export { boxText, emissivities, propertyAt, propertyIn, type PropertyValue, takeState, type TakenState } from './property.ts';
+export { boxText, emissivities, propertyAt, propertyIfHad, propertyIn, type PropertyValue, takeState, type TakenState } from './property.ts';
 export { type Box, type Collection, type MaterialRecord, type Phase, type PropertyId, propertyUnits } from './record.ts';
 export { propertySheet, type PropertySheet } from './sheet.ts';
 export type { State, StateText } from './state.ts';

@@ -117,10 +117,31 @@ export function propertyIn(material: Material, property: PropertyId, taken: Take
     const value = engine.evaluate(entry, sample);
     // Carried far beyond its range a law may cross zero: then there is no value.
     if (value <= 0 && !eitherSign.includes(property)) return undefined;
-    return finished(material, property, value, entry, taken, entry.uncertainty);
+    const frost = entry.model === 'dew-point' && value < 273.16;
+    return finished(material, property, value, frost ? { ...entry, notes: 'a frost point: below 0 degC the water becomes ice' } : entry, taken, entry.uncertainty);
   }
   if (property === 'thermalExpansion') return expansionFromDensity(material, taken);
   return undefined;
+}
+
+/**
+ * As `propertyIn`, for many properties at once: one that cannot be had is left out, and the others stay.
+ *
+ * @param material  the material
+ * @param property  its id
+ * @param taken     the state, taken
+ * @param left      is told the reason where the property has to be left out
+ * @returns         the value, or undefined
+ */
+export function propertyIfHad(material: Material, property: PropertyId, taken: TakenState, left: (reason: string) => void): PropertyValue | undefined {
+  try {
+    return propertyIn(material, property, taken);
+  } catch (error) {
+    const [problem] = error instanceof Problem ? error.list : [];
+    if (problem?.code !== 'not-a-number') throw error;
+    left(problem.message);
+    return undefined;
+  }
 }
 
 const noteOf = (entry: Omit<Entry, 'uncertainty'>): string | undefined => (entry.surface === undefined ? entry.notes : `surface: ${entry.surface}`);
@@ -128,7 +149,7 @@ const noteOf = (entry: Omit<Entry, 'uncertainty'>): string | undefined => (entry
 const plain = (value: number, phase: Phase, source: string): PropertyValue => ({ value, uncertainty: 1e-5, source, withinRange: true, range: {}, phase, flags: [] });
 
 function finished(material: Material, property: string, value: number, entry: Omit<Entry, 'uncertainty'>, taken: TakenState, bands: readonly Band[]): PropertyValue {
-  if (!Number.isFinite(value)) throw new Problem({ code: 'not-a-number', message: `${property} of ${material.name} cannot be computed at ${Number(taken.sample.T.toPrecision(6))} K and ${Number(taken.sample.p.toPrecision(6))} Pa`, expected: `a state within ${entry.ranges.map(boxText).join(' or ')}` });
+  if (!Number.isFinite(value)) throw new Problem({ code: 'not-a-number', message: `${entry.model === 'dew-point' ? `${material.name} has no dew point` : `${property} of ${material.name} cannot be computed`} at ${Number(taken.sample.T.toPrecision(6))} K and ${Number(taken.sample.p.toPrecision(6))} Pa${entry.model === 'dew-point' ? ': it holds no water, or next to none' : ''}`, expected: `a state within ${entry.ranges.map(boxText).join(' or ')}` });
   const box = entry.ranges.find((one) => inside(one, taken.sample));
   const within = box !== undefined || entry.ranges.length === 0;
   const shown = box ?? entry.ranges[0] ?? {};

@@ -1,5 +1,5 @@
 import type { Material } from './material.ts';
-import { propertyIn, takeState, type PropertyValue } from './property.ts';
+import { propertyIfHad, takeState, type PropertyValue } from './property.ts';
 import type { PropertyId } from './record.ts';
 import type { State } from './state.ts';
 
@@ -9,7 +9,7 @@ export interface PropertySheet {
   readonly state: State;
   readonly phase: string;
   readonly properties: readonly { readonly id: PropertyId; readonly value: PropertyValue }[];
-  /** What holds for the state as a whole: near the critical point, beyond a range. */
+  /** What holds for the state as a whole: near the critical point, beyond a range, a property that cannot be had. */
   readonly flags: readonly string[];
 }
 
@@ -23,9 +23,10 @@ export interface PropertySheet {
  */
 export function propertySheet(material: Material, state: State): PropertySheet {
   const taken = takeState(material, state);
+  const left: string[] = [];
   const properties = material.properties.flatMap((id) => {
-    const value = propertyIn(material, id, taken);
+    const value = propertyIfHad(material, id, taken, (reason) => left.push(`left out: ${reason}`));
     return value === undefined ? [] : [{ id, value }];
   });
-  return { material, state, phase: taken.phase, properties, flags: [...new Set([...taken.flags, ...properties.flatMap(({ value }) => value.flags)])] };
+  return { material, state, phase: taken.phase, properties, flags: [...new Set([...taken.flags, ...properties.flatMap(({ value }) => value.flags), ...left])] };
 }

@@ -1,7 +1,7 @@
 import { Problem } from '../problems/index.ts';
 import type { Material } from './material.ts';
 import type { StateRange } from './parse-state.ts';
-import { propertyIn, takeState, type PropertyValue } from './property.ts';
+import { propertyIfHad, takeState, type PropertyValue } from './property.ts';
 import type { PropertyId } from './record.ts';
 import { stateOf } from './complete-state.ts';
 import type { State } from './state.ts';
@@ -45,7 +45,7 @@ export function tableOver(material: Material, range: StateRange, points = 15): P
       const taken = takeState(material, state);
       const values: Record<string, PropertyValue> = {};
       for (const id of material.properties) {
-        const value = propertyIn(material, id, taken);
+        const value = propertyIfHad(material, id, taken, (reason) => notes.add(`left out: ${reason}`));
         if (value === undefined) continue;
         values[id] = value;
         present.add(id);

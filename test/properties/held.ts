@@ -100,7 +100,7 @@ export function tableRows(): TableRow[] {
   return tables.flatMap((name) => readFileSync(new URL(name, folder), 'utf8').trim().split('\n').slice(1)).map((line) => {
     const [named = '', property = '', T, p, share, value, ...reference] = line.split(',');
     const [, material = '', components] = /^(.*?)(?: of (.*%))?$/.exec(named) ?? [];
-    return { material, ...(components === undefined ? {} : { components }), property: property as PropertyId, reference: reference.join(',').replace(/^"|"$/g, ''), state: { temperature: Number(T), pressure: Number(p), ...(share === '' ? {} : { composition: Number(share) }) }, expected: Number(value) };
+    return { material, ...(components === undefined ? {} : { components }), property: property as PropertyId, reference: reference.join(',').replace(/^"|"$/g, ''), state: { temperature: Number(T), pressure: Number(p), ...(share === '' ? {} : { [material === 'humid air' ? 'humidity' : 'composition']: Number(share) }) }, expected: Number(value) };
   });
 }
 

@@ -2,6 +2,7 @@ import type { Engine, Sample } from '../sample.ts';
 import { condensate } from './condensation.ts';
 import { cubic, type CubicGas } from './cubic.ts';
 import { denseConductivity, denseViscosity, type CriticalPoint } from './dense-gas.ts';
+import { iceSublimation, iceVolume, lowestFrostPoint } from './ice.ts';
 import { pairInteraction } from './pair-interactions.ts';
 import type { EquationOfState, Point } from './point.ts';
 
@@ -11,7 +12,7 @@ const R = 8.31446261815324;
 export interface MoistGas extends EquationOfState {
   viscosity(T: number, p: number): number;
   conductivity(T: number, p: number): number;
-  /** Temperature [K] at which the water of the mixture starts to condense; NaN where it holds none, or below 0 degC. */
+  /** Temperature [K] at which the water of the mixture starts to condense, below 0 degC as frost; NaN where it holds none, or next to none. */
   dewPoint(T: number, p: number): number;
 }
 
@@ -152,14 +153,15 @@ export function gasMixture(c: { shares: { readonly [id: string]: number } }, par
       const steam = partners[water];
       if (steam === undefined) return Number.NaN;
       const share = shares[water] as number;
-      // Logarithm of the fugacity of the water in the gas over that of liquid water under the pressure.
+      // Logarithm of the fugacity of the water in the gas over that of liquid water, or of ice, under the pressure.
       const excess = (T: number): number => {
-        const ps = steam.saturation(T);
+        const frost = T < 273.16;
+        const ps = frost ? iceSublimation(T) : steam.saturation(T);
         const pure = shares.map((_, i) => (i === water ? 1 : 0));
         const [gas, own] = [equation.fugacities(T, p, shares, 'gas')[water], equation.fugacities(T, ps, pure, 'gas')[water]] as [number, number];
-        return Math.log((share * p) / ps) + gas - own - (liquidVolume * (p - ps)) / (R * T);
+        return Math.log((share * p) / ps) + gas - own - ((frost ? iceVolume : liquidVolume) * (p - ps)) / (R * T);
       };
-      let [low, high] = [273.16, 640];
+      let [low, high] = excess(273.16) < 0 ? [lowestFrostPoint, 273.16] : [273.16, 640];
       if (excess(low) < 0 || excess(high) > 0) return Number.NaN;
       for (let i = 0; i < 40; i++) {
         const middle = 0.5 * (low + high);

@@ -1,9 +1,13 @@
 import { Problem } from '../../problems/index.ts';
 import type { Engine, Sample } from '../sample.ts';
 import { mixedTransport, type MoistGas } from './gas-mixture.ts';
+import { iceSublimation, iceVolume, lowestFrostPoint } from './ice.ts';
 import type { Point } from './point.ts';
 
 const R = 8.31446261815324;
+
+/** Of water [K]: below it frost forms. */
+const triple = 273.16;
 
 /** Second virial coefficients [m^3/mol] at one temperature: air, water, and between the two. */
 interface Virials {
@@ -66,15 +70,15 @@ export function humidAir(c: { cross: readonly (readonly number[])[] }, partners:
     };
     return kept;
   };
-  const enhancement = (T: number, p: number): number => {
-    const ps = water.saturation(T);
+  const enhancement = (T: number, p: number, over: 'liquid' | 'ice' = 'liquid'): number => {
+    const ps = over === 'ice' ? iceSublimation(T) : water.saturation(T);
     if (p <= ps) return 1;
     const B = virials(T);
-    const liquid = Mw / water.equation.at(T, p, 'liquid').density;
+    const dense = over === 'ice' ? iceVolume : Mw / water.equation.at(T, p, 'liquid').density;
     let f = 1;
     for (let i = 0; i < 4; i++) {
       const xa = Math.max(0, 1 - (f * ps) / p);
-      f = Math.exp(((p - ps) * liquid + xa * xa * p * B.air - 2 * xa * xa * p * B.cross - (p - ps - xa * xa * p) * B.water) / (R * T));
+      f = Math.exp(((p - ps) * dense + xa * xa * p * B.air - 2 * xa * xa * p * B.cross - (p - ps - xa * xa * p) * B.water) / (R * T));
     }
     return f;
   };
@@ -145,14 +149,13 @@ export function humidAir(c: { cross: readonly (readonly number[])[] }, partners:
     },
     dewPoint(T, p) {
       const x = moist(T, p, humidity()).water;
-      if (x === 0) return Number.NaN;
-      let low = 273.15;
-      let high = T;
-      if (moist(low, p, 1).water > x) return Number.NaN;
+      const over = x < (enhancement(triple, p) * water.saturation(triple)) / p ? 'ice' : 'liquid';
+      const full = (at: number): number => (enhancement(at, p, over) * (over === 'ice' ? iceSublimation(at) : water.saturation(at))) / p;
+      let [low, high] = over === 'ice' ? [lowestFrostPoint, triple] : [triple, T];
+      if (full(low) > x) return Number.NaN;
       for (let i = 0; i < 60; i++) {
         const middle = 0.5 * (low + high);
-        const full = (enhancement(middle, p) * water.saturation(middle)) / p;
-        if (full < x) low = middle;
+        if (full(middle) < x) low = middle;
         else high = middle;
       }
       return 0.5 * (low + high);
