@@ -1,10 +1,15 @@
 """Writes a material record as the YAML that materials/ holds: short maps in one line, lists of rows in one line."""
 import os
 
+import yaml
+
 from solution_bounds import bounded
 
 FOLDER = os.path.join(os.path.dirname(os.path.abspath(__file__)), '..', '..', 'materials')
 BARE = set('abcdefghijklmnopqrstuvwxyzABCDEFGHIJKLMNOPQRSTUVWXYZ0123456789 ._-/()^*%+')
+
+with open(os.path.join(os.path.dirname(os.path.abspath(__file__)), 'across-melting.yaml')) as file:
+    ACROSS = yaml.safe_load(file)
 
 
 def scalar(x):
@@ -53,13 +58,15 @@ def entry(e, indent):
     return lines
 
 
-HEAD = ('name', 'formula', 'aliases', 'kind', 'phases', 'takes', 'typical', 'molarMass', 'about', 'marks')
+HEAD = ('name', 'formula', 'aliases', 'kind', 'phases', 'acrossMelting', 'takes', 'typical', 'molarMass', 'about', 'marks')
 
 
 def write(record, made_by):
     """Writes one record; `made_by` names the script and its data in the first line."""
     record = bounded(record)
     lines = [f'# Made by scripts/materials/{made_by}']
+    if record['name'] in ACROSS:
+        record = {**record, 'acrossMelting': ACROSS[record['name']]}
     for key in HEAD:
         if key in record:
             lines.append(f'{key}: {text_of(record[key]) if key == "about" else flow(record[key])}')

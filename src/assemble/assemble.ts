@@ -19,7 +19,7 @@ import { toleranceWays } from './tolerance-ways.ts';
 import { bindTargets, estimated, kindsOf, spelt, type BoundTarget } from './targets.ts';
 import { validationDefinitions } from './validation-definitions.ts';
 import { vocabulary } from './vocabulary.ts';
-import { wallDefinitions } from './wall-definitions.ts';
+import { wallDefinitions, type WallPart } from './wall-definitions.ts';
 
 export interface AssembleOptions {
   /** Definitions of the words that rules fill. */
@@ -44,7 +44,7 @@ export interface Assembled {
   readonly fluid?: Material;
   /** The state that settles the phase of the fluid, with its humidity or composition. */
   readonly fluidState: State;
-  readonly wallMaterials: Readonly<Record<string, readonly string[]>>;
+  readonly wallMaterials: WallPart['materials'];
   readonly phaseFlags: readonly string[];
   readonly assumptions: readonly Assumption[];
   /** Paths that no number follows from. */

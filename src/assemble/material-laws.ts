@@ -79,12 +79,12 @@ function saturatedVapour(material: Material, state: State): ((T: number, p: numb
   };
 }
 
-/** One property of a solid as a law of temperature. */
+/** One property of a solid as a law of temperature, its uncertainty that of a room or, of ice, below its melting point. */
 export function solidLaw(material: Material, property: PropertyId): { law: Law; about: PropertyAbout } | undefined {
-  const at = (T: number): ReturnType<typeof propertyIn> => propertyIn(material, property, takeState(material, { temperature: T, pressure: 101325, phase: 'solid' }));
-  const here = at(300);
+  const cold: State = { temperature: Math.min(300, (material.meltingTemperature ?? 300) - 1), pressure: 101325, phase: 'solid' };
+  const here = propertyIn(material, property, takeState(material, cold));
   if (here === undefined) return undefined;
-  const law = lawsOf(material, { temperature: 300, pressure: 101325, phase: 'solid' }).law(property);
+  const law = lawsOf(material, cold).law(property);
   if (law === undefined) return undefined;
   const { temperature } = here.range;
   return {

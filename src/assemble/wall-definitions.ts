@@ -11,11 +11,24 @@ import { solidLaw } from './material-laws.ts';
 /** Quantity that a key of a wall gives, without its place. */
 const gives: Readonly<Record<string, string>> = { heatFlux: 'wallHeatFlux', heat: 'wallHeat', heatTransferCoefficient: 'outerCoefficient', emissivity: 'emissivity', sandGrain: 'sandGrain', speed: 'wallSpeed', rotation: 'wallRotation' };
 
+/** A solid of a wall. */
+export interface WallSolid {
+  readonly name: string;
+  /** Where the case names it. */
+  readonly path: string;
+  /** Whether it is the last of all layers. */
+  readonly outermost: boolean;
+  /** [K] */
+  readonly melts?: number;
+  /** The record of its melt. */
+  readonly melt?: string;
+}
+
 export interface WallPart {
   readonly definitions: readonly Definition[];
   readonly laws: Readonly<Record<string, Law>>;
-  /** Names of wall materials by place. */
-  readonly materials: Readonly<Record<string, readonly string[]>>;
+  /** Solids of the walls by place, from the fluid outwards. */
+  readonly materials: Readonly<Record<string, readonly WallSolid[]>>;
 }
 
 /**
@@ -31,7 +44,7 @@ export interface WallPart {
 export function wallDefinitions(on: Case, flow: Flow, walls: ReturnType<typeof wallEntries>, materials: Collection | undefined, exists: (id: string) => boolean): WallPart {
   const definitions: Definition[] = [];
   const laws: Record<string, Law> = {};
-  const names: Record<string, string[]> = {};
+  const names: Record<string, WallSolid[]> = {};
   (flow.walls.length === 0 ? ['wall'] : flow.walls).forEach((name, k) => {
     const place = wallPlaces(flow.walls)[k] as string;
     const keys = walls.get(name) ?? new Map<string, Entry>();
@@ -68,7 +81,7 @@ const grainOfStylus = (place: string, path: string): Definition => ways(`sandGra
 /** Whether a temperature of the wall is that of its outer face: with layers, unless the case says otherwise. */
 export const outerFace = (keys: ReadonlyMap<string, Entry>, layered: boolean): boolean => layered && keys.get('at')?.value !== 'wetted-face';
 
-function layersOf(on: Case, keys: ReadonlyMap<string, Entry>, materials: Collection | undefined, add: (name: string, law: Law) => void, named: (material: string) => void): Layer[] {
+function layersOf(on: Case, keys: ReadonlyMap<string, Entry>, materials: Collection | undefined, add: (name: string, law: Law) => void, named: (material: WallSolid) => void): Layer[] {
   const out: Layer[] = [];
   for (let i = 0; ; i++) {
     const thickness = keys.get(`layers.${i}.thickness`);
@@ -84,7 +97,8 @@ function layersOf(on: Case, keys: ReadonlyMap<string, Entry>, materials: Collect
       const law = placed(material, on.file, () => solidLaw(solid, 'thermalConductivity'));
       if (law === undefined) throw new Problem({ code: 'no-conductivity', message: `the record of ${solid.name} has no thermal conductivity`, file: on.file, ...material.position, expected: 'thermalConductivity beside the thickness' });
       const id = `${path}.thermalConductivity`;
-      named(solid.name);
+      const melt = solid.record.acrossMelting;
+      named({ name: solid.name, path: material.path, outermost: !keys.has(`layers.${i + 1}.thickness`), ...(solid.meltingTemperature === undefined ? {} : { melts: solid.meltingTemperature }), ...(melt === undefined ? {} : { melt }) });
       add(id, law.law);
       out.push({ thickness: thickness.path, conductivity: id, law: { name: id, formula: law.about.formula, source: law.about.source, ...(law.about.temperature === undefined ? {} : { range: law.about.temperature }) } });
     } else throw new Problem({ code: 'no-conductivity', message: 'a layer of the wall has neither a material nor a conductivity', file: on.file, ...thickness.position, expected: 'material: copper, or thermalConductivity: 0.04 W/(m K)' });

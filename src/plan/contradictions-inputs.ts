@@ -12,6 +12,7 @@ export function* inputContradictions(on: Ground): Generator<Contradiction> {
   yield* budget(on);
   yield* pressures(on);
   yield* walls(on);
+  yield* layers(on);
   yield* temperatures(on);
   yield* targets(on);
   yield* features(on);
@@ -81,6 +82,25 @@ function* walls(on: Ground): Generator<Contradiction> {
   if (on.word('flowClass') === 'enclosure' && heat.length > 0 && !kinds.includes('temperature') && !kinds.includes('coefficient') && !names.some((w) => (on.number(`wallHeatFlux@${w}`) ?? 0) * (on.number(`wallHeatFlux@${heat[0] as string}`) ?? 0) < 0)) {
     yield contradiction(on, 'heated-box-without-sink', heat[0] as string, { says: `a closed space is given ${inWords(on, `wallHeatFlux@${heat[0] as string}`)} at ${heat[0] as string} and no wall lets heat out`, effect: 'its temperature climbs without end: no steady state exists', cure: 'hold one wall at a temperature, give a coefficient, or plan a transient run with a duration' });
   }
+}
+
+/** Solids of the walls against the temperature of the face they make, or of the colder face. */
+function* layers(on: Ground): Generator<Contradiction> {
+  for (const [place, solids] of Object.entries(on.assembled.wallMaterials)) {
+    const [inner, outer] = [`wallTemperature@${place}`, `outerTemperature@${place}`].map((id) => ({ id, T: on.number(id) })) as [Face, Face];
+    const colder = outer.T !== undefined && inner.T !== undefined && outer.T < inner.T ? outer : inner;
+    for (const { name, path, outermost, melts, melt } of solids) {
+      const faces = [colder, ...(path.includes('layers.0.') ? [inner] : []), ...(outermost ? [outer] : [])];
+      const hot = faces.find(({ T }) => T !== undefined && melts !== undefined && T > melts);
+      if (hot === undefined || melts === undefined) continue;
+      yield contradiction(on, 'layer-above-melting', path, { says: `${name} melts at ${Number(melts.toPrecision(5))} K, and the wall of it stands at ${inWords(on, hot.id)}`, effect: 'the layer is no solid there: its conductivity is carried beyond its record', cure: `take a solid that stands the temperature, or cool the wall${melt === undefined ? '' : `; ${melt} is the record of the melt`}` });
+    }
+  }
+}
+
+interface Face {
+  readonly id: string;
+  readonly T: number | undefined;
 }
 
 /** Walls against the freezing and boiling of the liquid. */

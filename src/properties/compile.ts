@@ -7,7 +7,7 @@ import { collectionOf, findIn, namesOf, plainName, type Named } from './names.ts
 import { dangerMarks, propertyUnits, type Band, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
 import { yamlReader, type YamlReader } from './yaml-reader.ts';
 
-const headKeys = ['name', 'formula', 'aliases', 'phaseNames', 'kind', 'phases', 'marks', 'takes', 'typical', 'molarMass', 'flashPoint', 'critical', 'triplePoint', 'about', 'thermodynamics'];
+const headKeys = ['name', 'formula', 'aliases', 'phaseNames', 'kind', 'phases', 'acrossMelting', 'marks', 'takes', 'typical', 'molarMass', 'flashPoint', 'critical', 'triplePoint', 'about', 'thermodynamics'];
 const derived: readonly string[] = ['kinematicViscosity', 'thermalDiffusivity', 'prandtl', 'molarMass'];
 const recorded = Object.keys(propertyUnits).filter((id) => !derived.includes(id));
 
@@ -58,6 +58,7 @@ export function compileMaterial(text: string, file: string): MaterialRecord {
     kind: kind as 'fluid' | 'solid',
     phases: (phases.length > 0 ? phases : kind === 'solid' ? ['solid'] : ['liquid', 'vapour']) as (Side | 'solid')[],
     ...(marks.length > 0 ? { marks: marks as NonNullable<MaterialRecord['marks']> } : {}),
+    ...(typeof raw['acrossMelting'] === 'string' ? { acrossMelting: raw['acrossMelting'] } : {}),
     takes: texts('takes') as MaterialRecord['takes'][number][],
     ...(raw['typical'] === undefined ? {} : { typical: reader.quantity(['typical'], raw['typical'], '1') }),
     ...(raw['molarMass'] === undefined ? {} : { molarMass: reader.quantity(['molarMass'], raw['molarMass'], 'kg/mol') }),

@@ -85,7 +85,7 @@ const K = (T: number): string => `${Number(T.toPrecision(5))} K (${Number((T - 2
  * @param T         temperature [K], > 0
  * @param p         pressure [Pa], > 0
  * @param x         composition or humidity
- * @returns         phase, saturation, flags (near the critical point, close to saturation, above the melting point)
+ * @returns         phase, saturation, flags (near the critical point, close to saturation, above the melting point within what it is known to: farther above a solid is a liquid)
  * @throws          {Problem} impossible-state
  */
 export function phaseAt(material: Material, T: number, p: number, x = 0): PhaseAt {
@@ -94,7 +94,11 @@ export function phaseAt(material: Material, T: number, p: number, x = 0): PhaseA
   const flags: string[] = [];
   if (material.kind === 'solid') {
     const { meltingTemperature: melting, glassTransitionTemperature: softening } = material;
-    if (melting !== undefined && T > melting) flags.push(`above the melting temperature of ${K(melting)}`);
+    if (melting !== undefined && T > melting) {
+      flags.push(`above the melting temperature of ${K(melting)}`);
+      const known = material.record.properties['meltingTemperature']?.[0]?.uncertainty[0]?.value ?? 0;
+      if (T > melting * (1 + known)) return { phase: 'liquid', flags };
+    }
     if (softening !== undefined && T > softening) flags.push(`above the glass transition temperature of ${K(softening)}, where it softens`);
     return { phase: 'solid', flags };
   }
@@ -154,13 +158,15 @@ export function takenPhase(material: Material, state: State): PhaseAt & { readon
   }
   const stable = side(found.phase);
   const either = found.phase === 'supercritical' || (found.phase === 'liquid' && material.critical !== undefined && state.pressure >= material.critical.pressure);
+  const across = material.record.acrossMelting;
+  const elsewhere = across === undefined || (stable === 'solid') === (material.kind === 'solid') ? {} : { nearest: across };
+  const uncovered = (): Problem => new Problem({ code: 'not-covered', message: `${material.name} is ${words[found.phase]} ${where()}, and its record covers ${material.phases.join(' and ')} only`, expected: (stable === 'solid' || material.kind === 'solid') && found.flags[0] !== undefined ? `a temperature that is not ${found.flags[0]}` : 'another state, or the properties themselves', ...elsewhere });
+  if (material.kind === 'solid' && stable !== 'solid') throw uncovered();
   if (asked !== undefined && asked !== stable && !either) {
     const boils = found.saturation?.temperature;
     throw new Problem({ code: 'no-such-phase', message: `${material.name} is ${words[found.phase]} ${where()}, not ${asked === 'vapour' ? 'a vapour' : `a ${asked}`}`, expected: boils === undefined ? `a state where it is ${asked}` : `a temperature ${asked === 'vapour' ? 'above' : 'below'} ${K(boils)} at this pressure` });
   }
-  if (!material.phases.includes(stable) && !(stable === 'vapour' && found.phase === 'supercritical')) {
-    throw new Problem({ code: 'not-covered', message: `${material.name} is ${words[found.phase]} ${where()}, and its record covers ${material.phases.join(' and ')} only`, expected: stable === 'solid' && found.flags[0] !== undefined ? `a temperature that is not ${found.flags[0]}` : 'another state, or the properties themselves' });
-  }
+  if (!material.phases.includes(stable) && !(stable === 'vapour' && found.phase === 'supercritical')) throw uncovered();
   return { ...found, side: stable };
 }
 

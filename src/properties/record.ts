@@ -101,6 +101,8 @@ export interface MaterialRecord {
   readonly kind: 'fluid' | 'solid';
   /** Phases that the record covers. */
   readonly phases: readonly (Side | 'solid')[];
+  /** Name of the record of the same substance on the other side of its melting point. */
+  readonly acrossMelting?: string;
   readonly takes: readonly ('humidity' | 'composition' | 'components')[];
   readonly marks?: readonly (typeof dangerMarks)[number][];
   /** The share most often met, for the message where none is given. */

@@ -34,6 +34,14 @@ describe('runbrief material', () => {
 
   it.each([
     [['material', 'steam', '--at', '60 degC, 2 bar'], 1, 'a temperature above 393.36 K (120.21 degC)'],
+    [['material', 'aluminium', '--at', '700 degC, 1 bar'], 1, 'nearest   molten aluminium'],
+    [['material', 'tin', '--at', '300 degC, 1 bar'], 1, 'nearest   molten tin'],
+    [['material', 'ice', '--at', '5 degC, 1 bar'], 1, 'nearest   water'],
+    [['material', 'copper', '--at', '1200 degC, 1 bar'], 1, 'nearest   molten copper'],
+    [['material', 'stainless steel', '--at', '1500 degC, 1 bar'], 1, 'nearest   molten steel'],
+    [['material', 'gold', '--at', '1200 degC, 1 bar'], 1, 'a temperature that is not above the melting temperature of'],
+    [['material', 'lead', '--at', '20 degC, 1 bar'], 1, 'nearest   solid lead'],
+    [['material', 'water', '--at', '-5 degC, 1 bar'], 1, 'nearest   ice'],
     [['material', 'watr', '--at', '60 degC, 2 bar'], 1, 'nearest   water'],
     [['material', 'oil', '--at', '60 degC, 2 bar'], 1, 'does not say which material is meant'],
     [['material', 'sea water', '--at', '20 degC, 1 bar'], 1, 'composition 3.5 % mass'],

@@ -32,6 +32,14 @@ density:
   source: own measurement, invented for this test
 `;
 
+describe('a record across its melting point', () => {
+  it.each(materialRecords().flatMap(({ name, acrossMelting }) => (acrossMelting === undefined ? [] : [[name, acrossMelting] as const])))('of %s is %s', (name, across) => {
+    const [here, there] = [loadMaterial(name), loadMaterial(across)];
+    expect(there.name).toBe(across);
+    expect(there.phases.some((phase) => phase === 'solid')).not.toBe(here.kind === 'solid');
+  });
+});
+
 describe('names', () => {
   it.each([
     ['water', 'water'], ['H2O', 'water'], ['Steam', 'water'], ['dry-air', 'air'], ['N2', 'nitrogen'], ['CO2', 'carbon dioxide'], ['aluminum', 'aluminium'], ['diesel-like oil', 'light oil'], ['moist air', 'humid air'],

@@ -128,7 +128,7 @@ function wallTable(on: Ground): Table[] {
     const step = layer === null && surface === null ? undefined : stepOf(workings, id);
     if (step === undefined) return [];
     const place = (layer?.[1] ?? surface?.[2]) as string;
-    const what = layer === null ? step.name : `conductivity of ${wallMaterials[place]?.[Number(layer[2])] ?? `layer ${Number(layer[2]) + 1}`}`;
+    const what = layer === null ? step.name : `conductivity of ${wallMaterials[place]?.[Number(layer[2])]?.name ?? `layer ${Number(layer[2]) + 1}`}`;
     return [[place, what, { id }, step.kind === 'given' || step.source === 'the case' ? 'given' : step.kind === 'assumed' ? 'assumed' : 'handbook', step.source]];
   });
   return rows.length === 0 ? [] : [{ title: 'Walls', columns: ['wall', 'property', 'value', 'known how', 'source'], rows }];
