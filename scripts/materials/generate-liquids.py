@@ -11,6 +11,7 @@ from importlib import import_module
 
 import chemicals
 
+import syrup
 from record import K, disputed, write
 
 BY = 'generate-liquids.py'
@@ -236,8 +237,8 @@ FOODS = 'usual composition, USDA food composition tables, from memory'
 
 
 # Sugar in solution stores more heat when warm than the polynomials for dry carbohydrate say.
-def sweet(T, uncertainty):
-    return {'model': 'mixture-polynomial', 'range': {'T': K(*T), 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', '50 %']}, 'uncertainty': uncertainty,
+def sweet(T, uncertainty, most='50 %'):
+    return {'model': 'mixture-polynomial', 'range': {'T': K(*T), 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', most]}, 'uncertainty': uncertainty,
             'source': 'Hugot, Handbook of Cane Sugar Engineering, 4187 (1 - x (0.6 - 0.0018 t)), from memory; Choi and Okos (1986) give 10 % less at 363 K and 48 %',
             'constants': {'origin': 273.15, 'share': 0, 'gives': 'J/(kg K)', 'rows': [[4187, -2512.2], [0, 7.5366]]}}
 
@@ -263,13 +264,14 @@ sucrose = [float(ROWS['57-50-1'][f'v{i}']) for i in range(1, 7)]
 juice = {'model': 'aqueous-viscosity', 'range': {'T': ['278.15 K', '338.15 K']}, 'uncertainty': '25 %', 'source': f'sucrose solution of the same share, {LALIBERTE}; clear juices follow it', 'constants': {'terms': sucrose}}
 food('fruit juice', ['juice', 'apple juice', 'orange juice', 'grape juice'], {'carbohydrate': 0.96, 'protein': 0.015, 'ash': 0.025}, (275.15, 363.15), juice, ['0 %', '50 %'], 'clear juice; the composition is the share of soluble solids by mass (degrees Brix); cloudy juice and concentrate are thicker and thin with shear', typical='11.5 %', heat=sweet((275.15, 363.15), '6 %'), others={'thermalConductivity': ('10 %', 'at 363 K and 48 % 0.537 W/(m K), Riedel 0.490')})
 density = [float(ROWS['57-50-1'][f'c{i}']) for i in range(5)]
-share = {'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', '50 %']}
-write({'name': 'sucrose solution', 'aliases': ['sugar solution', 'sugar water', 'sucrose-water', 'syrup'], 'kind': 'fluid', 'phases': ['liquid'], 'takes': ['composition'], 'marks': ['hygiene'], 'about': 'the composition is the share of sucrose by mass (degrees Brix)',
-       'density': {'model': 'aqueous-density', 'range': {'T': ['288.15 K', '328.15 K'], **share}, 'uncertainty': '0.2 %', 'source': f'{LALIBERTE}, sucrose', 'checks': [{'at': {'T': '20 degC', 'composition': 0.4}, 'expect': '1176.4 kg/m^3', 'within': '0.2 %', 'source': 'ICUMSA tables of sucrose density, from memory'}], 'constants': {'terms': density}},
-       'viscosity': {'model': 'aqueous-viscosity', 'range': {'T': ['288.15 K', '328.15 K'], **share}, 'uncertainty': '6 %', 'source': f'{LALIBERTE}, sucrose', 'checks': [{'at': {'T': '20 degC', 'composition': 0.4}, 'expect': '6.167 mPa s', 'within': '6 %', 'source': 'NBS Circular 440 (1942), from memory'}, {'at': {'T': '20 degC', 'composition': 0.2}, 'expect': '1.945 mPa s', 'within': '6 %', 'source': 'NBS Circular 440 (1942), from memory'}], 'constants': {'terms': sucrose}},
+share = {'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', '75 %']}
+thin = {**share, 'composition': ['0 %', '50 %']}
+write({'name': 'sucrose solution', 'aliases': ['sugar solution', 'sugar water', 'sucrose-water', 'syrup'], 'kind': 'fluid', 'phases': ['liquid'], 'takes': ['composition'], 'marks': ['hygiene'], 'about': 'the composition is the share of sucrose by mass (degrees Brix); above 67 % at 20 degC it is supersaturated and may crystallize',
+       'density': [{'model': 'aqueous-density', 'range': {'T': ['288.15 K', '328.15 K'], **thin}, 'uncertainty': '0.2 %', 'source': f'{LALIBERTE}, sucrose', 'checks': [{'at': {'T': '20 degC', 'composition': 0.4}, 'expect': '1176.4 kg/m^3', 'within': '0.2 %', 'source': 'ICUMSA tables of sucrose density, from memory'}], 'constants': {'terms': density}}, syrup.DENSITY],
+       'viscosity': [{'model': 'aqueous-viscosity', 'range': {'T': ['288.15 K', '328.15 K'], **thin}, 'uncertainty': '6 %', 'source': f'{LALIBERTE}, sucrose', 'checks': [{'at': {'T': '20 degC', 'composition': 0.4}, 'expect': '6.167 mPa s', 'within': '6 %', 'source': 'NBS Circular 440 (1942), from memory'}, {'at': {'T': '20 degC', 'composition': 0.2}, 'expect': '1.945 mPa s', 'within': '6 %', 'source': 'NBS Circular 440 (1942), from memory'}], 'constants': {'terms': sucrose}}, syrup.VISCOSITY],
        'thermalConductivity': {'model': 'food-conductivity', 'range': {'T': ['273.15 K', '363.15 K'], **share}, 'uncertainty': '10 %', 'source': f'{CHOI}; at 363 K and 48 % 0.536 W/(m K), Riedel 0.490', 'constants': {'carbohydrate': 1}},
-       'specificHeatCapacity': sweet((273.15, 363.15), '5 %'),
-       'vapourPressure': solutions.ideal_vapour(342.297, 1, 0.5, '4 %', 'boiling points at 1 atm of the sugar tables, from memory, lie within 1 K')}, BY)
+       'specificHeatCapacity': sweet((273.15, 363.15), '5 %', '75 %'),
+       'vapourPressure': solutions.ideal_vapour(342.297, 1, 0.5, '4 %', 'boiling points at 1 atm of the sugar tables, from memory, lie within 1 K; stronger syrups boil higher than the law says')}, BY)
 food('beer', [], {'water': 0.915, 'protein': 0.005, 'carbohydrate': 0.078, 'ash': 0.002}, (273.15, 343.15), seen([[0, 2.9], [20, 1.55], [40, 1.0], [60, 0.7]], '12 %', 'brewing handbooks, from memory'), about='lager of 5 % alcohol by volume, degassed; the alcohol is counted as carbohydrate', density={'model': 'constant', 'range': {'T': K(273.15, 313.15), 'p': ['0 Pa', '5 MPa']}, 'uncertainty': '1 %', 'source': 'lager at 20 degC, brewing handbooks, from memory', 'constants': {'value': '1008 kg/m^3'}})
 T = (303.15, 315.15)
 write({'name': 'blood plasma', 'aliases': ['plasma', 'human plasma'], 'kind': 'fluid', 'phases': ['liquid'], 'marks': ['medical'], 'about': 'human plasma near body temperature',

@@ -12,6 +12,7 @@ import os
 import chemicals
 import CoolProp
 
+import strong_acid
 from record import K, disputed, write
 
 HERE = 'generate-solutions.py from the coefficients of CoolProp 8.0.0 (incompressible fluids, MIT licence)'
@@ -117,10 +118,10 @@ RIEDEL = 'Riedel, Chem. Ing. Tech. 23 (1951) 59; contributions of the ions as in
 ION = {'H': -9.07, 'Na': 0.0, 'K': -7.56, 'NH4': -11.63, 'Ca': -0.58, 'Mg': -9.30, 'Cl': -5.47, 'OH': 20.93, 'SO4': 1.16, 'NO3': -6.98, 'PO4': -20.93, 'CO3': -7.56}
 
 
-def electrolyte(cas, name, formula, aliases, ions, about, uncertainty, freezing=None, typical=None, limits=None, extra=None, conducts=None, expansion=None, marks=None, vapour=None):
+def electrolyte(cas, name, formula, aliases, ions, about, uncertainty, freezing=None, typical=None, limits=None, extra=None, conducts=None, expansion=None, marks=None, vapour=None, saturated=None, strong=None):
     row = ROWS[cas]
     number = lambda key: float(row[key])
-    record = {'name': name, 'aliases': aliases, 'kind': 'fluid', 'phases': ['liquid'], 'takes': ['composition'], **({'marks': marks} if marks else {}), **({'typical': typical} if typical else {}), 'about': about}
+    record = {'name': name, 'aliases': aliases, 'kind': 'fluid', 'phases': ['liquid'], 'takes': ['composition'], **({'marks': marks} if marks else {}), **({'typical': typical} if typical else {}), **({'saturated': saturated} if saturated else {}), 'about': about}
     where = lambda suffix: {'T': [f'{273.15 + number("Min T" + suffix):g} K', f'{273.15 + min(number("Max T" + suffix), 100):g} K'], 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', f'{int(1000 * number("Max w" + suffix)) / 10:g} %']}
     record['density'] = {'model': 'aqueous-density', 'range': where(''), 'uncertainty': uncertainty['density'], 'source': f'{LALIBERTE}, {name}, {row["No of points in corr"]} points', 'constants': {'terms': [number(f'c{i}') for i in range(5)]}}
     record['viscosity'] = {'model': 'aqueous-viscosity', 'range': where('.1'), 'uncertainty': uncertainty['viscosity'], 'source': f'{LALIBERTE}, {name}', 'constants': {'terms': [number(f'v{i}') for i in range(1, 7)]}}
@@ -138,6 +139,10 @@ def electrolyte(cas, name, formula, aliases, ions, about, uncertainty, freezing=
         for key in ('density', 'viscosity', 'specificHeatCapacity'):
             record[key] = [record[key], cold[key]]
         record['thermalConductivity'] = [cold['thermalConductivity'], record['thermalConductivity']]
+    for key, entry in (strong or {}).items():
+        # The printed range of the weaker law ends where the stronger begins.
+        record[key]['range']['composition'][1] = entry['range']['composition'][0]
+        record[key] = [record[key], entry]
     if expansion:
         record['thermalExpansion'] = expansion
     if vapour:
@@ -159,10 +164,10 @@ LYE = {'model': 'mixture-polynomial', 'range': {'T': ['273.15 K', '323.15 K'], '
 ROBINSON = 'osmotic coefficient of Robinson and Stokes, Electrolyte Solutions, 2nd ed. (1959), from memory'
 ACID = ['corrosive']
 if __name__ == '__main__':
-    electrolyte('7647-14-5', 'sodium chloride brine', 'NaCl', ['NaCl brine', 'salt water', 'brine', 'aqueous sodium chloride'], {'Na': 1, 'Cl': 1}, 'the composition is the share of sodium chloride by mass', FINE, 'MNA', vapour=ideal_vapour(58.443, 2, 0.2, '5 %', 'stronger brines bind more water than the law says', [{'at': {'T': '25 degC', 'composition': 0.2}, 'expect': '2.660 kPa', 'within': '4 %', 'source': ROBINSON + ' (1.137 at 4.28 mol/kg)'}]))
+    electrolyte('7647-14-5', 'sodium chloride brine', 'NaCl', ['NaCl brine', 'salt water', 'brine', 'aqueous sodium chloride'], {'Na': 1, 'Cl': 1}, 'the composition is the share of sodium chloride by mass', FINE, 'MNA', typical='20 %', saturated=[['0 degC', '26.3 %'], ['25 degC', '26.4 %'], ['60 degC', '27.1 %'], ['100 degC', '28.1 %']], vapour=ideal_vapour(58.443, 2, 0.2, '5 %', 'stronger brines bind more water than the law says', [{'at': {'T': '25 degC', 'composition': 0.2}, 'expect': '2.660 kPa', 'within': '4 %', 'source': ROBINSON + ' (1.137 at 4.28 mol/kg)'}]))
     electrolyte('10043-52-4', 'calcium chloride brine', 'CaCl2', ['CaCl2 brine', 'aqueous calcium chloride'], {'Ca': 1, 'Cl': 2}, 'the composition is the share of calcium chloride by mass', COARSE, 'MCA')
-    electrolyte('7447-40-7', 'potassium chloride brine', 'KCl', ['KCl brine', 'aqueous potassium chloride'], {'K': 1, 'Cl': 1}, 'the composition is the share of potassium chloride by mass', FINE, vapour=ideal_vapour(74.551, 2, 0.24, '5 %', 'the salt does not boil off', [{'at': {'T': '25 degC', 'composition': 0.2}, 'expect': '2.828 kPa', 'within': '2 %', 'source': ROBINSON + ' (0.944 at 3.35 mol/kg)'}]))
-    electrolyte('7664-93-9', 'sulphuric acid', 'H2SO4', ['sulfuric acid', 'H2SO4', 'battery acid', 'aqueous sulphuric acid'], {'H': 2, 'SO4': 1}, 'in water; the composition is the share of sulphuric acid by mass', COARSE, marks=ACID)
+    electrolyte('7447-40-7', 'potassium chloride brine', 'KCl', ['KCl brine', 'aqueous potassium chloride'], {'K': 1, 'Cl': 1}, 'the composition is the share of potassium chloride by mass', FINE, saturated=[['0 degC', '21.9 %'], ['20 degC', '25.5 %'], ['40 degC', '28.6 %'], ['60 degC', '31.4 %'], ['100 degC', '36 %']], vapour=ideal_vapour(74.551, 2, 0.24, '5 %', 'the salt does not boil off', [{'at': {'T': '25 degC', 'composition': 0.2}, 'expect': '2.828 kPa', 'within': '2 %', 'source': ROBINSON + ' (0.944 at 3.35 mol/kg)'}]))
+    electrolyte('7664-93-9', 'sulphuric acid', 'H2SO4', ['sulfuric acid', 'H2SO4', 'battery acid', 'aqueous sulphuric acid'], {'H': 2, 'SO4': 1}, 'in water; the composition is the share of sulphuric acid by mass', COARSE, marks=ACID, strong=strong_acid.ENTRIES)
     electrolyte('1310-73-2', 'caustic soda', 'NaOH', ['sodium hydroxide', 'NaOH', 'lye', 'aqueous sodium hydroxide'], {'Na': 1, 'OH': 1}, 'in water; the composition is the share of sodium hydroxide by mass', COARSE, conducts=0.1, expansion=LYE, marks=ACID)
     electrolyte('1310-58-3', 'caustic potash', 'KOH', ['potassium hydroxide', 'KOH'], {'K': 1, 'OH': 1}, 'in water; the composition is the share of potassium hydroxide by mass', COARSE, conducts=0.15, marks=ACID)
     electrolyte('7647-01-0', 'hydrochloric acid', 'HCl', ['muriatic acid', 'aqueous hydrogen chloride'], {'H': 1, 'Cl': 1}, 'in water; the composition is the share of hydrogen chloride by mass', COARSE, marks=ACID)

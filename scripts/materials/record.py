@@ -58,7 +58,7 @@ def entry(e, indent):
     return lines
 
 
-HEAD = ('name', 'formula', 'aliases', 'kind', 'phases', 'acrossMelting', 'takes', 'typical', 'molarMass', 'about', 'marks')
+HEAD = ('name', 'formula', 'aliases', 'kind', 'phases', 'acrossMelting', 'takes', 'typical', 'saturated', 'molarMass', 'about', 'marks')
 
 
 def write(record, made_by):

@@ -7,7 +7,7 @@ import { collectionOf, findIn, namesOf, plainName, type Named } from './names.ts
 import { dangerMarks, propertyUnits, type Band, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
 import { yamlReader, type YamlReader } from './yaml-reader.ts';
 
-const headKeys = ['name', 'formula', 'aliases', 'phaseNames', 'kind', 'phases', 'acrossMelting', 'marks', 'takes', 'typical', 'molarMass', 'flashPoint', 'critical', 'triplePoint', 'about', 'thermodynamics'];
+const headKeys = ['name', 'formula', 'aliases', 'phaseNames', 'kind', 'phases', 'acrossMelting', 'marks', 'takes', 'typical', 'saturated', 'molarMass', 'flashPoint', 'critical', 'triplePoint', 'about', 'thermodynamics'];
 const derived: readonly string[] = ['kinematicViscosity', 'thermalDiffusivity', 'prandtl', 'molarMass'];
 const recorded = Object.keys(propertyUnits).filter((id) => !derived.includes(id));
 
@@ -61,6 +61,7 @@ export function compileMaterial(text: string, file: string): MaterialRecord {
     ...(typeof raw['acrossMelting'] === 'string' ? { acrossMelting: raw['acrossMelting'] } : {}),
     takes: texts('takes') as MaterialRecord['takes'][number][],
     ...(raw['typical'] === undefined ? {} : { typical: reader.quantity(['typical'], raw['typical'], '1') }),
+    ...(raw['saturated'] === undefined ? {} : { saturated: solubility(reader, raw['saturated']) }),
     ...(raw['molarMass'] === undefined ? {} : { molarMass: reader.quantity(['molarMass'], raw['molarMass'], 'kg/mol') }),
     ...(raw['flashPoint'] === undefined ? {} : { flashPoint: reader.quantity(['flashPoint'], raw['flashPoint'], 'K') }),
     ...group('critical', { temperature: 'K', pressure: 'Pa', density: 'kg/m^3' }),
@@ -71,6 +72,16 @@ export function compileMaterial(text: string, file: string): MaterialRecord {
   };
   reader.finish();
   return record;
+}
+
+/** Rows of temperature and share, the temperatures rising. */
+function solubility(reader: YamlReader, given: unknown): [number, number][] {
+  const rows = Array.isArray(given) ? given.map((row: unknown, i): [number, number] => {
+    const [T, share] = Array.isArray(row) ? (row as unknown[]) : [];
+    return [reader.quantity(['saturated', i, 0], T, 'K'), reader.quantity(['saturated', i, 1], share, '1')];
+  }) : [];
+  if (rows.length === 0 || rows.some(([T], i) => i > 0 && !(T > (rows[i - 1]?.[0] ?? 0)))) reader.complain(['saturated'], { code: 'wrong-solubility', message: 'a solubility is rows of temperature and share, the temperatures rising', expected: '[[0 degC, 26.3 %], [100 degC, 28 %]]' });
+  return rows;
 }
 
 /** The part of a record that bears names. */

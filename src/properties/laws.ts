@@ -1,3 +1,4 @@
+import { isRefused } from './composition-range.ts';
 import { fromEquation, insideAny, type Material } from './material.ts';
 import type { Point } from './models/point.ts';
 import { takeState, type TakenState } from './property.ts';
@@ -7,6 +8,9 @@ import type { State } from './state.ts';
 
 /** Properties as functions of temperature [K] and pressure [Pa], SI. */
 export type Law = (T: number, p?: number) => number;
+
+/** What a formed property is formed from. */
+const parts: { readonly [property: string]: readonly PropertyId[] } = { kinematicViscosity: ['viscosity', 'density'], thermalDiffusivity: ['thermalConductivity', 'density', 'specificHeatCapacity'], prandtl: ['viscosity', 'specificHeatCapacity', 'thermalConductivity'] };
 
 /** What a law remembers while it is used. */
 export interface Laws {
@@ -22,7 +26,7 @@ export interface Laws {
  * @param material  the material
  * @param state     the state whose pressure, composition and phase the laws keep
  * @param factors   factor per property from its uncertainty, 1 where not given
- * @returns         the laws; `law` gives undefined for a property the material does not have
+ * @returns         the laws; `law` gives undefined for a property the material does not have, or not at this share
  * @throws          {Problem} see takeState
  */
 export function laws(material: Material, state: State, factors: { readonly [property: string]: number } = {}): Laws {
@@ -80,7 +84,8 @@ export function laws(material: Material, state: State, factors: { readonly [prop
     return factor === undefined ? f : () => f() * factor;
   };
   const call = (property: PropertyId): (() => number) | undefined => {
-    if (!material.properties.includes(property)) return undefined;
+    const from = parts[property] ?? [property];
+    if (!material.properties.includes(property) || from.some((id) => isRefused(record, id, share))) return undefined;
     if (property === 'molarMass' && material.molarMass !== undefined) return () => material.molarMass as number;
     if (property === 'kinematicViscosity' || property === 'thermalDiffusivity' || property === 'prandtl') {
       const [mu, k, rho, cp] = (['viscosity', 'thermalConductivity', 'density', 'specificHeatCapacity'] as const).map(scaled) as [() => number, () => number, () => number, () => number];

@@ -146,13 +146,16 @@ function engineOf(record: MaterialRecord, collection: Collection): MaterialEngin
       for (const entry of list) {
         if (entry.phase !== undefined && entry.phase !== (asked ?? s.side)) continue;
         if (entry.ranges.length === 0 || insideAny(entry.ranges, s)) return entry;
-        first ??= entry;
+        // None holds: that of the right share is nearer than that of the right temperature.
+        if (first === undefined || (!holdsShare(first, s.x) && holdsShare(entry, s.x))) first = entry;
       }
       return first;
     },
   };
   return engine;
 }
+
+const holdsShare = ({ ranges }: Entry, x: number): boolean => ranges.some(({ composition }) => within(composition, x));
 
 /** Read when it is asked for: it takes the records of the components. */
 function pseudoCritical(record: MaterialRecord, engine: MaterialEngine): Material['critical'] {

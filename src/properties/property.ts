@@ -2,6 +2,7 @@ import { Problem } from '../problems/index.ts';
 import { fromEquation, inside, insideAny, type Material } from './material.ts';
 import type { Side } from './models/point.ts';
 import { mixtureFlags } from './gas-flags.ts';
+import { exampleShare, isRefused, shareFlags } from './composition-range.ts';
 import { isEmptyMixture } from './mixture.ts';
 import { takenPhase } from './phase.ts';
 import type { Band, Box, Entry, Phase, PropertyId } from './record.ts';
@@ -43,13 +44,14 @@ const ofSubstance: readonly string[] = ['vapourPressure', 'vapourPressureCeiling
  * @param material  the material
  * @param state     temperature, pressure, humidity or composition, phase asked for
  * @returns         the state ready for `propertyIn`
- * @throws          {Problem} impossible-state, no-such-phase, between-phases, not-covered, condenses, missing-composition, wrong-composition
+ * @throws          {Problem} impossible-state, no-such-phase, between-phases, not-covered, condenses, missing-composition, wrong-composition, beyond-saturation, beyond-composition
  */
 export function takeState(material: Material, state: State): TakenState {
   const x = shareOf(material, state);
+  const beyond = material.takes.includes('composition') ? shareFlags(material, x, state.temperature) : [];
   const taken = takenPhase(material, state);
   const sample: Sample = { T: state.temperature, p: state.pressure, side: taken.side === 'solid' ? 'liquid' : taken.side, x };
-  return { sample, phase: taken.phase, solid: taken.side === 'solid', flags: [...taken.flags, ...mixtureFlags(material, sample)] };
+  return { sample, phase: taken.phase, solid: taken.side === 'solid', flags: [...taken.flags, ...beyond, ...mixtureFlags(material, sample)] };
 }
 
 function shareOf(material: Material, state: State): number {
@@ -57,7 +59,7 @@ function shareOf(material: Material, state: State): number {
   const needs = material.takes.find((what) => what !== 'components');
   if (needs === undefined) return 0;
   const given = needs === 'humidity' ? state.humidity : state.composition;
-  if (given === undefined) throw new Problem({ code: `missing-${needs}`, message: `${material.name} needs its ${needs}`, expected: needs === 'humidity' ? 'humidity 60 %' : `composition ${material.record.typical === undefined ? 30 : Number((material.record.typical * 100).toPrecision(4))} % mass${material.about === undefined ? '' : ` (${material.about})`}` });
+  if (given === undefined) throw new Problem({ code: `missing-${needs}`, message: `${material.name} needs its ${needs}`, expected: needs === 'humidity' ? 'humidity 60 %' : `composition ${Number((exampleShare(material.record) * 100).toPrecision(4))} % mass${material.about === undefined ? '' : ` (${material.about})`}` });
   if (!(given >= 0 && given <= 1)) throw new Problem({ code: `wrong-${needs}`, message: `${needs} is ${Number((given * 100).toPrecision(4))} %`, expected: 'a share from 0 % to 100 %' });
   return given;
 }
@@ -103,6 +105,7 @@ export function propertyIn(material: Material, property: PropertyId, taken: Take
   if (property === 'kinematicViscosity') return combine(material, taken, [['viscosity', 1], ['density', -1]]);
   if (property === 'thermalDiffusivity') return combine(material, taken, [['thermalConductivity', 1], ['density', -1], ['specificHeatCapacity', -1]]);
   if (property === 'prandtl') return combine(material, taken, [['viscosity', 1], ['specificHeatCapacity', 1], ['thermalConductivity', -1]]);
+  if (isRefused(record, property, sample.x)) return undefined;
   const gaseous = sample.side === 'vapour' && !solid;
   if ((property === 'compressibilityFactor' || property === 'isentropicExponent') && !gaseous) return undefined;
   const equation = record.thermodynamics;

@@ -107,6 +107,8 @@ export interface MaterialRecord {
   readonly marks?: readonly (typeof dangerMarks)[number][];
   /** The share most often met, for the message where none is given. */
   readonly typical?: number;
+  /** Solubility: temperatures [K] and the share of a saturated solution by mass. */
+  readonly saturated?: readonly (readonly [number, number])[];
   readonly molarMass?: number;
   /** Closed cup, at the atmosphere [K]. */
   readonly flashPoint?: number;

@@ -26,9 +26,9 @@ def ground():
         add(name, K, 258.6, 0.138 - 1.01 * rho + 3.233 * rho ** 2 if rho >= 0.156 else 0.023 + 0.234 * rho, 'sturm 1997')
         add(name, K, 271, 0.024 - 0.123 * rho + 2.5 * rho ** 2, 'calonne 2011')
 
-    add('ice', 'meltingTemperature', 300, 273.15 + gsw.t_freezing(0, 0, 0), 'iapws-06')
+    add('ice', 'meltingTemperature', 270, 273.15 + gsw.t_freezing(0, 0, 0), 'iapws-06')
     for name in ('fresh snow', 'settled snow', 'packed snow'):
-        add(name, 'meltingTemperature', 300, 273.15 + gsw.t_freezing(0, 0, 0), 'iapws-06')
+        add(name, 'meltingTemperature', 270, 273.15 + gsw.t_freezing(0, 0, 0), 'iapws-06')
 
     # Rocks: their minerals, by mass; the rock itself may hold pores, so that only heat capacity and expansion of all of them, and the density of the dense ones, count.
     DENSE = {'marble', 'quartzite', 'rock salt', 'granite', 'basalt'}
