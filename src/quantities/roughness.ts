@@ -10,7 +10,7 @@ export const roughness: Definition[] = [
     way({ needs: ['sandGrain', 'hydraulicDiameter'], value: ({ sandGrain, hydraulicDiameter }) => sandGrain / hydraulicDiameter, formula: 'k_s/D_h', source: 'definition' }),
   ]),
   quantity('roughnessReynolds', { symbol: 'k_s+', name: 'sand grain in viscous lengths', unit: '1' }, [
-    way({ needs: ['sandGrain', 'frictionVelocityPlain', 'kinematicViscosityBulk'], value: ({ sandGrain, frictionVelocityPlain, kinematicViscosityBulk }) => (sandGrain * frictionVelocityPlain) / kinematicViscosityBulk, formula: 'k_s+ = k_s u_tau/nu', source: 'definition' }),
+    way({ needs: ['sandGrain', 'frictionVelocityPlain', 'roughnessFactorFriction', 'kinematicViscosityBulk'], value: (of) => (of.sandGrain * of.frictionVelocityPlain * Math.sqrt(of.roughnessFactorFriction)) / of.kinematicViscosityBulk, formula: 'k_s+ = k_s u_tau/nu, u_tau = u_tau,0 F_k^(1/2) of the rough wall', source: 'definition' }),
   ]),
   quantity('roughnessFactorFriction', { symbol: 'F_k', name: 'friction of the rough over the smooth wall', unit: '1' }, [
     way({ needs: ['reynoldsBulk', 'relativeRoughness'], when: { flowClass: 'internal', regime: ['transitional', 'turbulent'] }, range: { relativeRoughness: [0, 0.05] }, value: ({ reynoldsBulk, relativeRoughness }) => colebrook({ reynolds: reynoldsBulk, relativeRoughness }) / colebrook({ reynolds: reynoldsBulk, relativeRoughness: 0 }), formula: 'F = f(Re, k_s/D)/f(Re, 0)', source: rough }),
