@@ -37,7 +37,9 @@ const regime: Definition[] = [
     way({ needs: ['rayleighHeight'], value: ({ rayleighHeight }) => rayleighHeight, symbol: 'Ra', formula: 'Ra on the height', source: definition }),
   ]),
   ways('unsteadyFrom', [
-    way({ needs: [aspect], range: { [aspect]: [12, 1e3] }, scatter: 0.2, value: () => 8000, formula: 'Gr_on = 8000: cells one above another', source: cells }),
+    way({ needs: [aspect, 'prandtl'], range: { [aspect]: [12, 1e3], prandtl: [0.5, 12.45] }, scatter: 1, value: () => 2e4, formula: 'Gr_on = 2e4, between 1e4 and 4e4: cells one above another come first, from 8000 on, and stand still', source: `${cells}: below Pr 12.45 the first cells are stationary; Lee and Korpela, J. Fluid Mech. 126 (1983) 91, steady cells beyond; Wright et al., Int. J. Heat Mass Transfer 49 (2006) 889, air at H/W 40 irregular from Ra of about 1e4; from memory of these works`, note: 'where the cells of a tall slot begin to move is not settled: a steady run with cells is the first answer, one run in time the test' }),
+    way({ needs: [aspect, 'prandtl'], range: { [aspect]: [12, 1e3], prandtl: [12.45, 1e4] }, scatter: 0.5, value: ({ prandtl }) => 7900 / Math.sqrt(prandtl), formula: 'Gr_on = 7900 Pr^(-1/2)', source: `${cells}; stability equations solved anew: above Pr 12.45 the first cells travel`, note: 'parallel flow that conducts; where the core is stratified they come later' }),
+    way({ needs: [aspect, 'prandtl'], range: { [aspect]: [12, 1e3], prandtl: [0, 0.5] }, scatter: 0.5, value: () => 8000, formula: 'Gr_on = 8000: cells one above another, which soon move in a liquid metal', source: `${cells}; how soon from memory` }),
     way({ needs: ['prandtl'], range: { prandtl: [1e-4, 0.1] }, scatter: 1, value: () => 3e6, formula: 'Gr_on = 3e6', source: 'Gelfgat, Bar-Yoseph and Yarin, J. Fluid Mech. 388 (1999) 315; from memory of this work' }),
     way({ needs: [], scatter: 0.2, value: () => 1.8e8, formula: 'Ra_on = 1.8e8', source: 'Le Quere and Behnia, J. Fluid Mech. 359 (1998) 81: square of air, plane; lower in three dimensions' }),
   ]),

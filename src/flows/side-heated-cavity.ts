@@ -79,7 +79,7 @@ export const sideHeatedCavity: Flow = {
   simplifications: [
     'Below Ra_W = 500 H/W conduction rules; above it layers stand on the walls and the core is stratified.',
     'Adiabatic floor and lid are rarely true for air: radiation and conduction change the heat by 10 to 30 %.',
-    'Air in a square turns unsteady at Ra 1.8e8 in the plane, earlier in three dimensions; liquid metals far earlier; tall slots form cells from Gr_W = 8000.',
+    'Air in a square turns unsteady at Ra 1.8e8 in the plane, earlier in three dimensions; liquid metals far earlier; tall slots form cells one above another from Gr_W = 8000, which stand still in air and water up to 1e4 to 4e4: cells alone are no reason for a run in time.',
     'No published law covers the square of air closely: the one used is 4 to 11 % high up to Ra 1e6 and 16 % at 1e8; the benchmark holds there.',
   ],
   look: {

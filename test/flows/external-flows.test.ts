@@ -1,3 +1,4 @@
+import { planned } from '../cases/expert.ts';
 import { describe, expect, it } from 'vitest';
 import { flows, type Flow } from '../../src/flows/index.ts';
 import { churchillBernstein, churchillChuCylinder, churchillChuLaminar, cylinderDrag, cylinderStrouhal, elSherbiny, berkovskyPolevikov, hilpert, laminarStrouhal, leFevre, meanPlateFriction, morgan, roughPlateFriction, shipPlateFriction, sumOfLocal, turbulentPlateFriction, unheatedStart, uprightSimilar, whiteCylinderDrag, zukauskas } from './external-laws.ts';
@@ -285,6 +286,19 @@ describe('box heated from the side', () => {
     near(got(w, 'regimeHigh'), Math.max(low, high), 0.005);
   });
   it('is unsteady from 1.8e8 for air, far earlier for metals, and in cells for tall slots', () => {
-    expect([got(box(), 'unsteadyFrom'), got(box({ prandtl: 0.02 }), 'unsteadyFrom'), got(box({ 'sizes.height': 20 * side }), 'unsteadyFrom')]).toEqual([1.8e8, 3e6, 8000]);
+    expect([got(box(), 'unsteadyFrom'), got(box({ prandtl: 0.02 }), 'unsteadyFrom'), got(box({ 'sizes.height': 20 * side }), 'unsteadyFrom')]).toEqual([1.8e8, 3e6, 2e4]);
+  });
+  // Source: stability equations of the parallel flow, slot-onset.py beside this file. Stationary cells first appear at Gr 7807, 8037, 7869, 7873 for Pr 0.01,
+  // 0.71, 7, 12.3 (Korpela, Gozum and Baxi 1973: 8037 for air); at Pr 20 and more the first disturbance travels at 0.008 g beta dT W^2/nu.
+  it.each([0.71, 7, 12.3])('cells of a tall slot stand still at their onset, Pr %d: unsteady beyond 8000 only', (prandtl) => {
+    const w = box({ 'sizes.height': 20 * side, prandtl });
+    expect((got(w, 'unsteadyFrom')) / 8000).toBeGreaterThan(1.2);
+  });
+  it.each([[20, 2413.8], [50, 1108.7], [100, 749.6], [1000, 251.2]])('in an oil of Pr %d they travel, from Gr %d', (prandtl, grashof) => near(got(box({ 'sizes.height': 20 * side, prandtl }), 'unsteadyFrom'), grashof, 0.3));
+  it('argon between panes at Gr 14 400 is near the onset, not beyond it: a steady run comes first', async () => {
+    const { plan } = await planned('argon-glazing', [], '../cases');
+    expect(plan.effects.find((e) => e.id === 'unsteadiness')?.verdict).toBe('borderline');
+    expect(plan.choices.find((c) => c.id === 'run-character')?.chosen).not.toBe('transient');
+    expect(plan.quantities['unsteadyFrom']?.formula).toContain('stand still');
   });
 });
