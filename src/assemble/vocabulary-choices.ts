@@ -5,7 +5,7 @@ const cuts: WordsField = {
   kind: 'words',
   doc: 'how the region is cut down',
   example: '[two-dimensional]',
-  words: meanings({ 'two-dimensional': 'one plane', axisymmetric: 'one half plane turned about the axis', 'mirror-left-right': 'left and right alike', 'mirror-top-bottom': 'top and bottom alike', 'periodic-along-flow': 'one piece that repeats along the flow' }),
+  words: meanings({ 'two-dimensional': 'one plane', axisymmetric: 'one half plane turned about the axis', 'mirror-left-right': 'left and right alike', 'mirror-top-bottom': 'top and bottom alike', 'periodic-along-flow': 'one piece that repeats along the flow', 'periodic-along-span': 'a slice of the span repeats' }),
 };
 
 /** What has been decided already, in the option words of the plan. */

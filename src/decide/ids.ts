@@ -36,7 +36,7 @@ export const optionsOf = (choice: string): readonly string[] | undefined => (cho
 
 /** A dimension, or any cuts joined by +, in the order in which a case lists them. */
 function cutWords(): string[] {
-  const cuts = ['two-dimensional', 'axisymmetric', 'mirror-left-right', 'mirror-top-bottom', 'periodic-along-flow'];
+  const cuts = ['two-dimensional', 'axisymmetric', 'mirror-left-right', 'mirror-top-bottom', 'periodic-along-flow', 'periodic-along-span'];
   const words = ['none', 'three-dimensional'];
   for (let set = 1; set < 2 ** cuts.length; set++) words.push(cuts.filter((_, k) => (set & (1 << k)) !== 0).join('+'));
   return words;

@@ -40,7 +40,10 @@ const extents: Definition[] = [
   ways('regionAcross@near', [way({ needs: ['sizes.diameter', 'domainSides'], value: (of) => Math.min(of['sizes.diameter'], of.domainSides), formula: 'D, at most to the wall beside', source: practice })]),
   ways('regionAcross@wake', [way({ needs: ['sizes.diameter', 'domainSides'], value: (of) => Math.min(4 * of['sizes.diameter'], 2 * of.domainSides + of['sizes.diameter']), formula: '4 D, at most the whole', source: practice })]),
   ways('regionAcross@far', [way({ needs: ['sizes.diameter', 'domainSides'], value: (of) => 2 * of.domainSides + of['sizes.diameter'], formula: '2 L_s + D', source: practice })]),
-  ways('regionSpan', [way({ needs: ['sizes.span'], value: (of) => of['sizes.span'], formula: 'B', source: geometry }), diameters(Math.PI, 'pi D, ends repeating; 2 pi D preferred', practice, { infiniteDepth: 'yes' })]),
+  ways('regionSpan', [
+    diameters(2 * Math.PI, '2 pi D, ends repeating: the slice that the chosen cut leaves', `${practice}; pi D at least for the eddies along the span`, { 'choice.dimension-and-cuts': 'periodic-along-span' }),
+    way({ needs: ['sizes.span'], value: (of) => of['sizes.span'], formula: 'B', source: geometry }),
+    diameters(Math.PI, 'pi D, ends repeating; 2 pi D preferred', practice, { infiniteDepth: 'yes' })]),
   ways('regionCoarsening@wake', [way({ needs: [], value: () => 2, formula: 'a_c = 2', source: `${practice}: 0.05 to 0.1 D along the wake` })]),
   ways('regionCoarsening@far', [way({ needs: [], value: () => 16, formula: 'a_c = 16', source: `${practice}, mean of a mesh that grows outwards` })]),
 ];
@@ -76,12 +79,13 @@ export const cylinder: Flow = {
   regions: ['near', 'wake', 'far'],
   words: { flow: 'cylinder', flowClass: 'body', wallBounded: 'yes', attached: 'no', separated: 'yes', ductSection: 'other' },
   definitions: [...scales, ...cylinderLaws, ...extents, ...rungs],
-  leastRegion: 'Half, two-dimensional, below Re 47; the whole, two-dimensional, from 47 to 180; three-dimensional with a span of pi D, better 2 pi D, above. In still fluid: half, two-dimensional, steady, while the plume does not sway; upright: axisymmetric.',
+  leastRegion: 'Half, two-dimensional, below Re 47; the whole, two-dimensional, from 47 to 180; three-dimensional above, a slice of pi D, better 2 pi D, of a long cylinder with its ends repeating, the whole span below 20 D. In still fluid: half, two-dimensional, steady, while the plume does not sway; upright: axisymmetric.',
   cuts: [
     { option: 'two-dimensional', holdsIf: 'a long cylinder below Re 180, or averaged turbulence of mean loads' },
     { option: 'mirror-top-bottom', holdsIf: 'steady wake: Re below 47 in an even stream' },
     { option: 'mirror-left-right', holdsIf: 'level in still fluid, Ra below 1e6: no swaying plume' },
     { option: 'axisymmetric', holdsIf: 'upright in still fluid' },
+    { option: 'periodic-along-span', holdsIf: 'across a stream, three-dimensional wake, span of 20 D or more: the ends do not matter to means over the span' },
   ],
   domain: [
     { side: 'upstream', id: 'domainUpstream', source: 'common practice' },

@@ -12,7 +12,7 @@ export interface Size {
 
 /** A smaller region than the whole that may be computed, and what must hold for it. */
 export interface Cut {
-  readonly option: 'two-dimensional' | 'axisymmetric' | 'mirror-left-right' | 'mirror-top-bottom' | 'periodic-along-flow';
+  readonly option: 'two-dimensional' | 'axisymmetric' | 'mirror-left-right' | 'mirror-top-bottom' | 'periodic-along-flow' | 'periodic-along-span';
   readonly holdsIf: string;
 }
 

@@ -1,6 +1,6 @@
 import { quantity, way, type Definition } from '../workings/index.ts';
 
-const cutNames = ['two-dimensional', 'axisymmetric', 'mirror-left-right', 'mirror-top-bottom', 'periodic-along-flow'] as const;
+const cutNames = ['two-dimensional', 'axisymmetric', 'mirror-left-right', 'mirror-top-bottom', 'periodic-along-flow', 'periodic-along-span'] as const;
 const choice = 'choice.dimension-and-cuts';
 
 /** All option words of the choice in which one of the cuts stands. */

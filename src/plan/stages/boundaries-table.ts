@@ -36,7 +36,7 @@ function ends(on: Ground, cuts: readonly string[]): Boundary[] {
   const third = on.assembled.flow.sizes.some((s) => s.infinite === true);
   if (!third || cuts.includes('axisymmetric')) return [];
   if (cuts.includes('two-dimensional')) return [{ name: 'front and back', is: 'joined', velocity: 'none: one cell deep', pressure: 'none', temperature: 'none', turbulence: 'none', species: 'none' }];
-  if (on.word('infiniteDepth') === 'yes') return [{ name: 'front and back', is: 'joined', velocity: 'repeats', pressure: 'repeats', temperature: 'repeats', turbulence: 'repeats', species: 'repeats' }];
+  if (on.word('infiniteDepth') === 'yes' || cuts.includes('periodic-along-span')) return [{ name: 'front and back', is: 'joined', velocity: 'repeats', pressure: 'repeats', temperature: 'repeats', turbulence: 'repeats', species: 'repeats' }];
   if (on.word('flowClass') === 'body') return [{ ...plane('both side edges'), velocity: 'slips', pressure: 'no slope', temperature: 'no slope', turbulence: 'no slope', species: 'no slope' }];
   return [{ name: 'front and back walls', is: 'wall', velocity: 'sticks', pressure: 'no slope', temperature: 'adiabatic', turbulence: 'as at the other walls', species: 'tight' }];
 }

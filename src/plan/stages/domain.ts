@@ -65,7 +65,7 @@ function blockage(on: Ground): string | false {
 function cutLine(on: Ground): string {
   const word = chosen(on, 'dimension-and-cuts');
   if (word === 'none' || word === 'three-dimensional') return firstSaid(on, 'No cut is taken: the whole is computed in three directions, {cellCount} cells.', 'No cut is taken: the whole is computed in three directions.') as string;
-  return `Taken: ${listed(word.split('+').map((w) => w.replaceAll('-', ' ')))}.${said(on, ' That meshes {cutShare} of the whole in {meshDimension} directions.') || ''} ${sentence(on.choice('dimension-and-cuts')?.because)}`.trim();
+  return `Taken: ${listed(word.split('+').map((w) => w.replaceAll('-', ' ')))}.${word.includes('periodic-along-span') ? '' : said(on, ' That meshes {cutShare} of the whole in {meshDimension} directions.') || ''} ${sentence(on.choice('dimension-and-cuts')?.because)}`.trim();
 }
 
 function surroundings(on: Ground): string | false {
