@@ -9,6 +9,7 @@ import type { Collection } from '../properties/index.ts';
 import { flagsIn, spreads, type Settle, type Spread, type Workings } from '../workings/index.ts';
 import { overBudget } from './budget.ts';
 import { contradictionsOf } from './contradictions.ts';
+import { phaseLeft } from './contradictions-phase.ts';
 import { idsIn, type Ground, type StageResult } from './ground.ts';
 import { closure, planQuantity, rangesOf } from './numbers.ts';
 import { shippedRules } from './rules.ts';
@@ -94,6 +95,7 @@ export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
   const ground = groundOf(assembled, decisions, ladder);
   const built = Object.fromEntries(sectionNames.map((name) => [name, wanted.includes(name) ? stages[name](ground) : { lines: [], tables: [] }])) as Record<SectionName, StageResult>;
   const contradictions = contradictionsOf(ground);
+  const refused = phaseLeft(ground);
   const ids = closure(workings, namedIds(built, decisions, assembled, ladder));
   const spread = spreads(workings, ids);
   const range = rangesOf(workings, ranges, ids, again);
@@ -103,7 +105,7 @@ export async function plan(on: Case, options: PlanOptions): Promise<Plan> {
     program: `runbrief ${options.version}`,
     format: 1,
     case: { file: basename(on.file), title: on.title ?? '', get sha256() { return (sha256 ??= digest(on.text)); } },
-    targets: assembled.targets.map(planTarget),
+    targets: assembled.targets.map((t) => planTarget(t, refused)),
     quantities: quantitiesOf(workings, ids, spread, range),
     effects: decisions.effects,
     choices: decisions.choices,
@@ -120,8 +122,8 @@ function digest(text: string): string {
   return createHash('sha256').update(text).digest('hex');
 }
 
-function planTarget({ id, quantity, place, mean, within, computed, nearest = [] }: Assembled['targets'][number]): PlanTarget {
-  return { id, quantity, ...(place === undefined ? {} : { place }), ...(mean === undefined ? {} : { mean }), ...(within === undefined ? {} : { within: within.written }), computed, ...(nearest.length === 0 ? {} : { near: nearest }) };
+function planTarget({ id, quantity, place, mean, within, computed, nearest = [] }: Assembled['targets'][number], refused: string | undefined): PlanTarget {
+  return { id, quantity, ...(place === undefined ? {} : { place }), ...(mean === undefined ? {} : { mean }), ...(within === undefined ? {} : { within: within.written }), computed, ...(computed && refused !== undefined ? { refused } : {}), ...(nearest.length === 0 ? {} : { near: nearest }) };
 }
 
 /** Numbers the rules decide on, at their places. */

@@ -20,6 +20,8 @@ export interface PlanTarget {
   readonly mean?: string;
   readonly within?: string;
   readonly computed: boolean;
+  /** Why the number that the laws give is no estimate. */
+  readonly refused?: string;
   /** Quantities that may be meant where the words name none. */
   readonly near?: readonly string[];
 }

@@ -28,6 +28,7 @@ import { rheologyDefinitions } from './rheology.ts';
 import { nearWall } from './near-wall.ts';
 import { hazards } from './hazards.ts';
 import { phase } from './phase.ts';
+import { condensation } from './condensation.ts';
 import { properties } from './property-states.ts';
 import { results } from './results.ts';
 import { referenceFlow } from './reference-flow.ts';
@@ -55,6 +56,7 @@ export const commonDefinitions: Definition[] = [
   ...turbulence,
   ...compressibility,
   ...phase,
+  ...condensation,
   ...terms,
   ...hazards,
   ...traps,

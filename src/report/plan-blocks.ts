@@ -48,7 +48,7 @@ export function planBlocks(plan: Plan, writing: Writing, everyNumber = true): Bl
 /** What the one who decides has to know. */
 function inShort(plan: Plan, writing: Writing): Block[] {
   const number = (name: string, ...ids: readonly string[]): string[][] => (ids.every((id) => plan.quantities[id] === undefined) ? [] : [[name, ids.filter((id) => plan.quantities[id] !== undefined).map((id) => writing.number(id)).join(', '), '']]);
-  const targets = plan.targets.map((t) => [`${oneLine(t.quantity)}${t.place === undefined ? '' : ` at ${oneLine(t.place)}`}`, t.computed ? writing.number(t.quantity) : 'no hand estimate', t.within === undefined ? '' : `within ${oneLine(t.within)}`]);
+  const targets = plan.targets.map((t) => [`${oneLine(t.quantity)}${t.place === undefined ? '' : ` at ${oneLine(t.place)}`}`, t.refused !== undefined ? `no estimate: ${oneLine(t.refused)} on its way` : t.computed ? writing.number(t.quantity) : 'no hand estimate', t.within === undefined ? '' : `within ${oneLine(t.within)}`]);
   const of = (verdict: string): number => plan.effects.filter((e) => e.applies !== false && e.judged && e.verdict === verdict).length;
   return [
     heading(2, 'In short'),

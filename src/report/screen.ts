@@ -53,6 +53,7 @@ const wrap = (text: string, most: number): string => {
 function targetText(t: PlanTarget, writing: Writing): string {
   const name = `${oneLine(t.quantity)}${t.place === undefined ? '' : ` at ${oneLine(t.place)}`}`;
   if (!t.computed) return joined([name, 'no hand estimate', ...(t.near?.[0] === undefined ? [] : [`is ${t.near[0]} meant?`]), t.within === undefined ? '' : `asked within ${oneLine(t.within)}`], room, '; ');
+  if (t.refused !== undefined) return joined([`${name} no estimate`, `${oneLine(t.refused)} on its way`, t.within === undefined ? '' : `asked within ${oneLine(t.within)}`], room, '; ');
   return joined([
     `${name} ${writing.number(t.quantity)}`,
     t.within === undefined ? '' : `asked within ${oneLine(t.within)}`,
@@ -84,11 +85,11 @@ function effectParts(plan: Plan, writing: Writing): Part[] {
   ];
 }
 
-/** From the fullest to the shortest: the price stays longest, then the margin. */
+/** From the fullest to the shortest: the price stays longest, then the margin; one in kelvins, which is long, goes before its price. */
 function wordingsOf(e: PlanEffect, price: string, writing: Writing): string[] {
   const full = decidingText(e, writing);
   const plain = decidingText(e, writing, { spread: false });
-  return [`${full}${price}`, `${plain}${price}`, `${decidingText(e, writing, { spread: false, limit: false })}${price}`, full, plain];
+  return [`${full}${price}`, `${plain}${price}`, `${decidingText(e, writing, { spread: false, limit: false })}${price}`, ...(price === '' || e.deciding?.marginKind !== 'difference' ? [] : [`${decidingText(e, writing, { spread: false, bare: true })}${price}`]), full, plain];
 }
 
 /** The price without the name of the target where there is one target alone, else with its symbol. */

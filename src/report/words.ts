@@ -16,6 +16,8 @@ export function factorText(e: PlanEffect): string {
 
 /** What may be left off where room is short. */
 export interface Shorter {
+  /** The number alone, without limit or margin. */
+  readonly bare?: true;
   readonly spread?: false;
   readonly limit?: false;
 }
@@ -27,6 +29,7 @@ export function decidingText(e: PlanEffect, writing: Writing, shorter: Shorter =
   const symbol = writing.symbol(d.quantity);
   const known = writing.number(d.quantity);
   const number = known === 'not known' ? few(d.value) : shorter.spread === false ? known.replace(/ \+\/- .*$/, '') : known;
+  if (shorter.bare === true) return `${symbol} ${number}`;
   const limit = (value: number): string => writing.like(d.quantity, value);
   // Moved by its spread alone, it lies outside the limits: the spread is what is to be seen.
   if (e.movedBy === 'spread' && shorter.spread !== false) return `${symbol} ${number}, reaching ${limit(e.base === 'include' ? d.includeAt : d.leaveOutAt)}`;

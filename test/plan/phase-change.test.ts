@@ -77,3 +77,60 @@ wall: { temperature: ${hot} }
     expect(p.sections.cautions.lines.map((l) => l.text).join(' ')).toMatch(/Steam and boiling.*it may flash/);
   });
 });
+
+describe('condensation from humid air', () => {
+  it('brings its latent heat to the wall, with its price', async () => {
+    // By hand: p_v = 0.6 x 3355 = 2013 Pa, at the wall 1595 Pa; Y = 0.01245 and 0.00985; D(293 K) = 2.42e-5, Le = 0.88, Le^(-2/3) = 1.086;
+    // s_L = (2.468e6/1018) x 1.086 x 0.002623/12 = 0.575. Of 152 W 92 W are radiation (5.14 W/(m^2 K)), so 0.575 x 60 W = 34 W more: F = 1.226, price -18 %.
+    const p = await planOf(roomAir);
+    expect(p.quantities['latentShare']?.value).toBeCloseTo(0.575, 1);
+    expect(p.quantities['heatRate']?.value).toBeGreaterThan(-190);
+    expect(p.quantities['heatRate']?.value).toBeLessThan(-183);
+    const effect = p.effects.find((e) => e.id === 'condensation');
+    expect(effect).toMatchObject({ verdict: 'include', price: { of: 'heatRate' } });
+    expect(p.quantities['condensationFactorHeat']?.value).toBeCloseTo(1.226, 1);
+    expect(p.sections.cautions.lines.map((l) => l.text).join(' ')).toContain('Condensation brings {latentShare}');
+  });
+
+  it('is none on a wall above the dew point, 17.6 degC', async () => {
+    const p = await planOf(roomAir.replace('14 degC', '19 degC'));
+    expect(p.quantities['condensationFactorHeat']?.value ?? 1).toBe(1);
+  });
+});
+
+describe('a stream that leaves its phase on the way', () => {
+  const pipe = (more: { inlet?: string; wall?: string; length?: string; pressure?: string }): string => `format: 1
+title: A pipe
+targets: [{ quantity: outletTemperature, within: 1 K }]
+flow: pipe
+sizes: { diameter: 25 mm, length: ${more.length ?? '8 m'} }
+inclination: horizontal
+fluid: { material: water, pressure: ${more.pressure ?? '1 bar abs'} }
+inlet: { ${more.inlet ?? 'speed: 20 m/s, temperature: 165 degC'} }
+wall: { ${more.wall ?? 'temperature: 20 degC'} }
+`;
+  const told = async (text: string): Promise<{ first: string | undefined; refused: string | undefined; caution: string | undefined }> => {
+    const p = await planOf(text);
+    return { first: p.contradictions[0]?.code, refused: p.targets[0]?.refused, caution: p.sections.cautions.lines[0]?.text };
+  };
+  it.each([
+    // Steam at 1 bar condenses at 99.6 degC.
+    ['condenses-on-the-way', pipe({})],
+    // rho U A = 998 x 0.1 x 4.909e-4 = 0.049 kg/s; 100 kW/m^2 over 0.628 m^2 = 63 kW raise it by 306 K: far above 100 degC.
+    ['boils-on-the-way', pipe({ inlet: 'speed: 0.1 m/s, temperature: 20 degC', wall: 'heatFlux: 100 kW/m^2' })],
+    // -7.5 kW/m^2 over 0.628 m^2 = -4712 W at 0.049 kg/s x 4186 J/(kg K) cool it by 23.0 K: to -3 degC.
+    ['freezes-on-the-way', pipe({ inlet: 'speed: 0.1 m/s, temperature: 20 degC', wall: 'heatFlux: -7.5 kW/m^2' })],
+  ])('%s: no single-phase estimate is given, and it is told first', async (code, text) => {
+    const out = await told(text);
+    expect(out.first).toBe(code);
+    expect(out.refused).toMatch(/condenses|boils|freezes/);
+    expect(out.caution).toMatch(/^No estimate is given: the (?:vapour|liquid) .* on its way/);
+  });
+  it.each([
+    // Hot walls keep the steam dry; 5 kW/m^2 raise the water by 15 K.
+    pipe({ wall: 'temperature: 150 degC' }),
+    pipe({ inlet: 'speed: 0.1 m/s, temperature: 20 degC', wall: 'heatFlux: 5 kW/m^2' }),
+  ])('and nothing where the phase holds', async (text) => {
+    expect(await told(text)).toMatchObject({ first: undefined, refused: undefined });
+  });
+});

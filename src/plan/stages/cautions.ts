@@ -1,5 +1,6 @@
 import { lines, type Ground, type StageResult } from '../ground.ts';
 import { overBudget } from '../budget.ts';
+import { phaseLeft } from '../contradictions-phase.ts';
 import { hazardsOf } from '../hazards.ts';
 import { listed, nameOf } from '../say.ts';
 import { keeps, said } from '../when.ts';
@@ -49,6 +50,8 @@ function idle(on: Ground): string[] {
 /** Effects that the model carries and the estimates do not hold. */
 function notCounted(on: Ground): (string | false)[] {
   return [
+    keeps(on, 'condensation') && !on.has('latentShare') && said(on, 'Condensation is in none of these numbers: the dew point is {dewTemperature}, the coldest place {lowestTemperature}. Its heat comes on top of the heat printed here; a film of pure vapour passes ten to a hundred times as much as dry vapour (common practice).'),
+    keeps(on, 'condensation') && (on.number('latentShare') ?? 0) > 0 && said(on, 'Condensation brings {latentShare} of the convective heat on top of it. It is in the heat from the walls, not in the heat-transfer coefficient or the Nusselt number.'),
     keeps(on, 'heat-of-reaction') && said(on, 'The heat of the reaction is in none of the temperatures here: up to {adiabaticReactionRise} where all of it stays in the fluid.'),
     on.word('has.speciesWall') === 'yes' && on.word('imposedFlow') === 'yes' && (keeps(on, 'buoyancy') || keeps(on, 'buoyancy-driven')) && said(on, 'The Sherwood number {sherwood} is that of the stream alone: what weight does to it is not counted.'),
   ];
@@ -58,6 +61,8 @@ function notCounted(on: Ground): (string | false)[] {
 function opening(on: Ground): Line {
   const main = on.assembled.targets.find((t) => t.computed);
   const estimate = main === undefined ? 'none of the targets has an estimate to hold it against' : `the ${nameOf(on, main.quantity)} is put at {${main.quantity}}${targetSpreads(on.assembled).some((s) => s.id === main.id) ? '' : ', without any spread because no input carries one'}`;
+  const phase = phaseLeft(on);
+  if (phase !== undefined) return lines(`No estimate is given: ${phase} on its way, and single-phase laws do not hold. Not covered.`)[0] as Line;
   const rungs = on.ladder.length;
   const known = rungs === 0 ? 'no known answer lies on the way to it' : rungs === 1 ? `the known answer ${on.ladder[0]?.id} is met` : `the ${rungs} known answers of its ladder are met, from ${on.ladder[0]?.id} on`;
   return lines(`This is an estimate made before a run: ${estimate}. ${rungs === 0 ? `A simulation of it is no evidence by itself: ${known}.` : `A simulation is no evidence until ${known}.`}`)[0] as Line;
