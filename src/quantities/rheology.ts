@@ -46,9 +46,13 @@ export const rheologyDefinitions: Definition[] = [
   quantity('rheologySpread', { symbol: 'S_mu', name: 'spread of the viscosity from a tenth of the wall shear to all of it', unit: '1' }, each(({ word, needs, viscosity, formula, source, ...more }) => [
     { ...ratio(word, more), needs: ['wallShearRate', ...needs], when: { rheologyLaw: word }, value: (of) => Math.abs(viscosity(of, 0.1 * (of['wallShearRate'] as number)) / viscosity(of, of['wallShearRate'] as number) - 1), formula: `S_mu = |mu(0.1 g_w) - mu(g_w)|/mu(g_w), mu = ${formula}`, source },
   ])),
-  quantity('rheologyFactorShear', { symbol: 'F_mu', name: 'wall shear with the law over that of its viscosity at the nominal shear rate', unit: '1' }, [
+  quantity('rheologyFactorShear', { symbol: 'F_mu', name: 'wall shear with the law over that of a constant viscosity, the one of the law at the nominal shear rate 8 U/D_h', unit: '1' }, [
     ...each(({ word, needs, viscosity, formula, source, ...more }) => [{ ...ratio(word, more), needs: ['wallShearRate', 'nominalShearRate', ...needs], when: { rheologyLaw: word, ...inside }, value: (of) => (viscosity(of, of['wallShearRate'] as number) * (of['wallShearRate'] as number)) / (viscosity(of, of['nominalShearRate'] as number) * (of['nominalShearRate'] as number)), formula: `F_mu = tau(g_w)/tau(g_n), tau = g ${formula}`, source: `${rabinowitsch}; ${source}` }]),
     way({ needs: [], when: { rheologyLaw: 'newtonian' }, value: () => 1, formula: 'F_mu = 1', source: 'one viscosity' }),
+  ]),
+  quantity('rheologyFactorZeroShear', { symbol: 'F_0', name: 'wall shear with the law over that of its zero-shear viscosity', unit: '1' }, [
+    way({ needs: ['apparentViscosity', 'rheology.zeroShearViscosity'], when: { rheologyLaw: ['carreau', 'cross'], ...inside }, value: (of) => of.apparentViscosity / of['rheology.zeroShearViscosity'], formula: 'F_0 = tau(g_w)/(mu_0 g_n) = mu_e/mu_0', source: 'Hagen-Poiseuille with mu_0 for the constant viscosity' }),
+    way({ needs: [], when: { rheologyLaw: 'newtonian' }, value: () => 1, formula: 'F_0 = 1', source: 'one viscosity' }),
   ]),
   quantity('reynoldsMetznerReed', { symbol: 'Re_MR', name: 'Reynolds number of Metzner and Reed', unit: '1' }, [
     way({ needs: ['density', 'speed', 'hydraulicDiameter', 'rheology.consistency', 'rheology.index'], when: { rheologyLaw: 'power-law', ...inside }, ...withIndex, value: (of) => metznerReedReynolds({ density: of.density, speed: of.speed, diameter: of.hydraulicDiameter, consistency: of['rheology.consistency'], index: of['rheology.index'] }), formula: 'Re_MR = rho U^(2-n) D^n/(8^(n-1) K ((3n+1)/(4n))^n)', source: 'Metzner and Reed, AIChE J. 1 (1955) 434' }),

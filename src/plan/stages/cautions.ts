@@ -52,6 +52,7 @@ function notCounted(on: Ground): (string | false)[] {
   return [
     keeps(on, 'condensation') && !on.has('latentShare') && said(on, 'Condensation is in none of these numbers: the dew point is {dewTemperature}, the coldest place {lowestTemperature}. Its heat comes on top of the heat printed here; a film of pure vapour passes ten to a hundred times as much as dry vapour (common practice).'),
     keeps(on, 'condensation') && (on.number('latentShare') ?? 0) > 0 && said(on, 'Condensation brings {latentShare} of the convective heat on top of it. It is in the heat from the walls, not in the heat-transfer coefficient or the Nusselt number.'),
+    on.word('has.rheology') === 'yes' && 'Elasticity is unknown: the law of the case is inelastic and its relaxation time counts as zero. Polymer solutions and melts with a relaxation time near the time of the flow, L/U, need another model.',
     keeps(on, 'heat-of-reaction') && said(on, 'The heat of the reaction is in none of the temperatures here: up to {adiabaticReactionRise} where all of it stays in the fluid.'),
     on.word('has.speciesWall') === 'yes' && on.word('imposedFlow') === 'yes' && (keeps(on, 'buoyancy') || keeps(on, 'buoyancy-driven')) && said(on, 'The Sherwood number {sherwood} is that of the stream alone: what weight does to it is not counted.'),
   ];
