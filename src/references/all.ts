@@ -1,4 +1,5 @@
 export { poiseuillePipe } from './poiseuille-pipe.ts';
+export { generalizedNewtonianPipe } from './generalized-newtonian-pipe.ts';
 export { poiseuilleChannel } from './poiseuille-channel.ts';
 export { poiseuilleDuct } from './poiseuille-duct.ts';
 export { poiseuilleAnnulus } from './poiseuille-annulus.ts';
