@@ -37,7 +37,7 @@ const scales: Definition[] = [
 ];
 
 const regime: Definition[] = [
-  ways('regimeGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => reynolds / 2, symbol: 'Re_b', formula: 'Re_b = U H/nu', source: 'definition' })]),
+  ways('regimeGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => reynolds / 2, symbol: 'Re_H', formula: 'Re_H = U H/nu', source: 'definition' })]),
   ways('regimeLow', [way({ needs: [], scatter: 0.1, value: () => 1300, formula: 'Re_lo = 1300', source: 'Patel and Head, J. Fluid Mech. 38 (1969) 181; Carlson, Widnall and Peeters, J. Fluid Mech. 121 (1982) 487' })]),
   ways('regimeHigh', [way({ needs: [], scatter: 0.1, value: () => 3000, formula: 'Re_hi = 3000', source: 'Patel and Head, J. Fluid Mech. 38 (1969) 181' })]),
   ways('unsteadyGroup', [way({ needs: ['reynolds'], value: ({ reynolds }) => (0.75 * reynolds) / 2, symbol: 'Re_c', formula: 'Re on 1.5 U and H/2', source: 'definition' })]),

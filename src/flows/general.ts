@@ -93,8 +93,8 @@ const extents: Definition[] = [
 export const general: Flow = {
   id: 'general',
   title: 'A flow known by one length and one speed',
-  lengthIs: 'the length given, over which the speed changes most',
-  speedIs: 'the speed given, or the buoyant speed in still fluid',
+  lengthIs: 'length given, over which the speed changes most',
+  speedIs: 'speed given, or the buoyant speed in still fluid',
   sizes: [
     { key: 'length', name: 'length over which the speed changes most', unit: 'm' },
     { key: 'volume', name: 'volume of the fluid', unit: 'm^3', optional: true },

@@ -151,11 +151,22 @@ describe('question, physics, properties, documentation', () => {
     for (const row of table?.rows.slice(0, 5) ?? []) {
       expect(row[5]).toMatch(/%$/);
       expect(row[6]).toMatch(/ K to /);
-      expect((row[7] as string).length).toBeGreaterThan(5);
+      // By number, set below the tables.
+      const sources = p.sections.properties.tables.find((t) => t.title === 'Sources of these properties');
+      for (const number of (row[7] as string).split(' ')) expect(sources?.rows.find((r) => r[0] === number)?.[1]).toMatch(/.{6}/);
     }
     const constant = (name: string): unknown => table?.rows.find((r) => r[0] === name)?.[4];
     expect(constant('density')).toBe('yes');
     expect(constant('dynamic viscosity')).toBe('no');
+  });
+
+  it('name the group of the regime with the length it is formed on: half of Re on twice the gap', async () => {
+    const p = await planOf('format: 1\ntitle: t\ntargets: [{ quantity: wallTemperature, within: 3 K }]\nflow: channel\nsizes: { gap: 3 mm, length: 0.4 m, width: 60 mm }\nfluid: { material: water, pressure: 2 bar abs }\ninlet: { speed: 0.5 m/s, temperature: 80 degC }\nwall: { heatFlux: 60 kW/m^2 }\n');
+    const [group, reynolds] = ['regimeGroup', 'reynolds'].map((id) => p.quantities[id]?.value as number);
+    expect(p.quantities['regimeGroup']?.symbol).toBe('Re_H');
+    expect((group as number) / (reynolds as number)).toBeCloseTo(0.5, 12);
+    expect(linesOf(p, 'physics')[0]).toContain('its group (Re_H = U H/nu) is {regimeGroup}');
+    expect(linesOf(p, 'physics')[0]).toContain('{length}, the length scale (twice the gap)');
   });
 
   it('list assumptions that decisions rest on, and inputs from which nothing follows', async () => {

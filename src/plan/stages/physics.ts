@@ -1,4 +1,4 @@
-import { spreads } from '../../workings/index.ts';
+import { spreads, stepOf } from '../../workings/index.ts';
 import { lines, type Ground, type StageResult } from '../ground.ts';
 import { called, capital, effectsOf, listed, nameOf, noticeable, plain, priceText } from '../say.ts';
 import type { Cell, Check, Line, PlanEffect, Table } from '../types.ts';
@@ -33,9 +33,11 @@ export function physics(on: Ground): StageResult {
 function regimeLine(on: Ground): Line[] {
   const { flow } = on.assembled;
   const regime = on.word('regime');
-  if (regime === undefined) return lines(`Whether the flow is laminar or turbulent cannot be told: {speed} and the fluid are needed on the length scale, the ${flow.lengthIs}.`.replace('{speed}', 'the speed'));
+  if (regime === undefined) return lines(`Whether the flow is laminar or turbulent cannot be told: {speed} and the fluid are needed on the length scale (${flow.lengthIs}).`.replace('{speed}', 'the speed'));
   if (!on.has('regimeGroup')) return lines(`The flow is taken as ${regime}.`);
-  return lines(`The flow is ${regime}: the group {regimeGroup} stands against {regimeLow} below which it is laminar and {regimeHigh} from which it is turbulent, formed with the ${flow.lengthIs}${on.has('speed') ? ` {length} and the ${flow.speedIs} {speed}` : ''}.`);
+  const by = stepOf(on.assembled.workings, 'regimeGroup')?.formula ?? '';
+  const scales = on.has('speed') && on.has('length') ? ` The other groups stand on {length}, the length scale (${flow.lengthIs}), and {speed}, the speed scale (${flow.speedIs})${on.has('referenceTemperature') ? '; plain ones hold at {referenceTemperature}' : ''}.` : '';
+  return lines(`The flow is ${regime}: its group (${by}) is {regimeGroup}, laminar below {regimeLow}, turbulent from {regimeHigh}.${scales}`);
 }
 
 function keptLines(on: Ground, judged: readonly PlanEffect[]): Line[] {

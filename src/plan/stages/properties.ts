@@ -20,7 +20,24 @@ const others = { gas: ['molarMass', 'gasConstant', 'isentropicExponent', 'speedO
 
 /** Every property at its state, with source, uncertainty and range, and whether it may be held constant. */
 export function properties(on: Ground): StageResult {
-  return { lines: [...stateLines(on), ...variation(on), ...exponents(on), ...effectOnTarget(on), ...phaseLines(on)], tables: [stateTable(on), ...otherTable(on), ...wallTable(on), ...carriedTables(on)] };
+  return { lines: [...stateLines(on), ...variation(on), ...exponents(on), ...effectOnTarget(on), ...phaseLines(on)], tables: numbered([stateTable(on), ...otherTable(on), ...wallTable(on), ...carriedTables(on)]) };
+}
+
+/** Sources set below by number, each once: beside the values they would make a narrow column of many lines. */
+function numbered(tables: readonly Table[]): Table[] {
+  const sources: string[] = [];
+  const numberOf = (text: string): string => {
+    const parts = text.split('; ');
+    // What follows from others has theirs.
+    if (parts.length > 1 && parts.every((part) => sources.includes(part))) return parts.map((part) => sources.indexOf(part) + 1).sort((a, b) => a - b).join(' ');
+    if (text !== '' && !sources.includes(text)) sources.push(text);
+    return text === '' ? '' : String(sources.indexOf(text) + 1);
+  };
+  const out = tables.map((table) => {
+    const at = table.columns.indexOf('source');
+    return at < 0 ? table : { ...table, rows: table.rows.map((row) => row.map((cell, k) => (k === at && typeof cell === 'string' ? numberOf(cell) : cell))) };
+  });
+  return sources.length === 0 ? out : [...out, { title: 'Sources of these properties', columns: ['number', 'source'], rows: sources.map((text, i) => [String(i + 1), text]) }];
 }
 
 const heated = (on: Ground): boolean => on.word('energySolved') === 'yes';
