@@ -17,11 +17,11 @@ interface Line {
  *
  * @param vocabulary  the keys there are
  * @param flow        the flow
- * @param answers     targets that are estimated for it
+ * @param answers     targets that are estimated for it; false where the flow has no laws yet
  * @returns           the text of the file
  * @throws            {Problem} unknown-flow
  */
-export function caseTemplate(vocabulary: Vocabulary, flow: string, answers: readonly string[] = []): string {
+export function caseTemplate(vocabulary: Vocabulary, flow: string, answers: readonly string[] | false = []): string {
   const words = own(vocabulary.flows, flow);
   if (words === undefined) {
     const valid = Object.keys(vocabulary.flows);
@@ -34,7 +34,8 @@ export function caseTemplate(vocabulary: Vocabulary, flow: string, answers: read
     `## ${words.title}: a case for runbrief.`,
     `## Fill in what stands as ${blank}. Take the "# " off a line that matters; leave out what does not.`,
     '## A quantity is a number with a unit, also with a spread (0.40 m/s +/- 5 %) or as a range (0.2 .. 0.6 m/s).',
-    ...broken(answers).map((text, at) => `## ${at === 0 ? 'Targets estimated here: ' : '  '}${text}`),
+    ...(answers === false ? ['## No laws are built for this flow yet: plan refuses it. The flow general, with a length and a speed, judges by analogy.'] : []),
+    ...broken(answers === false ? [] : answers).map((text, at) => `## ${at === 0 ? 'Targets estimated here: ' : '  '}${text}`),
     '',
   ];
   return `${[...intro, ...form.lines(vocabulary.keys, '', 0).map((line) => line.text)].join('\n')}\n`;

@@ -2,7 +2,7 @@ import about from '../../package.json' with { type: 'json' };
 import { vocabulary, type Assembled } from '../assemble/index.ts';
 import { readCaseFile } from '../case/index.ts';
 import { ladderDetails } from '../ladder/index.ts';
-import { fluidRange, plan, propertyFits, settleCase } from '../plan/index.ts';
+import { fluidRange, noPropertyTable, plan, propertyFits, settleCase } from '../plan/index.ts';
 import { tableOver } from '../properties/index.ts';
 import { evaluateReference } from '../references/index.ts';
 import { asText, fitsText, materialCsv, planBlocks, planDocument, planFiles, screen, writingOf, type PlanTables } from '../report/index.ts';
@@ -15,7 +15,7 @@ export default class Plan extends Base {
   static override examples = [
     { command: 'runbrief plan line.case.yaml', description: 'the plan on one screen' },
     { command: 'runbrief plan line.case.yaml --full', description: 'every section, decision and number as text' },
-    { command: 'runbrief plan line.case.yaml --into line', description: 'plan.md, plan.html, plan.json, checklist.md, near-wall.csv, properties.csv, property-fits.txt and the tables of the ladder' },
+    { command: 'runbrief plan line.case.yaml --into line', description: 'plan.md, plan.html, plan.json, checklist.md, near-wall.csv and the tables of the ladder; properties.csv and property-fits.txt of a known fluid whose temperature changes' },
     { command: 'runbrief plan line.case.yaml --json', description: 'the plan for other programs, numbers in SI' },
   ];
   static override args = { file: Args.string({ required: true, description: 'the case file; `runbrief template pipe` writes one to fill in' }) };
@@ -42,6 +42,8 @@ export default class Plan extends Base {
     if (flags.into !== undefined) {
       const files = planFiles(made, on, tablesOf(settled.assembled));
       for (const path of writeInto(flags.into, files, flags.force)) this.remark(`written: ${path}`);
+      const why = noPropertyTable(settled.assembled);
+      if (why !== undefined) this.remark(`not written: properties.csv, as ${why}`);
     }
     return this.jsonEnabled() ? planDocument(made, writing) : made;
   }

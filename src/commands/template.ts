@@ -19,9 +19,10 @@ export default class Template extends Base {
 
   async run(): Promise<object> {
     const { args, flags } = await this.parse(Template);
-    const text = caseTemplate(vocabulary, args.flow, flows[args.flow]?.answers);
+    const text = caseTemplate(vocabulary, args.flow, flows[args.flow]?.answers ?? false);
     if (flags.into === undefined) this.say(text.trimEnd());
     else write(flags.into, text, flags.force);
+    if (flows[args.flow] === undefined) this.remark(`plan cannot estimate ${args.flow} yet; it does ${Object.keys(flows).join(', ')}`);
     if (flags.into !== undefined) this.remark(`written: ${flags.into}`);
     return { flow: args.flow, text, ...(flags.into === undefined ? {} : { file: flags.into }) };
   }

@@ -1,6 +1,6 @@
 import { contradiction, without } from './contradiction.ts';
 import type { Ground } from './ground.ts';
-import { inWords, listed } from './say.ts';
+import { aFlow, inWords, listed } from './say.ts';
 import type { Contradiction } from './types.ts';
 
 /** Choices the case states, against the verdicts and the numbers of the plan. */
@@ -47,7 +47,7 @@ function* cuts(on: Ground): Generator<Contradiction> {
   const plane = cut.filter((c) => c === 'two-dimensional' || c === 'axisymmetric');
   if (plane.length === 2) yield contradiction(on, 'two-planes', 'choices.cuts', { says: 'two-dimensional and axisymmetric are both chosen', effect: 'a run is one or the other', cure: 'keep one' });
   const fits: readonly string[] = on.assembled.flow.cuts.map((c) => c.option);
-  for (const c of cut) if (fits.length > 0 && !fits.includes(c)) yield contradiction(on, 'cut-does-not-fit', 'choices.cuts', { says: `${c} is chosen for a ${on.assembled.flow.title.toLowerCase()}`, effect: 'its shape has no such plane, axis or repeat: another body would be computed', cure: `one of ${listed(fits, 'or')}` });
+  for (const c of cut) if (fits.length > 0 && !fits.includes(c)) yield contradiction(on, 'cut-does-not-fit', 'choices.cuts', { says: `${c} is chosen for ${aFlow(on)}`, effect: 'its shape has no such plane, axis or repeat: another body would be computed', cure: `one of ${listed(fits, 'or')}` });
   const [one] = plane;
   if (one !== undefined && verdict(on, 'three-dimensionality') === 'include') yield contradiction(on, 'flat-cut', 'choices.cuts', { says: `the cut is ${one} while the flow is three-dimensional: ${on.effect('three-dimensionality').because}`, effect: 'what happens across the plane is suppressed and the result converges to another flow', cure: 'compute the third direction, half of it where one mirror plane remains' });
   const mirrors = cut.filter((c) => c.startsWith('mirror-'));

@@ -1,7 +1,7 @@
 import { overBudget } from './budget.ts';
 import { contradiction, without } from './contradiction.ts';
 import type { Ground } from './ground.ts';
-import { inWords, nameOf, percent } from './say.ts';
+import { aFlow, inWords, nameOf, percent } from './say.ts';
 import type { Contradiction } from './types.ts';
 
 const near = 0.01;
@@ -133,7 +133,7 @@ function* targets(on: Ground): Generator<Contradiction> {
     if (id === 'outletTemperature' && on.word('energySolved') === 'yes' && on.number('temperatureDifference') === 0 && on.number('outletTemperature') === on.number('inletTemperature')) {
       yield contradiction(on, 'outlet-equals-inlet', t.id, { says: `the outlet temperature is asked where nothing differs from ${inWords(on, 'inletTemperature')}`, effect: 'the answer equals the inlet', cure: 'give a wall temperature, a flux or a coefficient' });
     }
-    if (id === 'pressureDrop' && ['body', 'enclosure'].includes(on.word('flowClass') ?? '')) yield contradiction(on, 'pressure-drop-of-an-open-flow', t.id, { says: `a pressure drop is asked of a ${flow.title.toLowerCase()}`, effect: 'an open or closed space has no drop along a passage', cure: 'ask for a drag or a pressure coefficient' });
+    if (id === 'pressureDrop' && ['body', 'enclosure'].includes(on.word('flowClass') ?? '')) yield contradiction(on, 'pressure-drop-of-an-open-flow', t.id, { says: `a pressure drop is asked of ${aFlow(on)}`, effect: 'an open or closed space has no drop along a passage', cure: 'ask for a drag or a pressure coefficient' });
   }
 }
 

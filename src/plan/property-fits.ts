@@ -17,6 +17,13 @@ export function fluidRange(assembled: Assembled): FluidRange | undefined {
   return { fluid, range: { pressure, ...(humidity === undefined ? {} : { humidity }), ...(composition === undefined ? {} : { composition }), over: { of: 'temperature', from, to }, assumed: [] } };
 }
 
+/** Why there is no table of the properties over the temperatures of the case; undefined where there is one. */
+export function noPropertyTable(assembled: Assembled): string | undefined {
+  if (fluidRange(assembled) !== undefined) return undefined;
+  if (assembled.fluid === undefined) return 'the fluid is given by constants';
+  return assembled.workings.get('lowestTemperature') === undefined ? 'the temperatures of the case are not known' : 'the case has one temperature';
+}
+
 /** Share of its own uncertainty that a fit may add to a property, and the share of the span that it covers beyond each end. */
 const share = 1 / 3;
 const beyond = 0.1;

@@ -33,6 +33,12 @@ export function nameOf(on: Ground, id: string): string {
   return workings.slots[workings.index.get(id) ?? -1]?.node.about.name ?? id;
 }
 
+/** What the case describes, with its article: `a round pipe`, `a flow known by one length and one speed`. */
+export function aFlow(on: Ground): string {
+  const title = on.assembled.flow.title.toLowerCase();
+  return title.startsWith('a ') ? title : `a ${title}`;
+}
+
 /** A reason as a sentence of its own: capital letter and full stop. */
 export const sentence = (text: string | undefined): string => (text === undefined || text === '' ? '' : `${text.charAt(0).toUpperCase()}${text.slice(1).replace(/\.$/, '')}.`);
 

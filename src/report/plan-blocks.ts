@@ -1,7 +1,7 @@
 import { sectionNames, type Cell, type Check, type Plan, type PlanEffect, type SectionName } from '../plan/index.ts';
 import { inputsInWords } from '../problems/index.ts';
 import { heading, list, paragraph, tableOf, type Block } from './blocks.ts';
-import { cautionLines, decidingText, factorText, priceText, titled } from './words.ts';
+import { cautionLines, decidingText, factorText, pricedOf, priceText, titled } from './words.ts';
 import { oneLine, type Writing } from './writing.ts';
 
 const titles: Readonly<Record<SectionName, string>> = {
@@ -91,8 +91,8 @@ function decisionBlocks(plan: Plan, writing: Writing): Block[] {
   const notBuilt = plan.effects.filter((e) => !e.judged);
   return [
     heading(2, 'Every decision'),
-    ...tableOf('Effects that can occur', ['effect', 'verdict', 'decided by', 'margin', 'price'], judged.map((e) => [e.id, e.verdict, decidingText(e, writing), factorText(e), e.price === undefined ? '' : priceText(e.price)])),
-    ...judged.flatMap((e) => [heading(3, `${oneLine(e.title)} (${e.id}): ${e.verdict}`), ...list(effectNotes(e, writing))]),
+    ...tableOf('Effects that can occur', ['effect', 'verdict', 'decided by', 'margin', 'price'], judged.map((e) => [e.id, e.verdict, decidingText(e, writing), factorText(e), e.price === undefined ? '' : priceText(e.price, pricedOf(e.price, plan))])),
+    ...judged.flatMap((e) => [heading(3, `${oneLine(e.title)} (${e.id}): ${e.verdict}`), ...list(effectNotes(e, plan, writing))]),
     ...tableOf('Effects that cannot occur here', ['effect', 'why not'], absent.map((e) => [e.id, writing.fill(e.because)])),
     ...(notBuilt.length === 0 ? [] : [paragraph(`Not judged by this program, to be judged by hand: ${notBuilt.map((e) => e.id).join(', ')}.`)]),
     ...tableOf('Choices', ['choice', 'taken', 'because'], plan.choices.map((c) => [c.id, `${c.chosen}${c.given === true ? ' (given)' : ''}${c.advised === undefined ? '' : `, advised ${c.advised}`}`, writing.fill(c.because)])),
@@ -100,11 +100,11 @@ function decisionBlocks(plan: Plan, writing: Writing): Block[] {
   ];
 }
 
-function effectNotes(e: PlanEffect, writing: Writing): string[] {
+function effectNotes(e: PlanEffect, plan: Plan, writing: Writing): string[] {
   return [
     writing.fill(e.because),
     ...(e.movedBy === undefined ? [] : [`Moved by its ${e.movedBy} from ${e.base ?? 'another verdict'}.`]),
-    ...(e.prices ?? []).map((p) => `Price: ${priceText(p)} (${oneLine(p.formula)}).`),
+    ...(e.prices ?? []).map((p) => `Price: ${priceText(p, pricedOf(p, plan))} (${oneLine(p.formula)}).`),
     ...(e.flipsAt ?? []).map((f) => `Becomes ${f.verdict} at ${f.path} = ${writing.like(f.path, f.value, f.unit)}.`),
     ...(e.check === undefined ? [] : [`Check: ${writing.fill(e.check)}.`]),
     ...(e.firstRun === undefined ? [] : [e.firstRun === 'keep' ? 'The first run keeps it.' : 'The first run leaves it out.']),

@@ -3,7 +3,7 @@ import { inputsInWords } from '../problems/index.ts';
 import { broken } from './columns.ts';
 import { cut, fitted, fitting, gutter, joined, noPaint, type Paint, type Part } from './fit.ts';
 import { setUpParts } from './screen-set-up.ts';
-import { cautionLines, decidingText, factorText, percent, priceText, titled } from './words.ts';
+import { cautionLines, decidingText, factorText, percent, pricedOf, priceText, titled } from './words.ts';
 import { oneLine, type Writing } from './writing.ts';
 
 /** Columns and lines that a screen has at least. */
@@ -93,7 +93,10 @@ function wordingsOf(e: PlanEffect, price: string, writing: Writing): string[] {
 }
 
 /** The price without the name of the target where there is one target alone, else with its symbol. */
-const shortPrice = (price: NonNullable<PlanEffect['price']>, plan: Plan, writing: Writing): string => (plan.targets.length === 1 && plan.targets[0]?.quantity === price.of ? priceText(price).replace(/ of \S+$/, '') : priceText({ ...price, of: writing.symbol(price.of) }));
+const shortPrice = (price: NonNullable<PlanEffect['price']>, plan: Plan, writing: Writing): string => {
+  const of = pricedOf(price, plan);
+  return plan.targets.length === 1 && plan.targets[0]?.quantity === of ? priceText(price, of).replace(/ of \S+$/, '') : priceText(price, writing.symbol(of));
+};
 
 /** Effects nearest to their limit first: these are the ones to look at. */
 const closeness = (e: PlanEffect): number => e.deciding?.margin ?? Infinity;

@@ -11,8 +11,12 @@ const few = (value: number): string => printNumber({ value, unit: '1', digits: 2
 export function factorText(e: PlanEffect): string {
   const d = e.deciding;
   if (d?.margin === undefined) return '';
-  return d.marginKind === 'difference' ? printNumber({ value: d.margin, unit: 'K', digits: 2 }) : `${few(d.margin)} times`;
+  if (atLimit(e)) return 'at its limit';
+  return d.marginKind === 'difference' ? printNumber({ value: d.margin, unit: 'K', digits: 2 }) : `${printNumber({ value: d.margin, unit: '1', digits: d.margin < 1.05 ? 3 : 2 })} times`;
 }
+
+/** So near that a factor would read as 1. */
+const atLimit = ({ deciding: d }: PlanEffect): boolean => d?.margin !== undefined && (d.marginKind === 'difference' ? d.margin === 0 : d.margin < 1.005);
 
 /** What may be left off where room is short. */
 export interface Shorter {
@@ -36,13 +40,17 @@ export function decidingText(e: PlanEffect, writing: Writing, shorter: Shorter =
   if (e.verdict === 'borderline' && d.leaveOutAt !== d.includeAt) return `${symbol} ${number}, limits ${limit(d.leaveOutAt)} and ${limit(d.includeAt)}`;
   const nearer = limit(e.verdict === 'leave-out' ? d.leaveOutAt : d.includeAt);
   const margin = factorText(e);
+  if (atLimit(e) && e.verdict !== 'borderline') return `${symbol} ${number}, at its limit ${nearer}`;
   if (shorter.limit === false && margin !== '' && e.verdict !== 'borderline') return `${symbol} ${number}, ${margin} past its limit`;
   return `${symbol} ${number}, ${margin === '' || e.verdict === 'borderline' ? `limit ${nearer}` : `${margin} past ${nearer}`}`;
 }
 
-/** What leaving an effect out costs a target. */
-export function priceText(p: Price): string {
-  const of = oneLine(p.of);
+/** The quantity that a price is told of: that of its target, and where it moves none the one that its factor multiplies. */
+export const pricedOf = (p: Price, plan: Plan): string => plan.targets.find((t) => t.id === p.target)?.quantity ?? p.of;
+
+/** What leaving an effect out costs, of a quantity in words. */
+export function priceText(p: Price, what: string): string {
+  const of = oneLine(what);
   if (p.signChange === true) return `changes the sign of ${of}`;
   if (p.value !== undefined) return `${printNumber({ value: p.value, unit: p.unit ?? '1', difference: true, digits: 2 })} of ${of}`;
   if (p.relative === undefined) return '';

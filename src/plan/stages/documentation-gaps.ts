@@ -1,5 +1,5 @@
 import { lines, type Ground } from '../ground.ts';
-import { called, effectsOf, listed } from '../say.ts';
+import { aFlow, called, effectsOf, listed } from '../say.ts';
 import type { Line } from '../types.ts';
 
 /** What the plan does not cover, said first and loudly. */
@@ -16,7 +16,7 @@ export function gapLines(on: Ground): Line[] {
     perhaps.length > 0 && `Not judged, and it cannot be told whether they act: ${listed(perhaps.map((e) => e.id))}.`,
     choices.length > 0 && `Choices that the plan does not make yet: ${listed(choices.map((c) => c.title.toLowerCase()))}.`,
     open.length > 0 && `No estimate, no price and no budget for ${listed(open.map((t) => t.quantity))}: decisions above do not look at ${open.length === 1 ? 'it' : 'them'}.`,
-    scaleless.length > 0 && `Without ${listed(scaleless.map((id) => (id === 'regimeGroup' ? 'the group of its regime' : `a ${id} scale`)))} most numbers of a ${flow.title.toLowerCase()} are missing.`,
+    scaleless.length > 0 && `Without ${listed(scaleless.map((id) => (id === 'regimeGroup' ? 'the group of its regime' : `a ${id} scale`)))} most numbers of ${aFlow(on)} are missing.`,
     on.ladder.length === 0 && `No known answer is on record for this ${flow.title.toLowerCase()} as it stands: the ladder is empty.`,
   );
 }

@@ -1,6 +1,6 @@
 import { stepOf } from '../../workings/index.ts';
 import { lines, type Ground, type StageResult } from '../ground.ts';
-import { authors, listed, nameOf, percent } from '../say.ts';
+import { aFlow, authors, listed, nameOf, percent } from '../say.ts';
 import { targetSpreads } from '../target-spread.ts';
 import type { Check, Line, Table } from '../types.ts';
 import { inputLines, inputTables } from './question-inputs.ts';
@@ -47,7 +47,7 @@ function aboutTarget(on: Ground, t: Target): Line[] {
 
 function lackOf(on: Ground, t: Target): string {
   if (t.nearest !== undefined) return t.nearest.length === 0 ? 'no quantity has that name' : `no quantity has that name; near to it ${t.nearest.length === 1 ? 'is' : 'are'} ${listed(t.nearest)}`;
-  return `its inputs are not complete in a ${on.assembled.flow.title.toLowerCase()} as the case stands`;
+  return `its inputs are not complete in ${aFlow(on)} as the case stands`;
 }
 
 /** Whether a run is needed for one target, by number. */
