@@ -3,6 +3,7 @@ import os
 
 import yaml
 
+from names_of_records import also_named
 from solution_bounds import bounded
 
 FOLDER = os.path.join(os.path.dirname(os.path.abspath(__file__)), '..', '..', 'materials')
@@ -19,7 +20,8 @@ def scalar(x):
         return repr(int(x)) if x == int(x) and abs(x) < 1e15 else repr(x)
     if isinstance(x, int):
         return str(x)
-    plain = all(c in BARE for c in x) and x[:1] not in '-%*' and not x.endswith(' ')
+    # A number of the CAS registry may look like a date.
+    plain = all(c in BARE for c in x) and set(x) - set('0123456789-') and x[:1] not in '-%*' and not x.endswith(' ')
     return x if plain else "'" + x.replace("'", "''") + "'"
 
 
@@ -58,13 +60,14 @@ def entry(e, indent):
     return lines
 
 
-HEAD = ('name', 'formula', 'aliases', 'kind', 'phases', 'acrossMelting', 'takes', 'typical', 'saturated', 'molarMass', 'about', 'marks')
+HEAD = ('name', 'formula', 'aliases', 'sharedNames', 'kind', 'phases', 'acrossMelting', 'takes', 'typical', 'saturated', 'molarMass', 'about', 'marks')
 
 
 def write(record, made_by):
     """Writes one record; `made_by` names the script and its data in the first line."""
     record = bounded(record)
     lines = [f'# Made by scripts/materials/{made_by}']
+    record = also_named(record)
     if record['name'] in ACROSS:
         record = {**record, 'acrossMelting': ACROSS[record['name']]}
     for key in HEAD:

@@ -22,7 +22,7 @@ function editDistance(a: string, b: string): number {
 }
 
 /**
- * The valid name a misspelt one most likely meant, at most two edits away, one in words of up to four letters.
+ * The valid name a misspelt one most likely meant, at most two edits away, one in words of up to five letters.
  *
  * @param name   what was written
  * @param valid  the names that exist
@@ -31,7 +31,7 @@ function editDistance(a: string, b: string): number {
 export function nearestName(name: string, valid: readonly string[]): string | undefined {
   const low = name.slice(0, 200).toLowerCase();
   let best: string | undefined;
-  const most = low.length > 4 ? 2 : 1;
+  const most = low.length > 5 ? 2 : 1;
   let least = Number.POSITIVE_INFINITY;
   for (const candidate of valid) {
     if (Math.abs(candidate.length - low.length) > 2) continue;

@@ -5,7 +5,8 @@ import { compileMaterials, openSource } from './compile.ts';
 import { materialOf, type Material } from './material.ts';
 import { collectionOf, plainName } from './names.ts';
 import { openStored } from './stored.ts';
-import type { Collection, MaterialRecord } from './record.ts';
+import type { Side } from './models/point.ts';
+import type { Collection, MaterialRecord, NamedMaterial } from './record.ts';
 
 let shipped: Collection | undefined;
 
@@ -47,7 +48,7 @@ export function materialRecords(collection: Collection = shippedMaterials()): Ma
 const ready = new WeakMap<Collection, Map<string, Material>>();
 
 /**
- * A material by name, alias or formula; case, spaces and hyphens do not matter.
+ * A material by name, alias or formula; case, spaces and hyphens do not matter, but for formulas that differ in case alone.
  *
  * @param name        what was written, such as `water`, `H2O`, `steam`
  * @param collection  where to look; the shipped records unless given
@@ -57,10 +58,11 @@ const ready = new WeakMap<Collection, Map<string, Material>>();
 export function loadMaterial(name: string, collection: Collection = shippedMaterials()): Material {
   const known = ready.get(collection) ?? new Map<string, Material>();
   ready.set(collection, known);
-  const key = plainName(name);
+  const exact = name.normalize('NFKC').trim();
+  const key = collection.find(exact) === undefined ? plainName(name) : exact;
   const before = known.get(key);
   if (before !== undefined) return before;
-  const found = collection.find(key);
+  const found = collection.find(key) ?? collection.find(key.replaceAll(' ', '')) ?? withPhaseWord(key, collection);
   if (found?.among !== undefined) throw ambiguous(name, found.among);
   const record = found && collection.record(found.id);
   if (found === undefined || record === undefined) throw unknown(name, key, collection);
@@ -83,11 +85,32 @@ function ambiguous(name: string, candidates: Iterable<string>): Problem {
   return new Problem({ code: 'ambiguous-material', message: `"${name.slice(0, 60)}" does not say which material is meant`, expected: `one of ${[...candidates].sort().join(', ')}` });
 }
 
+/** A name with the phase in a word of its own: nitrogen gas, liquid benzene. */
+function withPhaseWord(key: string, collection: Collection): NamedMaterial | undefined {
+  const [, before, bare = '', after] = /^(gaseous |liquid )?(.+?)( gas| vapou?r)?$/.exec(key) ?? [];
+  if (before === undefined && after === undefined) return undefined;
+  const asked: Side = before === 'liquid ' ? 'liquid' : 'vapour';
+  const found = collection.find(bare);
+  return found === undefined || found.among !== undefined || collection.record(found.id)?.phases.includes(asked) !== true ? undefined : { ...found, asked };
+}
+
+/** A grade behind a name: its last word holds a digit. */
+const grade = /^(| .*\d\S*)$/;
+
+/** Names of the materials that a word may mean: what ends with it (carbon steel), or else the records that have it in their own name. */
+function candidatesOf(key: string, collection: Collection): Set<string> {
+  const entries = key.length < 3 ? [] : Object.entries(collection.names);
+  const ending = entries.filter(([other]) => {
+    const at = ` ${other}`.lastIndexOf(` ${key}`);
+    return at >= 0 && grade.test(other.slice(at + key.length));
+  });
+  const having = ending.length > 0 ? ending : entries.filter(([, { name }]) => ` ${plainName(name)} `.includes(` ${key} `));
+  return new Set(having.map(([, { name }]) => name));
+}
+
 function unknown(name: string, key: string, collection: Collection): Problem {
   const shown = name.slice(0, 60);
-  const entries = Object.entries(collection.names);
-  const candidates = new Set<string>();
-  if (key.length >= 3) for (const [other, named] of entries) if (` ${other} `.includes(` ${key} `)) candidates.add(named.name);
+  const candidates = candidatesOf(key, collection);
   if (candidates.size > 1) return ambiguous(name, candidates);
   const bare = key.replace(/[ ,]*\d[\d.,]*( %| percent)?( \w+)?$/, ''); // a name with its share or grade behind it
   const nearest = nearestName(key, Object.keys(collection.names)) ?? [...candidates].map(plainName)[0] ?? (collection.find(bare) === undefined ? undefined : bare);

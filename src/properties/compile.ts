@@ -7,7 +7,7 @@ import { collectionOf, findIn, namesOf, plainName, type Named } from './names.ts
 import { dangerMarks, propertyUnits, type Band, type Collection, type Entry, type MaterialRecord, type PropertyId } from './record.ts';
 import { yamlReader, type YamlReader } from './yaml-reader.ts';
 
-const headKeys = ['name', 'formula', 'aliases', 'phaseNames', 'kind', 'phases', 'acrossMelting', 'marks', 'takes', 'typical', 'saturated', 'molarMass', 'flashPoint', 'critical', 'triplePoint', 'about', 'thermodynamics'];
+const headKeys = ['name', 'formula', 'aliases', 'sharedNames', 'phaseNames', 'kind', 'phases', 'acrossMelting', 'marks', 'takes', 'typical', 'saturated', 'molarMass', 'flashPoint', 'critical', 'triplePoint', 'about', 'thermodynamics'];
 const derived: readonly string[] = ['kinematicViscosity', 'thermalDiffusivity', 'prandtl', 'molarMass'];
 const recorded = Object.keys(propertyUnits).filter((id) => !derived.includes(id));
 
@@ -91,6 +91,7 @@ function namedOf(raw: Raw): Named {
     name: String(raw['name']),
     ...(typeof raw['formula'] === 'string' ? { formula: raw['formula'] } : {}),
     aliases: Array.isArray(raw['aliases']) ? (raw['aliases'] as unknown[]).map(String) : [],
+    ...(Array.isArray(raw['sharedNames']) ? { sharedNames: (raw['sharedNames'] as unknown[]).map(String) } : {}),
     phaseNames: (isMap(raw['phaseNames']) ? raw['phaseNames'] : {}) as { [name: string]: Side },
   };
 }

@@ -97,6 +97,8 @@ export interface MaterialRecord {
   readonly formula?: string;
   readonly aliases: readonly string[];
   /** Names that ask for one phase, such as steam. */
+  /** Names that other records claim as well: the answer to one of them names all. */
+  readonly sharedNames?: readonly string[];
   readonly phaseNames: { readonly [name: string]: Side };
   readonly kind: 'fluid' | 'solid';
   /** Phases that the record covers. */
@@ -129,13 +131,13 @@ export interface NamedMaterial {
   readonly name: string;
   /** The phase the name asks for, such as that of steam. */
   readonly asked?: Side;
-  /** Several materials share this formula: their names. */
+  /** Several materials share this formula or name: their names. */
   readonly among?: readonly string[];
 }
 
 /** Records, each read when it is asked for. */
 export interface Collection {
-  /** Names, aliases and formulas in lower case with single spaces. */
+  /** Names, aliases and formulas in lower case with single spaces; formulas that differ in case alone as they are written, too. */
   readonly names: { readonly [plainName: string]: NamedMaterial };
   /** What one plain name stands for; the same as in `names`, without all the others. */
   find(plainName: string): NamedMaterial | undefined;

@@ -44,6 +44,8 @@ describe('names', () => {
   it.each([
     ['water', 'water'], ['H2O', 'water'], ['Steam', 'water'], ['dry-air', 'air'], ['N2', 'nitrogen'], ['CO2', 'carbon dioxide'], ['aluminum', 'aluminium'], ['diesel-like oil', 'light oil'], ['moist air', 'humid air'],
     ['C3H6O', 'acetone'], ['propanone', 'acetone'], ['67-64-1', 'acetone'], ['R134a', 'R-134a'], ['r-717', 'ammonia'], ['R744', 'carbon dioxide'], ['R-290', 'propane'], ['R600a', 'isobutane'], ['isopropanol', '2-propanol'], ['LH2', 'parahydrogen'], ['LOX', 'oxygen'], ['D2O', 'heavy water'], ['NO', 'nitric oxide'], ['He', 'helium'], ['H2S', 'hydrogen sulphide'],
+    ['CO', 'carbon monoxide'], ['Co', 'cobalt'], ['CO₂', 'carbon dioxide'], ['H₂O', 'water'], ['r 134 a', 'R-134a'], ['Pb-Bi', 'lead-bismuth eutectic'], ['nitrogen gas', 'nitrogen'], ['gaseous benzene', 'benzene'], ['compressed air', 'air'], ['tap water', 'water'],
+    ['7732-18-5', 'water'], ['7439-97-6', 'mercury'], ['7440-50-8', 'copper'], ['7440-23-5', 'sodium'], ['7664-93-9', 'sulphuric acid'],
   ])('%s is %s', (name, expected) => expect(loadMaterial(name).name).toBe(expected));
 
   it('names the nearest, or the candidates', () => {
@@ -56,6 +58,18 @@ describe('names', () => {
     expect(problemsOf(() => loadMaterial('aceton'))[0]).toMatchObject({ code: 'unknown-material', nearest: 'acetone' });
     expect(problemsOf(() => loadMaterial('C8H10'))[0]).toMatchObject({ code: 'ambiguous-material', expected: 'one of ethylbenzene, m-xylene, o-xylene, p-xylene' });
     expect(problemsOf(() => loadMaterial('unobtainium'))[0]?.expected).toMatch(/^one of the \d{3} materials that `runbrief material` lists/); // all the names would fill pages
+    for (const [name, among] of [
+      ['NaCl', ['rock salt', 'sodium chloride brine']], ['CaCl2', ['calcium chloride brine', 'calcium chloride hexahydrate']], ['xylenes', ['m-xylene', 'o-xylene', 'p-xylene']], ['heavy oil', ['heavy crude oil', 'heavy fuel oil']],
+      ['light lubricating oil', ['lubricating oil ISO VG 10', 'lubricating oil ISO VG 15', 'lubricating oil ISO VG 22', 'lubricating oil ISO VG 32']], ['heavy lubricating oil', ['lubricating oil ISO VG 220', 'lubricating oil ISO VG 320', 'lubricating oil ISO VG 460', 'lubricating oil ISO VG 680']],
+      ['co', ['carbon monoxide', 'cobalt']],
+    ] as const) expect(problemsOf(() => loadMaterial(name))[0]).toMatchObject({ code: 'ambiguous-material', expected: `one of ${among.join(', ')}` });
+    for (const [name, wanted, unwanted] of [['wood', 'spruce', 'methanol'], ['steel', 'carbon steel', 'Pall rings'], ['lubricating oil', 'engine oil', 'light oil'], ['lubricating oil', 'lubricating oil ISO VG 46', 'diesel']] as const) {
+      const { expected } = problemsOf(() => loadMaterial(name))[0] ?? {};
+      expect(expected).toContain(wanted);
+      expect(expected).not.toContain(unwanted);
+    }
+    for (const name of ['ozone', 'ceramic']) expect(JSON.stringify(problemsOf(() => loadMaterial(name)))).not.toMatch(/bone|Raschig/);
+    expect(problemsOf(() => loadMaterial('ozone'))[0]?.nearest).toBeUndefined();
     for (const name of ['__proto__', 'constructor', 'toString', '']) expect(problemsOf(() => loadMaterial(name))[0]?.code).toBe('unknown-material');
   });
 });
