@@ -8,6 +8,7 @@ import { meltingLine, type MeltingPiece } from './models/melting-line.ts';
 import { methaneConductivity, type MethaneConductivityConstants } from './models/methane-conductivity.ts';
 import { methanolViscosity, type MethanolViscosityConstants } from './models/methanol-viscosity.ts';
 import { perfectGasDensity, perfectGasSound } from './models/perfect-gas.ts';
+import * as ppds from './models/ppds.ts';
 import * as saturated from './models/saturated-laws.ts';
 import { viscosityOfDensity, type ViscosityOfDensityConstants } from './models/viscosity-of-density.ts';
 import type { Engine, PropertyModel, Sample } from './sample.ts';
@@ -138,5 +139,9 @@ export const fluidModels: { readonly [name: string]: PropertyModel } = {
   rackett: ofTemperature(['A', 'B', 'C', 'D', 'gives?'], saturated.rackett),
   'reduced-power': ofTemperature(['critical', 'A', 'terms', 'gives?'], saturated.reducedPower),
   'gas-powers': ofTemperature(['A', 'B', 'C', 'D', 'gives?'], saturated.gasPowers),
+  'ppds-2': ofTemperature(['low', 'high', 'scale', 'terms', 'gives?'], ppds.ppdsGasHeat),
+  'ppds-3': ofTemperature(['critical', 'terms', 'gives?'], ppds.ppdsGasConductivity),
+  'ppds-5': ofTemperature(['critical', 'A', 'B', 'C', 'gives?'], ppds.ppdsGasViscosity),
+  'ppds-17': ofTemperature(['critical', 'A', 'B', 'C', 'gives?'], ppds.ppdsLiquidDensity),
   'liquid-viscosity': ofTemperature(['A', 'B', 'C', 'D', 'E', 'gives?'], saturated.liquidViscosity),
 };

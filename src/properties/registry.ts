@@ -74,6 +74,7 @@ export const propertyModels: { readonly [name: string]: PropertyModel } = {
   'log-powers': ofTemperature(['terms', 'log?', 'gives?', 'argument?'], laws.logPowers),
   'critical-powers': ofTemperature(['critical', 'terms', 'base?', 'gives?'], laws.criticalPowers),
   sutherland: ofTemperature(['value', 'T0', 'S'], laws.sutherland),
+  andrade: ofTemperature(['A', 'B', 'gives?'], laws.andrade),
   vogel: ofTemperature(['A', 'B', 'C', 'gives?'], laws.vogel),
   table: ofTemperature(['rows', 'interpolate?', 'gives?', 'argument?'], laws.table),
   'reciprocal-polynomial': ofTemperature(['value', 'terms', 'origin?', 'gives?', 'argument?'], laws.reciprocalPolynomial),

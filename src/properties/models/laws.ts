@@ -61,6 +61,9 @@ export const sutherland = (c: { value: number; T0: number; S: number }) => (T: n
  */
 export const vogel = (c: Scaled & { A: number; B: number; C: number }) => (T: number): number => toSI(c, Math.exp(c.A + c.B / (T - c.C)));
 
+/** Andrade's law of liquid viscosity, y = A exp(B/T). @source Andrade, Phil. Mag. 17 (1934) 497 and 698 */
+export const andrade = (c: Scaled & { A: number; B: number }) => (T: number): number => toSI(c, c.A * Math.exp(c.B / T));
+
 /**
  * Kinematic viscosity of an oil between two known points, log10 log10 (nu + 0.7) = A - B log10 T with nu in mm^2/s.
  *
