@@ -66,7 +66,7 @@ export default class Material extends Base {
           return { material: material.name, curves: sampled.map(({ property, variable, x, y }) => ({ property, variable, x, y })) };
         }
         const within = readQuantity(flags.within, { unit: '1', kind: 'fraction', name: 'error' }).value;
-        const fits = sampled.filter(({ property }) => flags.fit !== 'sutherland' || flags.of !== undefined || property === 'viscosity' || property === 'thermalConductivity').map((one) => fitOf(one, flags.fit as (typeof fitKinds)[number], within));
+        const fits = sampled.filter(({ property }) => flags.of !== undefined || belongs(flags.fit as (typeof fitKinds)[number], property)).map((one) => fitOf(one, flags.fit as (typeof fitKinds)[number], within));
         this.say(fitsText(title, fits));
         if (fits.some(({ outcome }) => outcome === 'missed')) this.limitMissed();
         return fitsDocument(material.name, fits);
@@ -84,6 +84,9 @@ export default class Material extends Base {
     return materialDocument(sheet);
   }
 }
+
+/** Whether a form is one of the property: two of them are laws of transport. */
+const belongs = (kind: (typeof fitKinds)[number], property: PropertyId): boolean => property === 'viscosity' || kind !== 'vogel' && (kind !== 'sutherland' || property === 'thermalConductivity');
 
 const usual: readonly PropertyId[] = ['density', 'viscosity', 'thermalConductivity', 'specificHeatCapacity'];
 

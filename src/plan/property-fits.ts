@@ -1,6 +1,6 @@
 import type { Assembled } from '../assemble/index.ts';
 import { Problem } from '../problems/index.ts';
-import { fitOf, sampledOver, type Fit, type Material, type StateRange } from '../properties/index.ts';
+import { firstFitOf, sampledOver, type Fit, type Material, type StateRange } from '../properties/index.ts';
 import { lawProperties } from '../quantities/index.ts';
 
 /** The fluid of a case with the temperatures it takes, at its pressure and composition. */
@@ -29,7 +29,7 @@ const share = 1 / 3;
 const beyond = 0.1;
 
 /**
- * Functions of temperature ready to type in: the shortest polynomials whose error stays within a third of what the property is known to,
+ * Functions of temperature ready to type in: the shortest polynomials whose error stays within a third of what the property is known to, or where none does Vogel's law of a liquid's viscosity or straight pieces,
  * over the temperatures of the case and a tenth of their span beyond, or over them alone where a phase ends.
  *
  * @param assembled  the settled case
@@ -47,7 +47,7 @@ export function propertyFits(assembled: Assembled): { readonly fluid: string; re
     try {
       const sampled = sampledOver(fluid, { ...range, over: { of: 'temperature', from, to } }, ids);
       if (wide > 0 && sampled.some((s) => s.flags.length > 0)) continue;
-      return { fluid: fluid.name, from, to, fits: sampled.map((s) => fitOf(s, 'polynomial', Math.min(Math.max(share * s.uncertainty, 1e-5), 0.01))) };
+      return { fluid: fluid.name, from, to, fits: sampled.map((s) => firstFitOf(s, ['polynomial', 'vogel', 'piecewise'], Math.min(Math.max(share * s.uncertainty, 1e-5), 0.01))) };
     } catch (error) {
       // Beyond the end of a phase, or of the record.
       if (!(error instanceof Problem)) throw error;

@@ -1,7 +1,7 @@
 export { loadMaterial, materialNames, materialRecords, shippedMaterials, withMaterialsFrom } from './collection.ts';
 export { compileMaterial, compileMaterials } from './compile.ts';
 export { stateOf } from './complete-state.ts';
-export { type Fit, fitKinds, fitOf } from './fits/fit.ts';
+export { firstFitOf, type Fit, fitKinds, fitOf } from './fits/fit.ts';
 export { type Sampled, sampledOver } from './fits/sampled.ts';
 export { type Law, laws, type Laws } from './laws.ts';
 export type { Material } from './material.ts';

@@ -75,7 +75,7 @@ export function materialDocument(sheet: PropertySheet): object {
 const columns = (table: PropertyTable): readonly PropertyId[] => table.properties.filter((id) => id !== 'molarMass' && id !== 'enthalpy');
 
 /**
- * A property table as CSV: header cells `name [unit]`, numbers in SI with seven digits, empty where a property does not exist.
+ * A property table as CSV: header cells `name [unit]`, numbers in SI with seven digits, empty where a property does not exist; the last cell names the properties that are carried beyond their range.
  *
  * @param table  rows over a range
  * @returns      lines joined by newlines, without a last newline
@@ -83,8 +83,8 @@ const columns = (table: PropertyTable): readonly PropertyId[] => table.propertie
 export function materialCsv(table: PropertyTable): string {
   const ids = columns(table);
   const digits = (x: number | undefined): string => (x === undefined ? '' : String(Number(x.toPrecision(7))));
-  const head = ['temperature [K]', 'pressure [Pa]', 'phase', ...ids.map((id) => `${id} [${propertyUnits[id]}]`)];
-  return [head, ...table.rows.map((row) => [digits(row.state.temperature), digits(row.state.pressure), row.phase, ...ids.map((id) => digits(row.values[id]?.value))])].map((cells) => cells.join(',')).join('\n');
+  const head = ['temperature [K]', 'pressure [Pa]', 'phase', ...ids.map((id) => `${id} [${propertyUnits[id]}]`), 'beyond range'];
+  return [head, ...table.rows.map((row) => [digits(row.state.temperature), digits(row.state.pressure), row.phase, ...ids.map((id) => digits(row.values[id]?.value)), ids.filter((id) => row.values[id]?.withinRange === false).join(' ')])].map((cells) => cells.join(',')).join('\n');
 }
 
 const few: readonly PropertyId[] = ['density', 'viscosity', 'thermalConductivity', 'specificHeatCapacity', 'prandtl'];

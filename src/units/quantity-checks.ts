@@ -9,7 +9,8 @@ import type { Wanted, WantedUnit } from './wanted.ts';
 export function refuse(code: string, text: string, wanted: WantedUnit, says: string, side?: Side, nearest?: string): Problem {
   const length = side === undefined ? text.length : side.unit === '' ? side.length : side.unit.length;
   const at = side === undefined ? 0 : side.unit === '' ? side.at : side.unitAt;
-  return new Problem({ code, message: `"${text}" is not a ${wanted.name}: ${says}`, expected: `a ${wanted.name}, for example ${wanted.examples()}`, ...(nearest === undefined ? {} : { nearest }), at, length: Math.max(1, length) });
+  const named = `${/^[aeio]/i.test(wanted.name) ? 'an' : 'a'} ${wanted.name}`;
+  return new Problem({ code, message: `"${text}" is not ${named}: ${says}`, expected: `${named}, for example ${wanted.examples()}`, ...(nearest === undefined ? {} : { nearest }), at, length: Math.max(1, length) });
 }
 
 /** Refuses a unit or a word that does not fit what is wanted. */

@@ -80,6 +80,18 @@ describe('runbrief material', () => {
     for (const line of stdout.split('\n')) expect(line.length).toBeLessThanOrEqual(80);
   });
 
+  it('prints shares without a unit, and says where a table is beyond its range', async () => {
+    const fit = await runbrief(['material', 'ethylene glycol-water', '--over', '20 degC, 1 bar, composition 10 % .. 50 %', '--fit', 'polynomial', '--of', 'density,prandtl']);
+    expect(fit.stdout).toContain('x = composition as a plain number');
+    expect(fit.stdout).not.toMatch(/in 1\b|0\.5 1\b/);
+    const table = await runbrief(['material', 'copper', '--over', '20 degC .. 900 degC', '--table', '--points', '2']);
+    const [head, cold, hot] = table.stdout.trimEnd().split('\n').map((line) => line.split(',').at(-1));
+    expect(head).toBe('beyond range');
+    expect(cold).not.toContain('density');
+    expect(hot).toContain('density');
+    expect((await runbrief(['material', 'water', '--over', '20 degC .. 50 degC, 2 bar', '--fit', 'table', '--within', '5 K'])).stderr).toContain('is not an error');
+  });
+
   it('a fit that is not within what was asked ends with 4', async () => {
     const { code, stdout } = await runbrief(['material', 'engine oil', '--over', '20 degC .. 90 degC, 2 bar', '--fit', 'power', '--of', 'viscosity']);
     expect(code).toBe(4);

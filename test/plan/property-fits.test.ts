@@ -36,6 +36,12 @@ describe('properties as functions to type in', () => {
     expect(at(found, 'viscosity', 298.15) / 890.1e-6).toBeCloseTo(1, 2);
     expect(at(found, 'thermalConductivity', 298.15)).toBeCloseTo(0.6065, 3);
   });
+  it('where no polynomial holds, the first form that does', () => {
+    const found = fitsOf(line('90 degC', '10 degC').replace('material: water', 'material: engine oil'));
+    const viscosity = found.fits.find((f) => f.property === 'viscosity');
+    expect(viscosity?.outcome).toBe('met');
+    expect(['vogel', 'piecewise']).toContain(viscosity?.kind);
+  });
   it('near freezing the function ends where the liquid does', () => {
     const found = fitsOf(line('65 degC', '1 degC'));
     expect(found.from).toBeCloseTo(274.15, 6);

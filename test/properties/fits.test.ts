@@ -21,6 +21,15 @@ describe('fits recover what was put in', () => {
     expect(fit.outcome).toBe('met');
   });
 
+  it("Vogel's law, Andrade's with C = 0 among them", () => {
+    for (const C of [0, 137.546]) {
+      const fit = fitOf(made((T) => 1e-3 * Math.exp(-3.7188 + 578.919 / (T - C)), { phase: 'liquid' }), 'vogel', 1e-4);
+      expect(number(fit, 'C') - C).toBeLessThan(0.1);
+      expect(number(fit, 'B') / 578.919).toBeCloseTo(1, 2);
+      expect(fit.outcome).toBe('met');
+    }
+  });
+
   it('a power law', () => {
     const fit = fitOf(made((T) => 2e-5 * (T / 300) ** 0.7), 'power', 1e-4);
     expect(number(fit, 'n')).toBeCloseTo(0.7, 5);
@@ -28,7 +37,7 @@ describe('fits recover what was put in', () => {
   });
 });
 
-describe.each(fitKinds.filter((kind) => kind !== 'sutherland' && kind !== 'power'))('%s', (kind) => {
+describe.each(fitKinds.filter((kind) => kind !== 'sutherland' && kind !== 'power' && kind !== 'vogel'))('%s', (kind) => {
   it.each(['water', 'engine oil', 'copper', 'lubricating oil ISO VG 46'])('holds its error between the samples for %s', (name) => {
     const material = loadMaterial(name);
     for (const sampled of sampledOver(material, parseRange('20 degC .. 90 degC, 2 bar'), material.properties.filter((id) => ['density', 'viscosity', 'thermalConductivity', 'specificHeatCapacity'].includes(id)))) {
@@ -67,6 +76,7 @@ describe('limits and refusals', () => {
     ['not-covered', () => sampledOver(loadMaterial('water'), parseRange('-20 degC .. 20 degC, 2 bar'), ['density'])],
     ['no-range', () => sampledOver(loadMaterial('water'), parseRange('20 degC, 2 bar'), ['density'])],
     ['no-such-fit', () => fitOf(made(() => 1, { property: 'density' }), 'sutherland', 0.01)],
+    ['no-such-fit', () => fitOf(made(() => 1), 'vogel', 0.01)],
     ['no-such-fit', () => fitOf(made((T) => T - 300), 'polynomial', 0.01)],
     ['wrong-within', () => fitOf(made(() => 1), 'polynomial', 0)],
   ] as const)('%s', (code, task) => expect(codeOf(task)).toBe(code));

@@ -4,7 +4,7 @@ import type { Sampled } from './sampled.ts';
 import * as shapes from './shapes.ts';
 
 /** Forms that programs ask for. */
-export const fitKinds = ['polynomial', 'table', 'power', 'sutherland', 'piecewise'] as const;
+export const fitKinds = ['polynomial', 'table', 'power', 'sutherland', 'vogel', 'piecewise'] as const;
 export type FitKind = (typeof fitKinds)[number];
 
 /** A function ready to be typed in. */
@@ -47,6 +47,7 @@ export function fitOf(of: Sampled, kind: FitKind, within: number): Fit {
   const refuse = (message: string, expected: string): Problem => new Problem({ code: 'no-such-fit', message, expected });
   if (y.some((one) => one === 0 || Math.sign(one) !== Math.sign(y[0] as number))) throw refuse(`${of.property} changes sign in the range, so that no relative error exists`, 'a range on one side of the change');
   if (kind === 'sutherland' && (of.variable !== 'temperature' || of.phase === 'liquid' || of.phase === 'solid' || (of.property !== 'viscosity' && of.property !== 'thermalConductivity'))) throw refuse(`Sutherland's law is one of the viscosity and conductivity of gases over temperature, not of ${of.property} of a ${of.phase} over ${of.variable}`, 'polynomial, power, piecewise or table');
+  if (kind === 'vogel' && (of.variable !== 'temperature' || of.phase !== 'liquid' || (of.property !== 'viscosity' && of.property !== 'kinematicViscosity'))) throw refuse(`Vogel's law is one of the viscosity of liquids over temperature, not of ${of.property} of a ${of.phase} over ${of.variable}`, 'polynomial, power, piecewise or table');
   if (kind === 'power' && !((x[0] as number) > 0)) throw refuse('a power law needs a range above zero', 'a range that starts above zero');
   const errorOf = (shape: shapes.Shape): readonly [number, number] => x.reduce<readonly [number, number]>((worst, xi, i) => {
     const off = Math.abs(shape.at(xi) / (y[i] as number) - 1);
@@ -70,6 +71,32 @@ export function fitOf(of: Sampled, kind: FitKind, within: number): Fit {
   };
 }
 
+/**
+ * The first form that holds.
+ *
+ * @param of      the property along its range
+ * @param kinds   forms in the order of liking; one that cannot belong to the property is passed over
+ * @param within  largest relative error, > 0
+ * @returns       the function; where none is within, the nearest
+ * @throws        {Problem} no-such-fit where no form belongs to the property; wrong-within
+ */
+export function firstFitOf(of: Sampled, kinds: readonly FitKind[], within: number): Fit {
+  let nearest: Fit | undefined;
+  let refused: unknown;
+  for (const kind of kinds) {
+    try {
+      const fit = fitOf(of, kind, within);
+      if (fit.outcome === 'met') return fit;
+      if (nearest === undefined || fit.largestError < nearest.largestError) nearest = fit;
+    } catch (error) {
+      if (!(error instanceof Problem) || error.list[0]?.code !== 'no-such-fit') throw error;
+      refused = error;
+    }
+  }
+  if (nearest === undefined) throw refused;
+  return nearest;
+}
+
 /** Members of a form, the shortest first; each with as few digits as leave its error alone. */
 function* candidates(kind: FitKind, x: readonly number[], y: readonly number[], within: number): Generator<shapes.Shape> {
   const digits = [6, 8, 10, 12, 15];
@@ -77,7 +104,7 @@ function* candidates(kind: FitKind, x: readonly number[], y: readonly number[], 
   if (kind === 'polynomial') for (let degree = 0; degree <= 6; degree++) for (const n of digits) yield shapes.polynomial(x, y, degree, n);
   else if (kind === 'table') for (const steps of [1, 2, 4, 5, 8, 10, 16, 20, 32, 40, 80]) yield shapes.table(x, y, steps, few);
   else if (kind === 'piecewise') yield shapes.piecewise(x, y, within * 0.98, few);
-  else for (const n of digits) yield kind === 'power' ? shapes.power(x, y, n) : shapes.sutherland(x, y, n);
+  else for (const n of digits) yield kind === 'power' ? shapes.power(x, y, n) : kind === 'vogel' ? shapes.vogel(x, y, n) : shapes.sutherland(x, y, n);
 }
 
 function courseOf(y: readonly number[]): Fit['course'] {

@@ -21,10 +21,10 @@ export function power(x: readonly number[], y: readonly number[], digits: number
   const x0 = rounded(x[0] as number, 12);
   const logs = x.map((xi) => Math.log(xi / x0));
   const values = y.map((yi) => Math.log(Math.abs(yi)));
+  const [start, slope] = straight(logs, values);
+  const n = rounded(slope, digits);
   const mean = (list: readonly number[]): number => list.reduce((a, b) => a + b, 0) / list.length;
-  const [mx, my] = [mean(logs), mean(values)];
-  const n = rounded(logs.reduce((s, l, i) => s + (l - mx) * ((values[i] as number) - my), 0) / logs.reduce((s, l) => s + (l - mx) ** 2, 0), digits);
-  const y0 = rounded(Math.sign(y[0] as number) * Math.exp(my - n * mx), digits);
+  const y0 = rounded(Math.sign(y[0] as number) * Math.exp(start + (slope - n) * mean(logs)), digits);
   return { formula: 'y = y0 (x/x0)^n', coefficients: [{ name: 'y0', value: y0 }, { name: 'x0', value: x0 }, { name: 'n', value: n }], at: (at) => y0 * (at / x0) ** n };
 }
 
@@ -36,6 +36,36 @@ export function sutherland(x: readonly number[], y: readonly number[], digits: n
   const S = rounded((line[0] as number) / (line[1] as number), digits);
   const y0 = rounded(T0 ** 1.5 / ((line[1] as number) * (T0 + S)), digits);
   return { formula: 'y = y0 (x/x0)^1.5 (x0 + S)/(x + S)', coefficients: [{ name: 'y0', value: y0 }, { name: 'x0', value: T0 }, { name: 'S', value: S }], at: (T) => (y0 * (T / T0) ** 1.5 * (T0 + S)) / (T + S) };
+}
+
+/** Vogel's law, ln y = A + B/(T - C): a straight line in 1/(T - C), C sought where the largest departure from it is least. */
+export function vogel(x: readonly number[], y: readonly number[], digits: number): Shape {
+  const logs = y.map((yi) => Math.log(yi));
+  const line = (C: number): { readonly A: number; readonly B: number; readonly off: number } => {
+    const u = x.map((T) => 1 / (T - C));
+    const [A, B] = straight(u, logs);
+    return { A, B, off: u.reduce((worst, ui, i) => Math.max(worst, Math.abs(A + B * ui - (logs[i] as number))), 0) };
+  };
+  // Golden section: C = 0 is Andrade's law, and the pole stays below the range.
+  const ratio = (Math.sqrt(5) - 1) / 2;
+  let [low, high] = [0, 0.95 * (x[0] as number)];
+  for (let i = 0; i < 60; i++) {
+    const [a, b] = [high - ratio * (high - low), low + ratio * (high - low)];
+    if (line(a).off < line(b).off) high = b;
+    else low = a;
+  }
+  const C = rounded((low + high) / 2, digits);
+  const { A, B } = line(C);
+  const [a, b] = [rounded(A, digits), rounded(B, digits)];
+  return { formula: 'y = exp(A + B/(x - C))', coefficients: [{ name: 'A', value: a }, { name: 'B', value: b }, { name: 'C', value: C }], at: (T) => Math.exp(a + b / (T - C)) };
+}
+
+/** Least squares of a straight line: its value at zero and its slope. */
+function straight(u: readonly number[], v: readonly number[]): readonly [number, number] {
+  const mean = (list: readonly number[]): number => list.reduce((a, b) => a + b, 0) / list.length;
+  const [mu, mv] = [mean(u), mean(v)];
+  const slope = u.reduce((sum, ui, i) => sum + (ui - mu) * ((v[i] as number) - mv), 0) / u.reduce((sum, ui) => sum + (ui - mu) ** 2, 0);
+  return [mv - slope * mu, slope];
 }
 
 /** Straight lines between rows. */
