@@ -16,8 +16,9 @@ MIXED = 'thin gases of the records of its components, departure from them by Soa
 # the largest difference from the reference equations of 27 gases and mixtures to 10 MPa; the first is that of the record where it states one.
 REAL = {
     'density': [(0.01, 0.5), (0.03, 1.2), (0.06, 2), (0.1, 3), (0.2, 3.5), (0.4, 5), (0.8, 6), (None, 16)],
-    'specificHeatCapacity': [(0.01, 1), (0.03, 2), (0.06, 2.5), (0.15, 3.5), (0.2, 4), (0.8, 9), (None, 20)],
-    'thermalExpansion': [(0.01, 1), (0.03, 2.3), (0.1, 6), (0.15, 7), (0.8, 10), (None, 35)],
+    # These two by what they are along the dew line, where the cubic equation is poorest.
+    'specificHeatCapacity': [(0.01, 1), (0.03, 2), (0.06, 5), (0.1, 10), (0.15, 12.5), (0.2, 15), (0.4, 23), (None, 28)],
+    'thermalExpansion': [(0.01, 1), (0.03, 2.3), (0.06, 6), (0.1, 8), (0.15, 10), (0.2, 12), (0.4, 18), (0.8, 22), (None, 35)],
     'speedOfSound': [(0.01, 1), (0.03, 1.2), (0.1, 3), (0.2, 3.5), (0.4, 5), (0.6, 6.5), (0.8, 12), (None, 28)],
     'enthalpy': [(0.2, 2), (0.8, 4), (None, 10)],
     'isentropicExponent': [(0.01, 1.5), (0.03, 3), (0.1, 6), (0.2, 8), (0.4, 12), (0.8, 25), (None, 60)],

@@ -135,6 +135,20 @@ for share in (0.002, 0.01, 0.03):
             wet = {**{name: round(x * (1 - share), 6) for name, x in AIR.items()}, 'water': share}
             add(named(wet), 'saturationTemperature', 450, p, dew, 'rp-1485')
 
+# Along the dew line, 1 K to 40 K above it.
+for shares in ({'methane': 0.21, 'ethane': 0.79}, {'carbon dioxide': 0.5, 'hydrogen sulphide': 0.5}, {'carbon dioxide': 0.7, 'hydrogen sulphide': 0.3}, {'propane': 0.8, 'methane': 0.2}):
+    state = CP.AbstractState('HEOS', '&'.join(NAMES[name] for name in shares))
+    state.set_mole_fractions(list(shares.values()))
+    for p in (7.8e5, 1.7e6, 2.66e6, 4.45e6):
+        state.unspecify_phase()
+        state.update(CP.PQ_INPUTS, p, 1)
+        dew = state.T()
+        state.specify_phase(CP.iphase_gas)
+        for above in (1, 6, 15, 40) if p < 4e6 else (6, 15, 40):  # the cubic equation has its dew line within about 5 K
+            state.update(CP.PT_INPUTS, p, dew + above)
+            for prop, value in (('density', state.rhomass()), ('specificHeatCapacity', state.cpmass()), ('speedOfSound', state.speed_sound()), ('thermalExpansion', state.isobaric_expansion_coefficient())):
+                add(named(shares), prop, dew + above, p, value, 'heos')
+
 with open(os.path.join(HERE, 'gas-mixtures.csv'), 'w', newline='') as out:
     writer = csv.writer(out, lineterminator='\n')
     writer.writerow(['material', 'property', 'T [K]', 'p [Pa]', 'share', 'value [SI]', 'reference'])
