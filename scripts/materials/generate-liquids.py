@@ -238,7 +238,7 @@ FOODS = 'usual composition, USDA food composition tables, from memory'
 
 # Sugar in solution stores more heat when warm than the polynomials for dry carbohydrate say.
 def sweet(T, uncertainty, most='50 %'):
-    return {'model': 'mixture-polynomial', 'range': {'T': K(*T), 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', most]}, 'uncertainty': uncertainty,
+    return {'model': 'mixture-polynomial', 'range': {'T': K(*T), 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', most]}, 'uncertainty': [{'T': ['300 K', '363.15 K'], 'composition': ['30 %', most], 'value': '11 %'}, {'value': uncertainty}],
             'source': 'Hugot, Handbook of Cane Sugar Engineering, 4187 (1 - x (0.6 - 0.0018 t)), from memory; Choi and Okos (1986) give 10 % less at 363 K and 48 %',
             'constants': {'origin': 273.15, 'share': 0, 'gives': 'J/(kg K)', 'rows': [[4187, -2512.2], [0, 7.5366]]}}
 

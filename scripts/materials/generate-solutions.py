@@ -67,9 +67,10 @@ DISPUTED = {
     'lithium chloride brine': {'viscosity': ('15 %', 'at 274 K and 23.5 % 4.11 mPa s, Conde (2004) 4.83')},
     'ethanol-water': {'thermalConductivity': ('7 %', 'at 276 K and 59 % 0.280 W/(m K), the rule of Filippov (1955) 0.262')},
     'glycerol-water': {'thermalConductivity': ('8 %', 'at 312 K and 45 % 0.450 W/(m K), the rule of Filippov (1955) 0.418')},
-    'methanol-water': {'viscosity': ('12 %', 'at 266 K and 21 % 4.42 mPa s, VDI Heat Atlas 4.98'), 'thermalConductivity': ('10 %', 'at 233 K and 44 % 0.346 W/(m K), VDI Heat Atlas 0.380'), 'specificHeatCapacity': ('12 %', 'at 233 K and 44 % 3077 J/(kg K), VDI Heat Atlas 3471')},
+    'methanol-water': {'meltingTemperature': ('1.2 %', 'at 15.4 % 262.3 K, VDI Heat Atlas 259.3'), 'viscosity': ('12 %', 'at 266 K and 21 % 4.42 mPa s, VDI Heat Atlas 4.98'), 'thermalConductivity': ('10 %', 'at 233 K and 44 % 0.346 W/(m K), VDI Heat Atlas 0.380'), 'specificHeatCapacity': ('12 %', 'at 233 K and 44 % 3077 J/(kg K), VDI Heat Atlas 3471')},
     'caustic soda': {'density': ('1.6 %', 'at 373 K and 49 % 1481 kg/m^3, Olsson et al. (1997) 1459'), 'specificHeatCapacity': ('5.5 %', 'at 277 K and 10 % 3720 J/(kg K), Olsson et al. (1997) 3927'), 'viscosity': ('11 %', 'at 286 K and 12 % 2.65 mPa s, Alexandrov (2004) 2.39')},
-    'calcium chloride brine': {'viscosity': ('16 %', 'at 373 K and 10 % 0.404 mPa s, Conde (2004) 0.348')},
+    'magnesium chloride brine': {'meltingTemperature': ('1.4 %', 'at 20 % 244.4 K, VDI Heat Atlas 241.3')},
+    'calcium chloride brine': {'meltingTemperature': ('1 %', 'at 17.1 % 259.4 K, VDI Heat Atlas 261.9'), 'viscosity': ('16 %', 'at 373 K and 10 % 0.404 mPa s, Conde (2004) 0.348')},
 }
 def ideal_vapour(mass, particles, xmax, uncertainty, notes, checks=()):
     return {'model': 'ideal-vapour-pressure', 'range': {'T': ['273.16 K', '433.15 K'], 'composition': ['0 %', f'{100 * xmax:g} %']}, 'uncertainty': uncertainty,
@@ -158,7 +159,7 @@ FINE = {'density': '0.3 %', 'viscosity': '4 %', 'specificHeatCapacity': '2 %', '
 COARSE = {'density': '1 %', 'viscosity': '10 %', 'specificHeatCapacity': '5 %', 'thermalConductivity': '8 %'}
 # The rule of Riedel holds for salts; for strong lyes it rises where conductivity stays, for phosphoric acid it falls through zero.
 # Expansion of caustic soda from the densities at 0 and 40 degC and three shares, a parabola in the share.
-LYE = {'model': 'mixture-polynomial', 'range': {'T': ['273.15 K', '323.15 K'], 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', '50 %']}, 'uncertainty': '20 %',
+LYE = {'model': 'mixture-polynomial', 'range': {'T': ['273.15 K', '323.15 K'], 'p': ['0 Pa', '5 MPa'], 'composition': ['0 %', '50 %']}, 'uncertainty': [{'composition': ['15 %', '50 %'], 'value': '28 %'}, {'value': '40 %'}],
        'source': "densities of Perry's Chemical Engineers' Handbook, 8th ed. (2007), at 0 and 40 degC (20 %: 1229.6 and 1207.9 kg/m^3, 50 %: 1540.0 and 1510.9 kg/m^3), from memory",
        'constants': {'origin': 293.15, 'share': 0, 'gives': '1/K', 'rows': [[2.07e-4, 1.619e-3, -2.147e-3]]}}
 ROBINSON = 'osmotic coefficient of Robinson and Stokes, Electrolyte Solutions, 2nd ed. (1959), from memory'

@@ -76,6 +76,20 @@ function sectionOf(record: MaterialRecord, mine: readonly Held[]): string[] {
   ];
 }
 
+/** Where a heading stands in the page, as readers of Markdown name it. */
+const anchor = (name: string): string => name.toLowerCase().replaceAll(/[^\p{L}\p{N} -]/gu, '').replaceAll(' ', '-');
+
+/** One link for each first letter, to the first material of it. */
+function letters(records: readonly MaterialRecord[]): string {
+  const first = new Map<string, string>();
+  for (const { name } of records) {
+    const letter = (/\p{L}/u.exec(name)?.[0] ?? name[0] ?? '').toUpperCase();
+    const sorts = /^\d/.test(name) ? '0-9' : letter;
+    if (!first.has(sorts)) first.set(sorts, name);
+  }
+  return [...first].map(([letter, name]) => `[${letter}](#${anchor(name)})`).join(' ');
+}
+
 /** So many of so many, as one table. */
 function summary(records: readonly MaterialRecord[], all: readonly Held[]): string[] {
   const counts = new Map<string, { states: number; works: number; printed: number }>();
@@ -117,13 +131,15 @@ export function comparedPage(all: readonly Held[]): string {
     '',
     'Made by test/properties/compared.test.ts from the values it holds the records to; do not edit.',
     '',
+    letters(records),
+    '',
     ...summary(records, all),
     '',
     'A property counts where a record gives it over temperatures or shares; a melting point or heat of fusion is a single value. Enthalpy, compressibility factor, isentropic exponent and saturation temperature follow from the others. Temperatures and shares stand as compared of declared. The declared uncertainty is that of the state that differs most.',
     '',
     '- CoolProp 8.0.0, iapws 1.5.5 and the values printed by authors: the equation that the record names, evaluated by another; a difference is one of evaluation, or of the choices told.',
     `- Perry (Perry's Chemical Engineers' Handbook, 8th ed.), VDI (VDI Heat Atlas, 2nd ed.), Jasper, Zabransky, TRC: correlations of other works, as chemicals 1.5.2 carries them, for the saturated liquid from 0.45 to 0.85 of the critical temperature and the dilute gas. They are allowed their own uncertainty beside ours: ${Object.entries(ofHandbooks).map(([property, share]) => `${propertyNames[property as PropertyId]} ${percent(share)}`).join(', ')}.`,
-    '- Declared uncertainties of pure fluids follow the statements of the authors of the equations, rounded up, from memory; for handbook correlations they are no less than the difference of two handbooks.',
+    '- Declared uncertainties of pure fluids follow the statements of the authors of the equations, rounded up, from memory, and are wider where two handbooks lie farther off than that, or the only one (scripts/materials/doubts-of-fluids.yaml); for handbook correlations they are no less than the difference of two handbooks.',
     '- Longer names are those of the checks in the records; each check says how close it is held.',
     ...worksNamed().map(([name, what]) => `- ${name}: ${what}`),
     '',

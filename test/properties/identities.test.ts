@@ -74,7 +74,7 @@ describe('laws', () => {
       // A liquid alone is asked below its boiling line.
       const boils = material.phases.includes('vapour') ? undefined : record.properties['vapourPressure']?.[0]?.ranges[0]?.temperature?.[1];
       const temperature = Math.min(melting === undefined ? 310 : material.kind === 'solid' ? Math.min(310, melting - 5) : Math.max(310, melting + 20), (boils ?? Infinity) - 20);
-      const state = { temperature, pressure: boils === undefined ? 101325 : 2e6, humidity: 0.4, composition: record.typical ?? 0.4 };
+      const state = { temperature, pressure: boils === undefined ? 101325 : 2e6, humidity: 0.4, composition: record.typical ?? 0.1 };
       if (record.name === 'gas mixture') continue; // it has no components of its own
       const found = laws(material, state);
       for (const id of material.properties) {
