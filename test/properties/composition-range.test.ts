@@ -17,8 +17,8 @@ const messageOf = (what: () => unknown): string => {
   return '';
 };
 
-// Values of other works than those of the records, from memory unless it says otherwise: Perry's Chemical Engineers' Handbook, 8th ed. (densities, heat capacities, conductivity);
-// Rhodes and Barbour, Ind. Eng. Chem. 15 (1923) 850; NBS Circular 440 (1942), syrups.
+// Printed values, from memory. Of the acid, densities, heat capacities and the conductivity stand in the tables that the record is fitted to (Perry's Chemical Engineers' Handbook, 8th ed.):
+// they hold the fit and its temperature slope, not the tables. The viscosities of syrup are of another work (NBS Circular 440, 1942) than the record.
 const strong: readonly (readonly [string, string, PropertyId, number])[] = [
   ['sulphuric acid', '25 degC, 1 bar, composition 98 % mass', 'density', 1831],
   ['sulphuric acid', '20 degC, 1 bar, composition 93 % mass', 'density', 1827.9],
