@@ -33,9 +33,9 @@ export interface TakenState {
   readonly flags: readonly string[];
 }
 
-/** Properties of saturation and of the substance: they hold at any phase, and end where their line ends. */
 /** Properties that may be zero, as at the critical point, or negative. */
 const eitherSign: readonly string[] = ['thermalExpansion', 'enthalpy', 'electricalConductivity', 'emissivity', 'surfaceTension', 'latentHeat'];
+/** Properties of saturation and of the substance: they hold at any phase, and end where their line ends. */
 const ofSubstance: readonly string[] = ['vapourPressure', 'vapourPressureCeiling', 'saturationTemperature', 'boilingFloor', 'freezingCeiling', 'latentHeat', 'surfaceTension', 'meltingTemperature', 'glassTransitionTemperature', 'fusionHeat', 'emissivity'];
 
 /**

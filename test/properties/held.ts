@@ -120,11 +120,17 @@ interface LibraryRow {
 }
 
 /** Water, air and its parts, humid air: independent.json, made by independent.py, which names the equations. */
+export const ofIndependent = (): { readonly libraries: Readonly<Record<string, string>>; readonly rows: readonly LibraryRow[] } => JSON.parse(text('./independent.json')) as ReturnType<typeof ofIndependent>;
+
+/** The state of a row. */
+export const stateOf = ({ T, p, humidity, composition }: LibraryRow): State => ({ temperature: T, pressure: p, ...(humidity === undefined ? {} : { humidity }), ...(composition === undefined ? {} : { composition }) });
+
 function ofLibraries(): Held[] {
-  const { libraries, rows } = JSON.parse(text('./independent.json')) as { libraries: Readonly<Record<string, string>>; rows: readonly LibraryRow[] };
-  return rows.flatMap(({ library, material, T, p, humidity, composition, values }) =>
-    Object.entries(values).flatMap(([property, expected]) => {
-      const state: State = { temperature: T, pressure: p, ...(humidity === undefined ? {} : { humidity }), ...(composition === undefined ? {} : { composition }) };
+  const { libraries, rows } = ofIndependent();
+  return rows.flatMap((row) =>
+    Object.entries(row.values).flatMap(([property, expected]) => {
+      const { library, material } = row;
+      const state = stateOf(row);
       // A rounding of the ninth digit is allowed beside the uncertainty.
       return held({ material, property: property as PropertyId, reference: `${library} ${libraries[library]}`, by: 'program', state, expected, allow: (declared) => declared + 1e-8 }) ?? [];
     }),

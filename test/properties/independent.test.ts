@@ -1,18 +1,9 @@
-import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { loadMaterial, propertyAt, type PropertyId } from '../../src/properties/index.ts';
+import { ofIndependent, stateOf } from './held.ts';
 
-interface Row {
-  readonly library: string;
-  readonly material: string;
-  readonly T: number;
-  readonly p: number;
-  readonly humidity?: number;
-  readonly composition?: number;
-  readonly values: Readonly<Record<string, number>>;
-}
 // Made by independent.py beside this file: two other libraries, reference equations named there.
-const { rows } = JSON.parse(readFileSync(new URL('./independent.json', import.meta.url), 'utf8')) as { rows: Row[] };
+const { rows } = ofIndependent();
 
 const names = [...new Set(rows.map((row) => row.material))];
 
@@ -26,7 +17,7 @@ describe.each(names)('%s against independent libraries', (name) => {
     for (const row of mine) {
       const expected = row.values[property];
       if (expected === undefined) continue;
-      const found = propertyAt(loadMaterial(name), property as PropertyId, { temperature: row.T, pressure: row.p, ...(row.humidity === undefined ? {} : { humidity: row.humidity }), ...(row.composition === undefined ? {} : { composition: row.composition }) });
+      const found = propertyAt(loadMaterial(name), property as PropertyId, stateOf(row));
       if (found === undefined || !found.withinRange) continue;
       count++;
       const off = Math.abs(found.value / expected - 1);
